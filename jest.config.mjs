@@ -1,0 +1,35 @@
+/** Two projects: everything that runs on Node (server), and the dashboard under jsdom (client). */
+const conditions = ['underseam-source'];
+
+export default {
+  projects: [
+    {
+      displayName: 'server',
+      testEnvironment: 'node',
+      testEnvironmentOptions: { customExportConditions: [...conditions, 'node', 'node-addons'] },
+      roots: ['<rootDir>/shared', '<rootDir>/db', '<rootDir>/server', '<rootDir>/seeds', '<rootDir>/test'],
+      testMatch: ['**/*.spec.ts'],
+      testPathIgnorePatterns: ['/test/journeys/'],
+      transform: {
+        '^.+\\.ts$': ['@swc/jest', { jsc: { target: 'es2022', parser: { syntax: 'typescript' } } }],
+      },
+    },
+    {
+      displayName: 'client',
+      preset: 'jest-preset-angular',
+      roots: ['<rootDir>/projects/dashboard/src'],
+      testEnvironmentOptions: { customExportConditions: [...conditions, 'browser'] },
+      setupFilesAfterEnv: ['<rootDir>/projects/dashboard/src/app/testing/setup.ts'],
+      transform: {
+        '^.+\\.(ts|mjs|js|html|svg)$': [
+          'jest-preset-angular',
+          {
+            tsconfig: '<rootDir>/projects/dashboard/tsconfig.spec.json',
+            stringifyContentPathRegex: '\\.(html|svg)$',
+          },
+        ],
+      },
+      transformIgnorePatterns: ['node_modules/(?!(.*\\.mjs$|@angular|d3-|internmap|@mdi))'],
+    },
+  ],
+};
