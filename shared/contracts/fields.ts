@@ -30,7 +30,10 @@ export const reference = z
       .min(1, 'a reference has 1 to 64 characters')
       .refine((text) => [...text].length <= 64, 'a reference has 1 to 64 characters')
       .refine((text) => text === text.trim(), 'a reference has no space at its edges')
-      .refine((text) => !CONTROL_OR_LONE_SURROGATE.test(text), 'a reference has no control characters'),
+      .refine(
+        (text) => !CONTROL_OR_LONE_SURROGATE.test(text),
+        'a reference has no control characters',
+      ),
   );
 
 /** Code of a product, branch or region. */
@@ -62,7 +65,10 @@ export const rate = z
   .number()
   .min(0)
   .max(1)
-  .refine((value) => Math.abs(value * 1e6 - Math.round(value * 1e6)) < 1e-9 * Math.max(1, value * 1e6), 'at most 6 decimals');
+  .refine(
+    (value) => Math.abs(value * 1e6 - Math.round(value * 1e6)) < 1e-9 * Math.max(1, value * 1e6),
+    'at most 6 decimals',
+  );
 export const shareInput = z.number().min(0).lt(1);
 
 export const noParams = z.strictObject({});
@@ -119,8 +125,14 @@ export type FieldProblem = { path: string; message: string };
 
 /** Access lists by role (rule 23). */
 export const EVERYONE = { roles: ROLES, pushKey: false } as const;
-export const RECORDERS = { roles: ['recorder', 'site_manager', 'head_office'], pushKey: false } as const;
-export const SENDERS = { roles: ['recorder', 'site_manager', 'head_office'], pushKey: true } as const;
+export const RECORDERS = {
+  roles: ['recorder', 'site_manager', 'head_office'],
+  pushKey: false,
+} as const;
+export const SENDERS = {
+  roles: ['recorder', 'site_manager', 'head_office'],
+  pushKey: true,
+} as const;
 export const MANAGERS = { roles: ['site_manager', 'head_office'], pushKey: false } as const;
 export const READERS = {
   roles: ['site_manager', 'regional_lead', 'head_office'],

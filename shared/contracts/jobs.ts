@@ -104,7 +104,10 @@ export const jobContent = z.strictObject({
     .max(100)
     .optional(),
   actual: z.strictObject({ stages: stageMinutes }),
-  products: z.array(z.strictObject({ product: code, ml: millilitres })).max(100).optional(),
+  products: z
+    .array(z.strictObject({ product: code, ml: millilitres }))
+    .max(100)
+    .optional(),
   consumables: z.array(consumable).max(100).optional(),
   boughtInCents: cents.optional(),
   findings: z.array(finding).max(200).optional(),
@@ -265,7 +268,8 @@ export const billJob = defineEndpoint({
   method: 'put',
   path: '/api/branches/:branch/jobs/:jobRef/invoice',
   topic: 'Jobs',
-  summary: 'Write the bill of a finished car; makes a new revision that differs in the invoice only.',
+  summary:
+    'Write the bill of a finished car; makes a new revision that differs in the invoice only.',
   access: MANAGERS,
   scope: 'branches',
   params: jobParams,
@@ -275,13 +279,7 @@ export const billJob = defineEndpoint({
   statuses: [200],
 });
 
-export const JOB_SORTS = [
-  'completed',
-  'margin',
-  'difference',
-  'overrun',
-  'waiting',
-] as const;
+export const JOB_SORTS = ['completed', 'margin', 'difference', 'overrun', 'waiting'] as const;
 
 /** One row of a list of jobs (rule 84). Money is absent for recorders. */
 export const jobRow = z.strictObject({

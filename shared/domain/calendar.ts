@@ -66,7 +66,10 @@ export function daysBetween(from: string, to: string): number {
 export function addMonths(date: string, months: number): string {
   const index = Number(date.slice(0, 4)) * 12 + Number(date.slice(5, 7)) - 1 + months;
   const month = `${pad(Math.floor(index / 12), 4)}-${pad((index % 12) + 1, 2)}`;
-  const next = Number(index % 12) === 11 ? `${pad(Math.floor(index / 12) + 1, 4)}-01` : `${month.slice(0, 5)}${pad((index % 12) + 2, 2)}`;
+  const next =
+    Number(index % 12) === 11
+      ? `${pad(Math.floor(index / 12) + 1, 4)}-01`
+      : `${month.slice(0, 5)}${pad((index % 12) + 2, 2)}`;
   const last = Number(addDays(`${next}-01`, -1).slice(8, 10));
   return `${month}-${pad(Math.min(Number(date.slice(8, 10)), last), 2)}`;
 }

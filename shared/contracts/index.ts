@@ -1,0 +1,31 @@
+import type { Endpoint } from './endpoint';
+import * as auth from './auth';
+import * as bookings from './bookings';
+import * as claims from './claims';
+import * as csvExports from './exports';
+import * as jobs from './jobs';
+import * as margin from './margin';
+import * as overrun from './overrun';
+import * as people from './people';
+import * as setUp from './set-up';
+import * as system from './system';
+import * as weeks from './weeks';
+
+/** Every call of the API: what is mounted, documented and walked by the tests. */
+export const endpoints: readonly Endpoint[] = [
+  auth,
+  people,
+  setUp,
+  jobs,
+  claims,
+  bookings,
+  margin,
+  overrun,
+  weeks,
+  csvExports,
+  system,
+].flatMap((topic) => Object.values(topic).filter(isEndpoint));
+
+function isEndpoint(value: unknown): value is Endpoint {
+  return typeof value === 'object' && value !== null && 'method' in value && 'access' in value;
+}
