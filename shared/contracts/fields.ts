@@ -1,6 +1,7 @@
 import * as z from 'zod';
 import { BODY_TYPES, ROLES } from '#shared/domain/vocabulary';
 import { isDate, isMonth } from '#shared/domain/calendar';
+import { hasSixDecimals } from '#shared/domain/money';
 
 /** Fields that several contracts share, with the limits of rule 55. */
 
@@ -61,14 +62,7 @@ export const name = line(120).refine((text) => text.trim().length > 0, 'must not
 /** Free text of several lines. */
 export const prose = z.string().max(4000, 'at most 4000 characters');
 /** A fraction with at most six decimals, 0 … 1 (fee rates, rule 10). */
-export const rate = z
-  .number()
-  .min(0)
-  .max(1)
-  .refine(
-    (value) => Math.abs(value * 1e6 - Math.round(value * 1e6)) < 1e-9 * Math.max(1, value * 1e6),
-    'at most 6 decimals',
-  );
+export const rate = z.number().min(0).max(1).refine(hasSixDecimals, 'at most 6 decimals');
 export const shareInput = z.number().min(0).lt(1);
 
 export const noParams = z.strictObject({});
