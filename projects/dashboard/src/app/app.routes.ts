@@ -1,0 +1,72 @@
+import { inject } from '@angular/core';
+import type { Routes } from '@angular/router';
+import { homeOf } from './core/session/home';
+import { forRoles, signedIn } from './core/session/role-guard';
+import { Session } from './core/session/session';
+
+const readers = forRoles('site_manager', 'regional_lead', 'head_office');
+
+/** Every page, each loaded when it is opened. */
+export const routes: Routes = [
+  {
+    path: 'sign-in',
+    title: 'Sign in',
+    loadChildren: () => import('./features/sign-in/sign-in.routes'),
+  },
+  {
+    path: 'welcome',
+    title: 'Set a password',
+    loadChildren: () => import('./features/welcome/welcome.routes'),
+  },
+  {
+    path: '',
+    canActivate: [signedIn],
+    loadComponent: () => import('./core/shell/shell').then((file) => file.Shell),
+    children: [
+      { path: '', pathMatch: 'full', redirectTo: () => homeOf(inject(Session).role()) },
+      {
+        path: 'this-week',
+        title: 'This week',
+        canActivate: [readers],
+        loadChildren: () => import('./features/this-week/this-week.routes'),
+      },
+      {
+        path: 'overruns',
+        title: 'Overruns',
+        canActivate: [readers],
+        loadChildren: () => import('./features/overruns/overruns.routes'),
+      },
+      {
+        path: 'jobs',
+        title: 'Jobs',
+        loadChildren: () => import('./features/jobs/jobs.routes'),
+      },
+      {
+        path: 'jobs/:branch/:jobRef',
+        title: 'Job sheet',
+        loadChildren: () => import('./features/job-sheet/job-sheet.routes'),
+      },
+      {
+        path: 'how-it-is-counted',
+        title: 'How it is counted',
+        loadChildren: () => import('./features/how-it-is-counted/how-it-is-counted.routes'),
+      },
+      {
+        path: 'account',
+        title: 'Account',
+        loadChildren: () => import('./features/account/account.routes'),
+      },
+      {
+        path: 'mailbox',
+        title: 'Mailbox',
+        canActivate: [forRoles('head_office')],
+        loadChildren: () => import('./features/mailbox/mailbox.routes'),
+      },
+      {
+        path: '**',
+        title: 'Not found',
+        loadComponent: () => import('./core/shell/not-found').then((file) => file.NotFound),
+      },
+    ],
+  },
+];

@@ -1,0 +1,77 @@
+import { HttpClient, HttpContext, type HttpResponse } from '@angular/common/http';
+import { inject, Injectable } from '@angular/core';
+import { map, type Observable } from 'rxjs';
+import type * as z from 'zod';
+import type { Endpoint, OutOf, ParamsOf, QueryOf } from '#shared/contracts/endpoint';
+import { NEEDS_TOKEN } from './needs-token';
+import { readingOf, type Reading } from './reading';
+import { requestUrl } from './request-url';
+
+type Needed<Name extends string, Value> =
+  Record<string, never> extends Value
+    ? { readonly [K in Name]?: Value }
+    : { readonly [K in Name]: Value };
+type BodyInput<E extends Endpoint> = E['body'] extends z.ZodType
+  ? { readonly body: z.input<E['body']> }
+  : { readonly body?: undefined };
+
+/** What a call is made with, as its contract asks. */
+export type RequestOf<E extends Endpoint> = Needed<'params', ParamsOf<E>> &
+  BodyInput<E> & {
+    readonly query?: Partial<QueryOf<E>>;
+    /** For example `{ 'If-Match': etag }`. */
+    readonly headers?: Readonly<Record<string, string>>;
+  };
+
+/** What came back. */
+export interface Answer<T> {
+  readonly body: T;
+  readonly etag: string | undefined;
+  readonly status: number;
+}
+
+/** The one way from a page to the server: a contract in, its typed answer out. */
+@Injectable({ providedIn: 'root' })
+export class Api {
+  private readonly http = inject(HttpClient);
+
+  /** Makes the call on subscription; errors are `HttpErrorResponse`, see `describeProblem`. */
+  call<E extends Endpoint>(endpoint: E, request: RequestOf<E>): Observable<Answer<OutOf<E>>> {
+    const { params, query, body, headers } = request as LooseRequest;
+    return this.http
+      .request(endpoint.method, requestUrl(endpoint.path, params, query), {
+        body,
+        headers,
+        context: new HttpContext().set(NEEDS_TOKEN, endpoint.access !== 'public'),
+        observe: 'response',
+        responseType: endpoint.out === 'csv' || endpoint.out === 'html' ? 'text' : 'json',
+      } as { observe: 'response'; responseType: 'json' })
+      .pipe(map((response) => answerOf<E>(response)));
+  }
+
+  /**
+   * Keeps a call answered for as long as the page lives: made again whenever `request` changes, not made while it is
+   * `undefined`. Call it in an injection context.
+   */
+  read<E extends Endpoint>(
+    endpoint: E,
+    request: () => RequestOf<E> | undefined,
+  ): Reading<OutOf<E>> {
+    return readingOf(request, (asked) => this.call(endpoint, asked));
+  }
+}
+
+interface LooseRequest {
+  readonly params?: Readonly<Record<string, unknown>>;
+  readonly query?: Readonly<Record<string, unknown>>;
+  readonly body?: unknown;
+  readonly headers?: Record<string, string>;
+}
+
+function answerOf<E extends Endpoint>(response: HttpResponse<unknown>): Answer<OutOf<E>> {
+  return {
+    body: (response.body ?? undefined) as OutOf<E>,
+    etag: response.headers.get('ETag') ?? undefined,
+    status: response.status,
+  };
+}

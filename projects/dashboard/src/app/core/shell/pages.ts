@@ -1,0 +1,18 @@
+import type { Role } from '#shared/domain/vocabulary';
+
+/** A page named in the header. */
+export interface Page {
+  readonly path: string;
+  readonly name: string;
+  /** Roles that may open it. */
+  readonly roles: readonly Role[];
+}
+
+const READERS: readonly Role[] = ['site_manager', 'regional_lead', 'head_office'];
+
+/** The pages there are, in the order in which they are read. */
+export const PAGES: readonly Page[] = [
+  { path: '/this-week', name: 'This week', roles: READERS },
+  { path: '/overruns', name: 'Overruns', roles: READERS },
+  { path: '/jobs', name: 'Jobs', roles: [...READERS, 'recorder'] },
+];

@@ -1,0 +1,4 @@
+import type { Routes } from '@angular/router';
+
+const routes: Routes = [];
+export default routes;
