@@ -80,7 +80,10 @@ export async function openDatabase(file: string): Promise<Connection> {
 
 /** Opens a further, read-only connection to a database that `openDatabase` has opened. */
 export function openReader(file: string): Connection {
-  const connection = open(() => new BetterSqlite3(file, { readonly: true, fileMustExist: true }), file);
+  const connection = open(
+    () => new BetterSqlite3(file, { readonly: true, fileMustExist: true }),
+    file,
+  );
   connection.driver.pragma('cache_size = -65536');
   connection.driver.pragma('mmap_size = 1073741824');
   return connection;

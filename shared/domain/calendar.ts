@@ -126,14 +126,22 @@ export function ageBand(years: number): AgeBand {
   return AGE_BANDS[Math.min(4, Math.floor(Math.max(0, years) / 5))] as AgeBand;
 }
 
+const formats = new Map<string, Intl.DateTimeFormat>();
+
 /** The local date of an instant in an IANA time zone. */
 export function localDate(instant: Date, timeZone: string): string {
-  return new Intl.DateTimeFormat('en-CA', {
-    timeZone,
-    year: 'numeric',
-    month: '2-digit',
-    day: '2-digit',
-  }).format(instant);
+  let format = formats.get(timeZone);
+  if (!format) {
+    // Making a formatter costs more than a thousand uses of it.
+    format = new Intl.DateTimeFormat('en-CA', {
+      timeZone,
+      year: 'numeric',
+      month: '2-digit',
+      day: '2-digit',
+    });
+    formats.set(timeZone, format);
+  }
+  return format.format(instant);
 }
 
 function pad(value: number, width: number): string {

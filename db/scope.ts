@@ -1,0 +1,105 @@
+import type { Role } from '#shared/domain/vocabulary';
+
+/** A branch as scope knows it. */
+export interface ScopedBranch {
+  readonly id: number;
+  readonly code: string;
+  readonly name: string;
+  readonly region: string;
+  readonly timeZone: string;
+}
+
+/** What a person was given: head office everything, a lead regions, the others branches. */
+export interface Grant {
+  readonly role: Role;
+  readonly branchIds: readonly number[];
+  readonly regionCodes: readonly string[];
+}
+
+/**
+ * The branches whose rows a caller may see. It can be made from a grant and narrowed by what was asked for, never widened;
+ * its constructor is private so that no other code can make one.
+ */
+export class Scope {
+  private constructor(
+    /** Sorted by code. */
+    readonly branches: readonly ScopedBranch[],
+  ) {}
+
+  /** No branch at all. */
+  static readonly nothing = new Scope([]);
+
+  /** Everything a grant allows, out of all branches. */
+  static ofGrant(all: readonly ScopedBranch[], grant: Grant): Scope {
+    return new Scope(sorted(all.filter((branch) => allows(grant, branch))));
+  }
+
+  /** The one branch of a push key. */
+  static ofPushKey(all: readonly ScopedBranch[], branchId: number): Scope {
+    return new Scope(all.filter((branch) => branch.id === branchId));
+  }
+
+  /** Allowed ∩ requested: repeats of one filter are OR, branch and region filters intersect (rule 22). */
+  narrow(asked: { region?: readonly string[]; branch?: readonly string[] }): Scope {
+    return new Scope(
+      this.branches.filter(
+        (branch) =>
+          (!asked.region || asked.region.includes(branch.region)) &&
+          (!asked.branch || asked.branch.includes(branch.code)),
+      ),
+    );
+  }
+
+  /** The branch of a code, or `undefined` when it lies outside or does not exist. */
+  branch(code: string): ScopedBranch | undefined {
+    return this.branches.find((branch) => branch.code === code);
+  }
+
+  /** Codes of the branches and their regions, sorted, as an answer echoes them. */
+  echo(): { regions: string[]; branches: string[] } {
+    return {
+      regions: [...new Set(this.branches.map((branch) => branch.region))].sort(),
+      branches: this.branches.map((branch) => branch.code),
+    };
+  }
+
+  /** The branch ids as the one value bound into every scoped statement. */
+  get idsJson(): string {
+    return JSON.stringify(this.branches.map((branch) => branch.id));
+  }
+
+  /** A plain value that crosses into a worker. */
+  pack(): PackedScope {
+    return {
+      branches: this.branches.map((branch) => ({ ...branch })),
+    } as unknown as PackedScope;
+  }
+
+  /** The scope that was packed; only for the worker at the other end. */
+  static unpack(packed: PackedScope): Scope {
+    return new Scope(packed.branches);
+  }
+}
+
+declare const packed: unique symbol;
+/** Branded, so that only `pack` makes one. */
+export interface PackedScope {
+  readonly [packed]: true;
+  readonly branches: readonly ScopedBranch[];
+}
+
+function allows(grant: Grant, branch: ScopedBranch): boolean {
+  switch (grant.role) {
+    case 'head_office':
+      return true;
+    case 'regional_lead':
+      return grant.regionCodes.includes(branch.region);
+    case 'site_manager':
+    case 'recorder':
+      return grant.branchIds.includes(branch.id);
+  }
+}
+
+function sorted(branches: readonly ScopedBranch[]): ScopedBranch[] {
+  return [...branches].sort((a, b) => (a.code < b.code ? -1 : 1));
+}

@@ -1,0 +1,87 @@
+import type { Knex } from 'knex';
+import { sql, type Connection, type Query } from './database';
+import type { Scope } from './scope';
+import { GENERATION_TABLES, HANGING_TABLES, SCOPED_TABLES, type ScopedTable } from './tables';
+
+const IN_SCOPE = 'in (select value from json_each(?))';
+const VISIBLE =
+  'gen_from <= (select generation from network) and gen_to > (select generation from network)';
+
+/** A statement that reads rows of a branch past the scope. Never shown to a caller: it is a defect of ours. */
+export class UnscopedRead extends Error {}
+
+/**
+ * The only reader of branches' rows that a request gets: bound to one scope for its life. `table` gives a derived table that
+ * holds the rows in scope, so that no later condition can widen it; every statement is checked before it runs.
+ */
+export class ScopedDb {
+  private readonly checked = new Set<string>();
+
+  constructor(
+    private readonly connection: Connection,
+    readonly scope: Scope,
+  ) {}
+
+  /** The rows of a table in scope (and, of derived rows, those visible now), as `select … from (…) as <alias>`. */
+  table(name: ScopedTable, alias: string = name): Knex.QueryBuilder {
+    return sql.from(this.derived(name, alias));
+  }
+
+  /** The same rows to join to another table of this reader. */
+  derived(name: ScopedTable, alias: string = name): Knex.Raw {
+    return sql.raw(`${derivedText(name)} as ??`, [this.scope.idsJson, alias]);
+  }
+
+  all<Row>(query: Query): Row[] {
+    this.check(query);
+    return this.connection.all<Row>(query);
+  }
+
+  first<Row>(query: Query): Row | undefined {
+    this.check(query);
+    return this.connection.first<Row>(query);
+  }
+
+  /** Rows as arrays of column values, for large reads. */
+  rows(query: Query): unknown[][] {
+    const { sql: text, bindings } = this.check(query);
+    return this.connection.driver
+      .prepare(text)
+      .raw()
+      .all(...(bindings as unknown[])) as unknown[][];
+  }
+
+  /** Runs several reads on one unchanging state of the database. */
+  snapshot<T>(read: () => T): T {
+    return this.connection.driver.transaction(read)();
+  }
+
+  private check(query: Query): { sql: string; bindings: readonly unknown[] } {
+    const native = query.toSQL().toNative();
+    if (!this.checked.has(native.sql)) {
+      assertScoped(native.sql);
+      this.checked.add(native.sql);
+    }
+    return native;
+  }
+}
+
+/** Throws when a statement names a scoped table outside the derived table that narrows it. */
+export function assertScoped(text: string): void {
+  let rest = text;
+  for (const table of SCOPED_TABLES) rest = rest.replaceAll(derivedText(table), '');
+  for (const table of SCOPED_TABLES) {
+    if (new RegExp(`\\b(from|join)\\s+[\`"]?${table}[\`"]?(?![\\w])`, 'i').test(rest)) {
+      throw new UnscopedRead(`a statement reads ${table} outside its scope`);
+    }
+  }
+  const hanging = HANGING_TABLES.find((table) =>
+    new RegExp(`\\bfrom\\s+[\`"]?${table}\\b`, 'i').test(rest),
+  );
+  if (hanging) throw new UnscopedRead(`a statement reads ${hanging} without joining it to its job`);
+}
+
+function derivedText(name: ScopedTable): string {
+  const visible = GENERATION_TABLES.includes(name) ? ` and ${VISIBLE}` : '';
+  return `(select * from ${name} where branch_id ${IN_SCOPE}${visible})`;
+}

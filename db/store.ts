@@ -1,0 +1,53 @@
+import { mkdirSync } from 'node:fs';
+import { join } from 'node:path';
+import { DatabaseRefused, openDatabase, openReader, type Connection } from './database';
+import { NetworkState } from './network-state';
+import type { Scope } from './scope';
+import { ScopedDb } from './scoped-db';
+import { UnscopedDb } from './unscoped-db';
+import { WriteQueue } from './write-queue';
+
+/** The data folder opened: one writing connection behind its queue, one reading connection, and what is kept in memory. */
+export class Store {
+  readonly queue: WriteQueue;
+  readonly state: NetworkState;
+  /** For network-wide rows; writes with it only inside `queue.write`. */
+  readonly unscoped: UnscopedDb;
+
+  private constructor(
+    readonly file: string,
+    /** Only for `BranchWriter` and its like in `db/`. */
+    readonly writing: Connection,
+    private readonly reading: Connection,
+  ) {
+    this.state = new NetworkState(writing);
+    this.queue = new WriteQueue(writing, () => this.state.reload());
+    this.unscoped = new UnscopedDb(writing);
+  }
+
+  /** Opens (and on first use makes) the data folder's database. Throws `DatabaseRefused` with one clear sentence. */
+  static async open(folder: string): Promise<Store> {
+    try {
+      mkdirSync(folder, { recursive: true });
+    } catch {
+      throw new DatabaseRefused(
+        `The data folder ${folder} cannot be made or written; set UNDERSEAM_DATA to a folder that can.`,
+      );
+    }
+    const file = join(folder, 'underseam.sqlite');
+    const writing = await openDatabase(file);
+    return new Store(file, writing, openReader(file));
+  }
+
+  /** A reader bound to a scope. */
+  scoped(scope: Scope): ScopedDb {
+    return new ScopedDb(this.reading, scope);
+  }
+
+  close(): void {
+    this.queue.close();
+    this.reading.close();
+    this.writing.driver.pragma('optimize');
+    this.writing.close();
+  }
+}

@@ -1,0 +1,72 @@
+import type { Connection } from './database';
+
+interface Waiting {
+  work: () => unknown;
+  resolve: (value: unknown) => void;
+  reject: (error: unknown) => void;
+}
+
+/**
+ * The one way to write. Work that waits in the same turn of the event loop shares one transaction and one durable commit;
+ * each piece has a savepoint of its own, so that one that throws takes nothing of the others with it. A promise settles
+ * after the commit: what was acknowledged is on disk.
+ */
+export class WriteQueue {
+  private waiting: Waiting[] = [];
+  private scheduled = false;
+  private closed = false;
+
+  constructor(
+    private readonly connection: Connection,
+    /** Called when a commit failed, so that what is kept in memory is read again. */
+    private readonly onLost: () => void = () => undefined,
+  ) {}
+
+  /** Runs `work` (synchronous, on the writing connection) in the next commit and returns its value once that is durable. */
+  write<T>(work: () => T): Promise<T> {
+    if (this.closed) return Promise.reject(new Error('the database is closing'));
+    return new Promise<T>((resolve, reject) => {
+      this.waiting.push({ work, resolve: resolve as (value: unknown) => void, reject });
+      if (this.scheduled) return;
+      this.scheduled = true;
+      setImmediate(() => this.commitWaiting());
+    });
+  }
+
+  /** Commits what waits and takes no more. */
+  close(): void {
+    this.commitWaiting();
+    this.closed = true;
+  }
+
+  private commitWaiting(): void {
+    const batch = this.waiting;
+    this.waiting = [];
+    this.scheduled = false;
+    if (batch.length === 0) return;
+    const settle: (() => void)[] = [];
+    try {
+      this.connection.prepare('begin immediate').run();
+      for (const { work, resolve, reject } of batch) {
+        this.connection.prepare('savepoint piece').run();
+        try {
+          const value = work();
+          this.connection.prepare('release piece').run();
+          settle.push(() => resolve(value));
+        } catch (error) {
+          this.connection.prepare('rollback to piece').run();
+          this.connection.prepare('release piece').run();
+          settle.push(() => reject(error));
+        }
+      }
+      this.connection.prepare('commit').run();
+    } catch (error) {
+      // A full disk or a lost file: nothing of the batch is kept, and everybody who waits is told.
+      if (this.connection.driver.inTransaction) this.connection.prepare('rollback').run();
+      this.onLost();
+      for (const { reject } of batch) reject(error);
+      return;
+    }
+    for (const tell of settle) tell();
+  }
+}

@@ -1,0 +1,174 @@
+import type { Request, Response, Router } from 'express';
+import type * as z from 'zod';
+import type { Endpoint, Output } from '#shared/contracts/endpoint';
+import type { FieldProblem } from '#shared/contracts/fields';
+import { notFound, Refusal, refuseInput } from '#shared/domain/refusal';
+import { Scope, type ScopedBranch } from '#db/scope';
+import type { Authenticate, Caller } from '../auth/caller';
+import { readBody } from './read-body';
+import { joined, problemsOf } from './read-problems';
+
+/** Everything a handler is given; it never sees the request. */
+export interface Call<Params = unknown, Query = unknown, Body = unknown> {
+  params: Params;
+  query: Query;
+  body: Body;
+  /** The body as it came, for rules that look across fields. */
+  raw: unknown;
+  /** Present unless the call is public. */
+  caller: Caller | undefined;
+  /** What the caller may see; empty for a public call. */
+  scope: Scope;
+  /** The branch named in the path, when the path names one. */
+  branch: ScopedBranch | undefined;
+  ifMatch: string | undefined;
+  ifNoneMatch: string | undefined;
+  cookie: string | undefined;
+  address: string;
+  device: string;
+}
+
+/** What a handler gives back. `stream` writes an answer of its own and settles when it is done. */
+export interface Reply<Out> {
+  status?: number;
+  body?: Out;
+  headers?: Record<string, string>;
+  stream?: (response: Response) => Promise<void>;
+}
+
+type Parsed<T> = T extends z.ZodType ? z.output<T> : undefined;
+type Answer<O extends Output> = O extends z.ZodType
+  ? z.input<O>
+  : O extends 'nothing'
+    ? undefined
+    : string;
+
+export type Handler<
+  P extends z.ZodObject,
+  Q extends z.ZodObject,
+  B extends z.ZodType | null,
+  O extends Output,
+> = (
+  call: Call<z.output<P>, z.output<Q>, Parsed<B>>,
+) => Promise<Reply<Answer<O>>> | Reply<Answer<O>>;
+
+/** Rules over the raw body that are told together with the problems of shape (rule 57). */
+export type BodyRules = (
+  raw: unknown,
+  call: Pick<Call, 'caller' | 'scope' | 'branch'>,
+) => readonly FieldProblem[];
+
+export interface Mounting {
+  router: Router;
+  authenticate: Authenticate;
+  /** All branches there are, to make a scope from a grant. */
+  branches: () => readonly ScopedBranch[];
+  /** Every contract mounted, for the tests that walk them. */
+  mounted: Endpoint[];
+}
+
+/**
+ * The only way to register a route: authenticates, checks the role, makes the scope, resolves a branch named in the path,
+ * reads and parses the input, calls, and parses the output. The order of refusals is 401, 403, 404, 415, 413, 400, 422 (rule 82).
+ */
+export function mount<
+  P extends z.ZodObject,
+  Q extends z.ZodObject,
+  B extends z.ZodType | null,
+  O extends Output,
+>(
+  mounting: Mounting,
+  endpoint: Endpoint<P, Q, B, O>,
+  handler: Handler<P, Q, B, O>,
+  rules?: BodyRules,
+): void {
+  mounting.mounted.push(endpoint as unknown as Endpoint);
+  mounting.router[endpoint.method](endpoint.path, async (request: Request, response: Response) => {
+    const caller = endpoint.access === 'public' ? undefined : await mounting.authenticate(request);
+    if (caller) checkAccess(endpoint as unknown as Endpoint, caller);
+    const scope = caller ? scopeOf(caller, mounting.branches()) : Scope.nothing;
+    const code = request.params['branch'];
+    const branch = typeof code === 'string' ? scope.branch(code) : undefined;
+    if (code !== undefined && !branch) throw notFound();
+    const raw = endpoint.body
+      ? await readBody(request, response, endpoint.path.endsWith('/batch') ? 'batch' : 'single')
+      : undefined;
+    const context = { caller, scope, branch };
+    const input = parseInput(endpoint, request, raw, rules?.(raw, context) ?? []);
+    const reply = await handler({
+      ...input,
+      ...context,
+      raw,
+      ifMatch: header(request, 'if-match'),
+      ifNoneMatch: header(request, 'if-none-match'),
+      cookie: header(request, 'cookie'),
+      address: request.ip ?? 'unknown',
+      device: (header(request, 'user-agent') ?? '').slice(0, 200),
+    });
+    await send(endpoint.out, endpoint.statuses[0] ?? 200, reply, response);
+  });
+}
+
+function checkAccess(endpoint: Endpoint, caller: Caller): void {
+  if (endpoint.access === 'public') return;
+  const allowed =
+    caller.kind === 'key' ? endpoint.access.pushKey : endpoint.access.roles.includes(caller.role);
+  if (!allowed) {
+    throw new Refusal(
+      'forbidden',
+      caller.kind === 'key'
+        ? 'A push key may only send jobs, claims and bookings of its branch.'
+        : 'Your role does not have this call.',
+    );
+  }
+}
+
+function scopeOf(caller: Caller, branches: readonly ScopedBranch[]): Scope {
+  return caller.kind === 'key'
+    ? Scope.ofPushKey(branches, caller.branchId)
+    : Scope.ofGrant(branches, caller);
+}
+
+function parseInput<P extends z.ZodObject, Q extends z.ZodObject, B extends z.ZodType | null>(
+  endpoint: { params: P; query: Q; body: B },
+  request: Request,
+  raw: unknown,
+  broken: readonly FieldProblem[],
+): { params: z.output<P>; query: z.output<Q>; body: Parsed<B> } {
+  const params = endpoint.params.safeParse(request.params);
+  const query = endpoint.query.safeParse(request.query);
+  const body = endpoint.body?.safeParse(raw);
+  const problems = joined(
+    params.success ? [] : problemsOf(params.error),
+    query.success ? [] : problemsOf(query.error, '/query'),
+    !body || body.success ? [] : problemsOf(body.error),
+    broken,
+  );
+  if (!params.success || !query.success || (body && !body.success) || problems.length > 0) {
+    throw refuseInput(problems);
+  }
+  return { params: params.data, query: query.data, body: body?.data as Parsed<B> };
+}
+
+async function send(
+  out: Output,
+  usual: number,
+  reply: Reply<unknown>,
+  response: Response,
+): Promise<void> {
+  response.set('Cache-Control', 'no-store');
+  if (reply.headers) response.set(reply.headers);
+  if (reply.stream) {
+    await reply.stream(response);
+    return;
+  }
+  response.status(reply.status ?? usual);
+  if (typeof out === 'object') response.json(out.parse(reply.body));
+  else if (out === 'nothing') response.end();
+  else response.type(out).send(reply.body);
+}
+
+function header(request: Request, name: string): string | undefined {
+  const value = request.headers[name];
+  return Array.isArray(value) ? value.join(', ') : value;
+}
