@@ -1,0 +1,35 @@
+import { compensatedSum } from './compensated-sum';
+import { requireFinite } from './require-finite';
+
+/** Mean range of two normal values in standard deviations, as published to three decimals and fixed by rule 5. */
+const D2 = 1.128;
+
+/** Centre and natural limits of an individuals chart. */
+export interface XmrLimits {
+  /** How many values stand behind the limits. */
+  n: number;
+  centre: number;
+  lower: number;
+  upper: number;
+  meanMovingRange: number;
+}
+
+/**
+ * Limits of an individuals and moving-range chart: mean ± 3/1.128 × mean moving range of span 2 (rule 5), not clipped to any
+ * range (rule 6). `undefined` with fewer than 2 values.
+ *
+ * Source: NIST/SEMATECH e-Handbook of Statistical Methods, section 6.3.2.2 "Individuals Control Charts".
+ */
+export function xmrLimits(values: ArrayLike<number>): XmrLimits | undefined {
+  const n = values.length;
+  if (n < 2) return undefined;
+  const movingRanges = new Float64Array(n - 1);
+  for (let index = 1; index < n; index += 1) {
+    const before = requireFinite(values[index - 1], 'value');
+    movingRanges[index - 1] = Math.abs(requireFinite(values[index], 'value') - before);
+  }
+  const centre = compensatedSum(values) / n;
+  const meanMovingRange = compensatedSum(movingRanges) / (n - 1);
+  const reach = (3 / D2) * meanMovingRange;
+  return { n, centre, lower: centre - reach, upper: centre + reach, meanMovingRange };
+}
