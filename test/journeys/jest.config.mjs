@@ -1,0 +1,23 @@
+/** Journeys through the built product in a real browser, one after another. `npm test` names the browser in CHROME. */
+import path from 'node:path';
+import { findChromium } from '../support/find-chromium.mjs';
+
+const chromium = findChromium();
+if (!chromium) {
+  throw new Error('The journeys need a browser: install Chromium, or set CHROME to its path.');
+}
+process.env.CHROME = chromium;
+
+export default {
+  displayName: 'journeys',
+  rootDir: path.join(import.meta.dirname, '../..'),
+  roots: ['<rootDir>/test/journeys'],
+  testEnvironment: 'node',
+  testEnvironmentOptions: { customExportConditions: ['underseam-source', 'node', 'node-addons'] },
+  testMatch: ['**/*.spec.ts'],
+  testTimeout: 120_000,
+  maxWorkers: 1,
+  transform: {
+    '^.+\\.ts$': ['@swc/jest', { jsc: { target: 'es2022', parser: { syntax: 'typescript' } } }],
+  },
+};
