@@ -7,7 +7,13 @@ export default {
       displayName: 'server',
       testEnvironment: 'node',
       testEnvironmentOptions: { customExportConditions: [...conditions, 'node', 'node-addons'] },
-      roots: ['<rootDir>/shared', '<rootDir>/db', '<rootDir>/server', '<rootDir>/seeds', '<rootDir>/test'],
+      roots: [
+        '<rootDir>/shared',
+        '<rootDir>/db',
+        '<rootDir>/server',
+        '<rootDir>/seeds',
+        '<rootDir>/test',
+      ],
       testMatch: ['**/*.spec.ts'],
       testPathIgnorePatterns: ['/test/journeys/'],
       transform: {
