@@ -54,18 +54,29 @@ export class WeeklyMarginChart {
       : `M${week.x - 6} ${y + 4.5}h12l-6 -10z`;
   }
 
-  protected point(index: number | null): void {
-    this.pointed.set(index);
+  protected leave(): void {
+    this.pointed.set(null);
+  }
+
+  /** Takes the week nearest to the pointer. */
+  protected follow(event: PointerEvent): void {
+    const picture = this.picture();
+    if (!picture) return;
+    const first = picture.weeks[0]?.x ?? picture.left;
+    const nearest = Math.round((event.offsetX + picture.left - first) / picture.pitch);
+    this.pointed.set(Math.min(picture.weeks.length - 1, Math.max(0, nearest)));
   }
 
   protected enter(): void {
+    // A tap has pointed at a week already; only the keyboard starts at the chosen one.
+    if (this.pointed() !== null) return;
     const weeks = this.data().points;
     const chosen = weeks.findIndex(({ week }) => week === this.data().chosen);
     this.pointed.set(chosen < 0 ? weeks.length - 1 : chosen);
   }
 
-  protected pick(index: number | null): void {
-    const week = index === null ? undefined : this.data().points[index];
+  protected pick(): void {
+    const week = this.active();
     if (week) this.choose.emit(week.week);
   }
 
@@ -94,7 +105,7 @@ export class WeeklyMarginChart {
         return null;
       case 'Enter':
       case ' ':
-        this.pick(this.pointed());
+        this.pick();
         return this.pointed();
       default:
         return undefined;

@@ -1,0 +1,38 @@
+import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { measuredWidth } from '../measured-width';
+import type { DotIntervalInput } from './dot-interval-input';
+import { hatchWords, layOutDotInterval, type PlacedInterval } from './dot-interval-layout';
+
+let charts = 0;
+
+/** Groups as dots with 95 % intervals about a reference; groups with too few cars are hatched. */
+@Component({
+  selector: 'us-dot-interval-chart',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+  templateUrl: './dot-interval-chart.html',
+  styleUrl: './dot-interval-chart.scss',
+  host: { '[style.min-height.px]': 'data().rows.length * 34 + 34' },
+})
+export class DotIntervalChart {
+  readonly data = input.required<DotIntervalInput>();
+
+  private readonly width = measuredWidth();
+  protected readonly hatch = `us-hatch-interval-${++charts}`;
+  protected readonly picture = computed(() =>
+    this.width() > 0 ? layOutDotInterval(this.data(), this.width()) : undefined,
+  );
+  protected readonly hatchWords = hatchWords;
+
+  protected triangle(row: PlacedInterval): string {
+    const { x } = row.dot!;
+    return row.stand === 'above'
+      ? `M${x - 6} ${row.y + 5}h12l-6 -10.5z`
+      : `M${x - 6} ${row.y - 5}h12l-6 10.5z`;
+  }
+
+  protected arrow(row: PlacedInterval, left: number, right: number): string {
+    return row.beyond === 'right'
+      ? `M${right - 5} ${row.y - 5}l6 5l-6 5`
+      : `M${left + 5} ${row.y - 5}l-6 5l6 5`;
+  }
+}

@@ -1,0 +1,33 @@
+import type { AxisMark } from '../value-axis';
+
+/** Where an interval lies against the reference; `below` and `above` miss it. */
+export type Stand = 'as_expected' | 'below' | 'above';
+
+/** One group. `value` null: too few cars, drawn as hatching with the count and the words. */
+export interface IntervalRow {
+  readonly key: string;
+  readonly label: string;
+  /** Cars behind it, as it is read. */
+  readonly count: string;
+  readonly value: number | null;
+  readonly lower: number | null;
+  readonly upper: number | null;
+  /** The value as it is read ("+23 %"), or the words for why there is none. */
+  readonly text: string;
+  readonly stand: Stand;
+  /** The word that goes with a missed reference ("above"). */
+  readonly word: string;
+  /** The group that the page speaks of. */
+  readonly chosen: boolean;
+}
+
+/** Groups as dots with intervals about a reference. */
+export interface DotIntervalInput {
+  /** Text alternative: what the picture shows, as a sentence. */
+  readonly summary: string;
+  readonly rows: readonly IntervalRow[];
+  readonly scale: 'linear' | 'log';
+  readonly reference: number;
+  /** Offered marks; those inside the axis are drawn, the reference always. */
+  readonly marks: readonly AxisMark[];
+}
