@@ -1,0 +1,21 @@
+import { mannKendall } from '#shared/stats/mann-kendall';
+import { theilSenSlope } from '#shared/stats/theil-sen-slope';
+import { checkCases } from './check-values';
+import { expectFigures } from './expect-figures';
+
+describe('theilSenSlope and mannKendall', () => {
+  it.each(checkCases<{ x: number[]; t: number[] }>('theil_sen_mann_kendall'))(
+    'given %s, agree',
+    (_title, check) => {
+      const test = mannKendall(check.input.x);
+      expectFigures(check, {
+        n: test?.n,
+        S: test?.s,
+        var_S: test?.variance,
+        Z: test?.z,
+        p_two_sided: test?.p,
+        sen_slope: theilSenSlope(check.input.t, check.input.x),
+      });
+    },
+  );
+});
