@@ -4,8 +4,16 @@ import prettier from 'eslint-config-prettier';
 import { defineConfig } from 'eslint/config';
 import tseslint from 'typescript-eslint';
 import { arrows } from './lint/arrows.mjs';
-import { clockAndChance, enums, subscriptions, vagueClasses } from './lint/banned-syntax.mjs';
+import {
+  clockAndChance,
+  enums,
+  storeOpened,
+  subscriptions,
+  vagueClasses,
+  writingConnection,
+} from './lint/banned-syntax.mjs';
 import { fileNames } from './lint/file-names.mjs';
+import { networkFeatures } from './lint/layers.mjs';
 
 const everySpec = ['**/*.spec.ts', 'test/**/*.ts', 'projects/dashboard/src/app/testing/**/*.ts'];
 const client = 'projects/dashboard/src/**';
@@ -52,6 +60,17 @@ export default defineConfig(
       '@typescript-eslint/no-confusing-void-expression': ['error', { ignoreArrowShorthand: true }],
       '@typescript-eslint/no-extraneous-class': ['error', { allowWithDecorator: true }],
       '@typescript-eslint/no-misused-spread': ['error', { allow: ['string'] }],
+      '@typescript-eslint/no-unused-vars': [
+        'error',
+        { argsIgnorePattern: '^_', ignoreRestSiblings: true },
+      ],
+      '@typescript-eslint/prefer-promise-reject-errors': [
+        'error',
+        { allowThrowingUnknown: true, allowThrowingAny: false },
+      ],
+      // Right more often than wrong, but not worth an error: a request handed on, a default spelt out.
+      '@typescript-eslint/no-unsafe-class-instance-assignment': 'off',
+      '@typescript-eslint/no-unnecessary-type-arguments': 'off',
       // A function may be async because its interface is, and a JSON field is taken out by its name.
       '@typescript-eslint/require-await': 'off',
       '@typescript-eslint/no-dynamic-delete': 'off',
@@ -66,6 +85,20 @@ export default defineConfig(
     files: ['shared/**/*.ts', 'db/queries/**/*.ts', 'server/features/**/*.ts'],
     ignores: everySpec,
     rules: { 'no-restricted-syntax': ['error', enums, vagueClasses, ...clockAndChance] },
+  },
+  {
+    files: ['server/features/**/*.ts'],
+    ignores: [...everySpec, ...networkFeatures.map((name) => `server/features/${name}/**`)],
+    rules: {
+      'no-restricted-syntax': [
+        'error',
+        enums,
+        vagueClasses,
+        writingConnection,
+        ...clockAndChance,
+        ...storeOpened,
+      ],
+    },
   },
   {
     files: [`${client}/*.ts`],

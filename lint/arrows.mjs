@@ -11,8 +11,8 @@ export function destinationOf(source, file) {
   return { package: source };
 }
 
-/** The sentence that a file's import breaks, or undefined when it is allowed. Both paths count from the project's root. */
-export function brokenArrow(source, file) {
+/** The sentence that a file's import breaks, or undefined when it is allowed. The file's path counts from the project's root. */
+export function brokenArrow(source, file, isType) {
   const to = destinationOf(source, file);
   const from = layerOf(file);
   if (to.package !== undefined) {
@@ -23,7 +23,7 @@ export function brokenArrow(source, file) {
     return guard.because;
   }
   if (!from) return undefined;
-  const allowed = [from.own, ...from.reaches];
+  const allowed = [from.own, ...from.reaches, ...(isType ? (from.types ?? []) : [])];
   return allowed.some((folder) => within(to.path, folder)) ? undefined : from.because;
 }
 
@@ -32,17 +32,17 @@ export const arrows = {
   meta: { type: 'problem', schema: [], messages: { broken: '{{because}}' } },
   create(context) {
     const file = path.relative(context.cwd, context.filename).split(path.sep).join('/');
-    const judge = (node) => {
+    const judge = (node, isType = false) => {
       if (node?.type !== 'Literal' || typeof node.value !== 'string') return;
-      const because = brokenArrow(node.value, file);
+      const because = brokenArrow(node.value, file, isType);
       if (because) context.report({ node, messageId: 'broken', data: { because } });
     };
     return {
-      ImportDeclaration: (node) => judge(node.source),
-      ExportNamedDeclaration: (node) => judge(node.source),
+      ImportDeclaration: (node) => judge(node.source, isTypeOnly(node, 'importKind')),
+      ExportNamedDeclaration: (node) => judge(node.source, isTypeOnly(node, 'exportKind')),
       ExportAllDeclaration: (node) => judge(node.source),
       ImportExpression: (node) => judge(node.source),
-      TSImportType: (node) => judge(node.source ?? node.argument?.literal),
+      TSImportType: (node) => judge(node.source ?? node.argument?.literal, true),
       TSExternalModuleReference: (node) => judge(node.expression),
       'CallExpression[callee.name="require"]': (node) => judge(node.arguments[0]),
     };
@@ -54,11 +54,20 @@ function layerOf(file) {
     const pattern = layer.folder.split('/');
     const own = file.split('/').slice(0, pattern.length);
     const inFolder = file.split('/').length > pattern.length;
+    if (layer.files && !layer.files.test(file)) continue;
     if (inFolder && pattern.every((part, at) => part === '*' || part === own[at])) {
       return { ...layer, own: own.join('/') };
     }
   }
   return undefined;
+}
+
+function isTypeOnly(node, kind) {
+  const { specifiers } = node;
+  return (
+    node[kind] === 'type' ||
+    (specifiers.length > 0 && specifiers.every((specifier) => specifier[kind] === 'type'))
+  );
 }
 
 function refusesPackage({ onlyPackages, notPackages = [] }, name) {

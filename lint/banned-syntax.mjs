@@ -30,3 +30,22 @@ export const subscriptions = {
   selector: 'CallExpression[callee.property.name="subscribe"]',
   message: 'A page does not subscribe: read a signal, and keep streams in core.',
 };
+
+/** A store's own connection, and its reader of everything, are not for a feature about branches' rows. */
+export const storeOpened = [
+  {
+    selector: 'MemberExpression[property.name="unscoped"]',
+    message:
+      'store.unscoped sees every branch: read with the ScopedDb of the call, or name this feature in lint/layers.mjs if it is about the whole network.',
+  },
+  {
+    selector: 'Property[parent.type="ObjectPattern"][key.name="unscoped"]',
+    message: 'store.unscoped sees every branch: read with the ScopedDb of the call.',
+  },
+];
+
+/** The writing connection stays private to db. */
+export const writingConnection = {
+  selector: 'MemberExpression[object.name="store"][property.name="writing"]',
+  message: 'The writing connection stays private to db: write through BranchWriter or a query.',
+};

@@ -1,7 +1,17 @@
+/** What a use case is handed, beside queries: the narrowed readers and writers. */
+const HANDED = [
+  'db/queries',
+  'db/scope',
+  'db/scoped-db',
+  'db/branch-writer',
+  'db/network-reference',
+];
+
 /**
  * The layers of the house and what each may import: a folder, the folders it reaches, the packages it may not (or may only)
  * use, and the sentence a breach is answered with. The first match counts, so the narrower folder stands first. `*` is one
- * folder name; a file always reaches what lies in its own layer's folder.
+ * folder name, `files` narrows a layer to some of a folder's files; a file always reaches what lies in its own layer's
+ * folder. `types` may be named as types only: handed, never made.
  */
 export const layers = [
   {
@@ -32,19 +42,29 @@ export const layers = [
     because: 'db knows rows and scopes, not requests: it imports only shared.',
   },
   {
+    // Where a contract is tied to its use case: the one file of a feature that knows the server around it.
     folder: 'server/features/*',
+    files: /\.endpoints\.ts$/,
     reaches: [
       'shared',
-      'db/queries',
-      // The narrowed readers and writers a use case is handed; they are never made here.
-      'db/scope',
-      'db/scoped-db',
-      'db/branch-writer',
-      'db/network-reference',
+      ...HANDED,
+      'server/http',
+      'server/kit',
+      'server/clock',
+      'server/auth/caller',
     ],
+    types: ['db/store', 'db/network-state'],
     notPackages: ['express', 'passport', 'passport-jwt', 'jsonwebtoken', 'knex', 'better-sqlite3'],
     because:
-      'a feature tells its story with shared and db/queries, and never reaches express, knex, the rest of the server or another feature: hand it what it needs, or move the common part to shared or db/queries.',
+      'an endpoints file ties contracts to the use cases of its own feature through server/http and the kit, and never reaches express, knex or another feature.',
+  },
+  {
+    folder: 'server/features/*',
+    reaches: ['shared', ...HANDED],
+    types: ['db/store', 'db/network-state'],
+    notPackages: ['express', 'passport', 'passport-jwt', 'jsonwebtoken', 'knex', 'better-sqlite3'],
+    because:
+      'a use case tells its story with shared and db/queries, and never reaches express, knex, the rest of the server or another feature: hand it what it needs, or move the common part to shared or db/queries.',
   },
   {
     folder: 'server',
@@ -129,3 +149,6 @@ export const guarded = [
       'the index of all contracts would pull every schema into the browser: import the one contract you call.',
   },
 ];
+
+/** Features about the whole network, whose use cases may take `store.unscoped` out of the store they were handed. */
+export const networkFeatures = ['set-up', 'people', 'network', 'mailbox', 'audit'];
