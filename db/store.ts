@@ -2,6 +2,7 @@ import { mkdirSync } from 'node:fs';
 import { join } from 'node:path';
 import { DatabaseRefused, openDatabase, openReader, type Connection } from './database';
 import { NetworkState } from './network-state';
+import { recoverGenerations, Restatement } from './restatement';
 import type { Scope } from './scope';
 import { ScopedDb } from './scoped-db';
 import { UnscopedDb } from './unscoped-db';
@@ -13,6 +14,7 @@ export class Store {
   readonly state: NetworkState;
   /** For network-wide rows; writes with it only inside `queue.write`. */
   readonly unscoped: UnscopedDb;
+  readonly restatement: Restatement;
 
   private constructor(
     readonly file: string,
@@ -23,6 +25,7 @@ export class Store {
     this.state = new NetworkState(writing);
     this.queue = new WriteQueue(writing, () => this.state.reload());
     this.unscoped = new UnscopedDb(writing);
+    this.restatement = new Restatement(this);
   }
 
   /** Opens (and on first use makes) the data folder's database. Throws `DatabaseRefused` with one clear sentence. */
@@ -36,6 +39,7 @@ export class Store {
     }
     const file = join(folder, 'underseam.sqlite');
     const writing = await openDatabase(file);
+    writing.driver.transaction(() => recoverGenerations(writing))();
     return new Store(file, writing, openReader(file));
   }
 

@@ -10,7 +10,8 @@ export async function up(knex: Knex): Promise<void> {
       currency text not null,
       target_margin_share real,
       claim_limit_cents integer,
-      generation integer not null default 0
+      generation integer not null default 0,
+      restating integer not null default 0
     ) strict`,
     `insert into network (id, name, currency) values (1, 'Network', 'EUR')`,
     // Fee rates in millionths; the base rate of PUT /api/network is valid from the first day there is.

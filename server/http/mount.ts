@@ -6,7 +6,7 @@ import { notFound, Refusal, refuseInput } from '#shared/domain/refusal';
 import { Scope, type ScopedBranch } from '#db/scope';
 import type { Authenticate, Caller } from '../auth/caller';
 import { readBody } from './read-body';
-import { joined, problemsOf } from './read-problems';
+import { joined, problemsOf } from '#shared/contracts/read-problems';
 
 /** Everything a handler is given; it never sees the request. */
 export interface Call<Params = unknown, Query = unknown, Body = unknown> {

@@ -211,7 +211,7 @@ const revision = z.strictObject({
   receivedAt: z.string(),
   source: z.enum(SOURCES),
   by: z.string(),
-  change: z.enum(['created', 'replaced', 'voided', 'restored']),
+  change: z.enum(['created', 'replaced', 'restored']),
 });
 
 /** A finding as stored always has its reference. */

@@ -82,8 +82,13 @@ export function normaliseJob(sent: SentJob & { invoice?: RecordedJob['invoice'] 
   });
 }
 
-/** A recorded job with its defaults written out, as it is answered. */
-export function writtenOut(job: RecordedJob): RecordedJob {
+/** A recorded job as it is answered: with its lists and numbers even where they are empty or 0. */
+export type WrittenOutJob = Omit<RecordedJob, 'agreedExtras'> & {
+  agreedExtras: { on: string; minutes: number; priceCents?: number; note?: string }[];
+};
+
+/** A recorded job with its defaults written out. */
+export function writtenOut(job: RecordedJob): WrittenOutJob {
   return {
     ...job,
     ...(job.estimate && {

@@ -1,5 +1,5 @@
 import type * as z from 'zod';
-import type { FieldProblem } from '#shared/contracts/fields';
+import type { FieldProblem } from './fields';
 
 /** Turns what zod found into problems with JSON pointers below `root` and sentences a person can act on. */
 export function problemsOf(error: z.core.$ZodError, root = ''): FieldProblem[] {

@@ -1,0 +1,131 @@
+import type { Receipt } from '#db/branch-writer';
+import type { ClaimWriter, DecidedClaim, RecordedClaim, StoredClaim } from '#db/claim-writer';
+import type { ClaimContent } from '#shared/contracts/claims';
+import { Refusal, refuseInput } from '#shared/domain/refusal';
+import type { ClaimDecision, Role } from '#shared/domain/vocabulary';
+import type { RuleBreak } from '#shared/domain/job-rules';
+
+/** Who sends a claim and what they may decide (rule 77). */
+export interface ClaimSending extends Receipt {
+  /** A push key decides like a site manager. */
+  role: Role;
+  /** The network's limit in cents, or null when there is none. */
+  limitCents: number | null;
+  /** Judges the conditional headers against the stored revision, when there are any. */
+  precondition?: (stored: StoredClaim | undefined) => void;
+}
+
+export interface AcceptedClaim {
+  claimRef: string;
+  revision: number;
+  status: 'created' | 'unchanged' | 'replaced';
+  decision: ClaimDecision;
+  proposedDecision?: ClaimDecision;
+}
+
+/** Takes a claim whose own fields have passed the rules into the record. Runs inside a write. */
+export function acceptClaim(
+  writer: ClaimWriter,
+  claimRef: string,
+  sent: ClaimContent,
+  sending: ClaimSending,
+): AcceptedClaim {
+  const stored = writer.findClaim(claimRef);
+  sending.precondition?.(stored);
+  const job = writer.findJob(sent.jobRef);
+  const problems = breaksAgainstJob(sent, job);
+  if (!job || problems.length > 0) throw refuseInput(problems);
+  const content = normaliseClaim(sent, stored?.content, sending.role);
+  const claim = decided(content, stored, sending);
+  if (
+    stored?.text === claim.text &&
+    stored.decision === claim.decision &&
+    stored.proposed === claim.proposed
+  ) {
+    return told(claimRef, stored.revision, 'unchanged', claim);
+  }
+  const revision = writer.keepClaim(claimRef, job.id, stored, claim, sending);
+  return told(claimRef, revision, stored ? 'replaced' : 'created', claim);
+}
+
+function breaksAgainstJob(
+  sent: ClaimContent,
+  job: { completedOn: string } | undefined,
+): RuleBreak[] {
+  if (!job) {
+    return [{ path: '/jobRef', message: 'no job of this branch has this reference' }];
+  }
+  if (sent.madeOn < job.completedOn) {
+    return [{ path: '/madeOn', message: `is before the job was completed (${job.completedOn})` }];
+  }
+  return [];
+}
+
+function normaliseClaim(
+  sent: ClaimContent,
+  stored: RecordedClaim | undefined,
+  role: Role,
+): RecordedClaim {
+  const cost = sent.costCents ?? (role === 'recorder' ? stored?.costCents : undefined);
+  return {
+    jobRef: sent.jobRef,
+    madeOn: sent.madeOn,
+    zone: sent.zone,
+    cause: sent.cause,
+    decision: sent.decision,
+    ...(sent.decidedOn !== undefined && { decidedOn: sent.decidedOn }),
+    ...(sent.labourMinutes > 0 && { labourMinutes: sent.labourMinutes }),
+    ...(sent.productMl > 0 && { productMl: sent.productMl }),
+    ...(cost !== undefined && cost > 0 && { costCents: cost }),
+    ...(sent.paidOn !== undefined && { paidOn: sent.paidOn }),
+    ...(sent.note && { note: sent.note.normalize('NFC') }),
+  };
+}
+
+/** Which decision counts: a recorder's changes none, one above the limit waits for head office. */
+function decided(
+  content: RecordedClaim,
+  stored: StoredClaim | undefined,
+  { role, limitCents }: ClaimSending,
+): DecidedClaim {
+  const text = JSON.stringify(content);
+  const standing = stored?.decision ?? 'open';
+  const { decision } = content;
+  if (role === 'recorder') {
+    if (decision !== 'open' && decision !== standing) {
+      throw new Refusal(
+        'forbidden',
+        'A recorder leaves a claim open or as it was decided; the site manager decides it.',
+      );
+    }
+    return { content, text, decision: standing, proposed: stored?.proposed ?? null };
+  }
+  const within =
+    role === 'head_office' ||
+    decision === 'open' ||
+    limitCents === null ||
+    (content.costCents ?? 0) <= limitCents ||
+    (decision === standing && content.costCents === stored?.content.costCents);
+  if (within) return { content, text, decision, proposed: null };
+  if (content.paidOn !== undefined && standing === 'open') {
+    throw refuseInput([
+      { path: '/paidOn', message: 'the cost is above the claim limit: head office decides first' },
+    ]);
+  }
+  return { content, text, decision: standing, proposed: decision };
+}
+
+function told(
+  claimRef: string,
+  revision: number,
+  status: AcceptedClaim['status'],
+  { decision, proposed }: Pick<DecidedClaim, 'decision' | 'proposed'>,
+): AcceptedClaim {
+  return {
+    claimRef,
+    revision,
+    status,
+    decision,
+    ...(proposed !== null && { proposedDecision: proposed }),
+  };
+}

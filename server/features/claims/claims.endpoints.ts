@@ -1,0 +1,100 @@
+import { ClaimWriter, type StoredClaim } from '#db/claim-writer';
+import { findClaim } from '#db/queries/claims';
+import { readNetwork } from '#db/queries/network';
+import type { ScopedBranch } from '#db/scope';
+import { getClaim, putClaim, putClaimBatch } from '#shared/contracts/claims';
+import { localDate } from '#shared/domain/calendar';
+import { breaksOfClaim } from '#shared/domain/claim-rules';
+import { notFound } from '#shared/domain/refusal';
+import { actorOf } from '../../auth/caller';
+import { realClock } from '../../clock';
+import { mount, type Call, type Mounting } from '../../http/mount';
+import { checkPreconditions, tagOf } from '#shared/domain/preconditions';
+import type { Kit } from '../../kit';
+import { acceptClaim, type ClaimSending } from './accept-claim';
+import { acceptClaimBatch } from './accept-claim-batch';
+
+/** Claims under warranty: sent, corrected, read. */
+export function mountClaims(mounting: Mounting, kit: Kit): void {
+  const { store } = kit;
+  const today = (branch: ScopedBranch): string => localDate(kit.clock.now(), branch.timeZone);
+
+  mount(
+    mounting,
+    putClaim,
+    async (call) => {
+      const writer = new ClaimWriter(store, named(call));
+      const accepted = await store.queue.write(() =>
+        acceptClaim(writer, call.params.claimRef, call.body, {
+          ...sendingOf(kit, call),
+          precondition: (stored: StoredClaim | undefined) =>
+            checkPreconditions(
+              {
+                ifMatch: call.ifMatch,
+                ifNoneMatch: call.ifNoneMatch,
+                lastChange: () => `revision ${stored?.revision ?? 0}`,
+              },
+              stored && { revision: stored.revision, voided: false },
+            ),
+        }),
+      );
+      return {
+        status: accepted.status === 'created' ? 201 : 200,
+        body: accepted,
+        headers: { ETag: tagOf(accepted.revision) },
+      };
+    },
+    (raw, { branch }) => (branch ? breaksOfClaim(raw, today(branch)) : []),
+  );
+
+  mount(mounting, putClaimBatch, async (call) => {
+    const branch = named(call);
+    return {
+      body: await acceptClaimBatch(
+        store,
+        branch,
+        call.body.claims,
+        today(branch),
+        sendingOf(kit, call),
+      ),
+    };
+  });
+
+  mount(mounting, getClaim, (call) => {
+    const branch = named(call);
+    const found = findClaim(store.scoped(call.scope), branch.code, call.params.claimRef);
+    if (!found) throw notFound();
+    const { costCents = 0, ...content } = found.content;
+    const unseen = call.caller?.kind === 'person' && call.caller.role === 'recorder';
+    return {
+      body: {
+        labourMinutes: 0,
+        productMl: 0,
+        ...content,
+        decision: found.decision,
+        ...(found.proposed !== null && { proposedDecision: found.proposed }),
+        ...(!unseen && { costCents }),
+        branch: branch.code,
+        claimRef: call.params.claimRef,
+        revision: found.revision,
+      } as never,
+      headers: { ETag: tagOf(found.revision) },
+    };
+  });
+}
+
+function sendingOf(kit: Kit, call: Call): ClaimSending {
+  const { caller } = call;
+  return {
+    actor: actorOf(caller, call.address),
+    source: caller?.kind === 'key' ? 'key' : 'person',
+    receivedAt: realClock.now().toISOString(),
+    role: caller?.kind === 'person' ? caller.role : 'site_manager',
+    limitCents: readNetwork(kit.store.unscoped).claimLimitCents,
+  };
+}
+
+function named(call: Pick<Call, 'branch'>): ScopedBranch {
+  if (!call.branch) throw notFound();
+  return call.branch;
+}

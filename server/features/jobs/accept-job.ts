@@ -1,0 +1,84 @@
+import type { BranchWriter, Receipt } from '#db/branch-writer';
+import { normaliseJob, referenced, type SentJob } from '#shared/domain/normalise-job';
+import type { RecordedJob } from '#shared/domain/recorded-job';
+import { refuseInput } from '#shared/domain/refusal';
+import { checkPreconditions, type Preconditions } from '#shared/domain/preconditions';
+import { keepStoredMoney } from './keep-stored-money';
+
+/** How a job is sent: by whom, and whether what they leave out of its money is kept. */
+export interface Sending extends Receipt {
+  money: 'seen' | 'unseen';
+  preconditions: Preconditions;
+}
+
+export interface Accepted {
+  jobRef: string;
+  revision: number;
+  status: 'created' | 'unchanged' | 'replaced';
+  voided?: boolean;
+}
+
+/**
+ * Takes a job that has passed the rules into the record: creates it, keeps it as it is, or makes a new revision. Runs inside
+ * a write, so that the stored job it is compared with cannot change meanwhile.
+ */
+export function acceptJob(
+  writer: BranchWriter,
+  jobRef: string,
+  sent: SentJob,
+  sending: Sending,
+): Accepted {
+  const stored = writer.findJob(jobRef);
+  checkPreconditions(sending.preconditions, stored);
+  const job = merged(sent, stored?.content, sending.money);
+  const text = JSON.stringify(job);
+  if (!stored) {
+    writer.createJob(jobRef, job, text, sending);
+    return { jobRef, revision: 1, status: 'created' };
+  }
+  if (stored.text === text) {
+    return {
+      jobRef,
+      revision: stored.revision,
+      status: 'unchanged',
+      // A nightly re-push must not revive what was voided (rule 25).
+      ...(stored.voided && { voided: true }),
+    };
+  }
+  checkClaims(writer, stored.id, job);
+  const revision = writer.replaceJob(jobRef, stored, job, text, sending);
+  return { jobRef, revision, status: 'replaced' };
+}
+
+/** The job to keep: what was sent, with the stored invoice when none was sent (rule 73) and, for a recorder, the stored money. */
+function merged(
+  sent: SentJob,
+  stored: RecordedJob | undefined,
+  money: Sending['money'],
+): RecordedJob {
+  const named: SentJob = { ...sent, findings: sent.findings && referenced(sent.findings) };
+  const whole = stored && money === 'unseen' ? keepStoredMoney(named, stored) : named;
+  const invoice = whole.invoice === undefined ? stored?.invoice : (whole.invoice ?? undefined);
+  if (invoice && invoice.totalCents === undefined) {
+    throw refuseInput([
+      { path: '/invoice/totalCents', message: 'is required: the total before tax, in minor units' },
+    ]);
+  }
+  return normaliseJob({
+    ...whole,
+    invoice: invoice as RecordedJob['invoice'],
+  });
+}
+
+/** A correction may not move completion past a claim already made on the job (rule 59). */
+function checkClaims(writer: BranchWriter, jobId: number, job: RecordedJob): void {
+  const claimed = writer.firstClaimOn(jobId);
+  if (claimed !== undefined && job.completedOn > claimed) {
+    throw refuseInput([
+      {
+        path: '/completedOn',
+        message: `a claim was made on this job on ${claimed}; completion cannot be later`,
+      },
+    ]);
+  }
+}

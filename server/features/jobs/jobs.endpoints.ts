@@ -1,0 +1,121 @@
+import { BranchWriter } from '#db/branch-writer';
+import type { ScopedBranch } from '#db/scope';
+import { billJob, getJob, putJob, putJobBatch, voidJob } from '#shared/contracts/jobs';
+import { localDate } from '#shared/domain/calendar';
+import { breaksOfJob, type JobWorld } from '#shared/domain/job-rules';
+import { notFound } from '#shared/domain/refusal';
+import { actorOf, type Caller } from '../../auth/caller';
+import { realClock } from '../../clock';
+import { mount, type Call, type Mounting } from '../../http/mount';
+import type { Kit } from '../../kit';
+import { acceptBatch } from './accept-batch';
+import { acceptJob, type Sending } from './accept-job';
+import { writeBill } from './bill-job';
+import { worldOf } from './check-job';
+import { checkPreconditions, tagOf } from '#shared/domain/preconditions';
+import { lastChange, readJobSheet } from './read-job-sheet';
+
+/** Jobs: sent, corrected, read, billed and voided. */
+export function mountJobs(mounting: Mounting, kit: Kit): void {
+  const { store } = kit;
+  const world = (branch: ScopedBranch): JobWorld =>
+    worldOf(store.state, localDate(kit.clock.now(), branch.timeZone));
+
+  mount(
+    mounting,
+    putJob,
+    async (call) => {
+      const branch = named(call);
+      const accepted = await store.queue.write(() =>
+        acceptJob(
+          new BranchWriter(store, branch),
+          call.params.jobRef,
+          call.body,
+          sendingOf(kit, call, call.params.jobRef),
+        ),
+      );
+      return {
+        status: accepted.status === 'created' ? 201 : 200,
+        body: accepted,
+        headers: { ETag: tagOf(accepted.revision) },
+      };
+    },
+    (raw, { branch }) => (branch ? breaksOfJob(raw, world(branch)) : []),
+  );
+
+  mount(mounting, putJobBatch, async (call) => {
+    const branch = named(call);
+    const sending = { ...sendingOf(kit, call, ''), preconditions: NONE };
+    return { body: await acceptBatch(store, branch, call.body.jobs, world(branch), sending) };
+  });
+
+  mount(mounting, getJob, (call) => {
+    const sheet = readJobSheet(
+      store.scoped(call.scope),
+      named(call).code,
+      call.params.jobRef,
+      store.state.costs,
+      moneyFor(call.caller),
+    );
+    return { body: sheet, headers: { ETag: tagOf(sheet.revision) } };
+  });
+
+  mount(mounting, voidJob, async (call) => {
+    const branch = named(call);
+    await store.queue.write(() => {
+      const writer = new BranchWriter(store, branch);
+      const stored = writer.findJob(call.params.jobRef);
+      if (!stored || stored.voided) throw notFound();
+      const sending = sendingOf(kit, call, call.params.jobRef);
+      checkPreconditions(sending.preconditions, stored);
+      writer.voidJob(call.params.jobRef, stored, sending);
+    });
+    return {};
+  });
+
+  mount(mounting, billJob, async (call) => {
+    const branch = named(call);
+    const today = localDate(kit.clock.now(), branch.timeZone);
+    const accepted = await store.queue.write(() =>
+      writeBill(
+        new BranchWriter(store, branch),
+        call.params.jobRef,
+        call.body,
+        today,
+        sendingOf(kit, call, call.params.jobRef),
+      ),
+    );
+    return { body: accepted, headers: { ETag: tagOf(accepted.revision) } };
+  });
+}
+
+const NONE: Sending['preconditions'] = {
+  ifMatch: undefined,
+  ifNoneMatch: undefined,
+  lastChange: () => '',
+};
+
+function named(call: Pick<Call, 'branch'>): ScopedBranch {
+  if (!call.branch) throw notFound();
+  return call.branch;
+}
+
+function sendingOf(kit: Kit, call: Call, jobRef: string): Sending {
+  const { caller } = call;
+  return {
+    actor: actorOf(caller, call.address),
+    source: caller?.kind === 'key' ? 'key' : 'person',
+    receivedAt: realClock.now().toISOString(),
+    money: moneyFor(caller),
+    preconditions: {
+      ifMatch: call.ifMatch,
+      ifNoneMatch: call.ifNoneMatch,
+      lastChange: () => lastChange(kit.store.scoped(call.scope), named(call).code, jobRef),
+    },
+  };
+}
+
+/** A recorder sees no money; a push key sends all of it. */
+function moneyFor(caller: Caller | undefined): 'seen' | 'unseen' {
+  return caller?.kind === 'person' && caller.role === 'recorder' ? 'unseen' : 'seen';
+}

@@ -1,0 +1,88 @@
+import type { ScopedDb } from '#db/scoped-db';
+import { findSheet, listRevisions, type RevisionRow, type SheetRow } from '#db/queries/job-sheet';
+import type { JobSheet } from '#shared/contracts/jobs';
+import { bridgeOf } from '#shared/domain/bridge';
+import type { CostBook } from '#shared/domain/cost-book';
+import { costCents, deriveFigures, marginCents } from '#shared/domain/job-figures';
+import { writtenOut, type WrittenOutJob } from '#shared/domain/normalise-job';
+import { notFound } from '#shared/domain/refusal';
+
+/** Reads one job with its revisions and, for whoever may see money, its margin and bridge. */
+export function readJobSheet(
+  db: ScopedDb,
+  branch: string,
+  jobRef: string,
+  costs: CostBook,
+  money: 'seen' | 'unseen',
+): JobSheet {
+  const row = findSheet(db, branch, jobRef);
+  if (!row) throw notFound();
+  const revisions = listRevisions(db, row.jobId);
+  const job = writtenOut(row.content);
+  const sheet = {
+    branch,
+    jobRef,
+    revision: row.revision,
+    receivedAt: row.receivedAt,
+    source: row.source,
+    warrantyMonths: row.warrantyMonths,
+    revisions: revisions.map(told),
+  };
+  return money === 'seen'
+    ? { ...sheet, ...job, ...moneyOf(row, costs) }
+    : { ...sheet, ...withoutMoney(job) };
+}
+
+/** Who changed a job last and when, for the refusal of a write that missed it. */
+export function lastChange(db: ScopedDb, branch: string, jobRef: string): string {
+  const row = findSheet(db, branch, jobRef);
+  const last = row && listRevisions(db, row.jobId).at(-1);
+  return last
+    ? `revision ${last.revision} by ${nameOf(last)} at ${last.receivedAt}`
+    : 'it was voided';
+}
+
+function told(row: RevisionRow): JobSheet['revisions'][number] {
+  const { revision, receivedAt, source, change } = row;
+  return { revision, receivedAt, source, change, by: nameOf(row) };
+}
+
+function nameOf(row: RevisionRow): string {
+  if (row.personName !== null) return row.personName;
+  return row.keyLabel !== null ? `push key "${row.keyLabel}"` : 'the system';
+}
+
+function moneyOf(row: SheetRow, costs: CostBook): Pick<JobSheet, 'money' | 'missingCosts'> {
+  const { money, expected, billed, missing } = deriveFigures(row.content, row.branch, costs);
+  if (!money) return { money: null, missingCosts: missing };
+  const margin = billed ? marginCents(money) : null;
+  return {
+    money: {
+      revenueCents: billed ? money.revenueCents : null,
+      labourCents: money.labourCents + money.repairLabourCents,
+      productCents: money.productCents,
+      consumablesCents: money.consumablesCents,
+      boughtInCents: money.boughtInCents,
+      feeCents: money.feeCents,
+      costCents: costCents(money),
+      marginCents: margin,
+      marginShare: margin !== null && money.revenueCents > 0 ? margin / money.revenueCents : null,
+      bridge: billed && expected ? bridgeOf(money, expected) : null,
+    },
+    missingCosts: missing,
+  };
+}
+
+/** The job as a recorder sees it: no amount but the price quoted (rule 24). */
+function withoutMoney(job: WrittenOutJob): Omit<WrittenOutJob, 'boughtInCents' | 'invoice'> & {
+  invoice?: JobSheet['invoice'];
+} {
+  const { boughtInCents: _bought, invoice, findings, consumables, agreedExtras, ...rest } = job;
+  return {
+    ...rest,
+    findings: findings?.map(({ chargedCents: _charged, ...finding }) => finding),
+    consumables: consumables?.map(({ unitCostCents: _unit, ...line }) => line),
+    agreedExtras: agreedExtras.map(({ priceCents: _price, ...extra }) => extra),
+    ...(invoice && { invoice: { number: invoice.number, issuedOn: invoice.issuedOn } }),
+  };
+}
