@@ -1,4 +1,5 @@
 import type { Routes } from '@angular/router';
+import { AccountPage } from './account-page';
 
-const routes: Routes = [];
+const routes: Routes = [{ path: '', component: AccountPage }];
 export default routes;

@@ -1,4 +1,5 @@
 import type { Routes } from '@angular/router';
+import { MailboxPage } from './mailbox-page';
 
-const routes: Routes = [];
+const routes: Routes = [{ path: '', component: MailboxPage }];
 export default routes;

@@ -1,4 +1,18 @@
-import type { Routes } from '@angular/router';
+import { inject } from '@angular/core';
+import { type CanActivateFn, Router, type Routes } from '@angular/router';
+import { homeOf } from '../../core/session/home';
+import { Session } from '../../core/session/session';
+import { ForgotPage } from './forgot-page';
+import { SignInPage } from './sign-in-page';
 
-const routes: Routes = [];
+/** Who is signed in already goes to their first page. */
+const notSignedIn: CanActivateFn = () => {
+  const session = inject(Session);
+  return session.person() ? inject(Router).createUrlTree([homeOf(session.role())]) : true;
+};
+
+const routes: Routes = [
+  { path: '', component: SignInPage, canActivate: [notSignedIn] },
+  { path: 'forgot', title: 'A new password', component: ForgotPage },
+];
 export default routes;

@@ -1,4 +1,5 @@
 import type { Routes } from '@angular/router';
+import { WelcomePage } from './welcome-page';
 
-const routes: Routes = [];
+const routes: Routes = [{ path: '', component: WelcomePage }];
 export default routes;
