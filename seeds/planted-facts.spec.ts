@@ -1,0 +1,359 @@
+import { addMonths, dayNumber, isoWeek } from '#shared/domain/calendar';
+import { deriveFigures, marginCents, type JobFigures } from '#shared/domain/job-figures';
+import { normaliseJob } from '#shared/domain/normalise-job';
+import { isRot } from '#shared/domain/recorded-job';
+import { AGE_BANDS, STAGES, type Stage } from '#shared/domain/vocabulary';
+import type { JobContent } from '#shared/contracts/jobs';
+import { mannKendall } from '#shared/stats/mann-kendall';
+import { theilSenSlope } from '#shared/stats/theil-sen-slope';
+import { xmrLimits } from '#shared/stats/xmr-limits';
+import { chartSignals } from '#shared/stats/chart-signals';
+import { PACKAGES } from './catalogue';
+import { costBookOf } from './demo-costs';
+import { newestContent, type DemoClaim } from './demo-network';
+import { DEMO_SEED, generateNetwork } from './generate-network';
+import { badCohortOn, cohortOf, PLANTED_FACTS } from './planted-facts';
+
+interface Car {
+  branch: string;
+  region: string;
+  content: JobContent;
+  figures: JobFigures;
+  /** Claims that count (rule 14). */
+  claims: DemoClaim[];
+  warrantyEnd: string;
+}
+
+const WARRANTY = new Map<string, number>(
+  PACKAGES.map((entry) => [entry.code, entry.warrantyMonths]),
+);
+
+// Three days of the week and year, one of them a leap day: the facts must not hang on the day the demo is made.
+describe.each(['2026-02-02', '2026-12-31', '2028-02-29'])('the planted facts on %s', (today) => {
+  let cars: Car[];
+
+  beforeAll(() => {
+    cars = carsOn(today);
+  });
+
+  test('the drifting branch, on its weekly chart, runs low or falls outside and trends down', () => {
+    const { branch, trendPBelow, slopePerWeekBelow, weeks, signals } = PLANTED_FACTS.driftingBranch;
+    const shares = weeklyMargins(cars, branch, today).slice(-52);
+    const limits = xmrLimits(shares.slice(-27, -1));
+    const seen = chartSignals(shares.slice(-weeks), limits).slice(-8);
+    expect(seen.some((signal) => (signals as readonly unknown[]).includes(signal))).toBe(true);
+    expect(mannKendall(shares)!.p).toBeLessThan(trendPBelow);
+    const last = shares.slice(-weeks);
+    expect(theilSenSlope(indices(last), last)!).toBeLessThan(slopePerWeekBelow);
+  });
+
+  test('the other branches, over the same half year, do not drift like it', () => {
+    for (const branch of branchesOf(cars)) {
+      if (branch === PLANTED_FACTS.driftingBranch.branch) continue;
+      if (branch === PLANTED_FACTS.goodSmallBranch.branch) continue;
+      const last = weeklyMargins(cars, branch, today).slice(-26);
+      expect(theilSenSlope(indices(last), last)!).toBeGreaterThan(-0.003);
+    }
+  });
+
+  test('ordinary branches, over their last year, keep 34 to 43 % with limits 3 to 13 points away', () => {
+    const { driftingBranch, underApplyingBranch, goodSmallBranch } = PLANTED_FACTS;
+    const odd: string[] = [driftingBranch, underApplyingBranch, goodSmallBranch].map(
+      (fact) => fact.branch,
+    );
+    let inside = 0;
+    let all = 0;
+    for (const branch of branchesOf(cars).filter((code) => !odd.includes(code))) {
+      const shares = weeklyMargins(cars, branch, today).slice(-53);
+      const limits = xmrLimits(shares.slice(-27, -1))!;
+      expect(limits.centre).toBeGreaterThan(0.34);
+      expect(limits.centre).toBeLessThan(0.43);
+      expect(limits.centre - limits.lower).toBeGreaterThan(0.03);
+      expect(limits.centre - limits.lower).toBeLessThan(0.13);
+      inside += shares.filter((share) => share > limits.lower && share < limits.upper).length;
+      all += shares.length;
+    }
+    expect(inside / all).toBeGreaterThan(0.95);
+  });
+
+  test('the under-applying branch, against norm and expected claims, sprays too little and pays for it', () => {
+    const fact = PLANTED_FACTS.underApplyingBranch;
+    expect(ratioToNorm(of(cars, fact.branch))).toBeLessThan(fact.ratioToNormBelow);
+    expect(observedOverExpected(cars, fact.branch)).toBeGreaterThan(fact.observedOverExpectedAbove);
+    for (const branch of branchesOf(cars).filter((code) => code !== fact.branch)) {
+      expect(ratioToNorm(of(cars, branch))).toBeGreaterThan(0.9);
+    }
+  });
+
+  test('the check-skipping branch, against the others, misses it often and has more claims', () => {
+    const fact = PLANTED_FACTS.checkSkippingBranch;
+    for (const branch of branchesOf(cars)) {
+      const share = shareNo(of(cars, branch));
+      if (branch === fact.branch) expect(share).toBeGreaterThan(fact.shareNoAbove);
+      else expect(share).toBeLessThan(fact.shareNoElsewhereBelow);
+    }
+    expect(observedOverExpected(cars, fact.branch)).toBeGreaterThan(fact.observedOverExpectedAbove);
+    const exposed = cars.filter((car) => car.content.checks?.bothDirections === 'no');
+    const done = cars.filter((car) => car.content.checks?.bothDirections === 'yes');
+    expect(claimsPerCarYear(exposed, today) / claimsPerCarYear(done, today)).toBeGreaterThan(
+      fact.riskRatioAbove,
+    );
+  });
+
+  test('the bad cohort, against the half-years beside it, has more claims a car', () => {
+    const bad = badCohortOn(today);
+    const start = `${bad.slice(0, 4)}-${bad.endsWith('H1') ? '01' : '07'}-01`;
+    const [before, itself, after] = [-6, 0, 6].map((months) => {
+      const cohort = cohortOf(addMonths(start, months));
+      return claimsPerCar(cars.filter((car) => cohortOf(car.content.completedOn) === cohort));
+    }) as [number, number, number];
+    expect(itself).toBeGreaterThan(
+      before * PLANTED_FACTS.badCohort.claimsPerCarAboveNeighboursTimes,
+    );
+    expect(itself).toBeGreaterThan(
+      after * PLANTED_FACTS.badCohort.claimsPerCarAboveNeighboursTimes,
+    );
+  });
+
+  test('the good small branch, with few cars, has no claim where fewer than three were expected', () => {
+    const fact = PLANTED_FACTS.goodSmallBranch;
+    const own = of(cars, fact.branch);
+    expect(own.length).toBeGreaterThan(60);
+    expect(own.length).toBeLessThan(fact.carsBelow);
+    expect(own.flatMap((car) => car.claims)).toHaveLength(fact.claims);
+    // With fewer than 3.69 expected, none at all lies inside the 95 % Poisson limits: exp(−3.69) = 0.025.
+    expect(expectedClaims(cars, fact.branch)).toBeLessThan(3);
+    for (const branch of branchesOf(cars).filter((code) => code !== fact.branch)) {
+      expect(of(cars, branch).flatMap((car) => car.claims).length).toBeGreaterThan(0);
+    }
+  });
+
+  test('the slow stage, at its branch alone, takes nearly twice its estimate', () => {
+    const fact = PLANTED_FACTS.slowStageBranch;
+    for (const branch of branchesOf(cars)) {
+      const ratio = stageRatio(of(cars, branch), fact.stage);
+      if (branch === fact.branch) expect(ratio).toBeGreaterThan(fact.ratioAbove);
+      else expect(ratio).toBeLessThan(fact.ratioElsewhereBelow);
+    }
+    const planned = STAGES.filter((stage) => stage !== 'repair');
+    const ratios = planned.map((stage) => stageRatio(of(cars, fact.branch), stage));
+    expect(planned[ratios.indexOf(Math.max(...ratios))]).toBe(fact.stage);
+  });
+
+  test('the salt region, allowed for age, has about double the rot of the others', () => {
+    const fact = PLANTED_FACTS.saltRegion;
+    const regions = [...new Set(cars.map((car) => car.region))];
+    const others = regions.filter((region) => region !== fact.region);
+    const elsewhere =
+      others.reduce((all, region) => all + adjustedRot(cars, region), 0) / others.length;
+    const times = adjustedRot(cars, fact.region) / elsewhere;
+    expect(times).toBeGreaterThan(fact.adjustedTimesAbove);
+    expect(times).toBeLessThan(fact.adjustedTimesBelow);
+  });
+
+  test('rot by age, over the network, is about 3 % under five years and over half from fifteen', () => {
+    const share = (band: string) => rotShare(cars.filter((car) => car.figures.ageBand === band));
+    expect(share('0-4')).toBeGreaterThan(0.02);
+    expect(share('0-4')).toBeLessThan(0.05);
+    expect(share('15-19')).toBeGreaterThan(0.5);
+    expect(share('20+')).toBeGreaterThan(share('15-19'));
+  });
+
+  test('the worst zone, in every region, is met in most cars', () => {
+    for (const region of new Set(cars.map((car) => car.region))) {
+      const zones = new Map<string, number>();
+      for (const car of cars.filter((one) => one.region === region)) {
+        for (const zone of new Set((car.content.findings ?? []).filter(isRot).map((f) => f.zone))) {
+          zones.set(zone, (zones.get(zone) ?? 0) + 1);
+        }
+      }
+      const [first] = [...zones].sort((a, b) => b[1] - a[1]);
+      expect(first![0]).toBe(PLANTED_FACTS.worstZone.zone);
+    }
+  });
+
+  test('the worst model, among those with 300 cars of its age, is most often rotten', () => {
+    const { make, model, ageBand } = PLANTED_FACTS.worstModel;
+    const groups = new Map<string, Car[]>();
+    for (const car of cars.filter((one) => one.figures.ageBand === ageBand)) {
+      const name = `${car.content.vehicle.make} ${car.content.vehicle.model}`;
+      groups.set(name, [...(groups.get(name) ?? []), car]);
+    }
+    const ranked = [...groups]
+      .filter(([, group]) => group.length >= 300)
+      .sort((a, b) => rotShare(b[1]) - rotShare(a[1]));
+    expect(ranked.length).toBeGreaterThan(5);
+    expect(ranked[0]![0]).toBe(`${make} ${model}`);
+  });
+
+  test('cavity wax, on full hatchbacks and overall, is used more in the cold', () => {
+    const fact = PLANTED_FACTS.coldWax;
+    for (const group of [
+      cars,
+      cars.filter((car) => car.content.vehicle.bodyType === 'hatchback'),
+    ]) {
+      const slope = leastSquares(
+        group.flatMap((car) => {
+          const ml = car.figures.products.get(fact.product)?.ml;
+          const at = car.content.workshop?.temperatureC;
+          return ml && at !== undefined ? [[at, ml] as const] : [];
+        }),
+      );
+      expect(slope).toBeLessThan(fact.slopeMlPerDegreeBelow);
+      expect(slope).toBeGreaterThan(fact.slopeMlPerDegreeAbove);
+    }
+  });
+
+  test('claims, over cars whose 36 months have run, come from 2 to 4 in a hundred', () => {
+    const run = cars.filter(
+      (car) => WARRANTY.get(car.content.package) === 36 && car.warrantyEnd < today,
+    );
+    expect(run.length).toBeGreaterThan(10_000);
+    expect(claimsPerCar(run)).toBeGreaterThan(0.02);
+    expect(claimsPerCar(run)).toBeLessThan(0.04);
+  });
+
+  test('no cost is missing for any job', () => {
+    expect(cars.filter((car) => car.figures.missing.length > 0)).toEqual([]);
+  });
+});
+
+function carsOn(today: string): Car[] {
+  const network = generateNetwork({ seed: DEMO_SEED, today });
+  const costs = costBookOf(network.setUp);
+  const regions = new Map(network.setUp.branches.map((branch) => [branch.code, branch.region]));
+  const cars: Car[] = [];
+  for (const history of network.histories()) {
+    const byRef = new Map<string, Car>();
+    for (const job of history.jobs.filter((one) => !one.voided)) {
+      const content = newestContent(job);
+      const car: Car = {
+        branch: history.branchCode,
+        region: regions.get(history.branchCode)!,
+        content,
+        figures: deriveFigures(normaliseJob(content as never), history.branchCode, costs),
+        claims: [],
+        warrantyEnd: addMonths(content.completedOn, WARRANTY.get(content.package)!),
+      };
+      cars.push(car);
+      byRef.set(job.jobRef, car);
+    }
+    for (const claim of history.claims) {
+      const car = byRef.get(claim.content.jobRef)!;
+      if (claim.content.decision !== 'refused' && claim.content.madeOn <= car.warrantyEnd) {
+        car.claims.push(claim);
+      }
+    }
+  }
+  return cars;
+}
+
+function of(cars: Car[], branch: string): Car[] {
+  return cars.filter((car) => car.branch === branch);
+}
+
+function branchesOf(cars: Car[]): string[] {
+  return [...new Set(cars.map((car) => car.branch))];
+}
+
+/** Margin shares of the billed weeks that are over, oldest first (rules 4 and 7). */
+function weeklyMargins(cars: Car[], branch: string, today: string): number[] {
+  const weeks = new Map<string, { margin: number; revenue: number }>();
+  for (const { figures } of of(cars, branch)) {
+    if (!figures.billed || !figures.money || figures.week === isoWeek(today)) continue;
+    const week = weeks.get(figures.week) ?? { margin: 0, revenue: 0 };
+    week.margin += marginCents(figures.money);
+    week.revenue += figures.money.revenueCents;
+    weeks.set(figures.week, week);
+  }
+  return [...weeks]
+    .sort(([a], [b]) => (a < b ? -1 : 1))
+    .map(([, week]) => week.margin / week.revenue);
+}
+
+function indices(values: number[]): number[] {
+  return values.map((_, index) => index);
+}
+
+function ratioToNorm(cars: Car[]): number {
+  let ml = 0;
+  let norm = 0;
+  for (const { content, figures } of cars) {
+    for (const line of NORM_BOOK.norm(content.package, content.vehicle.bodyType) ?? []) {
+      norm += line.ml;
+      ml += figures.products.get(line.product)?.ml ?? 0;
+    }
+  }
+  return ml / norm;
+}
+const NORM_BOOK = costBookOf(generateNetwork({ seed: DEMO_SEED, today: '2026-02-02' }).setUp);
+
+function shareNo(cars: Car[]): number {
+  const answers = cars.map((car) => car.content.checks?.[PLANTED_FACTS.checkSkippingBranch.check]);
+  const no = answers.filter((answer) => answer === 'no').length;
+  return no / (no + answers.filter((answer) => answer === 'yes').length);
+}
+
+function stageRatio(cars: Car[], stage: Stage): number {
+  let estimated = 0;
+  let actual = 0;
+  for (const { figures } of cars.filter((car) => car.figures.hasEstimate)) {
+    estimated += figures.estimated[stage];
+    actual += figures.actual[stage];
+  }
+  return actual / estimated;
+}
+
+function rotShare(cars: Car[]): number {
+  return cars.filter((car) => car.figures.hasRot).length / cars.length;
+}
+
+/** Direct standardisation to the network's age mix. */
+function adjustedRot(cars: Car[], region: string): number {
+  return AGE_BANDS.reduce((all, band) => {
+    const inBand = cars.filter((car) => car.figures.ageBand === band);
+    const here = inBand.filter((car) => car.region === region);
+    return all + (inBand.length / cars.length) * rotShare(here);
+  }, 0);
+}
+
+function carYears(car: Car, today: string): number {
+  const until = car.warrantyEnd < today ? car.warrantyEnd : today;
+  return (dayNumber(until) - dayNumber(car.content.completedOn)) / 365.25;
+}
+
+function claimsPerCarYear(cars: Car[], today: string): number {
+  const years = cars.reduce((all, car) => all + carYears(car, today), 0);
+  return cars.reduce((all, car) => all + car.claims.length, 0) / years;
+}
+
+function claimsPerCar(cars: Car[]): number {
+  return cars.reduce((all, car) => all + car.claims.length, 0) / cars.length;
+}
+
+/** What the network's claims a car by package, age band and cohort would give for the branch's own cars. */
+function expectedClaims(cars: Car[], branch: string): number {
+  const groups = new Map<string, Car[]>();
+  const key = (car: Car) =>
+    `${car.content.package} ${car.figures.ageBand} ${cohortOf(car.content.completedOn)}`;
+  for (const car of cars) {
+    const group = groups.get(key(car));
+    if (group) group.push(car);
+    else groups.set(key(car), [car]);
+  }
+  const rates = new Map([...groups].map(([name, group]) => [name, claimsPerCar(group)]));
+  return of(cars, branch).reduce((all, car) => all + rates.get(key(car))!, 0);
+}
+
+function observedOverExpected(cars: Car[], branch: string): number {
+  const observed = of(cars, branch).reduce((all, car) => all + car.claims.length, 0);
+  return observed / expectedClaims(cars, branch);
+}
+
+function leastSquares(points: (readonly [number, number])[]): number {
+  const n = points.length;
+  const meanX = points.reduce((all, [x]) => all + x, 0) / n;
+  const meanY = points.reduce((all, [, y]) => all + y, 0) / n;
+  const xy = points.reduce((all, [x, y]) => all + (x - meanX) * (y - meanY), 0);
+  return xy / points.reduce((all, [x]) => all + (x - meanX) ** 2, 0);
+}
