@@ -4,7 +4,7 @@ import { existsSync } from 'node:fs';
 import { migrations, migrationSource } from './migrations';
 
 /** Marks a SQLite file as Underseam's ("USea" in ASCII). */
-const APPLICATION_ID = 0x55536561;
+export const APPLICATION_ID = 0x55536561;
 
 /** A problem with the data folder or file that a person must solve; its message is one clear sentence. */
 export class DatabaseRefused extends Error {}

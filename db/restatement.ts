@@ -2,7 +2,7 @@ import { type CostBook, type CostChange } from '#shared/domain/cost-book';
 import type { RecordedJob } from '#shared/domain/recorded-job';
 import { sql, type Connection } from './database';
 import { deriveRows, insertDerived, sameRows, type DerivedRows } from './derived-rows';
-import { FACT_COLUMNS, type JobIdentity } from './queries/fact-row';
+import type { JobIdentity } from './queries/fact-row';
 import type { Store } from './store';
 import { NO_END } from './tables';
 

@@ -109,6 +109,12 @@ export function mount<
   });
 }
 
+/** The branch named in the path; `mount` has refused the call already when it is out of scope. */
+export function namedBranch(call: Pick<Call, 'branch'>): ScopedBranch {
+  if (!call.branch) throw notFound();
+  return call.branch;
+}
+
 function checkAccess(endpoint: Endpoint, caller: Caller): void {
   if (endpoint.access === 'public') return;
   const allowed =

@@ -8,7 +8,7 @@ import { breaksOfClaim } from '#shared/domain/claim-rules';
 import { notFound } from '#shared/domain/refusal';
 import { actorOf } from '../../auth/caller';
 import { realClock } from '../../clock';
-import { mount, type Call, type Mounting } from '../../http/mount';
+import { mount, namedBranch, type Call, type Mounting } from '../../http/mount';
 import { checkPreconditions, tagOf } from '#shared/domain/preconditions';
 import type { Kit } from '../../kit';
 import { acceptClaim, type ClaimSending } from './accept-claim';
@@ -23,7 +23,7 @@ export function mountClaims(mounting: Mounting, kit: Kit): void {
     mounting,
     putClaim,
     async (call) => {
-      const writer = new ClaimWriter(store, named(call));
+      const writer = new ClaimWriter(store, namedBranch(call));
       const accepted = await store.queue.write(() =>
         acceptClaim(writer, call.params.claimRef, call.body, {
           ...sendingOf(kit, call),
@@ -48,7 +48,7 @@ export function mountClaims(mounting: Mounting, kit: Kit): void {
   );
 
   mount(mounting, putClaimBatch, async (call) => {
-    const branch = named(call);
+    const branch = namedBranch(call);
     return {
       body: await acceptClaimBatch(
         store,
@@ -61,7 +61,7 @@ export function mountClaims(mounting: Mounting, kit: Kit): void {
   });
 
   mount(mounting, getClaim, (call) => {
-    const branch = named(call);
+    const branch = namedBranch(call);
     const found = findClaim(store.scoped(call.scope), branch.code, call.params.claimRef);
     if (!found) throw notFound();
     const { costCents = 0, ...content } = found.content;
@@ -92,9 +92,4 @@ function sendingOf(kit: Kit, call: Call): ClaimSending {
     role: caller?.kind === 'person' ? caller.role : 'site_manager',
     limitCents: readNetwork(kit.store.unscoped).claimLimitCents,
   };
-}
-
-function named(call: Pick<Call, 'branch'>): ScopedBranch {
-  if (!call.branch) throw notFound();
-  return call.branch;
 }

@@ -6,7 +6,7 @@ import { breaksOfJob, type JobWorld } from '#shared/domain/job-rules';
 import { notFound } from '#shared/domain/refusal';
 import { actorOf, type Caller } from '../../auth/caller';
 import { realClock } from '../../clock';
-import { mount, type Call, type Mounting } from '../../http/mount';
+import { mount, namedBranch, type Call, type Mounting } from '../../http/mount';
 import type { Kit } from '../../kit';
 import { acceptBatch } from './accept-batch';
 import { acceptJob, type Sending } from './accept-job';
@@ -25,7 +25,7 @@ export function mountJobs(mounting: Mounting, kit: Kit): void {
     mounting,
     putJob,
     async (call) => {
-      const branch = named(call);
+      const branch = namedBranch(call);
       const accepted = await store.queue.write(() =>
         acceptJob(
           new BranchWriter(store, branch),
@@ -44,7 +44,7 @@ export function mountJobs(mounting: Mounting, kit: Kit): void {
   );
 
   mount(mounting, putJobBatch, async (call) => {
-    const branch = named(call);
+    const branch = namedBranch(call);
     const sending = { ...sendingOf(kit, call, ''), preconditions: NONE };
     return { body: await acceptBatch(store, branch, call.body.jobs, world(branch), sending) };
   });
@@ -52,7 +52,7 @@ export function mountJobs(mounting: Mounting, kit: Kit): void {
   mount(mounting, getJob, (call) => {
     const sheet = readJobSheet(
       store.scoped(call.scope),
-      named(call).code,
+      namedBranch(call).code,
       call.params.jobRef,
       store.state.costs,
       moneyFor(call.caller),
@@ -61,7 +61,7 @@ export function mountJobs(mounting: Mounting, kit: Kit): void {
   });
 
   mount(mounting, voidJob, async (call) => {
-    const branch = named(call);
+    const branch = namedBranch(call);
     await store.queue.write(() => {
       const writer = new BranchWriter(store, branch);
       const stored = writer.findJob(call.params.jobRef);
@@ -74,7 +74,7 @@ export function mountJobs(mounting: Mounting, kit: Kit): void {
   });
 
   mount(mounting, billJob, async (call) => {
-    const branch = named(call);
+    const branch = namedBranch(call);
     const today = localDate(kit.clock.now(), branch.timeZone);
     const accepted = await store.queue.write(() =>
       writeBill(
@@ -95,11 +95,6 @@ const NONE: Sending['preconditions'] = {
   lastChange: () => '',
 };
 
-function named(call: Pick<Call, 'branch'>): ScopedBranch {
-  if (!call.branch) throw notFound();
-  return call.branch;
-}
-
 function sendingOf(kit: Kit, call: Call, jobRef: string): Sending {
   const { caller } = call;
   return {
@@ -110,7 +105,7 @@ function sendingOf(kit: Kit, call: Call, jobRef: string): Sending {
     preconditions: {
       ifMatch: call.ifMatch,
       ifNoneMatch: call.ifNoneMatch,
-      lastChange: () => lastChange(kit.store.scoped(call.scope), named(call).code, jobRef),
+      lastChange: () => lastChange(kit.store.scoped(call.scope), namedBranch(call).code, jobRef),
     },
   };
 }

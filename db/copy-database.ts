@@ -1,0 +1,113 @@
+import BetterSqlite3 from 'better-sqlite3';
+import { existsSync, statSync } from 'node:fs';
+import { APPLICATION_ID, Connection, DatabaseRefused, openReader } from './database';
+import { migrations } from './migrations';
+import { verifyAudit } from './queries/audit';
+import { UnscopedDb } from './unscoped-db';
+
+/** What a checked database file holds. */
+export interface DatabaseContents {
+  bytes: number;
+  jobs: number;
+  auditEvents: number;
+}
+
+/** Every page in one step: a copy in small steps starts again whenever another connection writes, and may never end. */
+const ALL_PAGES = 0x7fffffff;
+
+/**
+ * Copies a database, even one that is being written to, as it stood at one instant, into a new file that needs no companion
+ * files.
+ */
+export async function copyDatabase(from: string, to: string): Promise<void> {
+  if (!existsSync(from)) throw new DatabaseRefused(`There is no database ${from}.`);
+  const reader = openReader(from);
+  try {
+    await reader.driver.backup(to, { progress: () => ALL_PAGES });
+  } catch (error) {
+    throw new DatabaseRefused(
+      `The database ${from} could not be copied to ${to}: ${reasonOf(error)}.`,
+    );
+  } finally {
+    reader.close();
+  }
+  settle(to);
+}
+
+/** Checks a file from its first page to the last link of its audit trail; throws `DatabaseRefused` naming what is wrong. */
+export function inspectDatabase(file: string): DatabaseContents {
+  if (!existsSync(file)) throw new DatabaseRefused(`There is no file ${file}.`);
+  let connection: Connection | undefined;
+  try {
+    connection = openReader(file);
+    const { driver } = connection;
+    if (driver.pragma('application_id', { simple: true }) !== APPLICATION_ID) {
+      throw new DatabaseRefused(`The file ${file} is not an Underseam database.`);
+    }
+    if (Number(driver.pragma('user_version', { simple: true })) > migrations.length) {
+      throw new DatabaseRefused(`The file ${file} was made by a newer Underseam.`);
+    }
+    const pages: unknown = driver.pragma('integrity_check(1)', { simple: true });
+    const strays: unknown = driver.pragma('foreign_key_check');
+    if (pages !== 'ok' || !Array.isArray(strays) || strays.length > 0) throw damaged(file);
+    const trail = verifyAudit(new UnscopedDb(connection));
+    if (trail.brokenAt !== null) {
+      throw new DatabaseRefused(
+        `The audit trail of ${file} does not hold: event ${trail.brokenAt} does not follow from the one before it.`,
+      );
+    }
+    const jobs = Number(driver.prepare('select count(*) from jobs').pluck().get());
+    return { bytes: statSync(file).size, jobs, auditEvents: trail.events };
+  } catch (error) {
+    throw error instanceof DatabaseRefused ? error : damaged(file);
+  } finally {
+    connection?.close();
+  }
+}
+
+/**
+ * Folds a database that nobody has open into its one file. Throws `DatabaseRefused` while any other program has it open; a
+ * damaged file is left as it is.
+ */
+export function closeDatabaseFile(file: string): void {
+  try {
+    settle(file);
+  } catch (error) {
+    if (codeOf(error)?.startsWith('SQLITE_BUSY')) {
+      throw new DatabaseRefused(`The database ${file} is in use; stop the server first.`);
+    }
+    if (!/^SQLITE_(NOTADB|CORRUPT)/.test(codeOf(error) ?? '')) throw error;
+  }
+}
+
+/** Runs one write on a file that no server has open. */
+export function writeOnce(file: string, write: (db: UnscopedDb) => void): void {
+  const connection = new Connection(new BetterSqlite3(file, { fileMustExist: true }));
+  try {
+    connection.driver.transaction(() => write(new UnscopedDb(connection)))();
+  } finally {
+    connection.close();
+  }
+}
+
+/** Leaving WAL mode needs the file for oneself, writes everything into it and removes its companions. */
+function settle(file: string): void {
+  const driver = new BetterSqlite3(file, { fileMustExist: true, timeout: 500 });
+  try {
+    driver.pragma('journal_mode = delete');
+  } finally {
+    driver.close();
+  }
+}
+
+function damaged(file: string): DatabaseRefused {
+  return new DatabaseRefused(`The file ${file} is damaged or not a database.`);
+}
+
+function codeOf(error: unknown): string | undefined {
+  return error instanceof Error && 'code' in error ? String(error.code) : undefined;
+}
+
+function reasonOf(error: unknown): string {
+  return codeOf(error) ?? 'unknown reason';
+}

@@ -1,0 +1,81 @@
+import compression from 'compression';
+import express, { Router, type Express } from 'express';
+import helmet from 'helmet';
+import type { Logger } from 'pino';
+import { pinoHttp } from 'pino-http';
+import type { Endpoint } from '#shared/contracts/endpoint';
+import { limitAttempts } from './auth/limit-attempts';
+import { makeAuthenticate } from './auth/authenticate';
+import { mountBookings } from './features/bookings/bookings.endpoints';
+import { mountClaims } from './features/claims/claims.endpoints';
+import { mountExports } from './features/exports/exports.endpoints';
+import { mountJobList } from './features/job-list/job-list.endpoints';
+import { mountJobs } from './features/jobs/jobs.endpoints';
+import { mountMailbox } from './features/mailbox/mailbox.endpoints';
+import { mountMargin } from './features/margin/margin.endpoints';
+import { mountOverrun } from './features/overrun/overrun.endpoints';
+import { mountPeople } from './features/people/people.endpoints';
+import { mountPushKeys } from './features/push-keys/push-keys.endpoints';
+import { mountSetUp } from './features/set-up/set-up.endpoints';
+import { mountSignIn } from './features/sign-in/sign-in.endpoints';
+import { mountSystem } from './features/system/system.endpoints';
+import { mountWeeks } from './features/weeks/weeks.endpoints';
+import { mountDashboard } from './http/dashboard';
+import { mountDocs } from './http/docs';
+import { handleErrors, nothingHere } from './http/error-handler';
+import type { Mounting } from './http/mount';
+import { describeApi } from './http/openapi';
+import type { Kit } from './kit';
+
+export interface App {
+  express: Express;
+  /** Every contract that is mounted, for the tests that walk them. */
+  mounted: readonly Endpoint[];
+}
+
+/** Puts the product together: every route through `mount`, the description of the API, the dashboard, one error handler. */
+export function createApp(kit: Kit, log: Logger, dashboard: string): App {
+  const app = express();
+  app.disable('x-powered-by');
+  app.set('query parser', 'simple');
+  app.set('trust proxy', 'loopback');
+  app.use(helmet({ contentSecurityPolicy: false }));
+  app.use(compression({ filter: isText }));
+  app.use(pinoHttp({ logger: log, useLevel: 'debug', autoLogging: log.isLevelEnabled('debug') }));
+
+  const router = Router();
+  const mounting: Mounting = {
+    router,
+    authenticate: makeAuthenticate(kit),
+    branches: () => kit.store.state.branches,
+    mounted: [],
+  };
+  limitAttempts(router);
+  mountSystem(mounting, kit);
+  mountSignIn(mounting, kit);
+  mountPeople(mounting, kit);
+  mountPushKeys(mounting, kit);
+  mountSetUp(mounting, kit);
+  mountJobs(mounting, kit);
+  mountJobList(mounting, kit);
+  mountClaims(mounting, kit);
+  mountBookings(mounting, kit);
+  mountMargin(mounting, kit);
+  mountOverrun(mounting, kit);
+  mountWeeks(mounting, kit);
+  mountExports(mounting, kit);
+  mountMailbox(mounting, kit);
+  mountDocs(router, () => describeApi(mounting.mounted, kit.version));
+
+  app.use(router);
+  app.use('/api', nothingHere);
+  mountDashboard(app, dashboard);
+  app.use(handleErrors(log));
+  return { express: app, mounted: mounting.mounted };
+}
+
+/** Exports stream through a worker at their own pace; compressing them would buffer. */
+function isText(request: express.Request, response: express.Response): boolean {
+  if (request.path.startsWith('/api/exports/')) return false;
+  return compression.filter(request, response);
+}

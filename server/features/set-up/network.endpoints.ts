@@ -1,0 +1,74 @@
+import { recordAudit } from '#db/queries/audit';
+import * as catalogue from '#db/queries/catalogue';
+import { isNetworkSet, readNetwork, writeNetwork } from '#db/queries/network';
+import { putCost } from '#db/queries/set-up';
+import * as contract from '#shared/contracts/set-up';
+import { FROM_THE_START } from '#shared/domain/cost-book';
+import { feeRateMicros } from '#shared/domain/money';
+import type { BodyType } from '#shared/domain/vocabulary';
+import { todayIn } from '../../clock';
+import { mount, type Mounting } from '../../http/mount';
+import type { Kit } from '../../kit';
+import { changing } from './changing';
+
+/** The network's own settings, and the catalogue that everyone signed in reads (rule 79). */
+export function mountNetwork(mounting: Mounting, kit: Kit): void {
+  const { store } = kit;
+
+  mount(mounting, contract.putNetwork, async (call) => {
+    const { feeRate, targetMarginShare = null, claimLimitCents = null, ...named } = call.body;
+    const network = { ...named, targetMarginShare, claimLimitCents };
+    const wasSet = isNetworkSet(store.unscoped);
+    const before = readNetwork(store.unscoped);
+    const { actor, at, subject } = changing(call, '/network');
+    const fee = {
+      kind: 'fee',
+      from: FROM_THE_START,
+      value: feeRateMicros(feeRate),
+    } as const;
+    await store.restatement.apply(fee, () => {
+      putCost(store.unscoped, fee);
+      writeNetwork(store.unscoped, network);
+      recordAudit(store.unscoped, {
+        at,
+        actor,
+        action: 'network.set',
+        subject,
+        branchId: null,
+        detail: { before, after: { ...network, feeRate } },
+      });
+    });
+    return { status: wasSet ? 200 : 201, body: { ...network, feeRate } };
+  });
+
+  mount(mounting, contract.getCatalogue, (call) => {
+    const { regions, branches } = call.scope.echo();
+    const { name, currency } = readNetwork(store.unscoped);
+    return {
+      body: {
+        network: { name, currency },
+        regions: catalogue.listRegions(store.unscoped, regions),
+        branches: catalogue.listBranches(store.unscoped, branches),
+        packages: catalogue.listPackages(store.unscoped),
+        products: catalogue.listProducts(store.unscoped),
+        norms: grouped(catalogue.listNorms(store.unscoped)),
+        today: todayIn(call.scope, kit.clock),
+      },
+    };
+  });
+}
+
+type NormLine = ReturnType<typeof catalogue.listNorms>[number];
+
+function grouped(
+  lines: readonly NormLine[],
+): { package: string; bodyType: BodyType; norms: { product: string; ml: number }[] }[] {
+  const norms = new Map<string, ReturnType<typeof grouped>[number]>();
+  for (const line of lines) {
+    const key = `${line.package} ${line.bodyType}`;
+    const norm = norms.get(key) ?? { package: line.package, bodyType: line.bodyType, norms: [] };
+    norm.norms.push({ product: line.product, ml: line.ml });
+    norms.set(key, norm);
+  }
+  return [...norms.values()];
+}
