@@ -4,7 +4,7 @@ import helmet from 'helmet';
 import type { Logger } from 'pino';
 import { pinoHttp } from 'pino-http';
 import type { Endpoint } from '#shared/contracts/endpoint';
-import { limitAttempts } from './auth/limit-attempts';
+import { attemptLimits } from './auth/attempt-limits';
 import { makeAuthenticate } from './auth/authenticate';
 import { mountBookings } from './features/bookings/bookings.endpoints';
 import { mountClaims } from './features/claims/claims.endpoints';
@@ -43,6 +43,7 @@ export function createApp(kit: Kit, log: Logger, dashboard: string): App {
   app.use(compression({ filter: isText }));
   app.use(pinoHttp({ logger: log, useLevel: 'debug', autoLogging: log.isLevelEnabled('debug') }));
 
+  app.use(attemptLimits());
   const router = Router();
   const mounting: Mounting = {
     router,
@@ -50,7 +51,6 @@ export function createApp(kit: Kit, log: Logger, dashboard: string): App {
     branches: () => kit.store.state.branches,
     mounted: [],
   };
-  limitAttempts(router);
   mountSystem(mounting, kit);
   mountSignIn(mounting, kit);
   mountPeople(mounting, kit);
