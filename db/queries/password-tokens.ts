@@ -39,7 +39,10 @@ export function findTokenHolder(
 /** Makes every token of a person worthless. */
 export function useUpTokensOf(db: UnscopedDb, personId: number, at: string): void {
   db.run(
-    sql('password_tokens').where({ person_id: personId }).whereNull('used_at').update({ used_at: at }),
+    sql('password_tokens')
+      .where({ person_id: personId })
+      .whereNull('used_at')
+      .update({ used_at: at }),
   );
 }
 

@@ -78,7 +78,13 @@ export function findLogin(db: UnscopedDb, email: string): Login | undefined {
 }
 
 export function emailTaken(db: UnscopedDb, email: string): boolean {
-  return db.first(sql('people').where({ email_key: emailKey(email) }).select('id')) !== undefined;
+  return (
+    db.first(
+      sql('people')
+        .where({ email_key: emailKey(email) })
+        .select('id'),
+    ) !== undefined
+  );
 }
 
 /** Adds a person; without a password hash they are invited. Returns their id. */
