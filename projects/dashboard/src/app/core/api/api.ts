@@ -1,6 +1,12 @@
-import { HttpClient, HttpContext, type HttpResponse } from '@angular/common/http';
+import {
+  HttpClient,
+  HttpContext,
+  type HttpEvent,
+  HttpEventType,
+  type HttpResponse,
+} from '@angular/common/http';
 import { inject, Injectable } from '@angular/core';
-import { map, type Observable } from 'rxjs';
+import { filter, map, type Observable } from 'rxjs';
 import type * as z from 'zod';
 import type { Endpoint, OutOf, ParamsOf, QueryOf } from '#shared/contracts/endpoint';
 import { NEEDS_TOKEN } from './needs-token';
@@ -30,6 +36,11 @@ export interface Answer<T> {
   readonly status: number;
 }
 
+/** A file on its way: how much has come, then the file. */
+export type Download =
+  | { readonly kind: 'coming'; readonly bytes: number }
+  | { readonly kind: 'whole'; readonly file: Blob };
+
 /** The one way from a page to the server: a contract in, its typed answer out. */
 @Injectable({ providedIn: 'root' })
 export class Api {
@@ -47,6 +58,23 @@ export class Api {
         responseType: endpoint.out === 'csv' || endpoint.out === 'html' ? 'text' : 'json',
       } as { observe: 'response'; responseType: 'json' })
       .pipe(map((response) => answerOf<E>(response)));
+  }
+
+  /** Fetches a file with the token, which a plain link could not carry; unsubscribing cancels it. */
+  download<E extends Endpoint>(endpoint: E, request: RequestOf<E>): Observable<Download> {
+    const { params, query, headers } = request as LooseRequest;
+    return this.http
+      .request(endpoint.method, requestUrl(endpoint.path, params, query), {
+        headers,
+        context: new HttpContext().set(NEEDS_TOKEN, endpoint.access !== 'public'),
+        observe: 'events',
+        reportProgress: true,
+        responseType: 'blob',
+      })
+      .pipe(
+        map(downloadOf),
+        filter((step) => step !== undefined),
+      );
   }
 
   /**
@@ -74,4 +102,10 @@ function answerOf<E extends Endpoint>(response: HttpResponse<unknown>): Answer<O
     etag: response.headers.get('ETag') ?? undefined,
     status: response.status,
   };
+}
+
+function downloadOf(event: HttpEvent<Blob>): Download | undefined {
+  if (event.type === HttpEventType.DownloadProgress) return { kind: 'coming', bytes: event.loaded };
+  if (event.type !== HttpEventType.Response) return undefined;
+  return { kind: 'whole', file: event.body ?? new Blob([]) };
 }

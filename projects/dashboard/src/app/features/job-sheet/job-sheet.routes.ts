@@ -1,4 +1,5 @@
 import type { Routes } from '@angular/router';
+import { JobSheetPage } from './job-sheet-page';
 
-const routes: Routes = [];
+const routes: Routes = [{ path: '', component: JobSheetPage }];
 export default routes;

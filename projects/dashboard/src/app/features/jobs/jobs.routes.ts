@@ -1,4 +1,5 @@
 import type { Routes } from '@angular/router';
+import { JobsPage } from './jobs-page';
 
-const routes: Routes = [];
+const routes: Routes = [{ path: '', component: JobsPage }];
 export default routes;

@@ -1,0 +1,36 @@
+import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import type { JobSheet } from '#shared/contracts/jobs';
+import { ConditionSign } from '../../ui/condition-sign/condition-sign';
+import { formatExactMoney, formatMinutes } from '../../ui/format';
+import { ACTION_NAMES, CONDITION_NAMES, SIDE_NAMES, ZONE_NAMES } from '../../ui/words';
+import { isLeftDangerous } from './cautions';
+
+/** Rust found on the car, zone by zone: as seen, as worked, what was done. */
+@Component({
+  selector: 'us-findings-list',
+  imports: [ConditionSign],
+  templateUrl: './findings-list.html',
+  styleUrl: './findings-list.scss',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
+export class FindingsList {
+  readonly findings = input.required<NonNullable<JobSheet['findings']>>();
+  readonly currency = input.required<string>();
+
+  protected readonly items = computed(() =>
+    this.findings().map((finding) => ({
+      ...finding,
+      place: `${ZONE_NAMES[finding.zone]}, ${SIDE_NAMES[finding.side]}`,
+      seen: CONDITION_NAMES[finding.seenAs],
+      worked: finding.workedAs && CONDITION_NAMES[finding.workedAs],
+      done: ACTION_NAMES[finding.action],
+      dangerous: isLeftDangerous(finding),
+      work: [
+        ...(finding.repairMinutes ? [`repair ${formatMinutes(finding.repairMinutes)}`] : []),
+        ...(finding.chargedCents !== undefined
+          ? [`charged ${formatExactMoney(finding.chargedCents, this.currency())}`]
+          : []),
+      ].join(', '),
+    })),
+  );
+}

@@ -1,0 +1,153 @@
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  DOCUMENT,
+  inject,
+  input,
+} from '@angular/core';
+import { MatButton } from '@angular/material/button';
+import { MatDialog } from '@angular/material/dialog';
+import { Router, RouterLink } from '@angular/router';
+import { firstValueFrom } from 'rxjs';
+import { getJob } from '#shared/contracts/jobs';
+import { BridgeChart } from '../../charts/bridge/bridge-chart';
+import { Api } from '../../core/api/api';
+import { Catalogue } from '../../core/catalogue/catalogue';
+import { Session } from '../../core/session/session';
+import { Answer } from '../../ui/answer/answer';
+import { Caution } from '../../ui/caution/caution';
+import { DataTable } from '../../ui/data-table/data-table';
+import { DefinitionLink } from '../../ui/definition-link/definition-link';
+import {
+  currencySign,
+  formatCount,
+  formatDate,
+  formatExactMoney,
+  formatMinutes,
+} from '../../ui/format';
+import { LoadState } from '../../ui/load-state/load-state';
+import { CONSUMABLE_NAMES } from '../../ui/words';
+import { bridgeSeries, bridgeWords } from './bridge-series';
+import { cautionsOf } from './cautions';
+import { FactList } from './fact-list';
+import { billFacts, carFacts, checkFacts, dateFacts, type Fact, workshopFacts } from './facts';
+import { FindingsList } from './findings-list';
+import { missingCostWords } from './missing-cost-words';
+import { moneyLines } from './money-lines';
+import { productColumns, productRows } from './product-rows';
+import { REVISION_COLUMNS } from './revision-columns';
+import { sheetSentence } from './sheet-sentence';
+import { stageColumns, stageRows } from './stage-rows';
+import { VoidDialog, type VoidDialogData } from './void-dialog';
+
+/** Everything recorded of one job. */
+@Component({
+  selector: 'us-job-sheet-page',
+  imports: [
+    Answer,
+    BridgeChart,
+    Caution,
+    DataTable,
+    DefinitionLink,
+    FactList,
+    FindingsList,
+    LoadState,
+    MatButton,
+    RouterLink,
+  ],
+  templateUrl: './job-sheet-page.html',
+  styleUrl: './job-sheet-page.scss',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
+export class JobSheetPage {
+  private readonly catalogue = inject(Catalogue);
+  private readonly dialog = inject(MatDialog);
+  private readonly router = inject(Router);
+  private readonly window = inject(DOCUMENT).defaultView;
+  private readonly role = inject(Session).role;
+
+  // From the path.
+  readonly branch = input.required<string>();
+  readonly jobRef = input.required<string>();
+
+  protected readonly job = inject(Api).read(getJob, () => ({
+    params: { branch: this.branch(), jobRef: this.jobRef() },
+  }));
+
+  protected readonly mayVoid = computed(
+    () => this.role() === 'site_manager' || this.role() === 'head_office',
+  );
+  protected readonly sign = computed(() => currencySign(this.catalogue.currency()));
+  protected readonly currency = this.catalogue.currency;
+  protected readonly sheet = computed(() => {
+    const job = this.job.value();
+    if (!job) return undefined;
+    const packageName = this.catalogue.packageName(job.package);
+    return {
+      ...job,
+      ...sheetSentence(job, {
+        currency: this.currency(),
+        packageName,
+        branchName: this.catalogue.branchName(job.branch),
+      }),
+      cautions: cautionsOf(job),
+      car: carFacts(job),
+      dates: dateFacts(job, packageName),
+      bill: billFacts(job, this.currency()),
+      checked: checkFacts(job),
+      air: workshopFacts(job),
+      stages: stageRows(job),
+      stageColumns: stageColumns(job),
+      productRows: productRows(
+        job.products,
+        this.catalogue.normsOf(job.package, job.vehicle.bodyType),
+      ),
+      lines: job.money ? moneyLines(job.money) : [],
+      bridge: job.money?.bridge ? bridgeSeries(job.money.bridge) : undefined,
+      bridgeWords: job.money?.bridge ? bridgeWords(job.money.bridge) : '',
+      missing: (job.missingCosts ?? []).map((cost) =>
+        missingCostWords(cost, {
+          branchName: (code) => this.catalogue.branchName(code),
+          productName: (code) => this.catalogue.productName(code),
+        }),
+      ),
+    };
+  });
+  protected readonly productColumns = productColumns((code) => this.catalogue.productName(code));
+  protected readonly revisionColumns = REVISION_COLUMNS;
+  protected readonly consumables = computed<readonly Fact[]>(() =>
+    (this.job.value()?.consumables ?? []).map((one) => ({
+      name: CONSUMABLE_NAMES[one.kind],
+      text:
+        one.unitCostCents === undefined
+          ? formatCount(one.quantity)
+          : `${formatCount(one.quantity)} at ${formatExactMoney(one.unitCostCents, this.currency())}`,
+    })),
+  );
+  protected readonly extras = computed<readonly Fact[]>(() =>
+    (this.job.value()?.agreedExtras ?? []).map((extra) => ({
+      name: [formatDate(extra.on), extra.note].filter((part) => part).join(': '),
+      text: [
+        formatMinutes(extra.minutes),
+        ...(extra.priceCents === undefined
+          ? []
+          : [formatExactMoney(extra.priceCents, this.currency())]),
+      ].join(', '),
+    })),
+  );
+
+  protected print(): void {
+    this.window?.print();
+  }
+
+  protected async askToVoid(): Promise<void> {
+    const data: VoidDialogData = {
+      branch: this.branch(),
+      jobRef: this.jobRef(),
+      etag: this.job.etag(),
+    };
+    const dialog = this.dialog.open<VoidDialog, VoidDialogData, boolean>(VoidDialog, { data });
+    if (await firstValueFrom(dialog.afterClosed())) await this.router.navigate(['/jobs']);
+  }
+}
