@@ -121,22 +121,22 @@ describe('generateNetwork', () => {
       isProduct: (code: string) => network.setUp.products.some((product) => product.code === code),
       isPackage: (code: string) => network.setUp.packages.some((entry) => entry.code === code),
     };
+    const refused: { jobRef: string; problems: unknown[] }[] = [];
     let checked = 0;
     for (const history of histories) {
       for (let index = checked % 7; index < history.jobs.length; index += 7) {
         const job = history.jobs[index]!;
         for (const { content } of [job, ...(job.corrections ?? [])]) {
           const read = jobContent.safeParse(content);
-          expect({ job: job.jobRef, problems: read.error?.issues ?? [] }).toEqual({
-            job: job.jobRef,
-            problems: [],
-          });
-          expect(breaksOfJob(content, world)).toEqual([]);
+          const problems = [...(read.error?.issues ?? []), ...breaksOfJob(content, world)];
+          if (problems.length > 0 || !reference.safeParse(job.jobRef).success) {
+            refused.push({ jobRef: job.jobRef, problems });
+          }
           checked += 1;
         }
-        expect(reference.parse(job.jobRef)).toBe(job.jobRef);
       }
     }
+    expect(refused).toEqual([]);
     expect(checked).toBeGreaterThan(7000);
   });
 
@@ -159,6 +159,7 @@ describe('generateNetwork', () => {
   });
 
   test('every arrival, in its branch, comes in time order and never before what it reports', () => {
+    const wrong: string[] = [];
     for (const { jobs } of histories) {
       const first = jobs.map((job) => job.receivedAt);
       expect(first).toEqual([...first].sort());
@@ -166,14 +167,15 @@ describe('generateNetwork', () => {
         const versions = [job, ...(job.corrections ?? [])];
         const times = versions.map((version) => version.receivedAt);
         if (job.voided) times.push(job.voided.at);
-        expect(times).toEqual([...new Set(times)].sort());
-        expect(times.at(-1)! < TODAY).toBe(true);
-        for (const { content, receivedAt } of versions) {
-          const known = content.invoice?.issuedOn ?? content.completedOn;
-          expect(receivedAt.slice(0, 10) >= known).toBe(true);
-        }
+        const rising = times.every((time, index) => index === 0 || times[index - 1]! < time);
+        const known = versions.every(
+          ({ content, receivedAt }) =>
+            receivedAt.slice(0, 10) >= (content.invoice?.issuedOn ?? content.completedOn),
+        );
+        if (!rising || !known || times.at(-1)! >= TODAY) wrong.push(job.jobRef);
       }
     }
+    expect(wrong).toEqual([]);
   });
 
   test('every claim, beside its job, passes the contract and keeps the order of its dates', () => {
