@@ -1,6 +1,6 @@
 import BetterSqlite3 from 'better-sqlite3';
 import { existsSync, statSync } from 'node:fs';
-import { APPLICATION_ID, Connection, DatabaseRefused, openReader } from './database';
+import { APPLICATION_ID, Connection, DatabaseRefused } from './database';
 import { migrations } from './migrations';
 import { verifyAudit } from './queries/audit';
 import { UnscopedDb } from './unscoped-db';
@@ -21,9 +21,9 @@ const ALL_PAGES = 0x7fffffff;
  */
 export async function copyDatabase(from: string, to: string): Promise<void> {
   if (!existsSync(from)) throw new DatabaseRefused(`There is no database ${from}.`);
-  const reader = openReader(from);
+  const reader = look(from);
   try {
-    await reader.driver.backup(to, { progress: () => ALL_PAGES });
+    await reader.backup(to, { progress: () => ALL_PAGES });
   } catch (error) {
     throw new DatabaseRefused(
       `The database ${from} could not be copied to ${to}: ${reasonOf(error)}.`,
@@ -37,10 +37,8 @@ export async function copyDatabase(from: string, to: string): Promise<void> {
 /** Checks a file from its first page to the last link of its audit trail; throws `DatabaseRefused` naming what is wrong. */
 export function inspectDatabase(file: string): DatabaseContents {
   if (!existsSync(file)) throw new DatabaseRefused(`There is no file ${file}.`);
-  let connection: Connection | undefined;
+  const driver = look(file);
   try {
-    connection = openReader(file);
-    const { driver } = connection;
     if (driver.pragma('application_id', { simple: true }) !== APPLICATION_ID) {
       throw new DatabaseRefused(`The file ${file} is not an Underseam database.`);
     }
@@ -50,7 +48,7 @@ export function inspectDatabase(file: string): DatabaseContents {
     const pages: unknown = driver.pragma('integrity_check(1)', { simple: true });
     const strays: unknown = driver.pragma('foreign_key_check');
     if (pages !== 'ok' || !Array.isArray(strays) || strays.length > 0) throw damaged(file);
-    const trail = verifyAudit(new UnscopedDb(connection));
+    const trail = verifyAudit(new UnscopedDb(new Connection(driver)));
     if (trail.brokenAt !== null) {
       throw new DatabaseRefused(
         `The audit trail of ${file} does not hold: event ${trail.brokenAt} does not follow from the one before it.`,
@@ -61,22 +59,23 @@ export function inspectDatabase(file: string): DatabaseContents {
   } catch (error) {
     throw error instanceof DatabaseRefused ? error : damaged(file);
   } finally {
-    connection?.close();
+    driver.close();
   }
 }
 
 /**
  * Folds a database that nobody has open into its one file. Throws `DatabaseRefused` while any other program has it open; a
- * damaged file is left as it is.
+ * damaged one is left as it is, companions and all.
  */
 export function closeDatabaseFile(file: string): void {
+  if (!isReadable(file)) return;
   try {
     settle(file);
   } catch (error) {
     if (codeOf(error)?.startsWith('SQLITE_BUSY')) {
       throw new DatabaseRefused(`The database ${file} is in use; stop the server first.`);
     }
-    if (!/^SQLITE_(NOTADB|CORRUPT)/.test(codeOf(error) ?? '')) throw error;
+    if (!codeOf(error)?.startsWith('SQLITE_CORRUPT')) throw error;
   }
 }
 
@@ -97,6 +96,28 @@ function settle(file: string): void {
     driver.pragma('journal_mode = delete');
   } finally {
     driver.close();
+  }
+}
+
+/** Looks without writing: SQLite would clear away what a file that is no database has beside it. */
+function isReadable(file: string): boolean {
+  const reader = look(file);
+  try {
+    reader.prepare('select count(*) from sqlite_schema').get();
+    return true;
+  } catch {
+    return false;
+  } finally {
+    reader.close();
+  }
+}
+
+/** Opens a file that may be anything: read only, and not mapped into memory, where one cut short would end the process. */
+function look(file: string): BetterSqlite3.Database {
+  try {
+    return new BetterSqlite3(file, { readonly: true, fileMustExist: true });
+  } catch (error) {
+    throw new DatabaseRefused(`The file ${file} cannot be opened: ${reasonOf(error)}.`);
   }
 }
 

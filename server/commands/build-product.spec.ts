@@ -3,6 +3,9 @@ import path from 'node:path';
 import { askModule } from '../../test/support/ask-module';
 import { root } from '../../test/support/project-files';
 
+/** Other programs are run here, which a busy machine may keep waiting. */
+jest.setTimeout(60_000);
+
 const folder = 'test/output/build-product';
 const at = (name: string): string => path.join(root, folder, name);
 const part = {

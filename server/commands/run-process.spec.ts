@@ -2,6 +2,9 @@ import { spawn } from 'node:child_process';
 import path from 'node:path';
 import { pathToFileURL } from 'node:url';
 
+/** Other programs are run here, which a busy machine may keep waiting. */
+jest.setTimeout(60_000);
+
 const runner = JSON.stringify(pathToFileURL(path.join(__dirname, 'run-process.mjs')).href);
 
 /** Runs a program under `runHere`, sends the outer process a signal once it is ready, and answers the outer one's exit code. */
