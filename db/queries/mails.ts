@@ -46,13 +46,12 @@ export function insertMail(
   );
 }
 
-/** The newest mails of the local mailbox. */
+/** The newest mails that nothing has sent. */
 export function keptMails(db: UnscopedDb, limit: number): KeptMail[] {
   return db.all<KeptMail>(
     sql('mails')
-      .whereNull('next_attempt_at')
       .whereNull('sent_at')
-      .where({ attempts: 0 })
+      .whereNot({ text_body: '' })
       .orderBy('id', 'desc')
       .limit(limit)
       .select('id', 'subject', { to: 'recipient', text: 'text_body', createdAt: 'created_at' }),

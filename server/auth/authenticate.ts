@@ -6,7 +6,7 @@ import type { Kit } from '../kit';
 import type { Authenticate, Caller } from './caller';
 import { makePersonTokenStrategy } from './person-token-strategy';
 import { makePushKeyStrategy } from './push-key-strategy';
-import { readSigningKeys } from './secret';
+import { readSecret } from './secret';
 
 const STRATEGIES = ['push-key', 'jwt'];
 
@@ -17,7 +17,7 @@ export function makeAuthenticate(
 ): Authenticate {
   const passport = new Passport();
   passport.use(makePushKeyStrategy(kit.store, clock));
-  passport.use(makePersonTokenStrategy(kit.store, readSigningKeys(kit.config), clock));
+  passport.use(makePersonTokenStrategy(kit.store, readSecret(kit.config), clock));
   return (request: Request) =>
     new Promise<Caller>((resolve, reject) => {
       const settle = (error: unknown, caller?: unknown) => {

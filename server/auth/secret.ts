@@ -11,7 +11,7 @@ export interface SigningKeys {
 }
 
 /** The signing keys of UNDERSEAM_SECRET, or of the secret kept in the data folder, which is made on first use. */
-export function readSigningKeys(config: Pick<Config, 'secret' | 'data'>): SigningKeys {
+export function readSecret(config: Pick<Config, 'secret' | 'data'>): SigningKeys {
   const secret = config.secret ?? keptSecret(config.data);
   const derived = (purpose: string) =>
     createSecretKey(Buffer.from(hkdfSync('sha256', secret, '', `underseam ${purpose}`, 32)));

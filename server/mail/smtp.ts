@@ -1,0 +1,59 @@
+import { createTransport, type SendMailOptions, type Transporter } from 'nodemailer';
+import type { WaitingMail } from '#db/queries/mails';
+import type { Config } from '../config';
+
+/** What went wrong with a mail: a short code to keep, and whether trying again can help. */
+export interface SendingFailure {
+  code: string;
+  lasting: boolean;
+}
+
+/** A connection to the server of SMTP_URL. A mail may name no file or address to fetch from. */
+export function makeTransport(smtpUrl: string): Transporter {
+  return createTransport({
+    url: smtpUrl,
+    connectionTimeout: 10_000,
+    greetingTimeout: 10_000,
+    socketTimeout: 30_000,
+    disableFileAccess: true,
+    disableUrlAccess: true,
+  });
+}
+
+/** A mail as nodemailer takes it; the Message-ID stays the same however often it is tried. */
+export function messageOf(
+  mail: WaitingMail,
+  config: Pick<Config, 'smtpUrl' | 'publicUrl'>,
+): SendMailOptions {
+  const host = new URL(config.publicUrl).hostname;
+  return {
+    from: { name: 'Underseam', address: senderOf(config.smtpUrl, host) },
+    to: { name: '', address: mail.recipient },
+    subject: mail.subject,
+    text: mail.text,
+    ...(mail.html !== null && { html: mail.html }),
+    messageId: `<${mail.id}.${Date.parse(mail.createdAt)}@${host}>`,
+    date: new Date(mail.createdAt),
+    headers: { 'Auto-Submitted': 'auto-generated' },
+  };
+}
+
+/** The SMTP user when that is an address, since many servers let a user send only as themselves. */
+function senderOf(smtpUrl: string | undefined, host: string): string {
+  const user = smtpUrl === undefined ? '' : decodeURIComponent(new URL(smtpUrl).username);
+  return user.includes('@') ? user : `underseam@${host}`;
+}
+
+/**
+ * Reads a sending error. A 5yz answer to the recipient or the message is lasting (RFC 5321, 4.2.1); anything else (a server
+ * that is away, a wrong password in the settings) may be put right. The server's own words are not kept.
+ */
+export function failureOf(error: unknown): SendingFailure {
+  const { code, responseCode } = (error ?? {}) as { code?: unknown; responseCode?: unknown };
+  const name = typeof code === 'string' ? code : 'EUNKNOWN';
+  const answer = typeof responseCode === 'number' ? responseCode : undefined;
+  return {
+    code: answer === undefined ? name : `${name} ${answer}`,
+    lasting: answer !== undefined && answer >= 500 && (name === 'EENVELOPE' || name === 'EMESSAGE'),
+  };
+}
