@@ -1,32 +1,34 @@
-import { CostBook, FROM_THE_START } from '#shared/domain/cost-book';
+import { CostBook, FROM_THE_START, type CostChange } from '#shared/domain/cost-book';
+import { feeRateMicros } from '#shared/domain/money';
 import type { DemoSetUp } from './demo-network';
 
-/** The cost book that the demo's set-up amounts to: for recounting its figures from the raw jobs without a database. */
-export function costBookOf(setUp: DemoSetUp): CostBook {
-  return CostBook.of([
-    { kind: 'fee', from: FROM_THE_START, value: micros(setUp.network.feeRate) },
-    ...setUp.fees.map((fee) => ({
-      kind: 'fee' as const,
-      from: fee.from,
-      value: micros(fee.feeRate),
-    })),
-    ...setUp.rates.map((rate) => ({
+/** Every dated cost, fee and norm of the demo's set-up, as changes of a cost book. */
+export function costChangesOf(setUp: DemoSetUp): CostChange[] {
+  const fee = (from: string, feeRate: number): CostChange => ({
+    kind: 'fee',
+    from,
+    value: feeRateMicros(feeRate),
+  });
+  return [
+    fee(FROM_THE_START, setUp.network.feeRate),
+    ...setUp.fees.map(({ from, feeRate }) => fee(from, feeRate)),
+    ...setUp.rates.map(({ branch, from, hourlyCostCents }) => ({
       kind: 'hourlyCost' as const,
-      code: rate.branch,
-      from: rate.from,
-      value: rate.hourlyCostCents,
+      code: branch,
+      from,
+      value: hourlyCostCents,
     })),
-    ...setUp.productCosts.map((cost) => ({
+    ...setUp.productCosts.map(({ product, from, costPerLitreCents }) => ({
       kind: 'product' as const,
-      code: cost.product,
-      from: cost.from,
-      value: cost.costPerLitreCents,
+      code: product,
+      from,
+      value: costPerLitreCents,
     })),
-    ...setUp.consumableCosts.map((cost) => ({
+    ...setUp.consumableCosts.map(({ kind, from, unitCostCents }) => ({
       kind: 'consumable' as const,
-      code: cost.kind,
-      from: cost.from,
-      value: cost.unitCostCents,
+      code: kind,
+      from,
+      value: unitCostCents,
     })),
     ...setUp.norms.map((norm) => ({
       kind: 'norm' as const,
@@ -34,9 +36,10 @@ export function costBookOf(setUp: DemoSetUp): CostBook {
       bodyType: norm.bodyType,
       lines: norm.norms,
     })),
-  ]);
+  ];
 }
 
-function micros(feeRate: number): number {
-  return Math.round(feeRate * 1e6);
+/** The cost book that the demo's set-up amounts to: for recounting its figures from the raw jobs without a database. */
+export function costBookOf(setUp: DemoSetUp): CostBook {
+  return CostBook.of(costChangesOf(setUp));
 }

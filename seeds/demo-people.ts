@@ -46,11 +46,21 @@ export const DEMO_PEOPLE: readonly DemoPerson[] = [
   },
 ];
 
-/** The push key of Havnsund's own system in the demo. Known to everybody, so it exists in demo data only. */
+/** The demo's site manager of a branch, if it has one. */
+export function managerOf(branch: string): DemoPerson | undefined {
+  return DEMO_PEOPLE.find(
+    (person) => person.role === 'site_manager' && person.branches.includes(branch),
+  );
+}
+
+const KEY_ID = 'de3000000417';
+const KEY_SECRET = '5ea30417'.repeat(8);
+
+/** The push key of Havnsund's own system in the demo. Everybody knows it, so it exists in demo data only. */
 export const DEMO_PUSH_KEY = {
   branch: 'HAV',
-  id: 'havdemo',
   label: 'Workshop system (demo)',
-  secret: 'demo0000only0000never0000for0000real0000work',
-  key: 'usk_havdemo_demo0000only0000never0000for0000real0000work',
+  id: KEY_ID,
+  secret: KEY_SECRET,
+  key: `usk_${KEY_ID}_${KEY_SECRET}`,
 } as const;

@@ -1,6 +1,7 @@
 import { addDays, isoWeek, mondayOf } from '#shared/domain/calendar';
 import type { BranchNature } from './branches';
 import type { DemoWeekNote } from './demo-network';
+import { managerOf } from './demo-people';
 import { chance, pick, type Random } from './random-draws';
 
 /** What managers wrote about a week. Invented. */
@@ -15,12 +16,13 @@ const TEXTS = [
   'One van took eleven hours of welding that nobody had asked about beforehand.',
 ] as const;
 
-/** Notes on about one week in nine of the last year; the present week has none yet. */
+/** Notes on about one week in six of the last year, where the demo has a manager to write them; the present week has none yet. */
 export function drawWeekNotes(random: Random, branch: BranchNature, today: string): DemoWeekNote[] {
+  if (managerOf(branch.code) === undefined) return [];
   const notes: DemoWeekNote[] = [];
   const openedWeeksBack = branch.openedWeeksBack ?? 52;
   for (let back = Math.min(51, openedWeeksBack - 4); back >= 1; back -= 1) {
-    if (!chance(random, 1 / 9)) continue;
+    if (!chance(random, 1 / 6)) continue;
     const monday = addDays(mondayOf(today), -7 * back);
     notes.push({
       branchCode: branch.code,
