@@ -5,7 +5,7 @@ import { AGE_BANDS, type AgeBand } from './vocabulary';
  * of days since 1970-01-01 in the proleptic Gregorian calendar.
  */
 
-const DATE = /^(\d{4})-(\d{2})-(\d{2})$/;
+const DATE = /^[1-9]\d{3}-\d{2}-\d{2}$/;
 
 /** Days since 1970-01-01 of a civil date. Source: era-based algorithm of H. Hinnant, "chrono-compatible low-level date algorithms". */
 export function dayNumber(date: string): number {
@@ -42,9 +42,18 @@ export function dateOfDay(day: number): string {
   return `${pad(year, 4)}-${pad(month, 2)}-${pad(dayOfMonth, 2)}`;
 }
 
-/** Whether the text is a real date between the years 1000 and 9999. */
+/** Whether the text is a real date between the years 1000 and 9999. Asked several times of every job: no text is made. */
 export function isDate(text: string): boolean {
-  return DATE.test(text) && text >= '1000' && dateOfDay(dayNumber(text)) === text;
+  if (!DATE.test(text)) return false;
+  const year = Number(text.slice(0, 4));
+  const month = Number(text.slice(5, 7));
+  const day = Number(text.slice(8, 10));
+  return month >= 1 && month <= 12 && day >= 1 && day <= daysInMonth(year, month);
+}
+
+function daysInMonth(year: number, month: number): number {
+  if (month === 2) return year % 4 === 0 && (year % 100 !== 0 || year % 400 === 0) ? 29 : 28;
+  return month === 4 || month === 6 || month === 9 || month === 11 ? 30 : 31;
 }
 
 /** Whether the text is a real month `YYYY-MM`. */
@@ -65,13 +74,10 @@ export function daysBetween(from: string, to: string): number {
 /** The date `months` calendar months later, its day clipped to the month's last (rule 16). */
 export function addMonths(date: string, months: number): string {
   const index = Number(date.slice(0, 4)) * 12 + Number(date.slice(5, 7)) - 1 + months;
-  const month = `${pad(Math.floor(index / 12), 4)}-${pad((index % 12) + 1, 2)}`;
-  const next =
-    Number(index % 12) === 11
-      ? `${pad(Math.floor(index / 12) + 1, 4)}-01`
-      : `${month.slice(0, 5)}${pad((index % 12) + 2, 2)}`;
-  const last = Number(addDays(`${next}-01`, -1).slice(8, 10));
-  return `${month}-${pad(Math.min(Number(date.slice(8, 10)), last), 2)}`;
+  const year = Math.floor(index / 12);
+  const month = index - year * 12 + 1;
+  const day = Math.min(Number(date.slice(8, 10)), daysInMonth(year, month));
+  return `${pad(year, 4)}-${pad(month, 2)}-${pad(day, 2)}`;
 }
 
 /** The Monday on or before a date. */
