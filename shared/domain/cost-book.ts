@@ -45,7 +45,7 @@ export class CostBook {
     const dated = new Map<string, Dated[]>();
     const norms = new Map<string, readonly NormLine[]>();
     for (const change of changes) {
-      if (change.kind === 'norm') norms.set(normKey(change.package, change.bodyType), change.lines);
+      if (change.kind === 'norm') enterNorm(norms, change);
       else {
         const key = datedKey(change.kind, codeOf(change));
         dated.set(key, entered(dated.get(key) ?? [], change));
@@ -58,9 +58,7 @@ export class CostBook {
   with(change: CostChange): CostBook {
     if (change.kind === 'norm') {
       const norms = new Map(this.norms);
-      const key = normKey(change.package, change.bodyType);
-      if (change.lines.length > 0) norms.set(key, change.lines);
-      else norms.delete(key);
+      enterNorm(norms, change);
       return new CostBook(this.dated, norms);
     }
     const dated = new Map(this.dated);
@@ -118,6 +116,20 @@ function datedKey(kind: DatedKind, code: string): string {
 
 function normKey(packageCode: string, bodyType: string): string {
   return `${packageCode} ${bodyType}`;
+}
+
+/** Lines in the order of their products, whatever the order sent: a book must not depend on how it came about. */
+function enterNorm(
+  norms: Map<string, readonly NormLine[]>,
+  change: Extract<CostChange, { kind: 'norm' }>,
+): void {
+  const key = normKey(change.package, change.bodyType);
+  if (change.lines.length === 0) norms.delete(key);
+  else
+    norms.set(
+      key,
+      [...change.lines].sort((a, b) => (a.product < b.product ? -1 : 1)),
+    );
 }
 
 function entered(entries: readonly Dated[], change: Dated): Dated[] {
