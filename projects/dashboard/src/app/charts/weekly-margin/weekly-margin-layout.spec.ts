@@ -88,7 +88,7 @@ describe('layOutWeeklyMargin', () => {
 
   it('an axis that does not start at 0 says where it starts, clear of the years', () => {
     const wide = layOutWeeklyMargin(input, 732);
-    expect(wide.start?.text).toBe('axis starts at 26\u2009%');
+    expect(wide.start?.text).toBe('axis starts at 26\u202f%');
     expect(wide.start?.y).toBe(wide.bottom + 38);
     const narrow = layOutWeeklyMargin(input, 320);
     expect(narrow.start!.y).toBeGreaterThan(wide.start!.y);

@@ -1,5 +1,6 @@
 import { scaleLinear } from 'd3-scale';
 import { line } from 'd3-shape';
+import { formatCount, formatShare, formatWeekNumber } from '../../ui/format';
 import { spreadLabels } from '../spread-labels';
 import { textWidth, widestText } from '../text-width';
 import { marginAxis } from './margin-axis';
@@ -67,7 +68,7 @@ export function layOutWeeklyMargin(input: WeeklyMarginInput, width: number): Wee
   const yOf = (share: number): number => y(share * 100);
 
   const words = endWords(input, width < NARROW);
-  const left = widestText(axis.ticks.map(wholeNumber)) + 10;
+  const left = widestText(axis.ticks.map(formatCount)) + 10;
   const gutter = words.reduce((most, { value, word }) => Math.max(most, endWidth(value, word)), 0);
   const right = Math.max(left + 60, width - (gutter > 0 ? gutter + 11 : 8));
 
@@ -105,7 +106,7 @@ export function layOutWeeklyMargin(input: WeeklyMarginInput, width: number): Wee
     top: TOP,
     bottom,
     pitch,
-    hairlines: axis.ticks.map((tick) => ({ y: y(tick), text: wholeNumber(tick) })),
+    hairlines: axis.ticks.map((tick) => ({ y: y(tick), text: formatCount(tick) })),
     limits: input.limits && {
       upper: yOf(input.limits.upper),
       centre: yOf(input.limits.centre),
@@ -128,7 +129,7 @@ interface EndWord extends Omit<EndLabel, 'y'> {
 function endWords(input: WeeklyMarginInput, narrow: boolean): EndWord[] {
   const words: EndWord[] = [];
   const add = (share: number, word: string, role: EndLabel['role']): void => {
-    words.push({ share, value: wholeNumber(share * 100), word, role });
+    words.push({ share, value: formatCount(share * 100), word, role });
   };
   if (input.limits) {
     add(input.limits.upper, narrow ? 'upper' : 'upper limit', 'limit');
@@ -138,7 +139,7 @@ function endWords(input: WeeklyMarginInput, narrow: boolean): EndWord[] {
   if (input.target !== null) add(input.target, 'target', 'target');
   const chosen = input.points.find(({ week }) => week === input.chosen);
   if (chosen && chosen.share !== null) {
-    add(chosen.share, `Week ${Number(chosen.week.slice(6))}`, 'chosen');
+    add(chosen.share, formatWeekNumber(chosen.week), 'chosen');
   }
   return words;
 }
@@ -169,15 +170,10 @@ function startNote(
   bottom: number,
 ): WeeklyMarginLayout['start'] {
   if (start === 0) return null;
-  const text = `axis starts at ${wholeNumber(start)}\u2009%`;
+  const text = `axis starts at ${formatShare(start / 100)}`;
   const end = left + textWidth(text) + 16;
   const room = years.every(({ x, text: year, anchor }) => {
     return (anchor === 'end' ? x - textWidth(year) : x) >= end;
   });
   return { y: bottom + (room ? 2 : 3) * TEXT_ROW, text };
-}
-
-function wholeNumber(value: number): string {
-  const rounded = Math.round(value);
-  return rounded < 0 ? `−${-rounded}` : String(Math.abs(rounded));
 }

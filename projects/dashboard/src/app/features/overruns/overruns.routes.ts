@@ -1,4 +1,5 @@
 import type { Routes } from '@angular/router';
+import { OverrunsPage } from './overruns-page';
 
-const routes: Routes = [];
+const routes: Routes = [{ path: '', component: OverrunsPage }];
 export default routes;

@@ -1,4 +1,5 @@
 import type { Routes } from '@angular/router';
+import { ThisWeekPage } from './this-week-page';
 
-const routes: Routes = [];
+const routes: Routes = [{ path: '', component: ThisWeekPage }];
 export default routes;

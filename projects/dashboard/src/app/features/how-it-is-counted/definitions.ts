@@ -1,0 +1,18 @@
+import type { Definition, DefinitionGroup } from './definition';
+import { labourDefinitions } from './labour-definitions';
+import { moneyDefinitions } from './money-definitions';
+import { readingDefinitions } from './reading-definitions';
+import { weeklyDefinitions } from './weekly-definitions';
+
+/** Every figure shown so far, in the order in which the page tells them. A new figure adds its definition to one of these groups. */
+export const DEFINITION_GROUPS: readonly DefinitionGroup[] = [
+  { id: 'money', title: 'Money', definitions: moneyDefinitions },
+  { id: 'weekly', title: 'The weekly chart', definitions: weeklyDefinitions },
+  { id: 'labour', title: 'Labour overrun', definitions: labourDefinitions },
+  { id: 'reading', title: 'What counts, and how it is shown', definitions: readingDefinitions },
+];
+
+/** All of them in one list. */
+export const DEFINITIONS: readonly Definition[] = DEFINITION_GROUPS.flatMap(
+  ({ definitions }) => definitions,
+);

@@ -1,0 +1,116 @@
+import { ChangeDetectionStrategy, Component, computed, inject, linkedSignal } from '@angular/core';
+import { exportJobs } from '#shared/contracts/exports';
+import { listJobs } from '#shared/contracts/jobs';
+import { getMargin } from '#shared/contracts/margin';
+import { BridgeChart } from '../../charts/bridge/bridge-chart';
+import { WeeklyMarginChart } from '../../charts/weekly-margin/weekly-margin-chart';
+import { Api } from '../../core/api/api';
+import { CsvLink } from '../../core/api/csv-link';
+import { joinReadings } from '../../core/api/join-readings';
+import { Catalogue } from '../../core/catalogue/catalogue';
+import { ScopeLine } from '../../core/scope-line/scope-line';
+import { ScopeState } from '../../core/scope-line/scope-state';
+import { Session } from '../../core/session/session';
+import { Answer } from '../../ui/answer/answer';
+import { DataTable } from '../../ui/data-table/data-table';
+import { LoadState } from '../../ui/load-state/load-state';
+import { TableTwin } from '../../ui/table-twin/table-twin';
+import { thisWeekView } from './this-week-series';
+import { UnbilledCars } from './unbilled-cars';
+import { datesOfChart, datesOfWeek } from './week-dates';
+import { WeekNote } from './week-note';
+import { whoseUsual, type WeekWords } from './week-words';
+
+/** Rows that one page of the list of jobs can hold (rule 67). */
+const LIMIT = 200;
+
+/** What the chosen week kept, why, which cars made it, and what is still to be billed. */
+@Component({
+  selector: 'us-this-week-page',
+  imports: [
+    Answer,
+    BridgeChart,
+    CsvLink,
+    DataTable,
+    LoadState,
+    ScopeLine,
+    TableTwin,
+    UnbilledCars,
+    WeekNote,
+    WeeklyMarginChart,
+  ],
+  templateUrl: './this-week-page.html',
+  styleUrl: './this-week-page.scss',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
+export class ThisWeekPage {
+  private readonly api = inject(Api);
+  private readonly session = inject(Session);
+  private readonly catalogue = inject(Catalogue);
+  private readonly scope = inject(ScopeState);
+
+  private readonly chart = this.api.read(getMargin, () => this.asked(datesOfChart));
+  private readonly week = this.api.read(getMargin, () => this.asked(datesOfWeek));
+  private readonly billed = this.api.read(listJobs, () => this.asked(datesOfWeek, billedCars));
+  private readonly unbilled = this.api.read(listJobs, () =>
+    this.asked((week) => ({ to: datesOfWeek(week).to }), unbilledCars),
+  );
+  protected readonly answers = joinReadings({
+    chart: this.chart,
+    week: this.week,
+    billed: this.billed,
+    unbilled: this.unbilled,
+  });
+
+  protected readonly words = computed((): WeekWords => {
+    const scope = this.answers.value()?.chart.scope ?? { regions: [], branches: [] };
+    return {
+      currency: this.catalogue.currency(),
+      today: this.catalogue.today() ?? '',
+      branchName: (code) => this.catalogue.branchName(code),
+      packageName: (code) => this.catalogue.packageName(code),
+      productName: (code) => this.catalogue.productName(code),
+      whose: whoseUsual(scope, {
+        role: this.session.role(),
+        choseBranches: this.scope.branches().length > 0,
+        choseRegions: this.scope.regions().length > 0,
+      }),
+    };
+  });
+  protected readonly view = computed(() => {
+    const answers = this.answers.value();
+    return answers && thisWeekView(answers, this.words());
+  });
+  /** Managers and head office bill cars and write notes. */
+  protected readonly mayWrite = computed(
+    () => this.session.role() === 'site_manager' || this.session.role() === 'head_office',
+  );
+  protected readonly allCars = linkedSignal({ source: this.view, computation: () => false });
+  protected readonly cars = computed(() => {
+    const cars = this.view()?.cars;
+    return cars?.rows.slice(0, this.allCars() ? undefined : cars.atFirst) ?? [];
+  });
+  protected readonly export = exportJobs;
+  protected readonly exportQuery = computed(() => {
+    const week = this.view()?.standing.week;
+    return week
+      ? { ...this.scope.filters(), ...datesOfWeek(week), unbilled: false, sort: billedCars.sort }
+      : undefined;
+  });
+
+  protected open(week: string): void {
+    void this.scope.change({ week });
+  }
+
+  /** The scope's query for dates that follow from the week; none until the week is known. */
+  private asked<Dates extends object, More extends object>(
+    datesOf: (week: string) => Dates,
+    more?: More,
+  ) {
+    const week = this.scope.week();
+    return week ? { query: { ...this.scope.filters(), ...datesOf(week), ...more } } : undefined;
+  }
+}
+
+const billedCars = { unbilled: false, sort: 'difference', limit: LIMIT } as const;
+const unbilledCars = { unbilled: true, sort: 'waiting', limit: LIMIT } as const;

@@ -1,0 +1,55 @@
+import type { JobRow } from '#shared/contracts/jobs';
+import type { Column } from '../../ui/data-table/column';
+import { currencySign, formatCount } from '../../ui/format';
+import { answerWeek, type WeekAnswer } from './week-answer';
+import { weekBridge, type WeekBridge } from './week-bridge';
+import { weekCarColumns, weekCarsNote } from './week-cars';
+import { weekChart, type WeekChart } from './week-chart';
+import { standingOf, type Standing, type WeekAnswers } from './week-standing';
+import type { WeekWords } from './week-words';
+
+/** Cars listed before the rest is asked for. */
+const CARS_AT_FIRST = 25;
+
+/** Everything the page shows of a week, ready to be drawn. */
+export interface ThisWeekView {
+  readonly standing: Standing;
+  readonly answer: WeekAnswer;
+  readonly chart: WeekChart;
+  /** Absent where no billed car has an estimate and a norm. */
+  readonly bridge: WeekBridge | null;
+  readonly cars: {
+    readonly heading: string;
+    readonly note: string;
+    readonly columns: readonly Column<JobRow>[];
+    readonly rows: readonly JobRow[];
+    /** Rows to show before the rest is asked for. */
+    readonly atFirst: number;
+    readonly csv: string;
+  };
+}
+
+/** Turns the answers of one week into the page's answer, pictures and rows. Pure. */
+export function thisWeekView(answers: WeekAnswers, words: WeekWords): ThisWeekView {
+  const standing = standingOf(answers, words.today);
+  const rows = answers.billed.items;
+  const { bridge } = answers.week;
+  return {
+    standing,
+    answer: answerWeek(answers, standing, words),
+    chart: weekChart(answers.chart, standing.week),
+    bridge: bridge.cars > 0 ? weekBridge(bridge, standing.cars, words.currency) : null,
+    cars: {
+      heading: 'The cars that made the week, worst first',
+      note: weekCarsNote(answers, standing, currencySign(words.currency)),
+      columns: weekCarColumns(answers, standing, words),
+      rows,
+      atFirst: rows.length > CARS_AT_FIRST + 5 ? CARS_AT_FIRST : rows.length,
+      csv: csvWords(answers.billed.jobs),
+    },
+  };
+}
+
+function csvWords(cars: number): string {
+  return cars === 1 ? 'CSV of this row' : `CSV of these ${formatCount(cars)} rows`;
+}
