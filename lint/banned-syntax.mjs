@@ -31,10 +31,14 @@ export const subscriptions = {
   message: 'A page does not subscribe: read a signal, and keep streams in core.',
 };
 
-/** A store's own connection, and its reader of everything, are not for a feature about branches' rows. */
+/**
+ * A store's reader of everything is not for a feature about branches' rows. It may write with it, in the commit it queued, add
+ * to the audit trail and read the network's own row.
+ */
 export const storeOpened = [
   {
-    selector: 'MemberExpression[property.name="unscoped"]',
+    selector:
+      'MemberExpression[property.name="unscoped"]:not(CallExpression[callee.property.name="write"] *):not(CallExpression[callee.name=/^(recordAudit|readNetwork)$/] > *)',
     message:
       'store.unscoped sees every branch: read with the ScopedDb of the call, or name this feature in lint/layers.mjs if it is about the whole network.',
   },

@@ -4,6 +4,7 @@ const HANDED = [
   'db/scope',
   'db/scoped-db',
   'db/branch-writer',
+  'db/claim-writer',
   'db/network-reference',
 ];
 

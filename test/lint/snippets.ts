@@ -135,6 +135,11 @@ export const SNIPPETS: readonly Snippet[] = [
     rule: feature === 'margin' ? 'no-restricted-syntax' : undefined,
   })),
   {
+    what: 'store.unscoped in a write of a feature about branches',
+    file: 'server/features/bookings/a.ts',
+    text: 'interface Store {\n  unscoped: unknown;\n  write(work: () => unknown): unknown;\n}\nexport const it = (store: Store): unknown => store.write(() => store.unscoped);\n',
+  },
+  {
     what: 'a date made from an argument in shared/domain',
     file: 'shared/domain/a.ts',
     text: 'export const it = (day: string): Date => new Date(day);\n',
