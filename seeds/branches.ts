@@ -63,7 +63,7 @@ const ROWS: Row[] = [
   ['PLO', 'Ploggard', 'PLAIN', 10.5, 4050, 0.99, 1.0, 1.0, { quirk: { kind: 'under-applies' } }],
   ['ELV', 'Elvegryte', 'PLAIN', 9, 4120, 1.02, 1.03, 1.1],
   ['TEG', 'Teglmaur', 'PLAIN', 13, 4300, 0.97, 1.0, 0.8, { quirk: { kind: 'drifts' } }],
-  ['VAD', 'Vadmolle', 'PLAIN', 8, 4000, 1.01, 1.0, 1.2, { openedWeeksBack: 213 }],
+  ['VAD', 'Vadskrue', 'PLAIN', 8, 4000, 1.01, 1.0, 1.2, { openedWeeksBack: 213 }],
   ['TOR', 'Torrhalde', 'UPLND', 10, 3500, 1.0, 1.01, 1.0],
   ['GRA', 'Granvarpe', 'UPLND', 9, 3420, 0.99, 0.98, 0.9],
   ['STE', 'Steinlyre', 'UPLND', 8, 3360, 1.02, 1.0, 1.3, { targetMarginShare: 0.37 }],

@@ -57,7 +57,7 @@ const RANGES: Record<string, Row[]> = {
   ],
   Kestrane: [
     ['Wayfolder', 'camper', 2.4, 1.3, 32, 0],
-    ['Bivvan', 'camper', 1.4, 1.0, 16, 0],
+    ['Bivvock', 'camper', 1.4, 1.0, 16, 0],
     ['Tillick', 'hatchback', 5, 0.85, 18, 0],
   ],
   Ubbark: [

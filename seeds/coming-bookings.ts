@@ -3,9 +3,8 @@ import type { BranchNature } from './branches';
 import { CAR_MODELS } from './car-models';
 import { PACKAGE_MIX } from './catalogue';
 import type { DemoBooking } from './demo-network';
-import { pickWeighted, type Random } from './random-draws';
+import { pickWeighted, wholeBetween, type Random } from './random-draws';
 import { carsInWeek, isWorkingDay, type WorkWeek } from './working-calendar';
-import { wholeBetween } from './random-draws';
 
 /** How full the diary is this week and the five after it. */
 const FULLNESS = [0.95, 0.85, 0.65, 0.45, 0.3, 0.15];

@@ -73,8 +73,10 @@ export function consumableCosts(today: string): DemoSetUp['consumableCosts'] {
   );
 }
 
-/** The fee rate from the start, and its one change: half a point more, three calendar years ago. */
+/** The fee rate from the start, a fraction of revenue. */
 export const FIRST_FEE_RATE = 0.055;
+
+/** The one change of the fee: half a point more from three calendar years ago. */
 export function fees(today: string): DemoSetUp['fees'] {
   return [{ from: `${Number(today.slice(0, 4)) - 3}-01-01`, feeRate: 0.06 }];
 }

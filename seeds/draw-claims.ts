@@ -1,5 +1,4 @@
-import { addDays, addMonths, dateOfDay, dayNumber } from '#shared/domain/calendar';
-import { ageInYears } from '#shared/domain/calendar';
+import { addMonths, ageInYears, dateOfDay, dayNumber } from '#shared/domain/calendar';
 import type { ClaimCause, ClaimDecision, Zone } from '#shared/domain/vocabulary';
 import type { JobContent } from '#shared/contracts/jobs';
 import type { BranchNature } from './branches';
@@ -153,10 +152,4 @@ function drawZone(random: Random, job: JobContent): Zone {
     ['floor', 6],
     ['tailgate', 4],
   ]);
-}
-
-/** Whether a claim counts against its branch: made within the warranty and not refused (rule 14, at today). */
-export function countsAgainst(claim: DemoClaim, job: JobContent): boolean {
-  const end = addMonths(job.completedOn, WARRANTY_MONTHS.get(job.package) ?? 0);
-  return claim.content.decision !== 'refused' && claim.content.madeOn <= addDays(end, 0);
 }

@@ -3,6 +3,7 @@ import { bookingContent } from '#shared/contracts/bookings';
 import { reference } from '#shared/contracts/fields';
 import { jobContent } from '#shared/contracts/jobs';
 import * as setUpContracts from '#shared/contracts/set-up';
+import { breaksOfClaim } from '#shared/domain/claim-rules';
 import { breaksOfJob } from '#shared/domain/job-rules';
 import { addDays, dayNumber } from '#shared/domain/calendar';
 import { historyOf } from './branch-history';
@@ -183,6 +184,7 @@ describe('generateNetwork', () => {
       const byRef = new Map(jobs.map((job) => [job.jobRef, job]));
       for (const { content, receivedAt } of claims) {
         expect(claimContent.safeParse(content).error?.issues ?? []).toEqual([]);
+        expect(breaksOfClaim(content, YESTERDAY)).toEqual([]);
         const job = byRef.get(content.jobRef)!;
         expect(job.voided).toBeUndefined();
         const decidedOn = content.decidedOn ?? content.madeOn;

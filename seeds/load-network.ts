@@ -1,6 +1,7 @@
 import { recordAudit } from '#db/queries/audit';
 import type { Store } from '#db/store';
 import { worldOf } from '#server/features/jobs/check-job';
+import type { DemoNetwork } from './demo-network';
 import { costsKnownFrom } from './dated-costs';
 import { DEMO_SEED, generateNetwork } from './generate-network';
 import { loadHistory, type LaterEvent } from './load-history';
@@ -21,10 +22,11 @@ export async function loadNetwork(
   store: Store,
   passwords: PasswordHasher,
   today: string,
+  network: DemoNetwork = generateNetwork({ seed: DEMO_SEED, today }),
 ): Promise<number> {
   const people = await hashPasswords(passwords);
   try {
-    return await store.queue.write(() => load(store, people, today));
+    return await store.queue.write(() => load(store, people, today, network));
   } catch (error) {
     // What is kept in memory was read from rows that are gone again.
     store.state.reload();
@@ -32,8 +34,12 @@ export async function loadNetwork(
   }
 }
 
-function load(store: Store, people: readonly HashedPerson[], today: string): number {
-  const network = generateNetwork({ seed: DEMO_SEED, today });
+function load(
+  store: Store,
+  people: readonly HashedPerson[],
+  today: string,
+  network: DemoNetwork,
+): number {
   const db = store.unscoped;
   const createdAt = `${costsKnownFrom(today)}T08:00:00.000Z`;
   loadSetUp(db, network.setUp);

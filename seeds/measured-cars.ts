@@ -57,7 +57,7 @@ export function carsOn(today: string): Car[] {
 }
 
 /** A job of the demo in the form in which the record keeps it. */
-function recordedFrom(content: JobContent): RecordedJob {
+export function recordedFrom(content: JobContent): RecordedJob {
   const total = content.invoice?.totalCents;
   const invoice = total === undefined ? undefined : { ...content.invoice, totalCents: total };
   return normaliseJob({ ...content, invoice });
