@@ -29,10 +29,21 @@ function sentenceOf(error: unknown): string {
     error instanceof DatabaseRefused;
   if (known) return error.message;
   if (error instanceof Refusal) {
-    const problems = error.problems.map(({ path, message }) => `${path.slice(1)} ${message}`);
+    const problems = error.problems.map(({ path, message }) => `${optionOf(path)}: ${message}`);
     return [error.detail, ...problems].join('\n  ');
   }
   const code = 'code' in error ? String(error.code) : '';
   if (code.startsWith('ERR_PARSE_ARGS')) return `${error.message.split('. ')[0]}.`;
   return `This did not work: ${error.message}.`;
+}
+
+/** The option, or variable, that a field of the API is given by on the command line. */
+function optionOf(path: string): string {
+  const [, field = ''] = path.split('/');
+  const named: Readonly<Record<string, string>> = {
+    branches: '--branch',
+    regions: '--region',
+    password: 'UNDERSEAM_PASSWORD',
+  };
+  return named[field] ?? `--${field}`;
 }
