@@ -2,12 +2,8 @@ import fc from 'fast-check';
 import { addDays } from './calendar';
 import { CostBook, FROM_THE_START, type CostChange } from './cost-book';
 
-const rate = (from: string, value: number): CostChange => ({
-  kind: 'hourlyCost',
-  code: 'AAA',
-  from,
-  value,
-});
+const rate = (from: string, value: number) =>
+  ({ kind: 'hourlyCost', code: 'AAA', from, value }) as const;
 
 describe('CostBook of dated costs', () => {
   const book = CostBook.of([rate('2025-01-01', 3000), rate('2026-01-01', 3600)]);

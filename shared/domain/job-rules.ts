@@ -13,7 +13,18 @@ export interface JobWorld {
   today: string;
   isProduct: (code: string) => boolean;
   isPackage: (code: string) => boolean;
+  /** Set for a recorder: the amounts they leave out are those stored (rule 24). */
+  money?: 'unseen';
 }
+
+/** The most that a line of a job may come to, in minor units: the limit of every amount (rule 55). */
+const MOST_CENTS = 1_000_000_000;
+
+/** What is said of an invoice whose total is neither sent nor stored. */
+export const INVOICE_TOTAL_MISSING: RuleBreak = {
+  path: '/invoice/totalCents',
+  message: 'is required: the total before tax, in minor units',
+};
 
 type Loose = Record<string, unknown>;
 
@@ -26,6 +37,7 @@ export function breaksOfJob(body: unknown, world: JobWorld): RuleBreak[] {
   return [
     ...breaksOfDates(body, world.today),
     ...breaksOfReferences(body, world),
+    ...breaksOfMoney(body, world),
     ...breaksOfFindings(body),
   ];
 }
@@ -53,13 +65,10 @@ function breaksOfDates(job: Loose, today: string): RuleBreak[] {
   const vehicle = isObject(job['vehicle']) ? job['vehicle'] : {};
   const registered = vehicle['firstRegistered'];
   if (typeof registered === 'string' && isMonth(registered)) {
-    for (const field of ['bookedOn', 'startedOn', 'completedOn']) {
-      const on = dateOrNothing(job[field]);
+    for (const [path, value] of dated) {
+      const on = dateOrNothing(value);
       if (on !== undefined && on.slice(0, 7) < registered) {
-        breaks.push({
-          path: `/${field}`,
-          message: `lies before first registration (${registered})`,
-        });
+        breaks.push({ path, message: `lies before first registration (${registered})` });
       }
     }
   }
@@ -96,6 +105,27 @@ function breaksOfReferences(job: Loose, world: JobWorld): RuleBreak[] {
       breaks.push({
         path: `/products/${index}/product`,
         message: `no product has the code ${quoted(product)}`,
+      });
+    }
+  });
+  return breaks;
+}
+
+function breaksOfMoney(job: Loose, { money }: JobWorld): RuleBreak[] {
+  const breaks: RuleBreak[] = [];
+  const { invoice } = job;
+  if (money !== 'unseen' && isObject(invoice) && invoice['totalCents'] === undefined) {
+    breaks.push(INVOICE_TOTAL_MISSING);
+  }
+  arrayOf(job['consumables']).forEach((line, index) => {
+    if (!isObject(line)) return;
+    const { quantity, unitCostCents } = line;
+    if (typeof quantity !== 'number' || typeof unitCostCents !== 'number') return;
+    // Several such lines would pass the whole numbers that a figure can hold exactly.
+    if (quantity * unitCostCents > MOST_CENTS) {
+      breaks.push({
+        path: `/consumables/${index}/unitCostCents`,
+        message: `the line comes to more than ${MOST_CENTS}`,
       });
     }
   });

@@ -1,4 +1,5 @@
 import type { BranchWriter, Receipt } from '#db/branch-writer';
+import { INVOICE_TOTAL_MISSING } from '#shared/domain/job-rules';
 import { normaliseJob, referenced, type SentJob } from '#shared/domain/normalise-job';
 import type { RecordedJob } from '#shared/domain/recorded-job';
 import { refuseInput } from '#shared/domain/refusal';
@@ -60,9 +61,7 @@ function merged(
   const whole = stored && money === 'unseen' ? keepStoredMoney(named, stored) : named;
   const invoice = whole.invoice === undefined ? stored?.invoice : (whole.invoice ?? undefined);
   if (invoice && invoice.totalCents === undefined) {
-    throw refuseInput([
-      { path: '/invoice/totalCents', message: 'is required: the total before tax, in minor units' },
-    ]);
+    throw refuseInput([INVOICE_TOTAL_MISSING]);
   }
   return normaliseJob({
     ...whole,

@@ -9,10 +9,15 @@ export interface KnownCatalogue {
   package(code: string): unknown;
 }
 
-/** The world of a branch on its local day. */
-export function worldOf(catalogue: KnownCatalogue, today: string): JobWorld {
+/** The world of a branch on its local day, for a sender who sees money or one who does not. */
+export function worldOf(
+  catalogue: KnownCatalogue,
+  today: string,
+  money: 'seen' | 'unseen' = 'seen',
+): JobWorld {
   return {
     today,
+    ...(money === 'unseen' && { money }),
     isProduct: (code) => catalogue.productId(code) !== undefined,
     isPackage: (code) => catalogue.package(code) !== undefined,
   };

@@ -18,8 +18,8 @@ import { lastChange, readJobSheet } from './read-job-sheet';
 /** Jobs: sent, corrected, read, billed and voided. */
 export function mountJobs(mounting: Mounting, kit: Kit): void {
   const { store } = kit;
-  const world = (branch: ScopedBranch): JobWorld =>
-    worldOf(store.state, localDate(kit.clock.now(), branch.timeZone));
+  const world = (branch: ScopedBranch, caller: Caller | undefined): JobWorld =>
+    worldOf(store.state, localDate(kit.clock.now(), branch.timeZone), moneyFor(caller));
 
   mount(
     mounting,
@@ -40,13 +40,14 @@ export function mountJobs(mounting: Mounting, kit: Kit): void {
         headers: { ETag: tagOf(accepted.revision) },
       };
     },
-    (raw, { branch }) => (branch ? breaksOfJob(raw, world(branch)) : []),
+    (raw, { branch, caller }) => (branch ? breaksOfJob(raw, world(branch, caller)) : []),
   );
 
   mount(mounting, putJobBatch, async (call) => {
     const branch = namedBranch(call);
     const sending = { ...sendingOf(kit, call, ''), preconditions: NONE };
-    return { body: await acceptBatch(store, branch, call.body.jobs, world(branch), sending) };
+    const rules = world(branch, call.caller);
+    return { body: await acceptBatch(store, branch, call.body.jobs, rules, sending) };
   });
 
   mount(mounting, getJob, (call) => {
