@@ -27,6 +27,7 @@ import {
   formatMinutes,
 } from '../../ui/format';
 import { LoadState } from '../../ui/load-state/load-state';
+import { narrowWindow } from '../../ui/narrow';
 import { CONSUMABLE_NAMES } from '../../ui/words';
 import { bridgeSeries, bridgeWords } from './bridge-series';
 import { cautionsOf } from './cautions';
@@ -66,6 +67,7 @@ export class JobSheetPage {
   private readonly router = inject(Router);
   private readonly window = inject(DOCUMENT).defaultView;
   private readonly role = inject(Session).role;
+  private readonly narrow = narrowWindow();
 
   // From the path.
   readonly branch = input.required<string>();
@@ -98,7 +100,7 @@ export class JobSheetPage {
       checked: checkFacts(job),
       air: workshopFacts(job),
       stages: stageRows(job),
-      stageColumns: stageColumns(job),
+      stageColumns: stageColumns(job, this.narrow() ? 'left out' : 'drawn'),
       productRows: productRows(
         job.products,
         this.catalogue.normsOf(job.package, job.vehicle.bodyType),

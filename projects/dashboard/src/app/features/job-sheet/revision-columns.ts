@@ -13,7 +13,7 @@ const CHANGES: Readonly<Record<Revision['change'], string>> = {
 
 /** Every revision of a job: what happened, when, by whom, from where. */
 export const REVISION_COLUMNS: readonly Column<Revision>[] = [
-  { key: 'revision', label: 'Revision', kind: 'number', text: (row) => String(row.revision) },
+  { key: 'revision', label: 'Revision', text: (row) => String(row.revision) },
   { key: 'change', label: 'What', text: (row) => CHANGES[row.change] },
   { key: 'when', label: 'When', text: (row) => formatInstant(row.receivedAt) },
   { key: 'by', label: 'By', text: (row) => row.by },

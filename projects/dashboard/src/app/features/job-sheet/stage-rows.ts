@@ -24,11 +24,14 @@ export function stageRows(job: JobSheet): readonly StageRow[] {
 }
 
 /** The columns of the stages, with their totals. */
-export function stageColumns(job: JobSheet): readonly Column<StageRow>[] {
+export function stageColumns(
+  job: JobSheet,
+  bars: 'drawn' | 'left out',
+): readonly Column<StageRow>[] {
   const total = totalMinutes(job);
   const over =
     total.estimate === undefined ? '' : formatSignedMinutes(total.actual - total.estimate);
-  return [
+  const columns: readonly Column<StageRow>[] = [
     { key: 'stage', label: 'Stage', text: (row) => STAGE_NAMES[row.stage], total: 'all' },
     {
       key: 'estimate',
@@ -52,13 +55,15 @@ export function stageColumns(job: JobSheet): readonly Column<StageRow>[] {
       text: (row) => (row.over === null ? '' : formatSignedMinutes(row.over)),
       total: over,
     },
-    {
-      key: 'bar',
-      label: 'Over, as a bar',
-      unseenLabel: true,
-      text: () => '',
-      // More minutes than planned are the loss: drawn to the left of zero as losses are.
-      bar: (row) => (row.over === null ? null : -row.over),
-    },
   ];
+  return bars === 'drawn' ? [...columns, BAR] : columns;
 }
+
+const BAR: Column<StageRow> = {
+  key: 'bar',
+  label: 'Over, as a bar',
+  unseenLabel: true,
+  text: () => '',
+  // More minutes than planned are the loss: drawn to the left of zero as losses are.
+  bar: (row) => (row.over === null ? null : -row.over),
+};

@@ -2,6 +2,7 @@ import { inject } from '@angular/core';
 import { type CanActivateFn, Router, type Routes } from '@angular/router';
 import { homeOf } from '../../core/session/home';
 import { Session } from '../../core/session/session';
+import { FIELD_DEFAULTS } from '../../ui/field-defaults';
 import { ForgotPage } from './forgot-page';
 import { SignInPage } from './sign-in-page';
 
@@ -12,7 +13,7 @@ const notSignedIn: CanActivateFn = () => {
 };
 
 const routes: Routes = [
-  { path: '', component: SignInPage, canActivate: [notSignedIn] },
-  { path: 'forgot', title: 'A new password', component: ForgotPage },
+  { path: '', component: SignInPage, canActivate: [notSignedIn], providers: [FIELD_DEFAULTS] },
+  { path: 'forgot', title: 'A new password', component: ForgotPage, providers: [FIELD_DEFAULTS] },
 ];
 export default routes;

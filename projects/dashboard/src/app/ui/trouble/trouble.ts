@@ -9,7 +9,7 @@ import { ChangeDetectionStrategy, Component } from '@angular/core';
   `,
   styles: `
     :host {
-      display: flex;
+      display: inline-flex;
       align-items: baseline;
       gap: 8px;
       color: var(--us-oxide);
