@@ -16,7 +16,8 @@ export interface TokenClaims {
 /** Makes an access token (RFC 7519) with `sub` the person and `sid` the sign-in. */
 export function issueAccessToken(key: KeyObject, claims: TokenClaims, now: Date): string {
   const issuedAt = Math.floor(now.getTime() / 1000);
-  return jwt.sign({ sub: String(claims.personId), sid: claims.signInId, iat: issuedAt }, key, {
+  return jwt.sign({ sid: claims.signInId, iat: issuedAt }, key, {
+    subject: String(claims.personId),
     algorithm: TOKEN_ALGORITHM,
     expiresIn: ACCESS_TOKEN_SECONDS,
   });

@@ -45,6 +45,6 @@ function writeOnce(file: string, text: string): void {
     writeFileSync(file, text, { flag: 'wx', mode: 0o600, flush: true });
   } catch (error) {
     // It was made before: that one counts.
-    if (!(error instanceof Error && 'code' in error && error.code === 'EEXIST')) throw error;
+    if ((error as NodeJS.ErrnoException).code !== 'EEXIST') throw error;
   }
 }

@@ -28,9 +28,8 @@ export async function countAttempt(
   const attempts = await tools.store.queue.write(() => {
     forgetAttempts(db, after(now, -WINDOW_MS), now.toISOString());
     const before = findAttempts(db, name);
-    if (before?.lockedUntil != null && before.lockedUntil > now.toISOString()) {
-      return before.lockedUntil;
-    }
+    const until = before?.lockedUntil ?? '';
+    if (until > now.toISOString()) return until;
     const attempts = counted(before, now);
     keepAttempts(db, name, attempts);
     return attempts;
