@@ -13,6 +13,10 @@ describe('theilSenSlope', () => {
     expect(theilSenSlope([1, 1, 2], [0, 2, 3])).toBe(2);
   });
 
+  it('given level values in falling order of time, is 0 and not −0', () => {
+    expect(theilSenSlope([1, 0], [39, 39])).toBe(0);
+  });
+
   it('given one wild value on a line, keeps the slope of the line', () => {
     expect(theilSenSlope([0, 1, 2, 3, 4, 5, 6], [0, 2, 4, 600, 8, 10, 12])).toBe(2);
   });

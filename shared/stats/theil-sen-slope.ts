@@ -22,7 +22,8 @@ export function theilSenSlope(
     const value = requireFinite(values[later], 'value');
     for (let earlier = 0; earlier < later; earlier += 1) {
       const run = time - (times[earlier] as number);
-      if (run !== 0) slopes[count++] = (value - (values[earlier] as number)) / run;
+      // Adding 0 makes −0 a 0, so that a level trend never depends on the order of its points.
+      if (run !== 0) slopes[count++] = (value - (values[earlier] as number)) / run + 0;
     }
   }
   return quantile(ascending(slopes.subarray(0, count)), 0.5);
