@@ -38,11 +38,13 @@ export class Restatement {
     const { queue, state, writing } = this.store;
     const next = state.costs.with(change);
     const { generation } = state;
-    await queue.write(() => {
-      writing.prepare('update network set restating = 1').run();
-      state.nextCosts = next;
-    });
     try {
+      await queue.write(() => {
+        // What a restatement that could not even be taken back has left behind, a full disk for one.
+        recoverGenerations(writing);
+        writing.prepare('update network set restating = 1').run();
+        state.nextCosts = next;
+      });
       let restatedJobs = 0;
       await this.everySlice((from, to) => {
         restatedJobs += this.restateSlice(change, next, generation, from, to);
@@ -58,8 +60,8 @@ export class Restatement {
       await queue.write(() => writing.prepare('update network set restating = 0').run());
       return { restatedJobs, recorded };
     } catch (error) {
+      state.nextCosts = undefined;
       await queue.write(() => {
-        state.nextCosts = undefined;
         recoverGenerations(writing);
         state.reload();
       });
