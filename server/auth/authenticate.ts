@@ -21,7 +21,7 @@ export function makeAuthenticate(
   return (request: Request) =>
     new Promise<Caller>((resolve, reject) => {
       const settle = (error: unknown, caller?: unknown) => {
-        if (error) reject(error as Error);
+        if (error) reject(error instanceof Error ? error : new Error('no way to tell who calls'));
         else if (caller) resolve(caller as Caller);
         else
           reject(new Refusal('unauthenticated', 'Sign in first: this call needs a valid token.'));

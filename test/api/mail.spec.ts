@@ -32,7 +32,10 @@ class PostOffice {
       disabledCommands: ['AUTH', 'STARTTLS'],
       closeTimeout: 100,
       onRcptTo: (_address, _session, done) => {
-        if (this.refuseWith === undefined) return done();
+        if (this.refuseWith === undefined) {
+          done();
+          return;
+        }
         this.refusals.push(this.refuseWith);
         done(Object.assign(new Error('no such luck'), { responseCode: this.refuseWith }));
       },
