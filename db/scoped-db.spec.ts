@@ -40,10 +40,9 @@ describe('ScopedDb', () => {
 
   it('given rows as arrays, narrows them the same', () => {
     const db = reader('BBB');
-    expect(db.rows(db.table('jobs').select('job_ref').orderBy('job_ref'))).toEqual([
-      ['b-1'],
-      ['b-2'],
-    ]);
+    const rows: unknown[][] = [];
+    db.each(db.table('jobs').select('job_ref').orderBy('job_ref'), (row) => rows.push(row));
+    expect(rows).toEqual([['b-1'], ['b-2']]);
   });
 
   it('given a join, narrows both sides', () => {
@@ -70,7 +69,7 @@ describe('ScopedDb', () => {
     const db = reader('AAA');
     expect(() => db.all(sql('jobs').select('*'))).toThrow(UnscopedRead);
     expect(() => db.first(sql('job_facts').where('branch_id', 1))).toThrow(UnscopedRead);
-    expect(() => db.rows(sql.raw('select * from claims'))).toThrow(UnscopedRead);
+    expect(() => db.each(sql.raw('select * from claims'), () => undefined)).toThrow(UnscopedRead);
   });
 
   it('given what it makes itself of every table, lets it pass', () => {

@@ -42,17 +42,19 @@ export class ScopedDb {
     return this.connection.first<Row>(query);
   }
 
-  /** Rows as arrays of column values, for large reads. */
-  rows(query: Query): unknown[][] {
+  /** Visits rows as arrays of column values, one at a time, for reads too large to hold. */
+  each(query: Query, visit: (row: unknown[]) => void): void {
     const { sql: text, bindings } = this.check(query);
-    return this.connection.driver
+    const rows = this.connection.driver
       .prepare(text)
       .raw()
-      .all(...(bindings as unknown[])) as unknown[][];
+      .iterate(...(bindings as unknown[])) as IterableIterator<unknown[]>;
+    for (const row of rows) visit(row);
   }
 
   /** Runs several reads on one unchanging state of the database. */
   snapshot<T>(read: () => T): T {
+    if (this.connection.driver.inTransaction) return read();
     return this.connection.driver.transaction(read)();
   }
 

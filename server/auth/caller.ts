@@ -34,3 +34,8 @@ export function actorOf(caller: Caller | undefined, address: string): Actor {
     ? { label: caller.email, personId: caller.id, pushKeyId: null, address }
     : { label: `key ${caller.id}`, personId: null, pushKeyId: caller.id, address };
 }
+
+/** A recorder sees no money (rule 24); a push key sends all of it. */
+export function moneyFor(caller: Caller | undefined): 'seen' | 'unseen' {
+  return caller?.kind === 'person' && caller.role === 'recorder' ? 'unseen' : 'seen';
+}

@@ -63,7 +63,7 @@ export function isRot(finding: Pick<RecordedFinding, 'seenAs' | 'workedAs'>): bo
 
 /** Make and model as compared (rule 33): NFC, trimmed, inner spaces collapsed, case folded. */
 export function modelKey(make: string, model: string): string {
-  return `${folded(make)}\u0000${folded(model)}`;
+  return `${folded(make)}\u001f${folded(model)}`;
 }
 
 /** One text folded for comparing without regard to case or spacing. */

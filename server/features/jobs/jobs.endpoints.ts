@@ -4,7 +4,7 @@ import { billJob, getJob, putJob, putJobBatch, voidJob } from '#shared/contracts
 import { localDate } from '#shared/domain/calendar';
 import { breaksOfJob, type JobWorld } from '#shared/domain/job-rules';
 import { notFound } from '#shared/domain/refusal';
-import { actorOf, type Caller } from '../../auth/caller';
+import { actorOf, moneyFor, type Caller } from '../../auth/caller';
 import { realClock } from '../../clock';
 import { mount, namedBranch, type Call, type Mounting } from '../../http/mount';
 import type { Kit } from '../../kit';
@@ -109,9 +109,4 @@ function sendingOf(kit: Kit, call: Call, jobRef: string): Sending {
       lastChange: () => lastChange(kit.store.scoped(call.scope), namedBranch(call).code, jobRef),
     },
   };
-}
-
-/** A recorder sees no money; a push key sends all of it. */
-function moneyFor(caller: Caller | undefined): 'seen' | 'unseen' {
-  return caller?.kind === 'person' && caller.role === 'recorder' ? 'unseen' : 'seen';
 }
