@@ -1,6 +1,8 @@
 import { BranchWriter, type Receipt } from '#db/branch-writer';
 import { ClaimWriter } from '#db/claim-writer';
+import { recordAudit } from '#db/queries/audit';
 import { putBookingRow } from '#db/queries/bookings';
+import { putWeekNoteRow } from '#db/queries/week-notes';
 import type { ScopedBranch } from '#db/scope';
 import type { Store } from '#db/store';
 import { acceptClaim } from '#server/features/claims/accept-claim';
@@ -9,7 +11,7 @@ import { readJob } from '#server/features/jobs/check-job';
 import type { JobContent } from '#shared/contracts/jobs';
 import { breaksOfClaim } from '#shared/domain/claim-rules';
 import type { JobWorld } from '#shared/domain/job-rules';
-import type { BranchHistory, DemoClaim } from './demo-network';
+import type { BranchHistory, DemoClaim, DemoWeekNote } from './demo-network';
 import type { Senders } from './load-people';
 
 /** Something that reached the network after a job's first arrival, to be done in the order of its moment. */
@@ -66,7 +68,11 @@ export function loadHistory(loading: Loading, history: BranchHistory): LaterEven
     }
   }
   loadBookings(loading, history);
-  return [...later, ...claimEvents(loading, history.claims)];
+  return [
+    ...later,
+    ...claimEvents(loading, history.claims),
+    ...noteEvents(loading, history.weekNotes),
+  ];
 }
 
 function claimEvents(loading: Loading, claims: readonly DemoClaim[]): LaterEvent[] {
@@ -80,6 +86,26 @@ function claimEvents(loading: Loading, claims: readonly DemoClaim[]): LaterEvent
         ...byKey(senders, receivedAt),
         role: 'site_manager',
         limitCents: claimLimitCents,
+      });
+    },
+  }));
+}
+
+function noteEvents(loading: Loading, notes: readonly DemoWeekNote[]): LaterEvent[] {
+  const { store, branch, senders } = loading;
+  const personId = senders.managerId;
+  if (personId === undefined) return [];
+  return notes.map(({ week, text, changedAt }) => ({
+    at: changedAt,
+    happen: () => {
+      putWeekNoteRow(store.unscoped, branch, { week, text, personId, changedAt });
+      recordAudit(store.unscoped, {
+        at: changedAt,
+        actor: senders.mender,
+        action: 'week.note',
+        subject: `/branches/${branch.code}/weeks/${week}/note`,
+        branchId: branch.id,
+        detail: { before: null, after: text },
       });
     },
   }));
