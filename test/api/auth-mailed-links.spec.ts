@@ -1,6 +1,7 @@
 import { sql } from '#db/database';
 import { advanceClock, holdClock } from '../support/advance-clock';
 import { PASSWORD, TestApp } from '../support/app';
+import { wholeAnswer } from '../support/whole-answer';
 
 const EMAIL = 'office@network.example';
 const NEW = 'another long password';
@@ -79,12 +80,8 @@ describe('a reset', () => {
   it('for an address nobody has, answers alike and mails nothing', async () => {
     const known = await askReset(EMAIL);
     const unknown = await askReset('nobody@network.example');
-    const head = (answer: typeof known) => [
-      answer.status,
-      answer.text,
-      [...answer.headers].filter(([name]) => name !== 'date'),
-    ];
-    expect(head(unknown)).toEqual(head(known));
+    expect(known.status).toBe(204);
+    expect(wholeAnswer(unknown)).toBe(wholeAnswer(known));
     expect(await mailbox()).toHaveLength(1);
   });
 

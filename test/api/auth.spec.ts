@@ -2,6 +2,7 @@ import { sql } from '#db/database';
 import { advanceClock, holdClock } from '../support/advance-clock';
 import { PASSWORD, TestApp } from '../support/app';
 import { refreshCookie } from '../support/refresh-cookie';
+import { wholeAnswer } from '../support/whole-answer';
 
 const EMAIL = 'office@network.example';
 let app: TestApp;
@@ -73,9 +74,7 @@ describe('sign-in', () => {
       const answer = await give(email, password);
       expect(answer.status).toBe(401);
       expect(answer.headers.getSetCookie()).toEqual([]);
-      told.add(
-        JSON.stringify([answer.text, [...answer.headers].filter(([name]) => name !== 'date')]),
-      );
+      told.add(wholeAnswer(answer));
     }
     expect(told.size).toBe(1);
     expect([...told][0]).toContain('application/problem+json');
