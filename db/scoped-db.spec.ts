@@ -38,11 +38,11 @@ describe('ScopedDb', () => {
     expect(rows).toHaveLength(1);
   });
 
-  it('given rows as arrays, narrows them the same', () => {
+  it('given rows to visit one at a time, narrows them the same', () => {
     const db = reader('BBB');
-    const rows: unknown[][] = [];
-    db.each(db.table('jobs').select('job_ref').orderBy('job_ref'), (row) => rows.push(row));
-    expect(rows).toEqual([['b-1'], ['b-2']]);
+    const seen: unknown[] = [];
+    db.each(db.table('jobs').select('job_ref').orderBy('job_ref'), (row) => seen.push(row));
+    expect(seen).toEqual([['b-1'], ['b-2']]);
   });
 
   it('given a join, narrows both sides', () => {
