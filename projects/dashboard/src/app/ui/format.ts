@@ -2,7 +2,7 @@
  * Numbers, money and dates as they are read on screen. The words are English, so the formats are those of the English the browser
  * prefers (en-GB when it names none); the space before % and units is the narrow no-break one, the minus is the true one.
  */
-const LOCALE = preferredEnglish(globalThis.navigator?.languages ?? []);
+const LOCALE = preferredEnglish(navigator.languages);
 const NARROW = '\u202f';
 const MINUS = '\u2212';
 

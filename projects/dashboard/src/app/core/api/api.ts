@@ -1,12 +1,13 @@
 import {
   HttpClient,
   HttpContext,
+  HttpErrorResponse,
   type HttpEvent,
   HttpEventType,
   type HttpResponse,
 } from '@angular/common/http';
 import { inject, Injectable } from '@angular/core';
-import { filter, map, type Observable } from 'rxjs';
+import { catchError, filter, from, map, type Observable, switchMap, throwError } from 'rxjs';
 import type * as z from 'zod';
 import type { Endpoint, OutOf, ParamsOf, QueryOf } from '#shared/contracts/endpoint';
 import { NEEDS_TOKEN } from './needs-token';
@@ -72,6 +73,9 @@ export class Api {
         responseType: 'blob',
       })
       .pipe(
+        catchError((error: unknown) =>
+          from(withReadableBody(error)).pipe(switchMap((readable) => throwError(() => readable))),
+        ),
         map(downloadOf),
         filter((step) => step !== undefined),
       );
@@ -108,4 +112,11 @@ function downloadOf(event: HttpEvent<Blob>): Download | undefined {
   if (event.type === HttpEventType.DownloadProgress) return { kind: 'coming', bytes: event.loaded };
   if (event.type !== HttpEventType.Response) return undefined;
   return { kind: 'whole', file: event.body ?? new Blob([]) };
+}
+
+/** A refused download carries its problem document as a file; turned back into text, so that it can be told. */
+async function withReadableBody(error: unknown): Promise<unknown> {
+  if (!(error instanceof HttpErrorResponse) || !(error.error instanceof Blob)) return error;
+  const { status, headers } = error;
+  return new HttpErrorResponse({ status, headers, error: await error.error.text() });
 }

@@ -5,7 +5,6 @@ import {
   Component,
   contentChild,
   input,
-  output,
   signal,
   TemplateRef,
 } from '@angular/core';
@@ -30,13 +29,11 @@ export class ScopePart {
   readonly label = input.required<string>();
   /** What it says now: "Havnsund". */
   readonly words = input.required<string>();
-  readonly opened = output<void>();
   protected readonly panel = contentChild.required(TemplateRef);
   protected readonly isOpen = signal(false);
   protected readonly positions = BELOW;
 
   open(): void {
-    this.opened.emit();
     this.isOpen.set(true);
   }
 

@@ -1,7 +1,7 @@
 import type { JobSheet } from '#shared/contracts/jobs';
 import { formatDate } from '../../ui/format';
 import { CONSUMABLE_NAMES } from '../../ui/words';
-import type { ConsumableKind } from '#shared/domain/vocabulary';
+import { CONSUMABLE_KINDS } from '#shared/domain/vocabulary';
 
 type MissingCost = NonNullable<JobSheet['missingCosts']>[number];
 
@@ -20,8 +20,13 @@ export function missingCostWords(
     case 'product':
       return `no cost of ${known.productName(cost.code)} is valid on ${on}`;
     case 'consumable':
-      return `no cost of ${CONSUMABLE_NAMES[cost.code as ConsumableKind] ?? cost.code} is valid on ${on}`;
+      return `no cost of ${consumableName(cost.code)} is valid on ${on}`;
     default:
       return `no network fee is valid on ${on}`;
   }
+}
+
+function consumableName(code: string): string {
+  const kind = CONSUMABLE_KINDS.find((one) => one === code);
+  return kind ? CONSUMABLE_NAMES[kind] : code;
 }

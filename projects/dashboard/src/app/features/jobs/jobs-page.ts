@@ -105,8 +105,9 @@ export class JobsPage {
     () => `CSV of these ${formatCounted(this.jobs.value()?.jobs ?? 0, 'row', 'rows')}`,
   );
   protected readonly sign = computed(() => currencySign(this.catalogue.currency()));
-  protected readonly unwanted = computed(() =>
-    Object.assign({ cursor: null }, ...this.inForce().map((filter) => filter.without)),
+  /** Query parameters that lift every filter but the scope. */
+  protected readonly unwanted = computed<Readonly<Record<string, null>>>(() =>
+    this.inForce().reduce((all, filter) => ({ ...all, ...filter.without }), { cursor: null }),
   );
 
   /** Puts something into the URL, where the list reads it; the first page of it. */

@@ -1,0 +1,50 @@
+import { signal } from '@angular/core';
+import { TestBed } from '@angular/core/testing';
+import { provideRouter, Router } from '@angular/router';
+import type { Role } from '#shared/domain/vocabulary';
+import { Session } from '../session/session';
+import { Header } from './header';
+
+async function shownTo(role: Role, url = '/jobs') {
+  const person = { id: 1, email: 'a@b.test', name: 'Ilse Torven', role, regions: [], branches: [] };
+  TestBed.configureTestingModule({
+    providers: [
+      provideRouter([{ path: '**', children: [] }]),
+      { provide: Session, useValue: { person: signal(person), role: signal(role) } },
+    ],
+  });
+  await TestBed.inject(Router).navigateByUrl(url);
+  const fixture = TestBed.createComponent(Header);
+  await fixture.whenStable();
+  return fixture.nativeElement as HTMLElement;
+}
+const names = (element: HTMLElement) =>
+  [...element.querySelectorAll('.wide a')].map((link) => link.textContent?.trim());
+
+describe('Header', () => {
+  it('to a recorder names Jobs alone', async () => {
+    expect(names(await shownTo('recorder'))).toEqual(['Jobs']);
+  });
+
+  it('to a site manager names the pages that exist, in their order', async () => {
+    expect(names(await shownTo('site_manager'))).toEqual(['This week', 'Overruns', 'Jobs']);
+  });
+
+  it('on a job sheet marks Jobs as open, with the bead under it', async () => {
+    const element = await shownTo('site_manager', '/jobs/HAV/0417');
+    const open = element.querySelector('.wide [aria-current=page]');
+    expect(open?.textContent?.trim()).toBe('Jobs');
+    expect(open?.querySelector('us-bead')).not.toBeNull();
+    expect(element.querySelectorAll('.wide us-bead')).toHaveLength(1);
+  });
+
+  it('carries branch and package from page to page, but not the week or the page of a list', async () => {
+    const element = await shownTo(
+      'site_manager',
+      '/jobs?branch=HAV&package=full&week=2026-W05&cursor=x',
+    );
+    expect(element.querySelector('.wide a')?.getAttribute('href')).toBe(
+      '/this-week?branch=HAV&package=full',
+    );
+  });
+});
