@@ -42,6 +42,12 @@ export class ScopedDb {
     return this.connection.first<Row>(query);
   }
 
+  /** Rows one at a time; nothing else may be read through this connection meanwhile. */
+  iterate<Row>(query: Query): IterableIterator<Row> {
+    this.check(query);
+    return this.connection.iterate<Row>(query);
+  }
+
   /** Visits rows as arrays of column values, one at a time, for reads too large to hold. */
   each(query: Query, visit: (row: unknown[]) => void): void {
     const { sql: text, bindings } = this.check(query);

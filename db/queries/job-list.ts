@@ -98,26 +98,36 @@ export function listJobRows(
   after: ListPlace | undefined,
   limit: number,
 ): ListedJob[] {
-  const key = SORT_KEYS[sort];
-  const query = whereListed(db.table('job_facts'), filters)
-    .join('branches', 'branches.id', 'job_facts.branch_id')
-    .join('packages', 'packages.id', 'job_facts.package_id');
+  const query = sortedJobs(db, filters, sort).limit(limit);
   if (after) {
+    const key = SORT_KEYS[sort];
     query.whereRaw(
       `(${key} > ? or (${key} = ? and (completed_on < ? or (completed_on = ? and (branches.code, job_ref) > (?, ?)))))`,
       [after.key, after.key, after.completedOn, after.completedOn, after.branch, after.jobRef],
     );
   }
-  return db.all<ListedJob>(
-    query
-      .orderByRaw(`${key}, completed_on desc, branches.code, job_ref`)
-      .limit(limit)
-      .select(
-        ...COLUMNS.map((column) => `job_facts.${column}`),
-        { branch: 'branches.code', package: 'packages.code' },
-        sql.raw(`${key} as "sortKey"`),
-      ),
-  );
+  return db.all<ListedJob>(query);
+}
+
+/** All of them, one at a time and in the same order, for an export. */
+export function iterateJobRows(
+  db: ScopedDb,
+  filters: ListFilters,
+  sort: JobSort,
+): IterableIterator<ListedJob> {
+  return db.iterate<ListedJob>(sortedJobs(db, filters, sort));
+}
+
+function sortedJobs(db: ScopedDb, filters: ListFilters, sort: JobSort): Knex.QueryBuilder {
+  return whereListed(db.table('job_facts'), filters)
+    .join('branches', 'branches.id', 'job_facts.branch_id')
+    .join('packages', 'packages.id', 'job_facts.package_id')
+    .orderByRaw('"sortKey", completed_on desc, branches.code, job_ref')
+    .select(
+      ...COLUMNS.map((column) => `job_facts.${column}`),
+      { branch: 'branches.code', package: 'packages.code' },
+      sql.raw(`${SORT_KEYS[sort]} as "sortKey"`),
+    );
 }
 
 /** How many jobs match. */

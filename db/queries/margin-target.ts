@@ -1,13 +1,12 @@
 import { sql } from '../database';
-import type { Scope } from '../scope';
-import type { UnscopedDb } from '../unscoped-db';
+import type { ScopedDb } from '../scoped-db';
 
 /** The target that holds for a scope (rule 80): a single branch's own, or else the network's; null when none is set. */
-export function readMarginTarget(db: UnscopedDb, scope: Scope): number | null {
+export function readMarginTarget(db: ScopedDb): number | null {
   const network = db.first<{ target: number | null }>(
     sql('network').select({ target: 'target_margin_share' }),
   );
-  const [only, ...others] = scope.branches;
+  const [only, ...others] = db.scope.branches;
   const own =
     only && others.length === 0
       ? db.first<{ target: number | null }>(

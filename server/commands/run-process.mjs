@@ -49,11 +49,22 @@ function run(program, args, env, stdio) {
   });
 }
 
-for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) {
-  process.on(signal, () => {
-    if (running.size === 0) process.exit(128 + constants.signals[signal]);
-    // A terminal has sent Ctrl-C to the children already; a second one would tell them to stop at once.
-    if (signal === 'SIGINT' && process.stdin.isTTY) return;
-    for (const child of running) child.kill(signal);
-  });
+function handOn(signal) {
+  if (running.size === 0) process.exit(128 + constants.signals[signal]);
+  // A terminal has sent Ctrl-C to the children already; a second one would tell them to stop at once.
+  if (signal === 'SIGINT' && process.stdin.isTTY) return;
+  for (const child of running) child.kill(signal);
+}
+
+for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, () => handOn(signal));
+
+// npm hands a signal only to the shell between it and this process; that the shell has gone is all that arrives here.
+if (process.env.npm_lifecycle_event) {
+  const shell = process.ppid;
+  const watch = setInterval(() => {
+    if (process.ppid === shell) return;
+    clearInterval(watch);
+    handOn('SIGTERM');
+  }, 200);
+  watch.unref();
 }

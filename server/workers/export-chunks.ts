@@ -1,13 +1,15 @@
 import { JOB_COLUMNS, MARGIN_COLUMNS, OVERRUN_COLUMNS } from '../features/exports/columns';
 import { csvHeader, csvRows } from '../features/exports/csv-text';
-import { listJobs, type JobListQuestion } from '../features/job-list/list-jobs';
+import { tellJob } from '../features/job-list/tell-job';
 import { answerMargin } from '../features/margin/answer-margin';
 import { answerOverrun } from '../features/overrun/answer-overrun';
+import { iterateJobRows } from '#db/queries/job-list';
 import type { ScopedDb } from '#db/scoped-db';
+import type { JobRow } from '#shared/contracts/jobs';
 import type { ExportTasks, PackedExport } from './read-tasks';
 
-/** Jobs read for one chunk. */
-const PAGE = 500;
+/** Jobs of one chunk. */
+const CHUNK = 500;
 
 /** The text of an export in pieces: the header first, then rows as the same code that answers the screen gives them. */
 export function* csvChunks(
@@ -29,13 +31,18 @@ export function* csvChunks(
     }
     case 'jobs': {
       yield csvHeader(JOB_COLUMNS);
-      let question = { ...(task.input as JobListQuestion), limit: PAGE };
-      for (;;) {
-        const page = listJobs(db, question);
-        if (page.items.length > 0) yield csvRows(JOB_COLUMNS, page.items);
-        if (page.next === null) return;
-        question = { ...question, after: page.next };
-      }
+      yield* jobChunks(db, task.input as ExportTasks['jobs']);
     }
   }
+}
+
+function* jobChunks(db: ScopedDb, question: ExportTasks['jobs']): Generator<string> {
+  let rows: JobRow[] = [];
+  for (const row of iterateJobRows(db, question.filters, question.sort)) {
+    rows.push(tellJob(row, question.todayByBranch[row.branch] ?? row.completed_on, question.money));
+    if (rows.length < CHUNK) continue;
+    yield csvRows(JOB_COLUMNS, rows);
+    rows = [];
+  }
+  if (rows.length > 0) yield csvRows(JOB_COLUMNS, rows);
 }

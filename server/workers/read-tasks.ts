@@ -9,12 +9,7 @@ import type { JobListQuestion, JobPage } from '../features/job-list/list-jobs';
 /** What a worker can be asked, and what it answers. The scope goes along packed; everything else is plain data. */
 export interface ReadTasks {
   margin: {
-    input: {
-      period: Period;
-      filters: JobFilters;
-      today: string;
-      targetMarginShare: number | null;
-    };
+    input: MarginQuestion;
     output: MarginAnswer;
   };
   overrun: {
@@ -28,7 +23,7 @@ export interface ReadTasks {
 export interface ExportTasks {
   margin: ReadTasks['margin']['input'];
   overrun: ReadTasks['overrun']['input'];
-  jobs: JobListQuestion;
+  jobs: Omit<JobListQuestion, 'after' | 'limit'>;
 }
 
 export type ReadName = keyof ReadTasks;

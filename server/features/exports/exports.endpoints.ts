@@ -15,7 +15,7 @@ export function mountExports(mounting: Mounting, kit: Kit): void {
     const { sort, ...query } = call.query;
     const { scope, ...asked } = jobListQuestion(kit, call.scope, query);
     const money = moneyFor(call.caller);
-    return exported(kit, call, 'jobs', scope, { ...asked, sort, after: null, limit: 1, money });
+    return exported(kit, call, 'jobs', scope, { ...asked, sort, money });
   });
 
   mount(mounting, exportMargin, (call) => {

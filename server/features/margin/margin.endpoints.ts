@@ -1,4 +1,3 @@
-import { readMarginTarget } from '#db/queries/margin-target';
 import { getMargin } from '#shared/contracts/margin';
 import { mount, type Mounting } from '../../http/mount';
 import { scopeQuestion } from '../../http/scope-question';
@@ -8,7 +7,6 @@ import type { Kit } from '../../kit';
 export function mountMargin(mounting: Mounting, kit: Kit): void {
   mount(mounting, getMargin, async (call) => {
     const { scope, ...question } = scopeQuestion(kit, call.scope, call.query);
-    const targetMarginShare = readMarginTarget(kit.store.unscoped, scope);
-    return { body: await kit.reads.answer('margin', scope, { ...question, targetMarginShare }) };
+    return { body: await kit.reads.answer('margin', scope, question) };
   });
 }
