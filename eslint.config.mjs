@@ -36,10 +36,16 @@ export default defineConfig(
     extends: [js.configs.recommended],
     languageOptions: {
       globals: Object.fromEntries(
-        ['process', 'console', 'Buffer', 'URL', 'setTimeout', 'clearTimeout'].map((name) => [
-          name,
-          'readonly',
-        ]),
+        [
+          'process',
+          'console',
+          'Buffer',
+          'URL',
+          'setTimeout',
+          'clearTimeout',
+          'setInterval',
+          'clearInterval',
+        ].map((name) => [name, 'readonly']),
       ),
     },
   },
