@@ -1,6 +1,6 @@
 import BetterSqlite3 from 'better-sqlite3';
 import knexFactory, { type Knex } from 'knex';
-import { existsSync } from 'node:fs';
+import { existsSync, rmSync } from 'node:fs';
 import { migrations, migrationSource } from './migrations';
 
 /** Marks a SQLite file as Underseam's ("USea" in ASCII). */
@@ -99,8 +99,19 @@ function open(make: () => BetterSqlite3.Database, file: string): Connection {
   }
 }
 
-/** Looks at an existing file read-only. */
+/** Looks at an existing file; when it is refused, not even an empty companion is left beside it. */
 function inspect(file: string): void {
+  const companions = [`${file}-shm`, `${file}-wal`].filter((name) => !existsSync(name));
+  try {
+    look(file);
+  } catch (error) {
+    for (const name of companions) rmSync(name, { force: true });
+    throw error;
+  }
+}
+
+/** Looks at an existing file read-only. */
+function look(file: string): void {
   const connection = open(() => new BetterSqlite3(file, { readonly: true }), file);
   try {
     const tables = Number(
@@ -134,16 +145,26 @@ function corrupt(file: string): DatabaseRefused {
   );
 }
 
+/** What goes wrong is told once, by the refusal. */
+const SILENT = { warn: ignore, error: ignore, debug: ignore, deprecate: ignore };
+
+function ignore(): void {
+  // Said elsewhere.
+}
+
 async function migrate(file: string): Promise<void> {
   const knex = knexFactory({
     client: 'better-sqlite3',
     connection: { filename: file },
     useNullAsDefault: true,
     pool: { min: 1, max: 1 },
+    log: SILENT,
   });
   try {
-    await knex.migrate.latest({ migrationSource });
+    // First of all: a start killed half-way must find its own file again, and no lock that nobody holds any more.
     await knex.raw(`pragma application_id = ${APPLICATION_ID}`);
+    await knex.migrate.forceFreeMigrationsLock({ migrationSource });
+    await knex.migrate.latest({ migrationSource });
     await knex.raw(`pragma user_version = ${migrations.length}`);
   } catch (error) {
     throw new DatabaseRefused(
