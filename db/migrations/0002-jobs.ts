@@ -39,6 +39,7 @@ export async function up(knex: Knex): Promise<void> {
     ) strict, without rowid`,
     appendOnly('job_revisions', 'update'),
     appendOnly('job_revisions', 'delete'),
+    neverReplaced('job_revisions', 'job_id', 'revision'),
     `create table job_facts (
       id integer primary key,
       job_id integer not null references jobs (id),
@@ -166,6 +167,7 @@ export async function up(knex: Knex): Promise<void> {
     ) strict, without rowid`,
     appendOnly('claim_revisions', 'update'),
     appendOnly('claim_revisions', 'delete'),
+    neverReplaced('claim_revisions', 'claim_id', 'revision'),
     `create table bookings (
       branch_id integer not null references branches (id),
       ref text not null,
@@ -199,6 +201,7 @@ export async function up(knex: Knex): Promise<void> {
     ) strict`,
     appendOnly('audit_events', 'update'),
     appendOnly('audit_events', 'delete'),
+    neverReplaced('audit_events', 'id'),
   );
 }
 
@@ -209,6 +212,14 @@ export async function down(): Promise<void> {
 
 function appendOnly(table: string, change: 'update' | 'delete'): string {
   return `create trigger ${table}_no_${change} before ${change} on ${table}
+    begin select raise(abort, '${table} is append-only'); end`;
+}
+
+/** `replace into` removes a row without the triggers of removal, so a key that is there already is refused as such. */
+function neverReplaced(table: string, ...key: string[]): string {
+  const same = key.map((column) => `${column} = new.${column}`).join(' and ');
+  return `create trigger ${table}_no_replace before insert on ${table}
+    when exists (select 1 from ${table} where ${same})
     begin select raise(abort, '${table} is append-only'); end`;
 }
 

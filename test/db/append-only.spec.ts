@@ -1,0 +1,104 @@
+import { sql } from '#db/database';
+import { recordAudit, verifyAudit } from '#db/queries/audit';
+import { RECEIPT, SmallStore } from '../support/small-store';
+
+let small: SmallStore;
+beforeEach(async () => {
+  small = await SmallStore.make();
+  await small.putJob('AAA', 'a');
+  await small.putJob('AAA', 'a', { notes: 'corrected' } as never);
+  await small.voidJob('AAA', 'a');
+});
+afterEach(() => small.close());
+
+const audit = (detail: Record<string, unknown>): Promise<void> =>
+  small.store.queue.write(() =>
+    recordAudit(small.store.unscoped, {
+      at: RECEIPT.receivedAt,
+      actor: RECEIPT.actor,
+      action: 'test.do',
+      subject: '/',
+      branchId: null,
+      detail,
+    }),
+  );
+const verify = () => verifyAudit(small.store.unscoped);
+const execute = (text: string) => () => small.store.writing.driver.exec(text);
+
+describe('The append-only tables', () => {
+  it.each(['job_revisions', 'claim_revisions', 'audit_events'])(
+    'given a change or removal in %s, refuse it',
+    async (table) => {
+      if (table === 'claim_revisions') {
+        small.store.writing.driver.exec(
+          `insert into claims (id, branch_id, job_id, claim_ref, revision, made_on, zone, cause, decision,
+            labour_minutes, product_ml, cost_cents)
+            values (1, 1, 1, 'c', 1, '2026-01-30', 'floor', 'damage', 'open', 0, 0, 0);
+           insert into claim_revisions (claim_id, revision, content, received_at, source)
+            values (1, 1, '{}', '2026-01-30', 'person')`,
+        );
+      }
+      const column = table === 'audit_events' ? 'detail' : 'content';
+      const before = small.store.unscoped.all(sql(table));
+      expect(before.length).toBeGreaterThan(0);
+      expect(execute(`update ${table} set ${column} = '{}'`)).toThrow('append-only');
+      expect(execute(`delete from ${table}`)).toThrow('append-only');
+      expect(small.store.unscoped.all(sql(table))).toEqual(before);
+    },
+  );
+
+  it('given a row written over by its key, refuse that too', () => {
+    for (const [table, text] of Object.entries(REPLACED)) {
+      const before = small.store.unscoped.all(sql(table));
+      expect(execute(text)).toThrow('append-only');
+      expect(small.store.unscoped.all(sql(table))).toEqual(before);
+    }
+  });
+});
+
+const REPLACED: Record<string, string> = {
+  job_revisions: `replace into job_revisions (job_id, revision, change, content, received_at, source)
+    values (1, 1, 'created', '{}', '2026-01-01', 'person')`,
+  audit_events: `replace into audit_events
+    (id, at, actor, address, action, subject, detail, previous_hash, hash)
+    values (1, '2026-01-01', 'x', 'x', 'x', 'x', '{}', 'x', 'x')`,
+};
+
+describe('verifyAudit', () => {
+  it('given a trail as it was written, holds to its last event', async () => {
+    for (let n = 0; n < 1200; n += 1) void audit({ n });
+    await audit({ last: true });
+    expect(verify()).toEqual({ events: 1203, brokenAt: null });
+  });
+
+  it.each([
+    ['a changed detail', "update audit_events set detail = '{}' where id = 2", 2],
+    ['a changed actor', "update audit_events set actor = 'somebody else' where id = 1", 1],
+    ['a changed time', "update audit_events set at = '2020-01-01T00:00:00.000Z' where id = 3", 3],
+    ['another address', "update audit_events set address = 'elsewhere' where id = 1", 1],
+    ['another branch', 'update audit_events set branch_id = 2 where id = 1', 1],
+    ['a removed event', 'delete from audit_events where id = 2', 3],
+    ['a removed first event', 'delete from audit_events where id = 1', 2],
+    ['a new hash put on', "update audit_events set hash = 'x' where id = 2", 2],
+    [
+      'two events that changed places',
+      `update audit_events set id = 9 where id = 1; update audit_events set id = 1 where id = 2;
+       update audit_events set id = 2 where id = 9`,
+      1,
+    ],
+  ])('given %s behind the triggers’ back, names the event', async (_, text, brokenAt) => {
+    await audit({ third: true });
+    small.store.writing.driver.exec(
+      `drop trigger audit_events_no_update; drop trigger audit_events_no_delete; ${text}`,
+    );
+    expect(verify().brokenAt).toBe(brokenAt);
+  });
+
+  it('given an event without the hash before it, names it', async () => {
+    small.store.writing.driver.exec(
+      `insert into audit_events (at, actor, address, action, subject, detail, previous_hash, hash)
+        values ('2026-01-01', 'x', 'x', 'x', 'x', '{}', 'made up', 'made up')`,
+    );
+    expect(verify()).toEqual({ events: 2, brokenAt: 3 });
+  });
+});
