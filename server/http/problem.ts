@@ -52,5 +52,13 @@ export function problemOf(error: unknown): ProblemReply | undefined {
     const { status, title, detail } = error;
     return { document: { type: 'about:blank', title, status, detail }, headers: {} };
   }
+  if (error instanceof URIError) return problemOf(UNREADABLE_ADDRESS);
   return undefined;
 }
+
+/** The router could not decode a part of the path. */
+const UNREADABLE_ADDRESS = new HttpProblem(
+  400,
+  'Not readable',
+  'The address is not percent-encoded UTF-8.',
+);
