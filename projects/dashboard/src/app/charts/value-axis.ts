@@ -13,18 +13,26 @@ export interface ValueAxis {
   place(value: number): number;
   /** Whether a value lies beyond an end. */
   beyond(value: number): 'left' | 'right' | null;
-  readonly marks: readonly { readonly x: number; readonly text: string; readonly value: number }[];
+  readonly marks: readonly PlacedMark[];
+}
+
+/** A mark on the axis; its words may stand a little beside it to stay inside the picture. */
+export interface PlacedMark {
+  readonly x: number;
+  readonly wordX: number;
+  readonly text: string;
+  readonly value: number;
 }
 
 /** The most a log axis spans to either side of the reference: a far group may not flatten the rest. */
-const LOG_REACH = 6;
+const LOG_REACH = 3;
 const PAD = 0.06;
 const BETWEEN_WORDS = 12;
 
 /**
  * Builds the axis of a group chart over `values`, the reference always on it. A log axis takes positive values and reaches at most
- * six times the reference either way; what lies further is drawn at its end. Words that would touch are left out, the reference's
- * never.
+ * three times the reference either way; what lies further is drawn at its end. Words that would touch are left out, the reference's
+ * never. Words stay within `width`, the picture’s.
  */
 export function valueAxis(
   scale: 'linear' | 'log',
@@ -33,6 +41,7 @@ export function valueAxis(
   offered: readonly AxisMark[],
   left: number,
   right: number,
+  width: number = right,
 ): ValueAxis {
   const usable = scale === 'log' ? values.filter((value) => value > 0) : values;
   let low = Math.min(reference, ...usable);
@@ -53,27 +62,31 @@ export function valueAxis(
   return {
     place,
     beyond: (value) => (value < low ? 'left' : value > high ? 'right' : null),
-    marks: readableMarks(offered, reference, low, high, place),
+    marks: readableMarks(offered, reference, [low, high], place, width),
   };
 }
 
 function readableMarks(
   offered: readonly AxisMark[],
   reference: number,
-  low: number,
-  high: number,
+  [low, high]: readonly [number, number],
   place: (value: number) => number,
-): ValueAxis['marks'] {
+  width: number,
+): PlacedMark[] {
   const order = offered
     .filter(({ value }) => value >= low && value <= high)
     .sort((a, b) => Number(b.value === reference) - Number(a.value === reference));
-  const kept: { x: number; text: string; value: number; half: number }[] = [];
+  const kept: (PlacedMark & { half: number })[] = [];
   for (const { value, text } of order) {
-    const mark = { x: place(value), text, value, half: textWidth(text) / 2 };
+    const half = textWidth(text) / 2;
+    const x = place(value);
+    const mark = { x, wordX: Math.max(half, Math.min(width - half, x)), text, value, half };
     const clear = kept.every(
-      (other) => Math.abs(other.x - mark.x) >= other.half + mark.half + BETWEEN_WORDS,
+      (other) => Math.abs(other.wordX - mark.wordX) >= other.half + half + BETWEEN_WORDS,
     );
     if (clear) kept.push(mark);
   }
-  return kept.sort((a, b) => a.x - b.x).map(({ x, text, value }) => ({ x, text, value }));
+  return kept
+    .sort((a, b) => a.x - b.x)
+    .map(({ x, wordX, text, value }) => ({ x, wordX, text, value }));
 }

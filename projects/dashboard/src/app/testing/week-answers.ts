@@ -1,4 +1,4 @@
-import type { JobRow } from '#shared/contracts/jobs';
+import type { JobRow } from '#shared/contracts/job-list';
 import type { MarginAnswer, MarginWeek } from '#shared/contracts/margin';
 import { addDays, isoWeek, mondayOfWeek } from '#shared/domain/calendar';
 

@@ -22,6 +22,8 @@ export class DotIntervalChart {
     this.width() > 0 ? layOutDotInterval(this.data(), this.width()) : undefined,
   );
   protected readonly hatchWords = hatchWords;
+  protected readonly min = Math.min;
+  protected readonly max = Math.max;
 
   protected triangle(row: PlacedInterval): string {
     const { x } = row.dot!;

@@ -59,7 +59,8 @@ describe('layOutDotInterval', () => {
     const rows = [row('repair', 9, { lower: 7, upper: 11 }), row('strip', 1.1)];
     const picture = layOutDotInterval({ ...input, rows }, 600);
     expect(picture.rows[0]!.beyond).toBe('right');
-    expect(picture.rows[0]!.dot!.x).toBe(picture.right);
+    expect(picture.rows[0]!.dot!.to).toBe(picture.right);
+    expect(picture.rows[0]!.dot!.x).toBe(picture.right - 16);
     expect(picture.rows[1]!.beyond).toBeNull();
   });
 

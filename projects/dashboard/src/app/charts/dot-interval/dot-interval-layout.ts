@@ -33,6 +33,8 @@ export interface DotIntervalLayout {
   readonly bottom: number;
   readonly reference: number;
   readonly marks: ValueAxis['marks'];
+  /** Heights between which the lines of marks run: all through, or beside words that stand over each plot not. */
+  readonly guides: readonly { readonly from: number; readonly to: number }[];
   readonly rows: readonly PlacedInterval[];
 }
 
@@ -41,6 +43,7 @@ const ROW = 34;
 const STACKED_ROW = 52;
 const LEAST_PLOT = 130;
 const GAP = 16;
+const BEFORE_ARROW = 16;
 
 /**
  * Lays out groups as dots with intervals: name, cars, plot, value. Where that leaves the plot less than 130 px, each plot moves
@@ -64,6 +67,7 @@ export function layOutDotInterval(input: DotIntervalInput, width: number): DotIn
     input.marks,
     left,
     right,
+    width,
   );
   const pitch = stacked ? STACKED_ROW : ROW;
   const placed = rows.map((row, index) => {
@@ -82,6 +86,9 @@ export function layOutDotInterval(input: DotIntervalInput, width: number): DotIn
     bottom,
     reference: axis.place(input.reference),
     marks: axis.marks,
+    guides: stacked
+      ? placed.map(({ y }) => ({ from: y - 12, to: y + 10 }))
+      : [{ from: HEAD - 8, to: bottom }],
     rows: placed,
   };
 }
@@ -90,18 +97,25 @@ function placeRow(row: IntervalRow, axis: ValueAxis, wordY: number, y: number): 
   const { key, label, count, text, word, stand, chosen, value } = row;
   const lower = row.lower ?? value;
   const upper = row.upper ?? value;
+  const beyond =
+    value === null ? null : (axis.beyond(upper ?? value) ?? axis.beyond(lower ?? value));
   return {
-    ...{ key, label, count, text, word, stand, chosen, wordY, y },
+    ...{ key, label, count, text, word, stand, chosen, wordY, y, beyond },
     dot:
       value === null
         ? null
         : {
-            x: axis.place(value),
+            x: dotPlace(value, axis),
             from: axis.place(lower ?? value),
             to: axis.place(upper ?? value),
           },
-    beyond: value === null ? null : (axis.beyond(upper ?? value) ?? axis.beyond(lower ?? value)),
   };
+}
+
+/** A dot beyond the axis stands inside its end, so that the arrow head beside it is seen. */
+function dotPlace(value: number, axis: ValueAxis): number {
+  const end = axis.beyond(value);
+  return axis.place(value) + (end === null ? 0 : end === 'right' ? -BEFORE_ARROW : BEFORE_ARROW);
 }
 
 /** What stands in the value column: the value and, when the reference is missed, its word. */

@@ -28,6 +28,8 @@ export interface QuantileStripLayout {
   readonly bottom: number;
   readonly reference: number;
   readonly marks: ValueAxis['marks'];
+  /** Heights between which the lines of marks run: all through, or beside words that stand over each plot not. */
+  readonly guides: readonly { readonly from: number; readonly to: number }[];
   readonly rows: readonly PlacedStrip[];
 }
 
@@ -59,20 +61,12 @@ export function layOutQuantileStrip(input: QuantileStripInput, width: number): Q
     input.marks,
     left,
     right,
+    width,
   );
   const pitch = stacked ? STACKED_ROW : ROW;
   const bottom = HEAD + rows.length * pitch;
-  return {
-    width,
-    height: bottom + 4,
-    left,
-    right,
-    countX: stacked ? labels + GAP + counts : left - GAP,
-    head: HEAD,
-    bottom,
-    reference: axis.place(input.reference),
-    marks: axis.marks,
-    rows: rows.map(({ key, label, count, text, chosen, median, p80, p95 }, index): PlacedStrip => {
+  const placed = rows.map(
+    ({ key, label, count, text, chosen, median, p80, p95 }, index): PlacedStrip => {
       const top = HEAD + index * pitch;
       return {
         ...{ key, label, count, text, chosen },
@@ -84,6 +78,21 @@ export function layOutQuantileStrip(input: QuantileStripInput, width: number): Q
             : { median: axis.place(median), p80: axis.place(p80), p95: axis.place(p95) },
         beyond: p95 !== null && axis.beyond(p95) === 'right',
       };
-    }),
+    },
+  );
+  return {
+    width,
+    height: bottom + 4,
+    left,
+    right,
+    countX: stacked ? labels + GAP + counts : left - GAP,
+    head: HEAD,
+    bottom,
+    reference: axis.place(input.reference),
+    marks: axis.marks,
+    guides: stacked
+      ? placed.map(({ y }) => ({ from: y - 12, to: y + 10 }))
+      : [{ from: HEAD - 8, to: bottom }],
+    rows: placed,
   };
 }

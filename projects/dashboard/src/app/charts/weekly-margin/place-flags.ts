@@ -25,17 +25,19 @@ interface Box {
 const FROM_MARK = 12;
 const HALF_LINE = 9;
 const ABOVE = 20;
+const STEPS_OF_LINE = 12;
 
 /**
  * Finds a place for each sentence: left of its mark, else right, above or below, inside the plot, on no other sentence, and over as
- * few points as can be. The newest mark (the last wish) chooses first; one that finds no place is left out, its shape stays.
+ * little of the joined line as can be. The newest mark (the last wish) chooses first; one that finds no place is left out, its shape stays.
  */
 export function placeFlags(
   wishes: readonly FlagWish[],
-  points: readonly { readonly x: number; readonly y: number }[],
+  line: readonly { readonly x: number; readonly y: number }[],
   plot: Box,
 ): Flag[] {
   const taken: Box[] = [];
+  const points = line.flatMap((point, index) => between(line[index - 1], point));
   const flags: Flag[] = [];
   for (const wish of [...wishes].reverse()) {
     const best = candidates(wish)
@@ -71,6 +73,18 @@ function candidates({ x, y, text }: FlagWish): Candidate[] {
     { flag: { x, y: y - ABOVE, anchor: 'middle', text }, box: at(x - width / 2, y - ABOVE) },
     { flag: { x, y: y + ABOVE, anchor: 'middle', text }, box: at(x - width / 2, y + ABOVE) },
   ];
+}
+
+/** Points along the line from one mark to the next, the latter included. */
+function between(
+  from: { x: number; y: number } | undefined,
+  to: { x: number; y: number },
+): { x: number; y: number }[] {
+  if (!from) return [to];
+  return Array.from({ length: STEPS_OF_LINE }, (_, step) => {
+    const part = (step + 1) / STEPS_OF_LINE;
+    return { x: from.x + (to.x - from.x) * part, y: from.y + (to.y - from.y) * part };
+  });
 }
 
 function countCovered(box: Box, points: readonly { x: number; y: number }[]): number {

@@ -34,7 +34,7 @@ describe('weekAxis', () => {
     expect(axis.years.map(({ text }) => text)).toEqual(['weeks of 2026']);
   });
 
-  it('a phone shows fewer numbers, never closer than 44 px', () => {
+  it('a phone shows fewer numbers, never closer than 52 px', () => {
     const narrow = (index: number): number => 30 + index * 8;
     const axis = weekAxis(weeksFrom('2025-W31', 27), narrow, 8, 24);
     expect(axis.numbers.map(({ text }) => text)).toEqual(['32', '40', '48']);

@@ -15,7 +15,7 @@ export interface WeekAxis {
 }
 
 const INTERVALS = [1, 2, 4, 8, 13, 26] as const;
-const LEAST_BETWEEN_NUMBERS = 44;
+const LEAST_BETWEEN_NUMBERS = 52;
 const GAP = 8;
 
 /**

@@ -2,7 +2,7 @@ import type { OverrunAnswer, OverrunGroup } from '#shared/contracts/overrun';
 import type { DotIntervalInput } from '../../charts/dot-interval/dot-interval-input';
 import type { QuantileStripInput } from '../../charts/quantile-strip/quantile-strip-input';
 import type { Column } from '../../ui/data-table/column';
-import { formatCount, formatSignedShare } from '../../ui/format';
+import { formatCount } from '../../ui/format';
 import { intervalRow, RATIO_MARKS } from './interval-rows';
 import { type GroupLink, groupColumns } from './overrun-table';
 import {
@@ -58,15 +58,14 @@ export function groupPictures(
         text:
           group.allowance === null
             ? noFigureText(group.estimatedMinutes, group.cars)
-            : formatSignedShare(group.allowance),
+            : ratioText(group.allowance + 1),
         chosen: false,
       })),
       scale: 'log',
       reference: 1,
       marks: RATIO_MARKS,
     },
-    spreadNote:
-      'Single cars: half are done by the dot, 8 of 10 by the bar’s end (named), 19 of 20 by the line’s',
+    spreadNote: 'Half of the cars by the dot, 8 of 10 by the bar’s end, 19 of 20 by the line’s',
     columns: groupColumns(by, answer, words, linkOf),
     rows: groups,
     csv:
@@ -100,7 +99,7 @@ function summariseSpread(
   const said = groups.map((group) =>
     group.allowance === null
       ? `${nameOf(group)} ${noFigureText(group.estimatedMinutes, group.cars)}`
-      : `${nameOf(group)} ${formatSignedShare(group.allowance)}`,
+      : `${nameOf(group)} ${ratioText(group.allowance + 1)}`,
   );
   return `Allowance that 8 of 10 cars would have finished within: ${said.join('; ')}.`;
 }

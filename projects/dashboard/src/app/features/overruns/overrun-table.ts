@@ -45,7 +45,7 @@ export function groupColumns(
       key: 'over',
       label: 'Over',
       kind: 'number',
-      strong: true,
+      strong: ({ ratio }) => ratio !== null,
       text: (group) =>
         group.ratio === null
           ? noFigureText(group.estimatedMinutes, group.cars)

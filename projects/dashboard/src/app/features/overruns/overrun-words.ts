@@ -1,6 +1,6 @@
 import type { OverrunGrouping } from '#shared/contracts/overrun';
 import { BODY_TYPES, STAGES } from '#shared/domain/vocabulary';
-import { formatMonth, formatShareRange, formatSignedShare } from '../../ui/format';
+import { formatMonth, formatNumber, formatShareRange, formatSignedShare } from '../../ui/format';
 import { BODY_TYPE_NAMES, STAGE_NAMES } from '../../ui/words';
 
 /** Two-sided 95 % of the standard normal (rule 26). */
@@ -83,14 +83,20 @@ export function groupName(by: OverrunGrouping, key: string, words: OverrunWords)
   }
 }
 
-/** A ratio of worked to estimated time as the part that was added: 1.23 → "+23 %". */
+/** From here on an overrun is read as a multiple. */
+const MANY_TIMES = 3;
+
+/** A ratio of worked to estimated time as the part that was added: 1.23 → "+23 %"; from three times on as such: "11.8 times". */
 export function ratioText(ratio: number): string {
-  return formatSignedShare(ratio - 1);
+  return ratio >= MANY_TIMES ? `${formatNumber(ratio, 1)} times` : formatSignedShare(ratio - 1);
 }
 
-/** The 95 % interval of a ratio as the part that was added: "19–27 %", "−2 to 5 %". */
+/** The 95 % interval of a ratio, read as the ratio itself: "19–27 %", "−2 to 5 %", "8.7–14.9 times". */
 export function intervalText(ratio: number, standardError: number): string {
   const reach = Z95 * standardError;
+  if (ratio >= MANY_TIMES) {
+    return `${formatNumber(Math.max(0, ratio - reach), 1)}–${formatNumber(ratio + reach, 1)} times`;
+  }
   return formatShareRange(ratio - reach - 1, ratio + reach - 1);
 }
 

@@ -18,7 +18,8 @@ import {
 import { MatButton } from '@angular/material/button';
 import { MatFormFieldModule } from '@angular/material/form-field';
 import { MatInput } from '@angular/material/input';
-import { billJob, getJob, type JobRow } from '#shared/contracts/jobs';
+import type { JobRow } from '#shared/contracts/job-list';
+import { billJob, getJob } from '#shared/contracts/jobs';
 import { Api } from '../../core/api/api';
 import { deed } from '../../core/api/deed';
 import { markFields } from '../../core/api/mark-fields';

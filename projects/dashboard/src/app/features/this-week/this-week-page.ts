@@ -1,6 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, inject, linkedSignal } from '@angular/core';
 import { exportJobs } from '#shared/contracts/exports';
-import { listJobs } from '#shared/contracts/jobs';
+import { listJobs } from '#shared/contracts/job-list';
 import { getMargin } from '#shared/contracts/margin';
 import { BridgeChart } from '../../charts/bridge/bridge-chart';
 import { WeeklyMarginChart } from '../../charts/weekly-margin/weekly-margin-chart';
@@ -14,9 +14,11 @@ import { Session } from '../../core/session/session';
 import { Answer } from '../../ui/answer/answer';
 import { DataTable } from '../../ui/data-table/data-table';
 import { LoadState } from '../../ui/load-state/load-state';
+import { narrowWindow } from '../../ui/narrow';
 import { TableTwin } from '../../ui/table-twin/table-twin';
 import { thisWeekView } from './this-week-series';
 import { UnbilledCars } from './unbilled-cars';
+import { tellingFirst } from './week-cars';
 import { datesOfChart, datesOfWeek } from './week-dates';
 import { WeekNote } from './week-note';
 import { whoseUsual, type WeekWords } from './week-words';
@@ -89,6 +91,11 @@ export class ThisWeekPage {
   protected readonly cars = computed(() => {
     const cars = this.view()?.cars;
     return cars?.rows.slice(0, this.allCars() ? undefined : cars.atFirst) ?? [];
+  });
+  private readonly narrow = narrowWindow();
+  protected readonly carColumns = computed(() => {
+    const columns = this.view()?.cars.columns ?? [];
+    return this.narrow() ? tellingFirst(columns) : columns;
   });
   protected readonly export = exportJobs;
   protected readonly exportQuery = computed(() => {

@@ -10,7 +10,7 @@ import {
 } from '@angular/core';
 import { RouterLink } from '@angular/router';
 import type { OutOf } from '#shared/contracts/endpoint';
-import type { JobRow, listJobs } from '#shared/contracts/jobs';
+import type { JobRow, listJobs } from '#shared/contracts/job-list';
 import { DefinitionLink } from '../../ui/definition-link/definition-link';
 import { formatAmount, formatCount, formatDays } from '../../ui/format';
 import { BillForm } from './bill-form';

@@ -1,5 +1,5 @@
 import type { OutOf } from '#shared/contracts/endpoint';
-import type { JobRow, listJobs } from '#shared/contracts/jobs';
+import type { JobRow, listJobs } from '#shared/contracts/job-list';
 import { formatCount, formatDays, formatMinutes, formatMoney } from '../../ui/format';
 import type { WeekWords } from './week-words';
 

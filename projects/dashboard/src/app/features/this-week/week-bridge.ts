@@ -3,6 +3,7 @@ import type { Bridge } from '#shared/contracts/margin';
 import type { BridgeInput, BridgeRow } from '../../charts/bridge/bridge-input';
 import type { Column } from '../../ui/data-table/column';
 import {
+  currencySign,
   formatCars,
   formatCount,
   formatExactAmount,
@@ -40,11 +41,12 @@ export function weekBridge(bridge: Bridge, billed: number, currency: string): We
     total('kept', 'Kept', bridge.marginCents),
   ];
   const part = bridge.cars < billed;
+  const sign = currencySign(currency);
   return {
     heading: `From expected to kept, ${part ? `${formatCount(bridge.cars)} of ${formatCars(billed)}` : formatCars(bridge.cars)}`,
     note: part
-      ? 'Each step is its effect on margin; cars without an estimate or a norm are left out'
-      : 'Each step is its effect on margin',
+      ? `Each step is its effect on margin, ${sign}; cars without an estimate or a norm are left out`
+      : `Each step is its effect on margin, ${sign}`,
     input: { summary: summarise(bridge, named, currency), rows },
     columns: COLUMNS,
   };

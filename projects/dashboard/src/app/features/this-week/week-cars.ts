@@ -1,4 +1,4 @@
-import type { JobRow } from '#shared/contracts/jobs';
+import type { JobRow } from '#shared/contracts/job-list';
 import type { Column } from '../../ui/data-table/column';
 import { formatAmount, formatCars, formatShare, formatSignedAmount } from '../../ui/format';
 import type { Standing, WeekAnswers } from './week-standing';
@@ -96,6 +96,27 @@ export function weekCarColumns(
       total: '',
     },
   ];
+}
+
+/** Columns in the order in which a phone shows them before it scrolls. */
+const TELLING = [
+  'job',
+  'car',
+  'difference',
+  'share',
+  'kept',
+  'step',
+  'bar',
+  'branch',
+  'expected',
+  'billed',
+];
+
+/** The same columns with the most telling ones first, for a narrow window. */
+export function tellingFirst(columns: readonly Column<JobRow>[]): readonly Column<JobRow>[] {
+  const place = ({ key }: Column<JobRow>): number =>
+    TELLING.includes(key) ? TELLING.indexOf(key) : TELLING.length;
+  return [...columns].sort((a, b) => place(a) - place(b));
 }
 
 /** What stands under the table's title. */

@@ -1,5 +1,5 @@
 import type { OutOf } from '#shared/contracts/endpoint';
-import type { listJobs } from '#shared/contracts/jobs';
+import type { listJobs } from '#shared/contracts/job-list';
 import type { MarginAnswer, MarginWeek } from '#shared/contracts/margin';
 import { isoWeek } from '#shared/domain/calendar';
 import { datesOfWeek } from './week-dates';

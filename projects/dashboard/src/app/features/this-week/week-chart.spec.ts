@@ -1,0 +1,118 @@
+import { marginAnswer, marginWeek, weeksFromTo } from '../../testing/week-answers';
+import { weekChart } from './week-chart';
+
+const plain = (text: string): string => text.replaceAll('\u202f', ' ');
+
+describe('weekChart', () => {
+  const weeks = weeksFromTo('2025-W31', '2026-W05', (week, index) =>
+    marginWeek(week, { marginShare: 0.387 + ((index % 2) - 0.5) / 50 }),
+  );
+  weeks[15] = marginWeek('2025-W46', {
+    marginShare: 0.292,
+    signal: 'outside_low',
+    jobs: 9,
+    unbilled: 1,
+  });
+  const chart = marginAnswer(weeks);
+
+  it('every week is a point; the week outside has its shape and sentence', () => {
+    const { input } = weekChart(chart, '2026-W05');
+    expect(input.points).toHaveLength(27);
+    expect(input.chosen).toBe('2026-W05');
+    const below = input.points[15]!;
+    expect(below.mark).toBe('outside');
+    expect(plain(below.flag!)).toBe('Week 46: below, 29 %');
+    expect(below.lines.map(plain)).toEqual([
+      'Week 46, 2025',
+      '29 %, below limits',
+      '9 cars, 1 unbilled',
+    ]);
+  });
+
+  it('an ordinary week: a dot without a sentence, three lines to read', () => {
+    const point = weekChart(chart, '2026-W05').input.points[0]!;
+    expect(point).toMatchObject({ mark: 'plain', flag: null });
+    expect(point.lines.map(plain)).toEqual(['Week 31, 2025', '38 %, inside limits', '11 cars']);
+  });
+
+  it('a run: named once, where it became one', () => {
+    const run = weeksFromTo('2025-W31', '2026-W05', (week, index) =>
+      marginWeek(week, {
+        marginShare: index < 10 ? 0.4 : 0.36,
+        signal: index >= 17 ? 'run_low' : null,
+      }),
+    );
+    const { points } = weekChart(marginAnswer(run), '2026-W05').input;
+    expect(points.filter(({ mark }) => mark === 'run_low')).toHaveLength(10);
+    expect(points.flatMap(({ flag }) => flag ?? [])).toEqual([
+      'Week 48: 8th in a row below centre',
+    ]);
+    expect(plain(points.at(-1)!.lines[1]!)).toBe('36 %, 17th in a row below centre');
+  });
+
+  it('a run broken by a week outside: named again after it', () => {
+    const run = weeksFromTo('2025-W31', '2026-W05', (week, index) =>
+      marginWeek(week, {
+        marginShare: index === 20 ? 0.1 : 0.36,
+        signal: index === 20 ? 'outside_low' : index >= 7 ? 'run_low' : null,
+      }),
+    );
+    const flags = weekChart(marginAnswer(run), '2026-W05').input.points.flatMap(
+      ({ flag }) => flag ?? [],
+    );
+    expect(flags.map(plain)).toEqual([
+      'Week 38: 8th in a row below centre',
+      'Week 51: below, 10 %',
+      'Week 52: 22nd in a row below centre',
+    ]);
+  });
+
+  it('nothing billed: a gap that says so', () => {
+    const gap = marginWeek('2026-W04', { jobs: 0, marginShare: null, revenueCents: 0 });
+    const point = weekChart(marginAnswer([gap]), '2026-W04').input.points[0]!;
+    expect(point).toMatchObject({ share: null, mark: 'plain', flag: null });
+    expect(point.lines).toEqual(['Week 4, 2026', 'nothing billed', 'no cars']);
+  });
+
+  it('a week that is not over: partial and so far', () => {
+    const running = marginWeek('2026-W06', { whole: false });
+    const point = weekChart(marginAnswer([running]), '2026-W06').input.points[0]!;
+    expect(point.mark).toBe('partial');
+    expect(plain(point.lines[1]!)).toBe('36 % so far');
+  });
+
+  it.each([
+    [
+      { slopePerWeek: 0.001, p: 0.7 },
+      'Centre and limits from the 26 billed weeks before. No trend (p = 0.7)',
+    ],
+    [
+      { slopePerWeek: -0.004, p: 0.01 },
+      'Centre and limits from the 26 billed weeks before. Falling 0.4 points a week (p = 0.01)',
+    ],
+    [null, 'Centre and limits from the 26 billed weeks before.'],
+  ])('trend %j: %s', (trend, note) => {
+    expect(weekChart(marginAnswer(weeks, { trend }), '2026-W05').note).toBe(note);
+  });
+
+  it('no limits: the note says what they take, the weeks are not judged', () => {
+    const view = weekChart(marginAnswer(weeks, { limits: null, trend: null }), '2026-W05');
+    expect(view.note).toBe('No limits yet: they take 8 earlier billed weeks.');
+    expect(plain(view.input.points[0]!.lines[1]!)).toBe('38 %');
+    expect(view.input.summary).toContain('No limits are known yet.');
+  });
+
+  it('the text alternative: the chosen week, the limits, and every marked week', () => {
+    expect(plain(weekChart(chart, '2026-W05').input.summary)).toBe(
+      'Margin of 27 weeks up to Week 5, 2026. Week 5: 38 %, inside limits, 11 cars. Limits 31–46 %, centre 39 %. Marked: Week 46, 2025 29 %, below limits.',
+    );
+  });
+
+  it('the twin: the same weeks, newest first', () => {
+    const { rows, columns } = weekChart(chart, '2026-W05');
+    expect(rows.map(({ week }) => week)).toEqual(weeks.map(({ week }) => week).reverse());
+    const stands = columns.find(({ key }) => key === 'signal')!;
+    expect(stands.text(weeks[15]!)).toBe('below limits');
+    expect(stands.text(weeks[0]!)).toBe('inside limits');
+  });
+});
