@@ -12,6 +12,13 @@ export interface Actor {
   address: string;
 }
 
+/** Something done in set-up: by whom, when, and the path that was called. */
+export interface Deed {
+  actor: Actor;
+  at: string;
+  subject: string;
+}
+
 export interface AuditEntry {
   at: string;
   actor: Actor;

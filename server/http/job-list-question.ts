@@ -1,7 +1,7 @@
 import type { ListFilters } from '#db/queries/job-list';
 import type { Scope } from '#db/scope';
 import type { FieldProblem } from '#shared/contracts/fields';
-import type { jobsQuery } from '#shared/contracts/jobs';
+import type { jobsQuery } from '#shared/contracts/job-list';
 import { localDate } from '#shared/domain/calendar';
 import { breaksOfPeriod } from '#shared/domain/period';
 import { refuseInput } from '#shared/domain/refusal';

@@ -82,10 +82,10 @@ export function mount<
   handler: Handler<P, Q, B, O>,
   rules?: BodyRules,
 ): void {
-  mounting.mounted.push(endpoint as unknown as Endpoint);
+  mounting.mounted.push(endpoint);
   mounting.router[endpoint.method](endpoint.path, async (request: Request, response: Response) => {
     const caller = endpoint.access === 'public' ? undefined : await mounting.authenticate(request);
-    if (caller) checkAccess(endpoint as unknown as Endpoint, caller);
+    if (caller) checkAccess(endpoint, caller);
     const scope = caller ? scopeOf(caller, mounting.branches()) : Scope.nothing;
     const code = request.params['branch'];
     const branch = typeof code === 'string' ? scope.branch(code) : undefined;

@@ -1,6 +1,6 @@
 import { defineEndpoint } from './endpoint';
 import { noParams, READERS, scopeQuery } from './fields';
-import { jobsQuery } from './jobs';
+import { jobsQuery } from './job-list';
 import { overrunQuery } from './overrun';
 
 const csv = {

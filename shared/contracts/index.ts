@@ -3,6 +3,7 @@ import * as auth from './auth';
 import * as bookings from './bookings';
 import * as claims from './claims';
 import * as csvExports from './exports';
+import * as jobList from './job-list';
 import * as jobs from './jobs';
 import * as margin from './margin';
 import * as overrun from './overrun';
@@ -17,6 +18,7 @@ export const endpoints: readonly Endpoint[] = [
   people,
   setUp,
   jobs,
+  jobList,
   claims,
   bookings,
   margin,

@@ -1,21 +1,13 @@
-import { recordAudit, type Actor } from '#db/queries/audit';
+import { recordAudit, type Deed } from '#db/queries/audit';
 import { putCost, type Put } from '#db/queries/set-up';
 import type { Store } from '#db/store';
 import type { CostChange } from '#shared/domain/cost-book';
-
-/** Who changes set-up and when. */
-export interface Changing {
-  actor: Actor;
-  at: string;
-  /** The path that was called, as the trail names it. */
-  subject: string;
-}
 
 /** Changes a dated cost or a norm and restates the jobs it touches; settles after the switch. */
 export async function changeCosts(
   store: Store,
   change: CostChange,
-  { actor, at, subject }: Changing,
+  { actor, at, subject }: Deed,
 ): Promise<{ put: Put; restatedJobs: number }> {
   const { recorded, restatedJobs } = await store.restatement.apply(change, () => {
     const put = putCost(store.unscoped, change);

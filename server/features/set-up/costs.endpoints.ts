@@ -6,7 +6,7 @@ import { notFound, refuseInput } from '#shared/domain/refusal';
 import { mount, type Call, type Mounting } from '../../http/mount';
 import type { Kit } from '../../kit';
 import { changeCosts } from './change-costs';
-import { changing, statusOf } from './changing';
+import { deedOf, statusOf } from '../../http/deed';
 
 /** Dated costs, fees and norms; each change restates the jobs it touches before it is answered. */
 export function mountCosts(mounting: Mounting, kit: Kit): void {
@@ -17,7 +17,7 @@ export function mountCosts(mounting: Mounting, kit: Kit): void {
     change: Exclude<CostChange, { kind: 'norm' }>,
     subject: string,
   ) => {
-    const { put, restatedJobs } = await changeCosts(store, change, changing(call, subject));
+    const { put, restatedJobs } = await changeCosts(store, change, deedOf(call, subject));
     return { status: statusOf(put), body: { from: change.from, restatedJobs } };
   };
 
@@ -63,7 +63,7 @@ export function mountCosts(mounting: Mounting, kit: Kit): void {
     const { put, restatedJobs } = await changeCosts(
       store,
       { kind: 'norm', package: code, bodyType, lines },
-      changing(call, `/packages/${code}/norms/${bodyType}`),
+      deedOf(call, `/packages/${code}/norms/${bodyType}`),
     );
     return {
       status: statusOf(put),

@@ -9,7 +9,7 @@ import type { BodyType } from '#shared/domain/vocabulary';
 import { todayIn } from '../../clock';
 import { mount, type Mounting } from '../../http/mount';
 import type { Kit } from '../../kit';
-import { changing } from './changing';
+import { deedOf } from '../../http/deed';
 
 /** The network's own settings, and the catalogue that everyone signed in reads (rule 79). */
 export function mountNetwork(mounting: Mounting, kit: Kit): void {
@@ -20,7 +20,7 @@ export function mountNetwork(mounting: Mounting, kit: Kit): void {
     const network = { ...named, targetMarginShare, claimLimitCents };
     const wasSet = isNetworkSet(store.unscoped);
     const before = readNetwork(store.unscoped);
-    const { actor, at, subject } = changing(call, '/network');
+    const { actor, at, subject } = deedOf(call, '/network');
     const fee = {
       kind: 'fee',
       from: FROM_THE_START,

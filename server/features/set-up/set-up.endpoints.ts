@@ -5,7 +5,7 @@ import { refuseInput } from '#shared/domain/refusal';
 import { mount, type Mounting } from '../../http/mount';
 import type { Kit } from '../../kit';
 import { changeCatalogue } from './change-catalogue';
-import { changing, statusOf } from './changing';
+import { deedOf, statusOf } from '../../http/deed';
 import { mountCosts } from './costs.endpoints';
 import { mountNetwork } from './network.endpoints';
 
@@ -28,7 +28,7 @@ function mountCatalogue(mounting: Mounting, { store }: Kit): void {
         after: region,
         put: rows.putRegionRow(store.unscoped, region),
       }),
-      changing(call, `/regions/${code}`),
+      deedOf(call, `/regions/${code}`),
     );
     return { status: statusOf(put), body: region };
   });
@@ -48,7 +48,7 @@ function mountCatalogue(mounting: Mounting, { store }: Kit): void {
           put: rows.putBranchRow(store.unscoped, branch),
         };
       },
-      changing(call, `/branches/${code}`),
+      deedOf(call, `/branches/${code}`),
     );
     return { status: statusOf(put), body: branch };
   });
@@ -63,7 +63,7 @@ function mountCatalogue(mounting: Mounting, { store }: Kit): void {
         after: product,
         put: rows.putProductRow(store.unscoped, product),
       }),
-      changing(call, `/products/${product.code}`),
+      deedOf(call, `/products/${product.code}`),
     );
     return { status: statusOf(put), body: product };
   });
@@ -78,7 +78,7 @@ function mountCatalogue(mounting: Mounting, { store }: Kit): void {
         after: entry,
         put: rows.putPackageRow(store.unscoped, entry),
       }),
-      changing(call, `/packages/${entry.code}`),
+      deedOf(call, `/packages/${entry.code}`),
     );
     return { status: statusOf(put), body: entry };
   });

@@ -1,4 +1,4 @@
-import type { JobRow } from '#shared/contracts/jobs';
+import type { JobRow } from '#shared/contracts/job-list';
 import type { Column } from '../../ui/data-table/column';
 import {
   formatAmount,

@@ -1,5 +1,5 @@
 import { AGE_BANDS, type AgeBand } from '#shared/domain/vocabulary';
-import { JOB_SORTS } from '#shared/contracts/jobs';
+import { JOB_SORTS } from '#shared/contracts/job-list';
 
 export type JobSort = (typeof JOB_SORTS)[number];
 

@@ -1,6 +1,6 @@
 import { ChangeDetectionStrategy, Component, inject, input } from '@angular/core';
 import { RouterLink } from '@angular/router';
-import type { JobRow } from '#shared/contracts/jobs';
+import type { JobRow } from '#shared/contracts/job-list';
 import { Catalogue } from '../../core/catalogue/catalogue';
 import { formatAmount, formatShare, formatShortDate, formatSignedMinutes } from '../../ui/format';
 import { billWords, carWords, jobLink } from './job-columns';

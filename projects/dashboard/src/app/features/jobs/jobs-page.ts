@@ -3,7 +3,7 @@ import { MatButton } from '@angular/material/button';
 import { MatMenuModule } from '@angular/material/menu';
 import { Router, RouterLink } from '@angular/router';
 import { exportJobs } from '#shared/contracts/exports';
-import { listJobs } from '#shared/contracts/jobs';
+import { listJobs } from '#shared/contracts/job-list';
 import { Api } from '../../core/api/api';
 import { CsvLink } from '../../core/api/csv-link';
 import { Catalogue } from '../../core/catalogue/catalogue';
