@@ -1,0 +1,34 @@
+import { BranchWriter } from '#db/branch-writer';
+import { Store } from '#db/store';
+import { acceptJob } from '#server/features/jobs/accept-job';
+import { setUpBench } from './bench-network';
+import { jobMaker } from './synthetic-jobs';
+
+const BRANCHES = 120;
+const COMMIT = 2_000;
+
+/** Fills a data folder with so many jobs over two years and 120 branches, by the same acceptance as a pushed job. */
+export async function fill(folder: string, jobs: number, today: string): Promise<void> {
+  const store = await Store.open(folder);
+  await setUpBench(store, BRANCHES);
+  const make = jobMaker(5, today, 728);
+  const writers = store.state.branches.map((branch) => new BranchWriter(store, branch));
+  for (let start = 0; start < jobs; start += COMMIT) {
+    await store.queue.write(() => {
+      for (let index = start; index < Math.min(jobs, start + COMMIT); index += 1) {
+        const writer = writers[index % BRANCHES];
+        const { jobRef, content } = make(index);
+        if (writer) acceptJob(writer, jobRef, content, SENDING);
+      }
+    });
+  }
+  store.close();
+}
+
+const SENDING = {
+  actor: { label: 'bench', personId: null, pushKeyId: null, address: 'local' },
+  source: 'key',
+  receivedAt: '2026-01-01T00:00:00.000Z',
+  money: 'seen',
+  preconditions: { ifMatch: undefined, ifNoneMatch: undefined, lastChange: () => '' },
+} as const;

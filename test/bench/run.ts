@@ -1,0 +1,41 @@
+import { mkdtempSync, rmSync } from 'node:fs';
+import { tmpdir } from 'node:os';
+import { join } from 'node:path';
+import { benchIngest } from './ingest';
+import { benchPage } from './page';
+import { benchReads } from './reads';
+import { print, type Line } from './report';
+
+/** `npm run bench [ingest] [reads] [page]`: compares ours with a yardstick in one run; without names, everything. */
+async function main(): Promise<void> {
+  const { findChromium } = (await import('../support/find-chromium.mjs')) as {
+    findChromium: () => string | undefined;
+  };
+  const asked = process.argv.slice(2);
+  const jobs = Number(process.env['BENCH_JOBS'] ?? 100_000);
+  const today = '2026-02-02';
+  const folder = mkdtempSync(join(tmpdir(), 'underseam-bench-'));
+  const benches: Record<string, () => Promise<Line[]>> = {
+    ingest: () => benchIngest(folder, 10_000, today),
+    reads: () => benchReads(folder, jobs, today),
+    page: async () => {
+      const browser = findChromium();
+      if (browser === undefined) throw new Error('the page bench needs Chromium; set CHROME');
+      return benchPage(folder, browser);
+    },
+  };
+  try {
+    for (const [name, bench] of Object.entries(benches)) {
+      if (asked.length === 0 || asked.includes(name)) print(await bench());
+    }
+  } finally {
+    rmSync(folder, { recursive: true, force: true });
+  }
+}
+
+main().catch((error: unknown) => {
+  process.stderr.write(
+    `${error instanceof Error ? (error.stack ?? error.message) : String(error)}\n`,
+  );
+  process.exit(1);
+});
