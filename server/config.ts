@@ -77,5 +77,12 @@ export function readConfig(environment: NodeJS.ProcessEnv): Config {
 }
 
 function isSmtpUrl(text: string): boolean {
-  return /^smtps?:\/\/[^\s/]+/.test(text);
+  if (!/^smtps?:\/\/[^\s/]+/.test(text) || !URL.canParse(text)) return false;
+  try {
+    decodeURIComponent(new URL(text).username);
+    return true;
+  } catch {
+    // A lone % in the user's name.
+    return false;
+  }
 }
