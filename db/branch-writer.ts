@@ -121,11 +121,14 @@ export class BranchWriter {
     this.audit('job.void', jobRef, receipt, { revision: stored.revision, before: stored.content });
   }
 
-  /** The earliest day on which a claim was made on a job, or `undefined`. */
-  firstClaimOn(jobId: number): string | undefined {
+  /** The earliest day on which a claim was made on the job of a reference, or `undefined`. */
+  firstClaimOn(jobRef: string): string | undefined {
     const row = this.connection
-      .prepare('select min(made_on) as made_on from claims where job_id = ?')
-      .get(jobId) as { made_on: string | null };
+      .prepare(
+        `select min(made_on) as made_on from claims where job_id =
+          (select id from jobs where branch_id = ? and job_ref = ?)`,
+      )
+      .get(this.branch.id, jobRef) as { made_on: string | null };
     return row.made_on ?? undefined;
   }
 

@@ -52,11 +52,18 @@ export type Handler<
   call: Call<z.output<P>, z.output<Q>, Parsed<B>>,
 ) => Promise<Reply<Answer<O>>> | Reply<Answer<O>>;
 
-/** Rules over the raw body that are told together with the problems of shape (rule 57). */
-export type BodyRules = (
-  raw: unknown,
-  call: Pick<Call, 'caller' | 'scope' | 'branch'>,
-) => readonly FieldProblem[];
+/** What is known of a call before its body is read; `params` only where they have the right shape. */
+type Named<P extends z.ZodObject> = Pick<Call, 'caller' | 'scope' | 'branch'> & {
+  params: z.output<P> | undefined;
+};
+
+/** What of a call is judged beyond its shape. */
+export interface Judging<P extends z.ZodObject> {
+  /** Whether what the path names is there; judged before the body is read (rule 82). Not asked of a path of the wrong shape. */
+  exists?: (call: Named<P> & { params: z.output<P> }) => boolean;
+  /** Rules over the raw body that are told together with the problems of shape (rule 57). */
+  rules?: (raw: unknown, call: Named<P>) => readonly FieldProblem[];
+}
 
 export interface Mounting {
   router: Router;
@@ -80,7 +87,7 @@ export function mount<
   mounting: Mounting,
   endpoint: Endpoint<P, Q, B, O>,
   handler: Handler<P, Q, B, O>,
-  rules?: BodyRules,
+  { exists, rules }: Judging<P> = {},
 ): void {
   mounting.mounted.push(endpoint);
   mounting.router[endpoint.method](endpoint.path, async (request: Request, response: Response) => {
@@ -90,14 +97,18 @@ export function mount<
     const code = request.params['branch'];
     const branch = typeof code === 'string' ? scope.branch(code) : undefined;
     if (code !== undefined && !branch) throw notFound();
+    const params = endpoint.params.safeParse(request.params);
+    const named = { caller, scope, branch, params: params.data };
+    if (exists && params.success && !exists({ ...named, params: params.data })) throw notFound();
     const raw = endpoint.body
       ? await readBody(request, response, endpoint.path.endsWith('/batch') ? 'batch' : 'single')
       : undefined;
-    const context = { caller, scope, branch };
-    const input = parseInput(endpoint, request, raw, rules?.(raw, context) ?? []);
+    const input = parseInput(endpoint, params, request, raw, rules?.(raw, named) ?? []);
     const reply = await handler({
       ...input,
-      ...context,
+      caller,
+      scope,
+      branch,
       raw,
       ifMatch: header(request, 'if-match'),
       ifNoneMatch: header(request, 'if-none-match'),
@@ -136,12 +147,12 @@ function scopeOf(caller: Caller, branches: readonly ScopedBranch[]): Scope {
 }
 
 function parseInput<P extends z.ZodObject, Q extends z.ZodObject, B extends z.ZodType | null>(
-  endpoint: { params: P; query: Q; body: B },
+  endpoint: { query: Q; body: B },
+  params: z.ZodSafeParseResult<z.output<P>>,
   request: Request,
   raw: unknown,
   broken: readonly FieldProblem[],
 ): { params: z.output<P>; query: z.output<Q>; body: Parsed<B> } {
-  const params = endpoint.params.safeParse(request.params);
   const query = endpoint.query.safeParse(request.query);
   const body = endpoint.body?.safeParse(raw);
   const problems = joined(

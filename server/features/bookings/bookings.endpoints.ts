@@ -5,7 +5,7 @@ import {
   putBooking,
 } from '#shared/contracts/bookings';
 import { localDate } from '#shared/domain/calendar';
-import { notFound, refuseInput } from '#shared/domain/refusal';
+import { notFound } from '#shared/domain/refusal';
 import { mount, namedBranch, type Mounting } from '../../http/mount';
 import type { Kit } from '../../kit';
 
@@ -13,22 +13,32 @@ import type { Kit } from '../../kit';
 export function mountBookings(mounting: Mounting, kit: Kit): void {
   const { store } = kit;
 
-  mount(mounting, putBooking, async (call) => {
-    const branch = namedBranch(call);
-    const { ref } = call.params;
-    const entry = store.state.package(call.body.package);
-    if (!entry) {
-      throw refuseInput([{ path: '/package', message: 'no package has this code' }]);
-    }
-    const { expectedOn, bodyType } = call.body;
-    const put = await store.queue.write(() =>
-      putBookingRow(store.unscoped, branch, { ref, expectedOn, packageId: entry.id, bodyType }),
-    );
-    return {
-      status: put === 'created' ? 201 : 200,
-      body: { branch: branch.code, ref, ...call.body },
-    };
-  });
+  mount(
+    mounting,
+    putBooking,
+    async (call) => {
+      const branch = namedBranch(call);
+      const { ref } = call.params;
+      const { expectedOn, bodyType, package: code } = call.body;
+      const packageId = store.state.package(code)?.id;
+      if (packageId === undefined) throw new Error('a package that the rules have found is gone');
+      const put = await store.queue.write(() =>
+        putBookingRow(store.unscoped, branch, { ref, expectedOn, packageId, bodyType }),
+      );
+      return {
+        status: put === 'created' ? 201 : 200,
+        body: { branch: branch.code, ref, ...call.body },
+      };
+    },
+    {
+      rules: (raw) => {
+        const code = typeof raw === 'object' && raw !== null && 'package' in raw && raw.package;
+        return typeof code === 'string' && !store.state.package(code)
+          ? [{ path: '/package', message: 'no package has this code' }]
+          : [];
+      },
+    },
+  );
 
   mount(mounting, deleteBooking, async (call) => {
     const branch = namedBranch(call);

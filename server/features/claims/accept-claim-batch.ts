@@ -8,6 +8,7 @@ import { joined, problemsOf } from '#shared/contracts/read-problems';
 import { breaksOfClaim } from '#shared/domain/claim-rules';
 import { Refusal } from '#shared/domain/refusal';
 import { acceptClaim, type ClaimSending } from './accept-claim';
+import { breaksAgainstJob } from './breaks-against-job';
 
 type BatchAnswer = z.input<typeof putClaimBatch.out>;
 type Result = BatchAnswer['results'][number];
@@ -32,11 +33,11 @@ export async function acceptClaimBatch(
 
 type ReadItem =
   | { claimRef: string; content: ClaimContent }
-  | { claimRef: string | null; problems: readonly FieldProblem[] };
+  | { claimRef: string | null; problems: readonly FieldProblem[]; raw: unknown };
 
 function readItem(item: unknown, today: string): ReadItem {
   if (typeof item !== 'object' || item === null || Array.isArray(item)) {
-    return { claimRef: null, problems: [{ path: '', message: 'must be an object' }] };
+    return { claimRef: null, problems: [{ path: '', message: 'must be an object' }], raw: item };
   }
   const { claimRef, ...content } = item as Record<string, unknown>;
   const ref = reference.safeParse(claimRef);
@@ -46,7 +47,8 @@ function readItem(item: unknown, today: string): ReadItem {
     return { claimRef: ref.data, content: parsed.data };
   }
   return {
-    claimRef: typeof claimRef === 'string' ? claimRef : null,
+    claimRef: ref.data ?? (typeof claimRef === 'string' ? claimRef : null),
+    raw: content,
     problems: joined(
       ref.success ? [] : problemsOf(ref.error, '/claimRef'),
       parsed.success ? [] : problemsOf(parsed.error),
@@ -56,7 +58,9 @@ function readItem(item: unknown, today: string): ReadItem {
 }
 
 function acceptItem(writer: ClaimWriter, item: ReadItem, sending: ClaimSending): Result {
-  if ('problems' in item) return rejected(item.claimRef, item.problems);
+  if ('problems' in item) {
+    return rejected(item.claimRef, joined(item.problems, breaksAgainstJob(writer, item.raw)));
+  }
   try {
     return acceptClaim(writer, item.claimRef, item.content, sending);
   } catch (error) {

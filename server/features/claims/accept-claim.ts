@@ -3,7 +3,7 @@ import type { ClaimWriter, DecidedClaim, RecordedClaim, StoredClaim } from '#db/
 import type { ClaimContent } from '#shared/contracts/claims';
 import { Refusal, refuseInput } from '#shared/domain/refusal';
 import type { ClaimDecision, Role } from '#shared/domain/vocabulary';
-import type { RuleBreak } from '#shared/domain/job-rules';
+import { breaksAgainstJob } from './breaks-against-job';
 
 /** Who sends a claim and what they may decide (rule 77). */
 export interface ClaimSending extends Receipt {
@@ -33,7 +33,7 @@ export function acceptClaim(
   const stored = writer.findClaim(claimRef);
   sending.precondition?.(stored);
   const job = writer.findJob(sent.jobRef);
-  const problems = breaksAgainstJob(sent, job);
+  const problems = breaksAgainstJob(writer, sent);
   if (!job || problems.length > 0) throw refuseInput(problems);
   const content = normaliseClaim(sent, stored?.content, sending.role);
   const claim = decided(content, stored, sending);
@@ -46,19 +46,6 @@ export function acceptClaim(
   }
   const revision = writer.keepClaim(claimRef, job.id, stored, claim, sending);
   return told(claimRef, revision, stored ? 'replaced' : 'created', claim);
-}
-
-function breaksAgainstJob(
-  sent: ClaimContent,
-  job: { completedOn: string } | undefined,
-): RuleBreak[] {
-  if (!job) {
-    return [{ path: '/jobRef', message: 'no job of this branch has this reference' }];
-  }
-  if (sent.madeOn < job.completedOn) {
-    return [{ path: '/madeOn', message: `is before the job was completed (${job.completedOn})` }];
-  }
-  return [];
 }
 
 function normaliseClaim(

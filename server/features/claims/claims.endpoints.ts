@@ -12,6 +12,7 @@ import { mount, namedBranch, type Call, type Mounting } from '../../http/mount';
 import { checkPreconditions, tagOf } from '#shared/domain/preconditions';
 import type { Kit } from '../../kit';
 import { acceptClaim, type ClaimSending } from './accept-claim';
+import { breaksAgainstJob } from './breaks-against-job';
 import { acceptClaimBatch } from './accept-claim-batch';
 
 /** Claims under warranty: sent, corrected, read. */
@@ -44,7 +45,15 @@ export function mountClaims(mounting: Mounting, kit: Kit): void {
         headers: { ETag: tagOf(accepted.revision) },
       };
     },
-    (raw, { branch }) => (branch ? breaksOfClaim(raw, today(branch)) : []),
+    {
+      rules: (raw, { branch }) =>
+        branch
+          ? [
+              ...breaksOfClaim(raw, today(branch)),
+              ...breaksAgainstJob(new ClaimWriter(store, branch), raw),
+            ]
+          : [],
+    },
   );
 
   mount(mounting, putClaimBatch, async (call) => {

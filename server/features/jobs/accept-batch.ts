@@ -8,6 +8,7 @@ import { joined, problemsOf } from '#shared/contracts/read-problems';
 import type { JobWorld } from '#shared/domain/job-rules';
 import { Refusal } from '#shared/domain/refusal';
 import { acceptJob, type Sending } from './accept-job';
+import { breaksOfClaims } from './breaks-of-claims';
 import { readJob } from './check-job';
 
 type BatchAnswer = z.input<typeof putJobBatch.out>;
@@ -42,18 +43,19 @@ export async function acceptBatch(
 
 type ReadItem =
   | { jobRef: string; content: JobContent }
-  | { jobRef: string | null; problems: readonly FieldProblem[] };
+  | { jobRef: string | null; problems: readonly FieldProblem[]; raw: unknown };
 
 function readItem(item: unknown, world: JobWorld): ReadItem {
   if (typeof item !== 'object' || item === null || Array.isArray(item)) {
-    return { jobRef: null, problems: [{ path: '', message: 'must be an object' }] };
+    return { jobRef: null, problems: [{ path: '', message: 'must be an object' }], raw: item };
   }
   const { jobRef, ...content } = item as Record<string, unknown>;
   const ref = reference.safeParse(jobRef);
   const job = readJob(content, world);
   if (ref.success && 'content' in job) return { jobRef: ref.data, content: job.content };
   return {
-    jobRef: typeof jobRef === 'string' ? jobRef : null,
+    jobRef: ref.data ?? (typeof jobRef === 'string' ? jobRef : null),
+    raw: content,
     problems: joined(
       ref.success ? [] : problemsOf(ref.error, '/jobRef'),
       'problems' in job ? job.problems : [],
@@ -62,7 +64,11 @@ function readItem(item: unknown, world: JobWorld): ReadItem {
 }
 
 function acceptItem(writer: BranchWriter, item: ReadItem, sending: Sending): Result {
-  if ('problems' in item) return rejected(item.jobRef, item.problems);
+  if ('problems' in item) {
+    const { jobRef, problems, raw } = item;
+    const late = jobRef === null ? [] : breaksOfClaims(writer, jobRef, raw);
+    return rejected(jobRef, joined(problems, late));
+  }
   try {
     return acceptJob(writer, item.jobRef, item.content, sending);
   } catch (error) {

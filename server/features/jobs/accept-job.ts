@@ -4,6 +4,7 @@ import { normaliseJob, referenced, type SentJob } from '#shared/domain/normalise
 import type { RecordedJob } from '#shared/domain/recorded-job';
 import { refuseInput } from '#shared/domain/refusal';
 import { checkPreconditions, type Preconditions } from '#shared/domain/preconditions';
+import { breaksOfClaims } from './breaks-of-claims';
 import { keepStoredMoney } from './keep-stored-money';
 
 /** How a job is sent: by whom, and whether what they leave out of its money is kept. */
@@ -46,7 +47,8 @@ export function acceptJob(
       ...(stored.voided && { voided: true }),
     };
   }
-  checkClaims(writer, stored.id, job);
+  const late = breaksOfClaims(writer, jobRef, job);
+  if (late.length > 0) throw refuseInput(late);
   const revision = writer.replaceJob(jobRef, stored, job, text, sending);
   return { jobRef, revision, status: 'replaced' };
 }
@@ -67,17 +69,4 @@ function merged(
     ...whole,
     invoice: invoice as RecordedJob['invoice'],
   });
-}
-
-/** A correction may not move completion past a claim already made on the job (rule 59). */
-function checkClaims(writer: BranchWriter, jobId: number, job: RecordedJob): void {
-  const claimed = writer.firstClaimOn(jobId);
-  if (claimed !== undefined && job.completedOn > claimed) {
-    throw refuseInput([
-      {
-        path: '/completedOn',
-        message: `a claim was made on this job on ${claimed}; completion cannot be later`,
-      },
-    ]);
-  }
 }

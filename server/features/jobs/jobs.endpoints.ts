@@ -10,7 +10,8 @@ import { mount, namedBranch, type Call, type Mounting } from '../../http/mount';
 import type { Kit } from '../../kit';
 import { acceptBatch } from './accept-batch';
 import { acceptJob, type Sending } from './accept-job';
-import { writeBill } from './bill-job';
+import { breaksOfBill, writeBill } from './bill-job';
+import { breaksOfClaims } from './breaks-of-claims';
 import { worldOf } from './check-job';
 import { checkPreconditions, tagOf } from '#shared/domain/preconditions';
 import { lastChange, readJobSheet } from './read-job-sheet';
@@ -40,7 +41,17 @@ export function mountJobs(mounting: Mounting, kit: Kit): void {
         headers: { ETag: tagOf(accepted.revision) },
       };
     },
-    (raw, { branch, caller }) => (branch ? breaksOfJob(raw, world(branch, caller)) : []),
+    {
+      rules: (raw, { branch, caller, params }) =>
+        branch
+          ? [
+              ...breaksOfJob(raw, world(branch, caller)),
+              ...(params
+                ? breaksOfClaims(new BranchWriter(store, branch), params.jobRef, raw)
+                : []),
+            ]
+          : [],
+    },
   );
 
   mount(mounting, putJobBatch, async (call) => {
@@ -74,20 +85,32 @@ export function mountJobs(mounting: Mounting, kit: Kit): void {
     return {};
   });
 
-  mount(mounting, billJob, async (call) => {
-    const branch = namedBranch(call);
-    const today = localDate(kit.clock.now(), branch.timeZone);
-    const accepted = await store.queue.write(() =>
-      writeBill(
-        new BranchWriter(store, branch),
-        call.params.jobRef,
-        call.body,
-        today,
-        sendingOf(kit, call, call.params.jobRef),
-      ),
-    );
-    return { body: accepted, headers: { ETag: tagOf(accepted.revision) } };
-  });
+  mount(
+    mounting,
+    billJob,
+    async (call) => {
+      const branch = namedBranch(call);
+      const accepted = await store.queue.write(() =>
+        writeBill(
+          new BranchWriter(store, branch),
+          call.params.jobRef,
+          call.body,
+          sendingOf(kit, call, call.params.jobRef),
+        ),
+      );
+      return { body: accepted, headers: { ETag: tagOf(accepted.revision) } };
+    },
+    {
+      exists: ({ branch, params }) => {
+        const stored = branch && new BranchWriter(store, branch).findJob(params.jobRef);
+        return stored !== undefined && !stored.voided;
+      },
+      rules: (raw, { branch, params }) => {
+        const stored = branch && params && new BranchWriter(store, branch).findJob(params.jobRef);
+        return stored ? breaksOfBill(raw, stored.content, world(branch, undefined)) : [];
+      },
+    },
+  );
 }
 
 const NONE: Sending['preconditions'] = {

@@ -3,7 +3,7 @@ import { randomSecret } from '#server/auth/random-secret';
 import { realClock, type Clock } from '#server/clock';
 import { mount, type Mounting } from '#server/http/mount';
 import type { Kit } from '#server/kit';
-import { knownPlaces, listPeople } from '#db/queries/people';
+import { findPerson, knownPlaces, listPeople } from '#db/queries/people';
 import * as contracts from '#shared/contracts/people';
 import { addPerson, type PeopleTools } from './add-person';
 import { changePerson } from './change-person';
@@ -21,7 +21,7 @@ export function mountPeople(mounting: Mounting, kit: Kit, clock: Clock = realClo
     async ({ body, caller, address }) => ({
       body: await addPerson(tools, body, { actor: actorOf(caller, address), now: clock.now() }),
     }),
-    placing,
+    { rules: placing },
   );
   mount(mounting, contracts.listPeople, () => ({ body: { items: listPeople(store.unscoped) } }));
   mount(
@@ -33,6 +33,9 @@ export function mountPeople(mounting: Mounting, kit: Kit, clock: Clock = realClo
       const deed = { actor: actorOf(caller, address), now: clock.now() };
       return { body: await changePerson(tools, params.id, details, deed) };
     },
-    placing,
+    {
+      exists: ({ params }) => findPerson(store.unscoped, params.id) !== undefined,
+      rules: placing,
+    },
   );
 }

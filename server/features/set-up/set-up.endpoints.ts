@@ -1,11 +1,11 @@
 import * as catalogue from '#db/queries/catalogue';
 import * as rows from '#db/queries/set-up';
 import * as contract from '#shared/contracts/set-up';
-import { refuseInput } from '#shared/domain/refusal';
 import { mount, type Mounting } from '../../http/mount';
 import type { Kit } from '../../kit';
 import { changeCatalogue } from './change-catalogue';
 import { deedOf, statusOf } from '../../http/deed';
+import { breaksOfBranch } from './check-set-up';
 import { mountCosts } from './costs.endpoints';
 import { mountNetwork } from './network.endpoints';
 
@@ -17,6 +17,9 @@ export function mountSetUp(mounting: Mounting, kit: Kit): void {
 }
 
 function mountCatalogue(mounting: Mounting, { store }: Kit): void {
+  const isRegion = (code: string): boolean =>
+    catalogue.findRegion(store.unscoped, code) !== undefined;
+
   mount(mounting, contract.putRegion, async (call) => {
     const { code } = call.params;
     const region = { code, name: call.body.name, climate: call.body.climate ?? null };
@@ -33,25 +36,27 @@ function mountCatalogue(mounting: Mounting, { store }: Kit): void {
     return { status: statusOf(put), body: region };
   });
 
-  mount(mounting, contract.putBranch, async (call) => {
-    const { code } = call.params;
-    const { closedOn = null, targetMarginShare = null, ...given } = call.body;
-    const branch = { code, ...given, closedOn, targetMarginShare };
-    const put = await changeCatalogue(
-      store,
-      'branch.set',
-      () => {
-        checkBranch(catalogue.findRegion(store.unscoped, given.region) !== undefined, branch);
-        return {
+  mount(
+    mounting,
+    contract.putBranch,
+    async (call) => {
+      const { code } = call.params;
+      const { closedOn = null, targetMarginShare = null, ...given } = call.body;
+      const branch = { code, ...given, closedOn, targetMarginShare };
+      const put = await changeCatalogue(
+        store,
+        'branch.set',
+        () => ({
           before: catalogue.findBranch(store.unscoped, code) ?? null,
           after: branch,
           put: rows.putBranchRow(store.unscoped, branch),
-        };
-      },
-      deedOf(call, `/branches/${code}`),
-    );
-    return { status: statusOf(put), body: branch };
-  });
+        }),
+        deedOf(call, `/branches/${code}`),
+      );
+      return { status: statusOf(put), body: branch };
+    },
+    { rules: (raw) => breaksOfBranch(raw, isRegion) },
+  );
 
   mount(mounting, contract.putProduct, async (call) => {
     const product = { code: call.params.code, ...call.body };
@@ -82,20 +87,6 @@ function mountCatalogue(mounting: Mounting, { store }: Kit): void {
     );
     return { status: statusOf(put), body: entry };
   });
-}
-
-function checkBranch(
-  regionExists: boolean,
-  branch: { region: string; openedOn: string; closedOn: string | null },
-): void {
-  const problems = [];
-  if (!regionExists) {
-    problems.push({ path: '/region', message: 'no region has this code; create it first' });
-  }
-  if (branch.closedOn !== null && branch.closedOn < branch.openedOn) {
-    problems.push({ path: '/closedOn', message: `is before openedOn (${branch.openedOn})` });
-  }
-  if (problems.length > 0) throw refuseInput(problems);
 }
 
 function sameCode(code: string): (row: { code: string }) => boolean {
