@@ -21,7 +21,7 @@ export interface ListFilters extends JobFilters {
 
 /** Where a page of the list ended: the values its last row was sorted by. */
 export interface ListPlace {
-  key: number | string;
+  key: number;
   completedOn: string;
   branch: string;
   jobRef: string;
@@ -29,7 +29,7 @@ export interface ListPlace {
 
 /** A row as stored, before it is told. */
 export interface ListedJob {
-  sortKey: number | string;
+  sortKey: number;
   branch: string;
   job_ref: string;
   revision: number;
@@ -78,7 +78,7 @@ const SORT_KEYS: Record<JobSort, string> = {
   margin: `case when billed = 1 and costed = 1 then ${MARGIN} else ${LAST} end`,
   difference: `case when billed = 1 and costed = 1 and expected = 1 then (${MARGIN}) - (${EXPECTED}) else ${LAST} end`,
   overrun: `case when has_estimate = 1 then est_minutes - act_minutes else ${LAST} end`,
-  waiting: `case when billed = 0 then completed_on else '9999-12-31' end`,
+  waiting: `case when billed = 0 then cast(replace(completed_on, '-', '') as integer) else ${LAST} end`,
 };
 
 const COLUMNS = [
@@ -118,24 +118,27 @@ export function iterateJobRows(
   return db.iterate<ListedJob>(sortedJobs(db, filters, sort));
 }
 
-function sortedJobs(db: ScopedDb, filters: ListFilters, sort: JobSort): Knex.QueryBuilder {
-  return whereListed(db.table('job_facts'), filters)
-    .join('branches', 'branches.id', 'job_facts.branch_id')
-    .join('packages', 'packages.id', 'job_facts.package_id')
-    .orderByRaw('"sortKey", completed_on desc, branches.code, job_ref')
-    .select(
-      ...COLUMNS.map((column) => `job_facts.${column}`),
-      { branch: 'branches.code', package: 'packages.code' },
-      sql.raw(`${SORT_KEYS[sort]} as "sortKey"`),
-    );
-}
-
 /** How many jobs match. */
 export function countJobs(db: ScopedDb, filters: ListFilters): number {
   const row = db.first<{ jobs: number }>(
     whereListed(db.table('job_facts'), filters).count({ jobs: '*' }),
   );
   return row?.jobs ?? 0;
+}
+
+function sortedJobs(db: ScopedDb, filters: ListFilters, sort: JobSort): Knex.QueryBuilder {
+  return (
+    whereListed(db.table('job_facts'), filters)
+      .join('branches', 'branches.id', 'job_facts.branch_id')
+      .join('packages', 'packages.id', 'job_facts.package_id')
+      // By its alias: a constant key written out would be read as the number of a column.
+      .orderByRaw('"sortKey", completed_on desc, branches.code, job_ref')
+      .select(
+        ...COLUMNS.map((column) => `job_facts.${column}`),
+        { branch: 'branches.code', package: 'packages.code' },
+        sql.raw(`${SORT_KEYS[sort]} as "sortKey"`),
+      )
+  );
 }
 
 function whereListed(query: Knex.QueryBuilder, filters: ListFilters): Knex.QueryBuilder {

@@ -60,14 +60,13 @@ export function sumSpans(
   const days = JSON.stringify(spans.map(({ from, to }) => [from, to]));
   return db.all<SpanSums>(
     whereJobs(
-      sql
-        .from(sql.raw('json_each(?) as spans', [days]))
-        .joinRaw(
-          sql.raw(
-            'cross join ? on job_facts.completed_on between spans.value ->> 0 and spans.value ->> 1',
-            [db.derived('job_facts')],
-          ),
+      sql.from(
+        sql.raw(
+          `json_each(?) as spans cross join ?
+          on job_facts.completed_on between spans.value ->> 0 and spans.value ->> 1`,
+          [days, db.derived('job_facts')],
         ),
+      ),
       filters,
     )
       .groupByRaw('spans.key, billed, costed, expected')

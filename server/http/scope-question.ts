@@ -1,7 +1,7 @@
 import type { JobFilters } from '#db/queries/job-filters';
 import type { Scope } from '#db/scope';
 import type { FieldProblem, ScopeQuery } from '#shared/contracts/fields';
-import { breaksOfPeriod, periodOf, type Period } from '#shared/domain/period';
+import { breaksOfWeeks, periodOf, type Period } from '#shared/domain/period';
 import { refuseInput } from '#shared/domain/refusal';
 import { todayIn } from '../clock';
 import type { Kit } from '../kit';
@@ -19,7 +19,7 @@ export function scopeQuestion(kit: Kit, allowed: Scope, query: ScopeQuery): Scop
   const scope = allowed.narrow(query);
   const today = todayIn(scope, kit.clock);
   const period = periodOf(query, today);
-  const problems: FieldProblem[] = breaksOfPeriod(period);
+  const problems: FieldProblem[] = breaksOfWeeks(period);
   const packageIds = findPackages(kit, query.package, problems);
   if (problems.length > 0) throw refuseInput(problems);
   return { scope, period, filters: { packageIds, bodyTypes: query.bodyType }, today };

@@ -1,12 +1,18 @@
-import { once } from 'node:events';
 import { extname, join } from 'node:path';
-import { MessageChannel, type MessagePort } from 'node:worker_threads';
-import type { Response } from 'express';
+import { MessageChannel } from 'node:worker_threads';
 import { Piscina } from 'piscina';
 import type { Scope } from '#db/scope';
-import type { ExportName, ExportTasks, ReadName, ReadTasks } from './read-tasks';
+import { ExportStream } from './export-stream';
+import type {
+  ExportName,
+  ExportTasks,
+  PackedExport,
+  PackedRead,
+  ReadName,
+  ReadTasks,
+} from './read-tasks';
 
-/** Workers for answers, and others for exports, so that a slow download never holds up a page. */
+/** Threads for answers, and others for exports, so that a slow download never holds up a page. */
 const ANSWER_THREADS = 2;
 const EXPORT_THREADS = 2;
 
@@ -17,47 +23,30 @@ export class ReadPool {
 
   constructor(private readonly file: string) {}
 
-  /** Answers a question within a scope. */
+  /** Answers a question within a scope, from one state of the database. */
   async answer<Name extends ReadName>(
     name: Name,
     scope: Scope,
     input: ReadTasks[Name]['input'],
   ): Promise<ReadTasks[Name]['output']> {
     this.answers ??= startThreads(this.file, ANSWER_THREADS);
-    return (await this.answers.run({
-      kind: 'answer',
-      name,
-      scope: scope.pack(),
-      input,
-    })) as ReadTasks[Name]['output'];
+    const task: PackedRead = { kind: 'answer', name, scope: scope.pack(), input };
+    return (await this.answers.run(task)) as ReadTasks[Name]['output'];
   }
 
-  /**
-   * Streams an export into a response at the pace at which it is taken. A failure half-way breaks the connection, so that a
-   * cut file never looks whole; a reader who leaves ends the work.
-   */
-  async stream<Name extends ExportName>(
+  /** Begins an export within a scope, the whole of it from one state of the database. */
+  stream<Name extends ExportName>(
     name: Name,
     scope: Scope,
     input: ExportTasks[Name],
-    response: Response,
-  ): Promise<void> {
+  ): ExportStream {
     this.exports ??= startThreads(this.file, EXPORT_THREADS);
     const { port1, port2 } = new MessageChannel();
-    const work = this.exports.run(
-      { kind: 'export', name, scope: scope.pack(), input, port: port2 },
-      { transferList: [port2] },
-    );
-    port1.on('message', (chunk: string) => void take(chunk, response, port1));
-    response.once('close', () => port1.close());
-    try {
-      await work;
-      response.end();
-    } finally {
-      port1.close();
-    }
+    const task: PackedExport = { kind: 'export', name, scope: scope.pack(), input, port: port2 };
+    return new ExportStream(port1, this.exports.run(task, { transferList: [port2] }));
   }
 
+  /** Ends the threads; what they still work on fails. */
   async close(): Promise<void> {
     await Promise.all([this.answers?.destroy(), this.exports?.destroy()]);
     this.answers = undefined;
@@ -65,17 +54,9 @@ export class ReadPool {
   }
 }
 
-/** Hands one chunk on and asks for the next when the reader has room. */
-async function take(chunk: string, response: Response, port: MessagePort): Promise<void> {
-  if (response.destroyed) return;
-  if (!response.write(chunk))
-    await Promise.race([once(response, 'drain'), once(response, 'close')]);
-  port.postMessage('more');
-}
-
 function startThreads(file: string, threads: number): Piscina {
   const fromSource = __filename.endsWith('.ts');
-  return new Piscina({
+  const pool = new Piscina({
     filename: join(__dirname, `read-worker${extname(__filename)}`),
     workerData: { file },
     minThreads: 1,
@@ -84,4 +65,6 @@ function startThreads(file: string, threads: number): Piscina {
     // From source (tests, development) the thread reads TypeScript itself.
     execArgv: fromSource ? ['--import', 'tsx', '--conditions=underseam-source'] : [],
   });
+  // A thread that dies at work fails its task, and the next task gets a new one; one that dies idle fails nobody.
+  return pool.on('error', () => undefined);
 }

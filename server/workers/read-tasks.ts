@@ -1,35 +1,29 @@
-import type { JobFilters } from '#db/queries/job-filters';
+import type { MessagePort } from 'node:worker_threads';
 import type { PackedScope } from '#db/scope';
-import type { Period } from '#shared/domain/period';
-import type { OverrunGrouping } from '#shared/contracts/overrun';
-import type { OverrunAnswer } from '#shared/contracts/overrun';
 import type { MarginAnswer } from '#shared/contracts/margin';
-import type { JobListQuestion, JobPage } from '../features/job-list/list-jobs';
+import type { OverrunAnswer } from '#shared/contracts/overrun';
+import type { JobListQuestion, JobPage, JobsAsked } from '../features/job-list/list-jobs';
+import type { MarginQuestion } from '../features/margin/answer-margin';
+import type { OverrunQuestion } from '../features/overrun/answer-overrun';
 
 /** What a worker can be asked, and what it answers. The scope goes along packed; everything else is plain data. */
 export interface ReadTasks {
-  margin: {
-    input: MarginQuestion;
-    output: MarginAnswer;
-  };
-  overrun: {
-    input: { period: Period; filters: JobFilters; by: OverrunGrouping };
-    output: OverrunAnswer;
-  };
+  margin: { input: MarginQuestion; output: MarginAnswer };
+  overrun: { input: OverrunQuestion; output: OverrunAnswer };
   jobs: { input: JobListQuestion; output: JobPage };
 }
 
 /** Exports by name, with the question each answers. */
 export interface ExportTasks {
-  margin: ReadTasks['margin']['input'];
-  overrun: ReadTasks['overrun']['input'];
-  jobs: Omit<JobListQuestion, 'after' | 'limit'>;
+  margin: MarginQuestion;
+  overrun: OverrunQuestion;
+  jobs: JobsAsked;
 }
 
 export type ReadName = keyof ReadTasks;
 export type ExportName = keyof ExportTasks;
 
-/** What crosses into the worker. */
+/** A question as it crosses into the worker. */
 export interface PackedRead {
   kind: 'answer';
   name: ReadName;
@@ -37,6 +31,7 @@ export interface PackedRead {
   input: unknown;
 }
 
+/** An export as it crosses; its chunks come back through the port, one for each message sent into it, then null. */
 export interface PackedExport {
   kind: 'export';
   name: ExportName;

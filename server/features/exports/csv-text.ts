@@ -3,6 +3,8 @@ import { stringify } from 'csv-stringify/sync';
 /** RFC 4180 text with CRLF, no BOM, `.` decimals and empty cells for null (rule 62). */
 const FORMAT = {
   record_delimiter: '\r\n',
+  // The library quotes a whole line end only; half of one would break a row as well.
+  quoted_match: /[\r\n]/,
   cast: {
     boolean: (value: boolean) => String(value),
     number: (value: number) => String(value),

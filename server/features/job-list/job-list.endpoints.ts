@@ -1,4 +1,5 @@
-import { listJobs } from '#shared/contracts/jobs';
+import { listJobs } from '#shared/contracts/job-list';
+import { Refusal } from '#shared/domain/refusal';
 import { moneyFor } from '../../auth/caller';
 import { jobListQuestion } from '../../http/job-list-question';
 import { mount, type Mounting } from '../../http/mount';
@@ -9,14 +10,14 @@ import { cursorOf, placeOf } from './place-cursor';
 export function mountJobList(mounting: Mounting, kit: Kit): void {
   mount(mounting, listJobs, async (call) => {
     const { limit, cursor, sort, ...query } = call.query;
+    const money = moneyFor(call.caller);
+    if (money === 'unseen' && (sort === 'margin' || sort === 'difference')) {
+      // The order alone, and the place in it that a cursor names, would tell what a recorder may not see (rule 24).
+      throw new Refusal('forbidden', 'Sorting by money is not for recorders.');
+    }
     const { scope, ...asked } = jobListQuestion(kit, call.scope, query);
-    const page = await kit.reads.answer('jobs', scope, {
-      ...asked,
-      sort,
-      after: placeOf(cursor, sort),
-      limit,
-      money: moneyFor(call.caller),
-    });
+    const after = placeOf(cursor, sort);
+    const page = await kit.reads.answer('jobs', scope, { ...asked, sort, after, limit, money });
     return {
       body: {
         items: page.items,

@@ -5,7 +5,7 @@ import { refuseInput } from '#shared/domain/refusal';
 
 const place = z.strictObject({
   sort: z.string(),
-  key: z.union([z.number(), z.string().max(20)]),
+  key: z.int(),
   completedOn: z.string().refine(isDate),
   branch: z.string().max(12),
   jobRef: z.string().max(200),

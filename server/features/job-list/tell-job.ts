@@ -1,5 +1,5 @@
 import type { ListedJob } from '#db/queries/job-list';
-import type { JobRow } from '#shared/contracts/jobs';
+import type { JobRow } from '#shared/contracts/job-list';
 import { bridgeOf, largestStep } from '#shared/domain/bridge';
 import { daysBetween } from '#shared/domain/calendar';
 import {

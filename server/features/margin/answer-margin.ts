@@ -87,12 +87,7 @@ function baselineOf(
   if (judged.length === 0) return [];
   const within = judged.slice(0, -1).slice(-BASELINE_WEEKS);
   // The week that `from` cuts takes no part, so weeks before the period end before its Monday (rule 7).
-  const before = earlierShares(
-    db,
-    mondayOf(period.from),
-    filters,
-    BASELINE_WEEKS - within.length,
-  );
+  const before = earlierShares(db, mondayOf(period.from), filters, BASELINE_WEEKS - within.length);
   return [...before, ...within.map((week) => week.marginShare)];
 }
 

@@ -101,6 +101,9 @@ const NOTHING_EXPECTED: Readonly<ExpectedMoney> = {
 };
 
 /** Adds every line of `sum` that `more` has too. */
-function add<Line extends string>(sum: Record<Line, number>, more: Record<Line, number>): void {
+function add<Line extends string>(
+  sum: Record<Line, number>,
+  more: NoInfer<Record<Line, number>>,
+): void {
   for (const line of Object.keys(sum) as Line[]) sum[line] += more[line];
 }

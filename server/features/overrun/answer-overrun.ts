@@ -1,10 +1,11 @@
 import type { JobFilters } from '#db/queries/job-filters';
-import { countEstimated, eachRatio, eachStages } from '#db/queries/overrun';
+import { packageCodes, readByKey, readByStage, type MinuteLists } from '#db/queries/overrun';
 import type { ScopedDb } from '#db/scoped-db';
 import type { OverrunAnswer, OverrunGroup, OverrunGrouping } from '#shared/contracts/overrun';
 import type { Period } from '#shared/domain/period';
-import { AGE_BANDS, STAGES } from '#shared/domain/vocabulary';
-import { MinutePairs } from './minute-pairs';
+import { AGE_BANDS } from '#shared/domain/vocabulary';
+import { groupMinutes } from './group-minutes';
+import { overrunFigures } from './overrun-figures';
 
 export interface OverrunQuestion {
   period: Period;
@@ -19,56 +20,68 @@ export function answerOverrun(
 ): OverrunAnswer {
   return db.snapshot(() => {
     const asked = { ...filters, ...period };
-    const counts = countEstimated(db, asked);
-    const { overall, groups } = by === 'stage' ? byStage(db, asked) : byKey(db, asked, by);
+    const { jobs, minutes, groups } = by === 'stage' ? byStage(db, asked) : byKey(db, asked, by);
+    const overall = overrunFigures(minutes);
     return {
       period,
       scope: db.scope.echo(),
-      jobs: counts.jobs,
+      jobs,
       by,
-      overall: overall.figures(),
+      overall,
       groups,
-      withoutEstimate: counts.withoutEstimate,
+      withoutEstimate: jobs - overall.cars,
     };
   });
 }
 
 interface Grouped {
-  overall: MinutePairs;
+  jobs: number;
+  minutes: MinuteLists;
   groups: OverrunGroup[];
 }
 
 /** All seven stages, always, over all estimated cars (rule 28). */
 function byStage(db: ScopedDb, filters: JobFilters): Grouped {
-  const overall = new MinutePairs();
-  const stages = STAGES.map((key) => ({ key, pairs: new MinutePairs() }));
-  eachStages(db, filters, (row) => {
-    overall.add(row[0] ?? 0, row[1] ?? 0);
-    stages.forEach(({ pairs }, index) => {
-      pairs.add(row[2 + 2 * index] ?? 0, row[3 + 2 * index] ?? 0);
-    });
-  });
-  return { overall, groups: stages.map(({ key, pairs }) => ({ key, ...pairs.figures() })) };
+  const { jobs, minutes, stages } = readByStage(db, filters);
+  const groups = stages.map(({ stage, minutes: own }) => ({ key: stage, ...overrunFigures(own) }));
+  return { jobs, minutes, groups };
 }
 
 function byKey(db: ScopedDb, filters: JobFilters, by: Exclude<OverrunGrouping, 'stage'>): Grouped {
-  const overall = new MinutePairs();
-  const pairs = new Map<string | number, MinutePairs>();
-  eachRatio(db, filters, by, ([key, estimated, actual]) => {
-    overall.add(estimated, actual);
-    let group = pairs.get(key);
-    if (!group) pairs.set(key, (group = new MinutePairs()));
-    group.add(estimated, actual);
-  });
-  const groups = [...pairs]
-    .sort(([a], [b]) => (a < b ? -1 : 1))
-    .map(([key, group]) => ({ key: spoken(by, key), ...group.figures() }));
-  // Of two answers the one that was looked for comes first (rule 30).
-  return { overall, groups: by === 'rotFound' ? groups.reverse() : groups };
+  const { jobs, minutes, keys } = readByKey(db, filters, by);
+  const groups = [...groupMinutes(minutes, keys, naming(db, by))]
+    .map(([key, own]) => ({ key, ...overrunFigures(own) }))
+    .sort((a, b) => place(by, a.key) - place(by, b.key) || (a.key < b.key ? -1 : 1));
+  return { jobs, minutes, groups };
 }
 
-function spoken(by: OverrunGrouping, key: string | number): string {
-  if (by === 'ageBand') return AGE_BANDS[Number(key)] ?? String(key);
-  if (by === 'rotFound') return Number(key) === 1 ? 'found' : 'not_found';
-  return String(key);
+/** How a grouping's stored keys are told. */
+function naming(
+  db: ScopedDb,
+  by: Exclude<OverrunGrouping, 'stage'>,
+): (key: string | number) => string {
+  switch (by) {
+    case 'branch':
+    case 'region': {
+      const field = by === 'branch' ? 'code' : 'region';
+      const told = new Map(db.scope.branches.map((branch) => [branch.id, branch[field]]));
+      return (key) => told.get(Number(key)) ?? '';
+    }
+    case 'package': {
+      const codes = packageCodes(db);
+      return (key) => codes.get(Number(key)) ?? '';
+    }
+    case 'ageBand':
+      return (key) => AGE_BANDS[Number(key)] ?? '';
+    case 'rotFound':
+      return (key) => (key === 1 ? 'found' : 'not_found');
+    case 'bodyType':
+    case 'month':
+      return String;
+  }
+}
+
+/** Age bands go in the order of their years, everything else by its text (rule 30). */
+function place(by: OverrunGrouping, key: string): number {
+  return by === 'ageBand' ? (AGE_BANDS as readonly string[]).indexOf(key) : 0;
 }
