@@ -1,16 +1,16 @@
 import { mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
+import { askModule } from '../support/ask-module';
 import { benchIngest } from './ingest';
 import { benchPage } from './page';
 import { benchReads } from './reads';
 import { print, type Line } from './report';
 
+const FIND_CHROMIUM = join(__dirname, '..', 'support', 'find-chromium.mjs');
+
 /** `npm run bench [ingest] [reads] [page]`: compares ours with a yardstick in one run; without names, everything. */
 async function main(): Promise<void> {
-  const { findChromium } = (await import('../support/find-chromium.mjs')) as {
-    findChromium: () => string | undefined;
-  };
   const asked = process.argv.slice(2);
   const jobs = Number(process.env['BENCH_JOBS'] ?? 100_000);
   const today = '2026-02-02';
@@ -19,8 +19,8 @@ async function main(): Promise<void> {
     ingest: () => benchIngest(folder, 10_000, today),
     reads: () => benchReads(folder, jobs, today),
     page: async () => {
-      const browser = findChromium();
-      if (browser === undefined) throw new Error('the page bench needs Chromium; set CHROME');
+      const browser = askModule(FIND_CHROMIUM, 'findChromium', []);
+      if (typeof browser !== 'string') throw new Error('the page bench needs Chromium; set CHROME');
       return benchPage(folder, browser);
     },
   };
