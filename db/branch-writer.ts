@@ -1,9 +1,10 @@
+import { tellRevision, type SentRevision } from '#shared/domain/preconditions';
 import type { RecordedJob } from '#shared/domain/recorded-job';
 import type { Source } from '#shared/domain/vocabulary';
 import type { Connection } from './database';
 import { insertReceived, removeDerived } from './derived-rows';
 import type { NetworkState } from './network-state';
-import { recordAudit, type Actor } from './queries/audit';
+import { findLastEvent, recordAudit, type Actor } from './queries/audit';
 import type { JobIdentity } from './queries/fact-row';
 import type { ScopedBranch } from './scope';
 import type { Store } from './store';
@@ -132,6 +133,33 @@ export class BranchWriter {
     return row.made_on ?? undefined;
   }
 
+  /**
+   * Who changed a job last and when, in words, or `undefined` when it was never there. On the writing connection: the change
+   * may be of the commit that is under way.
+   */
+  lastChange(jobRef: string): string | undefined {
+    const stored = this.findJob(jobRef);
+    if (stored?.voided === true) {
+      const db = new UnscopedDb(this.connection);
+      const event = findLastEvent(db, 'job.void', this.subjectOf(jobRef));
+      return event && `voided by ${event.actor} at ${event.at}`;
+    }
+    const row = this.connection
+      .prepare(
+        `select job_revisions.revision, received_at as receivedAt, people.name as personName,
+          push_keys.label as keyLabel from job_revisions
+          left join people on people.id = person_id
+          left join push_keys on push_keys.id = push_key_id
+          where job_id = ? and job_revisions.revision = ?`,
+      )
+      .get(stored?.id, stored?.revision) as SentRevision | undefined;
+    return row && tellRevision(row);
+  }
+
+  private subjectOf(jobRef: string): string {
+    return `/branches/${this.branch.code}/jobs/${jobRef}`;
+  }
+
   private packageOf(job: RecordedJob): { id: number; warrantyMonths: number } {
     const entry = this.state.package(job.package);
     if (!entry) throw new Error('a job names a package that is gone');
@@ -237,7 +265,7 @@ export class BranchWriter {
       at: receipt.receivedAt,
       actor: receipt.actor,
       action,
-      subject: `/branches/${this.branch.code}/jobs/${jobRef}`,
+      subject: this.subjectOf(jobRef),
       branchId: this.branch.id,
       detail,
     });

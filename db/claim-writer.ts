@@ -1,3 +1,4 @@
+import { tellRevision, type SentRevision } from '#shared/domain/preconditions';
 import type { ClaimDecision } from '#shared/domain/vocabulary';
 import type { Receipt } from './branch-writer';
 import type { Connection } from './database';
@@ -77,6 +78,20 @@ export class ClaimWriter {
         text: row.content,
       }
     );
+  }
+
+  /** Who sent the newest revision of a claim and when, in words. */
+  lastChange(claimId: number): string | undefined {
+    const row = this.connection
+      .prepare(
+        `select claim_revisions.revision, received_at as receivedAt, people.name as personName,
+          push_keys.label as keyLabel from claim_revisions
+          left join people on people.id = person_id
+          left join push_keys on push_keys.id = push_key_id
+          where claim_id = ? order by claim_revisions.revision desc limit 1`,
+      )
+      .get(claimId) as SentRevision | undefined;
+    return row && tellRevision(row);
   }
 
   /** The branch's job of a reference that is not voided: its id and completion day. */

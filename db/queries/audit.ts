@@ -67,6 +67,21 @@ export function recordAudit(db: UnscopedDb, entry: AuditEntry): void {
   db.run(sql('audit_events').insert({ ...row, hash: hashOf(row) }));
 }
 
+/** Who did something to a subject last, and when. Reads the trail backwards: for what is asked rarely. */
+export function findLastEvent(
+  db: UnscopedDb,
+  action: string,
+  subject: string,
+): { actor: string; at: string } | undefined {
+  return db.first(
+    sql('audit_events')
+      .where({ action, subject })
+      .orderBy('id', 'desc')
+      .limit(1)
+      .select('actor', 'at'),
+  );
+}
+
 /** Reads the whole trail and checks every link; tells the first event that does not fit. */
 export function verifyAudit(db: UnscopedDb): { events: number; brokenAt: number | null } {
   let previous = GENESIS;

@@ -33,7 +33,7 @@ export function mountClaims(mounting: Mounting, kit: Kit): void {
               {
                 ifMatch: call.ifMatch,
                 ifNoneMatch: call.ifNoneMatch,
-                lastChange: () => `revision ${stored?.revision ?? 0}`,
+                lastChange: () => stored && writer.lastChange(stored.id),
               },
               stored && { revision: stored.revision, voided: false },
             ),

@@ -14,7 +14,7 @@ import { breaksOfBill, writeBill } from './bill-job';
 import { breaksOfClaims } from './breaks-of-claims';
 import { worldOf } from './check-job';
 import { checkPreconditions, tagOf } from '#shared/domain/preconditions';
-import { lastChange, readJobSheet } from './read-job-sheet';
+import { readJobSheet } from './read-job-sheet';
 
 /** Jobs: sent, corrected, read, billed and voided. */
 export function mountJobs(mounting: Mounting, kit: Kit): void {
@@ -129,7 +129,7 @@ function sendingOf(kit: Kit, call: Call, jobRef: string): Sending {
     preconditions: {
       ifMatch: call.ifMatch,
       ifNoneMatch: call.ifNoneMatch,
-      lastChange: () => lastChange(kit.store.scoped(call.scope), namedBranch(call).code, jobRef),
+      lastChange: () => new BranchWriter(kit.store, namedBranch(call)).lastChange(jobRef),
     },
   };
 }

@@ -5,6 +5,7 @@ import { bridgeOf } from '#shared/domain/bridge';
 import type { CostBook } from '#shared/domain/cost-book';
 import { costCents, deriveFigures, marginCents } from '#shared/domain/job-figures';
 import { writtenOut, type WrittenOutJob } from '#shared/domain/normalise-job';
+import { senderOf } from '#shared/domain/preconditions';
 import { notFound } from '#shared/domain/refusal';
 
 /** Reads one job with its revisions and, for whoever may see money, its margin and bridge. */
@@ -33,23 +34,9 @@ export function readJobSheet(
     : { ...sheet, ...withoutMoney(job) };
 }
 
-/** Who changed a job last and when, for the refusal of a write that missed it. */
-export function lastChange(db: ScopedDb, branch: string, jobRef: string): string {
-  const row = findSheet(db, branch, jobRef);
-  const last = row && listRevisions(db, row.jobId).at(-1);
-  return last
-    ? `revision ${last.revision} by ${nameOf(last)} at ${last.receivedAt}`
-    : 'it was voided';
-}
-
 function told(row: RevisionRow): JobSheet['revisions'][number] {
   const { revision, receivedAt, source, change } = row;
-  return { revision, receivedAt, source, change, by: nameOf(row) };
-}
-
-function nameOf(row: RevisionRow): string {
-  if (row.personName !== null) return row.personName;
-  return row.keyLabel !== null ? `push key "${row.keyLabel}"` : 'the system';
+  return { revision, receivedAt, source, change, by: senderOf(row) };
 }
 
 function moneyOf(row: SheetRow, costs: CostBook): Pick<JobSheet, 'money' | 'missingCosts'> {
