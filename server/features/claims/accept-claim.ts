@@ -69,37 +69,47 @@ function normaliseClaim(
   };
 }
 
-/** Which decision counts: a recorder's changes none, one above the limit waits for head office. */
+/**
+ * Which decision counts (rule 77): a recorder's changes none; above the limit only head office decides, so that another's is a
+ * proposal, and a cost raised there is a claim to decide anew.
+ */
 function decided(
-  content: RecordedClaim,
+  sent: RecordedClaim,
   stored: StoredClaim | undefined,
   { role, limitCents }: ClaimSending,
 ): DecidedClaim {
-  const text = JSON.stringify(content);
-  const standing = stored?.decision ?? 'open';
-  const { decision } = content;
+  const cost = sent.costCents ?? 0;
+  const above = role !== 'head_office' && limitCents !== null && cost > limitCents;
+  const raised = above && cost > (stored?.content.costCents ?? 0);
+  const before = stored?.decision ?? 'open';
+  const standing = raised ? 'open' : before;
   if (role === 'recorder') {
-    if (decision !== 'open' && decision !== standing) {
+    if (sent.decision !== 'open' && sent.decision !== before) {
       throw new Refusal(
         'forbidden',
         'A recorder leaves a claim open or as it was decided; the site manager decides it.',
       );
     }
-    return { content, text, decision: standing, proposed: stored?.proposed ?? null };
+    const content = { ...sent, decision: stored?.content.decision ?? 'open' };
+    const waiting = stored?.proposed ?? (raised && before !== 'open' ? before : null);
+    return checked(content, standing, waiting);
   }
-  const within =
-    role === 'head_office' ||
-    decision === 'open' ||
-    limitCents === null ||
-    (content.costCents ?? 0) <= limitCents ||
-    (decision === standing && content.costCents === stored?.content.costCents);
-  if (within) return { content, text, decision, proposed: null };
-  if (content.paidOn !== undefined && standing === 'open') {
+  if (!above) return checked(sent, sent.decision, null);
+  const asks = sent.decision !== 'open' && sent.decision !== standing;
+  return checked(sent, standing, asks ? sent.decision : null);
+}
+
+function checked(
+  content: RecordedClaim,
+  decision: ClaimDecision,
+  proposed: ClaimDecision | null,
+): DecidedClaim {
+  if (decision === 'open' && content.paidOn !== undefined) {
     throw refuseInput([
       { path: '/paidOn', message: 'the cost is above the claim limit: head office decides first' },
     ]);
   }
-  return { content, text, decision: standing, proposed: decision };
+  return { content, text: JSON.stringify(content), decision, proposed };
 }
 
 function told(
