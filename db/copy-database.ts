@@ -26,7 +26,7 @@ export async function copyDatabase(from: string, to: string): Promise<void> {
     await reader.backup(to, { progress: () => ALL_PAGES });
   } catch (error) {
     throw new DatabaseRefused(
-      `The database ${from} could not be copied to ${to}: ${reasonOf(error)}.`,
+      `The database ${from} could not be copied to ${to}: ${codeOf(error)}.`,
     );
   } finally {
     reader.close();
@@ -72,10 +72,10 @@ export function closeDatabaseFile(file: string): void {
   try {
     settle(file);
   } catch (error) {
-    if (codeOf(error)?.startsWith('SQLITE_BUSY')) {
+    if (codeOf(error).startsWith('SQLITE_BUSY')) {
       throw new DatabaseRefused(`The database ${file} is in use; stop the server first.`);
     }
-    if (!codeOf(error)?.startsWith('SQLITE_CORRUPT')) throw error;
+    if (!codeOf(error).startsWith('SQLITE_CORRUPT')) throw error;
   }
 }
 
@@ -105,7 +105,8 @@ function isReadable(file: string): boolean {
   try {
     reader.prepare('select count(*) from sqlite_schema').get();
     return true;
-  } catch {
+  } catch (error) {
+    if (!/^SQLITE_(NOTADB|CORRUPT)/.test(codeOf(error))) throw error;
     return false;
   } finally {
     reader.close();
@@ -117,7 +118,7 @@ function look(file: string): BetterSqlite3.Database {
   try {
     return new BetterSqlite3(file, { readonly: true, fileMustExist: true });
   } catch (error) {
-    throw new DatabaseRefused(`The file ${file} cannot be opened: ${reasonOf(error)}.`);
+    throw new DatabaseRefused(`The file ${file} cannot be opened: ${codeOf(error)}.`);
   }
 }
 
@@ -125,10 +126,9 @@ function damaged(file: string): DatabaseRefused {
   return new DatabaseRefused(`The file ${file} is damaged or not a database.`);
 }
 
-function codeOf(error: unknown): string | undefined {
-  return error instanceof Error && 'code' in error ? String(error.code) : undefined;
-}
-
-function reasonOf(error: unknown): string {
-  return codeOf(error) ?? 'unknown reason';
+/** SQLite's name of what went wrong. The driver's errors may come from another realm, where they are no `Error` of ours. */
+function codeOf(error: unknown): string {
+  return typeof error === 'object' && error !== null && 'code' in error
+    ? String(error.code)
+    : 'unknown reason';
 }

@@ -35,16 +35,16 @@ describe('npm run backup', () => {
 describe('npm run restore', () => {
   it('given a backup and no leave, says in one line how to go on', () => {
     const file = path.join(folder, 'copy.sqlite');
-    runCommandLine('backup', ['--data', folder, '--to', file]);
-    const { code, error } = runCommandLine('restore', ['--data', folder, '--from', file]);
+    runCommandLine('backup', [file, '--data', folder]);
+    const { code, error } = runCommandLine('restore', [file, '--data', folder]);
     expect(code).toBe(1);
     expect(error).toMatch(/^The folder .* holds a database already; add --move-aside .*\.\n$/);
   });
 
   it('given a backup and leave, restores it and tells where the former one is', () => {
     const file = path.join(folder, 'copy.sqlite');
-    runCommandLine('backup', ['--data', folder, '--to', file]);
-    const args = ['--data', folder, '--from', file, '--move-aside'];
+    runCommandLine('backup', [file, '--data', folder]);
+    const args = [file, '--data', folder, '--move-aside'];
     const { code, out } = runCommandLine('restore', args);
     expect(code).toBe(0);
     expect(out).toMatch(
@@ -56,7 +56,7 @@ describe('npm run restore', () => {
     expect(runCommandLine('restore', ['--data', folder])).toEqual({
       code: 1,
       out: '',
-      error: 'Name the backup with --from FILE.\n',
+      error: 'Name the one backup to restore: npm run restore -- FILE.\n',
     });
   });
 });

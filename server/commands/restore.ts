@@ -4,26 +4,29 @@ import { readConfig } from '../config';
 import { CommandRefused, readableSize, runCommand } from './command';
 import { restoreBackup } from './restore-backup';
 
-/** `npm run restore -- --from FILE [--data FOLDER] [--move-aside]`: a checked backup back into a data folder; the server must be stopped. */
+/** `npm run restore -- FILE [--data FOLDER] [--move-aside]`: a checked backup back into a data folder; the server must be stopped. */
 async function restore(): Promise<void> {
-  const { values } = parseArgs({
+  const { values, positionals } = parseArgs({
     options: {
-      from: { type: 'string' },
       data: { type: 'string' },
       'move-aside': { type: 'boolean', default: false },
     },
+    allowPositionals: true,
     strict: true,
   });
-  if (values.from === undefined) throw new CommandRefused('Name the backup with --from FILE.');
+  const [file, ...more] = positionals;
+  if (file === undefined || more.length > 0) {
+    throw new CommandRefused('Name the one backup to restore: npm run restore -- FILE.');
+  }
   const folder = values.data ?? readConfig(process.env).data;
   const { bytes, jobs, auditEvents, keptIn } = await restoreBackup(
-    values.from,
+    file,
     path.join(folder, 'underseam.sqlite'),
     values['move-aside'] ? 'move-aside' : 'refuse',
     new Date(),
   );
   console.log(
-    `Restored ${values.from} into ${folder}: ${readableSize(bytes)}, ${jobs} jobs, ${auditEvents} audit events; checked whole.`,
+    `Restored ${file} into ${folder}: ${readableSize(bytes)}, ${jobs} jobs, ${auditEvents} audit events; checked whole.`,
   );
   if (keptIn) console.log(`The former database is kept in ${keptIn}.`);
 }

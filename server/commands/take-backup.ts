@@ -10,7 +10,7 @@ import { putInPlace } from './put-in-place';
  */
 export async function takeBackup(database: string, target: string): Promise<DatabaseContents> {
   if (existsSync(target)) {
-    throw new CommandRefused(`There is already a file ${target}; name another one with --to.`);
+    throw new CommandRefused(`There is already a file ${target}; name another one.`);
   }
   mkdirSync(path.dirname(target), { recursive: true });
   const unfinished = `${target}.unfinished-${process.pid}`;
