@@ -2,7 +2,7 @@ import { DestroyRef, DOCUMENT, inject, type Signal, signal } from '@angular/core
 
 /** Whether the window is as narrow as a phone's, kept up to date. Call it in an injection context. */
 export function narrowWindow(): Signal<boolean> {
-  const query = inject(DOCUMENT).defaultView?.matchMedia('(max-width: 719.98px)');
+  const query = inject(DOCUMENT).defaultView?.matchMedia('screen and (max-width: 719.98px)');
   const narrow = signal(query?.matches ?? false);
   const follow = (event: MediaQueryListEvent): void => narrow.set(event.matches);
   query?.addEventListener('change', follow);

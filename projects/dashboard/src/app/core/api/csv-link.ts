@@ -89,7 +89,7 @@ export class CsvLink {
     const address = URL.createObjectURL(file);
     const link = this.document.createElement('a');
     link.href = address;
-    link.download = this.endpoint().path.split('/').at(-1) ?? 'rows.csv';
+    link.download = `underseam-${this.endpoint().path.split('/').at(-1) ?? 'rows.csv'}`;
     link.click();
     URL.revokeObjectURL(address);
   }

@@ -41,6 +41,10 @@ export class Catalogue {
   packageName(code: string): string {
     return this.packageNames()[code] ?? code;
   }
+  /** The short word for a package where it stands among others, in rows and in the scope: its code without underscores. */
+  packageWord(code: string): string {
+    return code.replaceAll('_', ' ');
+  }
   productName(code: string): string {
     return this.productNames()[code] ?? code;
   }

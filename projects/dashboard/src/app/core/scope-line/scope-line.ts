@@ -75,7 +75,7 @@ export class ScopeLine {
   });
   protected readonly packagesWords = computed(() =>
     kindsWords(
-      this.scope.package().map((code) => this.catalogue.packageName(code)),
+      this.scope.package().map((code) => this.catalogue.packageWord(code)),
       'packages',
     ),
   );

@@ -3,8 +3,8 @@ import { toSignal } from '@angular/core/rxjs-interop';
 import { NavigationEnd, type Params, Router } from '@angular/router';
 import { filter, map, startWith } from 'rxjs';
 
-/** What of the scope makes sense on every page; the week and the dates belong to the page they were chosen on. */
-const CARRIED = ['region', 'branch', 'package', 'bodyType'] as const;
+/** What of the scope goes along; the week belongs to the one page that shows a week. */
+const CARRIED = ['region', 'branch', 'package', 'bodyType', 'last', 'from', 'to'] as const;
 
 /** The part of the scope that goes along when another page is opened. */
 @Injectable({ providedIn: 'root' })

@@ -38,13 +38,13 @@ describe('Header', () => {
     expect(element.querySelectorAll('.wide us-bead')).toHaveLength(1);
   });
 
-  it('carries branch and package from page to page, but not the week or the page of a list', async () => {
+  it('carries branch, package and dates from page to page, but not the week or the page of a list', async () => {
     const element = await shownTo(
       'site_manager',
-      '/jobs?branch=HAV&package=full&week=2026-W05&cursor=x',
+      '/jobs?branch=HAV&package=full&last=13&week=2026-W05&cursor=x',
     );
     expect(element.querySelector('.wide a')?.getAttribute('href')).toBe(
-      '/this-week?branch=HAV&package=full',
+      '/this-week?branch=HAV&package=full&last=13',
     );
   });
 });

@@ -32,7 +32,8 @@ import type { Fact } from './facts';
     }
     dd {
       text-align: end;
-      overflow-wrap: anywhere;
+      max-width: 70%;
+      overflow-wrap: break-word;
       font-variant-numeric: tabular-nums;
     }
     .marked {

@@ -27,7 +27,7 @@ export class FindingsList {
       dangerous: isLeftDangerous(finding),
       work: [
         ...(finding.repairMinutes ? [`repair ${formatMinutes(finding.repairMinutes)}`] : []),
-        ...(finding.chargedCents !== undefined
+        ...(finding.chargedCents
           ? [`charged ${formatExactMoney(finding.chargedCents, this.currency())}`]
           : []),
       ].join(', '),

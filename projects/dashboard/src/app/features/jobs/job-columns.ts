@@ -12,7 +12,7 @@ import {
 /** What the columns of the list need to know beside the row. */
 export interface JobColumnsInput {
   readonly branchName: (code: string) => string;
-  readonly packageName: (code: string) => string;
+  readonly packageWord: (code: string) => string;
   /** Several branches are seen, so each row says whose it is. */
   readonly branches: 'one' | 'several';
   /** Recorders see no money. */
@@ -65,7 +65,7 @@ export function jobColumns(known: JobColumnsInput): readonly Column<JobRow>[] {
     {
       key: 'package',
       label: 'Package',
-      text: (row) => known.packageName(row.package),
+      text: (row) => known.packageWord(row.package),
       muted: () => true,
     },
     { key: 'completed', label: 'Finished', text: (row) => formatShortDate(row.completedOn) },

@@ -48,7 +48,7 @@ export class JobList {
   protected more(row: JobRow): string {
     return [
       ...(this.catalogue.branches().length > 1 ? [this.catalogue.branchName(row.branch)] : []),
-      this.catalogue.packageName(row.package),
+      this.catalogue.packageWord(row.package),
       formatShortDate(row.completedOn),
       ...(row.hasRot ? ['rot found'] : []),
       ...(row.unbilled ? [billWords(row)] : []),

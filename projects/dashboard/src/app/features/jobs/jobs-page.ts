@@ -92,7 +92,7 @@ export class JobsPage {
   protected readonly columns = computed(() =>
     jobColumns({
       branchName: (code) => this.catalogue.branchName(code),
-      packageName: (code) => this.catalogue.packageName(code),
+      packageWord: (code) => this.catalogue.packageWord(code),
       branches: this.catalogue.branches().length > 1 ? 'several' : 'one',
       money: this.recorder() ? 'hidden' : 'shown',
     }),

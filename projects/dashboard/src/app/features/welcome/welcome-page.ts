@@ -1,4 +1,4 @@
-import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject, input, signal } from '@angular/core';
 import { NonNullableFormBuilder, ReactiveFormsModule, Validators } from '@angular/forms';
 import { MatButton } from '@angular/material/button';
 import { MatFormFieldModule } from '@angular/material/form-field';
@@ -8,6 +8,7 @@ import { setPassword } from '#shared/contracts/auth';
 import { Api } from '../../core/api/api';
 import { deed } from '../../core/api/deed';
 import { markFields } from '../../core/api/mark-fields';
+import { Session } from '../../core/session/session';
 import { OuterFrame } from '../../core/shell/outer-frame';
 import { Trouble } from '../../ui/trouble/trouble';
 
@@ -29,6 +30,9 @@ import { Trouble } from '../../ui/trouble/trouble';
 export class WelcomePage {
   private readonly api = inject(Api);
   private readonly router = inject(Router);
+
+  protected readonly signedIn = inject(Session).person;
+  protected readonly isSet = signal(false);
 
   /** From the link in the mail; works once. */
   readonly token = input<string>();
@@ -55,7 +59,13 @@ export class WelcomePage {
     this.form.markAllAsTouched();
     if (this.form.invalid) return;
     const answer = await this.setting.run(this.form.getRawValue().newPassword);
-    if (answer) await this.router.navigate(['/sign-in'], { queryParams: { done: 'password' } });
-    else markFields(this.form, this.setting.problem());
+    if (!answer) {
+      markFields(this.form, this.setting.problem());
+    } else if (this.signedIn()) {
+      // Whoever followed somebody's link from the mailbox stays who they are.
+      this.isSet.set(true);
+    } else {
+      await this.router.navigate(['/sign-in'], { queryParams: { done: 'password' } });
+    }
   }
 }
