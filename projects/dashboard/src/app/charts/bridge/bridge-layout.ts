@@ -23,8 +23,8 @@ export interface BridgeLayout {
   readonly bar: number;
   /** Where 0 stands. */
   readonly zero: number;
-  readonly top: number;
-  readonly bottom: number;
+  /** Heights between which the line of 0 runs: all through, or beside each bar that stands under its words. */
+  readonly axis: readonly { readonly from: number; readonly to: number }[];
   readonly steps: readonly PlacedStep[];
   /** Lines from the end of one bar to the start of the next. */
   readonly joins: readonly { readonly x: number; readonly from: number; readonly to: number }[];
@@ -40,6 +40,7 @@ const LEAST_BARS = 96;
 const GAP = 17;
 const STACKED_WORDS = 20;
 const STACKED_ROW = 50;
+const STUB = 7;
 
 /**
  * Lays out a bridge: words left, bars, amounts right in one column. Where words and amounts leave the bars less than 96 px, each
@@ -82,13 +83,15 @@ export function layOutBridge(input: BridgeInput, width: number): BridgeLayout {
     height: bottom + 8,
     bar: BAR,
     zero: x(0),
-    top: stacked ? (steps[0]?.barY ?? TOP) - 4 : 0,
-    bottom: bottom + 7,
+    axis: stacked
+      ? steps.map(({ barY }) => ({ from: barY - 2, to: barY + BAR + 2 }))
+      : [{ from: 0, to: bottom + 7 }],
     steps,
     joins: steps.slice(1).map((step, index) => ({
       x: x(spans[index]![1]),
       from: steps[index]!.barY + BAR,
-      to: step.barY,
+      // Under words the line is only begun, so that it runs through none.
+      to: stacked ? steps[index]!.barY + BAR + STUB : step.barY,
     })),
     rule:
       last > 0 && pushed(rows, last) > 0 && !stacked ? yOf(last) - ROW / 2 - BEFORE_LAST / 2 : null,

@@ -34,6 +34,16 @@ describe('placeFlags', () => {
     expect(flags.at(-1)?.text).toBe('Week 15: below');
   });
 
+  it('only places over the line: left out, unless it must be said', () => {
+    const crowded = Array.from({ length: 60 }, (_, index) => ({
+      x: index * 10,
+      y: 10 + ((index * 37) % 220),
+    }));
+    const wish = { x: 300, y: 120, text: 'Week 47: 8th in a row below centre' };
+    expect(placeFlags([wish], crowded, plot)).toEqual([]);
+    expect(placeFlags([{ ...wish, must: true }], crowded, plot)).toHaveLength(1);
+  });
+
   it('a sentence wider than the plot is left out', () => {
     const narrow = { left: 0, right: 60, top: 0, bottom: 240 };
     expect(placeFlags([{ x: 30, y: 100, text: 'Week 46: below, 29 %' }], [], narrow)).toEqual([]);

@@ -13,6 +13,8 @@ export interface FlagWish {
   readonly x: number;
   readonly y: number;
   readonly text: string;
+  /** Rather over the line than left out. */
+  readonly must?: boolean;
 }
 
 interface Box {
@@ -24,12 +26,15 @@ interface Box {
 
 const FROM_MARK = 12;
 const HALF_LINE = 9;
-const ABOVE = 20;
+const NEAR = 20;
+const FAR = 38;
 const STEPS_OF_LINE = 12;
+/** Steps of the line that a sentence may cover before it is left out; a step is about 2 px. */
+const MOST_COVERED = 8;
 
 /**
- * Finds a place for each sentence: left of its mark, else right, above or below, inside the plot, on no other sentence, and over as
- * little of the joined line as can be. The newest mark (the last wish) chooses first; one that finds no place is left out, its shape stays.
+ * Finds a place for each sentence: left of its mark, else right, above or below, near or a little off, inside the plot, on no other sentence, and over as
+ * little of the joined line as can be. The last wish chooses first; one that finds no place is left out, its shape stays.
  */
 export function placeFlags(
   wishes: readonly FlagWish[],
@@ -43,6 +48,7 @@ export function placeFlags(
     const best = candidates(wish)
       .filter(({ box }) => inside(box, plot) && !taken.some((other) => meet(box, other)))
       .map((candidate) => ({ ...candidate, covered: countCovered(candidate.box, points) }))
+      .filter(({ covered }) => wish.must || covered <= MOST_COVERED)
       .reduce<(Candidate & { covered: number }) | null>(
         (least, next) => (least === null || next.covered < least.covered ? next : least),
         null,
@@ -67,11 +73,24 @@ function candidates({ x, y, text }: FlagWish): Candidate[] {
     top: middle - HALF_LINE,
     bottom: middle + HALF_LINE,
   });
+  const beside = (dy: number): Candidate[] => [
+    {
+      flag: { x: x - FROM_MARK, y: y + dy, anchor: 'end', text },
+      box: at(x - FROM_MARK - width, y + dy),
+    },
+    {
+      flag: { x: x + FROM_MARK, y: y + dy, anchor: 'start', text },
+      box: at(x + FROM_MARK, y + dy),
+    },
+  ];
+  const over = (dy: number): Candidate => ({
+    flag: { x, y: y + dy, anchor: 'middle', text },
+    box: at(x - width / 2, y + dy),
+  });
   return [
-    { flag: { x: x - FROM_MARK, y, anchor: 'end', text }, box: at(x - FROM_MARK - width, y) },
-    { flag: { x: x + FROM_MARK, y, anchor: 'start', text }, box: at(x + FROM_MARK, y) },
-    { flag: { x, y: y - ABOVE, anchor: 'middle', text }, box: at(x - width / 2, y - ABOVE) },
-    { flag: { x, y: y + ABOVE, anchor: 'middle', text }, box: at(x - width / 2, y + ABOVE) },
+    ...beside(0),
+    ...[-NEAR, NEAR].flatMap((dy) => [over(dy), ...beside(dy)]),
+    ...[-FAR, FAR].flatMap((dy) => [over(dy), ...beside(dy)]),
   ];
 }
 

@@ -4,7 +4,7 @@ import { formatCount, formatShare, formatWeekNumber } from '../../ui/format';
 import { spreadLabels } from '../spread-labels';
 import { textWidth, widestText } from '../text-width';
 import { marginAxis } from './margin-axis';
-import { placeFlags, type Flag } from './place-flags';
+import { placeFlags, type Flag, type FlagWish } from './place-flags';
 import { weekAxis, type AxisWord } from './week-axis';
 import type { MarginMark, WeeklyMarginInput } from './weekly-margin-input';
 
@@ -156,11 +156,17 @@ function join(weeks: readonly PlacedWeek[]): string {
   return path(weeks) ?? '';
 }
 
-function wishes(input: WeeklyMarginInput, weeks: readonly PlacedWeek[]) {
-  return input.points.flatMap(({ flag }, index) => {
-    const { x, y } = weeks[index]!;
-    return flag === null || y === null ? [] : [{ x, y, text: flag }];
-  });
+/** Sentences in the order in which they give way: those of runs, of which there are few, choose their place first. */
+function wishes(input: WeeklyMarginInput, weeks: readonly PlacedWeek[]): FlagWish[] {
+  const ofRun = ({ mark }: PlacedWeek): boolean => mark === 'run_low' || mark === 'run_high';
+  return input.points
+    .flatMap(({ flag }, index) => {
+      const week = weeks[index]!;
+      return flag === null || week.y === null
+        ? []
+        : [{ x: week.x, y: week.y, text: flag, must: ofRun(week) }];
+    })
+    .sort((a, b) => Number(a.must) - Number(b.must));
 }
 
 function startNote(

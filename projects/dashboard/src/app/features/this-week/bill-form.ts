@@ -1,4 +1,5 @@
 import {
+  afterRenderEffect,
   ChangeDetectionStrategy,
   Component,
   computed,
@@ -83,7 +84,10 @@ export class BillForm {
       }
       if (issuedOn.pristine) issuedOn.setValue(this.today());
     });
-    effect(() => this.amount()?.nativeElement.focus());
+    // Once the job is there and the form stands on the page; before that it cannot take the focus.
+    afterRenderEffect(() => {
+      if (this.job.value()) this.amount()?.nativeElement.focus();
+    });
   }
 
   protected async save(): Promise<void> {

@@ -42,6 +42,7 @@ describe('thisWeekView', () => {
     const { cars } = view(180);
     expect(cars.atFirst).toBe(25);
     expect(cars.rows).toHaveLength(180);
+    expect(cars.csv).toBe('CSV of all 180 rows');
   });
 
   it('no car with estimate and norm: no bridge is drawn', () => {

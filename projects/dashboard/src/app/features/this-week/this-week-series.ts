@@ -34,6 +34,7 @@ export function thisWeekView(answers: WeekAnswers, words: WeekWords): ThisWeekVi
   const standing = standingOf(answers, words.today);
   const rows = answers.billed.items;
   const { bridge } = answers.week;
+  const atFirst = rows.length > CARS_AT_FIRST + 5 ? CARS_AT_FIRST : rows.length;
   return {
     standing,
     answer: answerWeek(answers, standing, words),
@@ -44,12 +45,13 @@ export function thisWeekView(answers: WeekAnswers, words: WeekWords): ThisWeekVi
       note: weekCarsNote(answers, standing, currencySign(words.currency)),
       columns: weekCarColumns(answers, standing, words),
       rows,
-      atFirst: rows.length > CARS_AT_FIRST + 5 ? CARS_AT_FIRST : rows.length,
-      csv: csvWords(answers.billed.jobs),
+      atFirst,
+      csv: csvWords(answers.billed.jobs, atFirst),
     },
   };
 }
 
-function csvWords(cars: number): string {
-  return cars === 1 ? 'CSV of this row' : `CSV of these ${formatCount(cars)} rows`;
+function csvWords(cars: number, shown: number): string {
+  if (cars === 1) return 'CSV of this row';
+  return `CSV of ${cars > shown ? 'all' : 'these'} ${formatCount(cars)} rows`;
 }

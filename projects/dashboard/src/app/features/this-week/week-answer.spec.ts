@@ -149,7 +149,7 @@ describe('answerWeek', () => {
     });
     expect(first).toBe('What week 5 kept cannot be said: a cost is missing.');
     expect(second).toContain(
-      `Head office has to set the hourly cost of Havnsund on ${formatDate('2026-01-28')};`,
+      `Head office has to set the hourly cost of Havnsund from ${formatDate('2026-01-28')};`,
     );
   });
 
@@ -161,7 +161,7 @@ describe('answerWeek', () => {
     });
     expect(first).toContain('(1 car)');
     expect(second).toContain(
-      `One billed car is left out until head office sets the cost of CW1 on ${formatDate('2026-01-28')}.`,
+      `One billed car is left out until head office sets the cost of CW1 from ${formatDate('2026-01-28')}.`,
     );
   });
 

@@ -45,9 +45,9 @@ export function weekCarColumns(
     {
       key: 'package',
       label: 'Package',
-      text: (row) => packageWord(row, words),
+      text: packageWord,
       muted: () => true,
-      sortBy: (row) => packageWord(row, words),
+      sortBy: packageWord,
       total: '',
     },
     money('billed', 'Billed', (row) => row.revenueCents, formatAmount(billed)),
@@ -153,9 +153,9 @@ function hasStep(row: JobRow): boolean {
   return Math.abs(difference) > AS_PLANNED_SHARE * (row.revenueCents ?? 0);
 }
 
-/** The package as a trade word. */
-export function packageWord(row: Pick<JobRow, 'package'>, words: WeekWords): string {
-  return words.packageName(row.package).toLocaleLowerCase('en');
+/** The package as the trade word it is sold under: its code, which is shorter than its name. */
+export function packageWord(row: Pick<JobRow, 'package'>): string {
+  return row.package.replaceAll('_', ' ');
 }
 
 function money(

@@ -78,10 +78,10 @@ describe('missingCostWords', () => {
 
   it('each kind: named with its day', () => {
     expect(missingCostWords([{ kind: 'fee', code: 'network', on }], words)).toBe(
-      `the network fee on ${formatDate(on)}`,
+      `the network fee from ${formatDate(on)}`,
     );
     expect(missingCostWords([{ kind: 'consumable', code: 'trim_clip', on }], words)).toBe(
-      `the cost of trim clips on ${formatDate(on)}`,
+      `the cost of trim clips from ${formatDate(on)}`,
     );
   });
 
@@ -94,8 +94,8 @@ describe('missingCostWords', () => {
     ] as const;
     expect(missingCostWords(missing, words)).toBe(
       formatList([
-        `the hourly cost of Havnsund on ${formatDate(on)}`,
-        `the cost of Thin wax on ${formatDate(on)}`,
+        `the hourly cost of Havnsund from ${formatDate(on)}`,
+        `the cost of Thin wax from ${formatDate(on)}`,
         '2 more',
       ]),
     );

@@ -88,7 +88,7 @@ export function whoseUsual(
 type MissingCost = MarginAnswer['missingCosts'][number];
 const NAMED_AT_MOST = 2;
 
-/** Which costs are not known: "the hourly cost of Havnsund on 28 January 2026 and 3 more". */
+/** Which costs are not known: "the hourly cost of Havnsund from 28 January 2026 and 3 more". */
 export function missingCostWords(missing: readonly MissingCost[], words: WeekWords): string {
   const named = missing.slice(0, NAMED_AT_MOST).map((one) => missingCostWord(one, words));
   const rest = missing.length - named.length;
@@ -99,12 +99,12 @@ function missingCostWord({ kind, code, on }: MissingCost, words: WeekWords): str
   const day = formatDate(on);
   switch (kind) {
     case 'hourlyCost':
-      return `the hourly cost of ${words.branchName(code)} on ${day}`;
+      return `the hourly cost of ${words.branchName(code)} from ${day}`;
     case 'product':
-      return `the cost of ${words.productName(code)} on ${day}`;
+      return `the cost of ${words.productName(code)} from ${day}`;
     case 'consumable':
-      return `the cost of ${code.replaceAll('_', ' ')}s on ${day}`;
+      return `the cost of ${code.replaceAll('_', ' ')}s from ${day}`;
     case 'fee':
-      return `the network fee on ${day}`;
+      return `the network fee from ${day}`;
   }
 }
