@@ -59,8 +59,14 @@ export const line = (max: number) =>
     .refine((text) => !CONTROL_OR_LONE_SURROGATE.test(text), 'no control characters');
 /** A name that must say something. */
 export const name = line(120).refine((text) => text.trim().length > 0, 'must not be empty');
-/** Free text of several lines. */
-export const prose = z.string().max(4000, 'at most 4000 characters');
+/** Free text of several lines: line ends and tabs, no other control characters. */
+export const prose = z
+  .string()
+  .max(4000, 'at most 4000 characters')
+  .refine(
+    (text) => !CONTROL_OR_LONE_SURROGATE.test(text.replace(/[\t\r\n]/g, '')),
+    'no control characters but line ends and tabs',
+  );
 /** A fraction with at most six decimals, 0 … 1 (fee rates, rule 10). */
 export const rate = z.number().min(0).max(1).refine(hasSixDecimals, 'at most 6 decimals');
 export const shareInput = z.number().min(0).lt(1);
