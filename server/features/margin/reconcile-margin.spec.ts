@@ -44,7 +44,7 @@ const job = fc.record({
       { product: 'CW1', ml: 17 },
       { product: 'UW1', ml: 5 },
     ]),
-    consumables: fc.constant([{ kind: 'trim_clip' as const, quantity: 7, unitCostCents: 43 }]),
+    consumables: fc.subarray([{ kind: 'trim_clip' as const, quantity: 7, unitCostCents: 43 }]),
     boughtInCents: fc.nat(9_999),
     invoice: fc.option(fc.record({ totalCents: fc.nat(150_000) }), { nil: null }),
   }),
