@@ -130,6 +130,11 @@ export function formatShortDate(date: string): string {
   return dateFormat('medium').format(noon(date));
 }
 
+/** Two dates as a range, what they share said once: `23–29 Nov 2026`, `28 Sept – 4 Oct 2026`. */
+export function formatDateRange(from: string, to: string): string {
+  return dateFormat('medium').formatRange(noon(from), noon(to));
+}
+
 /** A month: `2026-01` → `January 2026`. */
 export function formatMonth(month: string): string {
   return monthFormat.format(noon(`${month}-01`));

@@ -1,6 +1,6 @@
 import { mondayOfWeek, addDays } from '#shared/domain/calendar';
 import type { Role } from '#shared/domain/vocabulary';
-import { formatDate, formatList, formatShortDate } from '../../ui/format';
+import { formatDate, formatDateRange, formatList } from '../../ui/format';
 import type { Period } from './scope-url';
 
 /** Names listed in full; more are counted. */
@@ -26,20 +26,20 @@ export function kindsWords(names: readonly string[], many: string): string {
   return names.length === 0 ? `all ${many}` : namesOrCount(names, many);
 }
 
-/** A period in words: "last 26 weeks", "1 Jan 2026 to 5 Mar 2026". */
+/** A period in words: "last 26 weeks", "1 Jan – 5 Mar 2026". */
 export function periodWords(period: Period): string {
   if (period.kind === 'last') {
     return period.weeks === 1 ? 'this week so far' : `last ${period.weeks} weeks`;
   }
   return period.from === period.to
     ? formatDate(period.from)
-    : `${formatShortDate(period.from)} to ${formatShortDate(period.to)}`;
+    : formatDateRange(period.from, period.to);
 }
 
-/** First and last day of a week, for the list of weeks: "26 Jan 2026 to 1 Feb 2026". */
+/** First and last day of a week, for the list of weeks: "26 Jan – 1 Feb 2026". */
 export function weekDaysWords(week: string): string {
   const monday = mondayOfWeek(week);
-  return `${formatShortDate(monday)} to ${formatShortDate(addDays(monday, 6))}`;
+  return formatDateRange(monday, addDays(monday, 6));
 }
 
 function namesOrCount(names: readonly string[], many: string): string {
