@@ -9,18 +9,19 @@ export type SentJob = Omit<RecordedJob, 'findings' | 'invoice'> & {
 
 /**
  * The one form in which a job is kept and compared (rule 25): NFC text, keys in one order, defaults left out, every finding
- * with its reference. Two bodies that mean the same become the same text under `JSON.stringify`.
+ * with its reference. Two bodies that mean the same become the same text under `JSON.stringify`, which leaves out what is
+ * undefined here; nothing is deleted, because a deleted key makes an object slow to write.
  */
 export function normaliseJob(sent: SentJob & { invoice?: RecordedJob['invoice'] }): RecordedJob {
-  return compact({
-    vehicle: compact({
+  return {
+    vehicle: {
       key: text(sent.vehicle.key),
       make: spoken(sent.vehicle.make),
       model: spoken(sent.vehicle.model),
       bodyType: sent.vehicle.bodyType,
       firstRegistered: sent.vehicle.firstRegistered,
       odometerKm: sent.vehicle.odometerKm,
-    }),
+    },
     package: sent.package,
     bookedOn: sent.bookedOn,
     startedOn: sent.startedOn,
@@ -29,57 +30,41 @@ export function normaliseJob(sent: SentJob & { invoice?: RecordedJob['invoice'] 
       priceCents: sent.estimate.priceCents,
       stages: stages(sent.estimate.stages),
     },
-    agreedExtras: list(sent.agreedExtras, (extra) =>
-      compact({
-        on: extra.on,
-        minutes: extra.minutes || undefined,
-        priceCents: extra.priceCents || undefined,
-        note: text(extra.note),
-      }),
-    ),
+    agreedExtras: list(sent.agreedExtras, (extra) => ({
+      on: extra.on,
+      minutes: extra.minutes || undefined,
+      priceCents: extra.priceCents || undefined,
+      note: text(extra.note),
+    })),
     actual: { stages: stages(sent.actual.stages) },
     products: list(sent.products, ({ product, ml }) => ({ product, ml })),
-    consumables: list(sent.consumables, (line) =>
-      compact({ kind: line.kind, quantity: line.quantity, unitCostCents: line.unitCostCents }),
-    ),
+    consumables: list(sent.consumables, ({ kind, quantity, unitCostCents }) => ({
+      kind,
+      quantity,
+      unitCostCents,
+    })),
     boughtInCents: sent.boughtInCents || undefined,
-    findings: list(referenced(sent.findings ?? []), (finding) =>
-      compact({
-        ref: finding.ref,
-        zone: finding.zone,
-        side: finding.side,
-        seenAs: finding.seenAs,
-        workedAs: finding.workedAs,
-        structural: finding.structural,
-        action: finding.action,
-        repairMinutes: finding.repairMinutes || undefined,
-        chargedCents: finding.chargedCents || undefined,
-        note: text(finding.note),
-      }),
-    ),
-    checks: optional(
-      Object.fromEntries(
-        CHECKS.filter((check) => sent.checks?.[check]).map((check) => [
-          check,
-          sent.checks?.[check],
-        ]),
-      ) as RecordedJob['checks'],
-    ),
-    workshop: optional(
-      compact({
-        temperatureC: sent.workshop?.temperatureC,
-        humidityPct: sent.workshop?.humidityPct,
-      }),
-    ),
-    invoice:
-      sent.invoice &&
-      compact({
-        number: text(sent.invoice.number),
-        issuedOn: sent.invoice.issuedOn,
-        totalCents: sent.invoice.totalCents,
-      }),
+    findings: list(referenced(sent.findings ?? []), (finding) => ({
+      ref: finding.ref,
+      zone: finding.zone,
+      side: finding.side,
+      seenAs: finding.seenAs,
+      workedAs: finding.workedAs,
+      structural: finding.structural,
+      action: finding.action,
+      repairMinutes: finding.repairMinutes || undefined,
+      chargedCents: finding.chargedCents || undefined,
+      note: text(finding.note),
+    })),
+    checks: checks(sent.checks),
+    workshop: workshop(sent.workshop),
+    invoice: sent.invoice && {
+      number: text(sent.invoice.number),
+      issuedOn: sent.invoice.issuedOn,
+      totalCents: sent.invoice.totalCents,
+    },
     notes: text(sent.notes),
-  });
+  };
 }
 
 /** A recorded job as it is answered: with its lists and numbers even where they are empty or 0. */
@@ -137,9 +122,26 @@ function text(value: string | undefined): string | undefined {
 }
 
 function stages(minutes: StageMinutes): StageMinutes {
-  return Object.fromEntries(
-    STAGES.filter((stage) => minutes[stage]).map((stage) => [stage, minutes[stage]]),
-  );
+  const kept: StageMinutes = {};
+  for (const stage of STAGES) if (minutes[stage]) kept[stage] = minutes[stage];
+  return kept;
+}
+
+function checks(sent: RecordedJob['checks']): RecordedJob['checks'] {
+  if (!sent) return undefined;
+  const kept: NonNullable<RecordedJob['checks']> = {};
+  let any = false;
+  for (const check of CHECKS) {
+    if (!sent[check]) continue;
+    kept[check] = sent[check];
+    any = true;
+  }
+  return any ? kept : undefined;
+}
+
+function workshop(sent: RecordedJob['workshop']): RecordedJob['workshop'] {
+  if (sent?.temperatureC === undefined && sent?.humidityPct === undefined) return undefined;
+  return { temperatureC: sent.temperatureC, humidityPct: sent.humidityPct };
 }
 
 function allStages(minutes: StageMinutes): StageMinutes {
@@ -151,17 +153,4 @@ function list<From, To>(
   map: (item: From) => To,
 ): To[] | undefined {
   return items && items.length > 0 ? items.map(map) : undefined;
-}
-
-function optional<T extends object>(value: T | undefined): T | undefined {
-  return value && Object.keys(value).length > 0 ? value : undefined;
-}
-
-/** Leaves out what is undefined; key order stays. */
-function compact<T extends object>(value: T): T {
-  const kept = { ...value };
-  for (const key of Object.keys(kept) as (keyof T)[]) {
-    if (kept[key] === undefined || kept[key] === null) delete kept[key];
-  }
-  return kept;
 }

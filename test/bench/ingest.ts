@@ -1,7 +1,6 @@
 import { Agent, request } from 'node:http';
 import { join } from 'node:path';
-import { openReader } from '#db/database';
-import { sql } from '#db/database';
+import { openReader, sql } from '#db/database';
 import { Store } from '#db/store';
 import { createHash } from 'node:crypto';
 import { setUpBench } from './bench-network';
@@ -10,7 +9,9 @@ import { ratioLine, type Line } from './report';
 import { serve } from './serve';
 import { jobMaker } from './synthetic-jobs';
 
-const KEY = 'usk_bench_' + 'k'.repeat(43);
+const KEY_ID = 'be0c00000000';
+const SECRET = 'be'.repeat(32);
+const KEY = `usk_${KEY_ID}_${SECRET}`;
 const BATCH = 500;
 
 /** Batch and single ingest through the API, against the bare engine writing the same rows with commits as durable. */
@@ -65,10 +66,10 @@ async function prepare(data: string): Promise<void> {
     const branch = store.state.branches[0];
     store.unscoped.run(
       sql('push_keys').insert({
-        id: 'bench',
+        id: KEY_ID,
         branch_id: branch?.id,
         label: 'bench',
-        secret_hash: createHash('sha256').update('k'.repeat(43)).digest('hex'),
+        secret_hash: createHash('sha256').update(SECRET).digest('hex'),
         created_at: '2026-01-01T00:00:00.000Z',
       }),
     );

@@ -37,6 +37,8 @@ export async function serve(
     });
     child.once('exit', () => reject(new Error(`the server ended: ${said}`)));
   });
+  // A bench that fails must not leave its server behind.
+  process.once('exit', () => child.kill('SIGKILL'));
   return {
     url,
     stop: async () => {
