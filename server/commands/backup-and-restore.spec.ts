@@ -1,5 +1,13 @@
 import { spawn, type ChildProcess } from 'node:child_process';
-import { existsSync, mkdtempSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import {
+  existsSync,
+  mkdtempSync,
+  readdirSync,
+  readFileSync,
+  rmSync,
+  statSync,
+  writeFileSync,
+} from 'node:fs';
 import { tmpdir } from 'node:os';
 import path from 'node:path';
 import BetterSqlite3 from 'better-sqlite3';
@@ -80,6 +88,7 @@ describe('takeBackup', () => {
     expect(count(database, 'regions')).toBeGreaterThan(copied);
     expect(contents).toMatchObject({ jobs: 0, auditEvents: 3 });
     expect(readdirSync(path.dirname(copy))).toEqual(['monday.sqlite']);
+    expect(statSync(copy).mode & 0o777).toBe(0o600);
   });
 
   it('given a file of that name already, leaves it alone', async () => {

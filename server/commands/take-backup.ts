@@ -1,4 +1,4 @@
-import { existsSync, mkdirSync, rmSync } from 'node:fs';
+import { chmodSync, existsSync, mkdirSync, rmSync } from 'node:fs';
 import path from 'node:path';
 import { copyDatabase, inspectDatabase, type DatabaseContents } from '#db/copy-database';
 import { CommandRefused } from './command';
@@ -17,6 +17,8 @@ export async function takeBackup(database: string, target: string): Promise<Data
   try {
     await copyDatabase(database, unfinished);
     const contents = inspectDatabase(unfinished);
+    // It holds people and what belongs to every branch.
+    chmodSync(unfinished, 0o600);
     putInPlace(unfinished, target);
     return contents;
   } finally {
