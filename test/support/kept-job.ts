@@ -21,6 +21,6 @@ export function unbilledJob(completedOn: string): SentJob {
     estimate: undefined,
     actual: { stages: {} },
     products: [],
-    invoice: null,
+    invoice: undefined,
   };
 }

@@ -46,7 +46,7 @@ const job = fc.record({
     ]),
     consumables: fc.subarray([{ kind: 'trim_clip' as const, quantity: 7, unitCostCents: 43 }]),
     boughtInCents: fc.nat(9_999),
-    invoice: fc.option(fc.record({ totalCents: fc.nat(150_000) }), { nil: null }),
+    invoice: fc.option(fc.record({ totalCents: fc.nat(150_000) }), { nil: undefined }),
   }),
 });
 
@@ -75,8 +75,8 @@ describe('answerMargin, on generated jobs', () => {
           .filter(({ branch }) => branches.includes(branch))
           .map(({ branch, job: sent }) => ({
             week: isoWeek(sent.completedOn),
-            billed: sent.invoice !== null,
-            ...recountJob(small.store, branch, sent as unknown as RecordedJob),
+            billed: sent.invoice !== undefined,
+            ...recountJob(small.store, branch, sent satisfies RecordedJob),
           }));
         const sum = (values: (bigint | undefined)[]) =>
           Number(values.reduce<bigint>((all, value) => all + (value ?? 0n), 0n));
