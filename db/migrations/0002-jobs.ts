@@ -26,7 +26,9 @@ export async function up(knex: Knex): Promise<void> {
       voided_at text,
       unique (branch_id, job_ref)
     ) strict`,
+    // With a row id, because a content of a kilobyte would overflow a page of a table without one.
     `create table job_revisions (
+      id integer primary key,
       job_id integer not null references jobs (id),
       revision integer not null,
       change text not null,
@@ -35,8 +37,8 @@ export async function up(knex: Knex): Promise<void> {
       source text not null,
       person_id integer references people (id),
       push_key_id text references push_keys (id),
-      primary key (job_id, revision)
-    ) strict, without rowid`,
+      unique (job_id, revision)
+    ) strict`,
     appendOnly('job_revisions', 'update'),
     appendOnly('job_revisions', 'delete'),
     neverReplaced('job_revisions', 'job_id', 'revision'),
@@ -156,6 +158,7 @@ export async function up(knex: Knex): Promise<void> {
     ) strict`,
     `create index claims_by_job on claims (job_id)`,
     `create table claim_revisions (
+      id integer primary key,
       claim_id integer not null references claims (id),
       revision integer not null,
       content text not null,
@@ -163,8 +166,8 @@ export async function up(knex: Knex): Promise<void> {
       source text not null,
       person_id integer references people (id),
       push_key_id text references push_keys (id),
-      primary key (claim_id, revision)
-    ) strict, without rowid`,
+      unique (claim_id, revision)
+    ) strict`,
     appendOnly('claim_revisions', 'update'),
     appendOnly('claim_revisions', 'delete'),
     neverReplaced('claim_revisions', 'claim_id', 'revision'),
