@@ -50,7 +50,7 @@ export class WelcomePage {
   protected readonly sentence = computed(() => {
     const problem = this.setting.problem();
     if (!problem || problem.fields.some((field) => field.path === '/newPassword')) return undefined;
-    return [401, 404, 410].includes(problem.status)
+    return problem.fields.some((field) => field.path === '/token')
       ? 'This link has been used or is too old. Ask for a new one.'
       : problem.sentence;
   });
