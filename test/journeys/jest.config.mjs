@@ -12,6 +12,8 @@ export default {
   displayName: 'journeys',
   rootDir: path.join(import.meta.dirname, '../..'),
   roots: ['<rootDir>/test/journeys'],
+  globalSetup: '<rootDir>/test/journeys/start-demo.ts',
+  globalTeardown: '<rootDir>/test/journeys/stop-demo.ts',
   testEnvironment: 'node',
   testEnvironmentOptions: { customExportConditions: ['underseam-source', 'node', 'node-addons'] },
   testMatch: ['**/*.spec.ts'],
