@@ -17,11 +17,17 @@ const COLUMNS: readonly Column<OpenSignIn>[] = [
   {
     key: 'device',
     label: 'Device',
-    text: (row) => row.device || 'not named',
+    text: (row) => deviceWords(row.device),
     quiet: (row) => (row.current ? 'this one' : undefined),
   },
   { key: 'used', label: 'Last used', text: (row) => formatInstant(row.lastUsedAt) },
   { key: 'started', label: 'Signed in', text: (row) => formatInstant(row.startedAt) },
+  {
+    key: 'named',
+    label: 'As the browser names itself',
+    text: (row) => row.device,
+    muted: () => true,
+  },
 ];
 
 /** The own open sign-ins, and the way out of all of them. */
@@ -66,4 +72,9 @@ export class SignInsList {
   protected async leave(): Promise<void> {
     if (await this.leaving.run(undefined)) this.session.end();
   }
+}
+
+/** A phone or a computer, by the one word that browsers on phones agree on ("Mobi", as MDN advises in "Browser detection using the user agent"). */
+function deviceWords(userAgent: string): string {
+  return /Mobi/.test(userAgent) ? 'a phone' : 'a computer';
 }
