@@ -1,0 +1,131 @@
+import { mkdirSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
+import { join } from 'node:path';
+import { SmallStore } from '../../test/support/small-store';
+import { Connection } from '../database';
+import { ScopedDb } from '../scoped-db';
+import type { JobFilters } from './job-filters';
+import { countJobs, iterateJobRows, listJobRows, type ListFilters } from './job-list';
+import { listBilledWeeks, listMissingCosts, sumSpans } from './margin';
+import { readMarginTarget } from './margin-target';
+import { packageCodes, readByKey, readByStage } from './overrun';
+import { listWeekNotes } from './week-notes';
+
+/**
+ * The text of the statements that read many jobs, as SQLite gets it, so that a change of it is seen in review. After one that
+ * is meant: UPDATE_GOLDEN=1 npx jest --selectProjects server --testPathPatterns golden
+ */
+const FOLDER = join(__dirname, 'golden');
+
+const PERIOD = { from: '2026-01-05', to: '2026-01-11' };
+const FEW: JobFilters = { ...PERIOD, packageIds: [1], bodyTypes: ['van'] };
+const MANY: JobFilters = { ...PERIOD, packageIds: [1, 2], bodyTypes: ['van', 'suv', 'estate'] };
+const LISTED: ListFilters = {
+  ...FEW,
+  make: 'Vela',
+  model: 'Ono',
+  ageBandIndex: 1,
+  unbilled: true,
+  hasRot: true,
+  hasEstimate: true,
+  text: 'x',
+};
+const PLACE = { key: 1, completedOn: '2026-01-05', branch: 'AAA', jobRef: '1' };
+
+/** What each golden file is the text of. */
+const READS: Record<string, (db: ScopedDb, filters: JobFilters) => unknown> = {
+  'count-jobs': (db) => countJobs(db, LISTED),
+  'iterate-job-rows': (db) => [...iterateJobRows(db, {}, 'completed')],
+  'list-billed-weeks': (db, filters) => listBilledWeeks(db, filters, 26),
+  'list-job-rows-by-completion': (db, filters) =>
+    listJobRows(db, filters, 'completed', undefined, 51),
+  'list-job-rows-by-difference': (db, filters) =>
+    listJobRows(db, filters, 'difference', undefined, 51),
+  'list-job-rows-by-margin': (db, filters) => listJobRows(db, filters, 'margin', undefined, 51),
+  'list-job-rows-by-overrun': (db, filters) => listJobRows(db, filters, 'overrun', undefined, 51),
+  'list-job-rows-by-waiting': (db, filters) => listJobRows(db, filters, 'waiting', undefined, 51),
+  'list-job-rows-after-a-place': (db) => listJobRows(db, LISTED, 'completed', PLACE, 51),
+  'list-missing-costs': listMissingCosts,
+  'list-week-notes': (db) => listWeekNotes(db, '2026-W01', '2026-W05'),
+  'package-codes': packageCodes,
+  'read-by-branch': (db, filters) => readByKey(db, filters, 'branch'),
+  'read-by-month': (db, filters) => readByKey(db, filters, 'month'),
+  'read-by-stage': readByStage,
+  'read-margin-target': readMarginTarget,
+  'sum-spans': (db, { packageIds, bodyTypes }) =>
+    sumSpans(db, [PERIOD, PERIOD], { packageIds, bodyTypes }),
+};
+
+let small: SmallStore;
+beforeAll(async () => {
+  small = await SmallStore.make();
+});
+afterAll(() => small.close());
+
+/** The statements that a reading sends, apart by a blank line, broken before each clause to be readable in a diff. */
+function textOf(name: string, filters: JobFilters, branches: string[]): string {
+  const texts: string[] = [];
+  const { driver } = small.store.writing;
+  const listening = new Proxy(driver, {
+    get: (target, key) => {
+      if (key !== 'prepare') return Reflect.get(target, key) as unknown;
+      return (text: string) => {
+        texts.push(text);
+        return target.prepare(text);
+      };
+    },
+  });
+  READS[name]?.(new ScopedDb(new Connection(listening), small.scope(...branches)), filters);
+  return texts.map((text) => `${broken(text)};\n`).join('\n');
+}
+
+/** One line a clause, what stands in brackets left in one. */
+function broken(text: string): string {
+  const clause = /^ (?:from|where|group by|having|order by|limit|inner join|cross join) /;
+  const flat = text.replace(/\s+/g, ' ');
+  let depth = 0;
+  let lines = '';
+  for (let at = 0; at < flat.length; at += 1) {
+    if (flat[at] === '(') depth += 1;
+    if (flat[at] === ')') depth -= 1;
+    const begins = depth === 0 && clause.test(flat.slice(at, at + 20));
+    lines += begins ? '\n' : (flat[at] ?? '');
+  }
+  return lines;
+}
+
+describe('golden SQL', () => {
+  if (process.env['UPDATE_GOLDEN'] === '1') {
+    it('is written anew', () => {
+      rmSync(FOLDER, { recursive: true, force: true });
+      mkdirSync(FOLDER);
+      for (const name of Object.keys(READS)) {
+        writeFileSync(join(FOLDER, `${name}.sql`), textOf(name, FEW, ['AAA']));
+      }
+    });
+    return;
+  }
+
+  it.each(Object.keys(READS))('given %s, is the text that was reviewed', (name) => {
+    const text = textOf(name, FEW, ['AAA']);
+    expect(text).not.toBe('');
+    expect(text).toBe(readFileSync(join(FOLDER, `${name}.sql`), 'utf8'));
+  });
+
+  it.each(Object.keys(READS).filter((name) => name !== 'read-margin-target'))(
+    'given %s in another scope with other codes asked for, is the same text',
+    (name) => {
+      const text = textOf(name, FEW, ['AAA']);
+      for (const branches of [[], ['BBB'], ['CCC', 'AAA', 'BBB']]) {
+        expect(textOf(name, MANY, branches)).toBe(text);
+      }
+    },
+  );
+
+  it('given the folder, holds no text that nothing sends', () => {
+    expect(readdirSync(FOLDER).sort()).toEqual(
+      Object.keys(READS)
+        .map((name) => `${name}.sql`)
+        .sort(),
+    );
+  });
+});

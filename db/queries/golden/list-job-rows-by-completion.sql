@@ -1,0 +1,7 @@
+select `job_facts`.`job_ref`, `job_facts`.`revision`, `job_facts`.`vehicle_key`, `job_facts`.`make`, `job_facts`.`model`, `job_facts`.`body_type`, `job_facts`.`first_registered`, `job_facts`.`completed_on`, `job_facts`.`has_rot`, `job_facts`.`billed`, `job_facts`.`has_estimate`, `job_facts`.`est_minutes`, `job_facts`.`act_minutes`, `job_facts`.`charged_repair_minutes`, `job_facts`.`extra_minutes`, `job_facts`.`extra_cents`, `job_facts`.`costed`, `job_facts`.`expected`, `job_facts`.`revenue_cents`, `job_facts`.`labour_cents`, `job_facts`.`repair_labour_cents`, `job_facts`.`product_cents`, `job_facts`.`consumables_cents`, `job_facts`.`bought_in_cents`, `job_facts`.`fee_cents`, `job_facts`.`exp_price_cents`, `job_facts`.`exp_labour_cents`, `job_facts`.`exp_repair_labour_cents`, `job_facts`.`exp_product_cents`, `job_facts`.`exp_fee_cents`, `branches`.`code` as `branch`, `packages`.`code` as `package`, 0 as "sortKey"
+from (select * from job_facts where branch_id in (select value from json_each(?)) and gen_from <= (select generation from network) and gen_to > (select generation from network)) as `job_facts`
+inner join `branches` on `branches`.`id` = `job_facts`.`branch_id`
+inner join `packages` on `packages`.`id` = `job_facts`.`package_id`
+where `job_facts`.`completed_on` >= ? and `job_facts`.`completed_on` <= ? and job_facts.package_id in (select value from json_each(?)) and job_facts.body_type in (select value from json_each(?))
+order by "sortKey", completed_on desc, branches.code, job_ref
+limit ?;

@@ -1,0 +1,2 @@
+select `id`, `code`
+from `packages`;

@@ -1,0 +1,3 @@
+select count(*) as jobs, json_group_array(est_minutes) filter (where has_estimate = 1) as list0, json_group_array(act_minutes) filter (where has_estimate = 1) as list1, json_group_array(branch_id) filter (where has_estimate = 1) as list2
+from (select * from job_facts where branch_id in (select value from json_each(?)) and gen_from <= (select generation from network) and gen_to > (select generation from network)) as `job_facts`
+where `job_facts`.`completed_on` >= ? and `job_facts`.`completed_on` <= ? and job_facts.package_id in (select value from json_each(?)) and job_facts.body_type in (select value from json_each(?));
