@@ -13,10 +13,10 @@ export const PRODUCTS: DemoSetUp['products'] = [
 ];
 
 export const PACKAGES: DemoSetUp['packages'] = [
-  { code: 'full', name: 'Full: cavities and underbody', warrantyMonths: 36 },
-  { code: 'cavity', name: 'Cavities', warrantyMonths: 36 },
+  { code: 'full', name: 'Full', warrantyMonths: 36 },
+  { code: 'cavity', name: 'Cavity', warrantyMonths: 36 },
   { code: 'underbody', name: 'Underbody', warrantyMonths: 24 },
-  { code: 'top_up', name: 'Inspection and top-up', warrantyMonths: 12 },
+  { code: 'top_up', name: 'Top-up', warrantyMonths: 12 },
 ];
 
 /** How a body type compares with a hatchback. */

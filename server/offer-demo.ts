@@ -15,6 +15,7 @@ export async function offerDemo({ store, passwords, clock, config }: Kit): Promi
     const begun = Date.now();
     process.stdout.write('Making the demo network (about half a minute) …\n');
     const jobs = await loadNetwork(store, passwords, localDate(clock.now(), 'UTC'));
+    store.tidy();
     const seconds = ((Date.now() - begun) / 1000).toFixed(1);
     process.stdout.write(`${jobs} jobs in ${seconds} s.\n`);
   }
