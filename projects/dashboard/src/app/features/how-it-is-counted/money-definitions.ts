@@ -112,7 +112,7 @@ export const moneyDefinitions: readonly Definition[] = [
     id: 'unbilled',
     title: 'Finished, not billed',
     means:
-      'Cars that are completed and have no bill. Waiting counts days from completion to today; cost so far is labour, product, consumables and bought-in, without the fee that a bill would bring.',
+      'Cars that were completed by the end of the week in view and still have no bill. Waiting counts days from completion to today; cost so far is labour, product, consumables and bought-in, without the fee that a bill would bring.',
     leftOut: 'They are in no margin, no limit and no trend until they are billed.',
     source: OWN,
   },

@@ -29,6 +29,8 @@ const AT_FIRST = 12;
 })
 export class UnbilledCars {
   readonly list = input.required<OutOf<typeof listJobs>>();
+  /** Last day on which they were finished. */
+  readonly until = input.required<string>();
   readonly words = input.required<WeekWords>();
   readonly mayBill = input.required<boolean>();
   /** A car was billed: every figure of the page has changed. */
@@ -50,6 +52,13 @@ export class UnbilledCars {
       })),
   );
   protected readonly spent = computed(() => spentParts(this.list(), this.words().currency));
+  /** The same cars on Jobs: the list has its dates from the longest wait to the end of the week. */
+  protected readonly inJobs = computed(() => ({
+    unbilled: true,
+    sort: 'waiting',
+    from: this.list().items[0]?.completedOn,
+    to: this.until(),
+  }));
   protected readonly all = computed(() => `All ${formatCount(this.list().jobs)} in Jobs`);
   private readonly severalBranches = computed(
     () => new Set(this.list().items.map(({ branch }) => branch)).size > 1,

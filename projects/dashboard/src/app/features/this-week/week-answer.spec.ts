@@ -123,7 +123,7 @@ describe('answerWeek', () => {
     const week = { jobs: 1, unbilled: 1, revenueCents: 0, marginCents: 0, marginShare: null };
     const { first, second } = say({ week, unbilled: 3 });
     expect(first).toBe('Week 5 finished 1 car and has not billed it yet.');
-    expect(second).toContain('Three cars are finished and not yet billed.');
+    expect(second).toContain('Two cars from earlier are finished and not yet billed.');
   });
 
   it('no cars: what to do', () => {

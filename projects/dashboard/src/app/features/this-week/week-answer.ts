@@ -155,10 +155,22 @@ function cautions(answers: WeekAnswers, standing: Standing, words: WeekWords): s
 }
 
 function unbilledSentence(cars: number, { kind, cars: billed, figures }: Standing): string[] {
-  // The first sentence has said these already.
-  if (cars === 0 || (kind === 'unbilled_only' && cars === figures.unbilled)) return [];
-  const subject = `${countAtStart(cars)}${billed > 0 ? ' more' : ''} ${cars === 1 ? 'car is' : 'cars are'}`;
-  return [`${subject} finished and not yet billed.`];
+  if (kind === 'unbilled_only') {
+    // The first sentence has said those of the week.
+    const earlier = cars - figures.unbilled;
+    return earlier > 0 ? [`${waiting(earlier, 'from earlier')} finished and not yet billed.`] : [];
+  }
+  return cars > 0
+    ? [`${waiting(cars, billed > 0 ? 'more' : '')} finished and not yet billed.`]
+    : [];
+}
+
+function waiting(cars: number, which: '' | 'more' | 'from earlier'): string {
+  const count = countAtStart(cars);
+  const noun = cars === 1 ? 'car' : 'cars';
+  const are = cars === 1 ? 'is' : 'are';
+  if (which === 'more') return `${count} more ${noun} ${are}`;
+  return [count, noun, which, are].filter(Boolean).join(' ');
 }
 
 function lowerFirst(text: string): string {
