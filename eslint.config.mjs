@@ -3,7 +3,7 @@ import angular from 'angular-eslint';
 import prettier from 'eslint-config-prettier';
 import { defineConfig } from 'eslint/config';
 import tseslint from 'typescript-eslint';
-import { arrows } from './lint/arrows.mjs';
+import { arrows } from './test/lint/rules/arrows.mjs';
 import {
   clockAndChance,
   enums,
@@ -11,9 +11,9 @@ import {
   subscriptions,
   vagueClasses,
   writingConnection,
-} from './lint/banned-syntax.mjs';
-import { fileNames } from './lint/file-names.mjs';
-import { networkFeatures } from './lint/layers.mjs';
+} from './test/lint/rules/banned-syntax.mjs';
+import { fileNames } from './test/lint/rules/file-names.mjs';
+import { networkFeatures } from './test/lint/rules/layers.mjs';
 
 const everySpec = ['**/*.spec.ts', 'test/**/*.ts', 'projects/dashboard/src/app/testing/**/*.ts'];
 const client = 'projects/dashboard/src/**';

@@ -134,7 +134,7 @@ export const guarded = [
       'seeds',
     ],
     because:
-      'db/unscoped-db sees every branch: read through the ScopedDb you were handed, or add this place to lint/layers.mjs with its reason.',
+      'db/unscoped-db sees every branch: read through the ScopedDb you were handed, or add this place to test/lint/rules/layers.mjs with its reason.',
   },
   {
     module: 'shared/contracts/index',

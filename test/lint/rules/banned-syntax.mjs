@@ -40,7 +40,7 @@ export const storeOpened = [
     selector:
       'MemberExpression[property.name="unscoped"]:not(CallExpression[callee.property.name="write"] *):not(CallExpression[callee.name=/^(recordAudit|readNetwork)$/] > *)',
     message:
-      'store.unscoped sees every branch: read with the ScopedDb of the call, or name this feature in lint/layers.mjs if it is about the whole network.',
+      'store.unscoped sees every branch: read with the ScopedDb of the call, or name this feature in test/lint/rules/layers.mjs if it is about the whole network.',
   },
   {
     selector: 'Property[parent.type="ObjectPattern"][key.name="unscoped"]',

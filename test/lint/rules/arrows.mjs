@@ -27,7 +27,7 @@ export function brokenArrow(source, file, isType) {
   return allowed.some((folder) => within(to.path, folder)) ? undefined : from.because;
 }
 
-/** Import arrows of the house: each layer imports only what lint/layers.mjs lets it reach, by alias or by relative path. */
+/** Import arrows of the house: each layer imports only what test/lint/rules/layers.mjs lets it reach, by alias or by relative path. */
 export const arrows = {
   meta: { type: 'problem', schema: [], messages: { broken: '{{because}}' } },
   create(context) {
