@@ -104,10 +104,10 @@ describe('ReadPool', () => {
 
   it('given a thread that ends half-way, throws instead of ending the export', async () => {
     const read = async () => {
-      let pieces = 0;
-      for await (const _chunk of exportJobs()) {
-        pieces += 1;
-        if (pieces === 2) await pool.close();
+      const pieces: string[] = [];
+      for await (const chunk of exportJobs()) {
+        pieces.push(chunk);
+        if (pieces.length === 2) await pool.close();
       }
     };
     await expect(read()).rejects.toThrow();
