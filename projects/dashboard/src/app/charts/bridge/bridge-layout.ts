@@ -36,14 +36,14 @@ const ROW = 33;
 const BAR = 20;
 const TOP = 16;
 const BEFORE_LAST = 6;
-const LEAST_BARS = 96;
+const LEAST_BARS = 80;
 const GAP = 17;
 const STACKED_WORDS = 20;
 const STACKED_ROW = 50;
 const STUB = 7;
 
 /**
- * Lays out a bridge: words left, bars, amounts right in one column. Where words and amounts leave the bars less than 96 px, each
+ * Lays out a bridge: words left, bars, amounts right in one column. Where words and amounts leave the bars less than 80 px, each
  * bar moves under its words. Pure.
  */
 export function layOutBridge(input: BridgeInput, width: number): BridgeLayout {

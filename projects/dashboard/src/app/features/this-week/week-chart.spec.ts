@@ -50,7 +50,7 @@ describe('weekChart', () => {
     expect(plain(points.at(-1)!.lines[1]!)).toBe('36 %, 17th in a row below centre');
   });
 
-  it('a run broken by a week outside: named again after it', () => {
+  it('a week outside within a run: the run goes on and is not named again', () => {
     const run = weeksFromTo('2025-W31', '2026-W05', (week, index) =>
       marginWeek(week, {
         marginShare: index === 20 ? 0.1 : 0.36,
@@ -63,7 +63,23 @@ describe('weekChart', () => {
     expect(flags.map(plain)).toEqual([
       'Week 38: 8th in a row below centre',
       'Week 51: below, 10 %',
-      'Week 52: 22nd in a row below centre',
+    ]);
+  });
+
+  it('a second run after the side has changed: named too', () => {
+    const runs = weeksFromTo('2025-W31', '2026-W05', (week, index) =>
+      marginWeek(week, {
+        marginShare: index < 10 ? 0.36 : 0.42,
+        signal:
+          index < 7 || (index >= 10 && index < 17) ? null : index < 10 ? 'run_low' : 'run_high',
+      }),
+    );
+    const flags = weekChart(marginAnswer(runs), '2026-W05').input.points.flatMap(
+      ({ flag }) => flag ?? [],
+    );
+    expect(flags).toEqual([
+      'Week 38: 8th in a row below centre',
+      'Week 48: 8th in a row above centre',
     ]);
   });
 

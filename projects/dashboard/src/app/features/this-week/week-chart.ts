@@ -60,16 +60,12 @@ function markOf({ signal, whole, marginShare }: MarginWeek): MarginMark {
   return signal ?? 'plain';
 }
 
-/** The sentence beside a mark; a run is named once, at the week that made it one. */
+/** The sentence beside a mark; a run is named once, at its first marked week. */
 function flagOf(
   chart: MarginAnswer,
   { week, signal, marginShare }: MarginWeek,
   index: number,
 ): string | null {
-  const before = chart.weeks
-    .slice(0, index)
-    .filter((one) => one.marginShare !== null && one.whole)
-    .at(-1);
   switch (signal) {
     case 'outside_low':
       return `${formatWeekNumber(week)}: below, ${formatShare(marginShare ?? 0)}`;
@@ -77,11 +73,20 @@ function flagOf(
       return `${formatWeekNumber(week)}: above, ${formatShare(marginShare ?? 0)}`;
     case 'run_low':
     case 'run_high':
-      if (before?.signal === signal) return null;
-      return `${formatWeekNumber(week)}: ${runWords(chart, week, signal)}`;
+      return runIsNamed(chart, index)
+        ? null
+        : `${formatWeekNumber(week)}: ${runWords(chart, week, signal)}`;
     case null:
       return null;
   }
+}
+
+/** Whether an earlier week of the run that the week at `index` belongs to is marked as a run. */
+function runIsNamed(chart: MarginAnswer, index: number): boolean {
+  const signal = chart.weeks[index]!.signal;
+  const judged = chart.weeks.slice(0, index).filter((one) => one.marginShare !== null && one.whole);
+  const running = countRunning(chart, chart.weeks[index]!.week);
+  return judged.slice(judged.length - (running - 1)).some((one) => one.signal === signal);
 }
 
 function runWords(chart: MarginAnswer, week: string, signal: 'run_low' | 'run_high'): string {
