@@ -28,7 +28,7 @@ describe('billing from the row, and the note on a week', () => {
     page.locator('us-unbilled-cars td:first-child a').allInnerTexts();
 
   async function openBill(jobRef: string): Promise<Locator> {
-    await page.getByRole('button', { name: `Bill job ${jobRef}` }).click();
+    await page.getByRole('button', { name: `Bill it: job ${jobRef}` }).click();
     const form = page.locator('us-bill-form');
     await form.getByLabel('Bill before tax').waitFor();
     return form;

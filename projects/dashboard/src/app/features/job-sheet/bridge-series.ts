@@ -1,5 +1,6 @@
 import type { JobSheet } from '#shared/contracts/jobs';
 import type { BridgeInput, BridgeRow } from '../../charts/bridge/bridge-input';
+import type { Column } from '../../ui/data-table/column';
 import { formatExactAmount, formatSignedExactAmount } from '../../ui/format';
 
 type JobMoney = NonNullable<JobSheet['money']>;
@@ -13,6 +14,18 @@ const STEPS = [
   ['consumablesCents', 'Consumables, bought-in'],
   ['feeCents', 'Fee'],
 ] as const satisfies readonly (readonly [keyof JobBridge, string])[];
+
+/** The same steps as a table. */
+export const BRIDGE_COLUMNS: readonly Column<BridgeRow>[] = [
+  { key: 'label', label: 'Step', text: ({ label }) => label, strong: ({ strong }) => strong },
+  {
+    key: 'amount',
+    label: 'Effect on margin',
+    kind: 'number',
+    text: ({ text }) => text,
+    strong: ({ strong }) => strong,
+  },
+];
 
 /** The step that moved the margin most, either way; `undefined` when none moved it. */
 export function largestStep(
@@ -50,7 +63,7 @@ export function bridgeSeries(bridge: JobBridge): BridgeInput {
 }
 
 /** The bridge's finding as a sentence. */
-export function bridgeWords(bridge: JobBridge): string {
+function bridgeWords(bridge: JobBridge): string {
   const largest = largestStep(bridge);
   const ends = `Expected ${formatExactAmount(bridge.expectedMarginCents)}, kept ${formatExactAmount(bridge.marginCents)}`;
   return largest

@@ -18,7 +18,6 @@ import { Session } from '../../core/session/session';
 import { Answer } from '../../ui/answer/answer';
 import { Caution } from '../../ui/caution/caution';
 import { DataTable } from '../../ui/data-table/data-table';
-import { DefinitionLink } from '../../ui/definition-link/definition-link';
 import {
   currencySign,
   formatCount,
@@ -28,8 +27,9 @@ import {
 } from '../../ui/format';
 import { LoadState } from '../../ui/load-state/load-state';
 import { narrowWindow } from '../../ui/narrow';
+import { TableTwin } from '../../ui/table-twin/table-twin';
 import { CONSUMABLE_NAMES } from '../../ui/words';
-import { bridgeSeries, bridgeWords } from './bridge-series';
+import { BRIDGE_COLUMNS, bridgeSeries } from './bridge-series';
 import { cautionsOf } from './cautions';
 import { FactList } from './fact-list';
 import { billFacts, carFacts, checkFacts, dateFacts, type Fact, workshopFacts } from './facts';
@@ -50,12 +50,12 @@ import { VoidDialog, type VoidDialogData } from './void-dialog';
     BridgeChart,
     Caution,
     DataTable,
-    DefinitionLink,
     FactList,
     FindingsList,
     LoadState,
     MatButton,
     RouterLink,
+    TableTwin,
   ],
   templateUrl: './job-sheet-page.html',
   styleUrl: './job-sheet-page.scss',
@@ -107,7 +107,6 @@ export class JobSheetPage {
       ),
       lines: job.money ? moneyLines(job.money) : [],
       bridge: job.money?.bridge ? bridgeSeries(job.money.bridge) : undefined,
-      bridgeWords: job.money?.bridge ? bridgeWords(job.money.bridge) : '',
       missing: (job.missingCosts ?? []).map((cost) =>
         missingCostWords(cost, {
           branchName: (code) => this.catalogue.branchName(code),
@@ -118,6 +117,7 @@ export class JobSheetPage {
   });
   protected readonly productColumns = productColumns((code) => this.catalogue.productName(code));
   protected readonly revisionColumns = REVISION_COLUMNS;
+  protected readonly bridgeColumns = BRIDGE_COLUMNS;
   protected readonly consumables = computed<readonly Fact[]>(() =>
     (this.job.value()?.consumables ?? []).map((one) => ({
       name: CONSUMABLE_NAMES[one.kind],

@@ -1,0 +1,95 @@
+import type { Page } from 'playwright-core';
+import { source, type run } from 'axe-core';
+
+/** The success criteria held to: WCAG 2.2, levels A and AA, by axe-core's names for them. */
+const WCAG_22_AA = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa'];
+
+/** Smallest text that a page may show, in CSS pixels as drawn (the design's own rule). */
+const SMALLEST = 14;
+
+/** Everything that is wrong with a page as it stands, in words; an empty list when nothing is. */
+export async function auditPage(page: Page): Promise<string[]> {
+  return [
+    ...(await accessibility(page)),
+    ...(await sideways(page)),
+    ...(await smallText(page)),
+    ...(await picturesWithoutTwin(page)),
+  ];
+}
+
+/**
+ * Waits until nothing moves any more. Colours are inherited from element to element, and even a transition cut down to nothing for
+ * those who want no motion takes a frame at each of them.
+ */
+export async function untilStill(page: Page): Promise<void> {
+  await page.evaluate(async () => {
+    const frame = () => new Promise((drawn) => requestAnimationFrame(drawn));
+    for (let still = 0; still < 3; still = document.getAnimations().length === 0 ? still + 1 : 0) {
+      await frame();
+    }
+  });
+}
+
+/** Violations that axe-core finds, each with the elements concerned. No rule is switched off. */
+async function accessibility(page: Page): Promise<string[]> {
+  if (!(await page.evaluate('typeof window.axe === "object"'))) await page.evaluate(source);
+  return page.evaluate(async (tags) => {
+    const { violations } = await (window as unknown as { axe: { run: typeof run } }).axe.run(
+      document,
+      { runOnly: { type: 'tag', values: tags }, resultTypes: ['violations'] },
+    );
+    return violations.flatMap(({ id, help, nodes }) =>
+      nodes.map(
+        ({ target, failureSummary }) =>
+          `${id}: ${help}: ${target.join(' ')} ${failureSummary ?? ''}`,
+      ),
+    );
+  }, WCAG_22_AA);
+}
+
+/** A page that scrolls sideways, and the elements that reach beyond the window. */
+function sideways(page: Page): Promise<string[]> {
+  return page.evaluate(() => {
+    const { scrollWidth, clientWidth } = document.documentElement;
+    if (scrollWidth <= clientWidth) return [];
+    const beyond = [...document.querySelectorAll('body *')]
+      .filter((element) => element.getBoundingClientRect().right > clientWidth + 1)
+      .map((element) => `${element.tagName.toLowerCase()}.${element.getAttribute('class') ?? ''}`);
+    return [`scrolls sideways: ${scrollWidth} in ${clientWidth}: ${beyond.slice(0, 6).join(', ')}`];
+  });
+}
+
+/** Text drawn smaller than allowed, a drawing's own scale included. What only screen readers get is not drawn. */
+function smallText(page: Page): Promise<string[]> {
+  return page.evaluate((smallest) => {
+    const found = new Set<string>();
+    const walker = document.createTreeWalker(document.body, NodeFilter.SHOW_TEXT);
+    for (let node = walker.nextNode(); node; node = walker.nextNode()) {
+      const element = node.parentElement;
+      if (!element || !node.textContent?.trim() || element.closest('.us-unseen, noscript, script'))
+        continue;
+      if (!element.checkVisibility({ visibilityProperty: true })) continue;
+      const scale = element instanceof SVGGraphicsElement ? (element.getScreenCTM()?.a ?? 1) : 1;
+      const size = parseFloat(getComputedStyle(element).fontSize) * scale;
+      if (size < smallest - 0.01)
+        found.add(`${size.toFixed(1)} px: "${node.textContent.trim().slice(0, 40)}"`);
+    }
+    return [...found];
+  }, SMALLEST);
+}
+
+/** Charts that say nothing to those who do not see them, or have no table beside them. */
+function picturesWithoutTwin(page: Page): Promise<string[]> {
+  return page.evaluate(() =>
+    [...document.querySelectorAll('main svg[role="img"]')].flatMap((picture) => {
+      const name = picture.getAttribute('aria-label') ?? '';
+      const twin = [...(picture.closest('us-table-twin')?.querySelectorAll('button') ?? [])].find(
+        (button) => button.textContent?.trim() === 'Show as table',
+      );
+      return [
+        ...(name.length < 20 ? [`a picture without a finding: "${name}"`] : []),
+        ...(twin ? [] : [`a picture without a table: "${name}"`]),
+      ];
+    }),
+  );
+}

@@ -1,0 +1,114 @@
+import type { Page } from 'playwright-core';
+import type { Role } from '#shared/domain/vocabulary';
+
+/** A page of the product as someone comes to it. */
+export interface Stop {
+  /** Names the pictures kept of it. */
+  name: string;
+  path: string;
+  as: Role | 'nobody';
+  /** Brings it into the state to look at: something opened, something typed wrong. */
+  prepare?: (page: Page) => Promise<unknown>;
+  /** What the page's own request is refused with, where that is the point. */
+  refused?: RegExp;
+}
+
+/** Job sheets to look at, by what is on them. */
+export interface KnownJobs {
+  rotten: string;
+  unbilled: string;
+}
+
+/** Every page there is. */
+export function everyPage({ rotten, unbilled }: KnownJobs): Stop[] {
+  return [
+    { name: 'sign-in', path: '/sign-in', as: 'nobody' },
+    { name: 'sign-in-forgot', path: '/sign-in/forgot', as: 'nobody' },
+    { name: 'welcome', path: '/welcome?token=0123&purpose=invitation', as: 'nobody' },
+    { name: 'this-week', path: '/this-week', as: 'site_manager' },
+    { name: 'this-week-network', path: '/this-week', as: 'head_office' },
+    { name: 'overruns', path: '/overruns', as: 'site_manager' },
+    { name: 'overruns-network', path: '/overruns?by=branch', as: 'head_office' },
+    { name: 'jobs', path: '/jobs', as: 'site_manager' },
+    { name: 'jobs-recorder', path: '/jobs', as: 'recorder' },
+    { name: 'job-sheet', path: `/jobs/HAV/${rotten}`, as: 'site_manager' },
+    { name: 'job-sheet-unbilled', path: `/jobs/HAV/${unbilled}`, as: 'site_manager' },
+    { name: 'how-it-is-counted', path: '/how-it-is-counted', as: 'site_manager' },
+    { name: 'account', path: '/account', as: 'site_manager' },
+    { name: 'mailbox', path: '/mailbox', as: 'head_office' },
+    { name: 'no-page', path: '/no-such-page', as: 'site_manager' },
+  ];
+}
+
+/** The same pages with something opened or gone wrong. */
+export function everyState({ rotten }: KnownJobs): Stop[] {
+  const press = (name: string | RegExp) => (page: Page) =>
+    page.getByRole('button', { name }).first().click();
+  return [
+    { name: 'sign-in-empty', path: '/sign-in', as: 'nobody', prepare: press('Sign in') },
+    { name: 'welcome-incomplete', path: '/welcome', as: 'nobody' },
+    {
+      name: 'this-week-writing',
+      path: '/this-week',
+      as: 'site_manager',
+      prepare: async (page) => {
+        await press(/^Bill it: job/)(page);
+        await page.getByLabel('Bill before tax').fill('1,120');
+        await press('Bill the car')(page);
+        await press(/Leave a note|Change the note/)(page);
+      },
+    },
+    { name: 'this-week-tables', path: '/this-week', as: 'site_manager', prepare: showTables },
+    {
+      name: 'this-week-to-come',
+      path: '/this-week?week=2026-W20',
+      as: 'site_manager',
+    },
+    {
+      name: 'overruns-tables',
+      path: '/overruns?by=month',
+      as: 'site_manager',
+      prepare: showTables,
+    },
+    {
+      name: 'overruns-none',
+      path: '/overruns?from=2015-01-01&to=2015-02-01',
+      as: 'site_manager',
+    },
+    { name: 'jobs-none', path: '/jobs?q=nothing-like-it', as: 'site_manager' },
+    { name: 'jobs-orders', path: '/jobs', as: 'site_manager', prepare: press('newest first') },
+    { name: 'scope-branches', path: '/jobs', as: 'head_office', prepare: press(/^Branches/) },
+    { name: 'scope-week', path: '/this-week', as: 'site_manager', prepare: press(/^Week/) },
+    { name: 'scope-dates', path: '/overruns', as: 'site_manager', prepare: press(/^Dates/) },
+    { name: 'scope-packages', path: '/overruns', as: 'site_manager', prepare: press(/^Packages/) },
+    { name: 'person-menu', path: '/account', as: 'head_office', prepare: press(/head office$/) },
+    {
+      name: 'void-dialog',
+      path: `/jobs/HAV/${rotten}`,
+      as: 'site_manager',
+      prepare: press('Void this job'),
+    },
+    {
+      name: 'job-sheet-none',
+      path: '/jobs/HAV/no-such-job',
+      as: 'site_manager',
+      refused: / 404 /,
+    },
+    {
+      name: 'account-refused',
+      path: '/account',
+      as: 'site_manager',
+      prepare: press('Change the password'),
+    },
+  ];
+}
+
+/** Turns every picture of a page into its table. */
+async function showTables(page: Page): Promise<void> {
+  const buttons = page.getByRole('button', { name: /^Show as table/ });
+  await buttons.last().waitFor();
+  const names = await buttons.evaluateAll((all) =>
+    all.map((one) => one.getAttribute('aria-label')),
+  );
+  for (const name of names) await page.getByRole('button', { name: name!, exact: true }).click();
+}
