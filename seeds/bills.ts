@@ -92,9 +92,9 @@ export function billTotal(
   return Math.round((quotedCents * (1 - courtesy - drifted)) / 100) * 100 + billedExtrasCents;
 }
 
-/** Days from completion to the bill, or `never`. About half are written at once, some take weeks. */
-export function billDelayDays(random: Random, slowness: number): number | 'never' {
-  if (chance(random, 0.0008)) return 'never';
+/** Days from completion to the bill. About half are written at once, some take weeks, a forgotten one turns up when the year is closed. */
+export function billDelayDays(random: Random, slowness: number): number {
+  if (chance(random, 0.006)) return wholeBetween(random, 250, 420);
   const [from, to] = pickWeighted(random, DELAYS);
   return Math.round(wholeBetween(random, from, to) * (from === 0 ? 1 : slowness));
 }

@@ -27,8 +27,7 @@ const SENT_WITH_BILL_DAYS = 10;
  */
 export function arrive(random: Random, drawn: DrawnJob, at: Arrival): DemoJob {
   const delay = billDelayDays(random, at.billDelay);
-  const billDay =
-    delay === 'never' ? Infinity : workingDayAfter(at.completedDay + delay, at.workWeek);
+  const billDay = workingDayAfter(at.completedDay + delay, at.workWeek);
   const billed = billDay < at.todayDay;
   const once = billed && billDay - at.completedDay <= SENT_WITH_BILL_DAYS;
   const versions: DemoRevision[] = [];
