@@ -19,8 +19,9 @@ export function csvHeader(columns: readonly string[]): string {
 
 /** The rows of some records under the given columns. */
 export function csvRows(columns: readonly string[], records: readonly object[]): string {
+  const paths = columns.map((column) => column.split('.'));
   return stringify(
-    records.map((record) => columns.map((column) => valueAt(record, column))),
+    records.map((record) => paths.map((path) => valueAt(record, path))),
     FORMAT,
   );
 }
@@ -30,9 +31,9 @@ export function defused(text: string): string {
   return /^[=+\-@\t\r]/.test(text) ? `'${text}` : text;
 }
 
-function valueAt(record: object, column: string): unknown {
+function valueAt(record: object, path: readonly string[]): unknown {
   let value: unknown = record;
-  for (const part of column.split('.')) {
+  for (const part of path) {
     if (typeof value !== 'object' || value === null) return null;
     value = (value as Record<string, unknown>)[part];
   }
