@@ -1,4 +1,5 @@
 import * as z from 'zod';
+import { isDate } from '#shared/domain/calendar';
 
 /** A setting that cannot be used; its message is one clear sentence. */
 export class ConfigRefused extends Error {}
@@ -38,8 +39,8 @@ const settings = z.object({
   UNDERSEAM_NOW: z
     .string()
     .refine(
-      (text) => !Number.isNaN(Date.parse(text)),
-      'UNDERSEAM_NOW must be an ISO 8601 date and time',
+      isMoment,
+      'UNDERSEAM_NOW must be an ISO 8601 date and time such as 2026-02-02T07:30:00Z',
     )
     .optional(),
   UNDERSEAM_URL: z
@@ -85,4 +86,13 @@ function isSmtpUrl(text: string): boolean {
     // A lone % in the user's name.
     return false;
   }
+}
+
+/** A date and time of day, with seconds and zone or without: what else a `Date` would make of a text is no setting. */
+function isMoment(text: string): boolean {
+  const [, date] =
+    /^(\d{4}-\d{2}-\d{2})T(?:[01]\d|2[0-3]):[0-5]\d(?::[0-5]\d(?:\.\d+)?)?(?:Z|[+-]\d{2}:[0-5]\d)?$/.exec(
+      text,
+    ) ?? [];
+  return date !== undefined && isDate(date) && !Number.isNaN(Date.parse(text));
 }
