@@ -40,9 +40,8 @@ describe('ScopedDb', () => {
 
   it('given rows to visit one at a time, narrows them the same', () => {
     const db = reader('BBB');
-    const seen: unknown[] = [];
-    db.each(db.table('jobs').select('job_ref').orderBy('job_ref'), (row) => seen.push(row));
-    expect(seen).toEqual([['b-1'], ['b-2']]);
+    const rows = db.iterate(db.table('jobs').select('job_ref').orderBy('job_ref'));
+    expect([...rows]).toEqual([{ job_ref: 'b-1' }, { job_ref: 'b-2' }]);
   });
 
   it('given a join, narrows both sides', () => {
@@ -69,7 +68,7 @@ describe('ScopedDb', () => {
     const db = reader('AAA');
     expect(() => db.all(sql('jobs').select('*'))).toThrow(UnscopedRead);
     expect(() => db.first(sql('job_facts').where('branch_id', 1))).toThrow(UnscopedRead);
-    expect(() => db.each(sql.raw('select * from claims'), () => undefined)).toThrow(UnscopedRead);
+    expect(() => db.iterate(sql.raw('select * from claims'))).toThrow(UnscopedRead);
   });
 
   it('given what it makes itself of every table, lets it pass', () => {

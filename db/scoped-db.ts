@@ -48,16 +48,6 @@ export class ScopedDb {
     return this.connection.iterate<Row>(query);
   }
 
-  /** Visits rows as arrays of column values, one at a time, for reads too large to hold. */
-  each(query: Query, visit: (row: unknown[]) => void): void {
-    const { sql: text, bindings } = this.check(query);
-    const rows = this.connection.driver
-      .prepare(text)
-      .raw()
-      .iterate(...(bindings as unknown[])) as IterableIterator<unknown[]>;
-    for (const row of rows) visit(row);
-  }
-
   /** Runs several reads on one unchanging state of the database. */
   snapshot<T>(read: () => T): T {
     if (this.connection.driver.inTransaction) return read();
