@@ -39,6 +39,13 @@ describe('layOutBridge', () => {
     expect(rule).toBeLessThan(steps[7]!.barY);
   });
 
+  it('a step of nothing: the joining line runs on through its row', () => {
+    const rows = [row('Expected', 1000, 'total'), row('Price', 0), row('Fee', -100)];
+    const { joins } = layOutBridge({ summary: '', rows }, 412);
+    expect(joins[0]!.to).toBe(joins[1]!.from);
+    expect(joins[0]!.x).toBe(joins[1]!.x);
+  });
+
   it.each([320, 412, 600, 900])('%d px wide: bars stay inside', (width) => {
     for (const { barX, barWidth } of layOutBridge(input, width).steps) {
       expect(barX).toBeGreaterThanOrEqual(0);

@@ -89,7 +89,8 @@ export function layOutBridge(input: BridgeInput, width: number): BridgeLayout {
     steps,
     joins: steps.slice(1).map((step, index) => ({
       x: x(spans[index]![1]),
-      from: steps[index]!.barY + BAR,
+      // A step of nothing has no bar: the line runs on through its row.
+      from: steps[index]!.barY + (rows[index]!.value === 0 ? 0 : BAR),
       // Under words the line is only begun, so that it runs through none.
       to: stacked ? steps[index]!.barY + BAR + STUB : step.barY,
     })),

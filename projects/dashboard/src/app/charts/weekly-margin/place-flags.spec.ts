@@ -22,6 +22,20 @@ describe('placeFlags', () => {
     expect(flag?.anchor).toBe('start');
   });
 
+  it('a limit through the mark moves it off the line', () => {
+    const [flag] = placeFlags([{ x: 300, y: 100, text: 'Week 46: below' }], [], plot, [100]);
+    expect(Math.abs((flag?.y ?? 100) - 100)).toBeGreaterThan(9);
+  });
+
+  it('another mark at the left is not written over', () => {
+    const wishes = [
+      { x: 250, y: 100, text: 'Week 45: below' },
+      { x: 300, y: 100, text: 'Week 46: below' },
+    ];
+    const flags = placeFlags(wishes, [], plot);
+    expect(flags.map(({ anchor }) => anchor)).toEqual(['end', 'start']);
+  });
+
   it('neighbours never write over each other; the newest chooses first, one without a place is left out', () => {
     const tight = { left: 0, right: 150, top: 60, bottom: 140 };
     const wishes = Array.from({ length: 6 }, (_, index) => ({

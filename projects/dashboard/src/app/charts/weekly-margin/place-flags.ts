@@ -31,15 +31,20 @@ const FAR = 38;
 const STEPS_OF_LINE = 12;
 /** Steps of the line that a sentence may cover before it is left out; a step is about 2 px. */
 const MOST_COVERED = 8;
+/** What it costs to write across a level line, or over another mark, in steps of the line covered. */
+const ACROSS = 4;
+const OVER_MARK = 12;
+const MARK = 8;
 
 /**
  * Finds a place for each sentence: left of its mark, else right, above or below, near or a little off, inside the plot, on no other sentence, and over as
- * little of the joined line as can be. The last wish chooses first; one that finds no place is left out, its shape stays.
+ * little of the joined line, of other marks and of the `levels` (heights of lines drawn across the plot) as can be. The last wish chooses first; one that finds no place is left out, its shape stays.
  */
 export function placeFlags(
   wishes: readonly FlagWish[],
   line: readonly { readonly x: number; readonly y: number }[],
   plot: Box,
+  levels: readonly number[] = [],
 ): Flag[] {
   const taken: Box[] = [];
   const points = line.flatMap((point, index) => between(line[index - 1], point));
@@ -49,8 +54,16 @@ export function placeFlags(
       .filter(({ box }) => inside(box, plot) && !taken.some((other) => meet(box, other)))
       .map((candidate) => ({ ...candidate, covered: countCovered(candidate.box, points) }))
       .filter(({ covered }) => wish.must || covered <= MOST_COVERED)
-      .reduce<(Candidate & { covered: number }) | null>(
-        (least, next) => (least === null || next.covered < least.covered ? next : least),
+      .map(({ flag, box, covered }) => ({
+        flag,
+        box,
+        cost:
+          covered +
+          ACROSS * levels.filter((y) => y > box.top && y < box.bottom).length +
+          OVER_MARK * wishes.filter((other) => other !== wish && hides(box, other)).length,
+      }))
+      .reduce<(Candidate & { cost: number }) | null>(
+        (least, next) => (least === null || next.cost < least.cost ? next : least),
         null,
       );
     if (!best) continue;
@@ -110,6 +123,10 @@ function countCovered(box: Box, points: readonly { x: number; y: number }[]): nu
   return points.filter(
     ({ x, y }) => x > box.left - 4 && x < box.right + 4 && y > box.top - 4 && y < box.bottom + 4,
   ).length;
+}
+
+function hides(box: Box, { x, y }: FlagWish): boolean {
+  return x > box.left - MARK && x < box.right + MARK && y > box.top - MARK && y < box.bottom + MARK;
 }
 
 function inside(box: Box, plot: Box): boolean {

@@ -115,11 +115,24 @@ export function layOutWeeklyMargin(input: WeeklyMarginInput, width: number): Wee
     target: input.target === null ? null : yOf(input.target),
     join: join(weeks),
     weeks,
-    flags: placeFlags(wishes(input, weeks), drawn, { left, right, top: TOP - 10, bottom }),
+    flags: placeFlags(
+      wishes(input, weeks),
+      drawn,
+      { left, right, top: TOP - 10, bottom },
+      levels(input).map(yOf),
+    ),
     labels: words.map(({ value, word, role }, index) => ({ y: spread[index]!, value, word, role })),
     ...weekWords,
     start,
   };
+}
+
+/** Shares at which a line runs across the plot. */
+function levels({ limits, target }: WeeklyMarginInput): number[] {
+  return [
+    ...(limits ? [limits.upper, limits.centre, limits.lower] : []),
+    ...(target === null ? [] : [target]),
+  ];
 }
 
 interface EndWord extends Omit<EndLabel, 'y'> {
