@@ -16,6 +16,16 @@ describe('xmrLimits', () => {
     });
   });
 
+  it('given equal values whose sum rounds, still closes on them: a centre a hair aside would put all of them outside', () => {
+    for (let numerator = 1; numerator < 500; numerator += 1) {
+      const value = numerator / 870;
+      for (let n = 8; n <= 26; n += 1) {
+        const limits = xmrLimits(Array<number>(n).fill(value));
+        expect([limits?.lower, limits?.centre, limits?.upper]).toEqual([value, value, value]);
+      }
+    }
+  });
+
   it('given shares that swing widely, does not clip the limits to 0 … 1', () => {
     const limits = xmrLimits([0.1, 0.9, 0.1, 0.9]);
     expect(limits?.lower).toBeCloseTo(0.5 - (3 / 1.128) * 0.8, 12);

@@ -28,8 +28,19 @@ export function xmrLimits(values: ArrayLike<number>): XmrLimits | undefined {
     const before = requireFinite(values[index - 1], 'value');
     movingRanges[index - 1] = Math.abs(requireFinite(values[index], 'value') - before);
   }
-  const centre = compensatedSum(values) / n;
+  // A mean lies among its values; rounding could put that of equal ones a hair beside them, and every one outside.
+  const [least, most] = rangeOf(values);
+  const centre = Math.min(Math.max(compensatedSum(values) / n, least), most);
   const meanMovingRange = compensatedSum(movingRanges) / (n - 1);
   const reach = (3 / D2) * meanMovingRange;
   return { n, centre, lower: centre - reach, upper: centre + reach, meanMovingRange };
+}
+
+function rangeOf(values: ArrayLike<number>): [number, number] {
+  let [least, most] = [Infinity, -Infinity];
+  for (let index = 0; index < values.length; index += 1) {
+    least = Math.min(least, values[index] as number);
+    most = Math.max(most, values[index] as number);
+  }
+  return [least, most];
 }
