@@ -216,26 +216,34 @@ function expectedMoney(
   };
 }
 
+/** Every stage that is in an estimate as a matter of course. */
+const PLANNED = STAGES.filter((stage) => stage !== 'repair');
+
 function labour(
   stages: Record<Stage, number>,
   hourly: number,
 ): { labourCents: number; repairLabourCents: number } {
-  const planned = STAGES.filter((stage) => stage !== 'repair');
-  return {
-    labourCents: sum(planned.map((stage) => labourCents(stages[stage], hourly))),
-    repairLabourCents: labourCents(stages.repair, hourly),
-  };
+  let planned = 0;
+  for (const stage of PLANNED) planned += labourCents(stages[stage], hourly);
+  return { labourCents: planned, repairLabourCents: labourCents(stages.repair, hourly) };
 }
 
 function everyStage(stages: StageMinutes): Record<Stage, number> {
-  return Object.fromEntries(STAGES.map((stage) => [stage, stages[stage] ?? 0])) as Record<
-    Stage,
-    number
-  >;
+  return {
+    strip: stages.strip ?? 0,
+    clean: stages.clean ?? 0,
+    dry: stages.dry ?? 0,
+    repair: stages.repair ?? 0,
+    mask: stages.mask ?? 0,
+    apply: stages.apply ?? 0,
+    refit: stages.refit ?? 0,
+  };
 }
 
 function total(stages: Record<Stage, number>): number {
-  return sum(Object.values(stages));
+  let minutes = 0;
+  for (const stage of STAGES) minutes += stages[stage];
+  return minutes;
 }
 
 function sum(values: number[]): number {

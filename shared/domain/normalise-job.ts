@@ -114,6 +114,7 @@ export function referenced(
 
 /** Make and model as shown: NFC, trimmed, inner spaces collapsed; spelling kept. */
 function spoken(value: string): string {
+  if (/^[!-~]+(?: [!-~]+)*$/.test(value)) return value;
   return value.normalize('NFC').trim().replace(/\s+/gu, ' ');
 }
 

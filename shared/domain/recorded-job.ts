@@ -68,5 +68,7 @@ export function modelKey(make: string, model: string): string {
 
 /** One text folded for comparing without regard to case or spacing. */
 export function folded(text: string): string {
+  // Nearly all names are plain words, and every job has several: nothing to collapse, nothing to compose.
+  if (/^[!-~]+(?: [!-~]+)*$/.test(text)) return text.toLowerCase();
   return text.normalize('NFC').trim().replace(/\s+/gu, ' ').toLowerCase();
 }
