@@ -42,8 +42,8 @@ export async function up(knex: Knex): Promise<void> {
     appendOnly('job_revisions', 'update'),
     appendOnly('job_revisions', 'delete'),
     neverReplaced('job_revisions', 'job_id', 'revision'),
+    // Clustered as it is read, by branch and day: a year of a branch lies together on a few pages.
     `create table job_facts (
-      id integer primary key,
       job_id integer not null references jobs (id),
       gen_from integer not null,
       gen_to integer not null,
@@ -91,10 +91,10 @@ export async function up(knex: Knex): Promise<void> {
       missing_costs text,
       temperature_c real,
       humidity_pct real,
-      ${CHECKS.map((check) => `check_${check} text`).join(',\n      ')}
-    ) strict`,
+      ${CHECKS.map((check) => `check_${check} text`).join(',\n      ')},
+      primary key (branch_id, completed_on, job_id, gen_from)
+    ) strict, without rowid`,
     `create unique index job_facts_by_job on job_facts (job_id, gen_from)`,
-    `create index job_facts_by_day on job_facts (branch_id, completed_on)`,
     `create table job_products (
       job_id integer not null references jobs (id),
       product_id integer not null references products (id),
