@@ -23,9 +23,8 @@ export async function auditPage(page: Page): Promise<string[]> {
  */
 export async function untilStill(page: Page): Promise<void> {
   await page.evaluate(async () => {
-    const frame = () => new Promise((drawn) => requestAnimationFrame(drawn));
     for (let still = 0; still < 3; still = document.getAnimations().length === 0 ? still + 1 : 0) {
-      await frame();
+      await new Promise((drawn) => requestAnimationFrame(drawn));
     }
   });
 }

@@ -47,6 +47,7 @@ describe('the four roles', () => {
           .allInnerTexts(),
       ).toEqual(pages);
       await page.getByRole('button', { name: personOf(role).name }).click();
+      await page.getByRole('menuitem', { name: 'Sign out' }).waitFor();
       expect(await page.getByRole('menu').locator('a').allInnerTexts()).toEqual(menu);
     },
   );
@@ -79,6 +80,7 @@ describe('the four roles', () => {
     const page = await enter('regional_lead');
     await page.getByRole('button', { name: 'Branches: River Plain and Inner Sounds' }).click();
     const panel = page.getByRole('dialog', { name: 'Branches' });
+    await panel.getByRole('button', { name: 'Show' }).waitFor();
     const offered = await panel.locator('.member').allInnerTexts();
     expect(offered).toHaveLength(12);
     expect(offered).toEqual(expect.arrayContaining(['Havnsund', 'Teglmaur']));

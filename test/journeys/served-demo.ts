@@ -24,7 +24,13 @@ export async function serveDemo(): Promise<Served> {
   const folder = mkdtempSync(path.join(tmpdir(), 'underseam-journeys-'));
   const data = path.join(folder, 'data');
   mkdirSync(data);
-  const served = await serve(data, { UNDERSEAM_DEMO: 'on', UNDERSEAM_NOW: MONDAY_MORNING });
+  const served = await serve(data, {
+    UNDERSEAM_DEMO: 'on',
+    UNDERSEAM_NOW: MONDAY_MORNING,
+  }).catch((error: unknown) => {
+    rmSync(folder, { recursive: true, force: true });
+    throw error;
+  });
   const file = path.join(folder, 'served.json');
   writeFileSync(file, JSON.stringify({ url: served.url, data } satisfies Demo));
   process.env[HANDOVER] = file;

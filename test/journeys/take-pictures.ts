@@ -16,10 +16,13 @@ const FOLDER = path.join(root, 'projects/dashboard/pictures');
 /** A picture larger than this slows down whoever reads the README. */
 const MOST_BYTES = 300_000;
 
+/** A week that has something to tell. */
+const WEEK = '/this-week?week=2025-W45';
+
 const PICTURES = [
-  { name: 'this-week', path: '/this-week', size: LAPTOP, colorScheme: 'light' },
+  { name: 'this-week', path: WEEK, size: LAPTOP, colorScheme: 'light' },
   { name: 'overruns', path: '/overruns', size: LAPTOP, colorScheme: 'light' },
-  { name: 'this-week-phone-dark', path: '/this-week', size: PHONE, colorScheme: 'dark' },
+  { name: 'this-week-phone-dark', path: WEEK, size: PHONE, colorScheme: 'dark' },
 ] as const;
 
 async function takePictures(): Promise<void> {
