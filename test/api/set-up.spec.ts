@@ -40,6 +40,19 @@ describe('Set-up calls (rule 66)', () => {
     expect(second.status).toBe(200);
   });
 
+  it('given the first PUT of /api/network on an empty one, answers 201', async () => {
+    const empty = await TestApp.start();
+    try {
+      const token = await empty.signIn('first@network.example', 'head_office');
+      const body = { name: 'First', currency: 'EUR', feeRate: 0 };
+      // At once, so that both find it empty when they arrive.
+      const both = [1, 2].map(() => empty.call('put', '/api/network', { token, body }));
+      expect((await Promise.all(both)).map(({ status }) => status)).toEqual([201, 200]);
+    } finally {
+      await empty.stop();
+    }
+  });
+
   it('given PUT /api/network again, answers 200 with what counts from then on', async () => {
     const body = { name: 'Small', currency: 'EUR', feeRate: 0.05, targetMarginShare: 0.35 };
     const answer = await put('/api/network', body);

@@ -18,15 +18,16 @@ export function mountNetwork(mounting: Mounting, kit: Kit): void {
   mount(mounting, contract.putNetwork, async (call) => {
     const { feeRate, targetMarginShare = null, claimLimitCents = null, ...named } = call.body;
     const network = { ...named, targetMarginShare, claimLimitCents };
-    const wasSet = isNetworkSet(store.unscoped);
-    const before = readNetwork(store.unscoped);
     const { actor, at, subject } = deedOf(call, '/network');
     const fee = {
       kind: 'fee',
       from: FROM_THE_START,
       value: feeRateMicros(feeRate),
     } as const;
-    await store.restatement.apply(fee, () => {
+    const { recorded: wasSet } = await store.restatement.apply(fee, () => {
+      // Inside the write: of two at once, the second finds what the first has set.
+      const wasSet = isNetworkSet(store.unscoped);
+      const before = readNetwork(store.unscoped);
       putCost(store.unscoped, fee);
       writeNetwork(store.unscoped, network);
       recordAudit(store.unscoped, {
@@ -37,6 +38,7 @@ export function mountNetwork(mounting: Mounting, kit: Kit): void {
         branchId: null,
         detail: { before, after: { ...network, feeRate } },
       });
+      return wasSet;
     });
     return { status: wasSet ? 200 : 201, body: { ...network, feeRate } };
   });
