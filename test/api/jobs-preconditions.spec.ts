@@ -49,6 +49,19 @@ describe('The ETag of a job (rule 73)', () => {
   });
 });
 
+describe('GET with If-None-Match', () => {
+  it('given the tag of a revision whose figures were restated, answers them and not "unchanged"', async () => {
+    const ref = await stored();
+    // Said, because fetch would otherwise forbid the short answer by itself.
+    const headers = { 'if-none-match': await tagOf(ref), 'cache-control': 'max-age=0' };
+    const token = network.office;
+    const body = { hourlyCostCents: 7200 };
+    await app.call('put', '/api/branches/AAA/rates/2026-01-01', { token, body });
+    const answer = await app.call('get', at(ref), { token: network.manager, headers });
+    expect([answer.status, answer.body.money.labourCents]).toEqual([200, 88_200]);
+  });
+});
+
 describe('PUT with If-Match (rule 73)', () => {
   it('given the present tag, takes the correction; given it again, names who was faster', async () => {
     const ref = await stored();
