@@ -1,3 +1,4 @@
+import { gzipSync } from 'node:zlib';
 import { TestApp, type Answer } from '../support/app';
 import { makeSmallNetwork, validJob, type SmallNetwork } from '../support/small-network';
 
@@ -150,6 +151,34 @@ describe('POST of a batch that is refused as a whole (rule 58)', () => {
     expect(answer.status).toBe(413);
     expect(answer.headers.get('content-type')).toContain('application/problem+json');
     expect(answer.body.status).toBe(413);
+  });
+
+  it('given a single job of 3 MB, answers 413', async () => {
+    const body = `${JSON.stringify(validJob())}${' '.repeat(3 * 1024 * 1024)}`;
+    const path = '/api/branches/AAA/jobs/large';
+    const answer = await app.call('put', path, { token: network.keys['AAA'], body });
+    expect([answer.status, answer.body.status]).toEqual([413, 413]);
+  });
+
+  it('given a compressed body, reads it; one that grows past the limit answers 413, an unknown coding 415', async () => {
+    const post = async (body: Uint8Array<ArrayBuffer>, coding: string): Promise<number> => {
+      const { status } = await fetch(`${app.url}/api/branches/AAA/jobs/batch`, {
+        method: 'POST',
+        headers: {
+          authorization: `Bearer ${network.keys['AAA']}`,
+          'content-type': 'application/json',
+          'content-encoding': coding,
+        },
+        body,
+      });
+      return status;
+    };
+    const zipped = (text: string): Uint8Array<ArrayBuffer> => new Uint8Array(gzipSync(text));
+    const jobs = JSON.stringify({ jobs: [item('zipped')] });
+    expect(await post(zipped(jobs), 'gzip')).toBe(200);
+    expect(await post(zipped(jobs + ' '.repeat(64 * 1024 * 1024)), 'gzip')).toBe(413);
+    expect(await post(zipped(jobs).slice(0, 40), 'gzip')).toBe(400);
+    expect(await post(zipped(jobs), 'secret')).toBe(415);
   });
 
   it.each([
