@@ -144,7 +144,9 @@ export function largestStepText(row: JobRow): string {
   if (differenceOf(row) === null) return row.estimatedMinutes === null ? 'no estimate' : 'no norm';
   if (!hasStep(row)) return 'as planned';
   const { step, cents } = row.largestStep!;
-  return `${STEP_WORDS[step]} ${formatSignedAmount(cents)}`;
+  // The one long name is cut to its first word, so that the table fits beside the unbilled cars.
+  const name = step === 'consumables' ? 'consumables' : STEP_WORDS[step];
+  return `${name} ${formatSignedAmount(cents)}`;
 }
 
 function hasStep(row: JobRow): boolean {
