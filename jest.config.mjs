@@ -35,7 +35,7 @@ export default {
           },
         ],
       },
-      transformIgnorePatterns: ['node_modules/(?!(.*\\.mjs$|@angular|d3-|internmap|@mdi))'],
+      transformIgnorePatterns: ['node_modules/(?!(.*\\.mjs$|@angular|d3-|internmap))'],
     },
   ],
 };

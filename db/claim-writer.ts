@@ -1,5 +1,5 @@
 import { tellRevision, type SentRevision } from '#shared/domain/preconditions';
-import type { ClaimDecision } from '#shared/domain/vocabulary';
+import type { ClaimCause, ClaimDecision, Zone } from '#shared/domain/vocabulary';
 import type { Receipt } from './branch-writer';
 import type { Connection } from './database';
 import { recordAudit } from './queries/audit';
@@ -11,8 +11,8 @@ import { UnscopedDb } from './unscoped-db';
 export interface RecordedClaim {
   jobRef: string;
   madeOn: string;
-  zone: string;
-  cause: string;
+  zone: Zone;
+  cause: ClaimCause;
   /** As sent; what counts is `StoredClaim.decision`. */
   decision: ClaimDecision;
   decidedOn?: string;
@@ -127,7 +127,8 @@ export class ClaimWriter {
       content.labourMinutes ?? 0,
       content.productMl ?? 0,
       content.costCents ?? 0,
-      content.paidOn ?? null,
+      // What waits for head office is not paid yet, whatever the branch's books say.
+      claim.decision === 'open' ? null : (content.paidOn ?? null),
     ];
     const id = stored ? this.update(stored.id, values) : this.insert(claimRef, values);
     this.connection

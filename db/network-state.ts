@@ -61,12 +61,6 @@ export class NetworkState {
     return this.packages.get(code);
   }
 
-  /** The code of a package id. */
-  packageCode(id: number): string {
-    for (const entry of this.packages.values()) if (entry.id === id) return entry.code;
-    throw new Error(`no package has the id ${id}`);
-  }
-
   private costEntries(): CostChange[] {
     const rates = this.connection.all<{ code: string; from_date: string; value: number }>(
       sql('branch_rates')

@@ -1,5 +1,5 @@
-import { mkdirSync } from 'node:fs';
-import { join } from 'node:path';
+import { accessSync, constants, existsSync, mkdirSync } from 'node:fs';
+import { dirname, join, resolve } from 'node:path';
 import { DatabaseRefused, openDatabase, openReader, type Connection } from './database';
 import { NetworkState } from './network-state';
 import { recoverGenerations, Restatement } from './restatement';
@@ -31,6 +31,8 @@ export class Store {
   /** Opens (and on first use makes) the data folder's database. Throws `DatabaseRefused` with one clear sentence. */
   static async open(folder: string): Promise<Store> {
     try {
+      // Asked first, because making a folder below one that refuses can hang instead of failing.
+      accessSync(nearestFolder(folder), constants.W_OK);
       mkdirSync(folder, { recursive: true });
     } catch {
       throw new DatabaseRefused(
@@ -60,4 +62,11 @@ export class Store {
     this.writing.driver.pragma('optimize');
     this.writing.close();
   }
+}
+
+/** The folder itself, or the nearest one above it that exists. */
+function nearestFolder(folder: string): string {
+  let at = resolve(folder);
+  while (!existsSync(at) && dirname(at) !== at) at = dirname(at);
+  return at;
 }

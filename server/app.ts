@@ -37,26 +37,30 @@ export interface App {
 export function createApp(kit: Kit, log: Logger, dashboard: string): App {
   const app = express();
   app.disable('x-powered-by');
+  // A job's entity tag is its revision; nothing else is cached.
+  app.set('etag', false);
   app.set('query parser', 'simple');
   app.set('trust proxy', 'loopback');
   app.use(helmet({ contentSecurityPolicy: false }));
   app.use(compression({ filter: isText }));
-  app.use(
-    pinoHttp({
-      logger: log,
-      useLevel: 'debug',
-      autoLogging: log.isLevelEnabled('debug'),
-      // No header goes into a log: tokens, cookies and keys travel in them.
-      serializers: {
-        req: ({ id, method, url }: { id: unknown; method: string; url: string }) => ({
-          id,
-          method,
-          url,
-        }),
-        res: ({ statusCode }: { statusCode: number }) => ({ statusCode }),
-      },
-    }),
-  );
+  // Only where somebody reads it, because it costs every request.
+  if (log.isLevelEnabled('debug')) {
+    app.use(
+      pinoHttp({
+        logger: log,
+        useLevel: 'debug',
+        // No header goes into a log: tokens, cookies and keys travel in them.
+        serializers: {
+          req: ({ id, method, url }: { id: unknown; method: string; url: string }) => ({
+            id,
+            method,
+            url,
+          }),
+          res: ({ statusCode }: { statusCode: number }) => ({ statusCode }),
+        },
+      }),
+    );
+  }
 
   app.use(attemptLimits());
   const router = Router();

@@ -22,7 +22,7 @@ export interface Deed {
 export interface AuditEntry {
   at: string;
   actor: Actor;
-  /** What was done, a verb and a thing: `job.void`, `rate.set`, `export.margin`. */
+  /** What was done, a verb and a thing: `job.void`, `cost.set`, `export.margin`. */
   action: string;
   /** What it was done to, as a path without `/api`. */
   subject: string;

@@ -1,5 +1,8 @@
+import { dirname } from 'node:path';
 import { static as serveFolder, type Request, type Response, type Router } from 'express';
-import { getAbsoluteFSPath } from 'swagger-ui-dist';
+
+/** Its folder only: loading the package itself would run the whole reader at every start. */
+const READER = dirname(require.resolve('swagger-ui-dist/package.json'));
 
 const PAGE = `<!doctype html>
 <html lang="en">
@@ -40,5 +43,5 @@ export function mountDocs(router: Router, description: () => unknown): void {
   router.get('/api/docs/open.js', (_request: Request, response: Response) => {
     response.type('text/javascript').send(OPEN);
   });
-  router.use('/api/docs', serveFolder(getAbsoluteFSPath(), { index: false, maxAge: '1d' }));
+  router.use('/api/docs', serveFolder(READER, { index: false, maxAge: '1d' }));
 }

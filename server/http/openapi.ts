@@ -1,6 +1,8 @@
 import * as z from 'zod';
 import type { Endpoint } from '#shared/contracts/endpoint';
-import { problemDocument } from '#shared/contracts/fields';
+import { claimContent, putClaimBatch } from '#shared/contracts/claims';
+import { problemDocument, reference } from '#shared/contracts/fields';
+import { jobContent, putJobBatch } from '#shared/contracts/jobs';
 
 type Json = Record<string, unknown>;
 
@@ -53,11 +55,28 @@ function operation(endpoint: Endpoint): Json {
     ...(endpoint.body && {
       requestBody: {
         required: true,
-        content: { 'application/json': { schema: schemaOf(endpoint.body, 'input') } },
+        content: { 'application/json': { schema: bodyOf(endpoint, endpoint.body) } },
       },
     }),
     responses: { ...successes(endpoint), default: PROBLEM },
   };
+}
+
+/** Items of a batch are judged one by one, so its contract leaves them open; here they are told. */
+const BATCH_ITEMS: ReadonlyMap<string, z.ZodType> = new Map<string, z.ZodType>([
+  [putJobBatch.path, jobContent.extend({ jobRef: reference })],
+  [putClaimBatch.path, claimContent.extend({ claimRef: reference })],
+]);
+
+function bodyOf(endpoint: Endpoint, body: z.ZodType): Json {
+  const schema = schemaOf(body, 'input');
+  const item = BATCH_ITEMS.get(endpoint.path);
+  if (item) {
+    for (const list of Object.values(schema['properties'] as Record<string, Json>)) {
+      list['items'] = schemaOf(item, 'input');
+    }
+  }
+  return schema;
 }
 
 const PROBLEM: Json = {

@@ -48,11 +48,6 @@ export function defineEndpoint<
   return endpoint;
 }
 
-/** The parsed body of a call, or `undefined` when it takes none. */
-export type BodyOf<E extends Endpoint> = E['body'] extends z.ZodType
-  ? z.output<E['body']>
-  : undefined;
-
 /** What the call answers, as parsed JSON. */
 export type OutOf<E extends Endpoint> = E['out'] extends z.ZodType
   ? z.output<E['out']>

@@ -13,7 +13,7 @@ export const minutes = z.int().min(0).max(100_000);
 export const millilitres = z.int().min(0).max(1_000_000);
 /** A signed sum of minor units in an answer. */
 export const centsSum = z.int();
-/** A fraction 0 … 1 in an answer, or null where rule 13 withholds it. */
+/** A share, ratio or quantile in an answer, unrounded; null where there is nothing to say it of or rule 13 withholds it. */
 export const share = z.number().nullable();
 
 export const date = z.string().refine(isDate, 'a date is written YYYY-MM-DD');
@@ -31,6 +31,8 @@ export const reference = z
       .min(1, 'a reference has 1 to 64 characters')
       .refine((text) => [...text].length <= 64, 'a reference has 1 to 64 characters')
       .refine((text) => text === text.trim(), 'a reference has no space at its edges')
+      // A client that tidies addresses takes these two out of a path: the job could never be read again.
+      .refine((text) => text !== '.' && text !== '..', 'a reference is more than dots')
       .refine(
         (text) => !CONTROL_OR_LONE_SURROGATE.test(text),
         'a reference has no control characters',
@@ -96,7 +98,12 @@ export type ScopeQuery = z.output<typeof scopeQuery>;
 
 /** `?limit=&cursor=` of a list (rule 67). */
 export const pageQuery = {
-  limit: z.coerce.number().int().min(1).max(200).default(50),
+  limit: z
+    .string()
+    .regex(/^\d{1,9}$/, 'a whole number from 1 to 200')
+    .transform(Number)
+    .pipe(z.int().min(1).max(200))
+    .default(50),
   cursor: z.string().max(1000).optional(),
 };
 /** `true` or `false` in a query. */
@@ -125,10 +132,6 @@ export type FieldProblem = { path: string; message: string };
 
 /** Access lists by role (rule 23). */
 export const EVERYONE = { roles: ROLES, pushKey: false } as const;
-export const RECORDERS = {
-  roles: ['recorder', 'site_manager', 'head_office'],
-  pushKey: false,
-} as const;
 export const SENDERS = {
   roles: ['recorder', 'site_manager', 'head_office'],
   pushKey: true,

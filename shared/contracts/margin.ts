@@ -12,7 +12,6 @@ import {
 } from './fields';
 
 export const WEEK_SIGNALS = ['outside_low', 'outside_high', 'run_low', 'run_high'] as const;
-export type WeekSignal = (typeof WEEK_SIGNALS)[number];
 
 export const marginWeek = z.strictObject({
   week: z.string(),
@@ -64,7 +63,7 @@ export const marginAnswer = z.strictObject({
     .nullable(),
   trend: z.strictObject({ slopePerWeek: z.number(), p: z.number() }).nullable(),
   bridge,
-  /** Present when exactly one branch is asked for, or one target holds for all: the target line (rule 80). */
+  /** The target that holds (rule 80): a single branch's own, else the network's; null when none is set. */
   targetMarginShare: z.number().nullable(),
 });
 export type MarginAnswer = z.output<typeof marginAnswer>;

@@ -123,7 +123,7 @@ describe('GET /api/analytics/margin', () => {
     ['?from=1000-01-01&to=2026-01-01', ['/query/from']],
     ['?from=2026-02-30', ['/query/from']],
     ['?package=nothing', ['/query/package']],
-    ['?bodyType=boat', ['/query/bodyType/0']],
+    ['?bodyType=boat', ['/query/bodyType']],
     ['?form=2026-01-01', ['/query/form']],
   ])('given %s, is refused with every field named', async (query, paths) => {
     const { status, body } = await margin(query);

@@ -14,49 +14,67 @@ const SECRET = 'be'.repeat(32);
 const KEY = `usk_${KEY_ID}_${SECRET}`;
 const BATCH = 500;
 
+type Way = 'batch' | 'single';
+/** Comparisons of each way; the middle one counts, since a disk's pace changes from minute to minute. */
+const ROUNDS = 5;
+
 /** Batch and single ingest through the API, against the bare engine writing the same rows with commits as durable. */
 export async function benchIngest(folder: string, jobs: number, today: string): Promise<Line[]> {
   const lines: Line[] = [];
   for (const way of ['batch', 'single'] as const) {
-    const data = join(folder, way);
-    await prepare(data);
-    const served = await serve(data, { UNDERSEAM_NOW: `${today}T12:00:00Z` });
-    const agent = new Agent({ keepAlive: true, maxSockets: 16 });
-    const bodies = way === 'batch' ? batchBodies(jobs, today) : singleBodies(jobs, today);
-    // A few requests first, so that neither side is measured cold.
-    const warm = jobMaker(7, today, 700);
-    for (let index = 0; index < 50; index += 1) {
-      const { content } = warm(index);
-      await send(agent, served.url, 'PUT', `/jobs/warm${index}`, JSON.stringify(content));
+    const rounds: Compared[] = [];
+    for (let round = 0; round < ROUNDS; round += 1) {
+      rounds.push(await compare(join(folder, `${way}-${round}`), way, jobs, today));
     }
-    const begun = performance.now();
-    await inParallel(bodies, way === 'batch' ? 2 : 16, ({ method, path, body }) =>
-      send(agent, served.url, method, path, body),
-    );
-    const seconds = (performance.now() - begun) / 1000;
-    agent.destroy();
-    await served.stop();
-    const reader = openReader(join(data, 'underseam.sqlite'));
-    const replay = recordRows(reader);
-    reader.close();
-    const rows = replay.jobs.reduce((all, job) => all + job.length, 0);
-    const bare = await writeBare(replay, folder, `bare-${way}.sqlite`, way === 'batch' ? BATCH : 1);
-    const bareRate = replay.jobs.length / bare;
-    lines.push(
-      ratioLine(
-        way === 'batch'
-          ? `batches of ${BATCH} at 2 connections, jobs a second`
-          : 'single PUTs at 16 connections, jobs a second',
-        jobs / seconds,
-        way === 'batch'
-          ? `bare engine, ${BATCH} jobs a commit (${(rows / replay.jobs.length).toFixed(1)} rows a job)`
-          : 'bare engine, one job a commit',
-        bareRate,
-        'aim at least 0.5',
-      ),
-    );
+    rounds.sort((a, b) => a.ours / a.theirs - b.ours / b.theirs);
+    const { ours, theirs, rowsPerJob } = rounds[Math.floor(ROUNDS / 2)] as Compared;
+    const [what, yardstick] =
+      way === 'batch'
+        ? [
+            `batches of ${BATCH} at 2 connections, jobs a second`,
+            `bare engine, ${BATCH} jobs a commit (${rowsPerJob.toFixed(1)} rows a job)`,
+          ]
+        : ['single PUTs at 16 connections, jobs a second', 'bare engine, one job a commit'];
+    lines.push(ratioLine(what, ours, yardstick, theirs, 'aim at least 0.5'));
   }
   return lines;
+}
+
+interface Compared {
+  ours: number;
+  theirs: number;
+  rowsPerJob: number;
+}
+
+/** Sends jobs through a server of its own, then writes the very same rows bare; jobs a second of both. */
+async function compare(folder: string, way: Way, jobs: number, today: string): Promise<Compared> {
+  await prepare(folder);
+  const served = await serve(folder, { UNDERSEAM_NOW: `${today}T12:00:00Z` });
+  const agent = new Agent({ keepAlive: true, maxSockets: 16 });
+  const bodies = way === 'batch' ? batchBodies(jobs, today) : singleBodies(jobs, today);
+  // Some first, so that neither side is measured cold.
+  const warm = jobMaker(7, today, 700);
+  for (let index = 0; index < 300; index += 1) {
+    const { content } = warm(index);
+    await send(agent, served.url, 'PUT', `/jobs/warm${index}`, JSON.stringify(content));
+  }
+  const begun = performance.now();
+  await inParallel(bodies, way === 'batch' ? 2 : 16, ({ method, path, body }) =>
+    send(agent, served.url, method, path, body),
+  );
+  const seconds = (performance.now() - begun) / 1000;
+  agent.destroy();
+  await served.stop();
+  const reader = openReader(join(folder, 'underseam.sqlite'));
+  const replay = recordRows(reader);
+  reader.close();
+  const rows = replay.jobs.reduce((all, job) => all + job.length, 0);
+  const bare = await writeBare(replay, folder, 'bare.sqlite', way === 'batch' ? BATCH : 1);
+  return {
+    ours: jobs / seconds,
+    theirs: replay.jobs.length / bare,
+    rowsPerJob: rows / replay.jobs.length,
+  };
 }
 
 async function prepare(data: string): Promise<void> {

@@ -16,7 +16,7 @@ async function main(): Promise<void> {
   const today = '2026-02-02';
   const folder = mkdtempSync(join(tmpdir(), 'underseam-bench-'));
   const benches: Record<string, () => Promise<Line[]>> = {
-    ingest: () => benchIngest(folder, 10_000, today),
+    ingest: () => benchIngest(folder, 5_000, today),
     reads: () => benchReads(folder, jobs, today),
     page: async () => {
       const browser = askModule(FIND_CHROMIUM, 'findChromium', []);

@@ -11,7 +11,7 @@ export function readOnThisThread(store: Store): Pick<ReadPool, 'answer'> & { str
   const answers = { margin: answerMargin, overrun: answerOverrun, jobs: listJobs };
   return {
     answer: async (name, scope, input) =>
-      answers[name](store.scoped(scope), input as never) as never,
+      answers[name](store.scoped(scope), input as never),
     stream: (name: 'margin' | 'overrun' | 'jobs', scope: Scope, input: unknown) => ({
       async *[Symbol.asyncIterator]() {
         yield* csvChunks(store.scoped(scope), name, input);

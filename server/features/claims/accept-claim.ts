@@ -92,23 +92,18 @@ function decided(
     }
     const content = { ...sent, decision: stored?.content.decision ?? 'open' };
     const waiting = stored?.proposed ?? (raised && before !== 'open' ? before : null);
-    return checked(content, standing, waiting);
+    return kept(content, standing, waiting);
   }
-  if (!above) return checked(sent, sent.decision, null);
+  if (!above) return kept(sent, sent.decision, null);
   const asks = sent.decision !== 'open' && sent.decision !== standing;
-  return checked(sent, standing, asks ? sent.decision : null);
+  return kept(sent, standing, asks ? sent.decision : null);
 }
 
-function checked(
+function kept(
   content: RecordedClaim,
   decision: ClaimDecision,
   proposed: ClaimDecision | null,
 ): DecidedClaim {
-  if (decision === 'open' && content.paidOn !== undefined) {
-    throw refuseInput([
-      { path: '/paidOn', message: 'the cost is above the claim limit: head office decides first' },
-    ]);
-  }
   return { content, text: JSON.stringify(content), decision, proposed };
 }
 

@@ -86,7 +86,7 @@ export function mountClaims(mounting: Mounting, kit: Kit): void {
         branch: branch.code,
         claimRef: call.params.claimRef,
         revision: found.revision,
-      } as never,
+      },
       headers: { ETag: tagOf(found.revision) },
     };
   });
