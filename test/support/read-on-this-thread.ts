@@ -10,8 +10,7 @@ import type { ReadPool } from '#server/workers/read-pool';
 export function readOnThisThread(store: Store): Pick<ReadPool, 'answer'> & { stream: unknown } {
   const answers = { margin: answerMargin, overrun: answerOverrun, jobs: listJobs };
   return {
-    answer: async (name, scope, input) =>
-      answers[name](store.scoped(scope), input as never),
+    answer: async (name, scope, input) => answers[name](store.scoped(scope), input as never),
     stream: (name: 'margin' | 'overrun' | 'jobs', scope: Scope, input: unknown) => ({
       async *[Symbol.asyncIterator]() {
         yield* csvChunks(store.scoped(scope), name, input);
