@@ -29,7 +29,8 @@ export class WriteQueue {
       this.waiting.push({ work, resolve: resolve as (value: unknown) => void, reject });
       if (this.scheduled) return;
       this.scheduled = true;
-      setImmediate(() => this.commitWaiting());
+      // One more turn, so that requests whose bodies arrive meanwhile share this commit: it costs far more than the wait.
+      setImmediate(() => setImmediate(() => this.commitWaiting()));
     });
   }
 

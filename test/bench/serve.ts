@@ -38,10 +38,12 @@ export async function serve(
     child.once('exit', () => reject(new Error(`the server ended: ${said}`)));
   });
   // A bench that fails must not leave its server behind.
-  process.once('exit', () => child.kill('SIGKILL'));
+  const end = (): boolean => child.kill('SIGKILL');
+  process.once('exit', end);
   return {
     url,
     stop: async () => {
+      process.off('exit', end);
       if (child.exitCode !== null) return;
       child.kill('SIGTERM');
       await once(child, 'exit');
