@@ -24,8 +24,8 @@ describe('checkPlacing', () => {
   });
 
   it('given codes that are not known, names each where it stands', () => {
-    expect(checkPlacing({ role: 'recorder', branches: ['AAA', 'XXX', 'YYY'] }, KNOWN)).toEqual([
-      { path: '/branches/1', message: 'there is no branch with the code "XXX"' },
+    expect(checkPlacing({ role: 'recorder', branches: ['AAA', 'ZZZ', 'YYY'] }, KNOWN)).toEqual([
+      { path: '/branches/1', message: 'there is no branch with the code "ZZZ"' },
       { path: '/branches/2', message: 'there is no branch with the code "YYY"' },
     ]);
   });

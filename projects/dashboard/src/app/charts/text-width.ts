@@ -41,3 +41,8 @@ export function textWidth(text: string, weight: 400 | 600 = 400, fontSize = 14):
 export function widestText(texts: readonly string[], weight: 400 | 600 = 400): number {
   return texts.reduce((widest, text) => Math.max(widest, textWidth(text, weight)), 0);
 }
+
+/** Width of the words that stand on the hatching of a row with too few cars. */
+export function hatchWords(text: string): number {
+  return textWidth(text) + 12;
+}

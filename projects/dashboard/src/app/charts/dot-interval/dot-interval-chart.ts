@@ -1,7 +1,8 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import { measuredWidth } from '../measured-width';
+import { hatchWords } from '../text-width';
 import type { DotIntervalInput } from './dot-interval-input';
-import { hatchWords, layOutDotInterval, type PlacedInterval } from './dot-interval-layout';
+import { layOutDotInterval, type PlacedInterval } from './dot-interval-layout';
 
 let charts = 0;
 

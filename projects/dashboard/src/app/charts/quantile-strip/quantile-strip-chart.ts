@@ -1,6 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import { measuredWidth } from '../measured-width';
-import { textWidth } from '../text-width';
+import { hatchWords } from '../text-width';
 import type { QuantileStripInput } from './quantile-strip-input';
 import { layOutQuantileStrip } from './quantile-strip-layout';
 
@@ -22,8 +22,5 @@ export class QuantileStripChart {
   protected readonly picture = computed(() =>
     this.width() > 0 ? layOutQuantileStrip(this.data(), this.width()) : undefined,
   );
-
-  protected hatchWords(text: string): number {
-    return textWidth(text) + 12;
-  }
+  protected readonly hatchWords = hatchWords;
 }
