@@ -1,4 +1,4 @@
-import type { JobFigures } from '#shared/domain/job-figures';
+import { expectedMarginCents, marginCents, type JobFigures } from '#shared/domain/job-figures';
 import { folded, modelKey, type RecordedJob } from '#shared/domain/recorded-job';
 import { AGE_BANDS, CHECKS, STAGES } from '#shared/domain/vocabulary';
 
@@ -29,11 +29,25 @@ export const FACT_COLUMNS = [
   ...['package_id', 'has_rot', 'billed', 'warranty_months'],
   ...STAGES.map((stage) => `est_${stage}`),
   ...STAGES.map((stage) => `act_${stage}`),
-  ...['est_minutes', 'act_minutes', 'has_estimate', 'has_quote', 'charged_repair_minutes'],
+  ...['est_minutes', 'act_minutes', 'has_estimate', 'charged_repair_minutes'],
   ...['extra_minutes', 'extra_cents', 'costed', 'revenue_cents', 'labour_cents'],
-  ...['repair_labour_cents', 'product_cents', 'consumables_cents', 'bought_in_cents', 'fee_cents'],
+  ...[
+    'repair_labour_cents',
+    'product_cents',
+    'consumables_cents',
+    'bought_in_cents',
+    'fee_cents',
+    'margin_cents',
+  ],
   ...['expected', 'exp_price_cents', 'exp_labour_cents', 'exp_repair_labour_cents'],
-  ...['exp_product_cents', 'exp_fee_cents', 'missing_costs', 'temperature_c', 'humidity_pct'],
+  ...[
+    'exp_product_cents',
+    'exp_fee_cents',
+    'exp_margin_cents',
+    'missing_costs',
+    'temperature_c',
+    'humidity_pct',
+  ],
   ...CHECKS.map(
     (check) => `check_${check.replace(/[A-Z]/g, (letter) => `_${letter.toLowerCase()}`)}`,
   ),
@@ -70,7 +84,6 @@ export function factValues(id: JobIdentity, job: RecordedJob, figures: JobFigure
     figures.estimatedMinutes,
     figures.actualMinutes,
     bit(figures.hasEstimate),
-    bit(figures.hasQuote),
     figures.chargedRepairMinutes,
     figures.extraMinutes,
     figures.extraCents,
@@ -82,12 +95,14 @@ export function factValues(id: JobIdentity, job: RecordedJob, figures: JobFigure
     money?.consumablesCents ?? 0,
     money?.boughtInCents ?? 0,
     money?.feeCents ?? 0,
+    money ? marginCents(money) : 0,
     bit(money !== undefined && expected !== undefined),
     expected?.priceCents ?? 0,
     expected?.labourCents ?? 0,
     expected?.repairLabourCents ?? 0,
     expected?.productCents ?? 0,
     expected?.feeCents ?? 0,
+    expected ? expectedMarginCents(expected) : 0,
     figures.missing.length > 0 ? JSON.stringify(figures.missing) : null,
     job.workshop?.temperatureC ?? null,
     job.workshop?.humidityPct ?? null,

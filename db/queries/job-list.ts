@@ -64,19 +64,14 @@ export interface ListedJob {
   exp_fee_cents: number;
 }
 
-const COST =
-  'labour_cents + repair_labour_cents + product_cents + consumables_cents + bought_in_cents';
-const MARGIN = `revenue_cents - (${COST}) - fee_cents`;
-const EXPECTED =
-  'exp_price_cents - exp_labour_cents - exp_repair_labour_cents - exp_product_cents - exp_fee_cents';
 /** Sorts behind every real value. */
 const LAST = '9007199254740991';
 
 /** Each sort as one value that rises; rows it says nothing of come last. */
 const SORT_KEYS: Record<JobSort, string> = {
   completed: '0',
-  margin: `case when billed = 1 and costed = 1 then ${MARGIN} else ${LAST} end`,
-  difference: `case when billed = 1 and costed = 1 and expected = 1 then (${MARGIN}) - (${EXPECTED}) else ${LAST} end`,
+  margin: `case when billed = 1 and costed = 1 then margin_cents else ${LAST} end`,
+  difference: `case when billed = 1 and costed = 1 and expected = 1 then margin_cents - exp_margin_cents else ${LAST} end`,
   overrun: `case when has_estimate = 1 then est_minutes - act_minutes else ${LAST} end`,
   waiting: `case when billed = 0 then cast(replace(completed_on, '-', '') as integer) else ${LAST} end`,
 };

@@ -90,10 +90,7 @@ export function listBilledWeeks(
       .limit(limit)
       .select(
         'week',
-        sql.raw(
-          `sum(revenue_cents) as "revenueCents", sum(revenue_cents - labour_cents - repair_labour_cents
-          - product_cents - consumables_cents - bought_in_cents - fee_cents) as "marginCents"`,
-        ),
+        sql.raw(`sum(revenue_cents) as "revenueCents", sum(margin_cents) as "marginCents"`),
       ),
   );
 }

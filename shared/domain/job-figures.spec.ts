@@ -73,7 +73,6 @@ describe('deriveFigures of the example', () => {
       ageBand: '15-19',
       hasRot: true,
       billed: true,
-      hasQuote: true,
       hasEstimate: true,
       estimatedMinutes: 405,
       actualMinutes: 735,
@@ -150,7 +149,6 @@ describe('deriveFigures on estimate and invoice', () => {
     const made = figures({ estimate: { priceCents: 100, stages: {} } });
     expect(made).toMatchObject({
       hasEstimate: false,
-      hasQuote: true,
       expected: { priceCents: 100 },
     });
   });

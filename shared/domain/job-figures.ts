@@ -39,7 +39,6 @@ export interface JobFigures {
   ageBand: AgeBand;
   hasRot: boolean;
   billed: boolean;
-  hasQuote: boolean;
   /** An estimate of more than 0 minutes (rule 12). */
   hasEstimate: boolean;
   estimated: Record<Stage, number>;
@@ -78,7 +77,6 @@ export function deriveFigures(job: RecordedJob, branch: string, costs: CostBook)
     ageBand: ageBand(ageInYears(job.vehicle.firstRegistered, on)),
     hasRot: (job.findings ?? []).some(isRot),
     billed: job.invoice !== undefined,
-    hasQuote: job.estimate !== undefined,
     hasEstimate: estimatedMinutes > 0,
     estimated,
     actual,
