@@ -59,7 +59,9 @@ export class UnbilledCars {
     from: this.list().items[0]?.completedOn,
     to: this.until(),
   }));
-  protected readonly all = computed(() => `All ${formatCount(this.list().jobs)} in Jobs`);
+  protected readonly all = computed(() =>
+    this.list().jobs === 1 ? 'This one in Jobs' : `All ${formatCount(this.list().jobs)} in Jobs`,
+  );
   private readonly severalBranches = computed(
     () => new Set(this.list().items.map(({ branch }) => branch)).size > 1,
   );
