@@ -36,7 +36,12 @@ export async function benchPage(folder: string, executablePath: string): Promise
       const page = await context.newPage();
       begun = performance.now();
       await page.goto(`${served.url}/this-week`);
-      await page.locator('us-weekly-margin-chart svg').first().waitFor();
+      // Looked for at every frame: a locator looks again only after half a second.
+      await page.waitForFunction(
+        () => document.querySelector('us-weekly-margin-chart svg circle') !== null,
+        undefined,
+        { polling: 'raf' },
+      );
       views.push(performance.now() - begun);
       await context.close();
     }
