@@ -59,8 +59,7 @@ function merged(
   stored: RecordedJob | undefined,
   money: Sending['money'],
 ): RecordedJob {
-  const named: SentJob = { ...sent, findings: sent.findings && referenced(sent.findings) };
-  const whole = stored && money === 'unseen' ? keepStoredMoney(named, stored) : named;
+  const whole = stored && money === 'unseen' ? keepStoredMoney(named(sent), stored) : sent;
   const invoice = whole.invoice === undefined ? stored?.invoice : (whole.invoice ?? undefined);
   if (invoice && invoice.totalCents === undefined) {
     throw refuseInput([INVOICE_TOTAL_MISSING]);
@@ -69,4 +68,9 @@ function merged(
     ...whole,
     invoice: invoice as RecordedJob['invoice'],
   });
+}
+
+/** The job with every finding's reference, by which stored money is found again. */
+function named(sent: SentJob): SentJob {
+  return { ...sent, findings: sent.findings && referenced(sent.findings) };
 }
