@@ -99,7 +99,12 @@ export const layers = [
   },
   {
     folder: 'projects/dashboard/src/app/underside-map',
-    reaches: ['shared', 'projects/dashboard/src/theme'],
+    reaches: [
+      'shared',
+      'projects/dashboard/src/app/ui',
+      'projects/dashboard/src/app/charts',
+      'projects/dashboard/src/theme',
+    ],
     notPackages: ['@angular/common/http', '@angular/router'],
     because:
       'the underside map takes data in and gives a picture out: no HTTP, no session, no router, no feature.',
