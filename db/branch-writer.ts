@@ -211,7 +211,8 @@ export class BranchWriter {
     insertReceived(this.connection, id, this.branch.code, job, this.state);
     const finding = this.connection.prepare(
       `insert into job_findings (job_id, ref, branch_id, zone, side, seen_as, worked_as, structural,
-        action, repair_minutes, charged_cents) values (?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?)`,
+        action, repair_minutes, charged_cents, completed_on, vehicle_key)
+        values (?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?)`,
     );
     for (const found of job.findings ?? []) {
       finding.run(
@@ -226,6 +227,8 @@ export class BranchWriter {
         found.action,
         found.repairMinutes ?? 0,
         found.chargedCents ?? 0,
+        job.completedOn,
+        job.vehicle.key ?? null,
       );
     }
     (job.consumables ?? []).forEach((line, index) => {

@@ -8,12 +8,17 @@ import { NO_END } from './tables';
 
 const INSERT_FACTS = `insert into job_facts (gen_from, gen_to, ${FACT_COLUMNS.join(', ')})
   values (?, ?, ${FACT_COLUMNS.map(() => '?').join(', ')})`;
-const INSERT_PRODUCT = `insert into job_products
-  (job_id, product_id, branch_id, gen_from, gen_to, ml, cost_cents) values (?, ?, ?, ?, ?, ?, ?)`;
+const INSERT_PRODUCT = `insert into job_products (branch_id, completed_on, job_id, product_id, gen_from,
+  gen_to, package_id, body_type, temperature_c, ml, cost_cents) values (?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?)`;
+/** Products lie by branch and day like the facts, and are found through them. */
+const PRODUCTS_OF = `(branch_id, completed_on, job_id) in
+  (select branch_id, completed_on, job_id from job_facts where job_id = ?)`;
 
 /** The rows that follow from a job's content and a cost book. */
 export interface DerivedRows {
   facts: FactValue[];
+  /** What a product's row repeats of its job. */
+  car: { completedOn: string; bodyType: string; temperatureC: number | null };
   products: { productId: number; ml: number; costCents: number | null }[];
 }
 
@@ -26,7 +31,15 @@ export function deriveRows(
   state: Pick<NetworkState, 'productId'>,
 ): DerivedRows {
   const figures = deriveFigures(job, branchCode, costs);
-  return { facts: factValues(id, job, figures), products: productRows(figures, state) };
+  return {
+    facts: factValues(id, job, figures),
+    car: {
+      completedOn: job.completedOn,
+      bodyType: job.vehicle.bodyType,
+      temperatureC: job.workshop?.temperatureC ?? null,
+    },
+    products: productRows(figures, state),
+  };
 }
 
 /** Writes the rows of a job as visible from one generation up to (not including) another. */
@@ -38,8 +51,21 @@ export function insertDerived(
 ): void {
   connection.prepare(INSERT_FACTS).run(window.from, window.to, ...rows.facts);
   const insert = connection.prepare(INSERT_PRODUCT);
+  const { car } = rows;
   for (const { productId, ml, costCents } of rows.products) {
-    insert.run(id.jobId, productId, id.branchId, window.from, window.to, ml, costCents);
+    insert.run(
+      id.branchId,
+      car.completedOn,
+      id.jobId,
+      productId,
+      window.from,
+      window.to,
+      id.packageId,
+      car.bodyType,
+      car.temperatureC,
+      ml,
+      costCents,
+    );
   }
 }
 
@@ -71,8 +97,36 @@ export function insertReceived(
 
 /** Removes every derived row of a job, in all generations. */
 export function removeDerived(connection: Connection, jobId: number): void {
+  connection.prepare(`delete from job_products where ${PRODUCTS_OF}`).run(jobId);
   connection.prepare('delete from job_facts where job_id = ?').run(jobId);
-  connection.prepare('delete from job_products where job_id = ?').run(jobId);
+}
+
+/** Ends the rows of a job that have no end yet: visible before a generation, no more in it. */
+export function endDerived(connection: Connection, jobId: number, generation: number): void {
+  connection
+    .prepare(`update job_products set gen_to = ? where gen_to = ? and ${PRODUCTS_OF}`)
+    .run(generation, NO_END, jobId);
+  connection
+    .prepare('update job_facts set gen_to = ? where gen_to = ? and job_id = ?')
+    .run(generation, NO_END, jobId);
+}
+
+/** Removes the rows of some jobs (ids above one, up to another) that ended at or before a generation. */
+export function sweepDerived(
+  connection: Connection,
+  generation: number,
+  jobs: { after: number; to: number },
+): void {
+  connection
+    .prepare(
+      `delete from job_products where gen_to <= ? and (branch_id, completed_on, job_id) in (
+        select branch_id, completed_on, job_id from job_facts
+          where job_id > ? and job_id <= ? and gen_to <= ?)`,
+    )
+    .run(generation, jobs.after, jobs.to, generation);
+  connection
+    .prepare('delete from job_facts where job_id > ? and job_id <= ? and gen_to <= ?')
+    .run(jobs.after, jobs.to, generation);
 }
 
 /** Whether two derivations of one job are the same rows. */

@@ -49,13 +49,30 @@ function visibleRows(connection: Connection, jobId: number, generation: number):
         where job_id = ? and gen_from <= ? and gen_to > ?`,
     )
     .all(jobId, generation, generation) as Record<string, DerivedRows['facts'][number]>[];
-  const products = connection
-    .prepare(
-      `select product_id as productId, ml, cost_cents as costCents from job_products
-        where job_id = ? and gen_from <= ? and gen_to > ?`,
-    )
-    .all(jobId, generation, generation) as DerivedRows['products'];
-  return facts.map((row) => ({ facts: Object.values(row), products: byId(products) }));
+  // Looked for by everything that a product's row repeats of its job: one that differs is not found.
+  const products = connection.prepare(
+    `select product_id as productId, ml, cost_cents as costCents from job_products
+      where branch_id = ? and completed_on = ? and job_id = ? and package_id = ? and body_type = ?
+      and temperature_c is ? and gen_from <= ? and gen_to > ?`,
+  );
+  return facts.map((row) => {
+    const car = {
+      completedOn: String(row['completed_on']),
+      bodyType: String(row['body_type']),
+      temperatureC: row['temperature_c'] as number | null,
+    };
+    const found = products.all(
+      row['branch_id'],
+      car.completedOn,
+      jobId,
+      row['package_id'],
+      car.bodyType,
+      car.temperatureC,
+      generation,
+      generation,
+    ) as DerivedRows['products'];
+    return { facts: Object.values(row), car, products: byId(found) };
+  });
 }
 
 function byId(products: DerivedRows['products']): DerivedRows['products'] {

@@ -1,7 +1,14 @@
 import { type CostBook, type CostChange } from '#shared/domain/cost-book';
 import type { RecordedJob } from '#shared/domain/recorded-job';
 import { sql, type Connection } from './database';
-import { deriveRows, insertDerived, sameRows, type DerivedRows } from './derived-rows';
+import {
+  deriveRows,
+  endDerived,
+  insertDerived,
+  sameRows,
+  sweepDerived,
+  type DerivedRows,
+} from './derived-rows';
 import type { JobIdentity } from './queries/fact-row';
 import type { Store } from './store';
 import { NO_END } from './tables';
@@ -56,7 +63,7 @@ export class Restatement {
         state.reload();
         return value;
       });
-      await this.everySlice((from, to) => sweepSlice(writing, generation + 1, from, to));
+      await this.everySlice((after, to) => sweepDerived(writing, generation + 1, { after, to }));
       await queue.write(() => writing.prepare('update network set restating = 0').run());
       return { restatedJobs, recorded };
     } catch (error) {
@@ -116,7 +123,7 @@ export function recoverGenerations(connection: Connection): void {
       .prepare(`update ${table} set gen_to = ? where gen_to > ? and gen_to < ?`)
       .run(NO_END, generation, NO_END);
   }
-  sweepSlice(connection, generation, 0, lastJobId(connection));
+  sweepDerived(connection, generation, { after: 0, to: lastJobId(connection) });
   connection.prepare('update network set restating = 0').run();
 }
 
@@ -125,15 +132,6 @@ function lastJobId(connection: Connection): number {
     last: number | null;
   };
   return row.last ?? 0;
-}
-
-/** Removes the rows of some jobs that ended at or before a generation. */
-function sweepSlice(connection: Connection, generation: number, from: number, to: number): void {
-  for (const table of ['job_facts', 'job_products']) {
-    connection
-      .prepare(`delete from ${table} where job_id > ? and job_id <= ? and gen_to <= ?`)
-      .run(from, to, generation);
-  }
 }
 
 /** The jobs of a slice whose figures the change may touch, a superset kept simple: by branch and date for rates, by date or norm key else. */
@@ -184,10 +182,6 @@ function restateJob(
   rows: DerivedRows,
   generation: number,
 ): void {
-  for (const table of ['job_facts', 'job_products']) {
-    connection
-      .prepare(`update ${table} set gen_to = ? where job_id = ? and gen_to = ?`)
-      .run(generation + 1, id.jobId, NO_END);
-  }
+  endDerived(connection, id.jobId, generation + 1);
   insertDerived(connection, id, rows, { from: generation + 1, to: NO_END });
 }

@@ -24,19 +24,23 @@ export class Scope {
   private constructor(
     /** Sorted by code. */
     readonly branches: readonly ScopedBranch[],
+    /** What the caller may see before any narrowing: who stands outside it is judged by this (rule 21). */
+    private readonly reach: Reach,
   ) {}
 
   /** No branch at all. */
-  static readonly nothing = new Scope([]);
+  static readonly nothing = new Scope([], { branchIds: [], network: false });
 
   /** Everything a grant allows, out of all branches. */
   static ofGrant(all: readonly ScopedBranch[], grant: Grant): Scope {
-    return new Scope(sorted(all.filter((branch) => allows(grant, branch))));
+    const branches = sorted(all.filter((branch) => allows(grant, branch)));
+    return new Scope(branches, reachOf(branches, grant.role === 'head_office'));
   }
 
   /** The one branch of a push key. */
   static ofPushKey(all: readonly ScopedBranch[], branchId: number): Scope {
-    return new Scope(all.filter((branch) => branch.id === branchId));
+    const branches = all.filter((branch) => branch.id === branchId);
+    return new Scope(branches, reachOf(branches, false));
   }
 
   /** Allowed ∩ requested: repeats of one filter are OR, branch and region filters intersect (rule 22). */
@@ -47,6 +51,7 @@ export class Scope {
           (!asked.region || asked.region.includes(branch.region)) &&
           (!asked.branch || asked.branch.includes(branch.code)),
       ),
+      this.reach,
     );
   }
 
@@ -68,16 +73,27 @@ export class Scope {
     return JSON.stringify(this.branches.map((branch) => branch.id));
   }
 
+  /** Whether the caller sees the whole network, so that no network figure can tell them of a stranger. */
+  get ofNetwork(): boolean {
+    return this.reach.network;
+  }
+
+  /** Whether a branch lies outside what the caller may see, whatever was asked for. */
+  isOutside(branchId: number): boolean {
+    return !this.reach.branchIds.includes(branchId);
+  }
+
   /** A plain value that crosses into a worker. */
   pack(): PackedScope {
     return {
       branches: this.branches.map((branch) => ({ ...branch })),
+      reach: { ...this.reach, branchIds: [...this.reach.branchIds] },
     } as unknown as PackedScope;
   }
 
   /** The scope that was packed; only for the worker at the other end. */
   static unpack(packed: PackedScope): Scope {
-    return new Scope(packed.branches);
+    return new Scope(packed.branches, packed.reach);
   }
 }
 
@@ -86,6 +102,17 @@ declare const packed: unique symbol;
 export interface PackedScope {
   readonly [packed]: true;
   readonly branches: readonly ScopedBranch[];
+  readonly reach: Reach;
+}
+
+/** What a caller may see before any narrowing. */
+interface Reach {
+  readonly branchIds: readonly number[];
+  readonly network: boolean;
+}
+
+function reachOf(branches: readonly ScopedBranch[], network: boolean): Reach {
+  return { branchIds: branches.map(({ id }) => id), network };
 }
 
 function allows(grant: Grant, branch: ScopedBranch): boolean {

@@ -2,6 +2,7 @@ import { accessSync, constants, existsSync, mkdirSync } from 'node:fs';
 import { dirname, join, resolve } from 'node:path';
 import { DatabaseRefused, openDatabase, openReader, type Connection } from './database';
 import { NetworkState } from './network-state';
+import { NetworkReference } from './network-reference';
 import { recoverGenerations, Restatement } from './restatement';
 import type { Scope } from './scope';
 import { ScopedDb } from './scoped-db';
@@ -48,6 +49,11 @@ export class Store {
   /** A reader bound to a scope. */
   scoped(scope: Scope): ScopedDb {
     return new ScopedDb(this.reading, scope);
+  }
+
+  /** What a caller of a scope may know of the network beyond it. */
+  reference(scope: Scope): NetworkReference {
+    return new NetworkReference(this.reading, scope);
   }
 
   /** Folds the write-ahead log into the file and lets the planner learn the tables, after very many rows at once. */

@@ -3,6 +3,7 @@ export const SCOPED_TABLES = [
   'branch_rates',
   'bookings',
   'claims',
+  'come_back_marks',
   'job_consumables',
   'job_extras',
   'job_facts',

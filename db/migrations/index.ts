@@ -1,6 +1,7 @@
 import type { Knex } from 'knex';
 import * as network from './0001-network';
 import * as jobs from './0002-jobs';
+import * as underneath from './0003-underneath';
 
 interface Migration {
   name: string;
@@ -12,6 +13,7 @@ interface Migration {
 export const migrations: readonly Migration[] = [
   { name: '0001-network', ...network },
   { name: '0002-jobs', ...jobs },
+  { name: '0003-underneath', ...underneath },
 ];
 
 /** Hands the list to knex without reading a folder, so that it is the same from source, tests and the built server. */

@@ -51,6 +51,8 @@ export const FACT_COLUMNS = [
   ...CHECKS.map(
     (check) => `check_${check.replace(/[A-Z]/g, (letter) => `_${letter.toLowerCase()}`)}`,
   ),
+  ...['rot_zones', 'bubbles_worked', 'bubbles_holed', 'norm_ml', 'normed_ml'],
+  'bought_in_sent_cents',
 ];
 
 export type FactValue = string | number | null;
@@ -107,6 +109,12 @@ export function factValues(id: JobIdentity, job: RecordedJob, figures: JobFigure
     job.workshop?.temperatureC ?? null,
     job.workshop?.humidityPct ?? null,
     ...CHECKS.map((check) => job.checks?.[check] ?? null),
+    figures.rotPlaces,
+    figures.bubblesWorked,
+    figures.bubblesHoled,
+    figures.normMl,
+    figures.normedMl,
+    figures.boughtInCents,
   ];
 }
 

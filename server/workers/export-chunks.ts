@@ -1,13 +1,34 @@
+import type { NetworkReference } from '#db/network-reference';
 import type { ScopedDb } from '#db/scoped-db';
-import { JOB_COLUMNS, MARGIN_COLUMNS, OVERRUN_COLUMNS } from '../features/exports/columns';
+import { everyComeBack, type ComeBacksAsked } from '../features/come-back/list-come-backs';
+import {
+  COME_BACK_COLUMNS,
+  JOB_COLUMNS,
+  MARGIN_COLUMNS,
+  OVERRUN_COLUMNS,
+  PRODUCT_COLUMNS,
+  PRODUCT_NEED_COLUMNS,
+  ROT_COLUMNS,
+  ROT_MODEL_COLUMNS,
+  ROT_ZONE_COLUMNS,
+} from '../features/exports/columns';
 import { csvHeader, csvRows } from '../features/exports/csv-text';
 import { everyJob, type JobsAsked } from '../features/job-list/list-jobs';
 import { answerMargin, type MarginQuestion } from '../features/margin/answer-margin';
 import { answerOverrun, type OverrunQuestion } from '../features/overrun/answer-overrun';
+import { answerProductNeed, type NeedQuestion } from '../features/products/answer-product-need';
+import { answerProducts, type ProductsQuestion } from '../features/products/answer-products';
+import { answerRot, type RotQuestion } from '../features/rot/answer-rot';
+import type { RotZone } from '#shared/contracts/rot';
 import type { ExportName } from './read-tasks';
 
 /** The text of an export in pieces: the header first, then rows as the same code that answers the screen gives them. */
-export function* csvChunks(db: ScopedDb, name: ExportName, input: unknown): Generator<string> {
+export function* csvChunks(
+  db: ScopedDb,
+  name: ExportName,
+  input: unknown,
+  reference: NetworkReference,
+): Generator<string> {
   switch (name) {
     case 'margin': {
       const { weeks } = answerMargin(db, input as MarginQuestion);
@@ -22,6 +43,46 @@ export function* csvChunks(db: ScopedDb, name: ExportName, input: unknown): Gene
     case 'jobs': {
       yield csvHeader(JOB_COLUMNS);
       for (const page of everyJob(db, input as JobsAsked)) yield csvRows(JOB_COLUMNS, page);
+      return;
+    }
+    case 'rot': {
+      const { cells } = answerRot(db, input as RotQuestion, reference);
+      yield csvHeader(ROT_COLUMNS) + csvRows(ROT_COLUMNS, cells);
+      return;
+    }
+    case 'rot-models': {
+      const { models } = answerRot(db, input as RotQuestion, reference);
+      yield csvHeader(ROT_MODEL_COLUMNS) + csvRows(ROT_MODEL_COLUMNS, models);
+      return;
+    }
+    case 'rot-zones': {
+      const { zones } = answerRot(db, input as RotQuestion, reference);
+      yield csvHeader(ROT_ZONE_COLUMNS) + csvRows(ROT_ZONE_COLUMNS, bySide(zones));
+      return;
+    }
+    case 'products': {
+      const { use } = answerProducts(db, input as ProductsQuestion);
+      yield csvHeader(PRODUCT_COLUMNS) + csvRows(PRODUCT_COLUMNS, use);
+      return;
+    }
+    case 'product-need': {
+      const { needs } = answerProductNeed(db, input as NeedQuestion);
+      yield csvHeader(PRODUCT_NEED_COLUMNS) + csvRows(PRODUCT_NEED_COLUMNS, needs);
+      return;
+    }
+    case 'come-back': {
+      yield csvHeader(COME_BACK_COLUMNS);
+      for (const page of everyComeBack(db, input as ComeBacksAsked)) {
+        yield csvRows(COME_BACK_COLUMNS, page);
+      }
     }
   }
+}
+
+/** A row a zone (`side` empty: any side) and one each of its sides. */
+function bySide(zones: readonly RotZone[]): object[] {
+  return zones.flatMap(({ sides, ...zone }) => [
+    { ...zone, side: null },
+    ...sides.map((side) => ({ ...zone, ...side })),
+  ]);
 }

@@ -2,15 +2,32 @@ import type { MessagePort } from 'node:worker_threads';
 import type { PackedScope } from '#db/scope';
 import type { MarginAnswer } from '#shared/contracts/margin';
 import type { OverrunAnswer } from '#shared/contracts/overrun';
+import type { ProductNeedAnswer, ProductsAnswer } from '#shared/contracts/products';
+import type { QuoteAnswer } from '#shared/contracts/quote';
+import type { RotAnswer } from '#shared/contracts/rot';
 import type { JobListQuestion, JobPage, JobsAsked } from '../features/job-list/list-jobs';
 import type { MarginQuestion } from '../features/margin/answer-margin';
 import type { OverrunQuestion } from '../features/overrun/answer-overrun';
+import type {
+  ComeBackPage,
+  ComeBackQuestion,
+  ComeBacksAsked,
+} from '../features/come-back/list-come-backs';
+import type { NeedQuestion } from '../features/products/answer-product-need';
+import type { ProductsQuestion } from '../features/products/answer-products';
+import type { QuoteQuestion } from '../features/quote/answer-quote';
+import type { RotQuestion } from '../features/rot/answer-rot';
 
 /** What a worker can be asked, and what it answers. The scope goes along packed; everything else is plain data. */
 export interface ReadTasks {
   margin: { input: MarginQuestion; output: MarginAnswer };
   overrun: { input: OverrunQuestion; output: OverrunAnswer };
   jobs: { input: JobListQuestion; output: JobPage };
+  rot: { input: RotQuestion; output: RotAnswer };
+  products: { input: ProductsQuestion; output: ProductsAnswer };
+  productNeed: { input: NeedQuestion; output: ProductNeedAnswer };
+  comeBack: { input: ComeBackQuestion; output: ComeBackPage };
+  quote: { input: QuoteQuestion; output: QuoteAnswer };
 }
 
 /** Exports by name, with the question each answers. */
@@ -18,6 +35,12 @@ export interface ExportTasks {
   margin: MarginQuestion;
   overrun: OverrunQuestion;
   jobs: JobsAsked;
+  rot: RotQuestion;
+  'rot-models': RotQuestion;
+  'rot-zones': RotQuestion;
+  products: ProductsQuestion;
+  'product-need': NeedQuestion;
+  'come-back': ComeBacksAsked;
 }
 
 export type ReadName = keyof ReadTasks;

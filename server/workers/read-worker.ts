@@ -1,26 +1,23 @@
 import { workerData as piscinaData } from 'piscina';
 import { openReader } from '#db/database';
+import { NetworkReference } from '#db/network-reference';
 import { Scope } from '#db/scope';
 import { ScopedDb } from '#db/scoped-db';
-import { listJobs } from '../features/job-list/list-jobs';
-import { answerMargin } from '../features/margin/answer-margin';
-import { answerOverrun } from '../features/overrun/answer-overrun';
+import { answer } from './answers';
 import { csvChunks } from './export-chunks';
 import { ExportDemand } from './export-demand';
-import type { PackedExport, PackedRead, ReadName, ReadTasks } from './read-tasks';
+import type { PackedExport, PackedRead } from './read-tasks';
 
 const { file } = piscinaData as { file: string };
 const connection = openReader(file);
 
-/** Every answer a worker knows, by name. */
-const ANSWERS: {
-  [Name in ReadName]: (db: ScopedDb, input: ReadTasks[Name]['input']) => ReadTasks[Name]['output'];
-} = { margin: answerMargin, overrun: answerOverrun, jobs: listJobs };
-
 /** What piscina calls for each task, one at a time. */
 export default async function work(task: PackedRead | PackedExport): Promise<unknown> {
-  const db = new ScopedDb(connection, Scope.unpack(task.scope));
-  if (task.kind === 'answer') return ANSWERS[task.name](db, task.input as never);
+  const scope = Scope.unpack(task.scope);
+  const db = new ScopedDb(connection, scope);
+  if (task.kind === 'answer') {
+    return answer(task.name, db, task.input as never, new NetworkReference(connection, scope));
+  }
   await send(db, task);
   return undefined;
 }
@@ -30,7 +27,7 @@ async function send(db: ScopedDb, { name, input, port }: PackedExport): Promise<
   const demand = new ExportDemand(port);
   connection.prepare('begin').run();
   try {
-    for (const chunk of csvChunks(db, name, input)) {
+    for (const chunk of csvChunks(db, name, input, new NetworkReference(connection, db.scope))) {
       if (!(await demand.another())) return;
       port.postMessage(chunk);
     }

@@ -1,3 +1,4 @@
+import { comeBackQuery } from './come-back';
 import { defineEndpoint } from './endpoint';
 import { noParams, READERS, scopeQuery } from './fields';
 import { jobsQuery } from './job-list';
@@ -33,4 +34,46 @@ export const exportOverrun = defineEndpoint({
   path: '/api/exports/overrun.csv',
   summary: 'The groups of the overrun answer, one row a group.',
   query: overrunQuery,
+});
+
+export const exportRot = defineEndpoint({
+  ...csv,
+  path: '/api/exports/rot.csv',
+  summary: 'The cells of the rot answer, one row an age band and region.',
+  query: scopeQuery,
+});
+
+export const exportRotModels = defineEndpoint({
+  ...csv,
+  path: '/api/exports/rot-models.csv',
+  summary: 'The models of the rot answer, one row a model and age band.',
+  query: scopeQuery,
+});
+
+export const exportRotZones = defineEndpoint({
+  ...csv,
+  path: '/api/exports/rot-zones.csv',
+  summary: 'The zones of the rot answer by side, one row a zone, side and age band.',
+  query: scopeQuery,
+});
+
+export const exportProducts = defineEndpoint({
+  ...csv,
+  path: '/api/exports/products.csv',
+  summary: 'The rows of the product answer, one a product, package and body type.',
+  query: scopeQuery,
+});
+
+export const exportProductNeed = defineEndpoint({
+  ...csv,
+  path: '/api/exports/product-need.csv',
+  summary: 'What the coming eight weeks need, one row a product.',
+  query: scopeQuery,
+});
+
+export const exportComeBack = defineEndpoint({
+  ...csv,
+  path: '/api/exports/come-back.csv',
+  summary: 'The come-back list, one row a finding.',
+  query: comeBackQuery.omit({ limit: true, cursor: true }),
 });

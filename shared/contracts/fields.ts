@@ -77,7 +77,8 @@ export const noParams = z.strictObject({});
 export const noQuery = z.strictObject({});
 export const branchParams = z.strictObject({ branch: z.string() });
 
-const manyOf = <T extends z.ZodType>(item: T) =>
+/** A parameter that may be repeated. */
+export const manyOf = <T extends z.ZodType>(item: T) =>
   z.preprocess(
     (value) => (value === undefined ? undefined : Array.isArray(value) ? value : [value]),
     z.array(item).optional(),

@@ -2,12 +2,16 @@ import type { Endpoint } from './endpoint';
 import * as auth from './auth';
 import * as bookings from './bookings';
 import * as claims from './claims';
+import * as comeBack from './come-back';
 import * as csvExports from './exports';
 import * as jobList from './job-list';
 import * as jobs from './jobs';
 import * as margin from './margin';
 import * as overrun from './overrun';
 import * as people from './people';
+import * as products from './products';
+import * as quote from './quote';
+import * as rot from './rot';
 import * as setUp from './set-up';
 import * as system from './system';
 import * as weeks from './weeks';
@@ -23,6 +27,10 @@ export const endpoints: readonly Endpoint[] = [
   bookings,
   margin,
   overrun,
+  rot,
+  products,
+  comeBack,
+  quote,
   weeks,
   csvExports,
   system,

@@ -13,8 +13,9 @@ import {
   scopeQuery,
   share,
 } from './fields';
-import { AGE_BANDS } from '#shared/domain/vocabulary';
+import { AGE_BANDS, SIDES, ZONES } from '#shared/domain/vocabulary';
 
+export const PRODUCT_USES = ['under', 'over'] as const;
 export const JOB_SORTS = ['completed', 'margin', 'difference', 'overrun', 'waiting'] as const;
 
 /** One row of a list of jobs (rule 84). Money is absent for recorders. */
@@ -68,6 +69,12 @@ export const jobsQuery = scopeQuery.extend({
   /** Lists of one screen: the cars behind a figure. */
   ageBand: z.enum(AGE_BANDS).optional(),
   hasEstimate: flag.optional(),
+  /** Cars with rot in this zone; with `side`, on that side of it. */
+  zone: z.enum(ZONES).optional(),
+  side: z.enum(SIDES).optional(),
+  /** Cars on which this product went in; with `use`, those under 70 % or over 130 % of its norm (rule 37). */
+  product: z.string().max(64).optional(),
+  use: z.enum(PRODUCT_USES).optional(),
   sort: z.enum(JOB_SORTS).default('completed'),
   ...pageQuery,
 });

@@ -2,6 +2,7 @@ import { ageBand, ageInYears, isoWeek } from './calendar';
 import type { CostBook } from './cost-book';
 import { consumableCents, feeCents, labourCents, productCents } from './money';
 import { isRot, type RecordedJob, type StageMinutes } from './recorded-job';
+import { rotPlaces } from './rot-places';
 import { STAGES, type AgeBand, type Stage } from './vocabulary';
 
 /** A cost that was not known on a job's day (rule 11). */
@@ -38,6 +39,11 @@ export interface JobFigures {
   month: string;
   ageBand: AgeBand;
   hasRot: boolean;
+  /** Zones and sides with rot as one number (`rot-places`). */
+  rotPlaces: number;
+  /** Findings seen as bubbling and then worked, and of them those worked as holed (rule 46). */
+  bubblesWorked: number;
+  bubblesHoled: number;
   billed: boolean;
   /** An estimate of more than 0 minutes (rule 12). */
   hasEstimate: boolean;
@@ -51,6 +57,10 @@ export interface JobFigures {
   extraCents: number;
   /** Millilitres and rounded cost by product; cost null where none was known. */
   products: Map<string, { ml: number; costCents: number | null }>;
+  /** Millilitres that the norm foresees, 0 without one, and those used of its products (rule 39). */
+  normMl: number;
+  normedMl: number;
+  boughtInCents: number;
   /** Undefined when any cost of the job's own was missing. */
   money: ActualMoney | undefined;
   /** Undefined without an estimate, a norm, or a cost that either needs. */
@@ -70,12 +80,19 @@ export function deriveFigures(job: RecordedJob, branch: string, costs: CostBook)
   const products = productLines(job, costs, missing);
   const consumables = consumableLines(job, costs, missing);
   const complete = missing.list.length === 0;
+  const norm = costs.norm(job.package, job.vehicle.bodyType) ?? [];
+  const worked = (job.findings ?? []).filter(
+    (finding) => finding.seenAs === 'bubbling' && finding.workedAs !== undefined,
+  );
   const charged = (job.findings ?? []).filter((finding) => (finding.chargedCents ?? 0) > 0);
   return {
     week: isoWeek(on),
     month: on.slice(0, 7),
     ageBand: ageBand(ageInYears(job.vehicle.firstRegistered, on)),
     hasRot: (job.findings ?? []).some(isRot),
+    rotPlaces: rotPlaces(job.findings ?? []),
+    bubblesWorked: worked.length,
+    bubblesHoled: worked.filter((finding) => finding.workedAs === 'holed').length,
     billed: job.invoice !== undefined,
     hasEstimate: estimatedMinutes > 0,
     estimated,
@@ -86,6 +103,9 @@ export function deriveFigures(job: RecordedJob, branch: string, costs: CostBook)
     extraMinutes: sum((job.agreedExtras ?? []).map((extra) => extra.minutes ?? 0)),
     extraCents: sum((job.agreedExtras ?? []).map((extra) => extra.priceCents ?? 0)),
     products,
+    normMl: sum(norm.map((line) => line.ml)),
+    normedMl: sum(norm.map((line) => products.get(line.product)?.ml ?? 0)),
+    boughtInCents: job.boughtInCents ?? 0,
     money:
       complete && hourly !== undefined && fee !== undefined
         ? actualMoney(job, actual, hourly, fee, products, consumables)

@@ -101,3 +101,8 @@ export type Source = (typeof SOURCES)[number];
 /** Age bands at completion, in whole years since first registration. */
 export const AGE_BANDS = ['0-4', '5-9', '10-14', '15-19', '20+'] as const;
 export type AgeBand = (typeof AGE_BANDS)[number];
+
+/** Where a finding left on a car stands (rule 61); the first three are still to be dealt with. */
+export const COME_BACK_STATUSES = ['open', 'contacted', 'booked', 'done', 'gone'] as const;
+export type ComeBackStatus = (typeof COME_BACK_STATUSES)[number];
+export const OPEN_COME_BACKS = ['open', 'contacted', 'booked'] as const satisfies ComeBackStatus[];

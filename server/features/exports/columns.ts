@@ -19,3 +19,29 @@ export const JOB_COLUMNS = [
   ...['costCents', 'marginCents', 'marginShare', 'expectedMarginCents', 'largestStep.step'],
   ...['largestStep.cents'],
 ];
+
+export const ROT_COLUMNS = ['ageBand', 'region', 'cars', 'withRot', 'share', 'lower', 'upper'];
+
+export const ROT_MODEL_COLUMNS = [
+  ...['make', 'model', 'ageBand', 'cars', 'withRot', 'share', 'shrunkShare', 'lower', 'upper'],
+  'pooled',
+];
+
+export const ROT_ZONE_COLUMNS = [
+  ...['zone', 'side', 'ageBand', 'cars', 'withRot', 'share', 'lower', 'upper'],
+];
+
+export const PRODUCT_COLUMNS = [
+  ...['product', 'package', 'bodyType', 'cars', 'carsListing', 'meanMl', 'p10Ml', 'p25Ml'],
+  ...['medianMl', 'p75Ml', 'p90Ml', 'normMl', 'costPerCarCents', 'under', 'over'],
+  ...['underShare', 'overShare'],
+];
+
+export const PRODUCT_NEED_COLUMNS = ['product', 'ml', 'lowerMl', 'upperMl', 'costCents'];
+
+export const COME_BACK_COLUMNS = [
+  ...['branch', 'jobRef', 'ref', 'vehicle.key', 'vehicle.make', 'vehicle.model'],
+  ...['vehicle.bodyType', 'vehicle.firstRegistered', 'zone', 'side', 'seenAs', 'workedAs'],
+  ...['structural', 'action', 'completedOn', 'dueOn', 'status', 'note', 'ownerToldOn'],
+  ...['changedBy', 'changedAt', 'closedByJobRef'],
+];

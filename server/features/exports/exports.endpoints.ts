@@ -1,6 +1,15 @@
 import { recordAudit } from '#db/queries/audit';
 import type { Scope } from '#db/scope';
-import { exportJobs, exportMargin, exportOverrun } from '#shared/contracts/exports';
+import {
+  exportJobs,
+  exportMargin,
+  exportOverrun,
+  exportProductNeed,
+  exportProducts,
+  exportRot,
+  exportRotModels,
+  exportRotZones,
+} from '#shared/contracts/exports';
 import { actorOf } from '../../auth/caller';
 import { realClock } from '../../clock';
 import { streamCsv, type CsvChunks } from '../../http/csv-stream';
@@ -31,6 +40,19 @@ export function mountExports(mounting: Mounting, kit: Kit): void {
       kit.reads.stream('overrun', scope, { period, filters, by }),
     );
   });
+
+  for (const [contract, name] of [
+    [exportRot, 'rot'],
+    [exportRotModels, 'rot-models'],
+    [exportRotZones, 'rot-zones'],
+    [exportProducts, 'products'],
+    [exportProductNeed, 'product-need'],
+  ] as const) {
+    mount(mounting, contract, (call) => {
+      const { scope, ...question } = scopeQuestion(kit, call.scope, call.query);
+      return exported(kit, call, name, scope, () => kit.reads.stream(name, scope, question));
+    });
+  }
 }
 
 async function exported(

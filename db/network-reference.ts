@@ -1,0 +1,73 @@
+import type { Knex } from 'knex';
+import { sql, type Connection, type Query } from './database';
+import { whereJobs, type JobFilters } from './queries/job-filters';
+import type { Scope } from './scope';
+
+/** Branches besides the caller's own that must stand behind a network figure before the caller may see it (rule 21). */
+export const FEWEST_OTHERS = 5;
+
+/** The visible facts of every branch, under the name that filters know. */
+const EVERY_FACT = `(select * from job_facts where gen_from <= (select generation from network)
+  and gen_to > (select generation from network)) as job_facts`;
+
+/** Cars of an age band over the network, summed. */
+export interface ReferenceBand {
+  /** Place in `AGE_BANDS`. */
+  band: number;
+  cars: number;
+  withRot: number;
+  /** Whether enough other branches have cars in this band for its share to be shown. */
+  enoughBehind: boolean;
+}
+
+/**
+ * The only reader of rows beyond a scope. It hands out sums, never rows, and only with at least five branches outside the
+ * caller's reach behind them; head office, whose reach is the network, is always answered.
+ */
+export class NetworkReference {
+  constructor(
+    private readonly connection: Connection,
+    private readonly scope: Scope,
+  ) {}
+
+  /** Cars and cars with rot by age band over the network, or `undefined` where too few others stand behind them. Branch and region filters do not narrow it. */
+  rotBands(filters: JobFilters): ReferenceBand[] | undefined {
+    const cells = this.all<{ branchId: number; band: number; cars: number; withRot: number }>(
+      whereJobs(everyJob(), filters)
+        .groupBy('branch_id', 'age_band')
+        .select({ branchId: 'branch_id', band: 'age_band' })
+        .count({ cars: '*' })
+        .sum({ withRot: 'has_rot' }),
+    );
+    if (!this.enoughBehind(cells)) return undefined;
+    const bands = new Map<number, typeof cells>();
+    for (const cell of cells) bands.set(cell.band, [...(bands.get(cell.band) ?? []), cell]);
+    return [...bands].map(([band, own]) => ({
+      band,
+      cars: total(own.map((cell) => cell.cars)),
+      withRot: total(own.map((cell) => cell.withRot)),
+      enoughBehind: this.enoughBehind(own),
+    }));
+  }
+
+  /** Whether rows of at least five branches outside the caller's reach are among some; always for head office. */
+  private enoughBehind(rows: readonly { branchId: number }[]): boolean {
+    if (this.scope.ofNetwork) return true;
+    const others = new Set(
+      rows.map((row) => row.branchId).filter((id) => this.scope.isOutside(id)),
+    );
+    return others.size >= FEWEST_OTHERS;
+  }
+
+  private all<Row>(query: Query): Row[] {
+    return this.connection.all<Row>(query);
+  }
+}
+
+function everyJob(): Knex.QueryBuilder {
+  return sql.from(sql.raw(EVERY_FACT));
+}
+
+function total(values: readonly number[]): number {
+  return values.reduce((sum, value) => sum + value, 0);
+}

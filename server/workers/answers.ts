@@ -1,0 +1,39 @@
+import type { NetworkReference } from '#db/network-reference';
+import type { ScopedDb } from '#db/scoped-db';
+import { listComeBacks } from '../features/come-back/list-come-backs';
+import { listJobs } from '../features/job-list/list-jobs';
+import { answerMargin } from '../features/margin/answer-margin';
+import { answerOverrun } from '../features/overrun/answer-overrun';
+import { answerProductNeed } from '../features/products/answer-product-need';
+import { answerProducts } from '../features/products/answer-products';
+import { answerQuote } from '../features/quote/answer-quote';
+import { answerRot } from '../features/rot/answer-rot';
+import type { ReadName, ReadTasks } from './read-tasks';
+
+/** Every answer a worker knows, by name; only those with a network figure take the reference. */
+const ANSWERS: {
+  [Name in ReadName]: (
+    db: ScopedDb,
+    input: ReadTasks[Name]['input'],
+    reference: NetworkReference,
+  ) => ReadTasks[Name]['output'];
+} = {
+  margin: answerMargin,
+  overrun: answerOverrun,
+  jobs: listJobs,
+  rot: answerRot,
+  products: answerProducts,
+  productNeed: answerProductNeed,
+  comeBack: listComeBacks,
+  quote: answerQuote,
+};
+
+/** Answers a question from one reader's rows. */
+export function answer<Name extends ReadName>(
+  name: Name,
+  db: ScopedDb,
+  input: ReadTasks[Name]['input'],
+  reference: NetworkReference,
+): ReadTasks[Name]['output'] {
+  return ANSWERS[name](db, input, reference);
+}
