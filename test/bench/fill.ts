@@ -7,13 +7,22 @@ import { jobMaker } from './synthetic-jobs';
 const BRANCHES = 120;
 const COMMIT = 2_000;
 
-/** Fills a data folder with so many jobs over two years and 120 branches, by the same acceptance as a pushed job. */
-export async function fill(folder: string, jobs: number, today: string): Promise<void> {
+/**
+ * Fills a data folder with so many jobs over two years and 120 branches, by the same acceptance as a pushed job; one that has
+ * some already, from the same seed, is filled up.
+ */
+export async function fill(
+  folder: string,
+  jobs: number,
+  today: string,
+  already = 0,
+): Promise<void> {
   const store = await Store.open(folder);
-  await setUpBench(store, BRANCHES);
+  if (already === 0) await setUpBench(store, BRANCHES);
   const make = jobMaker(5, today, 728);
   const writers = store.state.branches.map((branch) => new BranchWriter(store, branch));
-  for (let start = 0; start < jobs; start += COMMIT) {
+  for (let index = 0; index < already; index += 1) make(index);
+  for (let start = already; start < jobs; start += COMMIT) {
     await store.queue.write(() => {
       for (let index = start; index < Math.min(jobs, start + COMMIT); index += 1) {
         const writer = writers[index % BRANCHES];
@@ -22,6 +31,7 @@ export async function fill(folder: string, jobs: number, today: string): Promise
       }
     });
   }
+  store.tidy();
   store.close();
 }
 

@@ -1,14 +1,12 @@
 import { join } from 'node:path';
-import { openReader, sql, type Connection } from '#db/database';
-import { Store } from '#db/store';
+import { openReader, type Connection } from '#db/database';
 import { addDays, mondayOf } from '#shared/domain/calendar';
 import { STAGES } from '#shared/domain/vocabulary';
-import { PasswordThread } from '#server/workers/password-thread';
+import { addOffice, get, signInOffice, timed } from './ask';
 import { fill } from './fill';
 import { median, ratioLine, type Line } from './report';
 import { serve } from './serve';
 
-const PASSWORD = 'a password for the bench';
 const ROUNDS = 15;
 
 /** The two analytics answers over the default year and all branches, through the API, against the bare SQL that reads the same rows. */
@@ -17,7 +15,7 @@ export async function benchReads(folder: string, jobs: number, today: string): P
   await fill(data, jobs, today);
   await addOffice(data);
   const served = await serve(data, { UNDERSEAM_NOW: `${today}T12:00:00Z` });
-  const token = await signIn(served.url);
+  const token = await signInOffice(served.url);
   const from = addDays(mondayOf(today), -51 * 7);
   const bare = openReader(join(data, 'underseam.sqlite'));
   const lines: Line[] = [];
@@ -69,45 +67,4 @@ function overrunFloor(bare: Connection, from: string, to: string): void {
     )
     .raw()
     .all(from, to);
-}
-
-async function addOffice(data: string): Promise<void> {
-  const passwords = new PasswordThread(4);
-  const hash = await passwords.hash(PASSWORD);
-  await passwords.close();
-  const store = await Store.open(data);
-  await store.queue.write(() =>
-    store.unscoped.run(
-      sql('people').insert({
-        email: 'office@bench.example',
-        email_key: 'office@bench.example',
-        name: 'Bench',
-        role: 'head_office',
-        password_hash: hash,
-        created_at: '2026-01-01T00:00:00.000Z',
-      }),
-    ),
-  );
-  store.close();
-}
-
-async function signIn(url: string): Promise<string> {
-  const answer = await fetch(`${url}/api/auth/sign-in`, {
-    method: 'POST',
-    headers: { 'content-type': 'application/json' },
-    body: JSON.stringify({ email: 'office@bench.example', password: PASSWORD }),
-  });
-  return ((await answer.json()) as { accessToken: string }).accessToken;
-}
-
-async function get(url: string, token: string): Promise<void> {
-  const answer = await fetch(url, { headers: { authorization: `Bearer ${token}` } });
-  const text = await answer.text();
-  if (!answer.ok) throw new Error(`${answer.status}: ${text.slice(0, 300)}`);
-}
-
-async function timed(work: () => unknown): Promise<number> {
-  const begun = performance.now();
-  await work();
-  return performance.now() - begun;
 }

@@ -6,18 +6,21 @@ import { benchIngest } from './ingest';
 import { benchPage } from './page';
 import { benchReads } from './reads';
 import { print, type Line } from './report';
+import { benchUnderneath } from './underneath';
 
 const FIND_CHROMIUM = join(__dirname, '..', 'support', 'find-chromium.mjs');
 
-/** `npm run bench [ingest] [reads] [page]`: compares ours with a yardstick in one run; without names, everything. */
+/** `npm run bench [ingest] [reads] [underneath] [page]`: compares ours with a yardstick in one run; without names, everything. */
 async function main(): Promise<void> {
   const asked = process.argv.slice(2);
   const jobs = Number(process.env['BENCH_JOBS'] ?? 100_000);
+  const sizes = (process.env['BENCH_SIZES'] ?? '100000,1000000').split(',').map(Number);
   const today = '2026-02-02';
   const folder = mkdtempSync(join(tmpdir(), 'underseam-bench-'));
   const benches: Record<string, () => Promise<Line[]>> = {
     ingest: () => benchIngest(folder, 5_000, today),
     reads: () => benchReads(folder, jobs, today),
+    underneath: () => benchUnderneath(folder, sizes, today),
     page: async () => {
       const browser = askModule(FIND_CHROMIUM, 'findChromium', []);
       if (typeof browser !== 'string') throw new Error('the page bench needs Chromium; set CHROME');

@@ -18,6 +18,7 @@ export function jobMaker(seed: number, today: string, days: number): JobMaker {
       jobRef: `B${String(index).padStart(7, '0')}`,
       content: {
         vehicle: {
+          ...(rotten && { key: `K-${index}` }),
           make: ['Velder', 'Orsa', 'Maren', 'Hask'][next(0, 3)] ?? 'Velder',
           model: ['Tessock', 'Brink', 'Lodd', 'Drover'][next(0, 3)] ?? 'Lodd',
           bodyType: 'hatchback',
@@ -55,7 +56,7 @@ export function jobMaker(seed: number, today: string, days: number): JobMaker {
         findings: rotten
           ? [
               finding('sill_outer', 'left', repair),
-              finding('rear_arch', 'right', 0),
+              next(0, 3) === 0 ? left('rear_arch', 'right') : finding('rear_arch', 'right', 0),
               { ...finding('floor', 'centre', 0), seenAs: 'surface', workedAs: 'surface' },
             ]
           : [],
@@ -76,6 +77,13 @@ export function jobMaker(seed: number, today: string, days: number): JobMaker {
       },
     };
   };
+}
+
+function left(
+  zone: 'rear_arch',
+  side: 'left' | 'right',
+): NonNullable<JobContent['findings']>[number] {
+  return { zone, side, seenAs: 'bubbling', structural: true, action: 'deferred' };
 }
 
 function finding(
