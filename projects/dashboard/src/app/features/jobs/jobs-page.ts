@@ -16,7 +16,16 @@ import { currencySign, formatCounted } from '../../ui/format';
 import { LoadState } from '../../ui/load-state/load-state';
 import { narrowWindow } from '../../ui/narrow';
 import { jobColumns } from './job-columns';
-import { ageBandOf, filterWords, flagOf, type JobFilters, sortOf } from './job-filters';
+import {
+  ageBandOf,
+  filterWords,
+  flagOf,
+  type JobFilters,
+  sideOf,
+  sortOf,
+  useOf,
+  zoneOf,
+} from './job-filters';
 import { JobList } from './job-list';
 import { jobsSentence } from './jobs-sentence';
 import { sortsFor } from './sort-words';
@@ -56,6 +65,10 @@ export class JobsPage {
   readonly unbilled = input<string>();
   readonly hasRot = input<string>();
   readonly hasEstimate = input<string>();
+  readonly zone = input<string>();
+  readonly side = input<string>();
+  readonly product = input<string>();
+  readonly use = input<string>();
   readonly sort = input<string>();
   readonly cursor = input<string>();
 
@@ -69,8 +82,15 @@ export class JobsPage {
     unbilled: flagOf(this.unbilled()),
     hasRot: flagOf(this.hasRot()),
     hasEstimate: flagOf(this.hasEstimate()),
+    zone: zoneOf(this.zone()),
+    // A side narrows a zone, a use a product: neither means anything alone.
+    side: zoneOf(this.zone()) && sideOf(this.side()),
+    product: this.product() || undefined,
+    use: this.product() ? useOf(this.use()) : undefined,
   }));
-  protected readonly inForce = computed(() => filterWords(this.filters()));
+  protected readonly inForce = computed(() =>
+    filterWords(this.filters(), (code) => this.catalogue.productName(code)),
+  );
   protected readonly sorts = computed(() => sortsFor(this.recorder() ? 'hidden' : 'shown'));
   protected readonly order = computed(() => {
     const wanted = sortOf(this.sort());

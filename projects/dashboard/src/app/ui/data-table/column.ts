@@ -30,4 +30,6 @@ export interface Column<Row> {
   readonly total?: string;
   /** Only heard, not seen, for example over bars. */
   readonly unseenLabel?: boolean;
+  /** Seen in place of the label over a column of small pictures: what stands at the left and right end of their axis. */
+  readonly ends?: readonly [string, string];
 }
