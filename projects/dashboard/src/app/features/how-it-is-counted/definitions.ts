@@ -2,6 +2,7 @@ import type { Definition, DefinitionGroup } from './definition';
 import { labourDefinitions } from './labour-definitions';
 import { moneyDefinitions } from './money-definitions';
 import { readingDefinitions } from './reading-definitions';
+import { rotDefinitions } from './rot-definitions';
 import { weeklyDefinitions } from './weekly-definitions';
 
 /** Every figure shown so far, in the order in which the page tells them. A new figure adds its definition to one of these groups. */
@@ -9,6 +10,7 @@ export const DEFINITION_GROUPS: readonly DefinitionGroup[] = [
   { id: 'money', title: 'Money', definitions: moneyDefinitions },
   { id: 'weekly', title: 'The weekly chart', definitions: weeklyDefinitions },
   { id: 'labour', title: 'Labour overrun', definitions: labourDefinitions },
+  { id: 'rot-found', title: 'Rot', definitions: rotDefinitions },
   { id: 'reading', title: 'What counts, and how it is shown', definitions: readingDefinitions },
 ];
 
