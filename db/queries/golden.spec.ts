@@ -1,9 +1,12 @@
 import { mkdirSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
+import { COME_BACK_STATUSES, type ComeBackStatus } from '#shared/domain/vocabulary';
 import { SmallStore } from '../../test/support/small-store';
 import { Connection } from '../database';
 import { ScopedDb } from '../scoped-db';
 import type { JobFilters } from './job-filters';
+import { countLeft, iterateLeft, listLeft } from './come-back';
+import { listLeftOfJob, listMarks } from './come-back-of-job';
 import { countJobs, iterateJobRows, listJobRows, type ListFilters } from './job-list';
 import { listBilledWeeks, listMissingCosts, sumSpans } from './margin';
 import { readMarginTarget } from './margin-target';
@@ -29,12 +32,22 @@ const LISTED: ListFilters = {
   hasEstimate: true,
   text: 'x',
 };
+const LEFT_AT = {
+  danger: 1,
+  completedOn: '2026-01-05',
+  branch: 'AAA',
+  jobRef: '1',
+  place: 3,
+  ref: 'x',
+};
 const PLACE = { key: 1, completedOn: '2026-01-05', branch: 'AAA', jobRef: '1' };
 
 /** What each golden file is the text of. */
 const READS: Record<string, (db: ScopedDb, filters: JobFilters) => unknown> = {
+  'count-left': (db, filters) => countLeft(db, filters, statusesOf(filters)),
   'count-jobs': (db) => countJobs(db, LISTED),
   'iterate-job-rows': (db) => [...iterateJobRows(db, {}, 'completed')],
+  'iterate-left': (db, filters) => [...iterateLeft(db, filters, statusesOf(filters))],
   'list-billed-weeks': (db, filters) => listBilledWeeks(db, filters, 26),
   'list-job-rows-by-completion': (db, filters) =>
     listJobRows(db, filters, 'completed', undefined, 51),
@@ -44,6 +57,10 @@ const READS: Record<string, (db: ScopedDb, filters: JobFilters) => unknown> = {
   'list-job-rows-by-overrun': (db, filters) => listJobRows(db, filters, 'overrun', undefined, 51),
   'list-job-rows-by-waiting': (db, filters) => listJobRows(db, filters, 'waiting', undefined, 51),
   'list-job-rows-after-a-place': (db) => listJobRows(db, LISTED, 'completed', PLACE, 51),
+  'list-left-after-a-place': (db, filters) =>
+    listLeft(db, filters, statusesOf(filters), LEFT_AT, 51),
+  'list-left-of-job': (db) => listLeftOfJob(db, 1),
+  'list-marks': (db) => listMarks(db, 1, 'x'),
   'list-missing-costs': listMissingCosts,
   'list-week-notes': (db) => listWeekNotes(db, '2026-W01', '2026-W05'),
   'package-codes': packageCodes,
@@ -54,6 +71,11 @@ const READS: Record<string, (db: ScopedDb, filters: JobFilters) => unknown> = {
   'sum-spans': (db, { packageIds, bodyTypes }) =>
     sumSpans(db, [PERIOD, PERIOD], { packageIds, bodyTypes }),
 };
+
+/** As many statuses as packages, so that their number is seen not to change the text. */
+function statusesOf({ packageIds = [] }: JobFilters): ComeBackStatus[] {
+  return COME_BACK_STATUSES.slice(0, packageIds.length);
+}
 
 let small: SmallStore;
 beforeAll(async () => {

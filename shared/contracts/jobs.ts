@@ -1,4 +1,5 @@
 import * as z from 'zod';
+import { comeBack } from './come-back';
 import { defineEndpoint } from './endpoint';
 import {
   bodyType,
@@ -222,6 +223,8 @@ export const jobSheet = jobContent.extend({
   receivedAt: z.string(),
   source: z.enum(SOURCES),
   findings: z.array(storedFinding).optional(),
+  /** Of every finding that was left on the car, where it stands; without money, so the same for all. */
+  comeBacks: z.array(comeBack),
   warrantyMonths: z.int(),
   /** Absent for recorders; `null` where a cost is missing (rule 11). */
   money: jobMoney.nullable().optional(),

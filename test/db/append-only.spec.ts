@@ -26,7 +26,7 @@ const verify = () => verifyAudit(small.store.unscoped);
 const execute = (text: string) => () => small.store.writing.driver.exec(text);
 
 describe('The append-only tables', () => {
-  it.each(['job_revisions', 'claim_revisions', 'audit_events'])(
+  it.each(['job_revisions', 'claim_revisions', 'come_back_marks', 'audit_events'])(
     'given a change or removal in %s, refuse it',
     async (table) => {
       if (table === 'claim_revisions') {
@@ -38,7 +38,8 @@ describe('The append-only tables', () => {
             values (1, 1, '{}', '2026-01-30', 'person')`,
         );
       }
-      const column = table === 'audit_events' ? 'detail' : 'content';
+      if (table === 'come_back_marks') small.store.writing.driver.exec(ONE_MARK);
+      const column = COLUMNS[table] ?? 'content';
       const before = small.store.unscoped.all(sql(table));
       expect(before.length).toBeGreaterThan(0);
       expect(execute(`update ${table} set ${column} = '{}'`)).toThrow('append-only');
@@ -48,15 +49,28 @@ describe('The append-only tables', () => {
   );
 
   it('given a row written over by its key, refuse that too', () => {
+    small.store.writing.driver.exec(ONE_MARK);
     for (const [table, text] of Object.entries(REPLACED)) {
       const before = small.store.unscoped.all(sql(table));
+      expect(before.length).toBeGreaterThan(0);
       expect(execute(text)).toThrow('append-only');
       expect(small.store.unscoped.all(sql(table))).toEqual(before);
     }
   });
 });
 
+/** The column that a test tries to change, where it is not the content. */
+const COLUMNS: Record<string, string> = { audit_events: 'detail', come_back_marks: 'note' };
+
+const ONE_MARK = `insert into people (id, email, email_key, name, role, created_at)
+    values (7, 'a@b.example', 'a@b.example', 'A', 'site_manager', '2026-01-01');
+  insert into come_back_marks (branch_id, job_id, ref, revision, status, note, person_id, changed_at)
+    values (1, 1, 'floor/left/1', 1, 'contacted', '', 7, '2026-01-30')`;
+
 const REPLACED: Record<string, string> = {
+  come_back_marks: `replace into come_back_marks
+    (branch_id, job_id, ref, revision, status, note, person_id, changed_at)
+    values (1, 1, 'floor/left/1', 1, 'gone', '', 7, '2026-01-31')`,
   job_revisions: `replace into job_revisions (job_id, revision, change, content, received_at, source)
     values (1, 1, 'created', '{}', '2026-01-01', 'person')`,
   audit_events: `replace into audit_events

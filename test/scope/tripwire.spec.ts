@@ -101,6 +101,7 @@ const derived = ScopedDb.prototype.derived;
 const NAMED_BARE: Record<string, string> = {
   'branch-writer.ts': 'one branch for life',
   'claim-writer.ts': 'one branch for life',
+  'come-back-writer.ts': 'one branch for life',
   'copy-database.ts': 'counts the jobs of a backup',
   'derived-rows.ts': 'derived rows of one job',
   'network-state.ts': 'the cost book of the whole network',

@@ -1,6 +1,7 @@
 import { recordAudit } from '#db/queries/audit';
 import type { Scope } from '#db/scope';
 import {
+  exportComeBack,
   exportJobs,
   exportMargin,
   exportOverrun,
@@ -12,6 +13,7 @@ import {
 } from '#shared/contracts/exports';
 import { actorOf } from '../../auth/caller';
 import { realClock } from '../../clock';
+import { comeBackQuestion } from '../../http/come-back-question';
 import { streamCsv, type CsvChunks } from '../../http/csv-stream';
 import { jobListQuestion } from '../../http/job-list-question';
 import { mount, type Call, type Mounting, type Reply } from '../../http/mount';
@@ -38,6 +40,13 @@ export function mountExports(mounting: Mounting, kit: Kit): void {
     const { scope, period, filters } = scopeQuestion(kit, call.scope, query);
     return exported(kit, call, 'overrun', scope, () =>
       kit.reads.stream('overrun', scope, { period, filters, by }),
+    );
+  });
+
+  mount(mounting, exportComeBack, (call) => {
+    const { scope, ...asked } = comeBackQuestion(kit, call.scope, call.query);
+    return exported(kit, call, 'come-back', scope, () =>
+      kit.reads.stream('come-back', scope, asked),
     );
   });
 

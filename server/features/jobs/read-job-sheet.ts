@@ -1,4 +1,6 @@
 import type { ScopedDb } from '#db/scoped-db';
+import { listLeftOfJob } from '#db/queries/come-back-of-job';
+import { tellComeBack } from '#db/queries/come-back-row';
 import { findSheet, listRevisions, type RevisionRow, type SheetRow } from '#db/queries/job-sheet';
 import type { JobSheet } from '#shared/contracts/jobs';
 import { bridgeOf } from '#shared/domain/bridge';
@@ -28,6 +30,7 @@ export function readJobSheet(
     source: row.source,
     warrantyMonths: row.warrantyMonths,
     revisions: revisions.map(told),
+    comeBacks: listLeftOfJob(db, row.jobId).map(tellComeBack),
   };
   return money === 'seen'
     ? { ...sheet, ...job, ...moneyOf(row, costs) }

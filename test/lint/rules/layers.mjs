@@ -5,6 +5,7 @@ const HANDED = [
   'db/scoped-db',
   'db/branch-writer',
   'db/claim-writer',
+  'db/come-back-writer',
   'db/network-reference',
 ];
 
