@@ -37,6 +37,18 @@ export const routes: Routes = [
         loadChildren: () => import('./features/overruns/overruns.routes'),
       },
       {
+        path: 'rot',
+        title: 'Rot',
+        canActivate: [readers],
+        loadChildren: () => import('./features/rot/rot.routes'),
+      },
+      {
+        path: 'product',
+        title: 'Product',
+        canActivate: [readers],
+        loadChildren: () => import('./features/product/product.routes'),
+      },
+      {
         path: 'jobs',
         title: 'Jobs',
         loadChildren: () => import('./features/jobs/jobs.routes'),
@@ -45,6 +57,12 @@ export const routes: Routes = [
         path: 'jobs/:branch/:jobRef',
         title: 'Job sheet',
         loadChildren: () => import('./features/job-sheet/job-sheet.routes'),
+      },
+      {
+        path: 'come-backs',
+        title: 'Come-backs',
+        canActivate: [readers],
+        loadChildren: () => import('./features/come-backs/come-backs.routes'),
       },
       {
         path: 'how-it-is-counted',

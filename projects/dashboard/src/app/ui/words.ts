@@ -3,6 +3,7 @@ import type {
   BodyType,
   Check,
   CheckAnswer,
+  ComeBackStatus,
   Condition,
   ConsumableKind,
   ProductKind,
@@ -67,6 +68,14 @@ export const ACTION_NAMES: Readonly<Record<Action, string>> = {
   patched: 'patched',
   deferred: 'deferred',
   declined: 'declined by the owner',
+};
+
+export const COME_BACK_STATUS_NAMES: Readonly<Record<ComeBackStatus, string>> = {
+  open: 'open',
+  contacted: 'owner contacted',
+  booked: 'booked in',
+  done: 'done',
+  gone: 'car is gone',
 };
 
 export const BODY_TYPE_NAMES: Readonly<Record<BodyType, string>> = {

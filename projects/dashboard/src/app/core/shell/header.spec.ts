@@ -2,15 +2,17 @@ import { signal } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { provideRouter, Router } from '@angular/router';
 import type { Role } from '#shared/domain/vocabulary';
+import { DangerousCount } from '../come-back/dangerous-count';
 import { Session } from '../session/session';
 import { Header } from './header';
 
-async function shownTo(role: Role, url = '/jobs') {
+async function shownTo(role: Role, url = '/jobs', dangerous?: number) {
   const person = { id: 1, email: 'a@b.test', name: 'Ilse Torven', role, regions: [], branches: [] };
   TestBed.configureTestingModule({
     providers: [
       provideRouter([{ path: '**', children: [] }]),
       { provide: Session, useValue: { person: signal(person), role: signal(role) } },
+      { provide: DangerousCount, useValue: { dangerous: signal(dangerous) } },
     ],
   });
   await TestBed.inject(Router).navigateByUrl(url);
@@ -27,7 +29,14 @@ describe('Header', () => {
   });
 
   it('to a site manager names the pages that exist, in their order', async () => {
-    expect(names(await shownTo('site_manager'))).toEqual(['This week', 'Overruns', 'Jobs']);
+    expect(names(await shownTo('site_manager'))).toEqual([
+      'This week',
+      'Overruns',
+      'Rot',
+      'Product',
+      'Jobs',
+      'Come-backs',
+    ]);
   });
 
   it('on a job sheet marks Jobs as open, with the bead under it', async () => {
@@ -36,6 +45,19 @@ describe('Header', () => {
     expect(open?.textContent?.trim()).toBe('Jobs');
     expect(open?.querySelector('us-bead')).not.toBeNull();
     expect(element.querySelectorAll('.wide us-bead')).toHaveLength(1);
+  });
+
+  it('given dangerous findings, says how many beside Come-backs, with the sign and a word', async () => {
+    const element = await shownTo('site_manager', '/jobs', 9);
+    const count = element.querySelector('.wide .count');
+    expect(count?.textContent?.trim()).toBe('9 dangerous findings are still on cars');
+    expect(count?.querySelector('svg')).not.toBeNull();
+  });
+
+  it('given none, shows no sign of danger', async () => {
+    const element = await shownTo('site_manager', '/jobs', 0);
+    expect(element.querySelector('.wide .count')?.textContent?.trim()).toBe('none dangerous');
+    expect(element.querySelector('.wide .count svg')).toBeNull();
   });
 
   it('carries branch, package and dates from page to page, but not the week or the page of a list', async () => {

@@ -14,5 +14,8 @@ const READERS: readonly Role[] = ['site_manager', 'regional_lead', 'head_office'
 export const PAGES: readonly Page[] = [
   { path: '/this-week', name: 'This week', roles: READERS },
   { path: '/overruns', name: 'Overruns', roles: READERS },
+  { path: '/rot', name: 'Rot', roles: READERS },
+  { path: '/product', name: 'Product', roles: READERS },
   { path: '/jobs', name: 'Jobs', roles: [...READERS, 'recorder'] },
+  { path: '/come-backs', name: 'Come-backs', roles: READERS },
 ];

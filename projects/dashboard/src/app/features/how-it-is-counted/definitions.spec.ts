@@ -49,6 +49,7 @@ describe('definitions', () => {
     ],
     ...['bridge', 'weekly-chart', 'signals', 'trend', 'unbilled', 'beyond-charged', 'overrun'],
     ...['overrun-interval', 'quantiles', 'allowance', 'age-band', 'rot', 'without-cost'],
+    ...['product-use', 'under-and-over', 'ratio-to-norm', 'product-temperature', 'coming-need'],
     ...['small-samples', 'weeks', 'rounding', 'scope'],
   ])('a figure shown so far, %s: it is defined', (id) => {
     expect(ids).toContain(id);

@@ -1,6 +1,8 @@
+import { comeBackDefinitions } from './come-back-definitions';
 import type { Definition, DefinitionGroup } from './definition';
 import { labourDefinitions } from './labour-definitions';
 import { moneyDefinitions } from './money-definitions';
+import { productDefinitions } from './product-definitions';
 import { readingDefinitions } from './reading-definitions';
 import { rotDefinitions } from './rot-definitions';
 import { weeklyDefinitions } from './weekly-definitions';
@@ -11,6 +13,8 @@ export const DEFINITION_GROUPS: readonly DefinitionGroup[] = [
   { id: 'weekly', title: 'The weekly chart', definitions: weeklyDefinitions },
   { id: 'labour', title: 'Labour overrun', definitions: labourDefinitions },
   { id: 'rot-found', title: 'Rot', definitions: rotDefinitions },
+  { id: 'product', title: 'Product', definitions: productDefinitions },
+  { id: 'come-backs', title: 'Left on cars', definitions: comeBackDefinitions },
   { id: 'reading', title: 'What counts, and how it is shown', definitions: readingDefinitions },
 ];
 
