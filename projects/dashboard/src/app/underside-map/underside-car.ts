@@ -27,6 +27,8 @@ export interface DrawnPlace {
 export interface Touch {
   readonly point: Point;
   readonly key: string | undefined;
+  /** What touched it. */
+  readonly pointer: 'mouse' | 'other';
 }
 
 const BLANKS = USUAL_PLACES.flatMap(({ zone, side }) => shapesOf(zone, side));
@@ -95,7 +97,7 @@ export class UndersideCar {
     const frame = this.host.querySelector('svg')!.getBoundingClientRect();
     const x = ((event.clientX - frame.left) / frame.width) * CAR.width;
     const y = ((event.clientY - frame.top) / frame.height) * CAR.height;
-    this.touched.emit({ point: [x, y], key: key ?? undefined });
+    this.touched.emit({ point: [x, y], key: key ?? undefined, pointer: pointerOf(event) });
   }
 
   protected press(event: KeyboardEvent): void {
@@ -115,6 +117,11 @@ export class UndersideCar {
     event.preventDefault();
     this.host.querySelector<SVGElement>(`[data-key="${keys[next]}"]`)?.focus();
   }
+}
+
+/** A click says what made it where the browser knows; a finger is assumed where it does not. */
+function pointerOf(event: MouseEvent): Touch['pointer'] {
+  return 'pointerType' in event && event.pointerType === 'mouse' ? 'mouse' : 'other';
 }
 
 function afterKey(key: string, now: number, last: number): number | undefined {

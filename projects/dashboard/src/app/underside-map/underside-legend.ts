@@ -9,7 +9,7 @@ let legends = 0;
 @Component({
   selector: 'us-underside-legend',
   template: `
-    <svg aria-hidden="true" height="34" [attr.width]="6 * step() + 26">
+    <svg aria-hidden="true" height="34" [attr.width]="6 * step() + 4">
       @for (bound of bounds; track bound) {
         <rect
           y="1"

@@ -57,7 +57,7 @@ const LEFT_ARMS = ['M168 136 L195 82', 'M266 136 L209 82', 'M770 136 L800 82', '
 export const ARMS = [...LEFT_ARMS, ...LEFT_ARMS.map(mirrored)].join(' ');
 
 const LEFT_HOLES = [
-  ...[84, 152, 236, 420, 520, 620, 782, 850, 910].map((x) =>
+  ...[100, 152, 236, 420, 520, 620, 782, 850, 910].map((x) =>
     circle(x, x > 300 && x < 740 ? 101.5 : 117, 2.4),
   ),
   circle(317, 60, 3.2),
