@@ -1,13 +1,16 @@
 import type { Knex } from 'knex';
 import { sql, type Connection, type Query } from './database';
 import { whereJobs, type JobFilters } from './queries/job-filters';
+import type { QuotedCar, QuoteFigures, QuoteRung } from './queries/quote';
+import { nearestNetworkSet } from './quote-reference';
 import type { Scope } from './scope';
 
 /** Branches besides the caller's own that must stand behind a network figure before the caller may see it (rule 21). */
 export const FEWEST_OTHERS = 5;
 
-/** The visible facts of every branch, under the name that filters know. */
-const EVERY_FACT = `(select * from job_facts where gen_from <= (select generation from network)
+/** The visible facts of every branch, under the name that filters know; branch by branch, so that a period is found within each. */
+const EVERY_FACT = `(select * from job_facts where branch_id in (select id from branches)
+  and gen_from <= (select generation from network)
   and gen_to > (select generation from network)) as job_facts`;
 
 /** Cars of an age band over the network, summed. */
@@ -48,6 +51,17 @@ export class NetworkReference {
       withRot: total(own.map((cell) => cell.withRot)),
       enoughBehind: this.enoughBehind(own),
     }));
+  }
+
+  /** The nearest set of the network's cars to the one quoted for the scope's branch, with five branches besides that one behind it: the same whoever asks (rule 48). */
+  nearestQuoteSet(
+    car: QuotedCar,
+    rungs: readonly QuoteRung[],
+    fewestCars: number,
+  ): { rung: QuoteRung; figures: QuoteFigures } | undefined {
+    const [branch] = this.scope.branches;
+    const need = { cars: fewestCars, others: FEWEST_OTHERS };
+    return branch && nearestNetworkSet(this.connection, branch.id, car, rungs, need);
   }
 
   /** Whether rows of at least five branches outside the caller's reach are among some; always for head office. */
