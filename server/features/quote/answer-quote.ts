@@ -1,7 +1,18 @@
 import type { NetworkReference } from '#db/network-reference';
+import { readCostsOfDay } from '#db/queries/costs-of-day';
+import type { QuotedCar } from '#db/queries/quote';
+import { readQuoteTargets } from '#db/queries/quote-targets';
 import type { ScopedDb } from '#db/scoped-db';
 import type { QuoteAnswer } from '#shared/contracts/quote';
-import type { BodyType } from '#shared/domain/vocabulary';
+import { addMonths, ageBand, ageInYears } from '#shared/domain/calendar';
+import { roundHalfUp } from '#shared/domain/money';
+import type { QuoteMinutes } from '#shared/domain/quote-minutes';
+import { modelKey } from '#shared/domain/recorded-job';
+import { AGE_BANDS, STAGES, type BodyType } from '#shared/domain/vocabulary';
+import { wilsonInterval } from '#shared/stats/wilson-interval';
+import { nearestSet, type NearestSet } from './nearest-set';
+import { quoteCosts } from './quote-costs';
+import { quotePriceOf, type WantedMargin } from './quote-price-of';
 
 /** What a quote is asked for; the branch is the reader's only one. */
 export interface QuoteQuestion {
@@ -15,11 +26,102 @@ export interface QuoteQuestion {
   money: 'seen' | 'unseen';
 }
 
-/** A quote from the nearest set of cars. */
+/** How far back the cars of a set go, in months (rule 48). */
+const MONTHS = 36;
+/** Cars (findings for what opened up) below which no share is told (rule 13). */
+const FEWEST = 5;
+
+/** A quote from the nearest set of cars; without a branch in scope it is made from none. One snapshot of the database. */
 export function answerQuote(
-  _db: ScopedDb,
-  _question: QuoteQuestion,
-  _reference: NetworkReference,
+  db: ScopedDb,
+  question: QuoteQuestion,
+  reference: NetworkReference,
 ): QuoteAnswer {
-  throw new Error('not built yet');
+  return db.snapshot(() => {
+    const { today, money } = question;
+    const [branch] = db.scope.branches;
+    const age = ageBand(ageInYears(question.firstRegistered, today));
+    const set = branch && nearestSet(db, reference, carOf(question, AGE_BANDS.indexOf(age)));
+    const costs = branch && readCostsOfDay(db, today);
+    const { cost, ...price } = quotePriceOf(
+      set && costs && quoteCosts(set.figures, branch.code, costs),
+      costs?.feeMicros,
+      wantedMargin(db, question),
+    );
+    return {
+      on: today,
+      ageBand: age,
+      basis: set
+        ? { kind: set.kind, source: set.source, cars: set.figures.cars }
+        : { kind: 'none', source: null, cars: 0 },
+      ...figuresOf(set),
+      ...price,
+      ...(money === 'seen' && { cost }),
+    };
+  });
+}
+
+function carOf(question: QuoteQuestion, ageBandIndex: number): QuotedCar {
+  return {
+    packageId: question.packageId,
+    modelKey: modelKey(question.make, question.model),
+    bodyType: question.bodyType,
+    ageBandIndex,
+    after: addMonths(question.today, -MONTHS),
+    upTo: question.today,
+  };
+}
+
+/** The margin asked for, or the branch's target, or the network's (rules 24 and 80). */
+function wantedMargin(db: ScopedDb, { marginShare }: QuoteQuestion): WantedMargin {
+  if (marginShare !== undefined) return { share: marginShare, from: 'asked' };
+  const [branch] = db.scope.branches;
+  const targets = branch && readQuoteTargets(db, branch.id);
+  if (targets && targets.branch !== null) return { share: targets.branch, from: 'branch' };
+  if (targets && targets.network !== null) return { share: targets.network, from: 'network' };
+  return { share: null, from: null };
+}
+
+function figuresOf(
+  set: NearestSet | undefined,
+): Pick<QuoteAnswer, 'labour' | 'rot' | 'openedUp' | 'products'> {
+  const figures = set?.figures;
+  const { cars = 0, withRot = 0, bubblesWorked = 0, bubblesHoled = 0 } = figures ?? {};
+  const byStage = new Map(figures?.stages.map(({ stage, minutes }) => [stage, minutes]));
+  return {
+    labour: {
+      ...wholeMinutes(figures?.minutes),
+      stages: STAGES.map((stage) => ({ stage, ...wholeMinutes(byStage.get(stage)) })),
+    },
+    rot: { cars, withRot, ...shareOf(withRot, cars) },
+    openedUp: {
+      worked: bubblesWorked,
+      holed: bubblesHoled,
+      ...shareOf(bubblesHoled, bubblesWorked),
+    },
+    products: (figures?.products ?? []).map(({ product, ml }) => ({ product, ml: ml / cars })),
+  };
+}
+
+/** Quantiles as they are shown: whole minutes, rounded half up (rule 52). */
+function wholeMinutes(minutes: QuoteMinutes | undefined): {
+  p50Minutes: number | null;
+  p80Minutes: number | null;
+} {
+  return {
+    p50Minutes: minutes ? roundHalfUp(minutes.p50Halves, 2) : null,
+    p80Minutes: minutes ? roundHalfUp(minutes.p80Fifths, 5) : null,
+  };
+}
+
+function shareOf(
+  some: number,
+  all: number,
+): { share: number | null; lower: number | null; upper: number | null } {
+  const interval = all >= FEWEST ? wilsonInterval(some, all) : undefined;
+  return {
+    share: interval?.estimate ?? null,
+    lower: interval?.lower ?? null,
+    upper: interval?.upper ?? null,
+  };
 }

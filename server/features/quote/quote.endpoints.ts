@@ -1,7 +1,47 @@
-import type { Mounting } from '../../http/mount';
+import type { FieldProblem } from '#shared/contracts/fields';
+import { getQuote } from '#shared/contracts/quote';
+import { rateOfMicros } from '#shared/domain/money';
+import { leavesNothing } from '#shared/domain/quote-price';
+import { Refusal, refuseInput } from '#shared/domain/refusal';
+import { moneyFor } from '../../auth/caller';
+import { todayIn } from '../../clock';
+import { mount, type Mounting } from '../../http/mount';
 import type { Kit } from '../../kit';
 
-/** What the next car is likely to take. */
-export function mountQuote(_mounting: Mounting, _kit: Kit): void {
-  // The call is mounted here.
+/** What the next car is likely to take, computed in a worker. */
+export function mountQuote(mounting: Mounting, kit: Kit): void {
+  mount(mounting, getQuote, async (call) => {
+    const { branch, package: code, ...car } = call.query;
+    const money = moneyFor(call.caller);
+    if (money === 'unseen' && car.marginShare !== undefined) {
+      throw new Refusal('forbidden', 'Recorders quote for the margin that the branch has set.');
+    }
+    // A branch out of scope leaves none, as one that does not exist (rule 22).
+    const scope = call.scope.narrow({ branch: [branch] });
+    const today = todayIn(scope, kit.clock);
+    const found = kit.store.state.package(code);
+    const problems: FieldProblem[] = [
+      ...(found ? [] : [{ path: '/query/package', message: 'no package has this code' }]),
+      ...(car.firstRegistered > today.slice(0, 7)
+        ? [{ path: '/query/firstRegistered', message: `is after this month (${today})` }]
+        : []),
+      ...breaksOfMargin(kit, car.marginShare, today),
+    ];
+    if (!found || problems.length > 0) throw refuseInput(problems);
+    const question = { ...car, packageId: found.id, today, money };
+    return {
+      body: await kit.reads.answer('quote', scope, { marginShare: undefined, ...question }),
+    };
+  });
+}
+
+/** A margin must leave something of the price after the fee of today (rule 49). */
+function breaksOfMargin(kit: Kit, marginShare: number | undefined, today: string): FieldProblem[] {
+  const feeMicros = kit.store.state.costs.feeMicros(today);
+  if (marginShare === undefined || feeMicros === undefined) return [];
+  const feeRate = rateOfMicros(feeMicros);
+  if (!leavesNothing(feeRate, marginShare)) return [];
+  return [
+    { path: '/query/marginShare', message: `leaves nothing of a price after a fee of ${feeRate}` },
+  ];
 }
