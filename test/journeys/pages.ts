@@ -37,6 +37,7 @@ export function everyPage({ rotten, unbilled }: KnownJobs): Stop[] {
     { name: 'jobs-recorder', path: '/jobs', as: 'recorder' },
     { name: 'job-sheet', path: `/jobs/HAV/${rotten}`, as: 'site_manager' },
     { name: 'job-sheet-unbilled', path: `/jobs/HAV/${unbilled}`, as: 'site_manager' },
+    { name: 'hand-back', path: `/jobs/HAV/${rotten}/hand-back`, as: 'recorder' },
     { name: 'come-backs', path: '/come-backs', as: 'site_manager' },
     { name: 'come-backs-network', path: '/come-backs', as: 'head_office' },
     { name: 'come-backs-lead', path: '/come-backs?status=contacted', as: 'regional_lead' },

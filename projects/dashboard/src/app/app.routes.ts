@@ -59,6 +59,11 @@ export const routes: Routes = [
         loadChildren: () => import('./features/job-sheet/job-sheet.routes'),
       },
       {
+        path: 'jobs/:branch/:jobRef/hand-back',
+        title: 'Hand-back sheet',
+        loadChildren: () => import('./features/hand-back/hand-back.routes'),
+      },
+      {
         path: 'come-backs',
         title: 'Come-backs',
         canActivate: [readers],

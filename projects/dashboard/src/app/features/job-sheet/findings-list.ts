@@ -1,14 +1,16 @@
-import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, input, output } from '@angular/core';
+import type { ComeBack } from '#shared/contracts/come-back';
 import type { JobSheet } from '#shared/contracts/jobs';
 import { ConditionSign } from '../../ui/condition-sign/condition-sign';
 import { formatExactMoney, formatMinutes } from '../../ui/format';
 import { ACTION_NAMES, CONDITION_NAMES, SIDE_NAMES, ZONE_NAMES } from '../../ui/words';
 import { isLeftDangerous } from './cautions';
+import { LeftMark } from './left-mark';
 
 /** Rust found on the car, zone by zone: as seen, as worked, what was done. */
 @Component({
   selector: 'us-findings-list',
-  imports: [ConditionSign],
+  imports: [ConditionSign, LeftMark],
   templateUrl: './findings-list.html',
   styleUrl: './findings-list.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -16,10 +18,16 @@ import { isLeftDangerous } from './cautions';
 export class FindingsList {
   readonly findings = input.required<NonNullable<JobSheet['findings']>>();
   readonly currency = input.required<string>();
+  /** How what was left stands since. */
+  readonly comeBacks = input<readonly ComeBack[]>([]);
+  readonly today = input.required<string>();
+  readonly marked = output<ComeBack>();
 
   protected readonly items = computed(() =>
-    this.findings().map((finding) => ({
+    this.findings().map((finding, index) => ({
       ...finding,
+      number: index + 1,
+      since: this.comeBacks().find(({ ref }) => ref === finding.ref),
       place: `${ZONE_NAMES[finding.zone]}, ${SIDE_NAMES[finding.side]}`,
       seen: CONDITION_NAMES[finding.seenAs],
       worked: finding.workedAs && CONDITION_NAMES[finding.workedAs],

@@ -29,6 +29,7 @@ import { LoadState } from '../../ui/load-state/load-state';
 import { narrowWindow } from '../../ui/narrow';
 import { TableTwin } from '../../ui/table-twin/table-twin';
 import { CONSUMABLE_NAMES } from '../../ui/words';
+import { UndersideMarks } from '../../underside-map/underside-marks';
 import { BRIDGE_COLUMNS, bridgeSeries } from './bridge-series';
 import { cautionsOf } from './cautions';
 import { FactList } from './fact-list';
@@ -56,6 +57,7 @@ import { VoidDialog, type VoidDialogData } from './void-dialog';
     MatButton,
     RouterLink,
     TableTwin,
+    UndersideMarks,
   ],
   templateUrl: './job-sheet-page.html',
   styleUrl: './job-sheet-page.scss',
@@ -82,6 +84,7 @@ export class JobSheetPage {
   );
   protected readonly sign = computed(() => currencySign(this.catalogue.currency()));
   protected readonly currency = this.catalogue.currency;
+  protected readonly today = computed(() => this.catalogue.today() ?? '');
   protected readonly sheet = computed(() => {
     const job = this.job.value();
     if (!job) return undefined;
