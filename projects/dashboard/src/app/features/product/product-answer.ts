@@ -1,0 +1,120 @@
+import type { Params } from '@angular/router';
+import type { ProductBranch, ProductsAnswer, ProductUse } from '#shared/contracts/products';
+import type { AnswerPart } from '../../ui/answer/answer';
+import { formatCars, formatCount, formatExactMoney, formatShare } from '../../ui/format';
+import { carsOfUse } from './cars-of-use';
+import { carsOfKind, intervalText, type ProductWords } from './product-words';
+import { worstUse } from './worst-use';
+
+/** The page's answer: how much of the norm went in, and where cars got far too little. */
+export interface ProductSentences {
+  readonly sentence: readonly AnswerPart[];
+  readonly second: readonly AnswerPart[];
+}
+
+/** Says product use against the norm, over all products; `filters` are the page's own, for the link to the cars. */
+export function answerProducts(
+  answer: ProductsAnswer,
+  words: ProductWords,
+  filters: Params = {},
+): ProductSentences {
+  const { jobs, overall } = answer;
+  if (jobs === 0) {
+    return {
+      sentence: ['No car was finished in this time.'],
+      second: [
+        'Choose a longer time, or more branches, packages or body types, in the line above.',
+      ],
+    };
+  }
+  if (overall.cars === 0) {
+    return {
+      sentence: ['No norm is set for ', { figure: formatCars(jobs) }, ' of this time.'],
+      second: [
+        'Until head office sets what a package should take on a body type, use is shown in millilitres alone.',
+      ],
+    };
+  }
+  if (overall.ratioToNorm === null) {
+    return {
+      sentence: ['Too few cars yet: ', { figure: formatCars(overall.cars) }, ' with a norm.'],
+      second: ['A share is shown from 5 cars on. Choose a longer time in the line above.'],
+    };
+  }
+  return {
+    sentence: firstSentence(overall, words),
+    second: secondSentence(answer, words, filters),
+  };
+}
+
+function firstSentence(
+  { ratioToNorm, lower, upper, cars, costPerCarCents }: ProductsAnswer['overall'],
+  words: ProductWords,
+): AnswerPart[] {
+  const behind = [intervalText(lower, upper), formatCars(cars)].filter(Boolean).join(', ');
+  const cost =
+    costPerCarCents === null
+      ? ''
+      : `, ${formatExactMoney(costPerCarCents, words.currency)} of product a car`;
+  return [
+    { figure: formatShare(ratioToNorm ?? 0) },
+    ' of the norm went in ',
+    { quiet: `(${behind})` },
+    `${cost}.`,
+  ];
+}
+
+function secondSentence(
+  answer: ProductsAnswer,
+  words: ProductWords,
+  filters: Params,
+): AnswerPart[] {
+  const branches = branchSentence(answer.branches, words);
+  return [...worstSentence(answer, words, filters), ...(branches ? [` ${branches}`] : [])];
+}
+
+function worstSentence(
+  { use, period }: ProductsAnswer,
+  words: ProductWords,
+  filters: Params,
+): AnswerPart[] {
+  const worst = worstUse(use);
+  if (!worst) return ['In no kind of car did 1 in 100 get less than 70 % of the norm.'];
+  const none = worst.cars - worst.carsListing;
+  return [
+    `${words.productName(worst.product)} in ${carsOfKind(worst, words)}: `,
+    carsUnder(worst, { ...filters, ...carsOfUse(worst, 'under', period) }),
+    ` got less than 70 % of the norm${none > 0 ? `, ${formatCount(none)} of them none at all` : ''}.`,
+  ];
+}
+
+function carsUnder({ underShare, cars }: ProductUse, query: Params): Exclude<AnswerPart, string> {
+  const text = `${formatShare(underShare ?? 0)} of ${formatCars(cars)}`;
+  return { text, link: '/jobs', query };
+}
+
+/** Of several branches, who lies furthest from the norm either way: by name, and only where the interval misses it. */
+function branchSentence(branches: readonly ProductBranch[], words: ProductWords): string {
+  if (branches.length < 2) return '';
+  const said = (branch: ProductBranch | undefined): string =>
+    branch
+      ? `${words.branchName(branch.branch)} ${formatShare(branch.ratioToNorm ?? 0)} (${intervalText(branch.lower, branch.upper)})`
+      : '';
+  const low = said(furthest(branches, ({ upper }) => upper !== null && upper < 1, 'least'));
+  const high = said(furthest(branches, ({ lower }) => lower !== null && lower > 1, 'most'));
+  if (low && high) return `${low} put in clearly less than its norm, ${high} clearly more.`;
+  if (low) return `${low} put in clearly less than its norm.`;
+  if (high) return `${high} put in clearly more than its norm.`;
+  return 'No branch lies clearly beside its norm.';
+}
+
+function furthest(
+  branches: readonly ProductBranch[],
+  misses: (branch: ProductBranch) => boolean,
+  end: 'least' | 'most',
+): ProductBranch | undefined {
+  const sign = end === 'least' ? 1 : -1;
+  return branches
+    .filter(misses)
+    .sort((a, b) => sign * ((a.ratioToNorm ?? 1) - (b.ratioToNorm ?? 1)))[0];
+}

@@ -1,0 +1,132 @@
+import { provideHttpClient } from '@angular/common/http';
+import { HttpTestingController, provideHttpClientTesting } from '@angular/common/http/testing';
+import { CUSTOM_ELEMENTS_SCHEMA, signal } from '@angular/core';
+import { TestBed } from '@angular/core/testing';
+import { provideRouter, Router } from '@angular/router';
+import { Catalogue } from '../../core/catalogue/catalogue';
+import { ScopeLine } from '../../core/scope-line/scope-line';
+import { noProducts, productNeedAnswer, productsAnswer } from '../../testing/product-answers';
+import { ProductPage } from './product-page';
+
+async function open(product?: string) {
+  TestBed.configureTestingModule({
+    providers: [
+      provideHttpClient(),
+      provideHttpClientTesting(),
+      provideRouter([{ path: 'product', children: [] }]),
+      {
+        provide: Catalogue,
+        useValue: {
+          today: signal('2026-02-02'),
+          currency: signal('EUR'),
+          value: signal({ products: [{ code: 'CW1', name: 'Cavity wax', kind: 'cavity_wax' }] }),
+          branchName: (code: string) => code,
+          packageWord: (code: string) => code,
+          productName: (code: string) => (code === 'CW1' ? 'Cavity wax' : code),
+        },
+      },
+    ],
+  }).overrideComponent(ProductPage, {
+    remove: { imports: [ScopeLine] },
+    add: { schemas: [CUSTOM_ELEMENTS_SCHEMA] },
+  });
+  await TestBed.inject(Router).navigateByUrl('/product?branch=HAV');
+  const http = TestBed.inject(HttpTestingController);
+  const fixture = TestBed.createComponent(ProductPage);
+  fixture.componentRef.setInput('product', product);
+  const settle = async (): Promise<void> => {
+    await new Promise((done) => setTimeout(done));
+    fixture.detectChanges();
+  };
+  fixture.detectChanges();
+  await settle();
+  return { http, settle, host: fixture.nativeElement as HTMLElement };
+}
+
+async function answer(
+  page: Awaited<ReturnType<typeof open>>,
+  products = productsAnswer(),
+  need = productNeedAnswer(),
+): Promise<void> {
+  for (const call of page.http.match(() => true)) {
+    call.flush(call.request.url.includes('product-need') ? need : products);
+  }
+  await page.settle();
+}
+
+describe('ProductPage', () => {
+  it('opened: asks for use and need in the scope of the URL', async () => {
+    const { http } = await open();
+    const asked = http.match(() => true).map(({ request }) => request.urlWithParams);
+    expect(asked).toHaveLength(2);
+    for (const url of asked) {
+      expect(url).toContain('branch=HAV');
+      expect(url).toContain('to=2026-02-02');
+    }
+  });
+
+  it('answered: sentence, chosen product, its rows, temperature in words, caution and what to order', async () => {
+    const page = await open();
+    await answer(page);
+    // The chips choose their option a turn later.
+    await page.settle();
+    const { host } = page;
+    expect(host.querySelector('h1')?.textContent).toContain('of the norm went in');
+    expect(host.querySelector('mat-chip-option.mat-mdc-chip-selected')?.textContent).toContain(
+      'Cavity wax',
+    );
+    expect(host.textContent).toContain('41 ml less for every degree warmer');
+    expect(host.querySelector('us-caution')?.textContent).toContain('Solvent mist');
+    expect(host.querySelector('.rows')?.textContent).toContain('full hatchback');
+    expect(host.querySelector('us-coming-need')?.textContent).toContain('23 cars in the diary');
+    expect(host.querySelector('.branches')).toBeNull();
+  });
+
+  it('a product without a norm: says so and lists it in millilitres', async () => {
+    const page = await open('RC1');
+    await answer(page);
+    expect(page.host.textContent).toContain('RC1, no norm');
+    expect(page.host.textContent).toContain('RC1 without a norm, ml a car');
+    expect(page.host.querySelector('us-use-box-chart')).toBeNull();
+  });
+
+  it('no job: why, what to do, and nothing drawn', async () => {
+    const page = await open();
+    await answer(page, noProducts(), productNeedAnswer({ jobs: 0, needs: [] }));
+    expect(page.host.querySelector('h1')?.textContent).toContain('No car was finished');
+    expect(page.host.querySelector('.pictures')).toBeNull();
+    expect(page.host.querySelector('us-coming-need')?.textContent).toContain('Nothing is expected');
+  });
+
+  it('the list printed: alone, with room for what is ordered; then the page is back', async () => {
+    const print = jest.fn();
+    Object.defineProperty(window, 'print', { configurable: true, value: print });
+    const page = await open();
+    await answer(page);
+    const button = [...page.host.querySelectorAll('button')].find(
+      (one) => one.textContent?.trim() === 'Print the list',
+    );
+    button?.click();
+    await page.settle();
+    const list = page.host.querySelector('us-order-list');
+    expect(print).toHaveBeenCalledTimes(1);
+    expect(list?.textContent).toContain('Ordered');
+    expect(list?.textContent).toContain('HAV');
+    expect(list?.textContent).toContain('2026. 23 cars in the diary');
+    expect(page.host.querySelector('us-scope-line')?.classList).toContain('us-unprinted');
+    window.dispatchEvent(new Event('afterprint'));
+    await page.settle();
+    expect(page.host.querySelector('us-order-list')).toBeNull();
+  });
+
+  it('the use fails, the need does not: each says its own', async () => {
+    const page = await open();
+    for (const call of page.http.match(() => true)) {
+      if (call.request.url.includes('product-need')) call.flush(productNeedAnswer());
+      else call.flush(null, { status: 500, statusText: 'Failed' });
+    }
+    await page.settle();
+    expect(page.host.querySelector('[role=alert]')?.textContent).toContain('Try again');
+    expect(page.host.querySelector('us-coming-need')?.textContent).toContain('in the diary');
+  });
+});
