@@ -1,4 +1,5 @@
 import type { Side, Zone } from '#shared/domain/vocabulary';
+import { naturalSides } from '#shared/domain/zone-sides';
 import { spreadLabels } from '../charts/spread-labels';
 import { formatShare } from '../ui/format';
 import { SIDE_NAMES, ZONE_NAMES } from '../ui/words';
@@ -14,7 +15,8 @@ import type { UndersideArea } from './underside-input';
 /** A share with its zone's name, and the line that leads to it. */
 export interface MapLabel {
   readonly key: string;
-  readonly share: string;
+  /** The share as it is read, nothing where there is too little to say it. */
+  readonly share: string | null;
   readonly name: readonly string[];
   /** Where the share stands, its middle line; the name follows below, or beside it on one line. */
   readonly x: number;
@@ -112,7 +114,7 @@ function insideLabel({ area, side }: Shown, car: CarPlace): MapLabel {
   const label = words(area, side);
   const half = !isSided(area.zone) && side !== 'centre';
   if (area.zone === 'floor' || half) {
-    const name = area.zone === 'floor' && side !== 'centre' ? 'floor' : SIDE_NAMES[side];
+    const name = area.zone === 'floor' && side !== 'centre' ? 'floor' : SIDE_NAMES[area.side];
     return { ...label, name: [name], x, y, anchor: 'middle', flow: 'beside', on: onOf(area, side) };
   }
   return {
@@ -135,12 +137,13 @@ function words(
   split: 'lines' | 'whole' = 'lines',
 ): Pick<MapLabel, 'key' | 'share' | 'name' | 'flow' | 'on' | 'leader'> {
   const whole = ZONE_NAMES[area.zone];
-  const unusual = isSided(area.zone) ? area.side === 'centre' : area.side !== 'centre';
+  // A side is said where the place is not the whole of what the car has there.
+  const usual = naturalSides(area.zone).includes(area.side) && side === area.side;
   const name = split === 'whole' ? [whole] : whole.split(' ');
   return {
     key: `${placeKey(area)}/${side}`,
-    share: area.share === null ? 'too few' : formatShare(area.share),
-    name: unusual ? [...name, SIDE_NAMES[area.side]] : name,
+    share: area.share === null ? null : formatShare(area.share),
+    name: usual ? name : [...name, SIDE_NAMES[area.side]],
     flow: 'below',
     on: null,
     leader: null,

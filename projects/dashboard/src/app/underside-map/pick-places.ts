@@ -1,8 +1,9 @@
 import type { Side } from '#shared/domain/vocabulary';
+import { naturalSides } from '#shared/domain/zone-sides';
 import { SIDE_NAMES, ZONE_NAMES } from '../ui/words';
 import { anchorOf } from './geometry/anchors';
 import type { Point } from './geometry/outline';
-import { alongTheCar, shapesOf, USUAL_PLACES, usualSides } from './geometry/place-shapes';
+import { alongTheCar, shapesOf, USUAL_PLACES } from './geometry/place-shapes';
 import { withinReach } from './geometry/reach';
 import { placeKey, placeName } from './place-words';
 import type { UndersidePlace } from './underside-input';
@@ -31,7 +32,7 @@ export function isSame(one: UndersidePlace | null, other: UndersidePlace | null)
 
 /** Where the car has the zone only by a finding's word: the left of the boot floor, the middle of the floor. */
 export function isUnusual({ zone, side }: UndersidePlace): boolean {
-  return !usualSides(zone).includes(side);
+  return !naturalSides(zone).includes(side);
 }
 
 /**
@@ -79,6 +80,6 @@ export function sideWords(side: Side): string {
 export function asksForSide(place: UndersidePlace | null): place is UndersidePlace {
   return (
     place !== null &&
-    (place.zone === 'floor' || usualSides(place.zone).length === 1 || isUnusual(place))
+    (place.zone === 'floor' || naturalSides(place.zone).length === 1 || isUnusual(place))
   );
 }

@@ -76,15 +76,26 @@ export class UndersideCar {
   });
   private readonly host = inject<ElementRef<HTMLElement>>(ElementRef).nativeElement;
   private readonly last = signal<string | null>(null);
+  private readonly ringKey = signal<string | null>(null);
+  /** The place with the ring of the keyboard, drawn over its neighbours. */
+  protected readonly ringed = computed(() =>
+    this.places().find(({ key }) => key === this.ringKey()),
+  );
   /** The one place that Tab stops at. */
   protected readonly stop = computed(() => {
     const keys = this.places().map(({ key }) => key);
     return [this.last(), this.picked()].find((key) => key && keys.includes(key)) ?? keys[0];
   });
 
-  protected enter(key: string): void {
+  protected enter(key: string, event: FocusEvent): void {
     this.last.set(key);
+    this.ringKey.set((event.target as Element).matches(':focus-visible') ? key : null);
     this.pointed.emit(key);
+  }
+
+  protected leave(): void {
+    this.ringKey.set(null);
+    this.pointed.emit(null);
   }
 
   protected touch(event: MouseEvent): void {

@@ -10,7 +10,12 @@ import { UndersideCar } from './underside-car';
 import type { UndersideFinding } from './underside-input';
 import { UndersideMarksLayer } from './underside-marks-layer';
 
-const MARK = { width: 48, height: 22 };
+const MARKS = {
+  signed: { width: 48, height: 22 },
+  numbered: { width: 21, height: 21 },
+} as const;
+/** A car narrower than this is drawn plain, its marks without their signs. */
+const FULL_FROM = 480;
 /** From this width of the whole on, the list stands beside the car, not below it. */
 const BESIDE_FROM = 720;
 const WIDEST_CAR = 640;
@@ -38,7 +43,11 @@ export class UndersideMarks {
     return { x: 0, y: 0, width, height: (width * CAR.height) / CAR.width };
   });
   protected readonly places = computed(() => drawnFindings(this.findings()));
-  protected readonly marks = computed(() => layOutMarks(this.findings(), this.car(), MARK));
+  protected readonly plain = computed(() => this.car().width < FULL_FROM);
+  protected readonly kind = computed(() => (this.plain() ? 'numbered' : 'signed'));
+  protected readonly marks = computed(() =>
+    layOutMarks(this.findings(), this.car(), MARKS[this.kind()]),
+  );
   protected readonly rows = computed(() =>
     this.findings().map((finding, index) => ({
       ref: finding.ref,

@@ -1,4 +1,5 @@
 import { ZONES, type Side, type Zone } from '#shared/domain/vocabulary';
+import { naturalSides } from '#shared/domain/zone-sides';
 import { closedHalf, joined, mirrored } from './outline';
 import { MIDDLE_HALVES, SIDED_PATHS, TUNNEL_HALF } from './zone-paths';
 
@@ -10,14 +11,9 @@ export function isSided(zone: Zone): zone is SidedZone {
   return zone in SIDED_PATHS;
 }
 
-/** The side under which a zone on the middle, or one on both sides, is met first. */
-export function usualSides(zone: Zone): readonly Side[] {
-  return isSided(zone) ? ['left', 'right'] : ['centre'];
-}
-
 /** Every zone on the sides where a car has it, in the order of the vocabulary. */
 export const USUAL_PLACES = ZONES.flatMap((zone) =>
-  usualSides(zone).map((side) => ({ zone, side })),
+  naturalSides(zone).map((side) => ({ zone, side })),
 );
 
 /**
