@@ -16,6 +16,9 @@ export interface Mark {
   ownerToldOn: string | null;
 }
 
+/** What a mark is set on: a finding, and how many marks it has already. */
+export type MarkedFinding = Pick<ComeBackRow, 'job_id' | 'job_ref' | 'ref' | 'revision'>;
+
 /** Who sets a mark and when. */
 export interface Marking {
   actor: Actor & { personId: number };
@@ -45,7 +48,7 @@ export class ComeBackWriter {
   }
 
   /** Adds a mark to those of a finding and tells the trail; `before` is the one that held until now. */
-  mark(found: ComeBackRow, mark: Mark, before: Mark | null, { actor, at }: Marking): void {
+  mark(found: MarkedFinding, mark: Mark, before: Mark | null, { actor, at }: Marking): void {
     this.connection
       .prepare(
         `insert into come_back_marks (branch_id, job_id, ref, revision, status, due_on, note,

@@ -3,6 +3,7 @@ import { waysOf } from './branch-quirks';
 import type { BranchNature } from './branches';
 import { drawCar, monthNumber, type Car } from './cars';
 import { PACKAGE_MIX } from './catalogue';
+import { drawComeBackMarks } from './come-back-marks';
 import { drawBookings } from './coming-bookings';
 import { firstDay } from './dated-costs';
 import type { BranchHistory, DemoJob, PackageCode } from './demo-network';
@@ -37,6 +38,7 @@ export function historyOf(branch: BranchNature, seed: number, today: string): Br
     claims: drawClaims(stream('claims'), branch, jobs, today),
     bookings: drawBookings(stream('bookings'), branch, workWeek, today),
     weekNotes: drawWeekNotes(stream('notes'), branch, today),
+    comeBackMarks: drawComeBackMarks(stream('come-backs'), jobs, today),
   };
 }
 

@@ -1,4 +1,5 @@
 import type { z } from 'zod';
+import type { Mark } from '#db/come-back-writer';
 import type { ClaimContent } from '#shared/contracts/claims';
 import type { JobContent } from '#shared/contracts/jobs';
 import type { bookingContent } from '#shared/contracts/bookings';
@@ -86,6 +87,14 @@ export interface DemoWeekNote {
   changedAt: string;
 }
 
+/** A mark on a finding that was left on a car. */
+export interface DemoComeBackMark {
+  jobRef: string;
+  ref: string;
+  mark: Mark;
+  changedAt: string;
+}
+
 /** Five years of one branch. Jobs stand in the order in which they first arrived. */
 export interface BranchHistory {
   branchCode: string;
@@ -93,6 +102,7 @@ export interface BranchHistory {
   claims: DemoClaim[];
   bookings: DemoBooking[];
   weekNotes: DemoWeekNote[];
+  comeBackMarks: DemoComeBackMark[];
 }
 
 /** The demo network: what is set up, and the branches' histories, made one at a time as they are asked for. */

@@ -12,6 +12,7 @@ import type { JobContent } from '#shared/contracts/jobs';
 import { breaksOfClaim } from '#shared/domain/claim-rules';
 import type { JobWorld } from '#shared/domain/job-rules';
 import type { BranchHistory, DemoClaim, DemoWeekNote } from './demo-network';
+import { markEvents } from './load-come-back-marks';
 import type { Senders } from './load-people';
 
 /** Something that reached the network after a job's first arrival, to be done in the order of its moment. */
@@ -72,6 +73,7 @@ export function loadHistory(loading: Loading, history: BranchHistory): LaterEven
     ...later,
     ...claimEvents(loading, history.claims),
     ...noteEvents(loading, history.weekNotes),
+    ...markEvents(loading, history.comeBackMarks),
   ];
 }
 

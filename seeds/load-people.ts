@@ -22,6 +22,8 @@ export interface Senders {
   system: Actor;
   mender: Actor;
   managerId: number | undefined;
+  /** Who marks what was left on cars: the manager, or head office for a branch without one in the demo. */
+  marker: Actor & { personId: number };
 }
 
 /** Hashes the demo's passwords, before the write that stores them. */
@@ -59,7 +61,8 @@ export function loadSenders(
   createdAt: string,
 ): Map<string, Senders> {
   const office = DEMO_PEOPLE.find((person) => person.role === 'head_office');
-  const createdBy = people.get(office?.email ?? '') ?? null;
+  const createdBy = people.get(office?.email ?? '');
+  if (!office || createdBy === undefined) throw new Error('the demo has nobody at head office');
   return new Map(
     branches.map((branch, index) => {
       const known = branch.code === DEMO_PUSH_KEY.branch;
@@ -76,10 +79,14 @@ export function loadSenders(
       const manager = managerOf(branch.code);
       const managerId = manager && people.get(manager.email);
       const mender: Actor =
-        manager && managerId !== undefined
-          ? { label: manager.email, personId: managerId, pushKeyId: null, address: 'demo data' }
-          : system;
-      return [branch.code, { system, mender, managerId }];
+        manager && managerId !== undefined ? byHand(manager, managerId) : system;
+      const marker =
+        manager && managerId !== undefined ? byHand(manager, managerId) : byHand(office, createdBy);
+      return [branch.code, { system, mender, managerId, marker }];
     }),
   );
+}
+
+function byHand({ email }: DemoPerson, personId: number): Actor & { personId: number } {
+  return { label: email, personId, pushKeyId: null, address: 'demo data' };
 }
