@@ -7,17 +7,18 @@ beforeAll(async () => {
   app = await TestApp.start({ now: '2026-02-02T06:30:00Z' });
   network = await makeSmallNetwork(app);
   for (const branch of ['AAA', 'BBB']) {
-    for (let index = 0; index < 6; index += 1) {
-      const body = validJob({
+    const jobs = Array.from({ length: 6 }, (_, index) => ({
+      jobRef: `p-${index}`,
+      ...validJob({
         products: index === 0 ? [] : [{ product: 'CW1', ml: 1000 * index }],
         workshop: { temperatureC: 10 + index },
-      });
-      const path = `/api/branches/${branch}/jobs/p-${index}`;
-      const answer = await app.call('put', path, { token: network.keys[branch], body });
-      expect(answer.status).toBe(201);
-    }
+      }),
+    }));
+    const path = `/api/branches/${branch}/jobs/batch`;
+    const answer = await app.call('post', path, { token: network.keys[branch], body: { jobs } });
+    expect(answer.status).toBe(200);
   }
-});
+}, 60_000);
 afterAll(() => app.stop());
 
 const products = (query = '', token = network.lead) =>
