@@ -6,8 +6,11 @@ import { verifyAudit } from '#db/queries/audit';
 import { isEmptyNetwork } from '#db/queries/empty-network';
 import { listPeople } from '#db/queries/people';
 import { matchPushKey } from '#db/queries/push-keys';
+import { Scope } from '#db/scope';
 import { Store } from '#db/store';
+import { listComeBacks } from '#server/features/come-back/list-come-backs';
 import { deriveFigures } from '#shared/domain/job-figures';
+import { OPEN_COME_BACKS, type ComeBackStatus } from '#shared/domain/vocabulary';
 import { historyOf } from './branch-history';
 import { BRANCHES } from './branches';
 import { costBookOf } from './demo-costs';
@@ -91,6 +94,30 @@ describe('loadNetwork', () => {
     expect(rows('week_notes')).toBe(count((history) => history.weekNotes));
     expect(rows('week_notes')).toBeGreaterThan(0);
     expect(store.unscoped.all(sql('claims').whereNotNull('proposed_decision'))).toEqual([]);
+  });
+
+  test('for what was left on cars, has a list that a manager can work through', () => {
+    const manager = Scope.ofGrant(store.state.branches, {
+      role: 'site_manager',
+      branchIds: store.state.branches.filter(({ code }) => code === 'HAV').map(({ id }) => id),
+      regionCodes: [],
+    });
+    const asked = { filters: {}, limit: 200, after: null };
+    const list = (...statuses: ComeBackStatus[]) =>
+      listComeBacks(store.scoped(manager), { ...asked, statuses });
+    const marks = demo.branches.reduce((all, { comeBackMarks }) => all + comeBackMarks.length, 0);
+    expect(rows('come_back_marks')).toBe(marks);
+    const open = list(...OPEN_COME_BACKS);
+    expect(open.findings).toBeGreaterThan(20);
+    expect(open.findings).toBeLessThan(80);
+    expect(open.dangerousNotTold).toBeGreaterThan(0);
+    expect(open.dangerousNotTold).toBeLessThan(10);
+    expect(new Set(open.items.map(({ status }) => status))).toEqual(new Set(OPEN_COME_BACKS));
+    const { items } = list('done');
+    expect(items.filter(({ closedByJobRef }) => closedByJobRef !== null).length).toBeGreaterThan(
+      20,
+    );
+    expect(items.some(({ closedByJobRef }) => closedByJobRef === null)).toBe(true);
   });
 
   test('in the audit trail, tells later events in time order on an unbroken chain', () => {
