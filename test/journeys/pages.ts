@@ -19,6 +19,10 @@ export interface KnownJobs {
   unbilled: string;
 }
 
+/** A car that the demo branch has seen often. */
+const QUOTED =
+  'make=Velder&model=Tessock&firstRegistered=2012-05&bodyType=hatchback&package=full&branch=HAV';
+
 /** Every page there is. */
 export function everyPage({ rotten, unbilled }: KnownJobs): Stop[] {
   return [
@@ -41,6 +45,9 @@ export function everyPage({ rotten, unbilled }: KnownJobs): Stop[] {
     { name: 'come-backs', path: '/come-backs', as: 'site_manager' },
     { name: 'come-backs-network', path: '/come-backs', as: 'head_office' },
     { name: 'come-backs-lead', path: '/come-backs?status=contacted', as: 'regional_lead' },
+    { name: 'quote', path: `/quote?${QUOTED}`, as: 'site_manager' },
+    { name: 'quote-recorder', path: `/quote?${QUOTED}`, as: 'recorder' },
+    { name: 'quote-empty', path: '/quote', as: 'site_manager' },
     { name: 'how-it-is-counted', path: '/how-it-is-counted', as: 'site_manager' },
     { name: 'account', path: '/account', as: 'site_manager' },
     { name: 'mailbox', path: '/mailbox', as: 'head_office' },
@@ -104,6 +111,13 @@ export function everyState({ rotten }: KnownJobs): Stop[] {
       name: 'come-backs-none',
       path: '/come-backs?from=2015-01-01&to=2015-02-01',
       as: 'site_manager',
+    },
+    { name: 'quote-tables', path: `/quote?${QUOTED}`, as: 'head_office', prepare: showTables },
+    {
+      name: 'quote-incomplete',
+      path: '/quote',
+      as: 'recorder',
+      prepare: press('Quote it'),
     },
     { name: 'scope-branches', path: '/jobs', as: 'head_office', prepare: press(/^Branches/) },
     { name: 'scope-week', path: '/this-week', as: 'site_manager', prepare: press(/^Week/) },

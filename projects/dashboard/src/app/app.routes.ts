@@ -70,6 +70,11 @@ export const routes: Routes = [
         loadChildren: () => import('./features/come-backs/come-backs.routes'),
       },
       {
+        path: 'quote',
+        title: 'Quote',
+        loadChildren: () => import('./features/quote/quote.routes'),
+      },
+      {
         path: 'how-it-is-counted',
         title: 'How it is counted',
         loadChildren: () => import('./features/how-it-is-counted/how-it-is-counted.routes'),

@@ -24,8 +24,8 @@ const names = (element: HTMLElement) =>
   [...element.querySelectorAll('.wide a')].map((link) => link.textContent?.trim());
 
 describe('Header', () => {
-  it('to a recorder names Jobs alone', async () => {
-    expect(names(await shownTo('recorder'))).toEqual(['Jobs']);
+  it('to a recorder names Jobs and Quote', async () => {
+    expect(names(await shownTo('recorder'))).toEqual(['Jobs', 'Quote']);
   });
 
   it('to a site manager names the pages that exist, in their order', async () => {
@@ -36,6 +36,7 @@ describe('Header', () => {
       'Product',
       'Jobs',
       'Come-backs',
+      'Quote',
     ]);
   });
 

@@ -18,4 +18,5 @@ export const PAGES: readonly Page[] = [
   { path: '/product', name: 'Product', roles: READERS },
   { path: '/jobs', name: 'Jobs', roles: [...READERS, 'recorder'] },
   { path: '/come-backs', name: 'Come-backs', roles: READERS },
+  { path: '/quote', name: 'Quote', roles: [...READERS, 'recorder'] },
 ];

@@ -3,6 +3,7 @@ import type { Definition, DefinitionGroup } from './definition';
 import { labourDefinitions } from './labour-definitions';
 import { moneyDefinitions } from './money-definitions';
 import { productDefinitions } from './product-definitions';
+import { quoteDefinitions } from './quote-definitions';
 import { readingDefinitions } from './reading-definitions';
 import { rotDefinitions } from './rot-definitions';
 import { weeklyDefinitions } from './weekly-definitions';
@@ -15,6 +16,7 @@ export const DEFINITION_GROUPS: readonly DefinitionGroup[] = [
   { id: 'rot-found', title: 'Rot', definitions: rotDefinitions },
   { id: 'product', title: 'Product', definitions: productDefinitions },
   { id: 'come-backs', title: 'Left on cars', definitions: comeBackDefinitions },
+  { id: 'quotes', title: 'The next car', definitions: quoteDefinitions },
   { id: 'reading', title: 'What counts, and how it is shown', definitions: readingDefinitions },
 ];
 
