@@ -15,6 +15,11 @@ export interface ListFilters extends JobFilters {
   unbilled?: boolean | undefined;
   hasRot?: boolean | undefined;
   hasEstimate?: boolean | undefined;
+  /** Places as `placesMask` gives them: cars with rot in any of these. */
+  rotPlaces?: number | undefined;
+  /** A product that went in or, with `productUse`, went in too little or too much of against its norm. */
+  productId?: number | undefined;
+  productUse?: 'under' | 'over' | undefined;
   /** Plain text, looked for in reference, make and model without regard to case. */
   text?: string | undefined;
 }
@@ -116,14 +121,14 @@ export function iterateJobRows(
 /** How many jobs match. */
 export function countJobs(db: ScopedDb, filters: ListFilters): number {
   const row = db.first<{ jobs: number }>(
-    whereListed(db.table('job_facts'), filters).count({ jobs: '*' }),
+    whereListed(db, db.table('job_facts'), filters).count({ jobs: '*' }),
   );
   return row?.jobs ?? 0;
 }
 
 function sortedJobs(db: ScopedDb, filters: ListFilters, sort: JobSort): Knex.QueryBuilder {
   return (
-    whereListed(db.table('job_facts'), filters)
+    whereListed(db, db.table('job_facts'), filters)
       .join('branches', 'branches.id', 'job_facts.branch_id')
       .join('packages', 'packages.id', 'job_facts.package_id')
       // By its alias: a constant key written out would be read as the number of a column.
@@ -136,7 +141,11 @@ function sortedJobs(db: ScopedDb, filters: ListFilters, sort: JobSort): Knex.Que
   );
 }
 
-function whereListed(query: Knex.QueryBuilder, filters: ListFilters): Knex.QueryBuilder {
+function whereListed(
+  db: ScopedDb,
+  query: Knex.QueryBuilder,
+  filters: ListFilters,
+): Knex.QueryBuilder {
   whereJobs(query, filters);
   // model_key is the folded make, a unit separator, the folded model.
   if (filters.make !== undefined) {
@@ -153,7 +162,39 @@ function whereListed(query: Knex.QueryBuilder, filters: ListFilters): Knex.Query
   if (filters.hasEstimate !== undefined) {
     query.where('has_estimate', filters.hasEstimate ? 1 : 0);
   }
+  if (filters.rotPlaces !== undefined) {
+    query.whereRaw('rot_zones & cast(? as integer) <> 0', [filters.rotPlaces]);
+  }
+  if (filters.productId !== undefined) {
+    whereProduct(db, query, filters.productId, filters.productUse);
+  }
   const text = filters.text === undefined ? '' : folded(filters.text);
   if (text !== '') query.whereRaw('instr(search_text, ?) > 0', [text]);
   return query;
+}
+
+/** The edges of rule 37 in whole numbers: strictly under 70 %, strictly over 130 % of the norm. */
+const EDGES = { under: '10 * used < 7 * norm', over: '10 * used > 13 * norm' };
+
+/** Cars by what they took of a product; against its norm a car that lists nothing of it took 0 ml (rule 37). */
+function whereProduct(
+  db: ScopedDb,
+  query: Knex.QueryBuilder,
+  productId: number,
+  use: ListFilters['productUse'],
+): void {
+  const used = `select ml from ? where job_products.branch_id = job_facts.branch_id
+    and job_products.completed_on = job_facts.completed_on
+    and job_products.job_id = job_facts.job_id and product_id = ?`;
+  const bindings = [db.derived('job_products'), productId];
+  if (use === undefined) {
+    query.whereRaw(`exists (${used} and ml > 0)`, bindings);
+    return;
+  }
+  query.whereRaw(
+    `exists (select coalesce((${used}), 0) as used, norms.ml as norm from norms
+      where norms.package_id = job_facts.package_id and norms.body_type = job_facts.body_type
+        and norms.product_id = ? and ${EDGES[use]})`,
+    [...bindings, productId],
+  );
 }

@@ -130,4 +130,18 @@ describe('GET /api/jobs', () => {
       expect(page.status).toBe(200);
     }
   });
+
+  it('given places and products, lists the cars behind a figure; what lacks its other half is refused', async () => {
+    expect((await list('?zone=sill_inner&side=left')).body.jobs).toBe(10);
+    expect((await list('?zone=sill_inner&side=right')).body.jobs).toBe(0);
+    expect((await list('?product=CW1&package=full')).body.jobs).toBe(10);
+    expect((await list('?product=CW1&use=over')).body.jobs).toBe(0);
+    const refused = await list('?side=left&use=under');
+    expect(refused.status).toBe(422);
+    expect(refused.body.problems.map(({ path }: { path: string }) => path)).toEqual([
+      ...['/query/side', '/query/use'],
+    ]);
+    const unknown = await list('?product=NONE');
+    expect([unknown.status, unknown.body.problems[0].path]).toEqual([422, '/query/product']);
+  });
 });
