@@ -29,17 +29,3 @@ export function stirlingError(x: number): number {
   for (let k = STIRLING.length - 1; k >= 0; k -= 1) series = series * square + (STIRLING[k] ?? 0);
   return climbed + series / at;
 }
-
-/**
- * The second derivative of ln Γ.
- *
- * Source: Abramowitz and Stegun (1964), 6.4.12 (series) and 6.4.6 (recurrence).
- */
-export function trigamma(x: number): number {
-  let climbed = 0;
-  let at = x;
-  for (; at < FAR; at += 1) climbed += 1 / (at * at);
-  const s = 1 / (at * at);
-  const series = s * (1 / 6 - s * (1 / 30 - s * (1 / 42 - s * (1 / 30 - s * (5 / 66)))));
-  return climbed + (1 + 0.5 / at + series) / at;
-}

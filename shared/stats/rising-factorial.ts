@@ -13,10 +13,10 @@ const FAR = 10;
  * Source: M. Abramowitz and I. A. Stegun, "Handbook of Mathematical Functions" (1964), 6.1.22 and 6.1.41, cancelled by hand.
  */
 export function logRise(a: number, k: number): number {
-  if (k <= FEW) return addUp(a, k, (j) => Math.log1p(j / a));
+  if (k <= FEW) return addUp(k, (j) => Math.log1p(j / a));
   if (a < FAR) {
     return (
-      addUp(a, FEW, (j) => Math.log1p(j / a)) +
+      addUp(FEW, (j) => Math.log1p(j / a)) +
       logRise(a + FEW, k - FEW) +
       (k - FEW) * Math.log1p(FEW / a)
     );
@@ -34,12 +34,12 @@ export function logRise(a: number, k: number): number {
  * Source: Abramowitz and Stegun (1964), 6.3.6 and 6.3.18, cancelled by hand.
  */
 export function riseSlope(a: number, k: number): number {
-  if (k <= FEW) return addUp(a, k, (j) => j / (a + j));
+  if (k <= FEW) return addUp(k, (j) => j / (a + j));
   if (a < FAR) {
     const rest = k - FEW;
     // j/(a + j) with j = FEW + i is i/(a + FEW + i) and FEW of the rest's 1/(a + FEW + i).
     const inner = riseSlope(a + FEW, rest);
-    return addUp(a, FEW, (j) => j / (a + j)) + inner + (FEW * (rest - inner)) / (a + FEW);
+    return addUp(FEW, (j) => j / (a + j)) + inner + (FEW * (rest - inner)) / (a + FEW);
   }
   const first = (0.5 * k) / (a + k);
   return a * (logShortfall(k / a) + digammaRest(a) - digammaRest(a + k)) - first;
@@ -51,7 +51,7 @@ function digammaRest(x: number): number {
   return -s * (1 / 12 - s * (1 / 120 - s * (1 / 252 - s * (1 / 240 - s / 132))));
 }
 
-function addUp(a: number, k: number, term: (j: number) => number): number {
+function addUp(k: number, term: (j: number) => number): number {
   let sum = 0;
   for (let j = 1; j < k; j += 1) sum += term(j);
   return sum;
