@@ -68,7 +68,7 @@ describe('drawComeBackMarks', () => {
     expect(told.length).toBeLessThan(dangerous.length);
   });
 
-  test('of what is older than 400 days, has most closed; of the last two months, has most open', () => {
+  test('of what is older than 400 days, has most closed; of the last half year, has most open', () => {
     const left = branches.flatMap(leftOf);
     const shareOpen = (some: typeof left) =>
       some.filter((one) => statusOf(one) !== 'done' && statusOf(one) !== 'gone').length /
@@ -77,11 +77,11 @@ describe('drawComeBackMarks', () => {
       isUnmended(vehicle.key, completedOn, zone, side),
     );
     const old = unmended.filter(({ completedOn }) => completedOn < addDays(TODAY, -400));
-    const young = left.filter(({ completedOn }) => completedOn >= addDays(TODAY, -60));
+    const young = left.filter(({ completedOn }) => completedOn >= addDays(TODAY, -180));
     expect(old.length).toBeGreaterThan(200);
     expect(shareOpen(old)).toBeLessThan(0.2);
-    expect(young.length).toBeGreaterThan(10);
-    expect(shareOpen(young)).toBeGreaterThan(0.8);
+    expect(young.length).toBeGreaterThan(20);
+    expect(shareOpen(young)).toBeGreaterThan(0.6);
   });
 
   test('for a booking, has a day to come', () => {

@@ -95,7 +95,7 @@ describe('GET /api/exports/:name.csv', () => {
     expect(refused.status).toBe(422);
     expect(refused.headers.get('content-type')).toContain('application/problem+json');
     expect((await get('/api/exports/jobs.csv?limit=5')).status).toBe(422);
-    expect((await get('/api/exports/rot.csv')).status).toBe(404);
+    expect((await get('/api/exports/none.csv')).status).toBe(404);
     expect((await get('/api/exports/jobs.csv', network.recorder)).status).toBe(403);
     expect(exportsTold()).toHaveLength(before);
   });

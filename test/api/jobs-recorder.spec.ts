@@ -52,7 +52,8 @@ async function stored(): Promise<string> {
 /** A sheet as a form would send it back: without what only the sheet has. */
 function sentBack(sheet: Sheet): Record<string, unknown> {
   const { branch: _b, jobRef: _j, revision: _r, receivedAt: _at, source: _s, ...rest } = sheet;
-  const { warrantyMonths: _w, revisions: _v, money: _m, missingCosts: _c, ...content } = rest;
+  const { warrantyMonths: _w, revisions: _v, comeBacks: _l, ...told } = rest;
+  const { money: _m, missingCosts: _c, ...content } = told;
   return content;
 }
 const places = (value: unknown, pattern: RegExp, path = ''): string[] =>
