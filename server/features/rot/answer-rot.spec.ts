@@ -1,61 +1,14 @@
-import fc from 'fast-check';
-import { putBranchRow, putRegionRow } from '#db/queries/set-up';
-import { Scope } from '#db/scope';
+import type { Scope } from '#db/scope';
 import type { RotAnswer } from '#shared/contracts/rot';
-import { addDays } from '#shared/domain/calendar';
 import type { SentJob } from '#shared/domain/normalise-job';
-import { ACTIONS, CONDITIONS, SIDES, ZONES } from '#shared/domain/vocabulary';
-import { recountRot, type CarSent } from '../../../test/support/recount-rot';
-import { unbilledJob } from '../../../test/support/kept-job';
-import { SmallStore } from '../../../test/support/small-store';
+import { ZONES } from '#shared/domain/vocabulary';
+import { carAged, found, headOfficeOf, makeRotStore } from '../../../test/support/rot-store';
+import type { SmallStore } from '../../../test/support/small-store';
 import { answerRot } from './answer-rot';
 
-/** Nine branches in three regions. */
-const PLACES = {
-  ...{ AAA: 'COAST', BBB: 'COAST', CCC: 'COAST', DDD: 'HILLS', EEE: 'HILLS', FFF: 'HILLS' },
-  ...{ GGG: 'PLAIN', HHH: 'PLAIN', III: 'PLAIN' },
-} as const;
-type Branch = keyof typeof PLACES;
-const BRANCHES = Object.keys(PLACES) as Branch[];
-
 let small: SmallStore;
-beforeAll(async () => {
-  small = await SmallStore.make();
-  const { store } = small;
-  await store.queue.write(() => {
-    const db = store.unscoped;
-    const climate = { temperatureC: 9, humidityPct: 76, so2Deposition: 4, chlorideDeposition: 3 };
-    putRegionRow(db, { code: 'HILLS', name: 'Hills', climate });
-    putRegionRow(db, { code: 'PLAIN', name: 'Plain', climate: { ...climate, humidityPct: 20 } });
-    for (const code of BRANCHES) {
-      const times = { timeZone: 'Europe/Berlin', openedOn: '2015-01-01', closedOn: null };
-      const region = PLACES[code];
-      putBranchRow(db, { ...times, code, name: code, region, targetMarginShare: null });
-    }
-    store.state.reload();
-  });
-});
+beforeAll(async () => (small = await makeRotStore()), 30_000);
 afterAll(() => small.close());
-
-type Finding = NonNullable<SentJob['findings']>[number];
-const found = (zone: Finding['zone'], over: Partial<Finding> = {}): Finding => ({
-  zone,
-  side: 'left',
-  seenAs: 'bubbling',
-  structural: false,
-  action: 'treated',
-  ...over,
-});
-const car = (on: string, years: number, over: Partial<SentJob> = {}): SentJob => ({
-  ...unbilledJob(on),
-  vehicle: {
-    make: 'Vela',
-    model: 'Ono',
-    bodyType: 'van',
-    firstRegistered: `${Number(on.slice(0, 4)) - years}${on.slice(4, 7)}`,
-  },
-  ...over,
-});
 
 function ask(
   scope: Scope,
@@ -66,12 +19,7 @@ function ask(
   const question = { period: { from, to }, filters };
   return answerRot(store.scoped(scope), question, store.reference(scope));
 }
-const headOffice = (): Scope =>
-  Scope.ofGrant(small.store.state.branches, {
-    role: 'head_office',
-    branchIds: [],
-    regionCodes: [],
-  });
+const headOffice = (): Scope => headOfficeOf(small);
 
 describe('answerRot', () => {
   it('given no car at all, has the regions of the scope and nothing to say of them', () => {
@@ -100,7 +48,7 @@ describe('answerRot', () => {
 
   it('given one car, counts it everywhere and withholds every share but the steadied one (rules 13 and 34)', async () => {
     const on = '2019-02-01';
-    await small.putJob('AAA', 'one', car(on, 12, { findings: [found('floor')] }));
+    await small.putJob('AAA', 'one', carAged(on, 12, { findings: [found('floor')] }));
     const answer = ask(small.scope('AAA'), on);
     const one = { cars: 1, withRot: 1, share: null, lower: null, upper: null };
     expect(answer.overall).toEqual(one);
@@ -124,8 +72,8 @@ describe('answerRot', () => {
       found('tailgate', { side: 'right' }),
       found('floor', { seenAs: 'surface' }),
     ];
-    await small.putJob('AAA', 'z-0', car(on, 12, { findings: places }));
-    for (const n of [1, 2, 3, 4]) await small.putJob('AAA', `z-${n}`, car(on, 12));
+    await small.putJob('AAA', 'z-0', carAged(on, 12, { findings: places }));
+    for (const n of [1, 2, 3, 4]) await small.putJob('AAA', `z-${n}`, carAged(on, 12));
     const zones = ask(small.scope('AAA'), on).zones;
     const told = (name: string) => {
       const { withRot, share, sides } = zones.find(({ zone }) => zone === name)!;
@@ -140,7 +88,7 @@ describe('answerRot', () => {
 
   it('given five cars without rot, has a share of 0 with an interval that begins there', async () => {
     const on = '2019-02-03';
-    for (const n of [0, 1, 2, 3, 4]) await small.putJob('DDD', `n-${n}`, car(on, 3));
+    for (const n of [0, 1, 2, 3, 4]) await small.putJob('DDD', `n-${n}`, carAged(on, 3));
     const [region] = ask(small.scope('DDD'), on).regions;
     // One band alone: the exact Poisson limit of no event in five, 3.688879 / 5 (F. Garwood, Biometrika 28 (1936)).
     expect(region).toMatchObject({ share: 0, adjustedShare: 0, adjustedLower: 0 });
@@ -150,7 +98,7 @@ describe('answerRot', () => {
   it('given rot under every car, lets no adjusted share reach beyond 1 (rule 35)', async () => {
     const on = '2019-02-04';
     for (const n of [0, 1, 2, 3, 4]) {
-      await small.putJob('DDD', `all-${n}`, car(on, 3, { findings: [found('floor')] }));
+      await small.putJob('DDD', `all-${n}`, carAged(on, 3, { findings: [found('floor')] }));
     }
     const [region] = ask(small.scope('DDD'), on).regions;
     expect(region).toMatchObject({ adjustedShare: 1, adjustedUpper: 1 });
@@ -161,7 +109,7 @@ describe('answerRot', () => {
     const put = async (branch: string, years: number, cars: number, rotten: number) => {
       for (let n = 0; n < cars; n += 1) {
         const findings = n < rotten ? [found('floor')] : [];
-        await small.putJob(branch, `mix-${years}-${n}`, car(on, years, { findings }));
+        await small.putJob(branch, `mix-${years}-${n}`, carAged(on, years, { findings }));
       }
     };
     await put('AAA', 2, 4, 1);
@@ -179,7 +127,7 @@ describe('answerRot', () => {
   it('given a model spelled in several ways, is one under the newest spelling (rule 33)', async () => {
     const day = (n: number): string => `2019-03-0${n}`;
     const spelled = (on: string, make: string, model: string): SentJob => {
-      const plain = car(on, 12);
+      const plain = carAged(on, 12);
       return { ...plain, vehicle: { ...plain.vehicle, make, model } };
     };
     await small.putJob('AAA', 's-1', spelled(day(2), 'VELA', 'Ono'));
@@ -207,13 +155,13 @@ describe('answerRot', () => {
       found('tailgate'),
       found('tailgate', { seenAs: 'holed', workedAs: 'holed' }),
     ];
-    await small.putJob('AAA', 'b-1', car(on, 12, { findings: opened }));
+    await small.putJob('AAA', 'b-1', carAged(on, 12, { findings: opened }));
     const nothing = { share: null, lower: null, upper: null };
     expect(ask(small.scope('AAA'), on).openedUp).toEqual({ worked: 4, holed: 2, ...nothing });
     await small.putJob(
       'AAA',
       'b-2',
-      car(on, 1, { findings: [found('floor', { workedAs: 'holed' })] }),
+      carAged(on, 1, { findings: [found('floor', { workedAs: 'holed' })] }),
     );
     expect(ask(small.scope('AAA'), on).openedUp).toMatchObject({ worked: 5, holed: 3, share: 0.6 });
   });
@@ -222,12 +170,12 @@ describe('answerRot', () => {
     const on = '2019-02-07';
     for (const branch of ['BBB', 'CCC', 'DDD', 'EEE', 'FFF']) {
       const vehicle = {
-        ...car(on, 2).vehicle,
+        ...carAged(on, 2).vehicle,
         ...(branch === 'FFF' && { bodyType: 'suv' as const }),
       };
-      await small.putJob(branch, 'ref', car(on, 2, { vehicle, findings: [found('floor')] }));
+      await small.putJob(branch, 'ref', carAged(on, 2, { vehicle, findings: [found('floor')] }));
     }
-    for (const n of [1, 2, 3, 4, 5]) await small.putJob('AAA', `ref-${n}`, car(on, 2));
+    for (const n of [1, 2, 3, 4, 5]) await small.putJob('AAA', `ref-${n}`, carAged(on, 2));
     const share = ({ reference, bands }: RotAnswer) => [reference, bands[0]?.referenceShare];
     const own = small.scope('AAA');
     expect(share(ask(own, on))).toEqual(['network', 0.5]);
@@ -239,104 +187,4 @@ describe('answerRot', () => {
       share(ask(headOffice().narrow({ branch: ['AAA'] }), on, { bodyTypes: ['van'] })),
     ).toEqual(['network', 4 / 9]);
   });
-
-  it('given any cars at all, is what a recount of the raw findings comes to', async () => {
-    let run = 0;
-    await fc.assert(
-      fc.asyncProperty(CARS, ASKED, async (cars, { grant, branches, packages, bodies }) => {
-        const from = addDays('2020-01-06', 20 * (run += 1));
-        const sent: CarSent[] = [];
-        await small.store.queue.write(() => {
-          cars.forEach(({ branch, years, months, day, finish, ...rest }, n) => {
-            const on = addDays(from, day);
-            const job = car(on, years, { package: rest.package, findings: rest.findings });
-            const registered = addMonths(job.vehicle.firstRegistered, months);
-            job.vehicle = { ...job.vehicle, ...rest.vehicle, firstRegistered: registered };
-            const ref = `any-${run}-${n}`;
-            if (finish === 'corrected')
-              small.write(branch, ref, car(on, 0, { findings: [found('floor')] }));
-            small.write(branch, ref, job);
-            sent.push({ branch, region: PLACES[branch], ref, job, order: n });
-          });
-        });
-        for (const [n, { branch, finish }] of cars.entries()) {
-          if (finish === 'voided') await small.voidJob(branch, `any-${run}-${n}`);
-        }
-        const counted = sent.filter((_, n) => cars[n]!.finish !== 'voided');
-        const reach = grant === 'head_office' ? headOffice() : small.scope(...grant);
-        const scope = branches ? reach.narrow({ branch: branches }) : reach;
-        const ids = packages?.map((code) => small.store.state.package(code)!.id);
-        const answer = answerRot(
-          small.store.scoped(scope),
-          {
-            period: { from, to: addDays(from, 9) },
-            filters: { packageIds: ids, bodyTypes: bodies },
-          },
-          small.store.reference(scope),
-        );
-        const { period: _, ...told } = answer;
-        expect(told).toEqual(
-          recountRot(
-            counted.filter(
-              ({ job }) =>
-                job.completedOn <= addDays(from, 9) &&
-                (packages?.includes(job.package as 'full') ?? true) &&
-                (bodies?.includes(job.vehicle.bodyType as 'van') ?? true),
-            ),
-            { scope: scope.echo(), reach: grant === 'head_office' ? 'network' : grant },
-          ),
-        );
-      }),
-      { numRuns: 40 },
-    );
-  }, 60_000);
-});
-
-function addMonths(month: string, by: number): string {
-  const count = Number(month.slice(0, 4)) * 12 + Number(month.slice(5)) - 1 + by;
-  return `${Math.floor(count / 12)}-${String((count % 12) + 1).padStart(2, '0')}`;
-}
-
-const FINDING: fc.Arbitrary<Finding> = fc.record(
-  {
-    zone: fc.constantFrom(...ZONES),
-    side: fc.constantFrom(...SIDES),
-    seenAs: fc.constantFrom(...CONDITIONS),
-    workedAs: fc.constantFrom(...CONDITIONS),
-    structural: fc.boolean(),
-    action: fc.constantFrom(...ACTIONS),
-  },
-  { requiredKeys: ['zone', 'side', 'seenAs', 'structural', 'action'] },
-);
-
-const CARS = fc.array(
-  fc.record({
-    branch: fc.constantFrom(...BRANCHES),
-    years: fc.constantFrom(1, 4, 5, 9, 10, 14, 15, 19, 20, 31),
-    // A month more or less, about the edge of a year.
-    months: fc.constantFrom(-1, 0, 1),
-    day: fc.integer({ min: 0, max: 10 }),
-    package: fc.constantFrom('full', 'cavity'),
-    vehicle: fc.record({
-      make: fc.constantFrom('Vela', 'VELA', 'Aru'),
-      model: fc.constantFrom('Ono', 'ono', 'Zet'),
-      bodyType: fc.constantFrom('van', 'suv'),
-    }),
-    findings: fc.oneof(fc.constant<Finding[]>([]), fc.array(FINDING, { maxLength: 4 })),
-    finish: fc.constantFrom('kept', 'kept', 'kept', 'corrected', 'voided'),
-  }),
-  { minLength: 0, maxLength: 60, size: 'max' },
-);
-
-const ASKED = fc.record({
-  grant: fc.constantFrom<'head_office' | Branch[]>(
-    'head_office',
-    ['AAA'],
-    ['AAA', 'BBB', 'CCC'],
-    ['AAA', 'BBB', 'CCC', 'DDD', 'EEE'],
-    ['DDD', 'EEE', 'FFF', 'GGG'],
-  ),
-  branches: fc.option(fc.subarray(BRANCHES), { nil: undefined }),
-  packages: fc.constantFrom<('full' | 'cavity')[] | undefined>(undefined, undefined, ['full']),
-  bodies: fc.constantFrom<('van' | 'suv')[] | undefined>(undefined, undefined, ['van']),
 });
