@@ -1,10 +1,14 @@
+import type { Connection } from '#db/database';
+import { NetworkReference } from '#db/network-reference';
+import { nearestNetworkSet } from '#db/quote-reference';
 import { Scope } from '#db/scope';
 import type { Role } from '#shared/domain/vocabulary';
-import { TestApp } from '../support/app';
+import { TestApp, type Answer } from '../support/app';
 import { disturbOutside } from '../support/disturb-outside';
 import { readOnThisThread } from '../support/read-on-this-thread';
-import { BRANCHES, makeSmallNetwork, type SmallNetwork } from '../support/small-network';
-import { addressOf, contracts, placeSamples } from '../support/walk-contracts';
+import { BRANCHES, makeSmallNetwork, validJob, type SmallNetwork } from '../support/small-network';
+import { askedOf, contracts, findingsWithOneLeft, placeSamples } from '../support/walk-contracts';
+import { mayRefer, withoutReference } from './reference-fields';
 
 let app: TestApp;
 let network: SmallNetwork;
@@ -14,6 +18,11 @@ beforeAll(async () => {
   app = await TestApp.start();
   network = await makeSmallNetwork(app);
   await placeSamples(app, network);
+  const sent = await app.call('post', '/api/branches/AAA/jobs/batch', {
+    token: network.manager,
+    body: { jobs: ownCars() },
+  });
+  expect(sent.status).toBe(200);
   const note = { text: 'of the own branch' };
   await app.call('put', '/api/branches/AAA/weeks/2026-W05/note', {
     token: network.manager,
@@ -22,13 +31,26 @@ beforeAll(async () => {
 }, 30_000);
 afterAll(() => app.stop());
 
-const PERIOD = 'from=2025-12-01&to=2026-02-02';
+/** Cars of the branch that everybody here reads: enough for shares, of two age bands, one of them with the sample's model and age thirty times. */
+function ownCars(): object[] {
+  const vehicle = validJob()['vehicle'] as object;
+  return Array.from({ length: 40 }, (_, n) => ({
+    jobRef: `own-${n}`,
+    ...validJob({
+      ...(n >= 32 && { vehicle: { ...vehicle, firstRegistered: '2019-03' } }),
+      findings: n % 3 === 0 ? findingsWithOneLeft() : [],
+    }),
+  }));
+}
+
 /** What is asked beside the plain call: filters in scope, out of it and of nothing; orders and groupings. */
 const QUERIES: Record<string, string[]> = {
   '/api/jobs': ['q=walked', 'sort=overrun', 'sort=waiting&unbilled=true', 'make=velder', 'limit=1'],
   '/api/exports/jobs.csv': ['sort=completed'],
   '/api/analytics/overrun': ['by=branch', 'by=region', 'by=rotFound', 'by=month', 'by=ageBand'],
   '/api/exports/overrun.csv': ['by=branch', 'by=region'],
+  '/api/analytics/rot': ['package=full', 'from=2026-01-26', 'package=cavity', 'bodyType=suv'],
+  '/api/come-back': ['limit=1', 'status=contacted'],
 };
 const FILTERS = [
   '',
@@ -39,21 +61,27 @@ const FILTERS = [
   'region=COAST',
   'branch=ZZZ',
 ];
-const FILTERED = /^\/api\/(jobs|analytics|exports|week-notes)/;
+const FILTERED = /^\/api\/(jobs|analytics|come-back|exports|week-notes)/;
+/** Cars that a quote may be asked for: many at the own branch, few there, none there; and a branch out of scope. */
+const QUOTES = [
+  'firstRegistered=2009-05&branch=AAA',
+  'firstRegistered=2019-03&branch=AAA',
+  'firstRegistered=2004-01&branch=AAA',
+  'firstRegistered=2009-05&branch=CCC',
+  'firstRegistered=2009-05&branch=ZZZ',
+].map((asked) => `/api/quote?make=Velder&model=Tessock&bodyType=hatchback&package=full&${asked}`);
 
 /** Every address that a role may read, with its filters; named things also of branches out of scope. */
 function addressesFor(role: Role): string[] {
   return contracts.flatMap(([, endpoint]) => {
     const { access, method, path } = endpoint;
     if (method !== 'get' || access === 'public' || !access.roles.includes(role)) return [];
+    if (path === '/api/quote') return QUOTES;
     if (!FILTERED.test(path)) {
       const branches = path.includes(':branch') ? ['AAA', 'CCC', 'NEW2', 'ZZZ'] : ['AAA'];
-      return branches.map((branch) => addressOf(endpoint, { branch }));
+      return branches.map((branch) => askedOf(endpoint, { branch }));
     }
-    const needed = path === '/api/week-notes' ? PERIOD : '';
-    return [...FILTERS, ...(QUERIES[path] ?? [])].map((query) =>
-      [path, [needed, query].filter(Boolean).join('&')].filter(Boolean).join('?'),
-    );
+    return [...FILTERS, ...(QUERIES[path] ?? [])].map((query) => askedOf(endpoint, {}, query));
   });
 }
 
@@ -64,71 +92,172 @@ const READERS = {
 } as const;
 type Reader = keyof typeof READERS;
 
+/** The calls that refer to the network. */
+const REFERRING = ['/api/analytics/rot', '/api/quote'];
+
+/** As many branches with cars as may stand outside before a figure of the network is told. */
+const FOUR: readonly string[] = ['CCC', 'DDD', 'EEE', 'FFF'];
+
+/** What of an answer is compared: all of it, or all but what is named as a figure of the network. */
+interface Told {
+  whole: string;
+  beyondReference: string;
+}
+
+function toldBy(path: string, { status, headers, text }: Answer): Told {
+  const told = ['content-type', 'etag', 'content-length'].map((name) => headers.get(name));
+  const whole = JSON.stringify([status, ...told, text]);
+  if (!mayRefer(path)) return { whole, beyondReference: whole };
+  const rest = [status, headers.get('content-type'), withoutReference(path, text)];
+  return { whole, beyondReference: JSON.stringify(rest) };
+}
+
+const pathOf = (address: string): string => address.split('?')[0]!;
+
 /** Asks everything, changes everything outside the reader's scope, asks again; the addresses whose answers differ by a byte. */
-async function changedAnswers(role: Reader): Promise<string[]> {
+async function changedAnswers(
+  role: Reader,
+  busy: 'all' | readonly string[] = 'all',
+): Promise<{ whole: string[]; beyondReference: string[] }> {
   const { token, inside, regions } = READERS[role];
-  const ask = async (): Promise<Map<string, string>> => {
-    const answers = new Map<string, string>();
+  const ask = async (): Promise<Map<string, Told>> => {
+    const answers = new Map<string, Told>();
     for (const address of addressesFor(role)) {
-      const { status, headers, text } = await app.call('get', address, { token: token() });
-      const told = ['content-type', 'etag', 'content-length'].map((name) => headers.get(name));
-      answers.set(address, JSON.stringify([status, ...told, text]));
+      const answer = await app.call('get', address, { token: token() });
+      if (answer.status >= 500) throw new Error(`${address}: ${answer.text}`);
+      answers.set(address, toldBy(pathOf(address), answer));
     }
     return answers;
   };
   const before = await ask();
   round += 1;
-  await disturbOutside(
-    app,
-    network,
-    BRANCHES.flatMap(([branch, region]) =>
+  await disturbOutside(app, network, {
+    outside: BRANCHES.flatMap(([branch, region]) =>
       (inside as readonly string[]).includes(branch) ? [] : { branch, region },
     ),
-    ['COAST', 'HILLS'].filter((region) => !(regions as readonly string[]).includes(region)),
+    regions: ['COAST', 'HILLS'].filter(
+      (region) => !(regions as readonly string[]).includes(region),
+    ),
+    busy,
     round,
-  );
+  });
   const after = await ask();
-  return [...before.keys()].filter((address) => before.get(address) !== after.get(address));
+  const differing = (view: keyof Told): string[] =>
+    [...before.keys()].filter(
+      (address) => before.get(address)?.[view] !== after.get(address)?.[view],
+    );
+  return { whole: differing('whole'), beyondReference: differing('beyondReference') };
 }
 
-describe.each(Object.keys(READERS) as Reader[])('Everything a %s may read', (role) => {
-  it('given rows outside the scope changed and added, is the same byte for byte', async () => {
-    const asked = addressesFor(role);
-    expect(asked.length).toBeGreaterThan(role === 'recorder' ? 20 : 50);
-    expect(await changedAnswers(role)).toEqual([]);
-  }, 60_000);
+const pathsOf = (addresses: readonly string[]): string[] => [...new Set(addresses.map(pathOf))];
 
-  it('given the rows of the scope, has something in it that could have changed', async () => {
-    const { body } = await app.call('get', '/api/jobs', { token: READERS[role].token() });
-    expect(body.jobs).toBeGreaterThan(0);
-  });
+/** Reads on this thread, where a guard can be taken out, and puts things back. */
+async function withReadsHere<T>(read: () => Promise<T>): Promise<T> {
+  const reads = app.kit.reads;
+  app.kit.reads = readOnThisThread(app.kit.store) as never;
+  try {
+    return await read();
+  } finally {
+    app.kit.reads = reads;
+  }
+}
+
+/** What keeps figures of the network from those who stand against too few others. */
+interface Guarded {
+  connection: Connection;
+  scope: Scope;
+  enoughBehind(): boolean;
+  nearestQuoteSet: NetworkReference['nearestQuoteSet'];
+}
+
+/** The nearest set of the network's cars whoever stands behind it. */
+function unguardedQuoteSet(
+  this: Guarded,
+  ...[car, rungs, cars]: Parameters<Guarded['nearestQuoteSet']>
+): ReturnType<Guarded['nearestQuoteSet']> {
+  const [branch] = this.scope.branches;
+  return branch && nearestNetworkSet(this.connection, branch.id, car, rungs, { cars, others: 0 });
+}
+
+const EVERY_READER = Object.keys(READERS) as Reader[];
+
+describe.each(EVERY_READER)(
+  'Everything a %s may read, with cars at four branches outside',
+  (role) => {
+    it('given rows outside the scope changed and added, is the same byte for byte (rule 81)', async () => {
+      expect(addressesFor(role).length).toBeGreaterThan(role === 'recorder' ? 20 : 90);
+      expect((await changedAnswers(role, FOUR)).whole).toEqual([]);
+    }, 60_000);
+
+    it('given the rows of the scope, has something in it that could have changed', async () => {
+      const { body } = await app.call('get', '/api/jobs', { token: READERS[role].token() });
+      expect(body.jobs).toBeGreaterThan(0);
+    });
+  },
+);
+
+describe('Everything a site manager may read, with the guard of network figures taken out', () => {
+  it('given rows at four branches outside changed, differs wherever the network is referred to', async () => {
+    const changed = await withReadsHere(async () => {
+      const guarded = NetworkReference.prototype as unknown as Guarded;
+      const guards = [
+        jest.spyOn(guarded, 'enoughBehind').mockReturnValue(true),
+        jest.spyOn(guarded, 'nearestQuoteSet').mockImplementation(unguardedQuoteSet),
+      ];
+      try {
+        return await changedAnswers('site_manager', FOUR);
+      } finally {
+        for (const guard of guards) guard.mockRestore();
+      }
+    });
+    expect(pathsOf(changed.whole)).toEqual(REFERRING);
+  }, 60_000);
 });
 
-describe('Everything a site manager may read, with the filter taken out', () => {
-  it('given rows outside the scope changed, differs wherever rows are narrowed by the filter', async () => {
-    const reads = app.kit.reads;
+describe('With cars at all branches', () => {
+  // Reached here, so that what was told of the scope alone and now is of the network does not count as a change.
+  beforeAll(() => changedAnswers('site_manager'), 60_000);
+
+  it.each(EVERY_READER)(
+    'given rows outside changed, everything a %s may read is the same but for what is named as a figure of the network (rule 81)',
+    async (role) => {
+      const changed = await changedAnswers(role);
+      expect(changed.beyondReference).toEqual([]);
+      // And those figures do follow: what is left out of the comparison is not left out of the answers.
+      const readable = pathsOf(addressesFor(role));
+      expect(pathsOf(changed.whole)).toEqual(REFERRING.filter((path) => readable.includes(path)));
+    },
+    60_000,
+  );
+});
+
+describe('Everything a site manager may read', () => {
+  it('given the filter taken out and rows outside changed, differs wherever rows are narrowed by it', async () => {
     const ids = Object.getOwnPropertyDescriptor(Scope.prototype, 'idsJson')!;
-    app.kit.reads = readOnThisThread(app.kit.store) as never;
-    try {
+    const leaking = await withReadsHere(async () => {
       // Reading on this thread alone changes nothing.
-      expect(await changedAnswers('site_manager')).toEqual([]);
+      expect((await changedAnswers('site_manager')).beyondReference).toEqual([]);
       const everything = JSON.stringify(Array.from({ length: 100 }, (_, id) => id));
       Object.defineProperty(Scope.prototype, 'idsJson', { get: () => everything });
-      const leaking = await changedAnswers('site_manager');
-      const paths = new Set(leaking.map((address) => address.split('?')[0]));
-      expect([...paths].sort()).toEqual([
-        '/api/analytics/margin',
-        '/api/analytics/overrun',
-        '/api/costs',
-        '/api/exports/jobs.csv',
-        '/api/exports/margin.csv',
-        '/api/exports/overrun.csv',
-        '/api/jobs',
-        '/api/week-notes',
-      ]);
-    } finally {
-      Object.defineProperty(Scope.prototype, 'idsJson', ids);
-      app.kit.reads = reads;
-    }
-  }, 60_000);
+      try {
+        return (await changedAnswers('site_manager')).beyondReference;
+      } finally {
+        Object.defineProperty(Scope.prototype, 'idsJson', ids);
+      }
+    });
+    // The rows of rot.csv name regions, and cars of branches beyond the scope belong to none of its regions.
+    const lockedTwice = '/api/exports/rot.csv';
+    const narrowed = contracts.filter(
+      ([name, { access, path }]) =>
+        name.startsWith('GET') &&
+        access !== 'public' &&
+        access.roles.includes('site_manager') &&
+        FILTERED.test(path) &&
+        path !== lockedTwice,
+    );
+    expect(narrowed.length).toBeGreaterThan(12);
+    expect(pathsOf(leaking).sort()).toEqual(
+      ['/api/costs', '/api/quote', ...narrowed.map(([, { path }]) => path)].sort(),
+    );
+  }, 120_000);
 });

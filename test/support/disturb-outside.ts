@@ -1,25 +1,42 @@
 import type { TestApp } from './app';
 import { validJob, type SmallNetwork } from './small-network';
+import { findingsWithOneLeft } from './walk-contracts';
+
+/** What is to be changed, and how. */
+export interface Disturbance {
+  /** Branches outside; one more is added each round. */
+  outside: readonly { branch: string; region: string }[];
+  /** Regions that lie outside as a whole. */
+  regions: readonly string[];
+  /** Which branches get cars: all, or only some so that too few stand behind a network figure. */
+  busy: 'all' | readonly string[];
+  /** Counts up from 1 to at most 24, so that every time is another. */
+  round: number;
+}
 
 /**
  * Changes everything that lies outside some branches, each time in another way: jobs sent, corrected and voided, claims,
- * rates, notes, bookings, the names of branches and of regions, a branch and a region more.
+ * findings left and what is marked on them, rates, notes, bookings, the names of branches and of regions, a branch and a
+ * region more.
  */
 export async function disturbOutside(
   app: TestApp,
   { office: token }: SmallNetwork,
-  outside: readonly { branch: string; region: string }[],
-  regions: readonly string[],
-  round: number,
+  { outside, regions, busy, round }: Disturbance,
 ): Promise<void> {
   const send = async (method: string, path: string, body?: unknown): Promise<void> => {
     const answer = await app.call(method, path, { token, ...(body !== undefined && { body }) });
-    if (answer.status >= 300) throw new Error(`${method} ${path}: ${answer.status} ${answer.text}`);
+    const rejected = (answer.body as { counts?: { rejected: number } } | undefined)?.counts
+      ?.rejected;
+    if (answer.status >= 300 || rejected)
+      throw new Error(`${method} ${path}: ${answer.status} ${answer.text}`);
   };
   const added = { branch: `NEW${round}`, region: `REG${round}` };
   await send('put', `/api/regions/${added.region}`, { name: 'Added' });
-  for (const region of regions)
-    await send('put', `/api/regions/${region}`, { name: `Region ${round}` });
+  for (const region of regions) {
+    const climate = { ...CLIMATE, temperatureC: round };
+    await send('put', `/api/regions/${region}`, { name: `Region ${round}`, climate });
+  }
   for (const { branch, region } of [...outside, added]) {
     const at = `/api/branches/${branch}`;
     await send('put', at, {
@@ -29,32 +46,66 @@ export async function disturbOutside(
       openedOn: '2010-01-01',
       targetMarginShare: round / 100,
     });
-    await send('put', `${at}/rates/2026-01-0${round}`, { hourlyCostCents: 5000 + round });
-    const jobs = [1, 2, 3].map((n) => ({
-      jobRef: `walked-${round}-${n}`,
-      ...validJob({
-        completedOn: `2026-01-2${n + 4}`,
-        startedOn: '2026-01-20',
-        invoice: n === 1 ? null : { totalCents: 10_000 * round + n },
-        ...(n === 2 && { estimate: undefined }),
-      }),
-    }));
-    await send('post', `${at}/jobs/batch`, { jobs });
-    await send('put', `${at}/jobs/walked`, validJob({ notes: `round ${round}` }));
-    await send('delete', `${at}/jobs/walked-${round}-3`);
-    await send('put', `${at}/claims/walked`, {
-      jobRef: 'walked',
-      madeOn: '2026-01-30',
-      zone: 'floor',
-      cause: 'damage',
-      decision: 'open',
-      costCents: round,
+    await send('put', `${at}/rates/2026-01-${String(round).padStart(2, '0')}`, {
+      hourlyCostCents: 5000 + round,
     });
-    await send('put', `${at}/bookings/walked-${round}`, {
-      expectedOn: '2026-02-10',
-      package: 'full',
-      bodyType: 'suv',
-    });
+    for (const bodyType of ['suv', 'hatchback']) {
+      await send('put', `${at}/bookings/${bodyType}-${round}`, {
+        expectedOn: '2026-02-10',
+        package: 'full',
+        bodyType,
+      });
+    }
     await send('put', `${at}/weeks/2026-W05/note`, { text: `round ${round}` });
+    if (busy === 'all' || busy.includes(branch)) await disturbCars(send, at, round);
   }
+}
+
+const CLIMATE = { temperatureC: 9, humidityPct: 78, so2Deposition: 4, chlorideDeposition: 30 };
+
+async function disturbCars(
+  send: (method: string, path: string, body?: unknown) => Promise<void>,
+  at: string,
+  round: number,
+): Promise<void> {
+  await send('post', `${at}/jobs/batch`, { jobs: carsOf(round) });
+  await send(
+    'put',
+    `${at}/jobs/walked`,
+    validJob({ notes: `round ${round}`, findings: findingsWithOneLeft() }),
+  );
+  await send('delete', `${at}/jobs/walked-${round}-3`);
+  await send('put', `${at}/come-back/walked/walked`, {
+    status: round % 2 === 0 ? 'contacted' : 'booked',
+    note: `round ${round}`,
+  });
+  await send('put', `${at}/claims/walked`, {
+    jobRef: 'walked',
+    madeOn: '2026-01-30',
+    zone: 'floor',
+    cause: 'damage',
+    decision: 'open',
+    costCents: round,
+  });
+}
+
+/** Half of the cars of one age, so that a quote finds enough of them, the others of every age: each round has another mix of ages, other rot and other minutes. */
+function carsOf(round: number): object[] {
+  const vehicle = validJob()['vehicle'] as object;
+  return [1, 2, 3, 4, 5, 6].map((n) => ({
+    jobRef: `walked-${round}-${n}`,
+    ...validJob({
+      vehicle: {
+        ...vehicle,
+        firstRegistered: n > 3 ? '2019-03' : `${2026 - ((n * round * 4) % 24)}-01`,
+      },
+      completedOn: `2026-01-2${(n % 3) + 5}`,
+      startedOn: '2026-01-20',
+      invoice: n === 1 ? null : { totalCents: 10_000 * round + n },
+      products: [{ product: 'CW1', ml: 3000 + 100 * round + n }],
+      actual: { stages: { strip: 100 * round + n, repair: 185 } },
+      ...(n === 2 && { estimate: undefined }),
+      findings: n % 2 === round % 2 ? [] : findingsWithOneLeft(),
+    }),
+  }));
 }

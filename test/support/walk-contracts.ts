@@ -40,7 +40,39 @@ function sampleCode(path: string, name: string): string {
   return 'AAA';
 }
 
-/** Puts there what the samples name: a job with a claim and a booking. */
+/** What a call cannot be asked without. */
+const NEEDED: Record<string, string> = {
+  '/api/week-notes': 'from=2025-12-01&to=2026-02-02',
+  '/api/quote':
+    'make=Velder&model=Tessock&firstRegistered=2009-05&bodyType=hatchback&package=full&branch=AAA',
+};
+
+/** The address of a call with what it cannot be asked without, and with whatever else is asked. */
+export function askedOf(
+  endpoint: Endpoint,
+  values: Record<string, string> = {},
+  query = '',
+): string {
+  const asked = [NEEDED[endpoint.path], query].filter(Boolean).join('&');
+  return [addressOf(endpoint, values), asked].filter(Boolean).join('?');
+}
+
+/** A finding that was left on a car, under the reference that the walks ask for. */
+const LEFT_FINDING = {
+  ref: SAMPLES['ref'],
+  zone: 'floor',
+  side: 'left',
+  seenAs: 'bubbling',
+  structural: true,
+  action: 'deferred',
+};
+
+/** The findings of a valid job and one that was left. */
+export function findingsWithOneLeft(): object[] {
+  return [...(validJob()['findings'] as object[]), LEFT_FINDING];
+}
+
+/** Puts there what the samples name: a job with a claim and a finding left on the car, and a booking. */
 export async function placeSamples(app: TestApp, { manager }: SmallNetwork): Promise<void> {
   const claim = {
     jobRef: 'walked',
@@ -51,7 +83,7 @@ export async function placeSamples(app: TestApp, { manager }: SmallNetwork): Pro
   };
   const booking = { expectedOn: '2026-02-10', package: 'full', bodyType: 'suv' };
   for (const [path, body] of [
-    ['jobs/walked', validJob()],
+    ['jobs/walked', validJob({ findings: findingsWithOneLeft() })],
     ['claims/walked', claim],
     ['bookings/walked', booking],
   ] as const) {

@@ -1,0 +1,46 @@
+/** Steps to values in an answer; `*` is every item of a list. */
+type Path = readonly string[];
+
+/** Answers that hold figures of the whole network, and the only places in which those stand (rule 81). */
+const REFERENCE_FIELDS: Readonly<Record<string, readonly Path[]>> = {
+  '/api/analytics/rot': [
+    ['bands', '*', 'referenceShare'],
+    ['regions', '*', 'adjustedShare'],
+    ['regions', '*', 'adjustedLower'],
+    ['regions', '*', 'adjustedUpper'],
+    ['regions', '*', 'bandsLeftOut'],
+  ],
+};
+
+/** Answers that are a figure of the network as a whole once they say so, and then may change anywhere. */
+const WHOLE_ANSWERS: Readonly<Record<string, (answer: unknown) => boolean>> = {
+  '/api/quote': (answer) =>
+    (answer as { basis?: { source: string | null } }).basis?.source === 'network',
+};
+
+/** Whether any answer at a path may hold figures of the network. */
+export function mayRefer(path: string): boolean {
+  return path in REFERENCE_FIELDS || path in WHOLE_ANSWERS;
+}
+
+/** The text of an answer without its figures of the network: what must not follow rows outside by a single byte. */
+export function withoutReference(path: string, text: string): string {
+  if (!mayRefer(path)) return text;
+  const answer: unknown = JSON.parse(text);
+  // Nothing is lost between a text and what it says, so that equal sayings are equal bytes.
+  if (JSON.stringify(answer) !== text) throw new Error(`${path} is not written as JSON writes it`);
+  if (WHOLE_ANSWERS[path]?.(answer)) return 'of the network';
+  for (const field of REFERENCE_FIELDS[path] ?? []) takeOut(answer, field);
+  return JSON.stringify(answer);
+}
+
+function takeOut(value: unknown, [step = '', ...rest]: Path): void {
+  if (typeof value !== 'object' || value === null) return;
+  if (step === '*') {
+    for (const item of Object.values(value)) takeOut(item, rest);
+  } else if (rest.length > 0) {
+    takeOut((value as Record<string, unknown>)[step], rest);
+  } else {
+    (value as Record<string, unknown>)[step] = 'of the network';
+  }
+}
