@@ -10,7 +10,7 @@ beforeAll(async () => {
   app = await TestApp.start();
   network = await makeSmallNetwork(app);
   await placeSamples(app, network);
-});
+}, 30_000);
 afterAll(() => app.stop());
 
 const PEOPLE: Record<Role, 'recorder' | 'manager' | 'lead' | 'office'> = {

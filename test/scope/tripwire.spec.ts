@@ -20,7 +20,7 @@ beforeAll(async () => {
   network = await makeSmallNetwork(app);
   await placeSamples(app, network);
   app.kit.reads = readOnThisThread(app.kit.store) as never;
-});
+}, 30_000);
 afterAll(async () => {
   app.kit.reads = { close: async () => undefined } as never;
   await app.stop();
