@@ -3,6 +3,7 @@ import { join } from 'node:path';
 import { COME_BACK_STATUSES, type ComeBackStatus } from '#shared/domain/vocabulary';
 import { SmallStore } from '../../test/support/small-store';
 import { Connection } from '../database';
+import { NetworkReference } from '../network-reference';
 import { ScopedDb } from '../scoped-db';
 import type { JobFilters } from './job-filters';
 import { countLeft, iterateLeft, listLeft } from './come-back';
@@ -11,6 +12,7 @@ import { countJobs, iterateJobRows, listJobRows, type ListFilters } from './job-
 import { listBilledWeeks, listMissingCosts, sumSpans } from './margin';
 import { readMarginTarget } from './margin-target';
 import { packageCodes, readByKey, readByStage } from './overrun';
+import { readClimates, readRotCars, readSpellings } from './rot';
 import { listWeekNotes } from './week-notes';
 
 /**
@@ -43,7 +45,10 @@ const LEFT_AT = {
 const PLACE = { key: 1, completedOn: '2026-01-05', branch: 'AAA', jobRef: '1' };
 
 /** What each golden file is the text of. */
-const READS: Record<string, (db: ScopedDb, filters: JobFilters) => unknown> = {
+const READS: Record<
+  string,
+  (db: ScopedDb, filters: JobFilters, network: NetworkReference) => unknown
+> = {
   'count-left': (db, filters) => countLeft(db, filters, statusesOf(filters)),
   'count-jobs': (db) => countJobs(db, LISTED),
   'iterate-job-rows': (db) => [...iterateJobRows(db, {}, 'completed')],
@@ -63,11 +68,15 @@ const READS: Record<string, (db: ScopedDb, filters: JobFilters) => unknown> = {
   'list-marks': (db) => listMarks(db, 1, 'x'),
   'list-missing-costs': listMissingCosts,
   'list-week-notes': (db) => listWeekNotes(db, '2026-W01', '2026-W05'),
+  'network-rot-bands': (_db, filters, network) => network.rotBands(filters),
   'package-codes': packageCodes,
   'read-by-branch': (db, filters) => readByKey(db, filters, 'branch'),
   'read-by-month': (db, filters) => readByKey(db, filters, 'month'),
   'read-by-stage': readByStage,
+  'read-climates': (db) => readClimates(db, db.scope.echo().regions),
   'read-margin-target': readMarginTarget,
+  'read-rot-cars': readRotCars,
+  'read-spellings': (db) => readSpellings(db, [1]),
   'sum-spans': (db, { packageIds, bodyTypes }) =>
     sumSpans(db, [PERIOD, PERIOD], { packageIds, bodyTypes }),
 };
@@ -96,7 +105,9 @@ function textOf(name: string, filters: JobFilters, branches: string[]): string {
       };
     },
   });
-  READS[name]?.(new ScopedDb(new Connection(listening), small.scope(...branches)), filters);
+  const connection = new Connection(listening);
+  const scope = small.scope(...branches);
+  READS[name]?.(new ScopedDb(connection, scope), filters, new NetworkReference(connection, scope));
   return texts.map((text) => `${broken(text)};\n`).join('\n');
 }
 

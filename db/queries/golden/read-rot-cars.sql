@@ -1,0 +1,3 @@
+select json_group_array(branch_id) as branchIds, json_group_array(age_band) as bands, json_group_array(rot_zones) as places, json_group_array(model_key) as modelKeys, json_group_array(completed_on) as completedOn, json_group_array(job_id) as jobIds, total(bubbles_worked) as worked, total(bubbles_holed) as holed
+from (select * from job_facts where branch_id in (select value from json_each(?)) and gen_from <= (select generation from network) and gen_to > (select generation from network)) as `job_facts`
+where `job_facts`.`completed_on` >= ? and `job_facts`.`completed_on` <= ? and job_facts.package_id in (select value from json_each(?)) and job_facts.body_type in (select value from json_each(?));
