@@ -15,8 +15,9 @@ import type { UndersideArea } from './underside-input';
 /** A share with its zone's name, and the line that leads to it. */
 export interface MapLabel {
   readonly key: string;
-  /** The share as it is read, nothing where there is too little to say it. */
-  readonly share: string | null;
+  readonly told: 'share' | 'few';
+  /** The share as it is read, or that there are too few cars to say it. */
+  readonly share: string;
   readonly name: readonly string[];
   /** Where the share stands, its middle line; the name follows below, or beside it on one line. */
   readonly x: number;
@@ -76,7 +77,7 @@ interface Shown {
 }
 
 function rowLabel({ area, side }: Shown, car: CarPlace, rows: Rows): MapLabel {
-  const pitch = Math.min(96, Math.max(70, car.width * 0.114));
+  const pitch = Math.max(70, car.width * 0.114);
   const x = car.x + car.width * 0.026 + ROW.indexOf(area.zone) * pitch;
   const top = side === 'right' ? rows.below : rows.above;
   const to = placed(car, anchorOf(area.zone, side));
@@ -135,14 +136,15 @@ function words(
   area: UndersideArea,
   side: Side,
   split: 'lines' | 'whole' = 'lines',
-): Pick<MapLabel, 'key' | 'share' | 'name' | 'flow' | 'on' | 'leader'> {
+): Pick<MapLabel, 'key' | 'told' | 'share' | 'name' | 'flow' | 'on' | 'leader'> {
   const whole = ZONE_NAMES[area.zone];
   // A side is said where the place is not the whole of what the car has there.
   const usual = naturalSides(area.zone).includes(area.side) && side === area.side;
   const name = split === 'whole' ? [whole] : whole.split(' ');
   return {
     key: `${placeKey(area)}/${side}`,
-    share: area.share === null ? null : formatShare(area.share),
+    told: area.share === null ? 'few' : 'share',
+    share: area.share === null ? 'too few' : formatShare(area.share),
     name: usual ? name : [...name, SIDE_NAMES[area.side]],
     flow: 'below',
     on: null,
