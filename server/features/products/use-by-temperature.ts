@@ -1,7 +1,7 @@
 import type { ProductLines } from '#db/queries/products';
 import type { ProductTemperature } from '#shared/contracts/products';
 import { ascending, quantile } from '#shared/stats/quantile';
-import { theilSenSlope } from '#shared/stats/theil-sen-slope';
+import { theilSenInterval } from '#shared/stats/theil-sen-interval';
 import { FEWEST_CARS } from './use-figures';
 
 /** Degrees of one class of the picture. */
@@ -23,12 +23,13 @@ export function useByTemperature(
     });
   }
   const shown = temperatures.length >= FEWEST_CARS;
+  const trend = shown ? theilSenInterval(temperatures, millilitres) : undefined;
   return {
     product,
     cars: temperatures.length,
-    slopeMlPerDegree: (shown ? theilSenSlope(temperatures, millilitres) : undefined) ?? null,
-    lower: null,
-    upper: null,
+    slopeMlPerDegree: trend?.slope ?? null,
+    lower: trend?.lower ?? null,
+    upper: trend?.upper ?? null,
     classes: classesOf(temperatures, millilitres),
   };
 }

@@ -78,6 +78,10 @@ describe('useByTemperature', () => {
       { ml: [70, 60, 50], temperatures: [15, 20, null] },
     ]);
     expect(told).toMatchObject({ product: 'CW1', cars: 5, slopeMlPerDegree: -2 });
+    // Five cars make ten pairs, too few for limits; six make enough, and all of theirs are the same.
+    expect([told.lower, told.upper]).toEqual([null, null]);
+    const six = { ml: [100, 90, 80, 70, 60, 50], temperatures: [0, 5, 10, 15, 20, 25] };
+    expect(useByTemperature('CW1', [six])).toMatchObject({ lower: -2, upper: -2 });
     expect(told.classes.map(({ fromC, cars }) => [fromC, cars])).toEqual([
       ...[
         [0, 1],
