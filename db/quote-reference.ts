@@ -39,7 +39,8 @@ export function nearestNetworkSet(
     const cars = behind.reduce((all, row) => all + row[rung], 0);
     const others = behind.filter((row) => row.branchId !== branchId).length;
     if (cars >= need.cars && others >= need.others) {
-      return { rung, figures: readQuoteFigures(source, car, rung) };
+      const figures = readQuoteFigures(source, car, rung);
+      return figures && { rung, figures };
     }
   }
   return undefined;

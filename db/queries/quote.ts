@@ -73,12 +73,12 @@ export function countRungs(
   );
 }
 
-/** The figures of the cars of a rung that is known to have some. */
+/** The figures of the cars of a rung; `undefined` when it has none. */
 export function readQuoteFigures(
   source: QuoteSource,
   car: QuotedCar,
   rung: QuoteRung,
-): QuoteFigures {
+): QuoteFigures | undefined {
   const cars = (): Knex.QueryBuilder => onRung(alike(source.facts(), car), car, rung);
   const columns = ['act_minutes', ...STAGES.map((stage) => `act_${stage}`)];
   const lists = columns.map((column, at) => `json_group_array(${column}) as list${at}`);
@@ -90,11 +90,12 @@ export function readQuoteFigures(
       ),
     ),
   );
-  if (!row) throw new Error('a set of cars answered with no row');
+  const products = readProducts(source, cars());
+  const consumables = readConsumables(source, cars());
+  if (!row || row.cars === 0) return undefined;
   const [minutes, ...stages] = columns.map((_, at) =>
     quoteMinutes(JSON.parse(row[`list${at}`] ?? '[]') as number[]),
   );
-  const consumables = readConsumables(source, cars());
   return {
     cars: row.cars,
     withRot: row.withRot,
@@ -102,7 +103,7 @@ export function readQuoteFigures(
     bubblesHoled: row.bubblesHoled,
     minutes: minutes as QuoteMinutes,
     stages: STAGES.map((stage, at) => ({ stage, minutes: stages[at] as QuoteMinutes })),
-    products: readProducts(source, cars()),
+    products,
     ownCents: row.boughtIn + consumables.reduce((all, { ownCents }) => all + ownCents, 0),
     unpriced: consumables.filter(({ quantity }) => quantity > 0),
   };

@@ -35,7 +35,8 @@ export function nearestSet(
   const [counts] = countRungs(own, car);
   const ofBranch = (rungs: readonly QuoteRung[]): NearestSet | undefined => {
     const kind = rungs.find((rung) => (counts?.[rung] ?? 0) >= FEWEST_QUOTE_CARS);
-    return kind && { kind, source: 'branch', figures: readQuoteFigures(own, car, kind) };
+    const figures = kind && readQuoteFigures(own, car, kind);
+    return figures && { kind, source: 'branch', figures };
   };
   const ofNetwork = (rungs: readonly QuoteRung[]): NearestSet | undefined => {
     const found = reference.nearestQuoteSet(car, rungs, FEWEST_QUOTE_CARS);

@@ -1,0 +1,4 @@
+select `branch_id` as `branchId`, `package_id` as `packageId`, `body_type` as `bodyType`, count(*) as `cars`
+from (select * from job_facts where branch_id in (select value from json_each(?)) and gen_from <= (select generation from network) and gen_to > (select generation from network)) as `job_facts`
+where `job_facts`.`completed_on` >= ? and `job_facts`.`completed_on` <= ? and job_facts.package_id in (select value from json_each(?)) and job_facts.body_type in (select value from json_each(?))
+group by `branch_id`, `package_id`, `body_type`;
