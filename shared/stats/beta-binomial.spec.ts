@@ -112,11 +112,11 @@ describe('fitBetaBinomial', () => {
     expect(mirrored?.beta).toBeCloseTo(fit?.alpha as number, 8);
   });
 
-  it('given ten thousand groups of up to a million, recovers the shapes they were made with', () => {
+  it('given two thousand groups of up to a million, recovers the shapes they were made with', () => {
     // Shares at the quantiles of Beta(1, 3), whose closed form is 1 − (1 − u)^(1/3).
-    const sizes = Array.from({ length: 10_000 }, (_, index) => 1 + ((index * 7919) % 1_000_000));
+    const sizes = Array.from({ length: 2000 }, (_, index) => 1 + ((index * 7919) % 1_000_000));
     const successes = sizes.map((n, index) =>
-      Math.round(n * (1 - (1 - (index + 0.5) / 10_000) ** (1 / 3))),
+      Math.round(n * (1 - (1 - (index + 0.5) / 2000) ** (1 / 3))),
     );
     const fit = fitBetaBinomial(successes, sizes);
     expect(fit?.alpha).toBeCloseTo(1, 1);

@@ -68,7 +68,7 @@ export function scanSlopes(
 /** slope × run, moved past any rounding in the given direction: only between the two is the division itself needed. */
 function surely(slope: number, run: number, direction: 1 | -1): number {
   const rise = slope * run;
-  if (!Number.isFinite(rise)) return rise;
+  if (!Number.isFinite(rise)) return direction * Infinity;
   return rise + direction * (Math.abs(rise) * 1e-15 + 1e-290);
 }
 

@@ -49,6 +49,17 @@ describe('selectSlopes', () => {
     );
   });
 
+  it('given times so near that slopes are infinite, still ends and orders them', () => {
+    const points: [number, number][] = [
+      [0, 1],
+      [5e-324, 100],
+      [1e-323, 5],
+      [2, 8],
+      [3, -7],
+    ];
+    expectEveryRank(points, 1);
+  });
+
   it('given more pairs than are written out, finds the same as writing all of them out', () => {
     // Whole numbers in a fixed disorder: 2,000 points at 41 times, two million pairs, with a slope of about −3.
     const points = Array.from({ length: 2000 }, (_, index): [number, number] => {
