@@ -23,6 +23,8 @@ export interface NeedView {
   readonly columns: readonly Column<ProductNeed>[];
   readonly rows: readonly ProductNeed[];
   readonly printed: readonly PrintedNeed[];
+  /** Of the products whose cost is known; null when none is. */
+  readonly totalCost: string | null;
   readonly csv: string;
 }
 
@@ -39,6 +41,7 @@ export interface PrintedNeed {
 export function needView(answer: ProductNeedAnswer, words: ProductWords): NeedView {
   const rows = [...answer.needs].sort((a, b) => b.ml - a.ml);
   const sign = currencySign(words.currency);
+  const known = rows.filter(({ costCents }) => costCents !== null);
   return {
     coming: formatDateRange(answer.coming.from, answer.coming.to),
     from: fromWords(answer),
@@ -52,7 +55,11 @@ export function needView(answer: ProductNeedAnswer, words: ProductWords): NeedVi
       range: litresRange(need.lowerMl, need.upperMl),
       cost: need.costCents === null ? '' : formatMoney(need.costCents, words.currency),
     })),
-    csv: rows.length === 1 ? 'CSV of this product' : `CSV of these ${formatCount(rows.length)}`,
+    totalCost: known.length === 0 ? null : formatMoney(sumOf(known), words.currency),
+    csv:
+      rows.length === 1
+        ? 'CSV of this product'
+        : `CSV of these ${formatCount(rows.length)} products`,
   };
 }
 
@@ -93,7 +100,6 @@ function needColumns(
 ): readonly Column<ProductNeed>[] {
   const name = ({ product }: ProductNeed): string => words.productName(product);
   const known = rows.filter(({ costCents }) => costCents !== null);
-  const sum = known.reduce((total, { costCents }) => total + (costCents ?? 0), 0);
   return [
     { key: 'product', label: 'Product', text: name, sortBy: name, total: 'all' },
     {
@@ -119,7 +125,11 @@ function needColumns(
       text: ({ costCents }) => (costCents === null ? 'cost not known' : formatAmount(costCents)),
       muted: ({ costCents }) => costCents === null,
       sortBy: ({ costCents }) => costCents,
-      total: known.length === 0 ? '' : formatAmount(sum),
+      total: known.length === 0 ? '' : formatAmount(sumOf(known)),
     },
   ];
+}
+
+function sumOf(needs: readonly ProductNeed[]): number {
+  return needs.reduce((total, { costCents }) => total + (costCents ?? 0), 0);
 }

@@ -30,6 +30,15 @@ import type { NeedView } from './need-series';
           </tr>
         }
       </tbody>
+      @if (need().totalCost; as cost) {
+        <tfoot>
+          <tr>
+            <td colspan="3">all</td>
+            <td class="number">{{ cost }}</td>
+            <td colspan="2"></td>
+          </tr>
+        </tfoot>
+      }
     </table>
     @for (sentence of need().outside; track sentence) {
       <p>{{ sentence }}</p>
@@ -66,6 +75,11 @@ import type { NeedView } from './need-series';
     th:first-child,
     td:first-child {
       padding-inline-start: 0;
+    }
+    tfoot td {
+      font-weight: 600;
+      border-top: 1px solid var(--us-ink);
+      border-bottom: 0;
     }
     .number {
       text-align: end;

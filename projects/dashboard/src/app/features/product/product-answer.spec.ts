@@ -62,19 +62,30 @@ describe('answerProducts', () => {
     expect(say({ use }).second).toContain('less than 70 % of the norm, 4 of them none at all.');
   });
 
-  it('one thin car of five beside twenty of a hundred: the twenty are told', () => {
+  it('three thin cars of nine beside twenty of fifty: the twenty are told', () => {
     const use = [
-      productUse({ bodyType: 'van', cars: 5, under: 1, underShare: 0.2 }),
-      productUse({ cars: 100, under: 20, underShare: 0.2 }),
+      productUse({ bodyType: 'van', cars: 9, under: 3, underShare: 3 / 9 }),
+      productUse({ cars: 50, under: 20, underShare: 0.4 }),
     ];
-    expect(say({ use }).second).toContain('in full hatchbacks: 20 % of 100 cars');
+    expect(say({ use }).second).toContain('in full hatchbacks: 40 % of 50 cars');
   });
 
-  it('hardly any car under, or too few to say: says that nowhere 1 in 100 was', () => {
-    const use = [productUse({ cars: 300, under: 1, underShare: 1 / 300 }), fewUse()];
-    expect(say({ use }).second).toBe(
-      'In no kind of car did 1 in 100 get less than 70 % of the norm.',
+  it('one or two of each kind: told of the product as a whole, and led to those cars', () => {
+    const use = [
+      productUse({ cars: 6, carsListing: 5, under: 1, underShare: 1 / 6 }),
+      productUse({ bodyType: 'van', cars: 94, carsListing: 94, under: 2, underShare: 2 / 94 }),
+    ];
+    const { second, parts } = say({ use });
+    expect(second).toBe(
+      'Cavity wax: 3 % of 100 cars got less than 70 % of the norm, 1 of them none at all.',
     );
+    expect(parts[1]).toMatchObject({ query: { product: 'CW1', use: 'under' } });
+    expect(parts[1]).not.toHaveProperty('query.bodyType');
+  });
+
+  it('nobody under, or too few cars to say: says that no car was', () => {
+    const use = [productUse({ under: 0, underShare: 0 }), fewUse()];
+    expect(say({ use }).second).toBe('No car got less than 70 % of the norm of any product.');
   });
 
   it('several branches: those furthest from the norm whose interval misses it, by name', () => {
@@ -85,10 +96,10 @@ describe('answerProducts', () => {
       productBranch('OYA', { ratioToNorm: 1.3, lower: 0.9, upper: 1.7 }),
     ];
     expect(say({ branches }).second).toContain(
-      ' Brekka 81 % (79–83 %) put in clearly less than its norm, Marrow 108 % (104–112 %) clearly more.',
+      ' Brekka put in clearly less than its norm, 81 % (79–83 %); Marrow put in clearly more than its norm, 108 % (104–112 %).',
     );
     expect(say({ branches: branches.slice(0, 2) }).second).toContain(
-      ' Brekka 81 % (79–83 %) put in clearly less than its norm.',
+      ' Brekka put in clearly less than its norm, 81 % (79–83 %).',
     );
   });
 

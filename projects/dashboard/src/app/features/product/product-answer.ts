@@ -1,10 +1,10 @@
 import type { Params } from '@angular/router';
-import type { ProductBranch, ProductsAnswer, ProductUse } from '#shared/contracts/products';
+import type { ProductBranch, ProductsAnswer } from '#shared/contracts/products';
 import type { AnswerPart } from '../../ui/answer/answer';
 import { formatCars, formatCount, formatExactMoney, formatShare } from '../../ui/format';
-import { carsOfUse } from './cars-of-use';
-import { carsOfKind, intervalText, type ProductWords } from './product-words';
-import { worstUse } from './worst-use';
+import { carsUnderQuery } from './cars-of-use';
+import { carsOfKind, intervalText, presentShare, type ProductWords } from './product-words';
+import { type WorstUse, worstUse } from './worst-use';
 
 /** The page's answer: how much of the norm went in, and where cars got far too little. */
 export interface ProductSentences {
@@ -79,32 +79,43 @@ function worstSentence(
   filters: Params,
 ): AnswerPart[] {
   const worst = worstUse(use);
-  if (!worst) return ['In no kind of car did 1 in 100 get less than 70 % of the norm.'];
+  if (!worst) return ['No car got less than 70 % of the norm of any product.'];
   const none = worst.cars - worst.carsListing;
+  const where = worst.kind ? ` in ${carsOfKind(worst.kind, words)}` : '';
   return [
-    `${words.productName(worst.product)} in ${carsOfKind(worst, words)}: `,
-    carsUnder(worst, { ...filters, ...carsOfUse(worst, 'under', period) }),
-    ` got less than 70 % of the norm${none > 0 ? `, ${formatCount(none)} of them none at all` : ''}.`,
+    `${words.productName(worst.product)}${where}: `,
+    carsUnder(worst, { ...filters, ...carsUnderQuery(worst, period) }),
+    ` got less than 70 % of the norm${noneWords(none, worst.under)}.`,
   ];
 }
 
-function carsUnder({ underShare, cars }: ProductUse, query: Params): Exclude<AnswerPart, string> {
-  const text = `${formatShare(underShare ?? 0)} of ${formatCars(cars)}`;
+function carsUnder({ under, cars }: WorstUse, query: Params): Exclude<AnswerPart, string> {
+  const text = `${presentShare(under / cars)} of ${formatCars(cars)}`;
   return { text, link: '/jobs', query };
+}
+
+function noneWords(none: number, under: number): string {
+  if (none === 0) return '';
+  if (none >= under) return under === 1 ? ': none at all' : ', all of them none at all';
+  return `, ${formatCount(none)} of them none at all`;
 }
 
 /** Of several branches, who lies furthest from the norm either way: by name, and only where the interval misses it. */
 function branchSentence(branches: readonly ProductBranch[], words: ProductWords): string {
   if (branches.length < 2) return '';
-  const said = (branch: ProductBranch | undefined): string =>
+  const said = (branch: ProductBranch | undefined, how: string): string =>
     branch
-      ? `${words.branchName(branch.branch)} ${formatShare(branch.ratioToNorm ?? 0)} (${intervalText(branch.lower, branch.upper)})`
+      ? `${words.branchName(branch.branch)} put in clearly ${how} than its norm, ${formatShare(branch.ratioToNorm ?? 0)} (${intervalText(branch.lower, branch.upper)})`
       : '';
-  const low = said(furthest(branches, ({ upper }) => upper !== null && upper < 1, 'least'));
-  const high = said(furthest(branches, ({ lower }) => lower !== null && lower > 1, 'most'));
-  if (low && high) return `${low} put in clearly less than its norm, ${high} clearly more.`;
-  if (low) return `${low} put in clearly less than its norm.`;
-  if (high) return `${high} put in clearly more than its norm.`;
+  const low = said(
+    furthest(branches, ({ upper }) => upper !== null && upper < 1, 'least'),
+    'less',
+  );
+  const high = said(
+    furthest(branches, ({ lower }) => lower !== null && lower > 1, 'most'),
+    'more',
+  );
+  if (low || high) return `${[low, high].filter(Boolean).join('; ')}.`;
   return 'No branch lies clearly beside its norm.';
 }
 

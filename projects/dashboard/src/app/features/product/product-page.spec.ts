@@ -8,6 +8,9 @@ import { ScopeLine } from '../../core/scope-line/scope-line';
 import { noProducts, productNeedAnswer, productsAnswer } from '../../testing/product-answers';
 import { ProductPage } from './product-page';
 
+// The whole page is compiled and drawn: slow on a busy machine.
+jest.setTimeout(30_000);
+
 async function open(product?: string) {
   TestBed.configureTestingModule({
     providers: [

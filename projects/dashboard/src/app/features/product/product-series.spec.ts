@@ -90,10 +90,13 @@ describe('productsView', () => {
     expect(cell(fewUse(), 'median').text).toBe('too few cars yet');
   });
 
-  it('cars that got none: told beside those under', () => {
-    const row = productUse({ under: 3, cars: 100, carsListing: 98 });
-    expect(cell(row, 'under').column.quiet?.(row)).toBe('2 got none');
-    expect(cell(row, 'over').column.quiet?.(row)).toBeUndefined();
+  it('cars that got none: counted beside those under', () => {
+    expect(cell(productUse({ under: 3, cars: 100, carsListing: 98 }), 'none').text).toBe('2');
+  });
+
+  it('one car under of 400: a share that is there is never written as 0', () => {
+    expect(cell(productUse({ under: 1, underShare: 1 / 400 }), 'under').text).toBe('<1 %');
+    expect(cell(productUse({ under: 0, underShare: 0 }), 'under').text).toBe('0 %');
   });
 
   it('branches: by name, with triangle and word where the interval misses 1; one branch has no picture', () => {

@@ -1,5 +1,5 @@
 import type { ProductUse } from '#shared/contracts/products';
-import { formatShareRange } from '../../ui/format';
+import { formatShare, formatShareRange } from '../../ui/format';
 import { BODY_TYPE_PLURALS } from '../../ui/words';
 
 /** What the page needs to turn codes and cents into words. */
@@ -23,6 +23,11 @@ export function carsOfKind(
   words: ProductWords,
 ): string {
   return `${words.packageWord(sold)} ${BODY_TYPE_PLURALS[bodyType]}`;
+}
+
+/** A share of cars that is there: never rounded away to 0. */
+export function presentShare(share: number): string {
+  return share > 0 && share < 0.005 ? `<${formatShare(0.01)}` : formatShare(share);
 }
 
 /** The interval of a share, "92–96 %", nothing where there is none. */

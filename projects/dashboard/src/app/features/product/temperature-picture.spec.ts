@@ -34,6 +34,12 @@ describe('temperaturePicture', () => {
     );
   });
 
+  it('a slope without its interval: what it is, and no more', () => {
+    expect(say({ lower: null, upper: null })).toBe(
+      'About 41 ml less for every degree warmer (380 cars).',
+    );
+  });
+
   it('few cars, one temperature, none: why nothing is said', () => {
     const none = { slopeMlPerDegree: null, lower: null, upper: null };
     expect(say({ ...none, cars: 4 })).toBe('Too few cars yet: 4 cars with a temperature.');

@@ -67,21 +67,24 @@ function findingOf(
     return 'No car with this product says how warm the workshop was.';
   }
   const { slopeMlPerDegree: slope, lower, upper, cars } = temperature;
-  if (slope === null || lower === null || upper === null) {
+  if (slope === null) {
     return cars < 5
       ? `Too few cars yet: ${formatCars(cars)} with a temperature.`
       : `Nothing can be said yet: ${formatCars(cars)}, hardly any at different temperatures.`;
+  }
+  const change = `${millilitres(Math.abs(slope))} ml ${slope < 0 ? 'less' : 'more'} for every degree warmer`;
+  if (lower === null || upper === null) {
+    return `About ${change} (${formatCars(cars)}).`;
   }
   const behind = `give or take ${millilitres((upper - lower) / 2)}, ${formatCars(cars)}`;
   if (lower <= 0 && upper >= 0) {
     return `No clear change with temperature (${millilitres(slope)} ml a degree, ${behind}).`;
   }
-  const change = `${millilitres(Math.abs(slope))} ml ${slope < 0 ? 'less' : 'more'} for every degree warmer (${behind})`;
   const why =
     slope < 0 && words.isWax(product)
       ? ': cold wax is thick and does not run, so more goes in'
       : '';
-  return `${change}${why}.`;
+  return `${change} (${behind})${why}.`;
 }
 
 /** Whole millilitres from 2 on; one decimal below, where rounding would say 0. */

@@ -2,7 +2,7 @@ import type { ProductUse } from '#shared/contracts/products';
 import type { UseBoxGroup, UseBoxInput, UseBoxRow } from '../../charts/use-box/use-box-input';
 import { formatCars, formatCount, formatShare } from '../../ui/format';
 import { BODY_TYPE_NAMES } from '../../ui/words';
-import { carsOfKind, OVER, type ProductWords, UNDER } from './product-words';
+import { carsOfKind, OVER, presentShare, type ProductWords, UNDER } from './product-words';
 
 /** Shares of the norm with words of their own. */
 const MARKS = [
@@ -62,8 +62,8 @@ function boxRow(row: ProductUse): UseBoxRow {
       p75: of(row.p75Ml),
       p90: of(row.p90Ml),
     },
-    under: row.under ? `${formatShare(row.underShare ?? 0)} under` : '',
-    over: row.over ? `${formatShare(row.overShare ?? 0)} over` : '',
+    under: row.under ? `${presentShare(row.underShare ?? 0)} under` : '',
+    over: row.over ? `${presentShare(row.overShare ?? 0)} over` : '',
     strong: (row.underShare ?? 0) >= STRONG_SHARE,
     text: '',
   };

@@ -1,10 +1,10 @@
 import type { Params } from '@angular/router';
 import type { ProductUse } from '#shared/contracts/products';
 import type { CellLink, Column } from '../../ui/data-table/column';
-import { formatCars, formatCount, formatExactAmount, formatShare } from '../../ui/format';
+import { formatCars, formatCount, formatExactAmount } from '../../ui/format';
 import { BODY_TYPE_NAMES } from '../../ui/words';
 import type { Cars } from './cars-of-use';
-import type { ProductWords } from './product-words';
+import { presentShare, type ProductWords } from './product-words';
 
 /** Leads to the cars of a row. */
 export type UseLink = (row: ProductUse, cars: Cars) => CellLink | undefined;
@@ -21,6 +21,7 @@ export function useColumns(
     millilitres('mean', 'Mean', ({ meanMl }) => meanMl),
     ...spreadColumns(),
     outside('under', 'Under 70 %', linkOf),
+    withoutAny(),
     outside('over', 'Over 130 %', linkOf),
     costColumn(currencySign),
   ];
@@ -92,19 +93,25 @@ function outside(key: 'under' | 'over', label: string, linkOf: UseLink): Column<
     // Below 5 cars the count stays, the share does not (rule 13).
     text: (row) => {
       const share = shareOf(row);
-      return share === null ? formatCars(row[key] ?? 0) : formatShare(share);
+      return share === null ? formatCars(row[key] ?? 0) : presentShare(share);
     },
-    quiet: (row) => (key === 'under' ? withoutAny(row) : undefined),
     muted: (row) => shareOf(row) === null,
     link: (row) => (row[key] ? linkOf(row, key) : undefined),
     sortBy: shareOf,
   };
 }
 
-/** "3 got none": the gravest of those under. */
-function withoutAny({ cars, carsListing, under }: ProductUse): string | undefined {
-  const none = cars - carsListing;
-  return under && none > 0 ? `${formatCount(none)} got none` : undefined;
+/** The gravest of those under: cars that got none at all. */
+function withoutAny(): Column<ProductUse> {
+  const none = ({ cars, carsListing }: ProductUse): number => cars - carsListing;
+  return {
+    key: 'none',
+    label: 'Got none',
+    kind: 'number',
+    text: (row) => formatCount(none(row)),
+    muted: (row) => none(row) === 0,
+    sortBy: none,
+  };
 }
 
 function millilitres(
