@@ -1,7 +1,8 @@
-import type { Locator, Page } from 'playwright-core';
+import type { Page } from 'playwright-core';
 import { PLANTED_FACTS } from '#seeds/planted-facts';
 import { useChromium } from './chromium';
 import { readRawRecord } from './raw-record';
+import { readTwin, twinOf } from './read-twin';
 import { servedDemo } from './served-demo';
 import { signIn, untilReady } from './sign-in';
 import { readTable } from './table';
@@ -21,19 +22,11 @@ describe('the truths planted in the demo', () => {
     await untilReady(page);
   }
 
-  const twin = (heading: string): Locator =>
-    page.locator('us-table-twin').filter({ has: page.getByRole('heading', { name: heading }) });
-
-  async function tableOf(heading: string): Promise<Record<string, string>[]> {
-    await page.getByRole('button', { name: `Show as table: ${heading}` }).click();
-    const rows = await readTable(twin(heading).getByRole('table'));
-    await page.getByRole('button', { name: `Show as picture: ${heading}` }).click();
-    return rows;
-  }
+  const tableOf = (heading: string) => readTwin(page, heading);
 
   /** Points a week and p of the trend under the weekly picture; undefined when it says there is none. */
   async function trend(): Promise<{ way: string; points: number; pBelow: number } | undefined> {
-    const note = await twin('Margin week by week').locator('p').first().innerText();
+    const note = await twinOf(page, 'Margin week by week').locator('p').first().innerText();
     const said = /(Falling|Rising) ([\d.]+) points a week \(p (?:=|<) ([\d.]+)\)/.exec(note);
     if (!said) expect(note).toContain('No trend');
     return said ? { way: said[1]!, points: Number(said[2]), pBelow: Number(said[3]) } : undefined;

@@ -5,6 +5,10 @@ import { readRawRecord } from './raw-record';
 import { servedDemo } from './served-demo';
 import { personOf, signIn, typeSignIn, untilReady } from './sign-in';
 
+const READERS_PAGES = [
+  ...['This week', 'Overruns', 'Rot', 'Product', 'Jobs', 'Come-backs', 'Quote'],
+];
+
 /** Who signs in, where that leads, what they are offered and what they never see. */
 describe('the four roles', () => {
   const openWindow = useChromium(() => servedDemo().url);
@@ -16,25 +20,10 @@ describe('the four roles', () => {
   }
 
   test.each([
-    ['recorder', '/jobs', ['Jobs'], ['Account', 'How it is counted']],
-    [
-      'site_manager',
-      '/this-week',
-      ['This week', 'Overruns', 'Jobs'],
-      ['Account', 'How it is counted'],
-    ],
-    [
-      'regional_lead',
-      '/this-week',
-      ['This week', 'Overruns', 'Jobs'],
-      ['Account', 'How it is counted'],
-    ],
-    [
-      'head_office',
-      '/this-week',
-      ['This week', 'Overruns', 'Jobs'],
-      ['Account', 'How it is counted', 'Mailbox'],
-    ],
+    ['recorder', '/jobs', ['Jobs', 'Quote'], ['Account', 'How it is counted']],
+    ['site_manager', '/this-week', READERS_PAGES, ['Account', 'How it is counted']],
+    ['regional_lead', '/this-week', READERS_PAGES, ['Account', 'How it is counted']],
+    ['head_office', '/this-week', READERS_PAGES, ['Account', 'How it is counted', 'Mailbox']],
   ] as [Role, string, string[], string[]][])(
     'a %s, signed in by typing, stands on %s and is offered their pages',
     async (role, home, pages, menu) => {
@@ -70,7 +59,7 @@ describe('the four roles', () => {
 
   test('a recorder, at the address of a page with money, is led to their own first page', async () => {
     const page = await enter('recorder');
-    for (const path of ['/this-week', '/overruns', '/mailbox']) {
+    for (const path of ['/this-week', '/overruns', '/rot', '/product', '/come-backs', '/mailbox']) {
       await page.goto(path);
       await page.waitForURL('**/jobs');
     }
