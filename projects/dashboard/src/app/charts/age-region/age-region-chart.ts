@@ -12,7 +12,7 @@ let charts = 0;
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './age-region-chart.html',
   styleUrl: './age-region-chart.scss',
-  host: { '[style.min-height.px]': 'data().rows.length * 31 + 120' },
+  host: { '[style.min-height.px]': 'data().rows.length * 31 + 170' },
 })
 export class AgeRegionChart {
   readonly data = input.required<AgeRegionInput>();

@@ -66,6 +66,8 @@ const ROW = 31;
 const TEXT = 20;
 const LABEL_X = 8;
 const LEAST_PANEL = 112;
+/** Narrower than this, as on a phone, each region has the whole width. */
+const SIDE_BY_SIDE = 480;
 const MOST_PANEL = 300;
 const BETWEEN = 16;
 const BETWEEN_LINES = 28;
@@ -76,7 +78,8 @@ const ENDS = [0.25, 0.5, 1];
 export function layOutAgeRegion(input: AgeRegionInput, width: number): AgeRegionLayout {
   const labels = LABEL_X + widestText(['adjusted', ...input.rows.map(({ label }) => label)]) + 14;
   const room = width - labels;
-  const fitting = Math.max(1, Math.floor((room + BETWEEN) / (LEAST_PANEL + BETWEEN)));
+  const fitting =
+    width < SIDE_BY_SIDE ? 1 : Math.max(1, Math.floor((room + BETWEEN) / (LEAST_PANEL + BETWEEN)));
   const perLine = evenly(input.panels.length, fitting);
   const panelWidth = Math.min(MOST_PANEL, Math.floor((room - (perLine - 1) * BETWEEN) / perLine));
   const end = axisEnd(input);

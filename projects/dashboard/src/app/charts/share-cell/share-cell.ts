@@ -11,7 +11,7 @@ export interface ShareCellInput {
   readonly all: number | null;
 }
 
-const WIDTH = 132;
+const WIDTH = 112;
 const HEIGHT = 22;
 const PAD = 6;
 

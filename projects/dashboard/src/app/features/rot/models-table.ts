@@ -12,7 +12,8 @@ import { CellTemplate } from '../../ui/data-table/cell-template';
 import { DataTable } from '../../ui/data-table/data-table';
 import { sortRows, type TableSort } from '../../ui/data-table/sort-rows';
 import { formatCount, formatShare } from '../../ui/format';
-import { FIRST_MODELS, type ModelsView, shareCell } from './rot-models';
+import { narrowWindow } from '../../ui/narrow';
+import { FIRST_MODELS, type ModelsView, narrowOrder, shareCell } from './rot-models';
 
 const FIRST_SORT: TableSort = { key: 'steadied', direction: 'desc' };
 
@@ -43,7 +44,7 @@ const FIRST_SORT: TableSort = { key: 'steadied', direction: 'desc' };
     <us-data-table
       sortedBy="server"
       [label]="view().heading"
-      [columns]="view().columns"
+      [columns]="columns()"
       [rows]="shown()"
       [sort]="first"
       (sorted)="sort.set($event)"
@@ -64,7 +65,11 @@ const FIRST_SORT: TableSort = { key: 'steadied', direction: 'desc' };
 export class ModelsTable {
   readonly view = input.required<ModelsView>();
 
+  private readonly narrow = narrowWindow();
   protected readonly first = FIRST_SORT;
+  protected readonly columns = computed(() =>
+    this.narrow() ? narrowOrder(this.view().columns) : this.view().columns,
+  );
   protected readonly count = formatCount;
   protected readonly sort = signal<TableSort | undefined>(FIRST_SORT);
   /** Another age begins short again. */

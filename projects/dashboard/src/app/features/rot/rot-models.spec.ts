@@ -1,5 +1,5 @@
 import { rotAnswer, rotModel } from '../../testing/rot-answers';
-import { modelsView, shareCell } from './rot-models';
+import { modelsView, narrowOrder, shareCell } from './rot-models';
 
 const plain = (text: string) => text.replaceAll('\u202f', ' ');
 const view = (more: Parameters<typeof rotAnswer>[0] = {}) =>
@@ -33,5 +33,10 @@ describe('modelsView', () => {
       view({ models: [rotModel('A', 9, 4, alike), rotModel('B', 8, 3, alike)] }).pooled,
     ).toContain('no more than chance');
     expect(view({ models: [rotModel('A', 9, 4, alike)] }).pooled).toContain('One model only');
+  });
+
+  it('a phone: model, steadied share and its range first, nothing left out', () => {
+    const keys = narrowOrder(view().columns).map(({ key }) => key);
+    expect(keys).toEqual(['model', 'steadied', 'range', 'cars', 'rot', 'counted', 'picture']);
   });
 });

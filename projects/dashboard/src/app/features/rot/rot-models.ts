@@ -42,6 +42,14 @@ export function modelsView(
   };
 }
 
+const ON_A_PHONE = ['model', 'steadied', 'range', 'cars'];
+
+/** The columns with what matters most first: on a phone the rest is reached by scrolling sideways. */
+export function narrowOrder<Row>(columns: readonly Column<Row>[]): readonly Column<Row>[] {
+  const rank = ({ key }: Column<Row>): number => ON_A_PHONE.indexOf(key) + 1 || Infinity;
+  return [...columns].sort((a, b) => (rank(a) === rank(b) ? 0 : rank(a) - rank(b)));
+}
+
 /** What the small picture of a row draws. */
 export function shareCell(model: RotModel, all: number | null): ShareCellInput {
   const { share, shrunkShare, lower, upper } = model;

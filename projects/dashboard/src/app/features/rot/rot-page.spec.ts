@@ -52,6 +52,14 @@ const words = (host: HTMLElement, of: string) =>
   host.querySelector(of)?.textContent?.replaceAll('\u202f', ' ') ?? '';
 
 describe('RotPage', () => {
+  // jsdom knows no media queries: a wide window.
+  beforeAll(() => {
+    Object.defineProperty(window, 'matchMedia', {
+      configurable: true,
+      value: () => ({ matches: false, addEventListener() {}, removeEventListener() {} }),
+    });
+  });
+
   it('opened: asks for the scope of the URL', async () => {
     const { http } = await open();
     const { request } = http.expectOne(({ url }) => url.startsWith('/api/analytics/rot'));

@@ -35,14 +35,18 @@ describe('regionPicture', () => {
   });
 
   it('a region without a car of an age, and with too few: counts of 0 and 4, no share', () => {
-    const [inland, coast] = picture.panels;
+    const [coast, inland] = picture.panels;
     expect(inland!.cells.map(({ count }) => count)).toEqual(['100', '100', '100', '0']);
     expect(coast!.cells[3]).toMatchObject({ cars: 4, share: null });
   });
 
+  it('regions with different air: the harshest first', () => {
+    expect(picture.panels.map(({ key }) => key)).toEqual(['OC', 'IH']);
+  });
+
   it('ages left out of the adjusted share: named', () => {
-    expect(picture.panels.map(({ adjustedNote }) => adjustedNote)).toEqual(['without 20+', '']);
-    expect(plain(`${picture.panels[1]!.adjusted} ${picture.panels[1]!.adjustedRange}`)).toBe(
+    expect(picture.panels.map(({ adjustedNote }) => adjustedNote)).toEqual(['', 'without 20+']);
+    expect(plain(`${picture.panels[0]!.adjusted} ${picture.panels[0]!.adjustedRange}`)).toBe(
       '33 % (27–40 %)',
     );
   });
@@ -64,11 +68,11 @@ describe('regionRows', () => {
   it('each region: its ages, then its adjusted share, which the table tells apart', () => {
     const rows = regionRows(rotAnswer());
     expect(rows.map(({ region, age }) => `${region} ${age ?? 'adjusted'}`)).toEqual([
-      ...['IH 5-9', 'IH 10-14', 'IH 15-19', 'IH adjusted'],
       ...['OC 5-9', 'OC 10-14', 'OC 20+', 'OC adjusted'],
+      ...['IH 5-9', 'IH 10-14', 'IH 15-19', 'IH adjusted'],
     ]);
     const columns = regionColumns(rotAnswer(), words, () => undefined);
-    const said = columns.map(({ text }) => plain(text(rows[3]!)));
+    const said = columns.map(({ text }) => plain(text(rows[7]!)));
     expect(said).toEqual(['Region IH', 'all, adjusted', '100', '30', '33 %', '27–40 %', '']);
   });
 });

@@ -15,7 +15,7 @@ import {
 import { bandOf } from './age-choice';
 import { ageLabel, agedWords, type RotWords, shareOfCars, shareText } from './rot-words';
 
-/** The picture by age and region: regions in the order of the answer, ages as rows, those without a car anywhere left out. */
+/** The picture by age and region: regions by their air, ages as rows, those without a car anywhere left out. */
 export function regionPicture(answer: RotAnswer, age: AgeBand, words: RotWords): AgeRegionInput {
   const ages = agesOf(answer);
   return {
@@ -34,9 +34,14 @@ export function regionNote({ reference }: RotAnswer): string {
     : 'Adjusted: each region as if its cars had the ages of all cars shown, too few other branches being behind a figure of the network';
 }
 
-/** Regions that have a car of any age; the others would be empty frames. */
+/**
+ * Regions that have a car of any age, the harshest air first, so that rot and air are read together; the others would be empty
+ * frames.
+ */
 export function regionsWithCars({ regions }: Pick<RotAnswer, 'regions'>): readonly RotRegion[] {
-  return regions.filter(({ cars }) => cars > 0);
+  return regions
+    .filter(({ cars }) => cars > 0)
+    .sort((a, b) => (b.corrosionRateUmPerYear ?? -1) - (a.corrosionRateUmPerYear ?? -1));
 }
 
 /** What the air of a region does to bare steel: "air C4, 62 µm a year". */
