@@ -131,7 +131,7 @@ function readProducts(source: QuoteSource, cars: Knex.QueryBuilder): QuoteFigure
   return source.all(
     cars
       .joinRaw(
-        `join ? on job_products.branch_id = job_facts.branch_id and job_products.job_id = job_facts.job_id
+        `cross join ? on job_products.branch_id = job_facts.branch_id and job_products.job_id = job_facts.job_id
           and job_products.completed_on = job_facts.completed_on`,
         [source.products()],
       )
@@ -151,7 +151,7 @@ function readConsumables(
 ): { kind: ConsumableKind; ownCents: number; quantity: number }[] {
   return source.all(
     cars
-      .joinRaw('join ? on job_consumables.job_id = job_facts.job_id', [source.consumables()])
+      .joinRaw('cross join ? on job_consumables.job_id = job_facts.job_id', [source.consumables()])
       .groupBy('kind')
       .orderBy('kind')
       .select(
