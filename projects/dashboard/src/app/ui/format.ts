@@ -145,6 +145,11 @@ export function formatInstant(instant: string): string {
   return instantFormat.format(new Date(instant));
 }
 
+/** The day of an instant in the reader's own time: `28 Jan 2026`. */
+export function formatInstantDay(instant: string): string {
+  return instantDayFormat.format(new Date(instant));
+}
+
 /** Words in a list: `a, b and c`. */
 export function formatList(words: readonly string[]): string {
   return listFormat.format(words);
@@ -177,6 +182,7 @@ const monthFormat = new Intl.DateTimeFormat(LOCALE, {
   timeZone: 'UTC',
 });
 const instantFormat = new Intl.DateTimeFormat(LOCALE, { dateStyle: 'medium', timeStyle: 'short' });
+const instantDayFormat = new Intl.DateTimeFormat(LOCALE, { dateStyle: 'medium' });
 const listFormat = new Intl.ListFormat(LOCALE, { type: 'conjunction' });
 
 const dateFormat = kept(

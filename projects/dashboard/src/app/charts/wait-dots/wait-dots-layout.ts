@@ -1,4 +1,4 @@
-import { widestText } from '../text-width';
+import { textWidth, widestText } from '../text-width';
 import { type PlacedMark, type ValueAxis, valueAxis } from '../value-axis';
 import type { WaitDotsInput, WaitRow } from './wait-dots-input';
 
@@ -12,6 +12,8 @@ export interface PlacedDot {
 /** A group with its place in the picture, px. */
 export interface PlacedWait extends Pick<WaitRow, 'key' | 'label' | 'count' | 'text' | 'danger'> {
   readonly wordY: number;
+  /** Right end of the count. */
+  readonly countX: number;
   /** The line on which the group's marks stand. */
   readonly base: number;
   /** Top of the room for its marks. */
@@ -26,7 +28,6 @@ export interface WaitDotsLayout {
   readonly height: number;
   readonly left: number;
   readonly right: number;
-  readonly countX: number;
   /** Whether each group's marks stand under its words. */
   readonly stacked: boolean;
   readonly marks: readonly PlacedMark[];
@@ -74,6 +75,7 @@ export function layOutWaitDots(input: WaitDotsInput, width: number): WaitDotsLay
       ...{ key: row.key, label: row.label, count: row.count, text: row.text, danger: row.danger },
       top,
       base,
+      countX: stacked ? textWidth(row.label, 600) + GAP / 2 + textWidth(row.count) : left - GAP,
       wordY: stacked ? y + 12 : base - 10,
       dots: [...stacks].flatMap(([x, stack]) =>
         stack.map((ringed, index) => ({ x, y: base - 7 - index * pitch, ringed })),
@@ -85,7 +87,6 @@ export function layOutWaitDots(input: WaitDotsInput, width: number): WaitDotsLay
   return {
     ...{ width, left, right, stacked, rows, marks: axis.marks },
     height: y,
-    countX: stacked ? labels + GAP + counts : left - GAP,
   };
 }
 

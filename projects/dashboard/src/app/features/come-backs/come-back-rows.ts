@@ -33,12 +33,18 @@ export class ComeBackRows {
   readonly marked = output<ComeBack>();
 
   private readonly drafts = inject(ComeBackDrafts);
-  protected readonly catalogue = inject(Catalogue);
+  private readonly catalogue = inject(Catalogue);
   /** Key of the row that is open. */
   protected readonly open = signal<string | null>(null);
-  protected readonly several = computed(() => this.catalogue.branches().length > 1);
+  private readonly several = computed(() => this.catalogue.branches().length > 1);
   protected readonly rows = computed(() =>
-    this.items().map((item) => rowWords(item, this.today())),
+    this.items().map((item) =>
+      rowWords(
+        item,
+        this.today(),
+        this.several() ? this.catalogue.branchName(item.branch) : undefined,
+      ),
+    ),
   );
 
   protected word(key: string): string {

@@ -34,11 +34,11 @@ const GROUPS: readonly Pick<WaitGroup, 'key' | 'label'>[] = [
 
 const MARKS = [
   { value: 0, text: '0 weeks' },
-  { value: 13, text: '13' },
-  { value: 26, text: '26' },
+  { value: 26, text: '½ year' },
   { value: 52, text: '1 year' },
   { value: 104, text: '2 years' },
   { value: 156, text: '3 years' },
+  { value: 208, text: '4 years' },
   { value: 260, text: '5 years' },
 ];
 
@@ -104,7 +104,8 @@ function groupFigures(
 }
 
 function medianWords({ median }: WaitGroup): string {
-  return median === null ? 'too few cars for a middle' : `half over ${weeksWords(median)}`;
+  if (median === null) return 'too few cars for a middle';
+  return median < 1 ? 'half under a week' : `half over ${weeksWords(median)}`;
 }
 
 function weeksWords(weeks: number): string {

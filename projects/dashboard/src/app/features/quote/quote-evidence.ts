@@ -16,12 +16,16 @@ export function evidenceWords({ basis, ageBand }: Asked, { bodyType }: QuoteQues
     case 'model_age':
       return `cars of this model and age ${where}`;
     case 'body_age':
-      return `${BODY_TYPE_PLURALS[bodyType]} aged ${ageBand} years ${where}`;
+      return `${BODY_TYPE_PLURALS[bodyType]} aged ${ageWords(ageBand)} years ${where}`;
     case 'age':
-      return `cars aged ${ageBand} years ${where}, of any body type`;
+      return `cars aged ${ageWords(ageBand)} years ${where}, of any body type`;
     default:
       return `cars with this package ${where}, of any age`;
   }
+}
+
+function ageWords(band: string): string {
+  return band.replace('-', '–');
 }
 
 /** Why it was not a nearer set; nothing where it was the nearest. */

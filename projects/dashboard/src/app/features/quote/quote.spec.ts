@@ -61,8 +61,8 @@ describe('marginTyped', () => {
 describe('evidenceWords', () => {
   it.each([
     ['model_age', 'branch', 'cars of this model and age at this branch'],
-    ['body_age', 'branch', 'hatchbacks aged 15-19 years at this branch'],
-    ['age', 'network', 'cars aged 15-19 years in the whole network, of any body type'],
+    ['body_age', 'branch', 'hatchbacks aged 15–19 years at this branch'],
+    ['age', 'network', 'cars aged 15–19 years in the whole network, of any body type'],
     ['package', 'branch', 'cars with this package at this branch, of any age'],
   ] as const)('the set %s of the %s: named in plain words', (kind, source, words) => {
     expect(evidenceWords(quoteAnswer({ basis: { kind, source, cars: 41 } }), asked)).toBe(words);
