@@ -83,6 +83,18 @@ describe('layOutAgeRegion', () => {
     expect(texts(0.3)).toEqual(['0', '25', '50\u202f%']);
   });
 
+  it('not one share: an axis of the whole', () => {
+    const one = input(1);
+    const few = [cell(1, null), cell(1, null), cell(1, null)];
+    const none = {
+      ...one,
+      references: [null, null, null],
+      panels: [{ ...one.panels[0]!, cells: few }],
+    };
+    const texts = layOutAgeRegion(none, 600).lines[0]!.panels[0]!.ticks.map(({ text }) => text);
+    expect(texts.at(-1)).toBe('100\u202f%');
+  });
+
   it('narrow panels: the air is told in lines that fit, a long name is cut', () => {
     const wide = input(4);
     const panels = wide.panels.map((panel) => ({

@@ -68,11 +68,11 @@ const LABEL_X = 8;
 const LEAST_PANEL = 112;
 /** Narrower than this, as on a phone, each region has the whole width. */
 const SIDE_BY_SIDE = 480;
-const MOST_PANEL = 300;
+const MOST_PANEL = 500;
 const BETWEEN = 16;
 const BETWEEN_LINES = 28;
-/** The axis ends at the first of these that holds every interval. */
-const ENDS = [0.25, 0.5, 1];
+/** Where no interval reaches further the axis ends at a half. */
+const HALF = 0.5;
 
 /** Lays regions side by side, as many as fit in a line, under one another on a phone. Pure. */
 export function layOutAgeRegion(input: AgeRegionInput, width: number): AgeRegionLayout {
@@ -106,7 +106,7 @@ function axisEnd({ panels, references }: AgeRegionInput): number {
     ...panels.flatMap(({ cells }) => cells.map(({ upper, share }) => upper ?? share ?? 0)),
     ...references.map((share) => share ?? 0),
   );
-  return ENDS.find((end) => reach <= end) ?? 1;
+  return reach > 0 && reach <= HALF ? HALF : 1;
 }
 
 interface LineFrame {
@@ -192,7 +192,7 @@ function ticksOf(end: number, place: (share: number) => number): { x: number; te
   const per = end * 100;
   return [0, end / 2, end].map((share) => ({
     x: place(share),
-    text: share === end ? `${per}\u202f%` : String(Math.round(share * 1000) / 10),
+    text: share === end ? `${per}\u202f%` : String(Math.round(share * 100)),
   }));
 }
 
