@@ -62,6 +62,13 @@ describe('answerProducts', () => {
     expect(say({ use }).second).toContain('less than 70 % of the norm, 4 of them none at all.');
   });
 
+  it('all of those under got none: said so', () => {
+    const use = [productUse({ cars: 100, carsListing: 96, under: 4, underShare: 0.04 })];
+    expect(say({ use }).second).toBe(
+      'Cavity wax in full hatchbacks: 4 % of 100 cars got none at all.',
+    );
+  });
+
   it('three thin cars of nine beside twenty of fifty: the twenty are told', () => {
     const use = [
       productUse({ bodyType: 'van', cars: 9, under: 3, underShare: 3 / 9 }),

@@ -80,12 +80,11 @@ function worstSentence(
 ): AnswerPart[] {
   const worst = worstUse(use);
   if (!worst) return ['No car got less than 70 % of the norm of any product.'];
-  const none = worst.cars - worst.carsListing;
   const where = worst.kind ? ` in ${carsOfKind(worst.kind, words)}` : '';
   return [
     `${words.productName(worst.product)}${where}: `,
     carsUnder(worst, { ...filters, ...carsUnderQuery(worst, period) }),
-    ` got less than 70 % of the norm${noneWords(none, worst.under)}.`,
+    underWords(worst),
   ];
 }
 
@@ -94,10 +93,12 @@ function carsUnder({ under, cars }: WorstUse, query: Params): Exclude<AnswerPart
   return { text, link: '/jobs', query };
 }
 
-function noneWords(none: number, under: number): string {
-  if (none === 0) return '';
-  if (none >= under) return under === 1 ? ': none at all' : ', all of them none at all';
-  return `, ${formatCount(none)} of them none at all`;
+/** How little they got; that some got none is the gravest part of it. */
+function underWords({ cars, carsListing, under }: WorstUse): string {
+  const none = cars - carsListing;
+  if (none >= under) return ' got none at all.';
+  const some = none > 0 ? `, ${formatCount(none)} of them none at all` : '';
+  return ` got less than 70 % of the norm${some}.`;
 }
 
 /** Of several branches, who lies furthest from the norm either way: by name, and only where the interval misses it. */

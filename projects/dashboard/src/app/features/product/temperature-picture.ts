@@ -89,7 +89,7 @@ function findingOf(
 
 /** Whole millilitres from 2 on; one decimal below, where rounding would say 0. */
 function millilitres(value: number): string {
-  return Math.abs(value) >= 2 ? formatCount(value) : formatNumber(value, 1);
+  return value === 0 || Math.abs(value) >= 2 ? formatCount(value) : formatNumber(value, 1);
 }
 
 function classSaid(one: Class): string {
