@@ -6,6 +6,8 @@ import type { TemperatureClass, UseByTemperatureInput } from './use-by-temperatu
 export const TEMPERATURE_HEIGHT = 236;
 const TOP = 10;
 const BOTTOM = 184;
+/** Asked for; the scale makes 2 to 5 lines of it. */
+const STEPS = 2;
 const GAP = 8;
 const WIDEST_BAR = 34;
 const BETWEEN_WORDS = 8;
@@ -47,9 +49,9 @@ export function layOutUseByTemperature(
   );
   const y = scaleLinear()
     .domain(values.length > 0 ? [Math.min(...values), Math.max(...values)] : [0, 1])
-    .nice(4)
+    .nice(STEPS)
     .range([BOTTOM, TOP]);
-  const ticks = values.length > 0 ? y.ticks(4) : [];
+  const ticks = values.length > 0 ? y.ticks(STEPS) : [];
   const words = ticks.map(input.tick);
   const left = Math.max(widestText(words), widestText(['cars'])) + GAP;
   const from = Math.min(...classes.map(({ fromC }) => fromC));

@@ -9,8 +9,9 @@ export function litres(ml: number, rangeMl: number): string {
   return `${formatNumber(ml / 1000, decimalsOf(rangeMl))}${UNIT}`;
 }
 
-/** Two ends of a range as litres: "300–381 L". */
+/** Two ends of a range as litres: "300–381 L"; nothing where nothing says how far it reaches. */
 export function litresRange(lowerMl: number, upperMl: number): string {
+  if (upperMl <= lowerMl) return '';
   const decimals = decimalsOf(upperMl - lowerMl);
   return `${formatNumber(lowerMl / 1000, decimals)}–${formatNumber(upperMl / 1000, decimals)}${UNIT}`;
 }

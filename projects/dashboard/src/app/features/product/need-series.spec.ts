@@ -55,6 +55,12 @@ describe('needView', () => {
     expect(view({ carsWithoutUse: 0.3 }).outside[0]).toContain('Less than one of these cars is');
   });
 
+  it('nothing finished in the time: taken at the norm, without a range', () => {
+    const v = view({ jobs: 0, needs: [productNeed({ lowerMl: 340_400, upperMl: 340_400 })] });
+    expect(v.from).toContain('each is taken at its norm');
+    expect(v.printed[0]!.range).toBe('');
+  });
+
   it('one product: the file is of this product', () => {
     expect(view({ needs: [productNeed()] }).csv).toBe('CSV of this product');
   });

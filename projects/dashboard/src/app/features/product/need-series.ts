@@ -68,11 +68,15 @@ function fromWords({ weeks, jobs, period }: ProductNeedAnswer): string {
   const usual = Math.round(weeks.reduce((sum, week) => sum + week.usual, 0));
   const behind = `${formatCars(jobs)} of ${formatDateRange(period.from, period.to)}`;
   if (booked + usual === 0) return `No car is in the diary, and none came in the time before.`;
+  const known =
+    jobs === 0
+      ? 'but no car was finished in the time above, so each is taken at its norm, nothing usual is added and no range is known'
+      : `each with what such cars took; usual going by ${behind}`;
   const coming = [
     ...(booked > 0 ? [`${formatCars(booked)} in the diary`] : ['Nothing in the diary']),
     ...(usual > 0 ? [`about ${formatCount(usual)}${booked > 0 ? ' more' : ''} as usual`] : []),
   ];
-  return `${coming.join(', ')}, each with what such cars took; usual going by ${behind}.`;
+  return `${coming.join(', ')}, ${known}.`;
 }
 
 function outsideWords(

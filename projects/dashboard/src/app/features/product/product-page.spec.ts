@@ -88,7 +88,7 @@ describe('ProductPage', () => {
   it('a product without a norm: says so and lists it in millilitres', async () => {
     const page = await open('RC1');
     await answer(page);
-    expect(page.host.textContent).toContain('RC1, no norm');
+    expect(page.host.textContent).toContain('No package has a norm of it');
     expect(page.host.textContent).toContain('RC1 without a norm, ml a car');
     expect(page.host.querySelector('us-use-box-chart')).toBeNull();
   });

@@ -1,3 +1,4 @@
+import { NgTemplateOutlet } from '@angular/common';
 import { ChangeDetectionStrategy, Component, computed, inject, input, signal } from '@angular/core';
 import { MatChipsModule } from '@angular/material/chips';
 import { Router } from '@angular/router';
@@ -36,6 +37,7 @@ const FIRST_ROWS = 10;
     DotIntervalChart,
     LoadState,
     MatChipsModule,
+    NgTemplateOutlet,
     ScopeLine,
     TableTwin,
     UseBoxChart,
