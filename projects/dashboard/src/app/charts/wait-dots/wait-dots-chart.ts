@@ -1,7 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import { measuredWidth } from '../measured-width';
 import type { WaitDotsInput } from './wait-dots-input';
-import { layOutWaitDots, leastWaitHeight, type PlacedDot } from './wait-dots-layout';
+import { layOutWaitDots, usualWaitHeight, type PlacedDot } from './wait-dots-layout';
 
 /** How long things have waited: a mark each, stacked over the time, a row a group; danger to people as filled triangles. */
 @Component({
@@ -15,7 +15,7 @@ export class WaitDotsChart {
   readonly data = input.required<WaitDotsInput>();
 
   private readonly width = measuredWidth();
-  protected readonly least = computed(() => leastWaitHeight(this.data().rows.length));
+  protected readonly least = computed(() => usualWaitHeight(this.data()));
   protected readonly picture = computed(() =>
     this.width() > 0 ? layOutWaitDots(this.data(), this.width()) : undefined,
   );

@@ -44,9 +44,12 @@ const LEAST_HEIGHT = 34;
 const LEAST_PLOT = 220;
 const WORDS = 26;
 
+/** Width of a picture on a wide window; a narrower one is never lower. */
+const USUAL_WIDTH = 1174;
+
 /** Height of the picture before its width is known, so that nothing moves when it comes. */
-export function leastWaitHeight(rows: number): number {
-  return HEAD + rows * (LEAST_HEIGHT + GAP);
+export function usualWaitHeight(input: WaitDotsInput): number {
+  return layOutWaitDots(input, USUAL_WIDTH).height;
 }
 
 /** Stacks each group's marks over the time they have waited. Pure. */

@@ -24,6 +24,13 @@ export function modelsFor(known: readonly KnownMake[], typed: string): readonly 
   return own ? own.models : [...new Set(known.flatMap(({ models }) => models))].sort(byName);
 }
 
+/** The package that was worked most often in the given jobs; the first of equals. */
+export function usualPackage(jobs: readonly Pick<JobRow, 'package'>[]): string | undefined {
+  const counts = new Map<string, number>();
+  for (const job of jobs) counts.set(job.package, (counts.get(job.package) ?? 0) + 1);
+  return [...counts].sort((a, b) => b[1] - a[1])[0]?.[0];
+}
+
 function byName(a: string, b: string): number {
   return a.localeCompare(b);
 }

@@ -45,6 +45,8 @@ export class QuoteForm {
   /** What the URL has. */
   readonly asked = input.required<AskedParts>();
   readonly known = input<readonly KnownMake[]>([]);
+  /** The package that is quoted most, chosen until another is. */
+  readonly usual = input<string>();
   /** Recorders see the price alone and set no margin. */
   readonly money = input.required<'shown' | 'hidden'>();
   readonly ask = output<QuoteQuestion>();
@@ -73,7 +75,7 @@ export class QuoteForm {
         model: asked.model,
         firstRegistered: asked.firstRegistered,
         bodyType: asked.bodyType,
-        package: asked.package ?? this.catalogue.packages()[0]?.code,
+        package: asked.package ?? this.usual() ?? this.catalogue.packages()[0]?.code,
         branch: asked.branch ?? this.catalogue.branches()[0]?.code,
         margin: Number.isFinite(share) ? marginToType(share) : undefined,
       };

@@ -23,12 +23,13 @@ import { TableTwin } from '../../ui/table-twin/table-twin';
 import { Trouble } from '../../ui/trouble/trouble';
 import { BODY_TYPE_NAMES } from '../../ui/words';
 import { chancePicture } from './chance-picture';
-import { knownCars } from './known-cars';
+import { knownCars, usualPackage } from './known-cars';
 import { labourPicture } from './labour-picture';
 import { noPriceWords } from './no-price';
 import { priceLines, pricePicture } from './price-picture';
 import { QuoteForm } from './quote-form';
 import { type AskedParts, type QuoteQuestion, questionOf } from './quote-question';
+import { refusalWords } from './refusal-words';
 import { quoteSentences } from './quote-sentences';
 
 /** Jobs looked through for makes and models to offer. */
@@ -85,6 +86,13 @@ export class QuotePage {
   });
   private readonly lately = this.api.read(listJobs, () => ({ query: { limit: LOOKED_THROUGH } }));
   protected readonly known = computed(() => knownCars(this.lately.value()?.items ?? []));
+
+  protected readonly usual = computed(() => usualPackage(this.lately.value()?.items ?? []));
+  /** A question that cannot be answered as it is: which part of it, and why. */
+  protected readonly refused = computed(() => {
+    const problem = this.quote.problem();
+    return problem?.status === 422 ? refusalWords(problem.fields) : undefined;
+  });
 
   protected readonly sign = computed(() => currencySign(this.catalogue.currency()));
   protected readonly view = computed(() => {

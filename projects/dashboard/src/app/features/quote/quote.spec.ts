@@ -1,12 +1,13 @@
 import { quoteAnswer } from '../../testing/quote-answers';
 import type { AnswerPart } from '../../ui/answer/answer';
 import { chancePicture } from './chance-picture';
-import { knownCars, modelsFor } from './known-cars';
+import { knownCars, modelsFor, usualPackage } from './known-cars';
 import { labourPicture } from './labour-picture';
 import { noPriceWords } from './no-price';
 import { priceLines, pricePicture } from './price-picture';
 import { carsBehind, evidenceWords } from './quote-evidence';
 import { marginToType, marginTyped, questionOf } from './quote-question';
+import { refusalWords } from './refusal-words';
 import { quoteSentences } from './quote-sentences';
 
 const asked = {
@@ -180,6 +181,24 @@ describe('the pictures of a quote', () => {
     const lines = priceLines(quoteAnswer()).map(({ text }) => Number(text.replaceAll(',', '')));
     const sum = lines.slice(0, -1).reduce((total, amount) => total + Math.round(amount * 100), 0);
     expect(sum).toBe(Math.round(lines.at(-1)! * 100));
+  });
+});
+
+describe('refusalWords', () => {
+  it('a part that was refused: named as the form names it', () => {
+    expect(refusalWords([{ path: '/query/model', message: 'at most 60 characters' }])).toBe(
+      'Model: at most 60 characters.',
+    );
+    expect(refusalWords([{ path: '/query/marginShare', message: 'n' }])).toContain('Ask for less');
+    expect(refusalWords([])).toContain('cannot be answered');
+  });
+});
+
+describe('usualPackage', () => {
+  it('jobs of several packages: the most frequent; of none: nothing', () => {
+    const jobs = ['cavity', 'full', 'full'].map((code) => ({ package: code }));
+    expect(usualPackage(jobs)).toBe('full');
+    expect(usualPackage([])).toBeUndefined();
   });
 });
 
