@@ -23,8 +23,10 @@ function expectEveryRank(points: readonly (readonly [number, number])[], few: nu
   expect(slopeCount(groups)).toBe(slopes.length);
   const step = Math.max(1, Math.floor(slopes.length / 7));
   for (let rank = 0; rank + 1 < slopes.length; rank += step) {
-    expect(selectSlopes(groups, rank, rank + 1, few)).toEqual([slopes[rank], slopes[rank + 1]]);
+    expect(selectSlopes(groups, [rank, rank + 1], few)).toEqual([slopes[rank], slopes[rank + 1]]);
   }
+  const ranks = Array.from(slopes.keys()).filter((rank) => rank % step === 0);
+  expect(selectSlopes(groups, ranks, few)).toEqual(ranks.map((rank) => slopes[rank]));
 }
 
 const tied = fc.tuple(fc.integer({ min: -5, max: 5 }), fc.integer({ min: 0, max: 6 }));

@@ -1,6 +1,6 @@
 import { normalQuantile } from './normal-distribution';
 import { slopeCount, slopeGroups, type TimeGroup } from './slope-groups';
-import { slopeAtRank } from './theil-sen-slope';
+import { slopesAtRanks } from './theil-sen-slope';
 
 /** A slope with its 95 % limits; a limit is absent where the pairs are too few to have one. */
 export interface SlopeInterval {
@@ -26,14 +26,12 @@ export function theilSenInterval(
   const count = slopeCount(groups);
   if (count === 0) return undefined;
   const reach = normalQuantile(0.975) * Math.sqrt(kendallVariance(groups));
-  const interval: SlopeInterval = { slope: slopeAtRank(groups, (count - 1) / 2) };
+  const middle = (count - 1) / 2;
   // Ranks from 0 here: one less than in the book. The upper limit mirrors the lower.
   const rank = (count - reach) / 2 - 1;
-  if (rank >= 0) {
-    interval.lower = slopeAtRank(groups, rank);
-    interval.upper = slopeAtRank(groups, count - 1 - rank);
-  }
-  return interval;
+  if (rank < 0) return { slope: slopesAtRanks(groups, [middle])[0] as number };
+  const [lower, slope, upper] = slopesAtRanks(groups, [rank, middle, count - 1 - rank]);
+  return { slope: slope as number, lower: lower as number, upper: upper as number };
 }
 
 /** The variance of Kendall's S under no trend, with ties in times and in values. */

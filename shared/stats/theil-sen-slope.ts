@@ -17,15 +17,19 @@ export function theilSenSlope(
 ): number | undefined {
   const groups = slopeGroups(times, values);
   const count = slopeCount(groups);
-  return count === 0 ? undefined : slopeAtRank(groups, (count - 1) / 2);
+  return count === 0 ? undefined : slopesAtRanks(groups, [(count - 1) / 2])[0];
 }
 
-/** The slope at a rank from 0, linear between two neighbours. */
-export function slopeAtRank(groups: readonly TimeGroup[], rank: number): number {
-  const index = Math.floor(rank);
-  const [below, above] = selectSlopes(groups, index, Math.ceil(rank));
-  requireFinite(below, 'slope');
-  requireFinite(above, 'slope');
-  // Never past the upper neighbour, whatever the product rounds to.
-  return Math.min(below + (rank - index) * (above - below), above);
+/** The slopes at some ranks from 0 (ascending), each linear between its two neighbours. */
+export function slopesAtRanks(groups: readonly TimeGroup[], ranks: readonly number[]): number[] {
+  const slopes = selectSlopes(
+    groups,
+    ranks.flatMap((rank) => [Math.floor(rank), Math.ceil(rank)]),
+  );
+  return ranks.map((rank, index) => {
+    const below = requireFinite(slopes[2 * index], 'slope');
+    const above = requireFinite(slopes[2 * index + 1], 'slope');
+    // Never past the upper neighbour, whatever the product rounds to.
+    return Math.min(below + (rank - Math.floor(rank)) * (above - below), above);
+  });
 }
