@@ -53,7 +53,10 @@ export function iterateLeft(
   return db.iterate<ComeBackRow>(sorted(db, filters, statuses));
 }
 
-/** How many match, how many of them are structural, untold, and on how many cars they are. */
+/** Rot where the car bears load: as `isDangerous` has it. */
+const DANGEROUS = `structural = 1 and (seen_as <> 'surface' or coalesce(worked_as, 'surface') <> 'surface')`;
+
+/** How many match, how many of them are dangerous, untold, and on how many cars they are. */
 export function countLeft(
   db: ScopedDb,
   filters: JobFilters,
@@ -62,8 +65,8 @@ export function countLeft(
   const row = db.first<ComeBackTotals>(
     standing(db, filters, statuses).select({
       findings: sql.raw('count(*)'),
-      dangerous: sql.raw('count(*) filter (where structural = 1)'),
-      dangerousNotTold: sql.raw('count(*) filter (where structural = 1 and owner_told_on is null)'),
+      dangerous: sql.raw(`count(*) filter (where ${DANGEROUS})`),
+      dangerousNotTold: sql.raw(`count(*) filter (where ${DANGEROUS} and owner_told_on is null)`),
       // A car without a key is known by its job alone.
       cars: sql.raw(
         `count(distinct iif(vehicle_key is null, 'job ' || job_id, 'car ' || branch || ' ' || vehicle_key))`,

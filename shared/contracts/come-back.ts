@@ -82,7 +82,7 @@ export const listComeBack = defineEndpoint({
     nextCursor: z.string().nullable(),
     /** All that match, not only this page. */
     findings: z.int(),
-    /** Of them, structural. */
+    /** Of them, structural rot: bubbling or holed where the car bears load. */
     dangerous: z.int(),
     /** Of the dangerous, those whose owner has not been told in writing. */
     dangerousNotTold: z.int(),

@@ -157,7 +157,11 @@ describe('listComeBacks', () => {
           const keys = items.map(keyOf);
           expect(keys).toEqual([...keys].sort());
           const open = items.filter(({ status }) => OPEN_COME_BACKS.some((one) => one === status));
-          const dangerous = open.filter(({ structural }) => structural);
+          const dangerous = open.filter(
+            (one) =>
+              one.structural &&
+              (one.seenAs !== 'surface' || (one.workedAs ?? 'surface') !== 'surface'),
+          );
           const cars = open.map((one) => `${one.branch} ${one.vehicle.key ?? one.jobRef}`);
           const totals = {
             findings: open.length,

@@ -11,12 +11,6 @@ export function graverOf({ seenAs, workedAs }: Rust): Condition {
   return CONDITIONS.indexOf(workedAs) > CONDITIONS.indexOf(seenAs) ? workedAs : seenAs;
 }
 
-/** Load-bearing rot that was left on the car. */
-export function isLeftDangerous(finding: UndersideFinding): boolean {
-  const left = finding.action === 'deferred' || finding.action === 'declined';
-  return left && finding.structural && graverOf(finding) !== 'surface';
-}
-
 /** How the zone of a finding is filled: the graver, the darker. */
 export function lookOfCondition(condition: Condition): Look {
   const looks = { surface: 'step-1', bubbling: 'step-2', holed: 'step-3' } as const;

@@ -2,7 +2,8 @@ import type { Condition } from '#shared/domain/vocabulary';
 import { placed, type CarPlace } from './car-place';
 import { anchorOf } from './geometry/anchors';
 import type { Point } from './geometry/outline';
-import { graverOf, isLeftDangerous } from './finding-words';
+import { isLeftDangerous } from '#shared/domain/danger';
+import { graverOf } from './finding-words';
 import type { UndersideFinding } from './underside-input';
 
 /** A numbered mark on the car, CSS px. */

@@ -2,7 +2,8 @@ import { ChangeDetectionStrategy, Component, computed, input } from '@angular/co
 import { measuredWidth } from '../charts/measured-width';
 import { ConditionSign } from '../ui/condition-sign/condition-sign';
 import { drawnFindings } from './drawn-findings';
-import { findingWords, graverOf, isLeftDangerous } from './finding-words';
+import { isLeftDangerous } from '#shared/domain/danger';
+import { findingWords, graverOf } from './finding-words';
 import { CAR } from './geometry/outline';
 import { layOutMarks } from './marks-layout';
 import { placeName } from './place-words';

@@ -1,4 +1,5 @@
 import type { ComeBack, listComeBack } from '#shared/contracts/come-back';
+import { isDangerous } from '#shared/domain/danger';
 import type { OutOf } from '#shared/contracts/endpoint';
 import type { AnswerPart } from '../../ui/answer/answer';
 import { placeOf, waitWords } from '../../ui/come-back/come-back-words';
@@ -89,7 +90,7 @@ function nothing(status: StatusChoice): ComeBackSentences {
 
 /** Owners who do not know come first, then dates that have passed, then danger without a date, then the longest wait. */
 function nextStep(items: readonly ComeBack[], today: string): AnswerPart[] {
-  const untold = items.find((item) => item.structural && !item.ownerToldOn);
+  const untold = items.find((item) => isDangerous(item) && !item.ownerToldOn);
   if (untold) {
     return [
       'Begin here: tell the owner of the ',
@@ -110,7 +111,7 @@ function nextStep(items: readonly ComeBack[], today: string): AnswerPart[] {
       ` was due on ${formatDate(first.dueOn!)}${others}.`,
     ];
   }
-  const undated = items.find((item) => item.structural && item.dueOn === null);
+  const undated = items.find((item) => isDangerous(item) && item.dueOn === null);
   const next = undated ?? items[0];
   if (!next) return [];
   return undated

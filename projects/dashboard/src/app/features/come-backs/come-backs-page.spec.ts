@@ -102,12 +102,10 @@ describe('ComeBacksPage', () => {
     await answer(comeBackList([row]));
     await press(/^\s*Marks/);
     const change = { status: 'contacted', dueOn: null, note: 'rang', ownerToldOn: '2025-11-04' };
-    http
-      .expectOne('/api/branches/HAV/come-back/0417/sill_inner%2Fleft%2F1')
-      .flush({
-        ...row,
-        changes: [{ ...change, changedBy: 'Ilse', changedAt: '2025-11-04T08:00:00Z' }],
-      });
+    http.expectOne('/api/branches/HAV/come-back/0417/sill_inner%2Fleft%2F1').flush({
+      ...row,
+      changes: [{ ...change, changedBy: 'Ilse', changedAt: '2025-11-04T08:00:00Z' }],
+    });
     await settle();
     expect(host.querySelector('us-come-back-form')).toBeNull();
     expect(host.querySelector('us-come-back-history')?.textContent).toContain('rang');

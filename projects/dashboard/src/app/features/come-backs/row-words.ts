@@ -1,4 +1,5 @@
 import type { ComeBack } from '#shared/contracts/come-back';
+import { isDangerous } from '#shared/domain/danger';
 import { isStillOpen, keyOfFinding, placeOf, waitWords } from '../../ui/come-back/come-back-words';
 import { formatInstantDay, formatShortDate } from '../../ui/format';
 import { COME_BACK_STATUS_NAMES, CONDITION_NAMES } from '../../ui/words';
@@ -29,7 +30,8 @@ export function rowWords(item: ComeBack, today: string, branchName?: string) {
     status: COME_BACK_STATUS_NAMES[item.status],
     told: item.ownerToldOn ? formatShortDate(item.ownerToldOn) : 'not told',
     /** The owner of a dangerous one has to know. */
-    untold: item.structural && item.ownerToldOn === null && isStillOpen(item),
+    dangerous: isDangerous(item),
+    untold: isDangerous(item) && item.ownerToldOn === null && isStillOpen(item),
     changed:
       item.changedBy && item.changedAt
         ? `${item.changedBy}, ${formatInstantDay(item.changedAt)}`

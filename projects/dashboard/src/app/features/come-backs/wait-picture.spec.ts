@@ -6,10 +6,11 @@ const daysAgo = (weeks: number): string =>
   new Date(Date.UTC(2026, 1, 2 - weeks * 7)).toISOString().slice(0, 10);
 
 describe('waitPicture', () => {
-  it('findings of each gravity: one row each, load-bearing ones as danger whatever their condition', () => {
+  it('findings of each gravity: one row each, load-bearing rot as danger, surface rust there with the rest', () => {
     const picture = waitPicture(
       [
-        comeBackRow('1', { seenAs: 'surface' }),
+        comeBackRow('1', { seenAs: 'bubbling' }),
+        comeBackRow('4', { seenAs: 'surface' }),
         comeBackRow('2', { structural: false, workedAs: 'holed' }),
         comeBackRow('3', { structural: false }),
       ],

@@ -1,4 +1,5 @@
 import type { ComeBack } from '#shared/contracts/come-back';
+import { isDangerous } from '#shared/domain/danger';
 import type { WaitDotsInput } from '../../charts/wait-dots/wait-dots-input';
 import { weeksSince } from '../../ui/come-back/come-back-words';
 import type { Column } from '../../ui/data-table/column';
@@ -73,15 +74,16 @@ export function waitPicture(
         text: medianWords(group),
         dots: own.map((item) => ({
           value: weeksSince(item.completedOn, today),
-          ringed: item.structural && item.ownerToldOn === null,
+          ringed: isDangerous(item) && item.ownerToldOn === null,
         })),
       })),
     },
   };
 }
 
-function groupOf({ structural, seenAs, workedAs }: ComeBack): WaitGroup['key'] {
-  if (structural) return 'dangerous';
+function groupOf(item: ComeBack): WaitGroup['key'] {
+  if (isDangerous(item)) return 'dangerous';
+  const { seenAs, workedAs } = item;
   return seenAs === 'holed' || workedAs === 'holed' ? 'holed' : 'other';
 }
 
@@ -97,7 +99,7 @@ function groupFigures(
   return {
     ...group,
     findings: own.length,
-    notTold: own.filter((item) => item.structural && item.ownerToldOn === null).length,
+    notTold: own.filter((item) => isDangerous(item) && item.ownerToldOn === null).length,
     median: cars < LEAST_CARS ? null : (lower + upper) / 2,
     longest: weeks.at(-1) ?? 0,
   };

@@ -1,5 +1,5 @@
 import type { JobSheet } from '#shared/contracts/jobs';
-import { isLeftDangerous } from '../../underside-map/finding-words';
+import { isLeftDangerous } from '#shared/domain/danger';
 import { SIDE_NAMES } from '../../ui/words';
 
 /** A caution that the owner takes home. */

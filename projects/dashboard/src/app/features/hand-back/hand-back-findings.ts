@@ -1,5 +1,5 @@
 import type { JobSheet } from '#shared/contracts/jobs';
-import { isLeftDangerous } from '../../underside-map/finding-words';
+import { isLeftDangerous } from '#shared/domain/danger';
 import { CONDITION_NAMES, SIDE_NAMES, ZONE_NAMES } from '../../ui/words';
 
 type Finding = NonNullable<JobSheet['findings']>[number];

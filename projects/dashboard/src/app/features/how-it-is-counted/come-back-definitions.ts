@@ -16,8 +16,9 @@ export const comeBackDefinitions: readonly Definition[] = [
     id: 'dangerous',
     title: 'Dangerous',
     means:
-      'A finding left on a car in a place that bears load there: near a seat-belt anchorage, suspension, subframe, steering, a jacking point or a sill’s mounting. Its owner is to be told in writing; the day of that is asked for. The product informs, it does not certify: the local inspection rules decide.',
-    leftOut: 'Findings that were treated or patched; findings that bear no load.',
+      'Rot, bubbling or holed, left on a car in a place that bears load there: near a seat-belt anchorage, suspension, subframe, steering, a jacking point or a sill’s mounting. Its owner is to be told in writing; the day of that is asked for. The product informs, it does not certify: the local inspection rules decide.',
+    leftOut:
+      'Findings that were treated or patched; places that bear no load; surface rust, which is listed but no rot yet.',
     source: 'Common practice, no source.',
   },
   {

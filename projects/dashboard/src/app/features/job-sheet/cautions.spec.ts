@@ -1,5 +1,5 @@
 import type { JobSheet } from '#shared/contracts/jobs';
-import { cautionsOf, isLeftDangerous } from './cautions';
+import { cautionsOf } from './cautions';
 
 type Finding = NonNullable<JobSheet['findings']>[number];
 const finding = (change: Partial<Finding>): Finding => ({
@@ -14,21 +14,6 @@ const finding = (change: Partial<Finding>): Finding => ({
 const job = (findings: Finding[], repair = 0): JobSheet =>
   ({ actual: { stages: { repair } }, findings }) as unknown as JobSheet;
 const dangers = (sheet: JobSheet) => cautionsOf(sheet).map((caution) => caution.danger);
-
-describe('isLeftDangerous', () => {
-  it('of structural rot deferred or declined is true', () => {
-    expect(isLeftDangerous(finding({}))).toBe(true);
-    expect(
-      isLeftDangerous(finding({ action: 'declined', seenAs: 'surface', workedAs: 'holed' })),
-    ).toBe(true);
-  });
-
-  it('of surface rust, of rot that bears no load, and of rot patched is false', () => {
-    expect(isLeftDangerous(finding({ seenAs: 'surface' }))).toBe(false);
-    expect(isLeftDangerous(finding({ structural: false }))).toBe(false);
-    expect(isLeftDangerous(finding({ action: 'patched', workedAs: 'holed' }))).toBe(false);
-  });
-});
 
 describe('cautionsOf', () => {
   it('of a sound car has none', () => {

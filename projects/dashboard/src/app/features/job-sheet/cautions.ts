@@ -1,22 +1,11 @@
 import type { JobSheet } from '#shared/contracts/jobs';
+import { isLeftDangerous } from '#shared/domain/danger';
+import { isRot } from '#shared/domain/recorded-job';
 
 /** A danger to people that this job brings with it. */
 export interface SheetCaution {
   readonly danger: string;
   readonly words: string;
-}
-
-type Finding = NonNullable<JobSheet['findings']>[number];
-
-/** Rot: seen or worked as bubbling or holed; surface rust alone is not. */
-export function isRot(finding: Pick<Finding, 'seenAs' | 'workedAs'>): boolean {
-  return [finding.seenAs, finding.workedAs].some((word) => word === 'bubbling' || word === 'holed');
-}
-
-/** Structural rot that was left on the car. */
-export function isLeftDangerous(finding: Finding): boolean {
-  const left = finding.action === 'deferred' || finding.action === 'declined';
-  return left && finding.structural && isRot(finding);
 }
 
 /** The cautions of a job, the gravest first. The product informs, it does not certify. */

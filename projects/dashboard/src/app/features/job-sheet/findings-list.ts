@@ -4,7 +4,7 @@ import type { JobSheet } from '#shared/contracts/jobs';
 import { ConditionSign } from '../../ui/condition-sign/condition-sign';
 import { formatExactMoney, formatMinutes } from '../../ui/format';
 import { ACTION_NAMES, CONDITION_NAMES, SIDE_NAMES, ZONE_NAMES } from '../../ui/words';
-import { isLeftDangerous } from './cautions';
+import { isLeftDangerous } from '#shared/domain/danger';
 import { LeftMark } from './left-mark';
 
 /** Rust found on the car, zone by zone: as seen, as worked, what was done. */

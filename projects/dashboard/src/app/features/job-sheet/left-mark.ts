@@ -9,6 +9,7 @@ import {
 } from '@angular/core';
 import { RouterLink } from '@angular/router';
 import type { ComeBack } from '#shared/contracts/come-back';
+import { isDangerous } from '#shared/domain/danger';
 import { Session } from '../../core/session/session';
 import { ComeBackDrafts } from '../../ui/come-back/come-back-drafts';
 import { ComeBackForm } from '../../ui/come-back/come-back-form';
@@ -77,14 +78,14 @@ export class LeftMark {
     return role === 'site_manager' || role === 'head_office';
   });
   protected readonly words = computed(() => {
-    const { status, dueOn, ownerToldOn, structural, closedByJobRef } = this.of();
+    const { status, dueOn, ownerToldOn, closedByJobRef } = this.of();
     if (closedByJobRef) return 'dealt with by a later job,';
     return [
       COME_BACK_STATUS_NAMES[status],
       ...(dueOn ? [`due ${formatShortDate(dueOn)}`] : []),
       ownerToldOn
         ? `owner told in writing on ${formatShortDate(ownerToldOn)}`
-        : structural
+        : isDangerous(this.of())
           ? 'owner not told in writing'
           : '',
     ]

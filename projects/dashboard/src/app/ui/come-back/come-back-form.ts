@@ -12,6 +12,7 @@ import { MatButton } from '@angular/material/button';
 import { MatFormFieldModule } from '@angular/material/form-field';
 import { MatInput } from '@angular/material/input';
 import { type ComeBack, putComeBack } from '#shared/contracts/come-back';
+import { isDangerous } from '#shared/domain/danger';
 import { COME_BACK_STATUSES, type ComeBackStatus } from '#shared/domain/vocabulary';
 import { Api } from '../../core/api/api';
 import { deed } from '../../core/api/deed';
@@ -38,6 +39,7 @@ const OF_RECORDERS: readonly ComeBackStatus[] = ['contacted', 'booked'];
 })
 export class ComeBackForm {
   readonly of = input.required<Markable>();
+  protected readonly dangerous = computed(() => isDangerous(this.of()));
   /** Today in the branch; no date in the form may lie beyond where that makes no sense. */
   readonly today = input.required<string>();
   readonly marked = output<ComeBack>();
@@ -85,7 +87,7 @@ export class ComeBackForm {
 
   protected ask(): void {
     if (!this.chosen()) return;
-    if (this.of().structural && !this.typed().ownerToldOn && !this.asking()) {
+    if (this.dangerous() && !this.typed().ownerToldOn && !this.asking()) {
       this.asking.set(true);
       return;
     }

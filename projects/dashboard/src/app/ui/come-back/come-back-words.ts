@@ -6,7 +6,16 @@ import { COME_BACK_STATUS_NAMES, SIDE_NAMES, ZONE_NAMES } from '../words';
 /** A finding left on a car as far as it can be marked. */
 export type Markable = Pick<
   ComeBack,
-  'branch' | 'jobRef' | 'ref' | 'structural' | 'status' | 'dueOn' | 'note' | 'ownerToldOn'
+  | 'branch'
+  | 'jobRef'
+  | 'ref'
+  | 'seenAs'
+  | 'workedAs'
+  | 'structural'
+  | 'status'
+  | 'dueOn'
+  | 'note'
+  | 'ownerToldOn'
 >;
 
 /** What the caution beside a dangerous finding says. */

@@ -3,7 +3,7 @@ import { MatButton } from '@angular/material/button';
 import type { Reading } from '../../core/api/reading';
 
 /** What is being waited for, so that the wait has its outline. */
-export type LoadShape = 'page' | 'sheet' | 'rows';
+export type LoadShape = 'page' | 'answer' | 'sheet' | 'rows';
 
 /**
  * The four states of something read from the server. Its content is shown when there is a value; while a newer one is under way the
