@@ -19,7 +19,7 @@ export interface ReferenceBand {
   band: number;
   cars: number;
   withRot: number;
-  /** Whether enough other branches have cars in this band for its share to be shown. */
+  /** Whether its share may be shown: of the network only with enough other branches that have cars in this band. */
   enoughBehind: boolean;
 }
 
@@ -33,8 +33,11 @@ export class NetworkReference {
     private readonly scope: Scope,
   ) {}
 
-  /** Cars and cars with rot by age band over the network, or `undefined` where too few others stand behind them. Branch and region filters do not narrow it. */
-  rotBands(filters: JobFilters): ReferenceBand[] | undefined {
+  /**
+   * Cars and cars with rot by age band over the network; where too few others stand behind them, over the branches that the
+   * caller may see. Branch and region filters narrow neither: they choose rows, not what rows are compared with.
+   */
+  rotBands(filters: JobFilters): { kind: 'network' | 'scope'; bands: ReferenceBand[] } {
     const cells = this.all<{ branchId: number; band: number; cars: number; withRot: number }>(
       whereJobs(everyJob(), filters)
         .groupBy('branch_id', 'age_band')
@@ -42,15 +45,21 @@ export class NetworkReference {
         .count({ cars: '*' })
         .sum({ withRot: 'has_rot' }),
     );
-    if (!this.enoughBehind(cells)) return undefined;
+    const ofNetwork = this.enoughBehind(cells);
+    const counted = ofNetwork
+      ? cells
+      : cells.filter(({ branchId }) => !this.scope.isOutside(branchId));
     const bands = new Map<number, typeof cells>();
-    for (const cell of cells) bands.set(cell.band, [...(bands.get(cell.band) ?? []), cell]);
-    return [...bands].map(([band, own]) => ({
-      band,
-      cars: total(own.map((cell) => cell.cars)),
-      withRot: total(own.map((cell) => cell.withRot)),
-      enoughBehind: this.enoughBehind(own),
-    }));
+    for (const cell of counted) bands.set(cell.band, [...(bands.get(cell.band) ?? []), cell]);
+    return {
+      kind: ofNetwork ? 'network' : 'scope',
+      bands: [...bands].map(([band, own]) => ({
+        band,
+        cars: total(own.map((cell) => cell.cars)),
+        withRot: total(own.map((cell) => cell.withRot)),
+        enoughBehind: !ofNetwork || this.enoughBehind(own),
+      })),
+    };
   }
 
   /** The nearest set of the network's cars to the one quoted for the scope's branch, with five branches besides that one behind it: the same whoever asks (rule 48). */

@@ -72,6 +72,7 @@ export function createApp(kit: Kit, log: Logger, dashboard: string): App {
     router,
     authenticate: makeAuthenticate(kit),
     branches: () => kit.store.state.branches,
+    hasPackage: (code) => kit.store.state.package(code) !== undefined,
     mounted: [],
   };
   mountSystem(mounting, kit);

@@ -98,7 +98,7 @@ const READS: Record<
   'list-missing-costs': listMissingCosts,
   'list-uncosted-products': listUncostedProducts,
   'list-week-notes': (db) => listWeekNotes(db, '2026-W01', '2026-W05'),
-  'network-rot-bands': (_db, filters, network) => network.rotBands(filters),
+  'network-rot-bands': (_db, filters, network) => network.rotBands(filters).bands,
   'network-quote-counts': (_db, _filters, network) => network.nearestQuoteSet(CAR, ['age'], 30),
   'package-codes': packageCodes,
   'read-by-branch': (db, filters) => readByKey(db, filters, 'branch'),

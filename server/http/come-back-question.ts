@@ -20,7 +20,7 @@ export function comeBackQuestion(
   const { from, to } = query;
   const problems: FieldProblem[] =
     from !== undefined && to !== undefined ? breaksOfPeriod({ from, to }) : [];
-  const packageIds = findPackages(kit, query.package, problems);
+  const packageIds = findPackages(kit, query.package);
   if (problems.length > 0) throw refuseInput(problems);
   return {
     scope: allowed.narrow(query),

@@ -23,7 +23,7 @@ export function jobListQuestion(
   const { from, to } = query;
   const problems: FieldProblem[] =
     from !== undefined && to !== undefined ? breaksOfPeriod({ from, to }) : [];
-  const packageIds = findPackages(kit, query.package, problems);
+  const packageIds = findPackages(kit, query.package);
   const productId = findProduct(kit, query.product, problems);
   problems.push(...breaksOfPairs(query));
   if (problems.length > 0) throw refuseInput(problems);

@@ -59,6 +59,8 @@ type Named<P extends z.ZodObject> = Pick<Call, 'caller' | 'scope' | 'branch'> & 
 export interface Judging<P extends z.ZodObject> {
   /** Whether what the path names is there; judged before the body is read (rule 82). Not asked of a path of the wrong shape. */
   exists?: (call: Named<P> & { params: z.output<P> }) => boolean;
+  /** Refuses what the caller may not even ask, before anything of it is read as right or wrong (rules 24 and 82). */
+  mayAsk?: (query: Readonly<Record<string, unknown>>, caller: Caller | undefined) => void;
   /** Rules over the raw body that are told together with the problems of shape (rule 57). */
   rules?: (raw: unknown, call: Named<P>) => readonly FieldProblem[];
 }
@@ -68,6 +70,8 @@ export interface Mounting {
   authenticate: Authenticate;
   /** All branches there are, to make a scope from a grant. */
   branches: () => readonly ScopedBranch[];
+  /** Whether the catalogue has a package of this code. */
+  hasPackage: (code: string) => boolean;
   /** Every contract mounted, for the tests that walk them. */
   mounted: Endpoint[];
 }
@@ -85,12 +89,13 @@ export function mount<
   mounting: Mounting,
   endpoint: Endpoint<P, Q, B, O>,
   handler: Handler<P, Q, B, O>,
-  { exists, rules }: Judging<P> = {},
+  { exists, mayAsk, rules }: Judging<P> = {},
 ): void {
   mounting.mounted.push(endpoint);
   mounting.router[endpoint.method](endpoint.path, async (request: Request, response: Response) => {
     const caller = endpoint.access === 'public' ? undefined : await mounting.authenticate(request);
     if (caller) checkAccess(endpoint, caller);
+    mayAsk?.(request.query, caller);
     const scope = caller ? scopeOf(caller, mounting.branches()) : Scope.nothing;
     const code = request.params['branch'];
     const branch = typeof code === 'string' ? scope.branch(code) : undefined;
@@ -101,7 +106,11 @@ export function mount<
     const raw = endpoint.body
       ? await readBody(request, response, endpoint.path.endsWith('/batch') ? 'batch' : 'single')
       : undefined;
-    const input = parseInput(endpoint, params, request, raw, rules?.(raw, named) ?? []);
+    const broken = [
+      ...unknownPackages(endpoint.query, request, mounting.hasPackage),
+      ...(rules?.(raw, named) ?? []),
+    ];
+    const input = parseInput(endpoint, params, request, raw, broken);
     const reply = await handler({
       ...input,
       caller,
@@ -162,6 +171,19 @@ function parseInput<P extends z.ZodObject, Q extends z.ZodObject, B extends z.Zo
     throw refuseInput(problems);
   }
   return { params: params.data, query: query.data, body: body?.data as Parsed<B> };
+}
+
+/** Packages asked for that the catalogue does not have: told with every other problem (rules 57 and 60). */
+function unknownPackages(
+  query: z.ZodObject,
+  request: Request,
+  hasPackage: Mounting['hasPackage'],
+): FieldProblem[] {
+  if (!('package' in query.shape)) return [];
+  const asked = [request.query['package']].flat();
+  return asked.some((code) => typeof code === 'string' && !hasPackage(code))
+    ? [{ path: '/query/package', message: 'no package has this code' }]
+    : [];
 }
 
 /** Problems of a query at the name of its parameter, whichever of several values is wrong (rule 60). */

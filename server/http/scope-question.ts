@@ -1,6 +1,6 @@
 import type { JobFilters } from '#db/queries/job-filters';
 import type { Scope } from '#db/scope';
-import type { FieldProblem, ScopeQuery } from '#shared/contracts/fields';
+import type { ScopeQuery } from '#shared/contracts/fields';
 import { breaksOfWeeks, periodOf, type Period } from '#shared/domain/period';
 import { refuseInput } from '#shared/domain/refusal';
 import { todayIn } from '../clock';
@@ -19,22 +19,17 @@ export function scopeQuestion(kit: Kit, allowed: Scope, query: ScopeQuery): Scop
   const scope = allowed.narrow(query);
   const today = todayIn(scope, kit.clock);
   const period = periodOf(query, today);
-  const problems: FieldProblem[] = breaksOfWeeks(period);
-  const packageIds = findPackages(kit, query.package, problems);
+  const problems = breaksOfWeeks(period);
   if (problems.length > 0) throw refuseInput(problems);
-  return { scope, period, filters: { packageIds, bodyTypes: query.bodyType }, today };
+  return {
+    scope,
+    period,
+    filters: { packageIds: findPackages(kit, query.package), bodyTypes: query.bodyType },
+    today,
+  };
 }
 
-/** The ids of the packages asked for; unknown words are named (rule 60). */
-export function findPackages(
-  kit: Kit,
-  codes: readonly string[] | undefined,
-  problems: FieldProblem[],
-): number[] | undefined {
-  return codes?.flatMap((code) => {
-    const entry = kit.store.state.package(code);
-    if (entry) return [entry.id];
-    problems.push({ path: '/query/package', message: 'no package has this code' });
-    return [];
-  });
+/** The ids of the packages asked for; a word that is none was refused with the query (rule 60). */
+export function findPackages(kit: Kit, codes: readonly string[] | undefined): number[] | undefined {
+  return codes?.flatMap((code) => kit.store.state.package(code)?.id ?? []);
 }

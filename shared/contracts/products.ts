@@ -78,6 +78,8 @@ export const productsAnswer = z.strictObject({
     ratioToNorm: share,
     lower: share,
     upper: share,
+    /** Cars whose every product had a cost: those that the cost a car is the mean of. */
+    costedCars: z.int(),
     costPerCarCents: centsSum.nullable(),
   }),
   use: z.array(productUse),

@@ -47,7 +47,9 @@ export function recountRot(
   const mayKnow = (cars: readonly CarSent[]): boolean =>
     reach === 'network' || strangers(cars) >= 5;
   const reference = mayKnow(network) ? 'network' : 'scope';
-  const standard = reference === 'network' ? network : own;
+  // What the caller sees, whatever rows were chosen.
+  const seen = network.filter(({ branch }) => reach === 'network' || reach.includes(branch));
+  const standard = reference === 'network' ? network : seen;
   const bandsOf = (cars: readonly CarSent[]) => BANDS.filter((band) => inBand(cars, band).length);
   return {
     scope,

@@ -57,6 +57,7 @@ export function answerProducts(
           used: normed.flatMap(({ used }) => used),
           foreseen: normed.flatMap(({ foreseen }) => foreseen),
         }),
+        costedCars: jobs - uncosted.jobs,
         costPerCarCents: costPerCar(known, jobs - uncosted.jobs),
       },
       use: useOf(db, codes, cells, lines),

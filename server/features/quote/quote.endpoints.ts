@@ -10,29 +10,36 @@ import type { Kit } from '../../kit';
 
 /** What the next car is likely to take, computed in a worker. */
 export function mountQuote(mounting: Mounting, kit: Kit): void {
-  mount(mounting, getQuote, async (call) => {
-    const { branch, package: code, ...car } = call.query;
-    const money = moneyFor(call.caller);
-    if (money === 'unseen' && car.marginShare !== undefined) {
-      throw new Refusal('forbidden', 'Recorders quote for the margin that the branch has set.');
-    }
-    // A branch out of scope leaves none, as one that does not exist (rule 22).
-    const scope = call.scope.narrow({ branch: [branch] });
-    const today = todayIn(scope, kit.clock);
-    const found = kit.store.state.package(code);
-    const problems: FieldProblem[] = [
-      ...(found ? [] : [{ path: '/query/package', message: 'no package has this code' }]),
-      ...(car.firstRegistered > today.slice(0, 7)
-        ? [{ path: '/query/firstRegistered', message: `is after this month (${today})` }]
-        : []),
-      ...breaksOfMargin(kit, car.marginShare, today),
-    ];
-    if (!found || problems.length > 0) throw refuseInput(problems);
-    const question = { ...car, packageId: found.id, today, money };
-    return {
-      body: await kit.reads.answer('quote', scope, { marginShare: undefined, ...question }),
-    };
-  });
+  mount(
+    mounting,
+    getQuote,
+    async (call) => {
+      const { branch, package: code, ...car } = call.query;
+      const money = moneyFor(call.caller);
+      // A branch out of scope leaves none, as one that does not exist (rule 22).
+      const scope = call.scope.narrow({ branch: [branch] });
+      const today = todayIn(scope, kit.clock);
+      const packageId = kit.store.state.package(code)?.id;
+      if (packageId === undefined) throw new Error('a package that was found is gone');
+      const problems: FieldProblem[] = [
+        ...(car.firstRegistered > today.slice(0, 7)
+          ? [{ path: '/query/firstRegistered', message: `is after this month (${today})` }]
+          : []),
+        ...breaksOfMargin(kit, car.marginShare, today),
+      ];
+      if (problems.length > 0) throw refuseInput(problems);
+      const question = { ...car, packageId, today, money };
+      return {
+        body: await kit.reads.answer('quote', scope, { marginShare: undefined, ...question }),
+      };
+    },
+    {
+      mayAsk: (query, caller) => {
+        if (query['marginShare'] === undefined || moneyFor(caller) === 'seen') return;
+        throw new Refusal('forbidden', 'Recorders quote for the margin that the branch has set.');
+      },
+    },
+  );
 }
 
 /** A margin must leave something of the price after the fee of today (rule 49). */

@@ -1,9 +1,8 @@
-import type { NetworkReference, ReferenceBand } from '#db/network-reference';
+import type { NetworkReference } from '#db/network-reference';
 import type { JobFilters } from '#db/queries/job-filters';
 import type { RotAnswer } from '#shared/contracts/rot';
 import { AGE_BANDS } from '#shared/domain/vocabulary';
 import { shareOf } from './count-shares';
-import type { ByBand } from './tally-cars';
 
 /** What regions are compared with: an age mix, and the share with rot of each band. */
 export interface AgeReference {
@@ -14,31 +13,15 @@ export interface AgeReference {
   shares: readonly (number | null)[];
 }
 
-/** The whole network where the caller may know of it, else the answer's own cars (rule 21). */
-export function ageReference(
-  network: NetworkReference,
-  filters: JobFilters,
-  own: ByBand,
-): AgeReference {
-  const bands = network.rotBands(filters);
-  return bands ? ofNetwork(bands) : ofScope(own);
-}
-
-function ofNetwork(bands: readonly ReferenceBand[]): AgeReference {
+/** The whole network where the caller may know of it, else all branches that the caller sees (rule 21). */
+export function ageReference(network: NetworkReference, filters: JobFilters): AgeReference {
+  const { kind, bands } = network.rotBands(filters);
   const byBand = AGE_BANDS.map((_, place) => bands.find(({ band }) => band === place));
   return {
-    kind: 'network',
+    kind,
     cars: byBand.map((band) => band?.cars ?? 0),
     shares: byBand.map((band) =>
       band?.enoughBehind ? shareOf(band.withRot, band.cars).share : null,
     ),
-  };
-}
-
-function ofScope({ cars, withRot }: ByBand): AgeReference {
-  return {
-    kind: 'scope',
-    cars,
-    shares: cars.map((all, band) => shareOf(withRot[band] as number, all).share),
   };
 }

@@ -31,7 +31,7 @@ export function answerRot(
     const scope = db.scope.echo();
     const all = together(tally.byBranch.values());
     const regions = byRegion(db, scope.regions, tally.byBranch);
-    const reference = ageReference(network, asked, all);
+    const reference = ageReference(network, asked);
     const climates = readClimates(db, scope.regions);
     const newest = [...tally.byModel.values()].map((model) => model.newest.jobId);
     return {

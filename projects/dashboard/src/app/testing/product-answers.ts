@@ -106,6 +106,7 @@ export function productsAnswer(more: Partial<ProductsAnswer> = {}): ProductsAnsw
     missingCosts: [],
     overall: {
       cars: 412,
+      costedCars: 412,
       ratioToNorm: 0.94,
       lower: 0.92,
       upper: 0.96,
@@ -136,7 +137,14 @@ export function productsAnswer(more: Partial<ProductsAnswer> = {}): ProductsAnsw
 export function noProducts(more: Partial<ProductsAnswer> = {}): ProductsAnswer {
   return productsAnswer({
     jobs: 0,
-    overall: { cars: 0, ratioToNorm: null, lower: null, upper: null, costPerCarCents: null },
+    overall: {
+      cars: 0,
+      costedCars: 0,
+      ratioToNorm: null,
+      lower: null,
+      upper: null,
+      costPerCarCents: null,
+    },
     use: [],
     branches: [],
     temperature: [],

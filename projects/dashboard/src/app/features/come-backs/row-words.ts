@@ -31,6 +31,8 @@ export function rowWords(item: ComeBack, today: string, branchName?: string) {
     told: item.ownerToldOn ? formatShortDate(item.ownerToldOn) : 'not told',
     /** The owner of a dangerous one has to know. */
     dangerous: isDangerous(item),
+    /** What stands where danger would. */
+    harmless: item.structural ? 'surface rust' : 'not load-bearing',
     untold: isDangerous(item) && item.ownerToldOn === null && isStillOpen(item),
     changed:
       item.changedBy && item.changedAt

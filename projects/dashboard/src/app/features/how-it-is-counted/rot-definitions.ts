@@ -30,7 +30,7 @@ export const rotDefinitions: readonly Definition[] = [
     id: 'rot-adjusted',
     title: 'Share adjusted for age',
     means:
-      'A region with older cars has more rot for that alone. Adjusted, every region is given the same ages, those of the whole network in these dates, so that regions can be compared. Where too few other branches stand behind a figure of the network, the ages are those of all cars shown; the page says which.',
+      'A region with older cars has more rot for that alone. Adjusted, every region is given the same ages, those of the whole network in these dates, so that regions can be compared. Where too few other branches stand behind a figure of the network, the ages are those of all the branches you see, whichever are chosen above; the page says which.',
     formula: [
       'adjusted = Σ weight of an age × share of that age in the region; weight = the reference’s part of its cars in that age',
       'interval: gamma limits of Fay and Feuer, never above 100 %',
@@ -79,7 +79,7 @@ export const rotDefinitions: readonly Definition[] = [
     id: 'network-reference',
     title: 'Network, as a reference',
     means:
-      'The same share over the whole network, or, where fewer than 5 other branches stand behind that, over all cars shown. It never tells of a single branch.',
+      'The same share over the whole network, or, where fewer than 5 other branches stand behind that, over all the branches you see. It never tells of a single branch.',
     source: OWN,
   },
 ];

@@ -48,7 +48,7 @@ export function answerProducts(
 }
 
 function firstSentence(
-  { ratioToNorm, lower, upper, cars, costPerCarCents }: ProductsAnswer['overall'],
+  { ratioToNorm, lower, upper, cars, costedCars, costPerCarCents }: ProductsAnswer['overall'],
   words: ProductWords,
 ): AnswerPart[] {
   const behind = [intervalText(lower, upper), formatCars(cars)].filter(Boolean).join(', ');
@@ -56,11 +56,16 @@ function firstSentence(
     costPerCarCents === null
       ? ''
       : `, ${formatExactMoney(costPerCarCents, words.currency)} of product a car`;
+  // Cars without a norm cost something too, and some cost is not known: then it is of other cars than the ratio.
+  const costed =
+    cost !== '' && costedCars !== cars ? [{ quiet: ` (${formatCars(costedCars)})` }] : [];
   return [
     { figure: formatShare(ratioToNorm ?? 0) },
     ' of the norm went in ',
     { quiet: `(${behind})` },
-    `${cost}.`,
+    cost,
+    ...costed,
+    '.',
   ];
 }
 

@@ -74,7 +74,7 @@ export function regionColumns(
     { key: 'range', label: '95\u202f%', kind: 'number', text: rangeText },
     {
       key: 'reference',
-      label: reference === 'network' ? 'Network' : 'All shown',
+      label: reference === 'network' ? 'Network' : 'All you see',
       kind: 'number',
       text: ({ reference: share }) => (share === null ? '' : formatShare(share)),
     },

@@ -59,7 +59,7 @@ describe('regionPicture', () => {
 
   it('reference is the scope: called so', () => {
     expect(regionPicture(rotAnswer({ reference: 'scope' }), '10-14', words).referenceWord).toBe(
-      'all cars shown',
+      'all branches you see',
     );
   });
 });

@@ -23,7 +23,7 @@ export function regionPicture(answer: RotAnswer, age: AgeBand, words: RotWords):
     rows: ages.map((band) => ({ key: band, label: ageLabel(band), chosen: band === age })),
     panels: regionsWithCars(answer).map((region) => panelOf(answer, region, ages, words)),
     references: ages.map((band) => bandOf(answer, band).referenceShare),
-    referenceWord: answer.reference === 'network' ? 'network' : 'all cars shown',
+    referenceWord: answer.reference === 'network' ? 'network' : 'all branches you see',
   };
 }
 
@@ -31,7 +31,7 @@ export function regionPicture(answer: RotAnswer, age: AgeBand, words: RotWords):
 export function regionNote({ reference }: RotAnswer): string {
   return reference === 'network'
     ? 'Adjusted: each region as if its cars had the network’s ages'
-    : 'Adjusted: each region as if its cars had the ages of all cars shown, too few other branches being behind a figure of the network';
+    : 'Adjusted: each region as if its cars had the ages of all the branches you see, too few other branches being behind a figure of the network';
 }
 
 /**
