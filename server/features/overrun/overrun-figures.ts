@@ -1,10 +1,8 @@
 import type { MinuteLists } from '#db/queries/overrun';
 import type { OverrunGroup } from '#shared/contracts/overrun';
+import { FEWEST_CARS } from '#shared/domain/small-samples';
 import { ascending, quantile } from '#shared/stats/quantile';
 import { ratioEstimate } from '#shared/stats/ratio-estimate';
-
-/** Cars below which no ratio, quantile or allowance is told (rule 13). */
-const FEWEST_CARS = 5;
 
 /**
  * The overrun of some estimated cars. The ratio is of sums over all of them, its error the ratio estimator's (rule 26);

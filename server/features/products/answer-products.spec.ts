@@ -27,7 +27,14 @@ describe('answerProducts', () => {
     const answer = ask('2020-02-01', '2020-03-01', []);
     expect(answer).toMatchObject({ jobs: 0, withoutCost: 0, use: [], branches: [] });
     expect(answer.overall).toEqual({
-      ...{ cars: 0, costedCars: 0, ratioToNorm: null, lower: null, upper: null, costPerCarCents: null },
+      ...{
+        cars: 0,
+        costedCars: 0,
+        ratioToNorm: null,
+        lower: null,
+        upper: null,
+        costPerCarCents: null,
+      },
     });
     expect(answer.temperature).toEqual([]);
   });

@@ -1,6 +1,6 @@
 import type { NormedCars } from '#db/queries/products';
+import { FEWEST_CARS } from '#shared/domain/small-samples';
 import { ratioEstimate } from '#shared/stats/ratio-estimate';
-import { FEWEST_CARS } from './use-figures';
 
 /** Product used against the norm over some cars that have one. */
 export interface NormRatio {

@@ -1,7 +1,7 @@
 import type { BranchCell, CellSums } from '#db/queries/product-need';
 import type { NormEntry } from '#db/queries/products';
+import { FEWEST_CARS } from '#shared/domain/small-samples';
 import type { BodyType } from '#shared/domain/vocabulary';
-import { FEWEST_CARS } from './use-figures';
 
 /** What a car takes of one product. */
 export interface UseACar {

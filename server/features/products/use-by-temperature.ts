@@ -1,8 +1,8 @@
 import type { ProductLines } from '#db/queries/products';
 import type { ProductTemperature } from '#shared/contracts/products';
+import { FEWEST_CARS } from '#shared/domain/small-samples';
 import { ascending, quantile } from '#shared/stats/quantile';
 import { theilSenInterval } from '#shared/stats/theil-sen-interval';
-import { FEWEST_CARS } from './use-figures';
 
 /** Degrees of one class of the picture. */
 const CLASS_C = 5;

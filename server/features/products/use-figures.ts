@@ -1,10 +1,8 @@
 import type { ProductUse } from '#shared/contracts/products';
 import { roundHalfUp } from '#shared/domain/money';
+import { FEWEST_CARS } from '#shared/domain/small-samples';
 import { compensatedSum } from '#shared/stats/compensated-sum';
 import { ascending, quantile } from '#shared/stats/quantile';
-
-/** Cars below which no mean, quantile or share is told (rule 13). */
-export const FEWEST_CARS = 5;
 
 /** What went into the cars of one product, package and body type. */
 export interface UsedProduct {

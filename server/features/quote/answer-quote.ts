@@ -8,8 +8,8 @@ import { addMonths, ageBand, ageInYears } from '#shared/domain/calendar';
 import { roundHalfUp } from '#shared/domain/money';
 import type { QuoteMinutes } from '#shared/domain/quote-minutes';
 import { modelKey } from '#shared/domain/recorded-job';
+import { shareOf } from '#shared/domain/small-samples';
 import { AGE_BANDS, STAGES, type BodyType } from '#shared/domain/vocabulary';
-import { wilsonInterval } from '#shared/stats/wilson-interval';
 import { nearestSet, type NearestSet } from './nearest-set';
 import { quoteCosts } from './quote-costs';
 import { quotePriceOf, type WantedMargin } from './quote-price-of';
@@ -28,8 +28,6 @@ export interface QuoteQuestion {
 
 /** How far back the cars of a set go, in months (rule 48). */
 const MONTHS = 36;
-/** Cars (findings for what opened up) below which no share is told (rule 13). */
-const FEWEST = 5;
 
 /** A quote from the nearest set of cars; without a branch in scope it is made from none. One snapshot of the database. */
 export function answerQuote(
@@ -111,17 +109,5 @@ function wholeMinutes(minutes: QuoteMinutes | undefined): {
   return {
     p50Minutes: minutes ? roundHalfUp(minutes.p50Halves, 2) : null,
     p80Minutes: minutes ? roundHalfUp(minutes.p80Fifths, 5) : null,
-  };
-}
-
-function shareOf(
-  some: number,
-  all: number,
-): { share: number | null; lower: number | null; upper: number | null } {
-  const interval = all >= FEWEST ? wilsonInterval(some, all) : undefined;
-  return {
-    share: interval?.estimate ?? null,
-    lower: interval?.lower ?? null,
-    upper: interval?.upper ?? null,
   };
 }

@@ -1,8 +1,8 @@
 import type { NetworkReference } from '#db/network-reference';
 import type { JobFilters } from '#db/queries/job-filters';
 import type { RotAnswer } from '#shared/contracts/rot';
+import { shareOf } from '#shared/domain/small-samples';
 import { AGE_BANDS } from '#shared/domain/vocabulary';
-import { shareOf } from './count-shares';
 
 /** What regions are compared with: an age mix, and the share with rot of each band. */
 export interface AgeReference {

@@ -1,9 +1,9 @@
 import type { Spelling } from '#db/queries/rot';
 import type { RotModel } from '#shared/contracts/rot';
+import { shareOf } from '#shared/domain/small-samples';
 import { AGE_BANDS } from '#shared/domain/vocabulary';
 import { fitBetaBinomial, shrunkShare } from '#shared/stats/beta-binomial';
 import { wilsonInterval } from '#shared/stats/wilson-interval';
-import { shareOf } from './count-shares';
 import { sumOf, type ModelTally } from './tally-cars';
 
 /**

@@ -1,9 +1,10 @@
 import type { Climate } from '#db/queries/rot';
 import type { RotRegion } from '#shared/contracts/rot';
+import { FEWEST_CARS } from '#shared/domain/small-samples';
 import { AGE_BANDS, type AgeBand } from '#shared/domain/vocabulary';
 import { directlyStandardised } from '#shared/stats/direct-standardisation';
 import { corrosionRate } from '#shared/stats/iso-corrosivity';
-import { countedShare, FEWEST_CARS } from './count-shares';
+import { countedShare } from './count-shares';
 import { sumOf, type ByBand } from './tally-cars';
 
 /** A region's rot as it is and adjusted for age, beside how corrosive its air is. `reference` is cars a band. */

@@ -1,8 +1,9 @@
 import type { RotZone } from '#shared/contracts/rot';
 import { placesOf } from '#shared/domain/rot-places';
+import { shareOf } from '#shared/domain/small-samples';
 import { AGE_BANDS, ZONES, type Side, type Zone } from '#shared/domain/vocabulary';
 import { sidesToTell } from '#shared/domain/zone-sides';
-import { countedShare, shareOf } from './count-shares';
+import { countedShare } from './count-shares';
 
 /**
  * Every zone for every age band that has cars, with its sides. A car counts once in a zone and once in each of its sides,
