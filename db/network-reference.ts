@@ -4,14 +4,13 @@ import { whereJobs, type JobFilters } from './queries/job-filters';
 import type { QuotedCar, QuoteFigures, QuoteRung } from './queries/quote';
 import { nearestNetworkSet } from './quote-reference';
 import type { Scope } from './scope';
+import { VISIBLE } from './visible-rows';
 
 /** Branches besides the caller's own that must stand behind a network figure before the caller may see it (rule 21). */
 export const FEWEST_OTHERS = 5;
 
 /** The visible facts of every branch, under the name that filters know; branch by branch, so that a period is found within each. */
-const EVERY_FACT = `(select * from job_facts where branch_id in (select id from branches)
-  and gen_from <= (select generation from network)
-  and gen_to > (select generation from network)) as job_facts`;
+const EVERY_FACT = `(select * from job_facts where branch_id in (select id from branches) and ${VISIBLE}) as job_facts`;
 
 /** Cars of an age band over the network, summed. */
 export interface ReferenceBand {

@@ -7,9 +7,8 @@ import {
   type QuoteRung,
   type QuoteSource,
 } from './queries/quote';
+import { VISIBLE } from './visible-rows';
 
-const VISIBLE =
-  'gen_from <= (select generation from network) and gen_to > (select generation from network)';
 /** Branch by branch, so that the days asked for are found within each. */
 const EVERY_FACT = `(select * from job_facts where branch_id in (select id from branches) and ${VISIBLE}) as job_facts`;
 const EVERY_PRODUCT = `(select * from job_products where ${VISIBLE}) as job_products`;

@@ -3,10 +3,9 @@ import { assertScoped } from './assert-scoped';
 import { sql, type Connection, type Query } from './database';
 import type { Scope } from './scope';
 import { GENERATION_TABLES, SCOPED_TABLES, type ScopedTable } from './tables';
+import { VISIBLE } from './visible-rows';
 
 const IN_SCOPE = 'in (select value from json_each(?))';
-const VISIBLE =
-  'gen_from <= (select generation from network) and gen_to > (select generation from network)';
 
 /** Statements that have been found to keep to a scope, whichever it is. */
 const passed = new Set<string>();
