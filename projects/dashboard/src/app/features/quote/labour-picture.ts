@@ -12,7 +12,9 @@ export interface LabourRow {
   readonly p80: number | null;
 }
 
-const HOURS = [0, 1, 2, 4, 6, 8, 10, 12, 16, 20, 30, 40];
+/** Steps of an axis of hours, as a clock divides. */
+const STEPS = [0.5, 1, 2, 4, 8, 16, 40];
+const MOST_MARKS = 7;
 
 /** Labour by stage as a picture and as rows; the whole last, because the stages do not add up to it. */
 export function labourPicture({ labour }: Pick<QuoteAnswer, 'labour'>): {
@@ -36,7 +38,7 @@ export function labourPicture({ labour }: Pick<QuoteAnswer, 'labour'>): {
       summary: `Labour, half of the cars and four of five: ${rows
         .map((row) => `${row.label} ${rangeWords(row)}`)
         .join('; ')}.`,
-      marks: HOURS.map((hours) => ({ value: hours * 60, text: hours === 0 ? '0' : `${hours} h` })),
+      marks: hourMarks(Math.max(0, ...rows.map(({ p80 }) => p80 ?? 0))),
       rows: rows.map((row) => ({
         key: row.key,
         label: row.label,
@@ -47,6 +49,16 @@ export function labourPicture({ labour }: Pick<QuoteAnswer, 'labour'>): {
       })),
     },
   };
+}
+
+/** Even marks from 0 to past the longest labour, few enough to read. */
+function hourMarks(minutes: number): { value: number; text: string }[] {
+  const step = STEPS.find((hours) => minutes / (hours * 60) < MOST_MARKS) ?? 80;
+  const count = Math.ceil(minutes / (step * 60)) + 1;
+  return Array.from({ length: count }, (_, index) => ({
+    value: index * step * 60,
+    text: index === 0 ? '0' : formatMinutes(index * step * 60),
+  }));
 }
 
 function rangeWords({ p50, p80 }: LabourRow): string {
