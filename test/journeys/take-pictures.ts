@@ -20,9 +20,24 @@ const MOST_BYTES = 300_000;
 const WEEK = '/this-week?week=2025-W45';
 
 const PICTURES = [
-  { name: 'this-week', path: WEEK, size: LAPTOP, colorScheme: 'light' },
-  { name: 'overruns', path: '/overruns', size: LAPTOP, colorScheme: 'light' },
-  { name: 'this-week-phone-dark', path: WEEK, size: PHONE, colorScheme: 'dark' },
+  { name: 'this-week', path: WEEK, as: 'site_manager', size: LAPTOP, colorScheme: 'light' },
+  { name: 'overruns', path: '/overruns', as: 'site_manager', size: LAPTOP, colorScheme: 'light' },
+  { name: 'rot', path: '/rot?age=15-19', as: 'head_office', size: LAPTOP, colorScheme: 'light' },
+  { name: 'product', path: '/product', as: 'site_manager', size: LAPTOP, colorScheme: 'dark' },
+  {
+    name: 'come-backs-phone',
+    path: '/come-backs',
+    as: 'site_manager',
+    size: PHONE,
+    colorScheme: 'light',
+  },
+  {
+    name: 'this-week-phone-dark',
+    path: WEEK,
+    as: 'site_manager',
+    size: PHONE,
+    colorScheme: 'dark',
+  },
 ] as const;
 
 async function takePictures(): Promise<void> {
@@ -41,10 +56,10 @@ async function takePictures(): Promise<void> {
 async function take(
   browser: Browser,
   url: string,
-  { name, path: address, size, colorScheme }: (typeof PICTURES)[number],
+  { name, path: address, as, size, colorScheme }: (typeof PICTURES)[number],
 ): Promise<void> {
   const { context, page } = await openWindow(browser, url, { viewport: size, colorScheme });
-  await signIn(page, 'site_manager');
+  await signIn(page, as);
   await page.goto(address);
   await untilReady(page);
   await untilStill(page);
