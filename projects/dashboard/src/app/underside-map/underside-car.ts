@@ -9,6 +9,7 @@ import {
   output,
   signal,
 } from '@angular/core';
+import { Hatch } from '../charts/pieces/hatch';
 import * as lines from './geometry/car-lines';
 import { CAR, type Point } from './geometry/outline';
 import { shapesOf, USUAL_PLACES } from './geometry/place-shapes';
@@ -32,7 +33,6 @@ export interface Touch {
 }
 
 const BLANKS = USUAL_PLACES.flatMap(({ zone, side }) => shapesOf(zone, side));
-let cars = 0;
 
 /**
  * The drawing itself: a car seen from below and places on it. Places are a plain picture, a list to read with the arrow keys, or
@@ -40,7 +40,7 @@ let cars = 0;
  */
 @Component({
   selector: 'us-underside-car',
-  imports: [NgTemplateOutlet],
+  imports: [Hatch, NgTemplateOutlet],
   templateUrl: './underside-car.html',
   styleUrl: './underside-car.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -66,7 +66,6 @@ export class UndersideCar {
   protected readonly car = CAR;
   protected readonly lines = lines;
   protected readonly blanks = BLANKS;
-  protected readonly hatch = `us-hatch-underside-${++cars}`;
   /** Hatching keeps its size on screen whatever the size of the car; the small car's is finer. */
   protected readonly hatching = computed(() => {
     const pixel = CAR.width / this.width();

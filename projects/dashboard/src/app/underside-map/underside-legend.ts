@@ -1,13 +1,13 @@
 import { ChangeDetectionStrategy, Component, input } from '@angular/core';
+import { Hatch } from '../charts/pieces/hatch';
 import { formatNumber } from '../ui/format';
 import { TOO_FEW } from './place-words';
 import { CLASS_BOUNDS } from './share-scale';
 
-let legends = 0;
-
 /** The scale of shares with its numbers, and the hatching for too few cars. */
 @Component({
   selector: 'us-underside-legend',
+  imports: [Hatch],
   template: `
     <svg aria-hidden="true" height="34" [attr.width]="6 * step() + 4">
       @for (bound of bounds; track bound) {
@@ -26,25 +26,8 @@ let legends = 0;
     <span class="words">% of cars; each step doubles</span>
     <span class="few-words">
       <svg aria-hidden="true" width="41" height="14">
-        <defs>
-          <pattern
-            [id]="hatch"
-            width="7"
-            height="7"
-            patternUnits="userSpaceOnUse"
-            patternTransform="rotate(45)"
-          >
-            <rect class="hatch" width="2.4" height="7" />
-          </pattern>
-        </defs>
-        <rect
-          class="swatch"
-          x=".5"
-          y="1"
-          width="40"
-          height="12"
-          [style.fill]="'url(#' + hatch + ')'"
-        />
+        <defs><pattern us-hatch #hatch="usHatch" /></defs>
+        <rect class="swatch" x=".5" y="1" width="40" height="12" [style.fill]="hatch.fill" />
       </svg>
       {{ tooFew }}
     </span>
@@ -60,5 +43,4 @@ export class UndersideLegend {
     formatNumber(bound * 100, Number.isInteger(bound * 100) ? 0 : 1),
   );
   protected readonly tooFew = TOO_FEW;
-  protected readonly hatch = `us-hatch-legend-${++legends}`;
 }

@@ -1,5 +1,6 @@
 import { TestBed, type ComponentFixture } from '@angular/core/testing';
 import { provideRouter } from '@angular/router';
+import { draw } from '../testing/draw';
 import type { UndersideArea } from './underside-input';
 import { UndersideMap } from './underside-map';
 
@@ -18,17 +19,11 @@ const areas: readonly UndersideArea[] = [
   { zone: 'jacking_point', side: 'right', share: null, cars: 4 },
 ];
 
-async function draw(width: number): Promise<ComponentFixture<UndersideMap>> {
-  jest
-    .spyOn(HTMLElement.prototype, 'getBoundingClientRect')
-    .mockReturnValue({ width, height: 0 } as DOMRect);
+async function drawMap(width: number): Promise<ComponentFixture<UndersideMap>> {
   TestBed.configureTestingModule({ providers: [provideRouter([])] });
-  const fixture = TestBed.createComponent(UndersideMap);
-  fixture.componentRef.setInput('areas', areas);
-  fixture.componentRef.setInput('heading', 'Where the rot was');
-  fixture.componentRef.setInput('finding', 'Most often in the outer sill, left: 24 %.');
-  await fixture.whenStable();
-  return fixture;
+  const heading = 'Where the rot was';
+  const finding = 'Most often in the outer sill, left: 24 %.';
+  return (await draw(UndersideMap, { areas, heading, finding }, width)).fixture;
 }
 
 function press(on: Element, key: string): void {
@@ -36,10 +31,8 @@ function press(on: Element, key: string): void {
 }
 
 describe('UndersideMap', () => {
-  afterEach(() => jest.restoreAllMocks());
-
   it('drawn, given shares, shades each place by its class and says its finding in words', async () => {
-    const host = (await draw(906)).nativeElement as HTMLElement;
+    const host = (await drawMap(906)).nativeElement as HTMLElement;
     expect(host.querySelector('figcaption')?.textContent).toContain('24 %');
     expect(host.querySelectorAll('[data-key="sill_outer/left"] path.step-4')).toHaveLength(1);
     expect(host.querySelectorAll('[data-key="tailgate/centre"] path.step-0')).toHaveLength(1);
@@ -48,7 +41,7 @@ describe('UndersideMap', () => {
   });
 
   it('drawn, given too few cars, hatches every shape of the place and says the words, without a class', async () => {
-    const host = (await draw(906)).nativeElement as HTMLElement;
+    const host = (await drawMap(906)).nativeElement as HTMLElement;
     const points = [
       ...host.querySelectorAll<SVGPathElement>('[data-key="jacking_point/right"] path'),
     ];
@@ -64,7 +57,7 @@ describe('UndersideMap', () => {
   });
 
   it('by keyboard, given arrow keys and Enter, tells the place and hands it over', async () => {
-    const fixture = await draw(906);
+    const fixture = await drawMap(906);
     const host = fixture.nativeElement as HTMLElement;
     const chosen: UndersideArea[] = [];
     fixture.componentInstance.chosen.subscribe((area) => chosen.push(area));
@@ -88,7 +81,7 @@ describe('UndersideMap', () => {
   });
 
   it('on a phone, given no room for labels, lists the highest shares below the map', async () => {
-    const host = (await draw(296)).nativeElement as HTMLElement;
+    const host = (await drawMap(296)).nativeElement as HTMLElement;
     expect(host.querySelector('.labels')?.textContent).not.toContain('%');
     const rows = [...host.querySelectorAll('.highest li')].map((row) => row.textContent);
     expect(rows[0]).toMatch(/sill, outer, left.*24/);
@@ -96,7 +89,7 @@ describe('UndersideMap', () => {
   });
 
   it('as a table, given the same areas, has a row for each with its cars and interval', async () => {
-    const fixture = await draw(906);
+    const fixture = await drawMap(906);
     const host = fixture.nativeElement as HTMLElement;
     host.querySelector<HTMLButtonElement>('button.us-action')!.click();
     await fixture.whenStable();

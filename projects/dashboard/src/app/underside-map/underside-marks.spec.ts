@@ -1,4 +1,4 @@
-import { TestBed } from '@angular/core/testing';
+import { draw } from '../testing/draw';
 import type { UndersideFinding } from './underside-input';
 import { UndersideMarks } from './underside-marks';
 
@@ -22,22 +22,13 @@ const findings: readonly UndersideFinding[] = [
   },
 ];
 
-async function draw(list: 'beside' | 'none'): Promise<HTMLElement> {
-  jest
-    .spyOn(HTMLElement.prototype, 'getBoundingClientRect')
-    .mockReturnValue({ width: 1000, height: 0 } as DOMRect);
-  const fixture = TestBed.createComponent(UndersideMarks);
-  fixture.componentRef.setInput('findings', findings);
-  fixture.componentRef.setInput('list', list);
-  await fixture.whenStable();
-  return fixture.nativeElement as HTMLElement;
+async function drawMarks(list: 'beside' | 'none'): Promise<HTMLElement> {
+  return (await draw(UndersideMarks, { findings, list }, 1000)).host;
 }
 
 describe('UndersideMarks', () => {
-  afterEach(() => jest.restoreAllMocks());
-
   it('drawn, given two findings, numbers them on the car and in words, the danger with its word', async () => {
-    const host = await draw('beside');
+    const host = await drawMarks('beside');
     const numbers = [...host.querySelectorAll('us-underside-marks-layer text')];
     expect(numbers.map((number) => number.textContent?.trim())).toEqual(['1', '2']);
     expect(host.querySelectorAll('us-underside-marks-layer .danger')).toHaveLength(1);
@@ -51,7 +42,7 @@ describe('UndersideMarks', () => {
   });
 
   it('drawn, given a page with a list of its own, shows the car alone', async () => {
-    const host = await draw('none');
+    const host = await drawMarks('none');
     expect(host.querySelector('ol')).toBeNull();
     expect(host.querySelectorAll('us-underside-marks-layer text')).toHaveLength(2);
   });

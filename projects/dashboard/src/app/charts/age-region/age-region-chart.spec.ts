@@ -1,4 +1,4 @@
-import { TestBed } from '@angular/core/testing';
+import { draw } from '../../testing/draw';
 import { AgeRegionChart } from './age-region-chart';
 import type { AgeRegionInput } from './age-region-input';
 
@@ -27,16 +27,8 @@ const data: AgeRegionInput = {
 };
 
 describe('AgeRegionChart', () => {
-  afterEach(() => jest.restoreAllMocks());
-
   it('drawn: dot, interval and reference of the chosen age, hatching and words for too few, all words beside', async () => {
-    jest
-      .spyOn(HTMLElement.prototype, 'getBoundingClientRect')
-      .mockReturnValue({ width: 600, height: 0 } as DOMRect);
-    const fixture = TestBed.createComponent(AgeRegionChart);
-    fixture.componentRef.setInput('data', data);
-    await fixture.whenStable();
-    const host = fixture.nativeElement as HTMLElement;
+    const { host } = await draw(AgeRegionChart, { data }, 600);
     const picture = host.querySelector('[role=img]')!;
     expect(picture.getAttribute('aria-label')).toBe(data.summary);
     const [chosen, few] = [...picture.querySelectorAll('g')];

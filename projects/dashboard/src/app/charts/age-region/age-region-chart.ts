@@ -1,14 +1,16 @@
-import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
-import { measuredWidth } from '../measured-width';
+import { ChangeDetectionStrategy, Component, input } from '@angular/core';
+import { laidOut } from '../laid-out';
+import { Hatch } from '../pieces/hatch';
+import { Picture } from '../pieces/picture';
+import { TooFew } from '../pieces/too-few';
 import { hatchWords, textWidth } from '../text-width';
 import type { AgeRegionInput } from './age-region-input';
 import { layOutAgeRegion } from './age-region-layout';
 
-let charts = 0;
-
 /** Shares of cars by age, a small picture a region: dot and 95 % interval against a reference, too few cars hatched. */
 @Component({
   selector: 'us-age-region-chart',
+  imports: [Hatch, Picture, TooFew],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './age-region-chart.html',
   styleUrl: './age-region-chart.scss',
@@ -17,11 +19,7 @@ let charts = 0;
 export class AgeRegionChart {
   readonly data = input.required<AgeRegionInput>();
 
-  private readonly width = measuredWidth();
-  protected readonly hatch = `us-hatch-age-region-${++charts}`;
-  protected readonly picture = computed(() =>
-    this.width() > 0 ? layOutAgeRegion(this.data(), this.width()) : undefined,
-  );
+  protected readonly picture = laidOut(this.data, layOutAgeRegion);
   protected readonly words = 'too few';
   protected readonly wordsWidth = hatchWords(this.words);
 

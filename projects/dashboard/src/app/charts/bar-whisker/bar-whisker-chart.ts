@@ -1,11 +1,14 @@
-import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
-import { measuredWidth } from '../measured-width';
+import { ChangeDetectionStrategy, Component, input } from '@angular/core';
+import { laidOut } from '../laid-out';
+import { Picture } from '../pieces/picture';
+import { ValueMarks } from '../pieces/value-marks';
 import type { BarWhiskerInput } from './bar-whisker-input';
 import { layOutBarWhisker } from './bar-whisker-layout';
 
 /** Bars from 0, each with a whisker on to a further value. */
 @Component({
   selector: 'us-bar-whisker-chart',
+  imports: [Picture, ValueMarks],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './bar-whisker-chart.html',
   styleUrl: './bar-whisker-chart.scss',
@@ -14,8 +17,5 @@ import { layOutBarWhisker } from './bar-whisker-layout';
 export class BarWhiskerChart {
   readonly data = input.required<BarWhiskerInput>();
 
-  private readonly width = measuredWidth();
-  protected readonly picture = computed(() =>
-    this.width() > 0 ? layOutBarWhisker(this.data(), this.width()) : undefined,
-  );
+  protected readonly picture = laidOut(this.data, layOutBarWhisker);
 }

@@ -1,4 +1,5 @@
 import { TestBed } from '@angular/core/testing';
+import { draw } from '../../testing/draw';
 import { BridgeChart } from './bridge-chart';
 import type { BridgeInput } from './bridge-input';
 
@@ -45,16 +46,8 @@ const data: BridgeInput = {
 };
 
 describe('BridgeChart', () => {
-  afterEach(() => jest.restoreAllMocks());
-
   it('drawn: text alternative, words and amounts as text, bars by role, the named step in 600', async () => {
-    jest
-      .spyOn(HTMLElement.prototype, 'getBoundingClientRect')
-      .mockReturnValue({ width: 412, height: 0 } as DOMRect);
-    const fixture = TestBed.createComponent(BridgeChart);
-    fixture.componentRef.setInput('data', data);
-    await fixture.whenStable();
-    const host = fixture.nativeElement as HTMLElement;
+    const { host } = await draw(BridgeChart, { data }, 412);
     expect(host.querySelector('[role=img]')?.getAttribute('aria-label')).toBe(data.summary);
     const texts = [...host.querySelectorAll('text')].map((text) => text.textContent.trim());
     expect(texts).toEqual([

@@ -1,11 +1,13 @@
-import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
-import { measuredWidth } from '../measured-width';
+import { ChangeDetectionStrategy, Component, input } from '@angular/core';
+import { laidOut } from '../laid-out';
+import { Picture } from '../pieces/picture';
 import type { BridgeInput } from './bridge-input';
 import { layOutBridge } from './bridge-layout';
 
 /** A bridge (waterfall): one row a step, from a first total to a last one. */
 @Component({
   selector: 'us-bridge-chart',
+  imports: [Picture],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './bridge-chart.html',
   styleUrl: './bridge-chart.scss',
@@ -14,8 +16,5 @@ import { layOutBridge } from './bridge-layout';
 export class BridgeChart {
   readonly data = input.required<BridgeInput>();
 
-  private readonly width = measuredWidth();
-  protected readonly picture = computed(() =>
-    this.width() > 0 ? layOutBridge(this.data(), this.width()) : undefined,
-  );
+  protected readonly picture = laidOut(this.data, layOutBridge);
 }

@@ -1,4 +1,4 @@
-import { TestBed } from '@angular/core/testing';
+import { draw } from '../../testing/draw';
 import { DotIntervalChart } from './dot-interval-chart';
 import type { DotIntervalInput } from './dot-interval-input';
 
@@ -48,18 +48,10 @@ const data: DotIntervalInput = {
 };
 
 describe('DotIntervalChart', () => {
-  afterEach(() => jest.restoreAllMocks());
-
   it('drawn: a miss has a triangle and its word, a hit a dot, too few cars hatching with count and words', async () => {
-    jest
-      .spyOn(HTMLElement.prototype, 'getBoundingClientRect')
-      .mockReturnValue({ width: 600, height: 0 } as DOMRect);
-    const fixture = TestBed.createComponent(DotIntervalChart);
-    fixture.componentRef.setInput('data', data);
-    await fixture.whenStable();
-    const host = fixture.nativeElement as HTMLElement;
+    const { host } = await draw(DotIntervalChart, { data }, 600);
     expect(host.querySelector('[role=img]')?.getAttribute('aria-label')).toBe(data.summary);
-    const [miss, hit, few] = [...host.querySelectorAll('g')];
+    const [miss, hit, few] = [...host.querySelectorAll('g:not([us-value-marks])')];
     expect(miss!.querySelector('path.miss')).not.toBeNull();
     expect(miss!.textContent).toContain('+40 % above');
     expect(hit!.querySelector('circle.dot.chosen')).not.toBeNull();

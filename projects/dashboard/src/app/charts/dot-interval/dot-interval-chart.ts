@@ -1,14 +1,16 @@
-import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
-import { measuredWidth } from '../measured-width';
-import { hatchWords } from '../text-width';
+import { ChangeDetectionStrategy, Component, input } from '@angular/core';
+import { laidOut } from '../laid-out';
+import { Hatch } from '../pieces/hatch';
+import { Picture } from '../pieces/picture';
+import { TooFew } from '../pieces/too-few';
+import { ValueMarks } from '../pieces/value-marks';
 import type { DotIntervalInput } from './dot-interval-input';
 import { layOutDotInterval, type PlacedInterval } from './dot-interval-layout';
-
-let charts = 0;
 
 /** Groups as dots with 95 % intervals about a reference; groups with too few cars are hatched. */
 @Component({
   selector: 'us-dot-interval-chart',
+  imports: [Hatch, Picture, TooFew, ValueMarks],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './dot-interval-chart.html',
   styleUrl: './dot-interval-chart.scss',
@@ -17,12 +19,7 @@ let charts = 0;
 export class DotIntervalChart {
   readonly data = input.required<DotIntervalInput>();
 
-  private readonly width = measuredWidth();
-  protected readonly hatch = `us-hatch-interval-${++charts}`;
-  protected readonly picture = computed(() =>
-    this.width() > 0 ? layOutDotInterval(this.data(), this.width()) : undefined,
-  );
-  protected readonly hatchWords = hatchWords;
+  protected readonly picture = laidOut(this.data, layOutDotInterval);
   protected readonly min = Math.min;
   protected readonly max = Math.max;
 

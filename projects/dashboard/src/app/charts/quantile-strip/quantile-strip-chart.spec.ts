@@ -1,4 +1,4 @@
-import { TestBed } from '@angular/core/testing';
+import { draw } from '../../testing/draw';
 import { QuantileStripChart } from './quantile-strip-chart';
 import type { QuantileStripInput } from './quantile-strip-input';
 
@@ -32,18 +32,10 @@ const data: QuantileStripInput = {
 };
 
 describe('QuantileStripChart', () => {
-  afterEach(() => jest.restoreAllMocks());
-
   it('drawn: a strip with its figure, too few cars as hatching with the words', async () => {
-    jest
-      .spyOn(HTMLElement.prototype, 'getBoundingClientRect')
-      .mockReturnValue({ width: 600, height: 0 } as DOMRect);
-    const fixture = TestBed.createComponent(QuantileStripChart);
-    fixture.componentRef.setInput('data', data);
-    await fixture.whenStable();
-    const host = fixture.nativeElement as HTMLElement;
+    const { host } = await draw(QuantileStripChart, { data }, 600);
     expect(host.querySelector('[role=img]')?.getAttribute('aria-label')).toBe(data.summary);
-    const [full, few] = [...host.querySelectorAll('g')];
+    const [full, few] = [...host.querySelectorAll('g:not([us-value-marks])')];
     expect(full!.querySelector('rect.most')).not.toBeNull();
     expect(full!.textContent).toContain('+40 %');
     expect(few!.querySelector('rect.most')).toBeNull();

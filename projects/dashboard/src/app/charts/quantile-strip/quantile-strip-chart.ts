@@ -1,14 +1,16 @@
-import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
-import { measuredWidth } from '../measured-width';
-import { hatchWords } from '../text-width';
+import { ChangeDetectionStrategy, Component, input } from '@angular/core';
+import { laidOut } from '../laid-out';
+import { Hatch } from '../pieces/hatch';
+import { Picture } from '../pieces/picture';
+import { TooFew } from '../pieces/too-few';
+import { ValueMarks } from '../pieces/value-marks';
 import type { QuantileStripInput } from './quantile-strip-input';
 import { layOutQuantileStrip } from './quantile-strip-layout';
-
-let charts = 0;
 
 /** Spread by group as a strip: a thick part from half of the cars to 8 of 10, a thin one on to 19 of 20. */
 @Component({
   selector: 'us-quantile-strip-chart',
+  imports: [Hatch, Picture, TooFew, ValueMarks],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './quantile-strip-chart.html',
   styleUrl: './quantile-strip-chart.scss',
@@ -17,10 +19,5 @@ let charts = 0;
 export class QuantileStripChart {
   readonly data = input.required<QuantileStripInput>();
 
-  private readonly width = measuredWidth();
-  protected readonly hatch = `us-hatch-strip-${++charts}`;
-  protected readonly picture = computed(() =>
-    this.width() > 0 ? layOutQuantileStrip(this.data(), this.width()) : undefined,
-  );
-  protected readonly hatchWords = hatchWords;
+  protected readonly picture = laidOut(this.data, layOutQuantileStrip);
 }

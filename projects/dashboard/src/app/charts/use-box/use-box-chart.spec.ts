@@ -1,4 +1,4 @@
-import { TestBed } from '@angular/core/testing';
+import { draw } from '../../testing/draw';
 import { UseBoxChart } from './use-box-chart';
 import type { UseBoxInput } from './use-box-input';
 
@@ -37,18 +37,10 @@ const data: UseBoxInput = {
 };
 
 describe('UseBoxChart', () => {
-  afterEach(() => jest.restoreAllMocks());
-
   it('drawn: box, norm and words of a row; too few cars as hatching with the words', async () => {
-    jest
-      .spyOn(HTMLElement.prototype, 'getBoundingClientRect')
-      .mockReturnValue({ width: 700, height: 0 } as DOMRect);
-    const fixture = TestBed.createComponent(UseBoxChart);
-    fixture.componentRef.setInput('data', data);
-    await fixture.whenStable();
-    const host = fixture.nativeElement as HTMLElement;
+    const { host } = await draw(UseBoxChart, { data }, 700);
     expect(host.querySelector('[role=img]')?.getAttribute('aria-label')).toBe(data.summary);
-    const [full, few] = [...host.querySelectorAll('g')];
+    const [full, few] = [...host.querySelectorAll('g:not([us-value-marks])')];
     expect(full!.querySelector('rect.half')).not.toBeNull();
     expect(full!.querySelector('line.norm')).not.toBeNull();
     expect(full!.querySelector('text.oxide')?.textContent).toContain('18 % under');

@@ -1,4 +1,4 @@
-import { TestBed } from '@angular/core/testing';
+import { draw } from '../../testing/draw';
 import { UseByTemperatureChart } from './use-by-temperature-chart';
 import type { UseByTemperatureInput } from './use-by-temperature-input';
 
@@ -12,18 +12,10 @@ const data: UseByTemperatureInput = {
 };
 
 describe('UseByTemperatureChart', () => {
-  afterEach(() => jest.restoreAllMocks());
-
   it('drawn: a bar with its median and cars, too few cars as hatching with their count', async () => {
-    jest
-      .spyOn(HTMLElement.prototype, 'getBoundingClientRect')
-      .mockReturnValue({ width: 400, height: 0 } as DOMRect);
-    const fixture = TestBed.createComponent(UseByTemperatureChart);
-    fixture.componentRef.setInput('data', data);
-    await fixture.whenStable();
-    const host = fixture.nativeElement as HTMLElement;
+    const { host } = await draw(UseByTemperatureChart, { data }, 400);
     expect(host.querySelector('[role=img]')?.getAttribute('aria-label')).toBe(data.summary);
-    const [few, many] = [...host.querySelectorAll('g')];
+    const [few, many] = [...host.querySelectorAll('g:not([us-height-ticks])')];
     expect(few!.querySelector('rect[fill^="url(#"]')).not.toBeNull();
     expect(few!.textContent).toContain('3');
     expect(many!.querySelector('rect.half')).not.toBeNull();

@@ -1,13 +1,15 @@
-import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
-import { measuredWidth } from '../measured-width';
+import { ChangeDetectionStrategy, Component, input } from '@angular/core';
+import { laidOut } from '../laid-out';
+import { Hatch } from '../pieces/hatch';
+import { HeightTicks } from '../pieces/height-ticks';
+import { Picture } from '../pieces/picture';
 import type { UseByTemperatureInput } from './use-by-temperature-input';
 import { layOutUseByTemperature, TEMPERATURE_HEIGHT } from './use-by-temperature-layout';
-
-let charts = 0;
 
 /** Product a car by workshop temperature: a bar for half of the cars of each class, a line at their median. */
 @Component({
   selector: 'us-use-by-temperature-chart',
+  imports: [Hatch, HeightTicks, Picture],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './use-by-temperature-chart.html',
   styleUrl: './use-by-temperature-chart.scss',
@@ -16,10 +18,6 @@ let charts = 0;
 export class UseByTemperatureChart {
   readonly data = input.required<UseByTemperatureInput>();
 
-  private readonly width = measuredWidth();
   protected readonly height = TEMPERATURE_HEIGHT;
-  protected readonly hatch = `us-hatch-temperature-${++charts}`;
-  protected readonly picture = computed(() =>
-    this.width() > 0 ? layOutUseByTemperature(this.data(), this.width()) : undefined,
-  );
+  protected readonly picture = laidOut(this.data, layOutUseByTemperature);
 }

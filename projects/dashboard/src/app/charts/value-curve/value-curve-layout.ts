@@ -10,7 +10,7 @@ export interface ValueCurveLayout {
   readonly right: number;
   readonly bottom: number;
   readonly xTicks: readonly { readonly at: number; readonly text: string }[];
-  readonly yTicks: readonly { readonly at: number; readonly text: string }[];
+  readonly yTicks: readonly { readonly y: number; readonly text: string }[];
   readonly path: string;
   readonly dots: readonly { readonly x: number; readonly y: number }[];
   readonly chosen: {
@@ -48,7 +48,7 @@ export function layOutValueCurve(input: ValueCurveInput, width: number): ValueCu
     ...{ width, left, right, bottom, dots },
     height: CURVE_HEIGHT,
     xTicks: x.ticks(5).map((value) => ({ at: x(value), text: xText(value) })),
-    yTicks: yTicks.map((value) => ({ at: y(value), text: yText(value) })),
+    yTicks: yTicks.map((value) => ({ y: y(value), text: yText(value) })),
     path: dots.map((dot, index) => `${index === 0 ? 'M' : 'L'}${dot.x} ${dot.y}`).join(''),
     chosen: chosen && placeChosen(chosen, x(chosen.x), y(chosen.y), left),
   };

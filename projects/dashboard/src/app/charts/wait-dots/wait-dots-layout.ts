@@ -31,6 +31,8 @@ export interface WaitDotsLayout {
   /** Whether each group's marks stand under its words. */
   readonly stacked: boolean;
   readonly marks: readonly PlacedMark[];
+  /** The height of each group's room, between which the lines of marks run. */
+  readonly guides: readonly { readonly from: number; readonly to: number }[];
   readonly rows: readonly PlacedWait[];
 }
 
@@ -89,6 +91,7 @@ export function layOutWaitDots(input: WaitDotsInput, width: number): WaitDotsLay
   }
   return {
     ...{ width, left, right, stacked, rows, marks: axis.marks },
+    guides: rows.map(({ top, base }) => ({ from: top, to: base })),
     height: y,
   };
 }

@@ -1,4 +1,4 @@
-import { TestBed } from '@angular/core/testing';
+import { draw } from '../../testing/draw';
 import type { MarginPoint, WeeklyMarginInput } from './weekly-margin-input';
 import { WeeklyMarginChart } from './weekly-margin-chart';
 
@@ -20,16 +20,10 @@ const input: WeeklyMarginInput = {
   chosen: '2026-W05',
 };
 
-async function draw(data: WeeklyMarginInput) {
-  jest
-    .spyOn(HTMLElement.prototype, 'getBoundingClientRect')
-    .mockReturnValue({ width: 640, height: 0 } as DOMRect);
-  const fixture = TestBed.createComponent(WeeklyMarginChart);
-  fixture.componentRef.setInput('data', data);
+async function drawWeeks(data: WeeklyMarginInput) {
+  const { fixture, host } = await draw(WeeklyMarginChart, { data }, 640);
   const chosen: string[] = [];
   fixture.componentInstance.choose.subscribe((week) => chosen.push(week));
-  await fixture.whenStable();
-  const host = fixture.nativeElement as HTMLElement;
   const list = host.querySelector<HTMLElement>('[role=listbox]')!;
   const press = async (key: string): Promise<void> => {
     list.dispatchEvent(new KeyboardEvent('keydown', { key, cancelable: true }));
@@ -40,10 +34,8 @@ async function draw(data: WeeklyMarginInput) {
 }
 
 describe('WeeklyMarginChart', () => {
-  afterEach(() => jest.restoreAllMocks());
-
   it('drawn: an image with its finding as text alternative, and a list of all weeks', async () => {
-    const { host } = await draw(input);
+    const { host } = await drawWeeks(input);
     expect(host.querySelector('svg')?.getAttribute('role')).toBe('img');
     expect(host.querySelector('svg')?.getAttribute('aria-label')).toBe(input.summary);
     const options = [...host.querySelectorAll('[role=option]')];
@@ -60,7 +52,7 @@ describe('WeeklyMarginChart', () => {
   });
 
   it('marked weeks: a shape of their own and their sentence, plain ones a dot', async () => {
-    const { host } = await draw(input);
+    const { host } = await drawWeeks(input);
     expect(host.querySelectorAll('path.outside')).toHaveLength(2);
     expect([...host.querySelectorAll('.flag')].map((flag) => flag.textContent.trim())).toEqual([
       'Week 2: below, 29 %',
@@ -71,7 +63,7 @@ describe('WeeklyMarginChart', () => {
   });
 
   it('focus: starts at the chosen week and shows its three lines', async () => {
-    const { list, host, fixture } = await draw(input);
+    const { list, host, fixture } = await drawWeeks(input);
     list.dispatchEvent(new FocusEvent('focus'));
     await fixture.whenStable();
     const lines = [...host.querySelectorAll('.tooltip span')].map((line) => line.textContent);
@@ -82,7 +74,7 @@ describe('WeeklyMarginChart', () => {
   });
 
   it('arrow keys: move week by week and stop at the ends', async () => {
-    const { list, press, tooltip, fixture } = await draw(input);
+    const { list, press, tooltip, fixture } = await drawWeeks(input);
     list.dispatchEvent(new FocusEvent('focus'));
     await fixture.whenStable();
     await press('ArrowLeft');
@@ -98,7 +90,7 @@ describe('WeeklyMarginChart', () => {
   });
 
   it('Enter: chooses the week that is read, a gap included; Escape takes the tooltip away', async () => {
-    const { list, press, tooltip, chosen, fixture } = await draw(input);
+    const { list, press, tooltip, chosen, fixture } = await drawWeeks(input);
     list.dispatchEvent(new FocusEvent('focus'));
     await fixture.whenStable();
     await press('ArrowLeft');
@@ -112,7 +104,7 @@ describe('WeeklyMarginChart', () => {
   });
 
   it('pointer: the nearest week is read, and chosen by a click', async () => {
-    const { list, tooltip, chosen, fixture } = await draw(input);
+    const { list, tooltip, chosen, fixture } = await drawWeeks(input);
     const move = new MouseEvent('pointermove', { bubbles: true });
     Object.defineProperty(move, 'offsetX', { value: 5 });
     list.dispatchEvent(move);
@@ -126,7 +118,7 @@ describe('WeeklyMarginChart', () => {
   });
 
   it('keys that mean nothing here: left to the page', async () => {
-    const { list } = await draw(input);
+    const { list } = await drawWeeks(input);
     const event = new KeyboardEvent('keydown', { key: 'Tab', cancelable: true });
     list.dispatchEvent(event);
     expect(event.defaultPrevented).toBe(false);

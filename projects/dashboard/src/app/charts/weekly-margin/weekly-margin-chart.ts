@@ -1,5 +1,7 @@
 import { ChangeDetectionStrategy, Component, computed, input, output, signal } from '@angular/core';
-import { measuredWidth } from '../measured-width';
+import { laidOut } from '../laid-out';
+import { HeightTicks } from '../pieces/height-ticks';
+import { Picture } from '../pieces/picture';
 import type { WeeklyMarginInput } from './weekly-margin-input';
 import { layOutWeeklyMargin, type PlacedWeek } from './weekly-margin-layout';
 
@@ -9,6 +11,7 @@ let charts = 0;
 /** Individuals chart of weekly margin: limits, marked weeks, and a list of weeks laid over the picture to read and to choose from. */
 @Component({
   selector: 'us-weekly-margin-chart',
+  imports: [HeightTicks, Picture],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './weekly-margin-chart.html',
   styleUrl: './weekly-margin-chart.scss',
@@ -18,11 +21,8 @@ export class WeeklyMarginChart {
   /** The ISO week that was picked by pointer or with Enter. */
   readonly choose = output<string>();
 
-  private readonly width = measuredWidth();
   protected readonly id = `us-weekly-margin-${++charts}`;
-  protected readonly picture = computed(() =>
-    this.width() > 0 ? layOutWeeklyMargin(this.data(), this.width()) : undefined,
-  );
+  protected readonly picture = laidOut(this.data, layOutWeeklyMargin);
   /** Index of the week under pointer or keyboard; none when null. */
   private readonly pointed = signal<number | null>(null);
   protected readonly active = computed(() => {
