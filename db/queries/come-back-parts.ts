@@ -28,11 +28,15 @@ export function leftFindings(db: ScopedDb): Knex.QueryBuilder {
   );
 }
 
-/** The same under the name `c`, in the order of the list (rule 61), with the names of who marked them. */
+/** The same under the name `c`, in the order of the list (rule 61). */
+export function inOrder(query: Knex.QueryBuilder): Knex.QueryBuilder {
+  return query.orderBy(ORDER.map((column) => `c.${column}`));
+}
+
+/** The same with the names of who marked them. */
 export function toldInOrder(query: Knex.QueryBuilder): Knex.QueryBuilder {
-  return query
+  return inOrder(query)
     .leftJoin('people', 'people.id', 'c.person_id')
-    .orderBy(ORDER.map((column) => `c.${column}`))
     .select('c.*', { changed_by: 'people.name' });
 }
 

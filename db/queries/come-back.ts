@@ -2,7 +2,7 @@ import type { Knex } from 'knex';
 import type { ComeBackStatus } from '#shared/domain/vocabulary';
 import { sql } from '../database';
 import type { ScopedDb } from '../scoped-db';
-import { leftFindings, toldInOrder } from './come-back-parts';
+import { inOrder, leftFindings, toldInOrder } from './come-back-parts';
 import type { ComeBackRow } from './come-back-row';
 import { whereJobs, type JobFilters } from './job-filters';
 
@@ -26,22 +26,44 @@ export interface ComeBackTotals {
   cars: number;
 }
 
-/** Findings left on cars in scope that stand as asked, the dangerous first, from a place on. */
+/** A page of what matches, and the counts of all of it. */
+export interface LeftPage {
+  rows: ComeBackRow[];
+  totals: ComeBackTotals;
+}
+
+/**
+ * Findings left on cars in scope that stand as asked, the dangerous first, from a place on; with the counts of all, because
+ * working out how each finding stands is most of the work and is done once for both.
+ */
 export function listLeft(
   db: ScopedDb,
   filters: JobFilters,
   statuses: readonly ComeBackStatus[],
   after: ComeBackPlace | undefined,
   limit: number,
-): ComeBackRow[] {
-  const query = sorted(db, filters, statuses).limit(limit);
+): LeftPage {
+  const page = inOrder(sql.from('asked as c')).limit(limit).select('c.*');
   if (after) {
-    query.whereRaw(
+    page.whereRaw(
       '(c.danger, c.completed_on, c.branch, c.job_ref, c.place, c.ref) > (?, ?, ?, ?, ?, ?)',
       [after.danger, after.completedOn, after.branch, after.jobRef, after.place, after.ref],
     );
   }
-  return db.all<ComeBackRow>(query);
+  const found = db.all<ComeBackTotals & (ComeBackRow | { job_id: null })>(
+    toldInOrder(
+      sql
+        .withMaterialized('asked', standing(db, filters, statuses).select('c.*'))
+        .from(sql.from('asked').select(TOTALS).as('totals'))
+        .joinRaw('left join ? on true', [sql.raw('?', [page.as('c')])]),
+    ).select('totals.*'),
+  );
+  const { findings = 0, dangerous = 0, dangerousNotTold = 0, cars = 0 } = found[0] ?? {};
+  return {
+    // The counts come with a row of nothing where no finding is on the page.
+    rows: found.filter((row): row is ComeBackTotals & ComeBackRow => row.job_id !== null),
+    totals: { findings, dangerous, dangerousNotTold, cars },
+  };
 }
 
 /** All of them, one at a time and in the same order, for an export. */
@@ -57,24 +79,15 @@ export function iterateLeft(
 const DANGEROUS = `structural = 1 and (seen_as <> 'surface' or coalesce(worked_as, 'surface') <> 'surface')`;
 
 /** How many match, how many of them are dangerous, untold, and on how many cars they are. */
-export function countLeft(
-  db: ScopedDb,
-  filters: JobFilters,
-  statuses: readonly ComeBackStatus[],
-): ComeBackTotals {
-  const row = db.first<ComeBackTotals>(
-    standing(db, filters, statuses).select({
-      findings: sql.raw('count(*)'),
-      dangerous: sql.raw(`count(*) filter (where ${DANGEROUS})`),
-      dangerousNotTold: sql.raw(`count(*) filter (where ${DANGEROUS} and owner_told_on is null)`),
-      // A car without a key is known by its job alone.
-      cars: sql.raw(
-        `count(distinct iif(vehicle_key is null, 'job ' || job_id, 'car ' || branch || ' ' || vehicle_key))`,
-      ),
-    }),
-  );
-  return row ?? { findings: 0, dangerous: 0, dangerousNotTold: 0, cars: 0 };
-}
+const TOTALS = {
+  findings: sql.raw('count(*)'),
+  dangerous: sql.raw(`count(*) filter (where ${DANGEROUS})`),
+  dangerousNotTold: sql.raw(`count(*) filter (where ${DANGEROUS} and owner_told_on is null)`),
+  // A car without a key is known by its job alone.
+  cars: sql.raw(
+    `count(distinct iif(vehicle_key is null, 'job ' || job_id, 'car ' || branch || ' ' || vehicle_key))`,
+  ),
+};
 
 function sorted(
   db: ScopedDb,

@@ -6,7 +6,7 @@ import { Connection } from '../database';
 import { NetworkReference } from '../network-reference';
 import { ScopedDb } from '../scoped-db';
 import type { JobFilters } from './job-filters';
-import { countLeft, iterateLeft, listLeft } from './come-back';
+import { iterateLeft, listLeft } from './come-back';
 import { listLeftOfJob, listMarks } from './come-back-of-job';
 import { readCostsOfDay } from './costs-of-day';
 import { countJobs, iterateJobRows, listJobRows, type ListFilters } from './job-list';
@@ -71,7 +71,6 @@ const READS: Record<
   string,
   (db: ScopedDb, filters: JobFilters, network: NetworkReference) => unknown
 > = {
-  'count-left': (db, filters) => countLeft(db, filters, statusesOf(filters)),
   'count-bookings': (db, filters) => countBookings(db, PERIOD, filters),
   'count-branch-cells': countBranchCells,
   'count-branch-weeks': countBranchWeeks,

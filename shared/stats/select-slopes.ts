@@ -65,7 +65,8 @@ function selectWithin(search: Search, ranks: readonly number[], within: Interval
     const [from, to] = isStuck
       ? around(sample, [placeOf(ranks[0], interval), placeOf(ranks[0], interval)], 0)
       : around(sample, [placeOf(ranks[0], interval), placeOf(ranks.at(-1), interval)], 1.25);
-    const share = sample.filter((slope) => slope >= from && slope <= to).length / sample.length;
+    const [start, end] = [firstAbove(sample, nextDouble(from, -1)), firstAbove(sample, to)];
+    const share = (end - start) / sample.length;
     const stride = from === to ? () => Infinity : evenly((left * share) / size, random);
     const scan = scanSlopes(groups, [from, to], stride, size);
     const over = scan.below + scan.inside;
@@ -77,7 +78,7 @@ function selectWithin(search: Search, ranks: readonly number[], within: Interval
           high: nextDouble(from, -1),
           left: scan.below - under,
           under,
-          sample: sample.filter((slope) => slope < from),
+          sample: sample.subarray(0, start),
         },
       ],
       [
@@ -97,7 +98,7 @@ function selectWithin(search: Search, ranks: readonly number[], within: Interval
           high,
           left: under + left - over,
           under: over,
-          sample: sample.filter((slope) => slope > to),
+          sample: sample.subarray(end),
         },
       ],
     ];
@@ -161,6 +162,17 @@ function around(
 function sampleOf({ groups, size, random }: Search, { low, high, left }: Interval): Float64Array {
   const { taken } = scanSlopes(groups, [low, high], evenly(left / size, random), size * 2);
   return new Float64Array(taken).sort();
+}
+
+/** How many of a sorted sample are no greater than a value. */
+function firstAbove(sample: Float64Array, value: number): number {
+  let [low, high] = [0, sample.length];
+  while (low < high) {
+    const middle = (low + high) >> 1;
+    if ((sample[middle] as number) <= value) low = middle + 1;
+    else high = middle;
+  }
+  return low;
 }
 
 /** Steps of a mean length of at least 1, jittered so that no pattern in the data can meet them. */

@@ -1,5 +1,4 @@
 import {
-  countLeft,
   iterateLeft,
   listLeft,
   type ComeBackPlace,
@@ -34,17 +33,11 @@ const EXPORT_PIECE = 500;
 /** Rot left on cars, the dangerous first. */
 export function listComeBacks(db: ScopedDb, question: ComeBackQuestion): ComeBackPage {
   const { filters, statuses, limit, after } = question;
-  return db.snapshot(() => {
-    // One more than asked for tells whether there is a next page.
-    const rows = listLeft(db, filters, statuses, after ?? undefined, limit + 1);
-    const shown = rows.slice(0, limit);
-    const last = rows.length > limit ? shown.at(-1) : undefined;
-    return {
-      items: shown.map(tellComeBack),
-      next: last ? placeOfRow(last) : null,
-      ...countLeft(db, filters, statuses),
-    };
-  });
+  // One more than asked for tells whether there is a next page.
+  const { rows, totals } = listLeft(db, filters, statuses, after ?? undefined, limit + 1);
+  const shown = rows.slice(0, limit);
+  const last = rows.length > limit ? shown.at(-1) : undefined;
+  return { items: shown.map(tellComeBack), next: last ? placeOfRow(last) : null, ...totals };
 }
 
 /** All of them in the same order, by pieces, for an export; the caller keeps the database from changing between them. */

@@ -39,7 +39,10 @@ export function answerProducts(
     const cells = countCarCells(db, asked);
     const lines = readProductLines(db, asked);
     const normed = readNormedCars(db, asked);
-    const uncosted = sumUncosted(db, asked);
+    // Nearly always every line has its cost: then no job need be looked at for one that has not.
+    const uncosted = lines.every(({ ml, costedLines }) => costedLines === ml.length)
+      ? { jobs: 0, costCents: 0 }
+      : sumUncosted(db, asked);
     const jobs = sum(cells.map(({ cars }) => cars));
     const known = sum(lines.map(({ costCents }) => costCents)) - uncosted.costCents;
     const codes = productCodes(db);
