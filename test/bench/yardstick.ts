@@ -92,9 +92,9 @@ export class Yardstick {
 
   /** Runs some questions one after another; every row is fetched. */
   async ask(...questions: string[]): Promise<void> {
-    for (const question of questions)
-      await (await this.connection.runAndReadAll(question)).getRows();
-  }
+    for (const question of questions) {
+      (await this.connection.runAndReadAll(question)).getRows();
+    }
 
   close(): void {
     this.connection.closeSync();
