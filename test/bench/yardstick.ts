@@ -95,6 +95,7 @@ export class Yardstick {
     for (const question of questions) {
       (await this.connection.runAndReadAll(question)).getRows();
     }
+  }
 
   close(): void {
     this.connection.closeSync();
