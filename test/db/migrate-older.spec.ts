@@ -44,18 +44,19 @@ async function writeOlder(file: string, from: Connection): Promise<void> {
     'pragma application_id = ' + String(from.driver.pragma('application_id', { simple: true })),
   );
   await knex.raw(`pragma user_version = ${OLDER}`);
-  const tables = (await knex('sqlite_schema').where('type', 'table').select('name')) as {
-    name: string;
-  }[];
+  const tables = await knex<{ name: string; type: string }>('sqlite_schema')
+    .where('type', 'table')
+    .select('name');
   await knex.raw('pragma foreign_keys = off');
   for (const { name } of tables) {
     if (/^(sqlite_|knex_)/.test(name)) continue;
-    const known = ((await knex.raw(`pragma table_info(${name})`)) as { name: string }[]).map(
+    const known = (await knex.raw<{ name: string }[]>(`pragma table_info(${name})`)).map(
       (column) => column.name,
     );
     const rows = from.driver.prepare(`select ${known.join(', ')} from ${name}`).all() as object[];
     await knex(name)
       .delete()
+      // The one row of the network is made with its table; an append-only table is empty and refuses.
       .catch(() => undefined);
     for (const row of rows) await knex(name).insert(row);
   }
