@@ -1,5 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, input, output, signal } from '@angular/core';
 import { measuredWidth } from '../charts/measured-width';
+import { Tooltip } from '../charts/pieces/tooltip';
 import { formatList } from '../ui/format';
 import { TableTwin } from '../ui/table-twin/table-twin';
 import { placed } from './car-place';
@@ -23,7 +24,7 @@ const NAMED = 5;
  */
 @Component({
   selector: 'us-underside-map',
-  imports: [TableTwin, UndersideCar, UndersideLegend],
+  imports: [TableTwin, Tooltip, UndersideCar, UndersideLegend],
   templateUrl: './underside-map.html',
   styleUrl: './underside-map.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,

@@ -2,6 +2,7 @@ import { ChangeDetectionStrategy, Component, computed, input, output, signal } f
 import { laidOut } from '../laid-out';
 import { HeightTicks } from '../pieces/height-ticks';
 import { Picture } from '../pieces/picture';
+import { Tooltip } from '../pieces/tooltip';
 import type { WeeklyMarginInput } from './weekly-margin-input';
 import { layOutWeeklyMargin, type PlacedWeek } from './weekly-margin-layout';
 
@@ -11,7 +12,7 @@ let charts = 0;
 /** Individuals chart of weekly margin: limits, marked weeks, and a list of weeks laid over the picture to read and to choose from. */
 @Component({
   selector: 'us-weekly-margin-chart',
-  imports: [HeightTicks, Picture],
+  imports: [HeightTicks, Picture, Tooltip],
   changeDetection: ChangeDetectionStrategy.OnPush,
   templateUrl: './weekly-margin-chart.html',
   styleUrl: './weekly-margin-chart.scss',
