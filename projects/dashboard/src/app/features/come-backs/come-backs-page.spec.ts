@@ -1,52 +1,22 @@
-import { provideHttpClient } from '@angular/common/http';
-import { HttpTestingController, provideHttpClientTesting } from '@angular/common/http/testing';
-import { CUSTOM_ELEMENTS_SCHEMA, signal } from '@angular/core';
-import { TestBed } from '@angular/core/testing';
-import { provideRouter, Router } from '@angular/router';
+import { signal } from '@angular/core';
 import type { Role } from '#shared/domain/vocabulary';
-import { Catalogue } from '../../core/catalogue/catalogue';
-import { ScopeLine } from '../../core/scope-line/scope-line';
-import { Session } from '../../core/session/session';
 import { comeBackList, comeBackRow } from '../../testing/come-back-answers';
+import { openPage } from '../../testing/open-page';
 import { ComeBacksPage } from './come-backs-page';
 
 async function open(role: Role, url = '/come-backs?branch=HAV', status?: string) {
-  TestBed.configureTestingModule({
-    providers: [
-      provideHttpClient(),
-      provideHttpClientTesting(),
-      provideRouter([{ path: 'come-backs', children: [] }]),
-      { provide: Session, useValue: { role: signal(role), person: signal(undefined) } },
-      {
-        provide: Catalogue,
-        useValue: {
-          today: signal('2026-02-02'),
-          branches: signal([{ code: 'HAV' }]),
-          branchName: (code: string) => code,
-        },
-      },
-    ],
-  }).overrideComponent(ComeBacksPage, {
-    remove: { imports: [ScopeLine] },
-    add: { schemas: [CUSTOM_ELEMENTS_SCHEMA] },
+  const { http, settle, host } = await openPage(ComeBacksPage, {
+    url,
+    role,
+    catalogue: { branches: signal([{ code: 'HAV' }]), branchName: (code: string) => code },
+    inputs: status ? { status } : {},
   });
-  await TestBed.inject(Router).navigateByUrl(url);
-  const http = TestBed.inject(HttpTestingController);
-  const fixture = TestBed.createComponent(ComeBacksPage);
-  if (status) fixture.componentRef.setInput('status', status);
-  const settle = async (): Promise<void> => {
-    await new Promise((done) => setTimeout(done));
-    fixture.detectChanges();
-  };
-  fixture.detectChanges();
-  await settle();
   const answer = async (body: object): Promise<URL> => {
     const request = http.expectOne(({ url: asked }) => asked.startsWith('/api/come-back'));
     request.flush(body);
     await settle();
     return new URL(request.request.urlWithParams, 'http://app');
   };
-  const host = fixture.nativeElement as HTMLElement;
   const press = async (words: RegExp): Promise<void> => {
     const buttons = [...host.querySelectorAll('button')];
     buttons.find((button) => words.test(button.textContent))!.click();

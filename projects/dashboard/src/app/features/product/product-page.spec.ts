@@ -1,49 +1,23 @@
-import { provideHttpClient } from '@angular/common/http';
-import { HttpTestingController, provideHttpClientTesting } from '@angular/common/http/testing';
-import { CUSTOM_ELEMENTS_SCHEMA, signal } from '@angular/core';
-import { TestBed } from '@angular/core/testing';
-import { provideRouter, Router } from '@angular/router';
-import { Catalogue } from '../../core/catalogue/catalogue';
-import { ScopeLine } from '../../core/scope-line/scope-line';
+import { signal } from '@angular/core';
 import { noProducts, productNeedAnswer, productsAnswer } from '../../testing/product-answers';
+import { openPage } from '../../testing/open-page';
 import { ProductPage } from './product-page';
 
 // The whole page is compiled and drawn: slow on a busy machine.
 jest.setTimeout(30_000);
 
 async function open(product?: string) {
-  TestBed.configureTestingModule({
-    providers: [
-      provideHttpClient(),
-      provideHttpClientTesting(),
-      provideRouter([{ path: 'product', children: [] }]),
-      {
-        provide: Catalogue,
-        useValue: {
-          today: signal('2026-02-02'),
-          currency: signal('EUR'),
-          value: signal({ products: [{ code: 'CW1', name: 'Cavity wax', kind: 'cavity_wax' }] }),
-          branchName: (code: string) => code,
-          packageWord: (code: string) => code,
-          productName: (code: string) => (code === 'CW1' ? 'Cavity wax' : code),
-        },
-      },
-    ],
-  }).overrideComponent(ProductPage, {
-    remove: { imports: [ScopeLine] },
-    add: { schemas: [CUSTOM_ELEMENTS_SCHEMA] },
+  return openPage(ProductPage, {
+    url: '/product?branch=HAV',
+    catalogue: {
+      currency: signal('EUR'),
+      value: signal({ products: [{ code: 'CW1', name: 'Cavity wax', kind: 'cavity_wax' }] }),
+      branchName: (code: string) => code,
+      packageWord: (code: string) => code,
+      productName: (code: string) => (code === 'CW1' ? 'Cavity wax' : code),
+    },
+    inputs: { product },
   });
-  await TestBed.inject(Router).navigateByUrl('/product?branch=HAV');
-  const http = TestBed.inject(HttpTestingController);
-  const fixture = TestBed.createComponent(ProductPage);
-  fixture.componentRef.setInput('product', product);
-  const settle = async (): Promise<void> => {
-    await new Promise((done) => setTimeout(done));
-    fixture.detectChanges();
-  };
-  fixture.detectChanges();
-  await settle();
-  return { http, settle, host: fixture.nativeElement as HTMLElement };
 }
 
 async function answer(

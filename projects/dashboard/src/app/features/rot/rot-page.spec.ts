@@ -1,43 +1,14 @@
-import { provideHttpClient } from '@angular/common/http';
-import { HttpTestingController, provideHttpClientTesting } from '@angular/common/http/testing';
-import { CUSTOM_ELEMENTS_SCHEMA, signal } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
-import { provideRouter, Router } from '@angular/router';
+import { Router } from '@angular/router';
 import type { RotAnswer } from '#shared/contracts/rot';
-import { Catalogue } from '../../core/catalogue/catalogue';
-import { ScopeLine } from '../../core/scope-line/scope-line';
 import { emptyRotAnswer, rotAnswer, rotModel } from '../../testing/rot-answers';
+import { openPage } from '../../testing/open-page';
 import { UndersideMap } from '../../underside-map/underside-map';
 import { RotPage } from './rot-page';
 
 async function open(url = '/rot?region=OC') {
-  TestBed.configureTestingModule({
-    providers: [
-      provideHttpClient(),
-      provideHttpClientTesting(),
-      provideRouter([
-        { path: 'rot', children: [] },
-        { path: 'jobs', children: [] },
-      ]),
-      {
-        provide: Catalogue,
-        useValue: { today: signal('2026-02-02'), regionName: (code: string) => `Region ${code}` },
-      },
-    ],
-  }).overrideComponent(RotPage, {
-    remove: { imports: [ScopeLine] },
-    add: { schemas: [CUSTOM_ELEMENTS_SCHEMA] },
-  });
-  await TestBed.inject(Router).navigateByUrl(url);
-  const http = TestBed.inject(HttpTestingController);
-  const fixture = TestBed.createComponent(RotPage);
-  const settle = async (): Promise<void> => {
-    await new Promise((done) => setTimeout(done));
-    fixture.detectChanges();
-  };
-  fixture.detectChanges();
-  await settle();
-  return { http, fixture, settle, host: fixture.nativeElement as HTMLElement };
+  const catalogue = { regionName: (code: string) => `Region ${code}` };
+  return openPage(RotPage, { url, catalogue });
 }
 
 async function answered(answer: RotAnswer, age?: string) {

@@ -1,11 +1,5 @@
-import { provideHttpClient } from '@angular/common/http';
-import { HttpTestingController, provideHttpClientTesting } from '@angular/common/http/testing';
-import { CUSTOM_ELEMENTS_SCHEMA, signal } from '@angular/core';
-import { TestBed } from '@angular/core/testing';
-import { provideRouter, Router } from '@angular/router';
-import { Catalogue } from '../../core/catalogue/catalogue';
-import { ScopeLine } from '../../core/scope-line/scope-line';
-import { Session } from '../../core/session/session';
+import { type HttpTestingController } from '@angular/common/http/testing';
+import { signal } from '@angular/core';
 import {
   jobRow,
   jobsAnswer,
@@ -14,40 +8,20 @@ import {
   unbilledRow,
   weeksFromTo,
 } from '../../testing/week-answers';
+import { openPage } from '../../testing/open-page';
 import { ThisWeekPage } from './this-week-page';
 
 async function open(role: 'site_manager' | 'regional_lead', url = '/this-week?branch=HAV') {
-  TestBed.configureTestingModule({
-    providers: [
-      provideHttpClient(),
-      provideHttpClientTesting(),
-      provideRouter([{ path: 'this-week', children: [] }]),
-      { provide: Session, useValue: { role: signal(role), person: signal(undefined) } },
-      {
-        provide: Catalogue,
-        useValue: {
-          today: signal('2026-02-02'),
-          currency: signal('EUR'),
-          branchName: (code: string) => code,
-          packageName: (code: string) => code,
-          productName: (code: string) => code,
-        },
-      },
-    ],
-  }).overrideComponent(ThisWeekPage, {
-    remove: { imports: [ScopeLine] },
-    add: { schemas: [CUSTOM_ELEMENTS_SCHEMA] },
+  return openPage(ThisWeekPage, {
+    url,
+    role,
+    catalogue: {
+      currency: signal('EUR'),
+      branchName: (code: string) => code,
+      packageName: (code: string) => code,
+      productName: (code: string) => code,
+    },
   });
-  await TestBed.inject(Router).navigateByUrl(url);
-  const http = TestBed.inject(HttpTestingController);
-  const fixture = TestBed.createComponent(ThisWeekPage);
-  const settle = async (): Promise<void> => {
-    await new Promise((done) => setTimeout(done));
-    fixture.detectChanges();
-  };
-  fixture.detectChanges();
-  await settle();
-  return { http, fixture, settle, host: fixture.nativeElement as HTMLElement };
 }
 
 /** The asked addresses with their parameters, in any order. */
