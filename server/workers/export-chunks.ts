@@ -6,8 +6,11 @@ import {
   JOB_COLUMNS,
   MARGIN_COLUMNS,
   OVERRUN_COLUMNS,
+  PRODUCT_BRANCH_COLUMNS,
   PRODUCT_COLUMNS,
   PRODUCT_NEED_COLUMNS,
+  PRODUCT_TEMPERATURE_COLUMNS,
+  QUOTE_COLUMNS,
   ROT_COLUMNS,
   ROT_MODEL_COLUMNS,
   ROT_ZONE_COLUMNS,
@@ -18,6 +21,8 @@ import { answerMargin, type MarginQuestion } from '../features/margin/answer-mar
 import { answerOverrun, type OverrunQuestion } from '../features/overrun/answer-overrun';
 import { answerProductNeed, type NeedQuestion } from '../features/products/answer-product-need';
 import { answerProducts, type ProductsQuestion } from '../features/products/answer-products';
+import { answerQuote, type QuoteQuestion } from '../features/quote/answer-quote';
+import { quoteRows } from '../features/quote/quote-rows';
 import { answerRot, type RotQuestion } from '../features/rot/answer-rot';
 import type { RotZone } from '#shared/contracts/rot';
 import type { ExportName } from './read-tasks';
@@ -63,6 +68,24 @@ export function* csvChunks(
     case 'products': {
       const { use } = answerProducts(db, input as ProductsQuestion);
       yield csvHeader(PRODUCT_COLUMNS) + csvRows(PRODUCT_COLUMNS, use);
+      return;
+    }
+    case 'product-branches': {
+      const { branches } = answerProducts(db, input as ProductsQuestion);
+      yield csvHeader(PRODUCT_BRANCH_COLUMNS) + csvRows(PRODUCT_BRANCH_COLUMNS, branches);
+      return;
+    }
+    case 'product-temperature': {
+      const { temperature } = answerProducts(db, input as ProductsQuestion);
+      const rows = temperature.flatMap(({ classes, ...trend }) =>
+        classes.map((one) => ({ ...trend, ...one })),
+      );
+      yield csvHeader(PRODUCT_TEMPERATURE_COLUMNS) + csvRows(PRODUCT_TEMPERATURE_COLUMNS, rows);
+      return;
+    }
+    case 'quote': {
+      const rows = quoteRows(answerQuote(db, input as QuoteQuestion, reference));
+      yield csvHeader(QUOTE_COLUMNS) + csvRows(QUOTE_COLUMNS, rows);
       return;
     }
     case 'product-need': {

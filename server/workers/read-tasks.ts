@@ -39,7 +39,10 @@ export interface ExportTasks {
   'rot-models': RotQuestion;
   'rot-zones': RotQuestion;
   products: ProductsQuestion;
+  'product-branches': ProductsQuestion;
+  'product-temperature': ProductsQuestion;
   'product-need': NeedQuestion;
+  quote: QuoteQuestion;
   'come-back': ComeBacksAsked;
 }
 

@@ -3,6 +3,7 @@ import { defineEndpoint } from './endpoint';
 import { noParams, READERS, scopeQuery } from './fields';
 import { jobsQuery } from './job-list';
 import { overrunQuery } from './overrun';
+import { quoteQuery } from './quote';
 
 const csv = {
   method: 'get',
@@ -62,6 +63,28 @@ export const exportProducts = defineEndpoint({
   path: '/api/exports/products.csv',
   summary: 'The rows of the product answer, one a product, package and body type.',
   query: scopeQuery,
+});
+
+export const exportProductBranches = defineEndpoint({
+  ...csv,
+  path: '/api/exports/product-branches.csv',
+  summary: 'The branches of the product answer against the norm, one row a branch.',
+  query: scopeQuery,
+});
+
+export const exportProductTemperature = defineEndpoint({
+  ...csv,
+  path: '/api/exports/product-temperature.csv',
+  summary: 'Product use by workshop temperature, one row a product and class of 5 °C.',
+  query: scopeQuery,
+});
+
+export const exportQuote = defineEndpoint({
+  ...csv,
+  path: '/api/exports/quote.csv',
+  summary: 'A quote as rows: labour by stage, chances, product, price by margin.',
+  scope: 'network-reference',
+  query: quoteQuery,
 });
 
 export const exportProductNeed = defineEndpoint({

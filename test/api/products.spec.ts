@@ -71,4 +71,39 @@ describe('GET /api/analytics/products', () => {
     expect(row?.split(',').slice(0, 6)).toEqual(['CW1', 'full', 'hatchback', '12', '10', '2500']);
     expect(end).toBe('');
   });
+
+  it('given the exports of its pictures, writes a row a branch and a row a class of temperature', async () => {
+    const { body } = await products();
+    const rowsOf = async (name: string): Promise<string[]> => {
+      const path = `/api/exports/${name}.csv`;
+      const { status, text } = await app.call('get', path, { token: network.lead });
+      expect([status, text.endsWith('\r\n')]).toEqual([200, true]);
+      return text.trimEnd().split('\r\n');
+    };
+    const branches = body.branches as Record<string, string | number | null>[];
+    expect(await rowsOf('product-branches')).toEqual([
+      'branch,cars,ratioToNorm,lower,upper',
+      ...branches.map((row) => Object.values(row).join(',')),
+    ]);
+    const [trend] = body.temperature as {
+      product: string;
+      slopeMlPerDegree: number;
+      lower: number | null;
+      upper: number | null;
+      classes: Record<string, number | null>[];
+    }[];
+    expect(trend!.classes.length).toBeGreaterThan(1);
+    expect(await rowsOf('product-temperature')).toEqual([
+      'product,fromC,cars,p25Ml,medianMl,p75Ml,slopeMlPerDegree,lower,upper',
+      ...trend!.classes.map((one) =>
+        [
+          trend!.product,
+          ...Object.values(one),
+          trend!.slopeMlPerDegree,
+          trend!.lower,
+          trend!.upper,
+        ].join(','),
+      ),
+    ]);
+  });
 });

@@ -41,10 +41,12 @@ function sampleCode(path: string, name: string): string {
 }
 
 /** What a call cannot be asked without. */
+const QUOTED =
+  'make=Velder&model=Tessock&firstRegistered=2009-05&bodyType=hatchback&package=full&branch=AAA';
 const NEEDED: Record<string, string> = {
   '/api/week-notes': 'from=2025-12-01&to=2026-02-02',
-  '/api/quote':
-    'make=Velder&model=Tessock&firstRegistered=2009-05&bodyType=hatchback&package=full&branch=AAA',
+  '/api/quote': QUOTED,
+  '/api/exports/quote.csv': QUOTED,
 };
 
 /** The address of a call with what it cannot be asked without, and with whatever else is asked. */

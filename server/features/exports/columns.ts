@@ -37,6 +37,20 @@ export const PRODUCT_COLUMNS = [
   ...['underShare', 'overShare'],
 ];
 
+export const PRODUCT_BRANCH_COLUMNS = ['branch', 'cars', 'ratioToNorm', 'lower', 'upper'];
+
+/** The slope and its limits stand in every row of their product. */
+export const PRODUCT_TEMPERATURE_COLUMNS = [
+  ...['product', 'fromC', 'cars', 'p25Ml', 'medianMl', 'p75Ml'],
+  ...['slopeMlPerDegree', 'lower', 'upper'],
+];
+
+/** What stands behind a quote is said in every row; `part` tells which of the others are filled. */
+export const QUOTE_COLUMNS = [
+  ...['kind', 'source', 'cars', 'part', 'key', 'p50Minutes', 'p80Minutes', 'share', 'lower'],
+  ...['upper', 'ml', 'marginShare', 'priceCents'],
+];
+
 export const PRODUCT_NEED_COLUMNS = ['product', 'ml', 'lowerMl', 'upperMl', 'costCents'];
 
 export const COME_BACK_COLUMNS = [

@@ -5,8 +5,11 @@ import {
   exportJobs,
   exportMargin,
   exportOverrun,
+  exportProductBranches,
   exportProductNeed,
   exportProducts,
+  exportProductTemperature,
+  exportQuote,
   exportRot,
   exportRotModels,
   exportRotZones,
@@ -17,6 +20,7 @@ import { comeBackQuestion } from '../../http/come-back-question';
 import { streamCsv, type CsvChunks } from '../../http/csv-stream';
 import { jobListQuestion } from '../../http/job-list-question';
 import { mount, type Call, type Mounting, type Reply } from '../../http/mount';
+import { quoteQuestion } from '../../http/quote-question';
 import { scopeQuestion } from '../../http/scope-question';
 import type { Kit } from '../../kit';
 
@@ -55,6 +59,8 @@ export function mountExports(mounting: Mounting, kit: Kit): void {
     [exportRotModels, 'rot-models'],
     [exportRotZones, 'rot-zones'],
     [exportProducts, 'products'],
+    [exportProductBranches, 'product-branches'],
+    [exportProductTemperature, 'product-temperature'],
     [exportProductNeed, 'product-need'],
   ] as const) {
     mount(mounting, contract, (call) => {
@@ -62,6 +68,11 @@ export function mountExports(mounting: Mounting, kit: Kit): void {
       return exported(kit, call, name, scope, () => kit.reads.stream(name, scope, question));
     });
   }
+
+  mount(mounting, exportQuote, (call) => {
+    const { scope, ...question } = quoteQuestion(kit, call.scope, call.query, 'seen');
+    return exported(kit, call, 'quote', scope, () => kit.reads.stream('quote', scope, question));
+  });
 }
 
 async function exported(

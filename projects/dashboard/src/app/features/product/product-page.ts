@@ -2,7 +2,11 @@ import { NgTemplateOutlet } from '@angular/common';
 import { ChangeDetectionStrategy, Component, computed, inject, input, signal } from '@angular/core';
 import { MatChipsModule } from '@angular/material/chips';
 import { Router } from '@angular/router';
-import { exportProducts } from '#shared/contracts/exports';
+import {
+  exportProductBranches,
+  exportProducts,
+  exportProductTemperature,
+} from '#shared/contracts/exports';
 import { getProducts } from '#shared/contracts/products';
 import { DotIntervalChart } from '../../charts/dot-interval/dot-interval-chart';
 import { UseBoxChart } from '../../charts/use-box/use-box-chart';
@@ -85,6 +89,10 @@ export class ProductPage {
   });
   protected readonly caution = SOLVENT_MIST;
   protected readonly export = exportProducts;
+  protected readonly exports = {
+    branches: exportProductBranches,
+    temperature: exportProductTemperature,
+  };
   protected readonly onPaper = signal<'page' | 'list'>('page');
   protected readonly allRows = signal(false);
   protected readonly firstRows = FIRST_ROWS;

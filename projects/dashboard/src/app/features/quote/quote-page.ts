@@ -7,12 +7,14 @@ import {
   input,
 } from '@angular/core';
 import { Router } from '@angular/router';
+import { exportQuote } from '#shared/contracts/exports';
 import { listJobs } from '#shared/contracts/job-list';
 import { getQuote } from '#shared/contracts/quote';
 import { BarWhiskerChart } from '../../charts/bar-whisker/bar-whisker-chart';
 import { DotIntervalChart } from '../../charts/dot-interval/dot-interval-chart';
 import { ValueCurveChart } from '../../charts/value-curve/value-curve-chart';
 import { Api } from '../../core/api/api';
+import { CsvLink } from '../../core/api/csv-link';
 import { Catalogue } from '../../core/catalogue/catalogue';
 import { Session } from '../../core/session/session';
 import { Answer } from '../../ui/answer/answer';
@@ -41,6 +43,7 @@ const LOOKED_THROUGH = 200;
   imports: [
     Answer,
     BarWhiskerChart,
+    CsvLink,
     DefinitionLink,
     DotIntervalChart,
     LoadState,
@@ -59,6 +62,7 @@ export class QuotePage {
   private readonly catalogue = inject(Catalogue);
   private readonly window = inject(DOCUMENT).defaultView;
   private readonly role = inject(Session).role;
+  protected readonly export = exportQuote;
 
   // From the URL.
   readonly make = input<string>();
@@ -80,6 +84,10 @@ export class QuotePage {
     marginShare: this.money() === 'shown' ? this.marginShare() : undefined,
   }));
   protected readonly question = computed(() => questionOf(this.asked()));
+  protected readonly exportQuery = computed(() => {
+    const question = this.question();
+    return question && { ...question };
+  });
   protected readonly quote = this.api.read(getQuote, () => {
     const question = this.question();
     return question && { query: question };
