@@ -2,6 +2,11 @@
 const conditions = ['underseam-source'];
 
 export default {
+  // Both cores; a worker that has grown is begun anew before it slows down.
+  maxWorkers: 2,
+  workerIdleMemoryLimit: '1500MB',
+  // Real servers are started in hooks, and two of them may share a core.
+  testTimeout: 30_000,
   projects: [
     {
       displayName: 'server',
