@@ -7,6 +7,8 @@ import { makeSmallNetwork, validJob } from '../support/small-network';
 import { SpawnedServer } from '../support/spawned-server';
 
 const KILLS = 5;
+/** Jobs acknowledged a round before its kill may come: on a busy machine, too, there is something to have lost. */
+const FEWEST = 9;
 /** A few moments of a random length, so that the kill falls into reading, writing, committing and answering. */
 const moment = (): Promise<void> =>
   new Promise((resolve) => setTimeout(resolve, 40 + Math.random() * 400));
@@ -73,7 +75,9 @@ describe('A server killed at any moment', () => {
     const acknowledged = new Map<string, string>();
     for (let round = 0; round < KILLS; round += 1) {
       const server = SpawnedServer.start({ PORT: '0', UNDERSEAM_DATA: folder });
+      const before = acknowledged.size;
       const pushing = pushUntilGone(await server.address(), round, acknowledged);
+      while (acknowledged.size < before + FEWEST) await new Promise((turn) => setTimeout(turn, 5));
       await moment();
       await server.kill();
       await pushing;
@@ -91,7 +95,7 @@ describe('A server killed at any moment', () => {
     store.close();
     expect(stored.filter(({ times }) => times !== 1)).toEqual([]);
     const kept = new Map(stored.map(({ ref, notes }) => [ref, notes]));
-    expect(acknowledged.size).toBeGreaterThan(KILLS * 8);
+    expect(acknowledged.size).toBeGreaterThanOrEqual(KILLS * FEWEST);
     for (const [ref, notes] of acknowledged) {
       // A correction may have been stored whose answer the kill cut off: then it is the one sent next.
       const [round, worker, n] = notes.split('-').map(Number);
