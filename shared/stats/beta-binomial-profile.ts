@@ -7,7 +7,7 @@ export interface BetaBinomialProfile {
   slope: (spread: number) => number;
   /** The log-likelihood above that of one common share. */
   gain: (spread: number) => number;
-  fit: (spread: number) => { alpha: number; beta: number };
+  shapesAt: (spread: number) => { alpha: number; beta: number };
 }
 
 /** How often each value occurs: groups repeat, and equal ones cost one computation. */
@@ -46,7 +46,7 @@ export function betaBinomialProfile(
     return (lastOdds = risingRoot(left, bracket, lastOdds));
   };
   return {
-    fit: (spread) => shapes(spread, oddsAt(spread)),
+    shapesAt: (spread) => shapes(spread, oddsAt(spread)),
     slope: (spread) => {
       const { alpha, beta } = shapes(spread, oddsAt(spread));
       return sumOfThree(riseSlope, [alpha, beta, Math.exp(-spread)], [hits, misses, all]);

@@ -44,7 +44,7 @@ export function fitBetaBinomial(
     if (risingBefore && !isRising) {
       const peak = risingRoot((at) => -profile.slope(at), [before, spread]);
       const gain = profile.gain(peak);
-      if (gain > (best?.gain ?? 0)) best = { fit: profile.fit(peak), gain };
+      if (gain > (best?.gain ?? 0)) best = { fit: profile.shapesAt(peak), gain };
     }
     [before, risingBefore] = [spread, isRising];
   }
