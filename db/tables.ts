@@ -4,12 +4,16 @@ export const SCOPED_TABLES = [
   'bookings',
   'claims',
   'come_back_marks',
+  'import_columns',
+  'imports',
   'job_consumables',
   'job_extras',
   'job_facts',
   'job_findings',
   'job_products',
   'jobs',
+  'jobs_under_way',
+  'photos',
   'week_notes',
 ] as const;
 export type ScopedTable = (typeof SCOPED_TABLES)[number];

@@ -1,28 +1,36 @@
 import compression from 'compression';
 import express, { Router, type Express } from 'express';
 import helmet from 'helmet';
+import { join } from 'node:path';
 import type { Logger } from 'pino';
 import { pinoHttp } from 'pino-http';
 import type { Endpoint } from '#shared/contracts/endpoint';
 import { attemptLimits } from './auth/attempt-limits';
 import { makeAuthenticate } from './auth/authenticate';
+import { mountAudit } from './features/audit/audit.endpoints';
 import { mountBookings } from './features/bookings/bookings.endpoints';
 import { mountClaims } from './features/claims/claims.endpoints';
 import { mountComeBack } from './features/come-back/come-back.endpoints';
+import { mountCorrections } from './features/corrections/corrections.endpoints';
 import { mountExports } from './features/exports/exports.endpoints';
+import { mountImports } from './features/imports/imports.endpoints';
 import { mountJobList } from './features/job-list/job-list.endpoints';
 import { mountJobs } from './features/jobs/jobs.endpoints';
 import { mountMailbox } from './features/mailbox/mailbox.endpoints';
 import { mountMargin } from './features/margin/margin.endpoints';
 import { mountOverrun } from './features/overrun/overrun.endpoints';
 import { mountPeople } from './features/people/people.endpoints';
+import { mountPhotos } from './features/photos/photos.endpoints';
 import { mountProducts } from './features/products/products.endpoints';
 import { mountPushKeys } from './features/push-keys/push-keys.endpoints';
 import { mountQuote } from './features/quote/quote.endpoints';
 import { mountRot } from './features/rot/rot.endpoints';
+import { mountSetUpHelp } from './features/set-up-help/set-up-help.endpoints';
 import { mountSetUp } from './features/set-up/set-up.endpoints';
 import { mountSignIn } from './features/sign-in/sign-in.endpoints';
 import { mountSystem } from './features/system/system.endpoints';
+import { mountUnderWay } from './features/under-way/under-way.endpoints';
+import { mountUsual } from './features/usual/usual.endpoints';
 import { mountWeeks } from './features/weeks/weeks.endpoints';
 import { mountDashboard } from './http/dashboard';
 import { mountDocs } from './http/docs';
@@ -73,6 +81,7 @@ export function createApp(kit: Kit, log: Logger, dashboard: string): App {
     authenticate: makeAuthenticate(kit),
     branches: () => kit.store.state.branches,
     hasPackage: (code) => kit.store.state.package(code) !== undefined,
+    incoming: join(kit.config.data, 'incoming'),
     mounted: [],
   };
   mountSystem(mounting, kit);
@@ -80,7 +89,12 @@ export function createApp(kit: Kit, log: Logger, dashboard: string): App {
   mountPeople(mounting, kit);
   mountPushKeys(mounting, kit);
   mountSetUp(mounting, kit);
+  mountSetUpHelp(mounting, kit);
   mountJobs(mounting, kit);
+  mountCorrections(mounting, kit);
+  mountUnderWay(mounting, kit);
+  mountPhotos(mounting, kit);
+  mountImports(mounting, kit);
   mountJobList(mounting, kit);
   mountClaims(mounting, kit);
   mountBookings(mounting, kit);
@@ -90,8 +104,10 @@ export function createApp(kit: Kit, log: Logger, dashboard: string): App {
   mountProducts(mounting, kit);
   mountComeBack(mounting, kit);
   mountQuote(mounting, kit);
+  mountUsual(mounting, kit);
   mountWeeks(mounting, kit);
   mountExports(mounting, kit);
+  mountAudit(mounting, kit);
   mountMailbox(mounting, kit);
   mountDocs(router, () => describeApi(mounting.mounted, kit.version));
 

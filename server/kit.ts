@@ -1,7 +1,9 @@
 import type { Store } from '#db/store';
 import type { Clock } from './clock';
 import type { Config } from './config';
+import type { ImportDesk } from './features/imports/import-desk';
 import type { Outbox } from './mail/outbox';
+import type { PhotoStore } from './storage/photo-store';
 import type { PasswordThread } from './workers/password-thread';
 import type { ReadPool } from './workers/read-pool';
 
@@ -15,5 +17,9 @@ export interface Kit {
   /** Password checks, on a thread of their own. */
   passwords: PasswordThread;
   outbox: Outbox;
+  /** Where the bytes of photos lie. */
+  photos: PhotoStore;
+  /** Files being checked and written. */
+  imports: ImportDesk;
   version: string;
 }

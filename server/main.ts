@@ -7,8 +7,10 @@ import { Store } from '#db/store';
 import { createApp } from './app';
 import { fixedClock, realClock } from './clock';
 import { ConfigRefused, readConfig } from './config';
+import { ImportDesk } from './features/imports/import-desk';
 import type { Kit } from './kit';
 import { Outbox } from './mail/outbox';
+import { photoStoreOf } from './storage/photo-store';
 import { PasswordThread } from './workers/password-thread';
 import { ReadPool } from './workers/read-pool';
 import { readSecret } from './auth/secret';
@@ -39,6 +41,8 @@ async function main(): Promise<void> {
     reads: new ReadPool(store.file),
     passwords: new PasswordThread(),
     outbox: new Outbox(store, config, log),
+    photos: photoStoreOf(config),
+    imports: new ImportDesk(),
     version,
   };
   const seeded = await offerDemo(kit);
@@ -52,7 +56,12 @@ async function main(): Promise<void> {
   const stop = (): void => {
     server.close();
     server.closeAllConnections();
-    void Promise.all([kit.reads.close(), kit.passwords.close(), kit.outbox.close()]).then(() => {
+    void Promise.all([
+      kit.imports.close(),
+      kit.reads.close(),
+      kit.passwords.close(),
+      kit.outbox.close(),
+    ]).then(() => {
       store.close();
       process.exit(0);
     });

@@ -2,6 +2,7 @@ import type { Knex } from 'knex';
 import * as network from './0001-network';
 import * as jobs from './0002-jobs';
 import * as underneath from './0003-underneath';
+import * as jobsByHand from './0004-jobs-by-hand';
 
 interface Migration {
   name: string;
@@ -14,6 +15,7 @@ export const migrations: readonly Migration[] = [
   { name: '0001-network', ...network },
   { name: '0002-jobs', ...jobs },
   { name: '0003-underneath', ...underneath },
+  { name: '0004-jobs-by-hand', ...jobsByHand },
 ];
 
 /** Hands the list to knex without reading a folder, so that it is the same from source, tests and the built server. */

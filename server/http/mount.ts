@@ -1,11 +1,12 @@
 import type { Request, Response, Router } from 'express';
 import type * as z from 'zod';
-import type { Endpoint, Output } from '#shared/contracts/endpoint';
+import type { Endpoint, Input, Output } from '#shared/contracts/endpoint';
 import type { FieldProblem } from '#shared/contracts/fields';
 import { notFound, Refusal, refuseInput } from '#shared/domain/refusal';
 import { Scope, type ScopedBranch } from '#db/scope';
 import type { Authenticate, Caller } from '../auth/caller';
 import { readBody } from './read-body';
+import { dropReceived, readUpload, type ReceivedFile, type ReceivedImage } from './read-upload';
 import { joined, problemsOf } from '#shared/contracts/read-problems';
 
 /** Everything a handler is given; it never sees the request. */
@@ -34,17 +35,25 @@ export interface Reply<Out> {
   stream?: (response: Response) => Promise<void>;
 }
 
-type Parsed<T> = T extends z.ZodType ? z.output<T> : undefined;
+type Parsed<T> = T extends z.ZodType
+  ? z.output<T>
+  : T extends 'image'
+    ? ReceivedImage
+    : T extends 'file'
+      ? ReceivedFile
+      : undefined;
 type Answer<O extends Output> = O extends z.ZodType
   ? z.input<O>
   : O extends 'nothing'
     ? undefined
-    : string;
+    : O extends 'image'
+      ? Buffer
+      : string;
 
 export type Handler<
   P extends z.ZodObject,
   Q extends z.ZodObject,
-  B extends z.ZodType | null,
+  B extends Input,
   O extends Output,
 > = (
   call: Call<z.output<P>, z.output<Q>, Parsed<B>>,
@@ -70,6 +79,8 @@ export interface Mounting {
   authenticate: Authenticate;
   /** All branches there are, to make a scope from a grant. */
   branches: () => readonly ScopedBranch[];
+  /** Folder into which uploaded files are received. */
+  incoming: string;
   /** Whether the catalogue has a package of this code. */
   hasPackage: (code: string) => boolean;
   /** Every contract mounted, for the tests that walk them. */
@@ -83,7 +94,7 @@ export interface Mounting {
 export function mount<
   P extends z.ZodObject,
   Q extends z.ZodObject,
-  B extends z.ZodType | null,
+  B extends Input,
   O extends Output,
 >(
   mounting: Mounting,
@@ -103,14 +114,12 @@ export function mount<
     const params = endpoint.params.safeParse(request.params);
     const named = { caller, scope, branch, params: params.data };
     if (exists && params.success && !exists({ ...named, params: params.data })) throw notFound();
-    const raw = endpoint.body
-      ? await readBody(request, response, endpoint.path.endsWith('/batch') ? 'batch' : 'single')
-      : undefined;
+    const raw = await readInput(endpoint, request, response, mounting.incoming);
     const broken = [
       ...unknownPackages(endpoint.query, request, mounting.hasPackage),
       ...(rules?.(raw, named) ?? []),
     ];
-    const input = parseInput(endpoint, params, request, raw, broken);
+    const input = await orDropped(raw, () => parseInput(endpoint, params, request, raw, broken));
     const reply = await handler({
       ...input,
       caller,
@@ -130,6 +139,28 @@ export function mount<
 export function namedBranch(call: Pick<Call, 'branch'>): ScopedBranch {
   if (!call.branch) throw notFound();
   return call.branch;
+}
+
+/** What was sent: the JSON of a body, or an upload; nothing of a call that takes none. */
+function readInput(
+  { body, path }: Endpoint,
+  request: Request,
+  response: Response,
+  incoming: string,
+): Promise<unknown> {
+  if (body === null) return Promise.resolve(undefined);
+  if (typeof body === 'string') return readUpload(body, request, response, incoming);
+  return readBody(request, response, path.endsWith('/batch') ? 'batch' : 'single');
+}
+
+/** Parses; a file that was received with a call that is refused is not left lying. */
+async function orDropped<T>(raw: unknown, parse: () => T): Promise<T> {
+  try {
+    return parse();
+  } catch (error) {
+    await dropReceived(raw);
+    throw error;
+  }
 }
 
 function checkAccess(endpoint: Endpoint, caller: Caller): void {
@@ -152,7 +183,7 @@ function scopeOf(caller: Caller, branches: readonly ScopedBranch[]): Scope {
     : Scope.ofGrant(branches, caller);
 }
 
-function parseInput<P extends z.ZodObject, Q extends z.ZodObject, B extends z.ZodType | null>(
+function parseInput<P extends z.ZodObject, Q extends z.ZodObject, B extends Input>(
   endpoint: { query: Q; body: B },
   params: z.ZodSafeParseResult<z.output<P>>,
   request: Request,
@@ -160,7 +191,8 @@ function parseInput<P extends z.ZodObject, Q extends z.ZodObject, B extends z.Zo
   broken: readonly FieldProblem[],
 ): { params: z.output<P>; query: z.output<Q>; body: Parsed<B> } {
   const query = endpoint.query.safeParse(request.query);
-  const body = endpoint.body?.safeParse(raw);
+  const schema: z.ZodType | null = typeof endpoint.body === 'string' ? null : endpoint.body;
+  const body = schema?.safeParse(raw);
   const problems = joined(
     params.success ? [] : problemsOf(params.error),
     query.success ? [] : queryProblems(query.error),
@@ -170,7 +202,7 @@ function parseInput<P extends z.ZodObject, Q extends z.ZodObject, B extends z.Zo
   if (!params.success || !query.success || (body && !body.success) || problems.length > 0) {
     throw refuseInput(problems);
   }
-  return { params: params.data, query: query.data, body: body?.data as Parsed<B> };
+  return { params: params.data, query: query.data, body: (schema ? body?.data : raw) as Parsed<B> };
 }
 
 /** Packages asked for that the catalogue does not have: told with every other problem (rules 57 and 60). */
@@ -211,6 +243,7 @@ async function send(
   response.status(reply.status ?? usual);
   if (typeof out === 'object') sendJson(response, out.parse(reply.body));
   else if (out === 'nothing') response.end();
+  else if (out === 'image') response.type('image/jpeg').end(reply.body);
   else response.type(out).send(reply.body);
 }
 

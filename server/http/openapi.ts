@@ -53,10 +53,7 @@ function operation(endpoint: Endpoint): Json {
       ...parametersOf(endpoint.query, 'query'),
     ],
     ...(endpoint.body && {
-      requestBody: {
-        required: true,
-        content: { 'application/json': { schema: bodyOf(endpoint, endpoint.body) } },
-      },
+      requestBody: { required: true, content: contentOf(endpoint, endpoint.body) },
     }),
     responses: { ...successes(endpoint), default: PROBLEM },
   };
@@ -67,6 +64,20 @@ const BATCH_ITEMS: ReadonlyMap<string, z.ZodType> = new Map<string, z.ZodType>([
   [putJobBatch.path, jobContent.extend({ jobRef: reference })],
   [putClaimBatch.path, claimContent.extend({ claimRef: reference })],
 ]);
+
+/** A body by its media type. Source: OpenAPI Specification 3.1.0, "Considerations for File Uploads". */
+function contentOf(endpoint: Endpoint, body: NonNullable<Endpoint['body']>): Json {
+  if (body === 'image') return { 'image/jpeg': {}, 'image/png': {} };
+  if (body === 'file') {
+    const file = { type: 'string', contentMediaType: 'text/csv' };
+    return {
+      'multipart/form-data': {
+        schema: { type: 'object', properties: { file }, required: ['file'] },
+      },
+    };
+  }
+  return { 'application/json': { schema: bodyOf(endpoint, body) } };
+}
 
 function bodyOf(endpoint: Endpoint, body: z.ZodType): Json {
   const schema = schemaOf(body, 'input');
@@ -95,7 +106,9 @@ function successes(endpoint: Endpoint): Json {
       ? { 'application/json': { schema: schemaOf(endpoint.out, 'output') } }
       : endpoint.out === 'csv'
         ? { 'text/csv': { schema: { type: 'string' } } }
-        : undefined;
+        : endpoint.out === 'image'
+          ? { 'image/jpeg': {} }
+          : undefined;
   return Object.fromEntries(
     endpoint.statuses.map((status) => [
       String(status),
@@ -107,6 +120,7 @@ function successes(endpoint: Endpoint): Json {
 const DESCRIPTIONS: Record<number, string> = {
   200: 'Done, or read.',
   201: 'Created.',
+  202: 'Taken up; ask again how far it is.',
   204: 'Done; nothing to say.',
 };
 

@@ -1,6 +1,7 @@
 import * as z from 'zod';
 import { defineEndpoint } from './endpoint';
 import { code, EVERYONE, name, noParams, noQuery, role } from './fields';
+import { MAIL_KINDS } from '#shared/domain/mail-kinds';
 
 /** Passwords have at least 12 characters (rule 65); bcrypt reads 72 bytes, so longer ones are refused rather than cut. */
 export const password = z
@@ -173,4 +174,34 @@ export const endSignIns = defineEndpoint({
   body: null,
   out: 'nothing',
   statuses: [204],
+});
+
+const mailChoice = z.strictObject({ kind: z.enum(MAIL_KINDS), wanted: z.boolean() });
+
+export const listMailChoices = defineEndpoint({
+  method: 'get',
+  path: '/api/auth/mails',
+  topic: 'Signing in',
+  summary: 'Which mails the person signed in may receive and does.',
+  access: EVERYONE,
+  scope: 'none',
+  params: noParams,
+  query: noQuery,
+  body: null,
+  out: z.strictObject({ items: z.array(mailChoice) }),
+  statuses: [200],
+});
+
+export const chooseMails = defineEndpoint({
+  method: 'put',
+  path: '/api/auth/mails',
+  topic: 'Signing in',
+  summary: 'Choose which mails to receive; kinds left out stay as they are.',
+  access: EVERYONE,
+  scope: 'none',
+  params: noParams,
+  query: noQuery,
+  body: z.strictObject({ items: z.array(mailChoice).max(MAIL_KINDS.length) }),
+  out: z.strictObject({ items: z.array(mailChoice) }),
+  statuses: [200],
 });

@@ -12,14 +12,20 @@ export type Access = 'public' | { readonly roles: readonly Role[]; readonly push
  */
 export type EndpointScope = 'branches' | 'network-reference' | 'none';
 
-/** What leaves: a JSON schema, a streamed CSV, a page of HTML, or nothing (204). */
-export type Output = z.ZodType | 'csv' | 'html' | 'nothing';
+/** What leaves: a JSON schema, a streamed CSV, a page of HTML, an image, or nothing (204). */
+export type Output = z.ZodType | 'csv' | 'html' | 'image' | 'nothing';
+
+/** A body that is no JSON: the bytes of a JPEG or PNG, or a form with one file in its part `file`. */
+export type Upload = 'image' | 'file';
+
+/** What comes in: a JSON schema, an upload, or `null` for nothing. */
+export type Input = z.ZodType | Upload | null;
 
 /** One call of the API as both sides see it. Every field is required: leaving one out does not compile. */
 export interface Endpoint<
   Params extends z.ZodObject = z.ZodObject,
   Query extends z.ZodObject = z.ZodObject,
-  Body extends z.ZodType | null = z.ZodType | null,
+  Body extends Input = Input,
   Out extends Output = Output,
 > {
   readonly method: 'get' | 'put' | 'post' | 'delete';
@@ -42,7 +48,7 @@ export interface Endpoint<
 export function defineEndpoint<
   Params extends z.ZodObject,
   Query extends z.ZodObject,
-  Body extends z.ZodType | null,
+  Body extends Input,
   Out extends Output,
 >(endpoint: Endpoint<Params, Query, Body, Out>): Endpoint<Params, Query, Body, Out> {
   return endpoint;
@@ -53,7 +59,9 @@ export type OutOf<E extends Endpoint> = E['out'] extends z.ZodType
   ? z.output<E['out']>
   : E['out'] extends 'nothing'
     ? undefined
-    : string;
+    : E['out'] extends 'image'
+      ? Blob
+      : string;
 
 export type ParamsOf<E extends Endpoint> = z.output<E['params']>;
 export type QueryOf<E extends Endpoint> = z.output<E['query']>;

@@ -1,19 +1,26 @@
 import type { Endpoint } from './endpoint';
+import * as audit from './audit';
 import * as auth from './auth';
 import * as bookings from './bookings';
 import * as claims from './claims';
 import * as comeBack from './come-back';
+import * as corrections from './corrections';
 import * as csvExports from './exports';
+import * as imports from './imports';
 import * as jobList from './job-list';
 import * as jobs from './jobs';
 import * as margin from './margin';
 import * as overrun from './overrun';
 import * as people from './people';
+import * as photos from './photos';
 import * as products from './products';
 import * as quote from './quote';
 import * as rot from './rot';
 import * as setUp from './set-up';
+import * as setUpHelp from './set-up-help';
 import * as system from './system';
+import * as underWay from './under-way';
+import * as usual from './usual';
 import * as weeks from './weeks';
 
 /** Every call of the API: what is mounted, documented and walked by the tests. */
@@ -21,7 +28,12 @@ export const endpoints: readonly Endpoint[] = [
   auth,
   people,
   setUp,
+  setUpHelp,
   jobs,
+  corrections,
+  underWay,
+  photos,
+  imports,
   jobList,
   claims,
   bookings,
@@ -31,8 +43,10 @@ export const endpoints: readonly Endpoint[] = [
   products,
   comeBack,
   quote,
+  usual,
   weeks,
   csvExports,
+  audit,
   system,
 ].flatMap((topic) => Object.values(topic).filter(isEndpoint));
 

@@ -33,7 +33,7 @@ import {
   ZONES,
 } from '#shared/domain/vocabulary';
 
-const stageMinutes = z.strictObject(
+export const stageMinutes = z.strictObject(
   Object.fromEntries(STAGES.map((stage) => [stage, minutes.optional()])) as Record<
     (typeof STAGES)[number],
     z.ZodOptional<typeof minutes>
@@ -62,13 +62,13 @@ const finding = z.strictObject({
   note: prose.optional(),
 });
 
-const consumable = z.strictObject({
+export const consumable = z.strictObject({
   kind: z.enum(CONSUMABLE_KINDS),
   quantity: z.int().min(0).max(100_000),
   unitCostCents: cents.optional(),
 });
 
-const checks = z.strictObject(
+export const checks = z.strictObject(
   Object.fromEntries(CHECKS.map((check) => [check, z.enum(CHECK_ANSWERS).optional()])) as Record<
     (typeof CHECKS)[number],
     z.ZodOptional<z.ZodEnum<{ yes: 'yes'; no: 'no'; na: 'na' }>>
@@ -82,6 +82,19 @@ const invoice = z.strictObject({
   totalCents: cents.optional(),
 });
 
+/** What the owner agreed to beyond the quote, on the day it was agreed (rule 76). */
+export const extra = z.strictObject({
+  on: date,
+  minutes: minutes.default(0),
+  priceCents: cents.optional(),
+  note: prose.optional(),
+});
+
+export const workshop = z.strictObject({
+  temperatureC: z.number().min(-40).max(60).optional(),
+  humidityPct: z.number().min(0).max(100).optional(),
+});
+
 /** A completed job as a branch sends it. References to other rows and the order of dates are checked apart, so that all problems come at once. */
 export const jobContent = z.strictObject({
   vehicle,
@@ -90,17 +103,7 @@ export const jobContent = z.strictObject({
   startedOn: date.optional(),
   completedOn: date,
   estimate: z.strictObject({ priceCents: cents, stages: stageMinutes }).optional(),
-  agreedExtras: z
-    .array(
-      z.strictObject({
-        on: date,
-        minutes: minutes.default(0),
-        priceCents: cents.optional(),
-        note: prose.optional(),
-      }),
-    )
-    .max(100)
-    .optional(),
+  agreedExtras: z.array(extra).max(100).optional(),
   actual: z.strictObject({ stages: stageMinutes }),
   products: z
     .array(z.strictObject({ product: code, ml: millilitres }))
@@ -110,12 +113,7 @@ export const jobContent = z.strictObject({
   boughtInCents: cents.optional(),
   findings: z.array(finding).max(200).optional(),
   checks: checks.optional(),
-  workshop: z
-    .strictObject({
-      temperatureC: z.number().min(-40).max(60).optional(),
-      humidityPct: z.number().min(0).max(100).optional(),
-    })
-    .optional(),
+  workshop: workshop.optional(),
   /** Absent: the stored invoice stays. `null`: it is removed (rule 73). */
   invoice: invoice.nullable().optional(),
   notes: prose.optional(),
@@ -140,7 +138,8 @@ export const putJob = defineEndpoint({
   access: SENDERS,
   scope: 'branches',
   params: jobParams,
-  query: noQuery,
+  /** `via=form`: typed into the product's own form, which is kept as the source of the revision (rule 85). */
+  query: z.strictObject({ via: z.enum(['form']).optional() }),
   body: jobContent,
   out: putJobAnswer,
   statuses: [201, 200],

@@ -63,3 +63,18 @@ export const changePerson = defineEndpoint({
   out: person,
   statuses: [200],
 });
+
+/** 409 when the person has a password already or is not active. */
+export const inviteAgain = defineEndpoint({
+  method: 'post',
+  path: '/api/people/:id/invitation',
+  topic: 'People',
+  summary: 'Mail the invitation once more; the link mailed before stops working.',
+  access: HEAD_OFFICE,
+  scope: 'none',
+  params: z.strictObject({ id: z.coerce.number().int().min(1) }),
+  query: noQuery,
+  body: null,
+  out: 'nothing',
+  statuses: [204],
+});

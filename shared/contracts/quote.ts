@@ -38,16 +38,19 @@ export const quoteQuery = z.strictObject({
     .optional(),
 });
 
+/** The set that an answer is made from (rule 48). */
+export const quoteBasis = z.strictObject({
+  kind: z.enum(QUOTE_KINDS),
+  source: z.enum(['branch', 'network']).nullable(),
+  cars: z.int(),
+});
+
 export const quoteAnswer = z.strictObject({
   /** Today at the branch. */
   on: date,
   ageBand: z.enum(AGE_BANDS),
   /** The nearest set with at least 30 cars (rule 48); `source` null and no cars when none reaches 30. */
-  basis: z.strictObject({
-    kind: z.enum(QUOTE_KINDS),
-    source: z.enum(['branch', 'network']).nullable(),
-    cars: z.int(),
-  }),
+  basis: quoteBasis,
   labour: z.strictObject({
     /** Quantiles of the cars' totals, rounded half up; those of the stages are each their own and do not add (rule 49). */
     p50Minutes: wholeMinutes,

@@ -19,6 +19,8 @@ const PEOPLE: Record<Role, 'recorder' | 'manager' | 'lead' | 'office'> = {
   regional_lead: 'lead',
   head_office: 'office',
 };
+/** Whether a call takes a JSON body; uploads are walked apart. */
+const isJson = ({ body }: Endpoint): boolean => typeof body === 'object' && body !== null;
 const tokenOf = (role: Role): string => network[PEOPLE[role]];
 const rolesOf = ({ access }: Endpoint): readonly Role[] =>
   access === 'public' ? ROLES : access.roles;
@@ -27,7 +29,7 @@ const call = (
   token: string | undefined,
   address = addressOf(endpoint),
 ): Promise<Answer> =>
-  app.call(endpoint.method, address, { token, ...(endpoint.body && { body: { zzz: 1 } }) });
+  app.call(endpoint.method, address, { token, ...(isJson(endpoint) && { body: { zzz: 1 } }) });
 const pathsIn = ({ body }: Answer): string[] =>
   ((body?.problems ?? []) as { path: string }[]).map(({ path }) => path);
 
@@ -111,7 +113,7 @@ describe.each(contracts)('%s', (_, endpoint) => {
     expect(pathsIn(answer)).toEqual(expect.arrayContaining(['/query/zzz', '/query/__proto__']));
   });
 
-  if (endpoint.body) {
+  if (isJson(endpoint)) {
     it('given an unknown field, answers 422 and names it (rule 57)', async () => {
       const answer = await call(endpoint, token());
       expect([answer.status, pathsIn(answer)]).toEqual([422, expect.arrayContaining(['/zzz'])]);
@@ -133,6 +135,16 @@ describe.each(contracts)('%s', (_, endpoint) => {
         expect([answer.status, answer.body.status]).toEqual([status, status]);
         expect(answer.headers.get('content-type')).toContain('application/problem+json');
       }
+    });
+  }
+
+  if (typeof endpoint.body === 'string') {
+    it('given JSON instead of an upload, answers 415 as a problem', async () => {
+      const answer = await app.call(endpoint.method, addressOf(endpoint), {
+        token: token(),
+        body: { zzz: 1 },
+      });
+      expect([answer.status, answer.body.status]).toEqual([415, 415]);
     });
   }
 

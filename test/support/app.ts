@@ -12,7 +12,9 @@ import { createApp } from '#server/app';
 import { fixedClock } from '#server/clock';
 import { readConfig } from '#server/config';
 import type { Kit } from '#server/kit';
+import { ImportDesk } from '#server/features/imports/import-desk';
 import { Outbox } from '#server/mail/outbox';
+import { photoStoreOf } from '#server/storage/photo-store';
 import { PasswordThread } from '#server/workers/password-thread';
 import { ReadPool } from '#server/workers/read-pool';
 
@@ -58,6 +60,8 @@ export class TestApp {
       reads: new ReadPool(store.file),
       passwords: new PasswordThread(CHEAP),
       outbox: new Outbox(store, config, log),
+      photos: photoStoreOf(config),
+      imports: new ImportDesk(),
       version: '0.0.0-test',
     };
     const app = createApp(kit, log, join(folder, 'no-dashboard'));
@@ -141,6 +145,7 @@ export class TestApp {
     const { kit, server } = this;
     server.closeAllConnections();
     await new Promise((resolve) => server.close(resolve));
+    await kit.imports.close();
     await Promise.all([kit.reads.close(), kit.passwords.close(), kit.outbox.close()]);
     kit.store.close();
     if (after === 'remove') rmSync(this.folder, { recursive: true, force: true });

@@ -4,6 +4,9 @@ import { homeOf } from './core/session/home';
 import { forRoles, signedIn } from './core/session/role-guard';
 import { Session } from './core/session/session';
 
+const senders = forRoles('recorder', 'site_manager', 'head_office');
+const managers = forRoles('site_manager', 'head_office');
+const headOffice = forRoles('head_office');
 const readers = forRoles('site_manager', 'regional_lead', 'head_office');
 
 /** Every page, each loaded when it is opened. */
@@ -64,6 +67,48 @@ export const routes: Routes = [
         loadChildren: () => import('./features/hand-back/hand-back.routes'),
       },
       {
+        path: 'jobs/:branch/:jobRef/correct',
+        title: 'Correct a job',
+        canActivate: [senders],
+        loadChildren: () => import('./features/send/send.routes'),
+      },
+      {
+        path: 'voided',
+        title: 'Voided jobs',
+        canActivate: [managers],
+        loadChildren: () => import('./features/voided/voided.routes'),
+      },
+      {
+        path: 'send',
+        title: 'Send a job',
+        canActivate: [senders],
+        loadChildren: () => import('./features/send/send.routes'),
+      },
+      {
+        path: 'import',
+        title: 'Import',
+        canActivate: [managers],
+        loadChildren: () => import('./features/import/import.routes'),
+      },
+      {
+        path: 'set-up',
+        title: 'Set-up',
+        canActivate: [headOffice],
+        loadChildren: () => import('./features/set-up/set-up.routes'),
+      },
+      {
+        path: 'audit',
+        title: 'Audit trail',
+        canActivate: [headOffice],
+        loadChildren: () => import('./features/audit/audit.routes'),
+      },
+      {
+        path: 'first-run',
+        title: 'First steps',
+        canActivate: [headOffice],
+        loadChildren: () => import('./features/first-run/first-run.routes'),
+      },
+      {
         path: 'come-backs',
         title: 'Come-backs',
         canActivate: [readers],
@@ -87,7 +132,7 @@ export const routes: Routes = [
       {
         path: 'mailbox',
         title: 'Mailbox',
-        canActivate: [forRoles('head_office')],
+        canActivate: [headOffice],
         loadChildren: () => import('./features/mailbox/mailbox.routes'),
       },
       {

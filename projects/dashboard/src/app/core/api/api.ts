@@ -20,7 +20,11 @@ type Needed<Name extends string, Value> =
     : { readonly [K in Name]: Value };
 type BodyInput<E extends Endpoint> = E['body'] extends z.ZodType
   ? { readonly body: z.input<E['body']> }
-  : { readonly body?: undefined };
+  : E['body'] extends 'image'
+    ? { readonly body: Blob }
+    : E['body'] extends 'file'
+      ? { readonly body: FormData }
+      : { readonly body?: undefined };
 
 /** What a call is made with, as its contract asks. */
 export type RequestOf<E extends Endpoint> = Needed<'params', ParamsOf<E>> &
@@ -42,6 +46,11 @@ export type Download =
   | { readonly kind: 'coming'; readonly bytes: number }
   | { readonly kind: 'whole'; readonly file: Blob };
 
+/** A file or photo on its way there: how much of it has gone, then what came back. */
+export type Upload<T> =
+  | { readonly kind: 'going'; readonly bytes: number; readonly of: number | undefined }
+  | { readonly kind: 'answered'; readonly answer: Answer<T> };
+
 /** The one way from a page to the server: a contract in, its typed answer out. */
 @Injectable({ providedIn: 'root' })
 export class Api {
@@ -59,6 +68,24 @@ export class Api {
         responseType: endpoint.out === 'csv' || endpoint.out === 'html' ? 'text' : 'json',
       } as { observe: 'response'; responseType: 'json' })
       .pipe(map((response) => answerOf<E>(response)));
+  }
+
+  /** Sends a file or photo and tells how much of it has gone, then the answer; unsubscribing cancels it. */
+  upload<E extends Endpoint>(endpoint: E, request: RequestOf<E>): Observable<Upload<OutOf<E>>> {
+    const { params, query, body, headers } = request as LooseRequest;
+    return this.http
+      .request(endpoint.method, requestUrl(endpoint.path, params, query), {
+        body,
+        headers,
+        context: new HttpContext().set(NEEDS_TOKEN, endpoint.access !== 'public'),
+        observe: 'events',
+        reportProgress: true,
+        responseType: 'json',
+      })
+      .pipe(
+        map((event) => uploadOf<E>(event)),
+        filter((step) => step !== undefined),
+      );
   }
 
   /** Fetches a file with the token, which a plain link could not carry; unsubscribing cancels it. */
@@ -106,6 +133,14 @@ function answerOf<E extends Endpoint>(response: HttpResponse<unknown>): Answer<O
     etag: response.headers.get('ETag') ?? undefined,
     status: response.status,
   };
+}
+
+function uploadOf<E extends Endpoint>(event: HttpEvent<unknown>): Upload<OutOf<E>> | undefined {
+  if (event.type === HttpEventType.UploadProgress) {
+    return { kind: 'going', bytes: event.loaded, of: event.total };
+  }
+  if (event.type !== HttpEventType.Response) return undefined;
+  return { kind: 'answered', answer: answerOf<E>(event) };
 }
 
 function downloadOf(event: HttpEvent<Blob>): Download | undefined {

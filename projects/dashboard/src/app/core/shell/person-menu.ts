@@ -30,6 +30,9 @@ export class PersonMenu {
     return role ? ROLE_NAMES[role] : '';
   });
   protected readonly headOffice = computed(() => this.session.role() === 'head_office');
+  protected readonly mayImport = computed(
+    () => this.headOffice() || this.session.role() === 'site_manager',
+  );
   protected readonly themes = THEMES.map((theme) => ({ theme, name: THEME_NAMES[theme] }));
   protected readonly theme = this.choice.theme;
   protected readonly leaving = deed(() => this.session.signOut());

@@ -1,0 +1,4 @@
+import type { Mounting } from '../../http/mount';
+import type { Kit } from '../../kit';
+
+export function mountCorrections(_mounting: Mounting, _kit: Kit): void {}

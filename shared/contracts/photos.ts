@@ -1,0 +1,81 @@
+import * as z from 'zod';
+import { defineEndpoint } from './endpoint';
+import { EVERYONE, noQuery, reference, SENDERS } from './fields';
+
+/** Largest photo taken, in bytes. */
+export const LARGEST_PHOTO = 10 * 1024 * 1024;
+/** Most photos of one job. */
+export const MOST_PHOTOS = 200;
+
+const params = z.strictObject({ branch: z.string(), jobRef: reference, photo: reference });
+
+/** A photo as kept: re-encoded, so that it says neither where nor with what it was taken. */
+export const photo = z.strictObject({
+  /** The sender's own reference of the photo within its job; makes sending safe to repeat. */
+  photo: z.string(),
+  /** The finding it shows, by its reference, or the car as a whole. */
+  finding: z.string().nullable(),
+  width: z.int(),
+  height: z.int(),
+  bytes: z.int(),
+  receivedAt: z.string(),
+  by: z.string(),
+});
+export type Photo = z.output<typeof photo>;
+
+export const putPhoto = defineEndpoint({
+  method: 'put',
+  path: '/api/branches/:branch/jobs/:jobRef/photos/:photo',
+  topic: 'Photos',
+  summary:
+    'Send a photo (JPEG or PNG, at most 10 MB) of a job or of one of its findings; the job is accepted or under way. Kept without metadata.',
+  access: SENDERS,
+  scope: 'branches',
+  params,
+  query: z.strictObject({ finding: reference.optional() }),
+  body: 'image',
+  out: photo,
+  statuses: [201, 200],
+});
+
+export const listPhotos = defineEndpoint({
+  method: 'get',
+  path: '/api/branches/:branch/jobs/:jobRef/photos',
+  topic: 'Photos',
+  summary: 'The photos of a job, accepted or under way.',
+  access: EVERYONE,
+  scope: 'branches',
+  params: z.strictObject({ branch: z.string(), jobRef: reference }),
+  query: noQuery,
+  body: null,
+  out: z.strictObject({ items: z.array(photo) }),
+  statuses: [200],
+});
+
+export const getPhoto = defineEndpoint({
+  method: 'get',
+  path: '/api/branches/:branch/jobs/:jobRef/photos/:photo',
+  topic: 'Photos',
+  summary: 'A photo as JPEG, whole or small.',
+  access: EVERYONE,
+  scope: 'branches',
+  params,
+  query: z.strictObject({ size: z.enum(['small', 'whole']).default('whole') }),
+  body: null,
+  out: 'image',
+  statuses: [200],
+});
+
+export const removePhoto = defineEndpoint({
+  method: 'delete',
+  path: '/api/branches/:branch/jobs/:jobRef/photos/:photo',
+  topic: 'Photos',
+  summary: 'Take a photo off a job.',
+  access: { ...SENDERS, pushKey: false },
+  scope: 'branches',
+  params,
+  query: noQuery,
+  body: null,
+  out: 'nothing',
+  statuses: [204],
+});
