@@ -28,7 +28,7 @@ import { formatExactMoney } from '../../ui/format';
 import { LoadState } from '../../ui/load-state/load-state';
 import { Trouble } from '../../ui/trouble/trouble';
 import { proposeBill } from './bill-proposal';
-import { amountToType, parseAmount } from './parse-amount';
+import { amountToType, parseAmount } from '../../ui/parse-amount';
 
 const required: ValidatorFn = (control) => Validators.required(control);
 
