@@ -23,7 +23,7 @@ import { BODY_TYPES, type BodyType } from '#shared/domain/vocabulary';
 import { Catalogue } from '../../core/catalogue/catalogue';
 import { Trouble } from '../../ui/trouble/trouble';
 import { BODY_TYPE_NAMES } from '../../ui/words';
-import { type KnownMake, modelsFor } from './known-cars';
+import { type KnownMake, modelsFor } from '../../core/catalogue/known-cars';
 import { type AskedParts, marginToType, marginTyped, type QuoteQuestion } from './quote-question';
 
 const required: ValidatorFn = (control) =>

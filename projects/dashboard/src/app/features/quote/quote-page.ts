@@ -19,13 +19,14 @@ import { Catalogue } from '../../core/catalogue/catalogue';
 import { Session } from '../../core/session/session';
 import { Answer } from '../../ui/answer/answer';
 import { DefinitionLink } from '../../ui/definition-link/definition-link';
+import { EmptyNext } from '../../ui/empty-next/empty-next';
 import { currencySign, formatMonth, formatVolume } from '../../ui/format';
 import { LoadState } from '../../ui/load-state/load-state';
 import { TableTwin } from '../../ui/table-twin/table-twin';
 import { Trouble } from '../../ui/trouble/trouble';
 import { BODY_TYPE_NAMES } from '../../ui/words';
 import { chancePicture } from './chance-picture';
-import { knownCars, usualPackage } from './known-cars';
+import { knownCars, usualPackage } from '../../core/catalogue/known-cars';
 import { labourPicture } from './labour-picture';
 import { noPriceWords } from './no-price';
 import { priceLines, pricePicture } from './price-picture';
@@ -46,6 +47,7 @@ const LOOKED_THROUGH = 200;
     CsvLink,
     DefinitionLink,
     DotIntervalChart,
+    EmptyNext,
     LoadState,
     QuoteForm,
     TableTwin,

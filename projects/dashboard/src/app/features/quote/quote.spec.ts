@@ -1,7 +1,7 @@
 import { quoteAnswer } from '../../testing/quote-answers';
 import type { AnswerPart } from '../../ui/answer/answer';
 import { chancePicture } from './chance-picture';
-import { knownCars, modelsFor, usualPackage } from './known-cars';
+import { knownCars, modelsFor, usualPackage } from '../../core/catalogue/known-cars';
 import { labourPicture } from './labour-picture';
 import { noPriceWords } from './no-price';
 import { priceLines, pricePicture } from './price-picture';

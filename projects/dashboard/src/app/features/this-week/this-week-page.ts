@@ -13,6 +13,7 @@ import { ScopeState } from '../../core/scope-line/scope-state';
 import { Session } from '../../core/session/session';
 import { Answer } from '../../ui/answer/answer';
 import { DataTable } from '../../ui/data-table/data-table';
+import { EmptyNext } from '../../ui/empty-next/empty-next';
 import { LoadState } from '../../ui/load-state/load-state';
 import { narrowWindow } from '../../ui/narrow';
 import { TableTwin } from '../../ui/table-twin/table-twin';
@@ -34,6 +35,7 @@ const LIMIT = 200;
     BridgeChart,
     CsvLink,
     DataTable,
+    EmptyNext,
     LoadState,
     ScopeLine,
     TableTwin,
