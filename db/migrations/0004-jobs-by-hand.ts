@@ -72,9 +72,11 @@ export async function up(knex: Knex): Promise<void> {
       wanted integer not null,
       primary key (person_id, kind)
     ) strict, without rowid`,
-    `create index audit_by_subject on audit_events (subject, id)`,
-    `create index audit_by_action on audit_events (action, id)`,
-    `create index audit_by_actor on audit_events (actor, id)`,
+    // Without regard to case, because that is how the trail is searched: from the beginning of a word.
+    `create index audit_by_subject on audit_events (subject collate nocase, id)`,
+    `create index audit_by_action on audit_events (action collate nocase, id)`,
+    `create index audit_by_actor on audit_events (actor collate nocase, id)`,
+    `create index audit_by_time on audit_events (at, id)`,
     `create index jobs_voided on jobs (branch_id, voided_at) where voided_at is not null`,
   );
 }

@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto';
-import { sql } from '../database';
+import { sql, type Query } from '../database';
 import type { UnscopedDb } from '../unscoped-db';
 
 /** Who did something: a person, a push key, or the system itself. */
@@ -22,12 +22,17 @@ export interface Deed {
 export interface AuditEntry {
   at: string;
   actor: Actor;
-  /** What was done, a verb and a thing: `job.void`, `cost.set`, `export.margin`. */
+  /** What was done, a thing and a verb: `job.void`, `cost.set`, `export.margin`. */
   action: string;
   /** What it was done to, as a path without `/api`. */
   subject: string;
   branchId: number | null;
   detail: Record<string, unknown>;
+}
+
+/** Whatever reads rows of the whole network: the trail has no scope, and is head office's alone. */
+interface Reader {
+  all<Row>(query: Query): Row[];
 }
 
 interface StoredEvent {
@@ -67,7 +72,7 @@ export function recordAudit(db: UnscopedDb, entry: AuditEntry): void {
   db.run(sql('audit_events').insert({ ...row, hash: hashOf(row) }));
 }
 
-/** Who did something to a subject last, and when. Reads the trail backwards: for what is asked rarely. */
+/** Who did something to a subject last, and when. */
 export function findLastEvent(
   db: UnscopedDb,
   action: string,
@@ -75,6 +80,8 @@ export function findLastEvent(
 ): { actor: string; at: string } | undefined {
   return db.first(
     sql('audit_events')
+      // Found without regard to case, as the index has it, and told apart with: references of jobs differ by case.
+      .whereRaw('subject = ? collate nocase', [subject])
       .where({ action, subject })
       .orderBy('id', 'desc')
       .limit(1)
@@ -82,8 +89,18 @@ export function findLastEvent(
   );
 }
 
+/** What a check of the trail has found. */
+export interface AuditCheck {
+  /** Events that follow from each other, from the first on. */
+  events: number;
+  /** The first that does not, or null. */
+  brokenAt: number | null;
+  /** Hash of the last event that does. */
+  lastHash: string;
+}
+
 /** Reads the whole trail and checks every link; tells the first event that does not fit. */
-export function verifyAudit(db: UnscopedDb): { events: number; brokenAt: number | null } {
+export function verifyAudit(db: Reader): AuditCheck {
   let previous = GENESIS;
   let events = 0;
   let after = 0;
@@ -91,14 +108,14 @@ export function verifyAudit(db: UnscopedDb): { events: number; brokenAt: number 
     const page = db.all<StoredEvent>(
       sql('audit_events').where('id', '>', after).orderBy('id').limit(1000),
     );
-    if (page.length === 0) return { events, brokenAt: null };
+    if (page.length === 0) return { events, brokenAt: null, lastHash: previous };
     for (const event of page) {
       if (
         event.id !== events + 1 ||
         event.previous_hash !== previous ||
         event.hash !== hashOf(event)
       ) {
-        return { events, brokenAt: event.id };
+        return { events, brokenAt: event.id, lastHash: previous };
       }
       previous = event.hash;
       events += 1;

@@ -51,7 +51,7 @@ export async function restoreBackup(
         at: now.toISOString(),
         actor: { label: 'system', personId: null, pushKeyId: null, address: 'local' },
         action: 'database.restore',
-        subject: 'database',
+        subject: '/database',
         branchId: null,
         detail: { backup: path.basename(backup) },
       }),

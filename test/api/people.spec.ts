@@ -260,8 +260,8 @@ describe('the trail', () => {
       sql('audit_events').where('action', 'like', 'person.%').orderBy('id'),
     );
     expect(events.map(({ action, actor, subject }) => [action, actor, subject])).toEqual([
-      ['person.add', 'office@network.example', 'people/2'],
-      ['person.change', 'office@network.example', 'people/2'],
+      ['person.add', 'office@network.example', '/people/2'],
+      ['person.change', 'office@network.example', '/people/2'],
     ]);
     expect(JSON.parse(events[1]!.detail)).toEqual({
       before: { name: 'Ansa Moor', role: 'recorder', regions: [], branches: ['AAA'], active: true },

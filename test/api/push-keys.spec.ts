@@ -139,7 +139,7 @@ describe('a push key', () => {
     await revoke(id, 'CCC');
     const events = app.kit.store.unscoped.all(
       sql('audit_events')
-        .where({ subject: `branches/CCC/keys/${id}` })
+        .where({ subject: `/branches/CCC/keys/${id}` })
         .orderBy('id')
         .select('action', 'actor', 'detail'),
     );

@@ -60,7 +60,7 @@ export async function addPerson(
       at,
       actor,
       action: 'person.add',
-      subject: `people/${id}`,
+      subject: `/people/${id}`,
       branchId: null,
       detail: { ...details, invited: person.invited },
     });

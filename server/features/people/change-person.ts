@@ -44,7 +44,7 @@ export async function changePerson(
       at,
       actor,
       action: 'person.change',
-      subject: `people/${id}`,
+      subject: `/people/${id}`,
       branchId: null,
       detail: { before: traced(before), after: traced(after) },
     });

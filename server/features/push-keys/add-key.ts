@@ -27,7 +27,7 @@ export async function addKey(
     recordAudit(db, {
       ...by,
       action: 'key.add',
-      subject: `branches/${branch.code}/keys/${key.id}`,
+      subject: `/branches/${branch.code}/keys/${key.id}`,
       branchId: branch.id,
       detail: { label: key.label },
     });

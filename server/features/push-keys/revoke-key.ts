@@ -16,7 +16,7 @@ export async function revokeKey(
     recordAudit(db, {
       ...by,
       action: 'key.revoke',
-      subject: `branches/${branch.code}/keys/${id}`,
+      subject: `/branches/${branch.code}/keys/${id}`,
       branchId: branch.id,
       detail: {},
     });

@@ -20,7 +20,7 @@ export async function changeName(
       at: clock.now().toISOString(),
       actor: asActor(before, from.address),
       action: 'person.rename',
-      subject: `people/${personId}`,
+      subject: `/people/${personId}`,
       branchId: null,
       detail: { before: before.name, after: name },
     });

@@ -38,7 +38,7 @@ export async function changePassword(
       at,
       actor: asActor(person, from.address),
       action: 'password.change',
-      subject: `people/${person.id}`,
+      subject: `/people/${person.id}`,
       branchId: null,
       detail: { otherSignInsEnded: ended },
     });

@@ -61,7 +61,7 @@ export async function noteLockOut(
       at: tools.clock.now().toISOString(),
       actor: asActor(person, address),
       action: 'sign-in.lock-out',
-      subject: `people/${person.id}`,
+      subject: `/people/${person.id}`,
       branchId: null,
       detail: { failures, until: lockedUntil },
     }),

@@ -23,7 +23,7 @@ export async function signOut(
       at,
       actor: asActor(person, from.address),
       action: 'sign-in.end',
-      subject: `sign-ins/${signIn.id}`,
+      subject: `/sign-ins/${signIn.id}`,
       branchId: null,
       detail: {},
     });
@@ -44,7 +44,7 @@ export async function endEverySignIn(
       at,
       actor: asActor(person, from.address),
       action: 'sign-in.end-all',
-      subject: `people/${person.id}`,
+      subject: `/people/${person.id}`,
       branchId: null,
       detail: { ended },
     });

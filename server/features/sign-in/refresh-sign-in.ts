@@ -46,7 +46,7 @@ function takeStep(
       at,
       actor: asActor(person, address),
       action: 'sign-in.reused-cookie',
-      subject: `sign-ins/${signIn.id}`,
+      subject: `/sign-ins/${signIn.id}`,
       branchId: null,
       detail: { shown: shown.step, newest: signIn.step },
     });

@@ -34,7 +34,7 @@ export async function requestReset(tools: SignInTools, email: string, from: Orig
       at,
       actor: { label: 'nobody signed in', personId: null, pushKeyId: null, address: from.address },
       action: 'password.reset-request',
-      subject: `people/${login.id}`,
+      subject: `/people/${login.id}`,
       branchId: null,
       detail: { to: asActor(login, from.address).label },
     });

@@ -36,7 +36,7 @@ export async function setPassword(
       at,
       actor: asActor({ id: personId, email }, from.address),
       action: 'password.set',
-      subject: `people/${personId}`,
+      subject: `/people/${personId}`,
       branchId: null,
       detail: { by: purpose, signInsEnded: ended },
     });

@@ -45,7 +45,7 @@ export async function signIn(
       at,
       actor: asActor(person, from.address),
       action: 'sign-in.start',
-      subject: `sign-ins/${id}`,
+      subject: `/sign-ins/${id}`,
       branchId: null,
       detail: { device: from.device },
     });
