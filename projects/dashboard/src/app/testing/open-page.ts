@@ -29,7 +29,10 @@ export async function openPage<Page>(
       provideHttpClientTesting(),
       provideRouter([{ path: '**', children: [] }]),
       ...(role ? [{ provide: Session, useValue: session }] : []),
-      { provide: Catalogue, useValue: { today: signal('2026-02-02'), ...catalogue } },
+      {
+        provide: Catalogue,
+        useValue: { today: signal('2026-02-02'), value: signal(undefined), ...catalogue },
+      },
     ],
   }).overrideComponent(page, {
     remove: { imports: [ScopeLine] },

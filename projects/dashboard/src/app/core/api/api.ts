@@ -7,7 +7,18 @@ import {
   type HttpResponse,
 } from '@angular/common/http';
 import { inject, Injectable } from '@angular/core';
-import { catchError, filter, from, map, type Observable, switchMap, throwError } from 'rxjs';
+import {
+  catchError,
+  exhaustMap,
+  filter,
+  from,
+  map,
+  type Observable,
+  switchMap,
+  takeWhile,
+  throwError,
+  timer,
+} from 'rxjs';
 import type * as z from 'zod';
 import type { Endpoint, OutOf, ParamsOf, QueryOf } from '#shared/contracts/endpoint';
 import { NEEDS_TOKEN } from './needs-token';
@@ -117,6 +128,20 @@ export class Api {
     request: () => RequestOf<E> | undefined,
   ): Reading<OutOf<E>> {
     return readingOf(request, (asked) => this.call(endpoint, asked));
+  }
+
+  /** As `read`, but asked again every so many milliseconds while `goesOn` says so of the last answer: work under way on the server. */
+  follow<E extends Endpoint>(
+    endpoint: E,
+    request: () => RequestOf<E> | undefined,
+    { every, goesOn }: { readonly every: number; readonly goesOn: (body: OutOf<E>) => boolean },
+  ): Reading<OutOf<E>> {
+    return readingOf(request, (asked) =>
+      timer(0, every).pipe(
+        exhaustMap(() => this.call(endpoint, asked)),
+        takeWhile((answer) => goesOn(answer.body), true),
+      ),
+    );
   }
 }
 

@@ -46,7 +46,9 @@ export class CsvLink {
 
   readonly endpoint = input.required<Endpoint>();
   /** The filters of the screen, so that the file holds exactly its rows. */
-  readonly query = input.required<Readonly<Record<string, unknown>>>();
+  readonly query = input<Readonly<Record<string, unknown>>>({});
+  /** What the `:names` of its path are. */
+  readonly params = input<Readonly<Record<string, unknown>>>();
   readonly words = input.required<string>();
 
   protected readonly bytes = signal<number | undefined>(undefined);
@@ -64,7 +66,7 @@ export class CsvLink {
   protected fetch(): void {
     this.bytes.set(0);
     this.sentence.set(undefined);
-    const request = { query: this.query() } as RequestOf<Endpoint>;
+    const request = { params: this.params(), query: this.query() } as RequestOf<Endpoint>;
     this.running = this.api.download(this.endpoint(), request).subscribe({
       next: (step) => (step.kind === 'coming' ? this.bytes.set(step.bytes) : this.save(step.file)),
       error: (error: unknown) => {

@@ -23,6 +23,7 @@ import { Session } from '../../core/session/session';
 import { Answer } from '../../ui/answer/answer';
 import { keyOfFinding, placeOf } from '../../ui/come-back/come-back-words';
 import { DefinitionLink } from '../../ui/definition-link/definition-link';
+import { EmptyNext } from '../../ui/empty-next/empty-next';
 import { formatCount, formatCounted } from '../../ui/format';
 import { LoadState } from '../../ui/load-state/load-state';
 import { TableTwin } from '../../ui/table-twin/table-twin';
@@ -46,6 +47,7 @@ const SHOWN = 50;
     ComeBackRows,
     CsvLink,
     DefinitionLink,
+    EmptyNext,
     LoadState,
     MatChipsModule,
     RouterLink,

@@ -12,6 +12,7 @@ import { ScopeState } from '../../core/scope-line/scope-state';
 import { Session } from '../../core/session/session';
 import { Answer } from '../../ui/answer/answer';
 import { DataTable } from '../../ui/data-table/data-table';
+import { EmptyNext } from '../../ui/empty-next/empty-next';
 import { currencySign, formatCounted } from '../../ui/format';
 import { LoadState } from '../../ui/load-state/load-state';
 import { narrowWindow } from '../../ui/narrow';
@@ -40,6 +41,7 @@ const PAGE = 50;
     Answer,
     CsvLink,
     DataTable,
+    EmptyNext,
     JobList,
     LoadState,
     MatButton,

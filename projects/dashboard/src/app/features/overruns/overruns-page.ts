@@ -13,6 +13,7 @@ import { ScopeLine } from '../../core/scope-line/scope-line';
 import { ScopeState } from '../../core/scope-line/scope-state';
 import { Answer } from '../../ui/answer/answer';
 import { DataTable } from '../../ui/data-table/data-table';
+import { EmptyNext } from '../../ui/empty-next/empty-next';
 import { LoadState } from '../../ui/load-state/load-state';
 import { TableTwin } from '../../ui/table-twin/table-twin';
 import { carsOfGroup } from './cars-of-group';
@@ -29,6 +30,7 @@ import { groupingFrom, overrunsView } from './overruns-series';
     CsvLink,
     DataTable,
     DotIntervalChart,
+    EmptyNext,
     LoadState,
     MatChipsModule,
     QuantileStripChart,

@@ -19,6 +19,7 @@ import { ScopeState } from '../../core/scope-line/scope-state';
 import { Answer } from '../../ui/answer/answer';
 import { Caution } from '../../ui/caution/caution';
 import { DataTable } from '../../ui/data-table/data-table';
+import { EmptyNext } from '../../ui/empty-next/empty-next';
 import { LoadState } from '../../ui/load-state/load-state';
 import { TableTwin } from '../../ui/table-twin/table-twin';
 import { ComingNeed } from './coming-need';
@@ -39,6 +40,7 @@ const FIRST_ROWS = 10;
     CsvLink,
     DataTable,
     DotIntervalChart,
+    EmptyNext,
     LoadState,
     MatChipsModule,
     NgTemplateOutlet,

@@ -12,6 +12,7 @@ import { ScopeState } from '../../core/scope-line/scope-state';
 import { Answer } from '../../ui/answer/answer';
 import type { CellLink } from '../../ui/data-table/column';
 import { DefinitionLink } from '../../ui/definition-link/definition-link';
+import { EmptyNext } from '../../ui/empty-next/empty-next';
 import { LoadState } from '../../ui/load-state/load-state';
 import { TableTwin } from '../../ui/table-twin/table-twin';
 import type { UndersideArea } from '../../underside-map/underside-input';
@@ -34,6 +35,7 @@ import type { RotWords } from './rot-words';
     Answer,
     CsvLink,
     DefinitionLink,
+    EmptyNext,
     LoadState,
     ModelsTable,
     ScopeLine,
