@@ -10,6 +10,14 @@ const refusal = (environment: NodeJS.ProcessEnv): string => {
   return 'taken';
 };
 
+const BUCKET = {
+  UNDERSEAM_S3_ENDPOINT: 'https://s3.example.org',
+  UNDERSEAM_S3_BUCKET: 'photos',
+  UNDERSEAM_S3_REGION: 'local',
+  UNDERSEAM_S3_KEY_ID: 'id',
+  UNDERSEAM_S3_SECRET: 'words',
+};
+
 describe('readConfig', () => {
   it('given nothing, or only empty variables, has every default', () => {
     const defaults = {
@@ -54,6 +62,31 @@ describe('readConfig', () => {
     expect(refusal(environment)).toMatch(pattern);
     expect(refusal(environment)).not.toContain('\n');
   });
+
+  it('given every setting of a bucket for photos, takes them', () => {
+    expect(readConfig(BUCKET).bucket).toEqual({
+      endpoint: 'https://s3.example.org',
+      bucket: 'photos',
+      region: 'local',
+      keyId: 'id',
+      secret: 'words',
+    });
+  });
+
+  it('given some settings of a bucket only, names those that are missing', () => {
+    const { UNDERSEAM_S3_REGION: _region, UNDERSEAM_S3_KEY_ID: _id, ...some } = BUCKET;
+    expect(refusal(some)).toMatch(/UNDERSEAM_S3_REGION, UNDERSEAM_S3_KEY_ID too\.$/);
+    expect(refusal(some)).not.toContain('words');
+  });
+
+  it.each(['not an address', 'ftp://s3.example.org'])(
+    'given a bucket at %s, refuses the address',
+    (endpoint) => {
+      expect(refusal({ ...BUCKET, UNDERSEAM_S3_ENDPOINT: endpoint })).toMatch(
+        /UNDERSEAM_S3_ENDPOINT must be/,
+      );
+    },
+  );
 
   it('given several bad settings, names every one', () => {
     expect(refusal({ PORT: 'x', UNDERSEAM_DEMO: 'x', SMTP_URL: 'x' })).toMatch(

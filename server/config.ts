@@ -4,6 +4,15 @@ import { isDate } from '#shared/domain/calendar';
 /** A setting that cannot be used; its message is one clear sentence. */
 export class ConfigRefused extends Error {}
 
+/** Where photos are kept when not in the data folder: a bucket of a store that speaks S3. */
+export interface BucketSettings {
+  endpoint: string;
+  bucket: string;
+  region: string;
+  keyId: string;
+  secret: string;
+}
+
 export interface Config {
   port: number;
   /** The data folder. */
@@ -16,6 +25,8 @@ export interface Config {
   now: Date | undefined;
   /** Where mails link to; undefined: this machine at the port. */
   publicUrl: string;
+  /** Undefined: photos lie in the data folder. */
+  bucket: BucketSettings | undefined;
   production: boolean;
 }
 
@@ -46,8 +57,19 @@ const settings = z.object({
   UNDERSEAM_URL: z
     .url('UNDERSEAM_URL must be the address people open, such as https://example.org')
     .optional(),
+  UNDERSEAM_S3_ENDPOINT: z
+    .url({
+      protocol: /^https?$/,
+      error: 'UNDERSEAM_S3_ENDPOINT must be an address such as https://s3.example.org',
+    })
+    .optional(),
+  UNDERSEAM_S3_BUCKET: z.string().optional(),
+  UNDERSEAM_S3_REGION: z.string().optional(),
+  UNDERSEAM_S3_KEY_ID: z.string().optional(),
+  UNDERSEAM_S3_SECRET: z.string().optional(),
   NODE_ENV: z.string().optional(),
 });
+type Settings = z.output<typeof settings>;
 
 /** Reads and checks the environment; an empty variable counts as absent. Throws `ConfigRefused` naming every bad setting. */
 export function readConfig(environment: NodeJS.ProcessEnv): Config {
@@ -73,8 +95,28 @@ export function readConfig(environment: NodeJS.ProcessEnv): Config {
     smtpUrl: set.SMTP_URL,
     now: set.UNDERSEAM_NOW === undefined ? undefined : new Date(set.UNDERSEAM_NOW),
     publicUrl: set.UNDERSEAM_URL ?? `http://localhost:${set.PORT}`,
+    bucket: bucketOf(set),
     production,
   };
+}
+
+/** The bucket for photos: all of its settings, or none of them. */
+function bucketOf(set: Settings): BucketSettings | undefined {
+  const {
+    UNDERSEAM_S3_ENDPOINT: endpoint,
+    UNDERSEAM_S3_BUCKET: bucket,
+    UNDERSEAM_S3_REGION: region,
+    UNDERSEAM_S3_KEY_ID: keyId,
+    UNDERSEAM_S3_SECRET: secret,
+  } = set;
+  const given = Object.entries({ endpoint, bucket, region, key_id: keyId, secret });
+  if (given.every(([, value]) => value === undefined)) return undefined;
+  if (endpoint && bucket && region && keyId && secret) {
+    return { endpoint, bucket, region, keyId, secret };
+  }
+  const missing = given.filter(([, value]) => value === undefined);
+  const names = missing.map(([name]) => `UNDERSEAM_S3_${name.toUpperCase()}`);
+  throw new ConfigRefused(`To keep photos in a bucket, set ${names.join(', ')} too.`);
 }
 
 function isSmtpUrl(text: string): boolean {

@@ -1,4 +1,5 @@
 import type { Config } from '../config';
+import { BucketPhotoStore } from './bucket-photo-store';
 import { FolderPhotoStore } from './folder-photo-store';
 
 /** Keeps the bytes of photos under keys of our own making (letters, digits, `/`, `-`, `.`). */
@@ -13,5 +14,5 @@ export interface PhotoStore {
 
 /** The store that the settings name: an S3-compatible one, or else a folder in the data folder. */
 export function photoStoreOf(config: Config): PhotoStore {
-  return new FolderPhotoStore(config.data);
+  return config.bucket ? new BucketPhotoStore(config.bucket) : new FolderPhotoStore(config.data);
 }
