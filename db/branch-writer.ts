@@ -51,7 +51,7 @@ export class BranchWriter {
   private readonly state: NetworkState;
 
   constructor(
-    store: Store,
+    store: Pick<Store, 'writing' | 'state'>,
     readonly branch: ScopedBranch,
   ) {
     this.connection = store.writing;

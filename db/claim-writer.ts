@@ -54,7 +54,7 @@ export class ClaimWriter {
   private readonly connection: Connection;
 
   constructor(
-    store: Store,
+    store: Pick<Store, 'writing'>,
     readonly branch: ScopedBranch,
   ) {
     this.connection = store.writing;

@@ -1,6 +1,6 @@
 import { recordAudit } from '#db/queries/audit';
 import type { Store } from '#db/store';
-import { worldOf } from '#server/features/jobs/check-job';
+import { worldOf } from '#shared/contracts/check-job';
 import type { DemoNetwork } from './demo-network';
 import { costsKnownFrom } from './dated-costs';
 import { DEMO_SEED, generateNetwork } from './generate-network';

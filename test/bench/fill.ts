@@ -1,6 +1,6 @@
 import { BranchWriter } from '#db/branch-writer';
 import { Store } from '#db/store';
-import { acceptJob } from '#server/features/jobs/accept-job';
+import { acceptJob } from '#db/accept-job';
 import { setUpBench } from './bench-network';
 import { jobMaker } from './synthetic-jobs';
 

@@ -2,13 +2,13 @@ import type * as z from 'zod';
 import { ClaimWriter } from '#db/claim-writer';
 import type { ScopedBranch } from '#db/scope';
 import type { Store } from '#db/store';
-import { claimContent, type ClaimContent, type putClaimBatch } from '#shared/contracts/claims';
+import { readClaim } from '#shared/contracts/check-claim';
+import type { ClaimContent, putClaimBatch } from '#shared/contracts/claims';
 import { reference, type FieldProblem } from '#shared/contracts/fields';
 import { joined, problemsOf } from '#shared/contracts/read-problems';
-import { breaksOfClaim } from '#shared/domain/claim-rules';
 import { Refusal } from '#shared/domain/refusal';
-import { acceptClaim, type ClaimSending } from './accept-claim';
-import { breaksAgainstJob } from './breaks-against-job';
+import { acceptClaim, type ClaimSending } from '#db/accept-claim';
+import { breaksAgainstJob } from '#db/breaks-against-job';
 
 type BatchAnswer = z.input<typeof putClaimBatch.out>;
 type Result = BatchAnswer['results'][number];
@@ -41,18 +41,14 @@ function readItem(item: unknown, today: string): ReadItem {
   }
   const { claimRef, ...content } = item as Record<string, unknown>;
   const ref = reference.safeParse(claimRef);
-  const parsed = claimContent.safeParse(content);
-  const broken = breaksOfClaim(content, today);
-  if (ref.success && parsed.success && broken.length === 0) {
-    return { claimRef: ref.data, content: parsed.data };
-  }
+  const claim = readClaim(content, today);
+  if (ref.success && 'content' in claim) return { claimRef: ref.data, content: claim.content };
   return {
     claimRef: ref.data ?? (typeof claimRef === 'string' ? claimRef : null),
     raw: content,
     problems: joined(
       ref.success ? [] : problemsOf(ref.error, '/claimRef'),
-      parsed.success ? [] : problemsOf(parsed.error),
-      broken,
+      'problems' in claim ? claim.problems : [],
     ),
   };
 }

@@ -11,8 +11,8 @@ import { realClock } from '../../clock';
 import { mount, namedBranch, type Call, type Mounting } from '../../http/mount';
 import { checkPreconditions, tagOf } from '#shared/domain/preconditions';
 import type { Kit } from '../../kit';
-import { acceptClaim, type ClaimSending } from './accept-claim';
-import { breaksAgainstJob } from './breaks-against-job';
+import { acceptClaim, type ClaimSending } from '#db/accept-claim';
+import { breaksAgainstJob } from '#db/breaks-against-job';
 import { acceptClaimBatch } from './accept-claim-batch';
 
 /** Claims under warranty: sent, corrected, read. */

@@ -7,9 +7,9 @@ import type { JobContent, putJobBatch } from '#shared/contracts/jobs';
 import { joined, problemsOf } from '#shared/contracts/read-problems';
 import type { JobWorld } from '#shared/domain/job-rules';
 import { Refusal } from '#shared/domain/refusal';
-import { acceptJob, type Sending } from './accept-job';
-import { breaksOfClaims } from './breaks-of-claims';
-import { readJob } from './check-job';
+import { acceptJob, type Sending } from '#db/accept-job';
+import { breaksOfClaims } from '#db/breaks-of-claims';
+import { readJob } from '#shared/contracts/check-job';
 
 type BatchAnswer = z.input<typeof putJobBatch.out>;
 type Result = BatchAnswer['results'][number];

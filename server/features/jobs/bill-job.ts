@@ -3,7 +3,7 @@ import type { FieldProblem } from '#shared/contracts/fields';
 import { breaksOfJob, type JobWorld } from '#shared/domain/job-rules';
 import type { RecordedJob } from '#shared/domain/recorded-job';
 import { notFound } from '#shared/domain/refusal';
-import { acceptJob, type Accepted, type Sending } from './accept-job';
+import { acceptJob, type Accepted, type Sending } from '#db/accept-job';
 
 /** Writes the bill of a finished car: a new revision that differs in the invoice only. Runs inside a write. */
 export function writeBill(

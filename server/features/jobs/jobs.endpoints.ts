@@ -9,10 +9,10 @@ import { realClock } from '../../clock';
 import { mount, namedBranch, type Call, type Mounting } from '../../http/mount';
 import type { Kit } from '../../kit';
 import { acceptBatch } from './accept-batch';
-import { acceptJob, type Sending } from './accept-job';
+import { acceptJob, type Sending } from '#db/accept-job';
 import { breaksOfBill, writeBill } from './bill-job';
-import { breaksOfClaims } from './breaks-of-claims';
-import { worldOf } from './check-job';
+import { breaksOfClaims } from '#db/breaks-of-claims';
+import { worldOf } from '#shared/contracts/check-job';
 import { checkPreconditions, tagOf } from '#shared/domain/preconditions';
 import { readJobSheet } from './read-job-sheet';
 

@@ -3,9 +3,14 @@ const HANDED = [
   'db/queries',
   'db/scope',
   'db/scoped-db',
+  'db/accept-claim',
+  'db/accept-job',
   'db/branch-writer',
+  'db/breaks-against-job',
+  'db/breaks-of-claims',
   'db/claim-writer',
   'db/come-back-writer',
+  'db/import-writer',
   'db/network-reference',
 ];
 

@@ -1,6 +1,6 @@
-import { jobContent, type JobContent } from '#shared/contracts/jobs';
-import type { FieldProblem } from '#shared/contracts/fields';
-import { joined, problemsOf } from '#shared/contracts/read-problems';
+import { jobContent, type JobContent } from './jobs';
+import type { FieldProblem } from './fields';
+import { joined, problemsOf } from './read-problems';
 import { breaksOfJob, type JobWorld } from '#shared/domain/job-rules';
 
 /** What the rules of a job need of the network as it is now. */

@@ -1,11 +1,11 @@
-import type { BranchWriter, Receipt } from '#db/branch-writer';
+import type { BranchWriter, Receipt, StoredJob } from './branch-writer';
 import { INVOICE_TOTAL_MISSING } from '#shared/domain/job-rules';
 import { normaliseJob, referenced, type SentJob } from '#shared/domain/normalise-job';
 import type { RecordedJob } from '#shared/domain/recorded-job';
 import { refuseInput } from '#shared/domain/refusal';
 import { checkPreconditions, type Preconditions } from '#shared/domain/preconditions';
 import { breaksOfClaims } from './breaks-of-claims';
-import { keepStoredMoney } from './keep-stored-money';
+import { keepStoredMoney } from '#shared/domain/keep-stored-money';
 
 /** How a job is sent: by whom, and whether what they leave out of its money is kept. */
 export interface Sending extends Receipt {
@@ -20,6 +20,14 @@ export interface Accepted {
   voided?: boolean;
 }
 
+/** What taking a job would do: nothing is written yet. */
+export type JudgedJob = { job: RecordedJob; text: string } & (
+  { status: 'created'; stored: undefined } | { status: 'unchanged' | 'replaced'; stored: StoredJob }
+);
+
+/** What of the record a job is judged by. */
+export type JobRecord = Pick<BranchWriter, 'findJob' | 'firstClaimOn'>;
+
 /**
  * Takes a job that has passed the rules into the record: creates it, keeps it as it is, or makes a new revision. Runs inside
  * a write, so that the stored job it is compared with cannot change meanwhile.
@@ -30,27 +38,35 @@ export function acceptJob(
   sent: SentJob,
   sending: Sending,
 ): Accepted {
-  const stored = writer.findJob(jobRef);
-  checkPreconditions(sending.preconditions, stored);
-  const job = merged(sent, stored?.content, sending.money);
-  const text = JSON.stringify(job);
-  if (!stored) {
+  const { status, stored, job, text } = judgeJob(writer, jobRef, sent, sending);
+  if (status === 'created') {
     writer.createJob(jobRef, job, text, sending);
-    return { jobRef, revision: 1, status: 'created' };
+    return { jobRef, revision: 1, status };
   }
-  if (stored.text === text) {
-    return {
-      jobRef,
-      revision: stored.revision,
-      status: 'unchanged',
-      // A nightly re-push must not revive what was voided (rule 25).
-      ...(stored.voided && { voided: true }),
-    };
+  if (status === 'unchanged') {
+    // A nightly re-push must not revive what was voided (rule 25).
+    return { jobRef, revision: stored.revision, status, ...(stored.voided && { voided: true }) };
   }
-  const late = breaksOfClaims(writer, jobRef, job);
-  if (late.length > 0) throw refuseInput(late);
   const revision = writer.replaceJob(jobRef, stored, job, text, sending);
-  return { jobRef, revision, status: 'replaced' };
+  return { jobRef, revision, status };
+}
+
+/** What taking a job that has passed the rules would do; the preview of a file and the write itself both ask here. */
+export function judgeJob(
+  record: JobRecord,
+  jobRef: string,
+  sent: SentJob,
+  { money, preconditions }: Pick<Sending, 'money' | 'preconditions'>,
+): JudgedJob {
+  const stored = record.findJob(jobRef);
+  checkPreconditions(preconditions, stored);
+  const job = merged(sent, stored?.content, money);
+  const text = JSON.stringify(job);
+  if (!stored) return { status: 'created', stored, job, text };
+  if (stored.text === text) return { status: 'unchanged', stored, job, text };
+  const late = breaksOfClaims(record, jobRef, job);
+  if (late.length > 0) throw refuseInput(late);
+  return { status: 'replaced', stored, job, text };
 }
 
 /** The job to keep: what was sent, with the stored invoice when none was sent (rule 73) and, for a recorder, the stored money. */

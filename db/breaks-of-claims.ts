@@ -1,17 +1,17 @@
-import type { BranchWriter } from '#db/branch-writer';
+import type { BranchWriter } from './branch-writer';
 import type { FieldProblem } from '#shared/contracts/fields';
 import { isDate } from '#shared/domain/calendar';
 
 /** A correction may not move completion past a claim already made on the job (rule 59). Over a body of any shape. */
 export function breaksOfClaims(
-  writer: BranchWriter,
+  record: Pick<BranchWriter, 'firstClaimOn'>,
   jobRef: string,
   body: unknown,
 ): FieldProblem[] {
   const completedOn =
     typeof body === 'object' && body !== null && 'completedOn' in body && body.completedOn;
   if (typeof completedOn !== 'string' || !isDate(completedOn)) return [];
-  const claimed = writer.firstClaimOn(jobRef);
+  const claimed = record.firstClaimOn(jobRef);
   if (claimed === undefined || completedOn <= claimed) return [];
   return [
     {

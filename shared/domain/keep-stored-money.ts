@@ -1,5 +1,5 @@
-import type { SentJob } from '#shared/domain/normalise-job';
-import type { RecordedJob } from '#shared/domain/recorded-job';
+import type { SentJob } from './normalise-job';
+import type { RecordedJob } from './recorded-job';
 
 /**
  * A recorder sees no money, so what their body leaves out keeps its stored value (rule 24): findings are matched by their

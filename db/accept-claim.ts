@@ -1,5 +1,5 @@
-import type { Receipt } from '#db/branch-writer';
-import type { ClaimWriter, DecidedClaim, RecordedClaim, StoredClaim } from '#db/claim-writer';
+import type { Receipt } from './branch-writer';
+import type { ClaimWriter, DecidedClaim, RecordedClaim, StoredClaim } from './claim-writer';
 import type { ClaimContent } from '#shared/contracts/claims';
 import { Refusal, refuseInput } from '#shared/domain/refusal';
 import type { ClaimDecision, Role } from '#shared/domain/vocabulary';
@@ -23,6 +23,17 @@ export interface AcceptedClaim {
   proposedDecision?: ClaimDecision;
 }
 
+/** What taking a claim would do: nothing is written yet. */
+export interface JudgedClaim {
+  status: AcceptedClaim['status'];
+  stored: StoredClaim | undefined;
+  claim: DecidedClaim;
+  jobId: number;
+}
+
+/** What of the record a claim is judged by. */
+export type ClaimRecord = Pick<ClaimWriter, 'findClaim' | 'findJob'>;
+
 /** Takes a claim whose own fields have passed the rules into the record. Runs inside a write. */
 export function acceptClaim(
   writer: ClaimWriter,
@@ -30,22 +41,32 @@ export function acceptClaim(
   sent: ClaimContent,
   sending: ClaimSending,
 ): AcceptedClaim {
-  const stored = writer.findClaim(claimRef);
+  const { status, stored, claim, jobId } = judgeClaim(writer, claimRef, sent, sending);
+  if (stored && status === 'unchanged') return told(claimRef, stored.revision, status, claim);
+  const revision = writer.keepClaim(claimRef, jobId, stored, claim, sending);
+  return told(claimRef, revision, status, claim);
+}
+
+/** What taking a claim that has passed the rules would do; the preview of a file and the write itself both ask here. */
+export function judgeClaim(
+  record: ClaimRecord,
+  claimRef: string,
+  sent: ClaimContent,
+  sending: Pick<ClaimSending, 'role' | 'limitCents' | 'precondition'>,
+): JudgedClaim {
+  const stored = record.findClaim(claimRef);
   sending.precondition?.(stored);
-  const job = writer.findJob(sent.jobRef);
-  const problems = breaksAgainstJob(writer, sent);
+  const job = record.findJob(sent.jobRef);
+  const problems = breaksAgainstJob(record, sent);
   if (!job || problems.length > 0) throw refuseInput(problems);
   const content = normaliseClaim(sent, stored?.content, sending.role);
   const claim = decided(content, stored, sending);
-  if (
+  const same =
     stored?.text === claim.text &&
     stored.decision === claim.decision &&
-    stored.proposed === claim.proposed
-  ) {
-    return told(claimRef, stored.revision, 'unchanged', claim);
-  }
-  const revision = writer.keepClaim(claimRef, job.id, stored, claim, sending);
-  return told(claimRef, revision, stored ? 'replaced' : 'created', claim);
+    stored.proposed === claim.proposed;
+  const status = same ? 'unchanged' : stored ? 'replaced' : 'created';
+  return { status, stored, claim, jobId: job.id };
 }
 
 function normaliseClaim(
@@ -76,7 +97,7 @@ function normaliseClaim(
 function decided(
   sent: RecordedClaim,
   stored: StoredClaim | undefined,
-  { role, limitCents }: ClaimSending,
+  { role, limitCents }: Pick<ClaimSending, 'role' | 'limitCents'>,
 ): DecidedClaim {
   const cost = sent.costCents ?? 0;
   const above = role !== 'head_office' && limitCents !== null && cost > limitCents;
