@@ -82,7 +82,7 @@ const ARROWS: readonly [file: string, source: string, allowed: 'refused' | 'allo
   [`${app}/app.routes.ts`, '#seeds/network', 'refused'],
   ['seeds/network.ts', '#server/http/mount', 'refused'],
   ['seeds/network.ts', 'knex', 'refused'],
-  ['seeds/network.ts', '#server/features/jobs/accept-job', 'allowed'],
+  ['seeds/network.ts', '#server/features/jobs/accept-batch', 'allowed'],
   ['seeds/network.ts', '#db/unscoped-db', 'allowed'],
   ['server/features/margin/read-margin.spec.ts', '../../../db/database', 'allowed'],
   ['test/api/margin.spec.ts', '#server/app', 'allowed'],
