@@ -145,6 +145,11 @@ export function formatInstant(instant: string): string {
   return instantFormat.format(new Date(instant));
 }
 
+/** An instant to the second, where order matters: `28 Jan 2026, 14:05:09`. */
+export function formatExactInstant(instant: string): string {
+  return exactInstantFormat.format(new Date(instant));
+}
+
 /** The day of an instant in the reader's own time: `28 Jan 2026`. */
 export function formatInstantDay(instant: string): string {
   return instantDayFormat.format(new Date(instant));
@@ -182,6 +187,10 @@ const monthFormat = new Intl.DateTimeFormat(LOCALE, {
   timeZone: 'UTC',
 });
 const instantFormat = new Intl.DateTimeFormat(LOCALE, { dateStyle: 'medium', timeStyle: 'short' });
+const exactInstantFormat = new Intl.DateTimeFormat(LOCALE, {
+  dateStyle: 'medium',
+  timeStyle: 'medium',
+});
 const instantDayFormat = new Intl.DateTimeFormat(LOCALE, { dateStyle: 'medium' });
 const listFormat = new Intl.ListFormat(LOCALE, { type: 'conjunction' });
 

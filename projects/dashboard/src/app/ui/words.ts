@@ -134,9 +134,10 @@ export const CHECK_ANSWER_NAMES: Readonly<Record<CheckAnswer, string>> = {
   na: 'does not apply',
 };
 
+/** By which way a revision came in (rule 85), read after "from". */
 export const SOURCE_NAMES: Readonly<Record<Source, string>> = {
-  person: 'a person',
-  key: 'a push key',
-  file: 'a file',
+  person: 'a person signed in',
+  key: "the branch's system, by push key",
+  file: 'an imported file',
   form: 'the form',
 };

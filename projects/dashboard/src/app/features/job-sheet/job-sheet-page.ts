@@ -5,7 +5,9 @@ import {
   DOCUMENT,
   inject,
   input,
+  linkedSignal,
 } from '@angular/core';
+import { NgTemplateOutlet } from '@angular/common';
 import { MatButton } from '@angular/material/button';
 import { MatDialog } from '@angular/material/dialog';
 import { Router, RouterLink } from '@angular/router';
@@ -17,6 +19,7 @@ import { Catalogue } from '../../core/catalogue/catalogue';
 import { Session } from '../../core/session/session';
 import { Answer } from '../../ui/answer/answer';
 import { Caution } from '../../ui/caution/caution';
+import { CellTemplate } from '../../ui/data-table/cell-template';
 import { DataTable } from '../../ui/data-table/data-table';
 import {
   currencySign,
@@ -38,9 +41,12 @@ import { FindingsList } from './findings-list';
 import { missingCostWords } from './missing-cost-words';
 import { moneyLines } from './money-lines';
 import { productColumns, productRows } from './product-rows';
+import { RevisionChanges } from './revision-changes';
 import { REVISION_COLUMNS } from './revision-columns';
+import { pairToUrl, type RevisionPair, revisionPair } from './revision-pair';
 import { sheetSentence } from './sheet-sentence';
 import { stageColumns, stageRows } from './stage-rows';
+import { UndoVoid } from './undo-void';
 import { VoidDialog, type VoidDialogData } from './void-dialog';
 
 /** Everything recorded of one job. */
@@ -50,14 +56,18 @@ import { VoidDialog, type VoidDialogData } from './void-dialog';
     Answer,
     BridgeChart,
     Caution,
+    CellTemplate,
     DataTable,
     FactList,
     FindingsList,
     LoadState,
     MatButton,
+    NgTemplateOutlet,
+    RevisionChanges,
     RouterLink,
     TableTwin,
     UndersideMarks,
+    UndoVoid,
   ],
   templateUrl: './job-sheet-page.html',
   styleUrl: './job-sheet-page.scss',
@@ -74,6 +84,8 @@ export class JobSheetPage {
   // From the path.
   readonly branch = input.required<string>();
   readonly jobRef = input.required<string>();
+  /** Two revisions to compare, from the query: `2-4`. */
+  readonly changes = input<string>();
 
   protected readonly job = inject(Api).read(getJob, () => ({
     params: { branch: this.branch(), jobRef: this.jobRef() },
@@ -81,6 +93,16 @@ export class JobSheetPage {
 
   protected readonly mayVoid = computed(
     () => this.role() === 'site_manager' || this.role() === 'head_office',
+  );
+  protected readonly mayCorrect = computed(() => this.mayVoid() || this.role() === 'recorder');
+  protected readonly headOffice = computed(() => this.role() === 'head_office');
+  protected readonly subject = computed(() => `/branches/${this.branch()}/jobs/${this.jobRef()}`);
+  /** The job stands void by what was done here: in place of its sheet stands the way back. */
+  protected readonly voided = linkedSignal({ source: this.subject, computation: () => false });
+  /** What was done here last, for those who see and those who hear it. */
+  protected readonly said = linkedSignal({ source: this.subject, computation: () => '' });
+  protected readonly pair = computed(() =>
+    revisionPair(this.changes(), this.job.value()?.revision ?? 0),
   );
   protected readonly sign = computed(() => currencySign(this.catalogue.currency()));
   protected readonly currency = this.catalogue.currency;
@@ -153,6 +175,21 @@ export class JobSheetPage {
       etag: this.job.etag(),
     };
     const dialog = this.dialog.open<VoidDialog, VoidDialogData, boolean>(VoidDialog, { data });
-    if (await firstValueFrom(dialog.afterClosed())) await this.router.navigate(['/jobs']);
+    if (await firstValueFrom(dialog.afterClosed())) this.voided.set(true);
+  }
+
+  protected restored(): void {
+    this.voided.set(false);
+    this.said.set(`Job ${this.jobRef()} is back, as it was and in every figure.`);
+    this.job.reload();
+  }
+
+  /** Puts two revisions into the URL, which can be shared; the page stays where it is. */
+  protected compare(pair: RevisionPair | undefined): void {
+    void this.router.navigate([], {
+      queryParams: { changes: pair ? pairToUrl(pair) : null },
+      queryParamsHandling: 'merge',
+      scroll: 'manual',
+    });
   }
 }

@@ -22,8 +22,8 @@ export interface VoidDialogData {
     <h2 mat-dialog-title>Void job {{ data.jobRef }}?</h2>
     <mat-dialog-content>
       <p>
-        It leaves every figure: the week's margin, overruns, rot, claims. It stays in the record,
-        and sending it again with other content brings it back.
+        It leaves every figure: the week's margin, overruns, rot, claims. It stays in the record and
+        can be brought back as it was, at once here or later from Voided jobs.
       </p>
       <div role="alert">
         @if (voiding.problem(); as problem) {
