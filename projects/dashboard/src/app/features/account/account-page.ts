@@ -3,14 +3,15 @@ import { Catalogue } from '../../core/catalogue/catalogue';
 import { Session } from '../../core/session/session';
 import { formatList } from '../../ui/format';
 import { ROLE_NAMES } from '../../ui/words';
+import { MailChoices } from './mail-choices';
 import { NameForm } from './name-form';
 import { PasswordForm } from './password-form';
 import { SignInsList } from './sign-ins-list';
 
-/** The own account: name, password, and the devices one is signed in on. */
+/** The own account: name, password, the mails one wants, and the devices one is signed in on. */
 @Component({
   selector: 'us-account-page',
-  imports: [NameForm, PasswordForm, SignInsList],
+  imports: [MailChoices, NameForm, PasswordForm, SignInsList],
   templateUrl: './account-page.html',
   styleUrl: './account-page.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,

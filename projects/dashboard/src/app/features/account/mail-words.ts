@@ -1,0 +1,15 @@
+import type { MailKind } from '#shared/domain/mail-kinds';
+
+/** A mail that one may do without, and what it is good for. */
+export const MAIL_WORDS: Readonly<
+  Record<MailKind, { readonly name: string; readonly why: string }>
+> = {
+  new_sign_in: {
+    name: 'A new sign-in as you',
+    why: 'When and on what kind of device, so that you notice one that was not you.',
+  },
+  import_ended: {
+    name: 'A file of yours has been imported',
+    why: 'How many rows were written and how many were refused, when you did not wait for the end.',
+  },
+};
