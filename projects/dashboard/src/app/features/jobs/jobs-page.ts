@@ -76,6 +76,13 @@ export class JobsPage {
 
   protected readonly narrow = narrowWindow();
   protected readonly recorder = computed(() => this.session.role() === 'recorder');
+  protected readonly mayImport = computed(
+    () => this.session.role() === 'site_manager' || this.session.role() === 'head_office',
+  );
+  protected readonly forImport = computed(() => {
+    const [branch, ...others] = this.scope.branches();
+    return branch && others.length === 0 ? { branch } : {};
+  });
   protected readonly filters = computed<JobFilters>(() => ({
     q: this.q() || undefined,
     make: this.make() || undefined,
