@@ -122,6 +122,21 @@ export class BranchWriter {
     this.audit('job.void', jobRef, receipt, { revision: stored.revision, before: stored.content });
   }
 
+  /**
+   * Brings a voided job back as it was, under the revision it had: its rows are derived anew, its claims and the marks on what
+   * was left hang on it still.
+   */
+  restoreJob(jobRef: string, stored: StoredJob, receipt: Receipt): void {
+    this.connection.prepare('update jobs set voided_at = null where id = ?').run(stored.id);
+    const { id } = this.packageOf(stored.content);
+    const entry = { id, warrantyMonths: stored.warrantyMonths };
+    this.writeRows(this.identity(stored.id, jobRef, stored.revision, entry), stored.content);
+    this.audit('job.restore', jobRef, receipt, {
+      revision: stored.revision,
+      after: stored.content,
+    });
+  }
+
   /** The earliest day on which a claim was made on the job of a reference, or `undefined`. */
   firstClaimOn(jobRef: string): string | undefined {
     const row = this.connection

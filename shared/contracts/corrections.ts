@@ -26,7 +26,7 @@ const revisionMark = z.strictObject({
   change: z.enum(['created', 'replaced', 'restored']),
 });
 
-/** Findings are matched by their reference, products and consumables by product and kind, the rest by place. */
+/** Findings are matched by their reference, products and consumables by product and kind (the second of one is `CW1:2`), the rest by place. */
 export const fieldChange = z.strictObject({
   /** JSON pointer into the job; a list's item by its key: `/findings/sill_inner~1left~11/workedAs`. */
   path: z.string(),
