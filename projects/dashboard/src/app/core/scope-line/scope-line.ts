@@ -43,6 +43,8 @@ export class ScopeLine {
   private readonly window = inject(DOCUMENT).defaultView;
 
   readonly period = input<ScopePeriod>('weeks');
+  /** `branches`: whose jobs alone, where dates and kinds mean nothing. */
+  readonly parts = input<'all' | 'branches'>('all');
 
   protected readonly regions = computed(() => {
     const branches = this.catalogue.branches();

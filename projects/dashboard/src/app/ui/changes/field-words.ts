@@ -15,9 +15,12 @@ export function fieldWords(path: string, known: KnownNames): string {
       return named(findingPlace(second, known), rest);
     case 'products':
     case 'norms':
-      return named(isPlace(second) ? nth('product', second) : known.productName(second), rest);
+      return named(
+        lineName(second, (code) => known.productName(code)),
+        rest,
+      );
     case 'consumables':
-      return named(consumableName(second), rest);
+      return named(lineName(second, consumableName), rest);
     case 'agreedExtras':
       return named(nth('agreed extra', second), rest);
     case 'estimate':
@@ -74,10 +77,17 @@ function checkWords(name: string): string {
   return check ? CHECK_NAMES[check] : plainName(name);
 }
 
-function consumableName(key: string): string {
-  const kind = CONSUMABLE_KINDS.find((one) => one === key);
-  if (kind) return kind === 'other' ? 'other consumables' : CONSUMABLE_NAMES[kind];
-  return isPlace(key) ? nth('consumable', key) : plainName(key);
+/** A line of products or consumables by its key; the second of one code is `CW1:2`. */
+function lineName(key: string, nameOf: (code: string) => string): string {
+  if (isPlace(key)) return `line ${formatCount(Number(key) + 1)}`;
+  const [, code = key, number] = /^(.*?)(?::(\d+))?$/.exec(key) ?? [];
+  return number === undefined ? nameOf(code) : `${nameOf(code)}, line ${number}`;
+}
+
+function consumableName(code: string): string {
+  const kind = CONSUMABLE_KINDS.find((one) => one === code);
+  if (!kind) return plainName(code);
+  return kind === 'other' ? 'other consumables' : CONSUMABLE_NAMES[kind];
 }
 
 function named(thing: string, names: readonly string[]): string {
