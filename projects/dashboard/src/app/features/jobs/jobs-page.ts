@@ -79,6 +79,11 @@ export class JobsPage {
   protected readonly mayImport = computed(
     () => this.session.role() === 'site_manager' || this.session.role() === 'head_office',
   );
+  /** Whose jobs, as the URL of another page has it. */
+  protected readonly places = computed(() => ({
+    region: this.scope.regions(),
+    branch: this.scope.branches(),
+  }));
   protected readonly forImport = computed(() => {
     const [branch, ...others] = this.scope.branches();
     return branch && others.length === 0 ? { branch } : {};
