@@ -26,20 +26,17 @@ steps.push(
     return chromium ? 0 : 1;
   }),
 );
-steps.push(...(await runAtOnce(checks, 2)));
-for (const [name, part] of Object.entries(parts)) {
-  const { code, output, seconds } = await buildIfNeeded(part);
-  if (code !== 0) process.stdout.write(output);
-  steps.push(tell(`build of the ${name}`, code, seconds));
-}
+const builds = Object.entries(parts).map(([name, part]) => ({
+  name: `build of the ${name}`,
+  run: () => buildIfNeeded(part),
+}));
+steps.push(...(await runAtOnce([...builds, ...checks], 2)));
 const canBrowse = steps.every(({ name, code }) => code === 0 || !/^(browser|build)/.test(name));
 
 steps.push(await runJest('unit and API specs', []));
 if (canBrowse) {
   steps.push(
-    await runJest('journeys', ['--config', 'test/journeys/jest.config.mjs', '--runInBand'], {
-      CHROME: chromium,
-    }),
+    await runJest('journeys', ['--config', 'test/journeys/jest.config.mjs'], { CHROME: chromium }),
   );
 } else {
   steps.push({ name: 'the journeys, for want of a browser or a build,', code: 1 });

@@ -1,16 +1,24 @@
 import type { Page } from 'playwright-core';
-import { source, type run } from 'axe-core';
+import { source, type run, type RunOnly } from 'axe-core';
 
 /** The success criteria held to: WCAG 2.2, levels A and AA, by axe-core's names for them. */
 const WCAG_22_AA = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa'];
 
+const RULES = {
+  whole: { type: 'tag', values: WCAG_22_AA },
+  colours: { type: 'rule', values: ['color-contrast', 'link-in-text-block'] },
+} satisfies Record<string, RunOnly>;
+
 /** Smallest text that a page may show, in CSS pixels as drawn (the design's own rule). */
 const SMALLEST = 14;
 
+/** What of a page is looked at: everything, its measures and the contrast of its colours, or its measures alone. */
+export type AuditPart = 'whole' | 'colours' | 'measures';
+
 /** Everything that is wrong with a page as it stands, in words; an empty list when nothing is. */
-export async function auditPage(page: Page): Promise<string[]> {
+export async function auditPage(page: Page, part: AuditPart = 'whole'): Promise<string[]> {
   return [
-    ...(await accessibility(page)),
+    ...(part === 'measures' ? [] : await accessibility(page, part)),
     ...(await sideways(page)),
     ...(await smallText(page)),
     ...(await picturesWithoutTwin(page)),
@@ -29,13 +37,13 @@ export async function untilStill(page: Page): Promise<void> {
   });
 }
 
-/** Violations that axe-core finds, each with the elements concerned. No rule is switched off. */
-async function accessibility(page: Page): Promise<string[]> {
+/** Violations that axe-core finds, each with the elements concerned. No rule is switched off in the whole. */
+async function accessibility(page: Page, part: 'whole' | 'colours'): Promise<string[]> {
   if (!(await page.evaluate('typeof window.axe === "object"'))) await page.evaluate(source);
-  return page.evaluate(async (tags) => {
+  return page.evaluate(async (runOnly) => {
     const { violations } = await (window as unknown as { axe: { run: typeof run } }).axe.run(
       document,
-      { runOnly: { type: 'tag', values: tags }, resultTypes: ['violations'] },
+      { runOnly, resultTypes: ['violations'] },
     );
     return violations.flatMap(({ id, help, nodes }) =>
       nodes.map(
@@ -43,7 +51,7 @@ async function accessibility(page: Page): Promise<string[]> {
           `${id}: ${help}: ${target.join(' ')} ${failureSummary ?? ''}`,
       ),
     );
-  }, WCAG_22_AA);
+  }, RULES[part]);
 }
 
 /** A page that scrolls sideways, and the elements that reach beyond the window. */

@@ -1,4 +1,4 @@
-/** Journeys through the built product in a real browser, one after another. `npm test` names the browser in CHROME. */
+/** Journeys through the built product in real browsers, two at a time, each on a demo of its own. `npm test` names the browser in CHROME. */
 import path from 'node:path';
 import { findChromium } from '../support/find-chromium.mjs';
 
@@ -18,7 +18,7 @@ export default {
   testEnvironmentOptions: { customExportConditions: ['underseam-source', 'node', 'node-addons'] },
   testMatch: ['**/*.spec.ts'],
   testTimeout: 120_000,
-  maxWorkers: 1,
+  maxWorkers: 2,
   transform: {
     '^.+\\.ts$': ['@swc/jest', { jsc: { target: 'es2022', parser: { syntax: 'typescript' } } }],
   },

@@ -1,12 +1,12 @@
 import type { Served } from '../bench/serve';
-import { serveDemo } from './served-demo';
+import { serveDemos } from './served-demo';
 
 declare global {
   /** What `stop-demo.ts` stops; both run in the same process. */
   var journeysDemo: Served | undefined;
 }
 
-/** Before the first journey: one demo network for all of them. */
-export default async function startDemo(): Promise<void> {
-  globalThis.journeysDemo = await serveDemo();
+/** Before the first journey: a demo network for each of those that run side by side. */
+export default async function startDemo({ maxWorkers }: { maxWorkers: number }): Promise<void> {
+  globalThis.journeysDemo = await serveDemos(maxWorkers);
 }

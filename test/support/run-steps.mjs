@@ -1,6 +1,8 @@
 import { runAside, runHere } from '../../server/commands/run-process.mjs';
 
-/** @typedef {{ name: string, args: string[], env?: Record<string, string> }} Step a Node program and its arguments */
+/** @typedef {{ name: string, args: string[], env?: Record<string, string> }} Program a Node program and its arguments */
+/** @typedef {{ name: string, run: () => Promise<{ code: number, output: string, seconds: number }> }} Work */
+/** @typedef {Program | Work} Step */
 
 /**
  * Runs steps side by side, at most so many at once; prints each one's time, and all it wrote when it failed.
@@ -11,7 +13,9 @@ export async function runAtOnce(steps, atOnce) {
   const ended = [];
   const work = async () => {
     for (let step = waiting.shift(); step; step = waiting.shift()) {
-      const { code, output, seconds } = await runAside(process.execPath, step.args, step.env);
+      const { code, output, seconds } = await ('run' in step
+        ? step.run()
+        : runAside(process.execPath, step.args, step.env));
       if (code !== 0) process.stdout.write(output);
       ended.push(tell(step.name, code, seconds));
     }
