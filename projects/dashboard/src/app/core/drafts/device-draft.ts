@@ -40,6 +40,11 @@ export interface DeviceDraft {
   readonly step: number;
   /** ISO instant. */
   readonly changedAt: string;
+  /** When the server was heard to have it, and the ETag it has it under; set once `sent`. */
+  readonly sentAt?: string;
+  readonly sentAs?: string;
+  /** Photos that the server has and that were taken off here since; taken off there with the next sending. */
+  readonly photosGone?: readonly string[];
 }
 
 /** What a form may change of a draft. */
