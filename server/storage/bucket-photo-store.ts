@@ -1,12 +1,12 @@
-import type { S3Client } from '@aws-sdk/client-s3';
+import type * as S3 from '@aws-sdk/client-s3';
 import type { BucketSettings } from '../config';
 import type { PhotoStore } from './photo-store';
 
-type Library = typeof import('@aws-sdk/client-s3');
+type Library = typeof S3;
 
 /** Photos as objects of a bucket in any store that speaks S3. The client is loaded with the first photo, to start quickly. */
 export class BucketPhotoStore implements PhotoStore {
-  private opened: Promise<{ library: Library; client: S3Client }> | undefined;
+  private opened: Promise<{ library: Library; client: S3.S3Client }> | undefined;
 
   constructor(private readonly settings: BucketSettings) {}
 
@@ -44,7 +44,7 @@ export class BucketPhotoStore implements PhotoStore {
     if (this.opened) (await this.opened).client.destroy();
   }
 
-  private open(): Promise<{ library: Library; client: S3Client }> {
+  private open(): Promise<{ library: Library; client: S3.S3Client }> {
     this.opened ??= import('@aws-sdk/client-s3').then((library) => ({
       library,
       client: new library.S3Client(clientSettings(this.settings)),

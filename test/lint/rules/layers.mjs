@@ -10,6 +10,8 @@ const HANDED = [
   'db/breaks-of-claims',
   'db/claim-writer',
   'db/come-back-writer',
+  'db/photo-writer',
+  'db/under-way-writer',
   'db/import-writer',
   'db/network-reference',
 ];
@@ -61,7 +63,7 @@ export const layers = [
   {
     folder: 'server/features/*',
     reaches: ['shared', ...HANDED],
-    types: ['db/store', 'db/network-state'],
+    types: ['db/store', 'db/network-state', 'server/storage'],
     notPackages: ['express', 'passport', 'passport-jwt', 'jsonwebtoken', 'knex', 'better-sqlite3'],
     because:
       'a use case tells its story with shared and db/queries, and never reaches express, knex, the rest of the server or another feature: hand it what it needs, or move the common part to shared or db/queries.',
