@@ -64,6 +64,8 @@ export const checkAudit = defineEndpoint({
   query: noQuery,
   out: z.strictObject({
     events: z.int(),
+    /** When the first event was; null in an empty trail. */
+    since: z.string().nullable(),
     brokenAt: z.int().nullable(),
     /** Hash of the last event: written down elsewhere, it proves later that nothing before it was changed. */
     lastHash: z.string(),
