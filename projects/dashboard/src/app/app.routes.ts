@@ -1,4 +1,4 @@
-import { inject } from '@angular/core';
+import { inject, Injector } from '@angular/core';
 import type { Routes } from '@angular/router';
 import { homeOf } from './core/session/home';
 import { forRoles, signedIn } from './core/session/role-guard';
@@ -8,6 +8,15 @@ const senders = forRoles('recorder', 'site_manager', 'head_office');
 const managers = forRoles('site_manager', 'head_office');
 const headOffice = forRoles('head_office');
 const readers = forRoles('site_manager', 'regional_lead', 'head_office');
+
+/** The first page of whoever is signed in; whether a network has begun is asked for head office alone. */
+async function home(): Promise<string> {
+  const injector = inject(Injector);
+  const role = inject(Session).role();
+  if (role !== 'head_office') return homeOf(role);
+  const { firstPage } = await import('./core/session/first-page');
+  return firstPage(injector);
+}
 
 /** Every page, each loaded when it is opened. */
 export const routes: Routes = [
@@ -22,11 +31,18 @@ export const routes: Routes = [
     loadChildren: () => import('./features/welcome/welcome.routes'),
   },
   {
+    // A form for a phone in a workshop: without header and footer around it.
+    path: 'send/:draft',
+    title: 'Send a job',
+    canActivate: [signedIn, senders],
+    loadChildren: () => import('./features/send/draft.routes'),
+  },
+  {
     path: '',
     canActivate: [signedIn],
     loadComponent: () => import('./core/shell/shell').then((file) => file.Shell),
     children: [
-      { path: '', pathMatch: 'full', redirectTo: () => homeOf(inject(Session).role()) },
+      { path: '', pathMatch: 'full', redirectTo: home },
       {
         path: 'this-week',
         title: 'This week',
@@ -70,7 +86,7 @@ export const routes: Routes = [
         path: 'jobs/:branch/:jobRef/correct',
         title: 'Correct a job',
         canActivate: [senders],
-        loadChildren: () => import('./features/send/send.routes'),
+        loadChildren: () => import('./features/send/correct.routes'),
       },
       {
         path: 'voided',

@@ -32,10 +32,14 @@ export class BranchPage {
   );
   protected readonly form = computed(() => {
     const branch = this.branch();
-    const surroundings = { regions: this.catalogue.regions(), taken: [], today: this.today() };
+    const surroundings = { regions: this.catalogue.regions(), taken: [] };
     return branch && branchChange(this.api, surroundings, branch);
   });
-  protected readonly rateForm = computed(() => rateChange(this.api, this.code(), this.today()));
+  /** The first cost counts from the branch's opening, so that no car before it is without one. */
+  protected readonly rateForm = computed(() => {
+    const first = this.rates().length === 0 ? this.branch()?.openedOn : undefined;
+    return rateChange(this.api, this.code(), first ?? this.today());
+  });
   protected readonly rates = computed(() =>
     (this.costs.value()?.rates ?? [])
       .filter(({ branch }) => branch === this.code())

@@ -67,7 +67,6 @@ export class BranchesPage {
     branchChange(this.api, {
       regions: this.catalogue.regions(),
       taken: this.catalogue.branches().map(({ code }) => code),
-      today: this.catalogue.today() ?? '',
     }),
   );
 

@@ -7,7 +7,7 @@ import { formatExactMoney } from '../../ui/format';
 import { LoadState } from '../../ui/load-state/load-state';
 import { ChangeForm } from '../../ui/set-up/change-form';
 import { DatedCosts } from '../../ui/set-up/dated-costs';
-import { productChange, productCostChange } from '../../ui/set-up/product-changes';
+import { firstOpening, productChange, productCostChange } from '../../ui/set-up/product-changes';
 import { Removal } from './removal';
 import { WhoChanged } from './who-changed';
 
@@ -35,9 +35,11 @@ export class ProductSetUpPage {
     const product = this.product();
     return product && productChange(this.api, [], product);
   });
-  protected readonly costForm = computed(() =>
-    productCostChange(this.api, this.code(), this.today()),
-  );
+  /** The first cost counts from when the first branch opened, so that no car before it is without one. */
+  protected readonly costForm = computed(() => {
+    const first = this.rows().length === 0 ? firstOpening(this.catalogue.branches()) : undefined;
+    return productCostChange(this.api, this.code(), first ?? this.today());
+  });
   protected readonly rows = computed(() =>
     (this.costs.value()?.products ?? [])
       .filter(({ product }) => product === this.code())

@@ -5,7 +5,6 @@ import { MatFormFieldModule } from '@angular/material/form-field';
 import { MatInput } from '@angular/material/input';
 import { Router, RouterLink } from '@angular/router';
 import { deed } from '../../core/api/deed';
-import { homeOf } from '../../core/session/home';
 import { Session } from '../../core/session/session';
 import { OuterFrame } from '../../core/shell/outer-frame';
 import { Trouble } from '../../ui/trouble/trouble';
@@ -51,6 +50,6 @@ export class SignInPage {
     this.form.markAllAsTouched();
     if (this.form.invalid) return;
     const person = await this.entering.run(this.form.getRawValue());
-    if (person) await this.router.navigateByUrl(this.next() ?? homeOf(person.role));
+    if (person) await this.router.navigateByUrl(this.next() ?? '/');
   }
 }

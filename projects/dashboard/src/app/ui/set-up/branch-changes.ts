@@ -14,13 +14,12 @@ export interface BranchSurroundings {
   readonly regions: readonly { readonly code: string; readonly name: string }[];
   /** Codes of the branches there are. */
   readonly taken: readonly string[];
-  readonly today: string;
 }
 
 /** A branch's facts; without one, a new branch. */
 export function branchChange(
   api: Api,
-  { regions, taken, today }: BranchSurroundings,
+  { regions, taken }: BranchSurroundings,
   branch?: Branch,
 ): ChangeOf<Branch> {
   const only = regions.length === 1 ? regions[0]?.code : undefined;
@@ -38,7 +37,7 @@ export function branchChange(
       name: branch?.name ?? '',
       region: branch?.region ?? only ?? '',
       timeZone: branch?.timeZone ?? ownTimeZone(),
-      openedOn: branch?.openedOn ?? today,
+      openedOn: branch?.openedOn ?? '',
       closedOn: branch?.closedOn ?? '',
       targetMarginShare: shareToType(branch?.targetMarginShare),
     },
@@ -109,11 +108,11 @@ function branchFields(
   ];
 }
 
-/** What an hour of work costs a branch, from a day on. */
+/** What an hour of work costs a branch, from a day on; the day offered first is the caller's. */
 export function rateChange(
   api: Api,
   branch: string,
-  today: string,
+  from: string,
 ): ChangeOf<OutOf<typeof contract.putRate>> {
   return {
     label: 'Hourly cost from a day on',
@@ -133,7 +132,7 @@ export function rateChange(
         hint: 'Wages and what comes with them, not what the owner is asked for.',
       },
     ],
-    start: { from: today },
+    start: { from },
     change: (typed) => ({
       kind: 'rate',
       branch,

@@ -61,18 +61,25 @@ export function productChange(
   };
 }
 
-/** What a litre of a product costs, from a day on. */
+/** The day on which the first of some branches opened. */
+export function firstOpening(
+  branches: readonly { readonly openedOn: string }[],
+): string | undefined {
+  return branches.map(({ openedOn }) => openedOn).sort()[0];
+}
+
+/** What a litre of a product costs, from a day on; the day offered first is the caller's. */
 export function productCostChange(
   api: Api,
   product: string,
-  today: string,
+  from: string,
 ): ChangeOf<OutOf<typeof contract.putProductCost>> {
   return {
     label: 'Cost from a day on',
     act: 'Save the cost',
     after: 'clear',
     fields: [FROM, { key: 'costPerLitreCents', label: 'Cost of a litre', kind: 'money' }],
-    start: { from: today },
+    start: { from },
     change: (typed) => ({
       kind: 'productCost',
       product,
