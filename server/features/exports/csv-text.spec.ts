@@ -1,6 +1,7 @@
 import { parse } from 'csv-parse/sync';
 import fc from 'fast-check';
-import { csvHeader, csvRows, defused } from './csv-text';
+import { defused } from '#shared/domain/defused';
+import { csvHeader, csvRows } from './csv-text';
 
 const COLUMNS = ['text', 'vehicle.make', 'number', 'flag', 'nothing'];
 

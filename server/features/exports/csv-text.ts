@@ -1,4 +1,5 @@
 import { stringify } from 'csv-stringify/sync';
+import { defused } from '#shared/domain/defused';
 
 /** RFC 4180 text with CRLF, no BOM, `.` decimals and empty cells for null (rule 62). */
 const FORMAT = {
@@ -24,11 +25,6 @@ export function csvRows(columns: readonly string[], records: readonly object[]):
     records.map((record) => paths.map((path) => valueAt(record, path))),
     FORMAT,
   );
-}
-
-/** Text that a spreadsheet would run as a formula gets an apostrophe in front. Source of the list: OWASP, "CSV Injection". */
-export function defused(text: string): string {
-  return /^[=+\-@\t\r]/.test(text) ? `'${text}` : text;
 }
 
 function valueAt(record: object, path: readonly string[]): unknown {
