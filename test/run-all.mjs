@@ -33,7 +33,8 @@ const builds = Object.entries(parts).map(([name, part]) => ({
 steps.push(...(await runAtOnce([...builds, ...checks], 2)));
 const canBrowse = steps.every(({ name, code }) => code === 0 || !/^(browser|build)/.test(name));
 
-steps.push(await runJest('unit and API specs', []));
+const built = steps.every(({ name, code }) => code === 0 || !name.startsWith('build'));
+steps.push(await runJest('unit and API specs', [], { UNDERSEAM_BUILT: built ? 'on' : 'off' }));
 if (canBrowse) {
   steps.push(
     await runJest('journeys', ['--config', 'test/journeys/jest.config.mjs'], { CHROME: chromium }),

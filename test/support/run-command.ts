@@ -1,5 +1,5 @@
 import { spawnSync } from 'node:child_process';
-import path from 'node:path';
+import { programArgs } from './program';
 import { root } from './project-files';
 
 /** How a command line ended. */
@@ -9,7 +9,7 @@ export interface Ended {
   error: string;
 }
 
-/** Runs one of the commands of server/commands from source, as `npm run` does from the build. */
+/** Runs one of the commands of server/commands as `npm run` does. */
 export function runCommandLine(
   name: string,
   args: readonly string[],
@@ -17,12 +17,7 @@ export function runCommandLine(
 ): Ended {
   const { status, stdout, stderr } = spawnSync(
     process.execPath,
-    [
-      path.join(root, 'node_modules/tsx/dist/cli.mjs'),
-      '--conditions=underseam-source',
-      path.join(root, `server/commands/${name}.ts`),
-      ...args,
-    ],
+    [...programArgs(`server/commands/${name}`), ...args],
     { cwd: root, encoding: 'utf8', env: { ...process.env, ...env } },
   );
   return { code: status, out: stdout, error: stderr };

@@ -1,5 +1,5 @@
 import { spawn, type ChildProcess } from 'node:child_process';
-import { join } from 'node:path';
+import { programArgs } from './program';
 import { root } from './project-files';
 
 /** How a process of the server ended. */
@@ -9,7 +9,7 @@ export interface Ended {
   stderr: string;
 }
 
-/** The real server in a process of its own, from source. */
+/** The real server in a process of its own. */
 export class SpawnedServer {
   private stdout = '';
   private stderr = '';
@@ -33,11 +33,10 @@ export class SpawnedServer {
 
   /** Starts one with nothing in its environment but these settings; what it says is kept. */
   static start(settings: Record<string, string>): SpawnedServer {
-    const child = spawn(
-      process.execPath,
-      ['--import', 'tsx', '--conditions=underseam-source', join(root, 'server/main.ts')],
-      { cwd: root, env: { PATH: process.env['PATH'], UNDERSEAM_DEMO: 'off', ...settings } },
-    );
+    const child = spawn(process.execPath, programArgs('server/main'), {
+      cwd: root,
+      env: { PATH: process.env['PATH'], UNDERSEAM_DEMO: 'off', ...settings },
+    });
     return new SpawnedServer(child);
   }
 
