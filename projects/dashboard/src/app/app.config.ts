@@ -13,6 +13,8 @@ import {
   withInMemoryScrolling,
 } from '@angular/router';
 import { routes } from './app.routes';
+import { lineInterceptor } from './core/offline/line-interceptor';
+import { keptAnswersInterceptor } from './core/session/kept-answers-interceptor';
 import { Session } from './core/session/session';
 import { tokenInterceptor } from './core/session/token-interceptor';
 import { PageTitle } from './core/shell/page-title';
@@ -22,13 +24,15 @@ export const appConfig: ApplicationConfig = {
   providers: [
     provideBrowserGlobalErrorListeners(),
     provideZonelessChangeDetection(),
-    provideHttpClient(withInterceptors([tokenInterceptor])),
+    provideHttpClient(
+      withInterceptors([keptAnswersInterceptor, tokenInterceptor, lineInterceptor]),
+    ),
     provideRouter(
       routes,
       withComponentInputBinding(),
       withInMemoryScrolling({ scrollPositionRestoration: 'enabled', anchorScrolling: 'enabled' }),
     ),
     { provide: TitleStrategy, useClass: PageTitle },
-    provideAppInitializer(() => inject(Session).renew()),
+    provideAppInitializer(() => inject(Session).resume()),
   ],
 };

@@ -1,7 +1,8 @@
-import { computed, inject, Injectable } from '@angular/core';
+import { computed, effect, inject, Injectable, untracked } from '@angular/core';
 import type { OutOf } from '#shared/contracts/endpoint';
 import { getCatalogue } from '#shared/contracts/set-up';
 import { Api } from '../api/api';
+import { Line } from '../offline/line';
 import { Session } from '../session/session';
 
 type Names = Readonly<Record<string, string>>;
@@ -30,6 +31,14 @@ export class Catalogue {
   private readonly regionNames = computed(() => namesOf(this.regions()));
   private readonly packageNames = computed(() => namesOf(this.packages()));
   private readonly productNames = computed(() => namesOf(this.value()?.products ?? []));
+
+  constructor() {
+    const line = inject(Line);
+    // What was read without a line is the answer kept from before.
+    effect(() => {
+      if (line.returns() > 0 && untracked(this.session.person)) this.reading.reload();
+    });
+  }
 
   /** A name by its code; the code itself when it is not (yet) known. */
   branchName(code: string): string {

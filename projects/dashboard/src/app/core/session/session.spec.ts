@@ -145,4 +145,59 @@ describe('Session', () => {
     expect(session.person()?.id).toBe(7);
     expect(session.resumeProblem()?.status).toBe(0);
   });
+
+  describe('opened on a device where somebody was signed in', () => {
+    afterEach(() => localStorage.clear());
+
+    async function opened() {
+      const { server, session, router, get } = set();
+      localStorage.setItem('underseam.person', JSON.stringify(PERSON));
+      const resumed = session.resume();
+      return { server, session, router, get, resumed };
+    }
+
+    it('without a line, goes on with that person and no token', async () => {
+      const { server, session, resumed } = await opened();
+      server.expectOne('/api/auth/refresh').error(new ProgressEvent('error'));
+      await resumed;
+      expect(session.person()).toEqual(PERSON);
+      const token = session.usableToken();
+      server.expectOne('/api/auth/refresh').error(new ProgressEvent('error'));
+      expect(await token).toBeUndefined();
+    });
+
+    it('with a sign-in that has ended, knows nobody and forgets who it was', async () => {
+      const { server, session, resumed } = await opened();
+      server.expectOne('/api/auth/refresh').flush({}, refused);
+      await resumed;
+      expect(session.person()).toBeUndefined();
+      expect(localStorage.getItem('underseam.person')).toBeNull();
+    });
+
+    it('told too late that the sign-in has ended, asks to sign in', async () => {
+      jest.useFakeTimers();
+      const { server, session, router, resumed } = await opened();
+      const went = jest.spyOn(router, 'navigate').mockResolvedValue(true);
+      await jest.advanceTimersByTimeAsync(4_001);
+      await resumed;
+      expect(session.person()?.id).toBe(7);
+      server.expectOne('/api/auth/refresh').flush({}, refused);
+      await jest.advanceTimersByTimeAsync(1);
+      jest.useRealTimers();
+      expect(session.person()).toBeUndefined();
+      expect(went).toHaveBeenCalledWith(['/sign-in'], { queryParams: {} });
+    });
+  });
+
+  it('signed in, leaves the person on the device without a token, and takes them away at sign-out', async () => {
+    const { server, session, router } = set();
+    jest.spyOn(router, 'navigate').mockResolvedValue(true);
+    const renewed = session.renew();
+    server.expectOne('/api/auth/refresh').flush(granted('one'));
+    await renewed;
+    expect(JSON.parse(localStorage.getItem('underseam.person')!)).toEqual(PERSON);
+    session.signOut().subscribe();
+    server.expectOne('/api/auth/sign-out').flush(null);
+    expect(localStorage.getItem('underseam.person')).toBeNull();
+  });
 });

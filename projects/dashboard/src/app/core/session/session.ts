@@ -5,9 +5,13 @@ import { refresh, signIn, signOut, type SignedInPerson } from '#shared/contracts
 import type { OutOf } from '#shared/contracts/endpoint';
 import { Api } from '../api/api';
 import { describeProblem, type Problem } from '../api/problem';
+import { forgetAnswers } from '../offline/kept-answers';
+import { keepPerson, keptPerson } from './kept-person';
 
 /** Seconds before its end at which a token is no longer used, so that it does not expire on the way. */
 const SPARE_SECONDS = 20;
+/** How long the start waits for the server before it opens for whoever was signed in last on this device, ms. */
+const START_PATIENCE = 4_000;
 
 /** Who is signed in. The access token lives in memory only; the refresh cookie is the browser's, out of reach of scripts. */
 @Injectable({ providedIn: 'root' })
@@ -24,6 +28,33 @@ export class Session {
   readonly role = computed(() => this.who()?.role);
   /** Why the last sign-in could not be resumed, when the server could not be asked. */
   readonly resumeProblem = this.trouble.asReadonly();
+
+  /**
+   * At the start of the application: goes on with the sign-in of before. Without a line, or when the answer is slow to come,
+   * with the last person on this device: the shell and their drafts open, whatever needs a token waits.
+   */
+  async resume(): Promise<void> {
+    const renewed = this.renew();
+    const last = keptPerson();
+    if (!last) {
+      await renewed;
+      return;
+    }
+    let timer: ReturnType<typeof setTimeout> | undefined;
+    const slow = new Promise<'slow'>((resolve) => {
+      timer = setTimeout(() => resolve('slow'), START_PATIENCE);
+    });
+    const outcome = await Promise.race([renewed, slow]);
+    clearTimeout(timer);
+    const status = this.trouble()?.status;
+    const unanswered = outcome === 'slow' || status === 0 || (status ?? 0) >= 502;
+    if (this.who() || !unanswered) return;
+    this.who.set(last);
+    // Told later that this sign-in has ended: sign in again, and come back here.
+    void renewed.then(() => {
+      if (!this.who()) this.end(this.router.url);
+    });
+  }
 
   signIn(email: string, password: string): Observable<SignedInPerson> {
     return this.api
@@ -58,6 +89,7 @@ export class Session {
   /** Takes over a changed name or role. */
   update(person: SignedInPerson): void {
     this.who.set(person);
+    keepPerson(person);
   }
 
   private async exchange(): Promise<string | undefined> {
@@ -79,11 +111,14 @@ export class Session {
     const seconds = Math.max(0, answer.expiresInSeconds - SPARE_SECONDS);
     this.token = { text: answer.accessToken, usableUntil: performance.now() + seconds * 1000 };
     this.who.set(answer.person);
+    keepPerson(answer.person);
     return answer.person;
   }
 
   private forget(): void {
     this.token = undefined;
     this.who.set(undefined);
+    keepPerson(undefined);
+    forgetAnswers();
   }
 }

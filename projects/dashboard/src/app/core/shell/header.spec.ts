@@ -24,8 +24,8 @@ const names = (element: HTMLElement) =>
   [...element.querySelectorAll('.wide a')].map((link) => link.textContent?.trim());
 
 describe('Header', () => {
-  it('to a recorder names Jobs and Quote', async () => {
-    expect(names(await shownTo('recorder'))).toEqual(['Jobs', 'Quote']);
+  it('to a recorder names Send a job first, Jobs and Quote', async () => {
+    expect(names(await shownTo('recorder'))).toEqual(['Send a job', 'Jobs', 'Quote']);
   });
 
   it('to a site manager names the pages that exist, in their order', async () => {
@@ -35,6 +35,7 @@ describe('Header', () => {
       'Rot',
       'Product',
       'Jobs',
+      'Send a job',
       'Come-backs',
       'Quote',
     ]);

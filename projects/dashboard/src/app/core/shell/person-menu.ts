@@ -2,6 +2,7 @@ import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/c
 import { MatMenuModule } from '@angular/material/menu';
 import { RouterLink } from '@angular/router';
 import { deed } from '../api/deed';
+import { UnsentHere } from '../drafts/unsent-here';
 import { Session } from '../session/session';
 import { ROLE_NAMES } from '../../ui/words';
 import { type Theme, ThemeChoice, THEMES } from './theme-choice';
@@ -36,6 +37,12 @@ export class PersonMenu {
   protected readonly themes = THEMES.map((theme) => ({ theme, name: THEME_NAMES[theme] }));
   protected readonly theme = this.choice.theme;
   protected readonly leaving = deed(() => this.session.signOut());
+  private readonly unsent = inject(UnsentHere);
+  /** Jobs that stay behind on this device when the person signs out. */
+  protected readonly staying = computed(() => {
+    const { editing, waiting } = this.unsent.mine();
+    return editing + waiting;
+  });
 
   protected choose(theme: Theme): void {
     this.choice.choose(theme);
