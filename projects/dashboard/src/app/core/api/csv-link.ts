@@ -10,6 +10,7 @@ import {
 import type { Subscription } from 'rxjs';
 import type { Endpoint } from '#shared/contracts/endpoint';
 import { formatNumber } from '../../ui/format';
+import { saveFile } from '../../ui/save-file';
 import { Trouble } from '../../ui/trouble/trouble';
 import { Api, type RequestOf } from './api';
 import { describeProblem } from './problem';
@@ -88,11 +89,7 @@ export class CsvLink {
   }
 
   private save(file: Blob): void {
-    const address = URL.createObjectURL(file);
-    const link = this.document.createElement('a');
-    link.href = address;
-    link.download = `underseam-${this.endpoint().path.split('/').at(-1) ?? 'rows.csv'}`;
-    link.click();
-    URL.revokeObjectURL(address);
+    const name = this.endpoint().path.split('/').at(-1) ?? 'rows.csv';
+    saveFile(this.document, `underseam-${name}`, file);
   }
 }
