@@ -5,7 +5,7 @@ import type { RecordedJob } from '#shared/domain/recorded-job';
 import { refuseInput } from '#shared/domain/refusal';
 import { checkPreconditions, type Preconditions } from '#shared/domain/preconditions';
 import { breaksOfClaims } from './breaks-of-claims';
-import { keepStoredMoney } from '#shared/domain/keep-stored-money';
+import { keepMoneyUnderWay, keepStoredMoney } from '#shared/domain/keep-stored-money';
 
 /** How a job is sent: by whom, and whether what they leave out of its money is kept. */
 export interface Sending extends Receipt {
@@ -38,7 +38,8 @@ export function acceptJob(
   sent: SentJob,
   sending: Sending,
 ): Accepted {
-  const { status, stored, job, text } = judgeJob(writer, jobRef, sent, sending);
+  const whole = withMoneyUnderWay(writer, jobRef, sent, sending.money);
+  const { status, stored, job, text } = judgeJob(writer, jobRef, whole, sending);
   if (status === 'created') {
     writer.createJob(jobRef, job, text, sending);
     return { jobRef, revision: 1, status };
@@ -49,6 +50,17 @@ export function acceptJob(
   }
   const revision = writer.replaceJob(jobRef, stored, job, text, sending);
   return { jobRef, revision, status };
+}
+
+/** With what a colleague who sees money wrote down while the job was under way: it ends with this, and a recorder cannot send it. */
+function withMoneyUnderWay(
+  writer: BranchWriter,
+  jobRef: string,
+  sent: SentJob,
+  money: Sending['money'],
+): SentJob {
+  const underWay = money === 'unseen' ? writer.findUnderWay(jobRef) : undefined;
+  return underWay ? keepMoneyUnderWay(named(sent), underWay) : sent;
 }
 
 /** What taking a job that has passed the rules would do; the preview of a file and the write itself both ask here. */

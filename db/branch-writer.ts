@@ -1,8 +1,10 @@
+import type { Moneyed } from '#shared/domain/keep-stored-money';
 import { tellRevision, type SentRevision } from '#shared/domain/preconditions';
 import type { RecordedJob } from '#shared/domain/recorded-job';
 import type { Source } from '#shared/domain/vocabulary';
 import type { Connection } from './database';
 import { insertReceived, removeDerived } from './derived-rows';
+import { contentUnderWay, endUnderWay } from './job-under-way';
 import type { NetworkState } from './network-state';
 import { findLastEvent, recordAudit, type Actor } from './queries/audit';
 import type { JobIdentity } from './queries/fact-row';
@@ -73,6 +75,11 @@ export class BranchWriter {
     );
   }
 
+  /** What has been written down of a job that is under way, or `undefined`. */
+  findUnderWay(jobRef: string): Moneyed | undefined {
+    return contentUnderWay(this.connection, this.branch.id, jobRef);
+  }
+
   /** Writes a job that was not there. */
   createJob(jobRef: string, job: RecordedJob, text: string, receipt: Receipt): void {
     const entry = this.packageOf(job);
@@ -84,6 +91,7 @@ export class BranchWriter {
     const jobId = Number(lastInsertRowid);
     this.addRevision(jobId, 1, 'created', text, receipt);
     this.writeRows(this.identity(jobId, jobRef, 1, entry), job);
+    endUnderWay(this.connection, this.branch.id, jobRef);
   }
 
   /** Writes a new revision of a job; one that was voided comes back with it. */
@@ -105,6 +113,7 @@ export class BranchWriter {
     this.addRevision(stored.id, revision, stored.voided ? 'restored' : 'replaced', text, receipt);
     this.removeRows(stored.id);
     this.writeRows(this.identity(stored.id, jobRef, revision, { ...entry, warrantyMonths }), job);
+    endUnderWay(this.connection, this.branch.id, jobRef);
     this.audit(stored.voided ? 'job.restore' : 'job.correct', jobRef, receipt, {
       revision,
       before: stored.content,

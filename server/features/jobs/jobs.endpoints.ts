@@ -28,12 +28,10 @@ export function mountJobs(mounting: Mounting, kit: Kit): void {
     async (call) => {
       const branch = namedBranch(call);
       const accepted = await store.queue.write(() =>
-        acceptJob(
-          new BranchWriter(store, branch),
-          call.params.jobRef,
-          call.body,
-          sendingOf(kit, call, call.params.jobRef),
-        ),
+        acceptJob(new BranchWriter(store, branch), call.params.jobRef, call.body, {
+          ...sendingOf(kit, call, call.params.jobRef),
+          source: sourceOf(call),
+        }),
       );
       return {
         status: accepted.status === 'created' ? 201 : 200,
@@ -118,6 +116,12 @@ const NONE: Sending['preconditions'] = {
   ifNoneMatch: undefined,
   lastChange: () => '',
 };
+
+/** A job typed into the product's own form says so; a system's key has none (rule 85). */
+function sourceOf({ caller, query }: Call<unknown, { via?: 'form' }>): Sending['source'] {
+  if (caller?.kind === 'key') return 'key';
+  return query.via ?? 'person';
+}
 
 function sendingOf(kit: Kit, call: Call, jobRef: string): Sending {
   const { caller } = call;

@@ -15,7 +15,7 @@ import { notFound } from '#shared/domain/refusal';
 import { deedOf } from '../../http/deed';
 import { mount, namedBranch, type Call, type Mounting } from '../../http/mount';
 import type { Kit } from '../../kit';
-import { dropBytes, keepBytes, keyOf } from './photo-bytes';
+import { dropPhotoBytes, keepPhotoBytes, photoKey } from '../../storage/photo-bytes';
 import { putPhoto, type PhotoBench } from './put-photo';
 import { remakePhoto } from './remake-photo';
 import { Turns } from './take-turns';
@@ -33,8 +33,8 @@ export function mountPhotos(mounting: Mounting, kit: Kit): void {
     writer: new PhotoWriter(store, branch),
     write: (work) => store.queue.write(work),
     remake: (bytes) => turns.take(() => remakePhoto(bytes)),
-    keepBytes: (storageKey, photo) => keepBytes(photos, storageKey, photo),
-    dropBytes: (storageKey) => dropBytes(photos, storageKey),
+    keepBytes: (storageKey, photo) => keepPhotoBytes(photos, storageKey, photo),
+    dropBytes: (storageKey) => dropPhotoBytes(photos, storageKey),
     newName: randomUUID,
   });
 
@@ -66,7 +66,7 @@ export function mountPhotos(mounting: Mounting, kit: Kit): void {
       const { jobRef, photo } = call.params;
       const db = store.scoped(call.scope);
       const row = findPhoto(db, namedBranch(call).id, jobRef, photo);
-      const bytes = row && (await photos.get(keyOf(row.storageKey, call.query.size)));
+      const bytes = row && (await photos.get(photoKey(row.storageKey, call.query.size)));
       if (!bytes) throw notFound();
       return { body: bytes };
     },
@@ -85,7 +85,7 @@ export function mountPhotos(mounting: Mounting, kit: Kit): void {
         writer.remove(jobRef, found, deedOn(call));
         return found;
       });
-      await dropBytes(photos, former.storageKey);
+      await dropPhotoBytes(photos, former.storageKey);
       return {};
     },
     { exists },
