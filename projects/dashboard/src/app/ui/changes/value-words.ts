@@ -37,7 +37,7 @@ function numberWords(path: string, value: number, known: KnownNames): string {
   if (name.endsWith('Cents')) return formatExactMoney(value, known.currency);
   if (names.includes('stages') || /minutes$/i.test(name)) return formatMinutes(value);
   if (/share$|rate$/i.test(name)) return `${exact(value * 100)}\u202f%`;
-  const unit = UNITS[name];
+  const unit = names[0] === 'norms' ? 'ml' : UNITS[name];
   return unit ? `${exact(value)}\u202f${unit}` : exact(value);
 }
 
