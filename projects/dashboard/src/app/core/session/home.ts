@@ -2,5 +2,5 @@ import type { Role } from '#shared/domain/vocabulary';
 
 /** The first page of a role. */
 export function homeOf(role: Role | undefined): string {
-  return role === 'recorder' ? '/jobs' : '/this-week';
+  return role === 'recorder' ? '/send' : '/this-week';
 }

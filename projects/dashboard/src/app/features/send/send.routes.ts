@@ -1,4 +1,5 @@
 import type { Routes } from '@angular/router';
+import { FIELD_DEFAULTS } from '../../ui/field-defaults';
 import { SendPage } from './send-page';
 
-export default [{ path: '', component: SendPage }] satisfies Routes;
+export default [{ path: '', component: SendPage, providers: [FIELD_DEFAULTS] }] satisfies Routes;

@@ -1,0 +1,16 @@
+import type { JobSheet } from '#shared/contracts/jobs';
+import type { JobDraft } from '#shared/contracts/under-way';
+
+/** What a job as recorded is as a draft, to be corrected: what was sent of it, without what was worked out since. */
+export function draftOfJob(job: JobSheet): JobDraft {
+  const { vehicle, package: sold, bookedOn, startedOn, completedOn, estimate, agreedExtras } = job;
+  const { actual, products, consumables, boughtInCents, findings, checks, workshop } = job;
+  const { invoice, notes } = job;
+  const draft = {
+    ...{ vehicle, package: sold, bookedOn, startedOn, completedOn, estimate, agreedExtras },
+    ...{ actual, products, consumables, boughtInCents, findings, checks, workshop },
+    ...{ invoice: invoice ?? undefined, notes },
+  };
+  // What is absent in the answer stays absent in the draft.
+  return JSON.parse(JSON.stringify(draft)) as JobDraft;
+}

@@ -1,0 +1,57 @@
+import type { DeviceDraft } from '../../core/drafts/device-draft';
+import { formatCounted } from '../../ui/format';
+import { carWords } from './review-words';
+import { SEND_STEPS, STEP_NAMES } from './send-steps';
+
+/** Where a job on this device stands, in words, and what to do about it. */
+export interface DraftWords {
+  readonly title: string;
+  readonly state: string;
+  /** `tide` goes well, `trouble` needs somebody, `quiet` waits for nobody. */
+  readonly tone: 'tide' | 'trouble' | 'quiet';
+  /** What opening it is called. */
+  readonly act: string;
+}
+
+/** A draft as the list tells it. */
+export function draftWords(draft: DeviceDraft): DraftWords {
+  const car = carWords(draft.content);
+  const title = [car || 'A car not named yet', draft.jobRef ? `job ${draft.jobRef}` : '']
+    .filter(Boolean)
+    .join(', ');
+  return { title, ...stateWords(draft) };
+}
+
+function stateWords(draft: DeviceDraft): Omit<DraftWords, 'title'> {
+  const photos = draft.photos.filter(({ state }) => state === 'here').length;
+  const refused = draft.photos.filter(({ state }) => state === 'refused').length;
+  switch (draft.state) {
+    case 'waiting':
+      return { state: 'waiting to be sent', tone: 'tide', act: 'Change it' };
+    case 'sending':
+      return { state: 'being sent', tone: 'tide', act: 'Look at it' };
+    case 'refused':
+      return {
+        state: `refused: ${draft.problem?.sentence ?? 'the server did not take it.'}`,
+        tone: 'trouble',
+        act: 'Mend it',
+      };
+    case 'sent':
+      return {
+        state: ['sent', photoWords(photos, 'still to go'), photoWords(refused, 'refused')]
+          .filter(Boolean)
+          .join(', '),
+        tone: refused > 0 ? 'trouble' : 'tide',
+        act: 'Look at it',
+      };
+    default: {
+      const correction = draft.corrects === undefined ? '' : 'a correction, ';
+      const step = STEP_NAMES[SEND_STEPS[draft.step] ?? 'car'];
+      return { state: `${correction}being written: ${step}`, tone: 'quiet', act: 'Go on' };
+    }
+  }
+}
+
+function photoWords(count: number, words: string): string {
+  return count === 0 ? '' : `${formatCounted(count, 'photo', 'photos')} ${words}`;
+}
