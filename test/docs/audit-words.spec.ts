@@ -13,7 +13,7 @@ function recorders(): string[] {
     readdirSync(path.join(root, folder), { recursive: true, encoding: 'utf8' })
       .filter((file) => file.endsWith('.ts') && !file.endsWith('.spec.ts'))
       .map((file) => readFileSync(path.join(root, folder, file), 'utf8'))
-      .filter((text) => /recordAudit\(|changeCatalogue\(/.test(text)),
+      .filter((text) => /recordAudit\(|changeCatalogue\(|\.(?:tell|audit)\(/.test(text)),
   );
 }
 

@@ -17,6 +17,7 @@ export const ACTION_WORDS: Readonly<Record<string, string>> = {
   'booking.set': 'took down a booking',
   'booking.remove': 'took out a booking',
   'under-way.drop': 'dropped a job under way',
+  'import.write': 'wrote an imported file',
   'claim.make': 'took down a claim',
   'claim.correct': 'corrected a claim',
   'come-back.mark': 'marked what was left on a car',
