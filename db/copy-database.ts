@@ -2,7 +2,8 @@ import BetterSqlite3 from 'better-sqlite3';
 import { existsSync, statSync } from 'node:fs';
 import { APPLICATION_ID, Connection, DatabaseRefused } from './database';
 import { migrations } from './migrations';
-import { verifyAudit } from './queries/audit';
+import { verifyAudit, type AuditCheck } from './queries/audit';
+import { firstEventAt } from './queries/audit-list';
 import { UnscopedDb } from './unscoped-db';
 
 /** What a checked database file holds. */
@@ -49,13 +50,28 @@ export function inspectDatabase(file: string): DatabaseContents {
     const strays: unknown = driver.pragma('foreign_key_check');
     if (pages !== 'ok' || !Array.isArray(strays) || strays.length > 0) throw damaged(file);
     const trail = verifyAudit(new UnscopedDb(new Connection(driver)));
-    if (trail.brokenAt !== null) {
-      throw new DatabaseRefused(
-        `The audit trail of ${file} does not hold: event ${trail.brokenAt} does not follow from the one before it.`,
-      );
-    }
+    if (trail.brokenAt !== null) throw brokenTrail(file, trail.brokenAt);
     const jobs = Number(driver.prepare('select count(*) from jobs').pluck().get());
     return { bytes: statSync(file).size, jobs, auditEvents: trail.events };
+  } catch (error) {
+    throw error instanceof DatabaseRefused ? error : damaged(file);
+  } finally {
+    driver.close();
+  }
+}
+
+/** Checks the audit trail of a database, even one that is being written to; throws `DatabaseRefused` naming the first event that does not fit. */
+export function inspectAudit(file: string): AuditCheck & { since: string | null } {
+  if (!existsSync(file)) throw new DatabaseRefused(`There is no database ${file}.`);
+  const driver = look(file);
+  const db = new UnscopedDb(new Connection(driver));
+  try {
+    // One state of the trail, whatever is added to it meanwhile.
+    return driver.transaction(() => {
+      const trail = verifyAudit(db);
+      if (trail.brokenAt !== null) throw brokenTrail(file, trail.brokenAt);
+      return { ...trail, since: firstEventAt(db) };
+    })();
   } catch (error) {
     throw error instanceof DatabaseRefused ? error : damaged(file);
   } finally {
@@ -120,6 +136,13 @@ function look(file: string): BetterSqlite3.Database {
   } catch (error) {
     throw new DatabaseRefused(`The file ${file} cannot be opened: ${codeOf(error)}.`);
   }
+}
+
+/** The refusal that names the first event of a trail that does not fit. */
+function brokenTrail(file: string, event: number): DatabaseRefused {
+  return new DatabaseRefused(
+    `The audit trail of ${file} does not hold: event ${event} does not follow from the one before it.`,
+  );
 }
 
 function damaged(file: string): DatabaseRefused {

@@ -31,7 +31,7 @@ export interface AuditEntry {
 }
 
 /** Whatever reads rows of the whole network: the trail has no scope, and is head office's alone. */
-interface Reader {
+export interface NetworkReader {
   all<Row>(query: Query): Row[];
 }
 
@@ -93,6 +93,8 @@ export function findLastEvent(
 export interface AuditCheck {
   /** Events that follow from each other, from the first on. */
   events: number;
+  /** When the first of them was, or null. */
+  since: string | null;
   /** The first that does not, or null. */
   brokenAt: number | null;
   /** Hash of the last event that does. */
@@ -100,24 +102,26 @@ export interface AuditCheck {
 }
 
 /** Reads the whole trail and checks every link; tells the first event that does not fit. */
-export function verifyAudit(db: Reader): AuditCheck {
+export function verifyAudit(db: NetworkReader): AuditCheck {
   let previous = GENESIS;
+  let since: string | null = null;
   let events = 0;
   let after = 0;
   for (;;) {
     const page = db.all<StoredEvent>(
       sql('audit_events').where('id', '>', after).orderBy('id').limit(1000),
     );
-    if (page.length === 0) return { events, brokenAt: null, lastHash: previous };
+    if (page.length === 0) return { events, since, brokenAt: null, lastHash: previous };
     for (const event of page) {
       if (
         event.id !== events + 1 ||
         event.previous_hash !== previous ||
         event.hash !== hashOf(event)
       ) {
-        return { events, brokenAt: event.id, lastHash: previous };
+        return { events, since, brokenAt: event.id, lastHash: previous };
       }
       previous = event.hash;
+      since ??= event.at;
       events += 1;
       after = event.id;
     }

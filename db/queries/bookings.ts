@@ -32,6 +32,23 @@ export function listBookings(db: ScopedDb, branch: string, from: string): Bookin
   );
 }
 
+/** What a booking says. */
+export type Booking = Pick<BookingRow, 'expectedOn' | 'package' | 'bodyType'>;
+
+/** A booking of a branch, inside a write. */
+export function findBookingRow(
+  db: UnscopedDb,
+  branch: ScopedBranch,
+  ref: string,
+): Booking | undefined {
+  return db.first<Booking>(
+    sql('bookings')
+      .join('packages', 'packages.id', 'bookings.package_id')
+      .where({ branch_id: branch.id, ref })
+      .select({ expectedOn: 'expected_on', package: 'packages.code', bodyType: 'body_type' }),
+  );
+}
+
 /** Writes a booking of a branch, inside a write; says whether it is new. */
 export function putBookingRow(
   db: UnscopedDb,

@@ -1,5 +1,6 @@
 import type { NetworkReference } from '#db/network-reference';
 import type { ScopedDb } from '#db/scoped-db';
+import { checkAuditChain, readAuditNames, readAuditPage } from '../features/audit/read-audit';
 import { listComeBacks } from '../features/come-back/list-come-backs';
 import { listJobs } from '../features/job-list/list-jobs';
 import { answerMargin } from '../features/margin/answer-margin';
@@ -7,6 +8,7 @@ import { answerOverrun } from '../features/overrun/answer-overrun';
 import { answerProductNeed } from '../features/products/answer-product-need';
 import { answerProducts } from '../features/products/answer-products';
 import { answerQuote } from '../features/quote/answer-quote';
+import { answerUsual } from '../features/quote/answer-usual';
 import { answerRot } from '../features/rot/answer-rot';
 import type { ReadName, ReadTasks } from './read-tasks';
 
@@ -26,6 +28,10 @@ const ANSWERS: {
   productNeed: answerProductNeed,
   comeBack: listComeBacks,
   quote: answerQuote,
+  usual: answerUsual,
+  audit: readAuditPage,
+  auditNames: readAuditNames,
+  auditCheck: checkAuditChain,
 };
 
 /** Answers a question from one reader's rows. */

@@ -1,7 +1,10 @@
 import type { NetworkReference } from '#db/network-reference';
 import type { ScopedDb } from '#db/scoped-db';
+import type { AuditFilters } from '#db/queries/audit-list';
+import { everyEvent } from '../features/audit/read-audit';
 import { everyComeBack, type ComeBacksAsked } from '../features/come-back/list-come-backs';
 import {
+  AUDIT_COLUMNS,
   COME_BACK_COLUMNS,
   JOB_COLUMNS,
   MARGIN_COLUMNS,
@@ -98,6 +101,11 @@ export function* csvChunks(
       for (const page of everyComeBack(db, input as ComeBacksAsked)) {
         yield csvRows(COME_BACK_COLUMNS, page);
       }
+      return;
+    }
+    case 'audit': {
+      yield csvHeader(AUDIT_COLUMNS);
+      for (const page of everyEvent(db, input as AuditFilters)) yield csvRows(AUDIT_COLUMNS, page);
     }
   }
 }

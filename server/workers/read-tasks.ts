@@ -5,6 +5,9 @@ import type { OverrunAnswer } from '#shared/contracts/overrun';
 import type { ProductNeedAnswer, ProductsAnswer } from '#shared/contracts/products';
 import type { QuoteAnswer } from '#shared/contracts/quote';
 import type { RotAnswer } from '#shared/contracts/rot';
+import type { UsualCar } from '#shared/contracts/usual';
+import type { AuditFilters } from '#db/queries/audit-list';
+import type { AuditChain, AuditPage, AuditQuestion } from '../features/audit/read-audit';
 import type { JobListQuestion, JobPage, JobsAsked } from '../features/job-list/list-jobs';
 import type { MarginQuestion } from '../features/margin/answer-margin';
 import type { OverrunQuestion } from '../features/overrun/answer-overrun';
@@ -16,6 +19,7 @@ import type {
 import type { NeedQuestion } from '../features/products/answer-product-need';
 import type { ProductsQuestion } from '../features/products/answer-products';
 import type { QuoteQuestion } from '../features/quote/answer-quote';
+import type { AskedCar } from '../features/quote/quoted-car';
 import type { RotQuestion } from '../features/rot/answer-rot';
 
 /** What a worker can be asked, and what it answers. The scope goes along packed; everything else is plain data. */
@@ -28,6 +32,10 @@ export interface ReadTasks {
   productNeed: { input: NeedQuestion; output: ProductNeedAnswer };
   comeBack: { input: ComeBackQuestion; output: ComeBackPage };
   quote: { input: QuoteQuestion; output: QuoteAnswer };
+  usual: { input: AskedCar; output: UsualCar };
+  audit: { input: AuditQuestion; output: AuditPage };
+  auditNames: { input: null; output: { actors: string[]; actions: string[] } };
+  auditCheck: { input: null; output: AuditChain };
 }
 
 /** Exports by name, with the question each answers. */
@@ -44,6 +52,7 @@ export interface ExportTasks {
   'product-need': NeedQuestion;
   quote: QuoteQuestion;
   'come-back': ComeBacksAsked;
+  audit: AuditFilters;
 }
 
 export type ReadName = keyof ReadTasks;

@@ -1,4 +1,12 @@
-import { deleteBookingRow, listBookings, putBookingRow } from '#db/queries/bookings';
+import { recordAudit } from '#db/queries/audit';
+import {
+  deleteBookingRow,
+  findBookingRow,
+  listBookings,
+  putBookingRow,
+  type Booking,
+} from '#db/queries/bookings';
+import type { ScopedBranch } from '#db/scope';
 import {
   deleteBooking,
   listBookings as listContract,
@@ -6,7 +14,8 @@ import {
 } from '#shared/contracts/bookings';
 import { localDate } from '#shared/domain/calendar';
 import { notFound } from '#shared/domain/refusal';
-import { mount, namedBranch, type Mounting } from '../../http/mount';
+import { deedOf } from '../../http/deed';
+import { mount, namedBranch, type Call, type Mounting } from '../../http/mount';
 import type { Kit } from '../../kit';
 
 /** Cars a branch expects (rule 75). */
@@ -22,9 +31,20 @@ export function mountBookings(mounting: Mounting, kit: Kit): void {
       const { expectedOn, bodyType, package: code } = call.body;
       const packageId = store.state.package(code)?.id;
       if (packageId === undefined) throw new Error('a package that the rules have found is gone');
-      const put = await store.queue.write(() =>
-        putBookingRow(store.unscoped, branch, { ref, expectedOn, packageId, bodyType }),
-      );
+      const put = await store.queue.write(() => {
+        const before = findBookingRow(store.unscoped, branch, ref);
+        const after = { expectedOn, package: code, bodyType };
+        const put = putBookingRow(store.unscoped, branch, { ref, expectedOn, packageId, bodyType });
+        // A system that sends the same bookings every night changes nothing.
+        if (!before || !sameBooking(before, after)) {
+          recordAudit(store.unscoped, {
+            ...toldOf(call, branch),
+            action: 'booking.set',
+            detail: { before: before ?? null, after },
+          });
+        }
+        return put;
+      });
       return {
         status: put === 'created' ? 201 : 200,
         body: { branch: branch.code, ref, ...call.body },
@@ -42,10 +62,16 @@ export function mountBookings(mounting: Mounting, kit: Kit): void {
 
   mount(mounting, deleteBooking, async (call) => {
     const branch = namedBranch(call);
-    const gone = await store.queue.write(() =>
-      deleteBookingRow(store.unscoped, branch, call.params.ref),
-    );
-    if (!gone) throw notFound();
+    await store.queue.write(() => {
+      const before = findBookingRow(store.unscoped, branch, call.params.ref);
+      if (!before) throw notFound();
+      deleteBookingRow(store.unscoped, branch, call.params.ref);
+      recordAudit(store.unscoped, {
+        ...toldOf(call, branch),
+        action: 'booking.remove',
+        detail: { before, after: null },
+      });
+    });
     return {};
   });
 
@@ -54,4 +80,13 @@ export function mountBookings(mounting: Mounting, kit: Kit): void {
     const today = localDate(kit.clock.now(), branch.timeZone);
     return { body: { items: listBookings(store.scoped(call.scope), branch.code, today) } };
   });
+}
+
+function toldOf(call: Call<{ ref: string }>, branch: ScopedBranch) {
+  const subject = `/branches/${branch.code}/bookings/${call.params.ref}`;
+  return { ...deedOf(call, subject), branchId: branch.id };
+}
+
+function sameBooking(a: Booking, b: Booking): boolean {
+  return a.expectedOn === b.expectedOn && a.package === b.package && a.bodyType === b.bodyType;
 }

@@ -59,3 +59,9 @@ export const COME_BACK_COLUMNS = [
   ...['structural', 'action', 'completedOn', 'dueOn', 'status', 'note', 'ownerToldOn'],
   ...['changedBy', 'changedAt', 'closedByJobRef'],
 ];
+
+/** The detail is JSON in its cell. */
+export const AUDIT_COLUMNS = [
+  ...['id', 'at', 'actor', 'address', 'action', 'subject', 'branch', 'detail', 'hash'],
+  'previousHash',
+];

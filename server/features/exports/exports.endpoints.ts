@@ -1,5 +1,6 @@
 import { recordAudit } from '#db/queries/audit';
 import type { Scope } from '#db/scope';
+import { exportAudit } from '#shared/contracts/audit';
 import {
   exportComeBack,
   exportJobs,
@@ -14,6 +15,8 @@ import {
   exportRotModels,
   exportRotZones,
 } from '#shared/contracts/exports';
+import { breaksOfPeriod } from '#shared/domain/period';
+import { refuseInput } from '#shared/domain/refusal';
 import { actorOf } from '../../auth/caller';
 import { realClock } from '../../clock';
 import { comeBackQuestion } from '../../http/come-back-question';
@@ -68,6 +71,15 @@ export function mountExports(mounting: Mounting, kit: Kit): void {
       return exported(kit, call, name, scope, () => kit.reads.stream(name, scope, question));
     });
   }
+
+  mount(mounting, exportAudit, (call) => {
+    const { from, to } = call.query;
+    const problems = from !== undefined && to !== undefined ? breaksOfPeriod({ from, to }) : [];
+    if (problems.length > 0) throw refuseInput(problems);
+    return exported(kit, call, 'audit', call.scope, () =>
+      kit.reads.stream('audit', call.scope, call.query),
+    );
+  });
 
   mount(mounting, exportQuote, (call) => {
     const { scope, ...question } = quoteQuestion(kit, call.scope, call.query, 'seen');

@@ -62,7 +62,7 @@ export async function addPerson(
       action: 'person.add',
       subject: `/people/${id}`,
       branchId: null,
-      detail: { ...details, invited: person.invited },
+      detail: { before: null, after: details, invited: person.invited },
     });
     if (person.invited) {
       const token = newToken();
