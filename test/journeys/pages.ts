@@ -51,6 +51,19 @@ export function everyPage({ rotten, unbilled }: KnownJobs): Stop[] {
     { name: 'how-it-is-counted', path: '/how-it-is-counted', as: 'site_manager' },
     { name: 'account', path: '/account', as: 'site_manager' },
     { name: 'mailbox', path: '/mailbox', as: 'head_office' },
+    { name: 'set-up-network', path: '/set-up/network', as: 'head_office' },
+    { name: 'set-up-regions', path: '/set-up/regions', as: 'head_office' },
+    { name: 'set-up-region', path: '/set-up/regions/SOUND', as: 'head_office' },
+    { name: 'set-up-branches', path: '/set-up/branches', as: 'head_office' },
+    { name: 'set-up-branch', path: '/set-up/branches/HAV', as: 'head_office' },
+    { name: 'set-up-products', path: '/set-up/products', as: 'head_office' },
+    { name: 'set-up-product', path: '/set-up/products/CW1', as: 'head_office' },
+    { name: 'set-up-consumables', path: '/set-up/consumables', as: 'head_office' },
+    { name: 'set-up-packages', path: '/set-up/packages', as: 'head_office' },
+    { name: 'set-up-package', path: '/set-up/packages/full', as: 'head_office' },
+    { name: 'set-up-people', path: '/set-up/people', as: 'head_office' },
+    { name: 'set-up-person', path: '/set-up/people/1', as: 'head_office' },
+    { name: 'first-run', path: '/first-run', as: 'head_office' },
     { name: 'no-page', path: '/no-such-page', as: 'site_manager' },
   ];
 }
@@ -136,6 +149,49 @@ export function everyState({ rotten }: KnownJobs): Stop[] {
       as: 'site_manager',
       refused: / 404 /,
     },
+    {
+      name: 'set-up-effect',
+      path: '/set-up/branches/HAV',
+      as: 'head_office',
+      prepare: async (page) => {
+        await page.getByLabel('Cost of an hour of work').fill('95');
+        await page.getByRole('heading', { name: 'Before you save' }).waitFor();
+      },
+    },
+    {
+      name: 'set-up-key-shown',
+      path: '/set-up/branches/HAV',
+      as: 'head_office',
+      prepare: async (page) => {
+        await page.getByLabel('What the key is for').fill('the office programme');
+        await press('Make a key')(page);
+        await page.getByText('The key, shown only now.').waitFor();
+      },
+    },
+    {
+      name: 'set-up-refused',
+      path: '/set-up/people',
+      as: 'head_office',
+      prepare: press('Add the person'),
+    },
+    {
+      name: 'set-up-removal-refused',
+      path: '/set-up/products/CW1',
+      as: 'head_office',
+      refused: / 409 /,
+      prepare: async (page) => {
+        await press(/^Take .* out$/)(page);
+        await page.locator('us-removal us-trouble').waitFor();
+      },
+    },
+    { name: 'set-up-none', path: '/set-up/branches/NOWHERE', as: 'head_office' },
+    ...['network', 'region', 'branch', 'products', 'package', 'people', 'job'].map(
+      (step): Stop => ({
+        name: `first-run-${step}`,
+        path: `/first-run?step=${step}`,
+        as: 'head_office',
+      }),
+    ),
     {
       name: 'account-refused',
       path: '/account',

@@ -61,7 +61,9 @@ export class ChangeForm<Out> {
     initialValue: {},
   });
   private readonly done = signal<string | undefined>(undefined);
-  private readonly hurried = signal(false);
+  /** What stood in the fields when they were sent before their effect was told. */
+  private readonly sentEarly = signal('');
+  private readonly hurried = computed(() => this.sentEarly() === JSON.stringify(this.typed()));
   /** Counts what was taken: a saved change is no longer a planned one. */
   private readonly taken = signal(0);
   /** Refusals that belong to no field that is shown. */
@@ -109,7 +111,6 @@ export class ChangeForm<Out> {
       this.typed();
       untracked(() => {
         if (this.form.dirty) this.done.set(undefined);
-        this.hurried.set(false);
       });
     });
   }
@@ -123,10 +124,10 @@ export class ChangeForm<Out> {
     }
     if (Object.keys(wrong).length > 0) return;
     if (this.mustWait(typed)) {
-      this.hurried.set(true);
+      this.sentEarly.set(JSON.stringify(typed));
       return;
     }
-    this.hurried.set(false);
+    this.sentEarly.set('');
     const answer = await this.saving.run(typed);
     if (!answer) {
       this.markRefused();
