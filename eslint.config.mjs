@@ -54,7 +54,11 @@ export default defineConfig(
     extends: [js.configs.recommended, tseslint.configs.strictTypeChecked],
     languageOptions: {
       parserOptions: {
-        project: ['tsconfig.check.json', 'projects/dashboard/tsconfig.spec.json'],
+        project: [
+          'tsconfig.check.json',
+          'projects/dashboard/tsconfig.spec.json',
+          'projects/dashboard/tsconfig.worker.json',
+        ],
         tsconfigRootDir: import.meta.dirname,
       },
     },

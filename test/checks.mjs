@@ -20,6 +20,10 @@ export const checks = [
     args: [ngc, '--noEmit', '-p', 'projects/dashboard/tsconfig.app.json'],
   },
   {
+    name: 'types of the service worker',
+    args: ['node_modules/typescript/bin/tsc', '-p', 'projects/dashboard/tsconfig.worker.json'],
+  },
+  {
     name: "types of the pages' specs",
     args: [ngc, '--noEmit', '-p', 'projects/dashboard/tsconfig.spec.json'],
   },

@@ -14,10 +14,14 @@ export const parts = {
     command: ['node_modules/typescript/bin/tsc', '-p', 'tsconfig.server.json', '--noEmitOnError'],
   },
   pages: {
-    sources: ['shared', 'projects/dashboard', 'angular.json', ...SETTINGS],
+    sources: [
+      ...['shared', 'projects/dashboard', 'angular.json'],
+      ...['server/commands/build-pages.mjs', 'server/commands/precache-list.mjs'],
+      ...SETTINGS,
+    ],
     results: ['dist/dashboard'],
     entry: 'dist/dashboard/index.html',
-    command: ['node_modules/@angular/cli/bin/ng.js', 'build'],
+    command: ['server/commands/build-pages.mjs'],
   },
 };
 

@@ -53,6 +53,6 @@ function policy(nonce: string): string {
     "form-action 'self'",
     "frame-ancestors 'none'",
     "require-trusted-types-for 'script'",
-    'trusted-types angular angular#bundler angular#unsafe-bypass angular#components',
+    'trusted-types angular angular#bundler angular#unsafe-bypass angular#components underseam',
   ].join('; ');
 }
