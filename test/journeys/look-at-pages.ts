@@ -43,7 +43,7 @@ export interface Share {
 export function lookAtPages(share: Share): void {
   const openWindow = useChromium(() => servedDemo().url);
   const visits = new Map<Stop['as'], Visit>();
-  const known = { rotten: '', unbilled: '' };
+  const known = { rotten: '', unbilled: '', corrected: '' };
 
   beforeAll(() => {
     mkdirSync(PICTURES, { recursive: true });
@@ -51,6 +51,7 @@ export function lookAtPages(share: Share): void {
     const holed = own.filter(({ job }) => JSON.stringify(job).includes('"holed"') && job.invoice);
     known.rotten = holed.at(-1)!.jobRef;
     known.unbilled = own.filter(({ job }) => !job.invoice).at(-1)!.jobRef;
+    known.corrected = own.filter(({ revision }) => revision > 1).at(-1)!.jobRef;
   });
 
   async function visit(as: Stop['as']): Promise<Visit> {
@@ -93,11 +94,14 @@ export function lookAtPages(share: Share): void {
   function named(stop: Stop): Stop {
     return {
       ...stop,
-      path: stop.path.replace('{rotten}', known.rotten).replace('{unbilled}', known.unbilled),
+      path: stop.path.replace(
+        /\{(rotten|unbilled|corrected)\}/,
+        (_, name: keyof typeof known) => known[name],
+      ),
     };
   }
 
-  const marks = { rotten: '{rotten}', unbilled: '{unbilled}' };
+  const marks = { rotten: '{rotten}', unbilled: '{unbilled}', corrected: '{corrected}' };
   const stops = (share.of === 'pages' ? everyPage(marks) : everyState(marks)).filter(({ as }) =>
     share.as.includes(as),
   );

@@ -17,6 +17,7 @@ export interface Stop {
 export interface KnownJobs {
   rotten: string;
   unbilled: string;
+  corrected: string;
 }
 
 /** A car that the demo branch has seen often. */
@@ -64,12 +65,15 @@ export function everyPage({ rotten, unbilled }: KnownJobs): Stop[] {
     { name: 'set-up-people', path: '/set-up/people', as: 'head_office' },
     { name: 'set-up-person', path: '/set-up/people/1', as: 'head_office' },
     { name: 'first-run', path: '/first-run', as: 'head_office' },
+    { name: 'audit', path: '/audit', as: 'head_office' },
+    { name: 'voided', path: '/voided', as: 'site_manager' },
+    { name: 'voided-network', path: '/voided', as: 'head_office' },
     { name: 'no-page', path: '/no-such-page', as: 'site_manager' },
   ];
 }
 
 /** The same pages with something opened or gone wrong. */
-export function everyState({ rotten }: KnownJobs): Stop[] {
+export function everyState({ rotten, corrected }: KnownJobs): Stop[] {
   const press = (name: string | RegExp) => (page: Page) =>
     page.getByRole('button', { name }).first().click();
   return [
@@ -192,6 +196,25 @@ export function everyState({ rotten }: KnownJobs): Stop[] {
         as: 'head_office',
       }),
     ),
+    {
+      name: 'audit-open',
+      path: '/audit?action=week.note',
+      as: 'head_office',
+      prepare: async (page) => {
+        await press(/^Open event/)(page);
+        await press('Check the chain')(page);
+        await page.getByText('The last event that fits').waitFor();
+      },
+    },
+    { name: 'audit-none', path: '/audit?actor=nobody-of-that-name', as: 'head_office' },
+    { name: 'audit-who', path: '/audit', as: 'head_office', prepare: press(/^Who/) },
+    { name: 'audit-thing', path: '/audit', as: 'head_office', prepare: press(/^To what/) },
+    {
+      name: 'job-sheet-changes',
+      path: `/jobs/HAV/${corrected}?changes=1-2`,
+      as: 'site_manager',
+      prepare: (page) => page.getByRole('table', { name: /^What changed from/ }).waitFor(),
+    },
     {
       name: 'account-refused',
       path: '/account',

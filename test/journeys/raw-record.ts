@@ -5,6 +5,7 @@ import path from 'node:path';
 export interface RawJob {
   branch: string;
   jobRef: string;
+  revision: number;
   job: {
     vehicle: { make: string; model: string; bodyType: string; firstRegistered: string };
     package: string;
@@ -39,16 +40,17 @@ export function readRawRecord(data: string): { jobs: RawJob[]; costs: RawCosts }
   try {
     const rows = file
       .prepare(
-        `select branches.code as branch, job_ref as jobRef, content
+        `select branches.code as branch, job_ref as jobRef, jobs.revision as revision, content
            from jobs join branches on branches.id = branch_id
            join job_revisions on job_id = jobs.id
           where voided_at is null and job_revisions.revision =
             (select max(revision) from job_revisions as every where every.job_id = jobs.id)`,
       )
-      .all() as { branch: string; jobRef: string; content: string }[];
-    const jobs = rows.map(({ branch, jobRef, content }) => ({
+      .all() as { branch: string; jobRef: string; revision: number; content: string }[];
+    const jobs = rows.map(({ branch, jobRef, revision, content }) => ({
       branch,
       jobRef,
+      revision,
       job: JSON.parse(content) as RawJob['job'],
     }));
     return { jobs, costs: readCosts(file) };
