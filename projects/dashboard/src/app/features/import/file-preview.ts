@@ -3,7 +3,7 @@ import type { ImportedFile } from '#shared/contracts/imports';
 import { CellTemplate } from '../../ui/data-table/cell-template';
 import { DataTable } from '../../ui/data-table/data-table';
 import { formatCount } from '../../ui/format';
-import { previewColumns, REFUSED_COLUMNS } from './preview-rows';
+import { previewColumns, reasons, REFUSED_COLUMNS } from './preview-rows';
 import { RowStatus } from './row-status';
 
 /** The first rows of a file with what each would do, and the refused ones with their reasons; between its tags what fetches them. */
@@ -23,6 +23,7 @@ export class FilePreview {
     () =>
       `The first ${formatCount(this.file().preview.length)} of ${formatCount(this.file().counts.rows)} rows`,
   );
+  protected readonly reasons = reasons;
   protected readonly refusedColumns = REFUSED_COLUMNS;
   protected readonly refusedNote = computed(() => {
     const shown = this.file().refusedPreview.length;

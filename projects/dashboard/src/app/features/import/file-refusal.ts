@@ -6,9 +6,9 @@ export function refusalOf(file: {
   readonly size: number;
 }): string | undefined {
   if (/\.(xls[xmb]?|ods|numbers)$/i.test(file.name)) {
-    return 'A workbook is not taken. Save the sheet as CSV (UTF-8) and send that.';
+    return 'This is a workbook; save it as CSV (UTF-8) and send that.';
   }
   if (file.size > LARGEST_FILE) return 'A file has at most 50 MB.';
-  if (file.size === 0) return 'This file is empty.';
+  if (file.size === 0) return 'The file is empty.';
   return undefined;
 }

@@ -10,6 +10,8 @@ export const STATUS_NAMES: Readonly<Record<PreviewRow['status'], string>> = {
   refused: 'refused',
 };
 
+const LONGEST_CELL = 40;
+
 const LINE: Column<PreviewRow> = {
   key: 'line',
   label: 'Line',
@@ -27,7 +29,7 @@ export function previewColumns(file: Pick<ImportedFile, 'columns'>): Column<Prev
       .map((column): Column<PreviewRow> => ({
         key: `column-${column.index}`,
         label: column.heading || `Column ${column.index + 1}`,
-        text: (row) => row.values[column.index] ?? '',
+        text: (row) => shortened(row.values[column.index] ?? ''),
       })),
   ];
 }
@@ -38,6 +40,11 @@ export const REFUSED_COLUMNS: readonly Column<PreviewRow>[] = [
   { key: 'ref', label: 'Reference', text: (row) => row.ref ?? 'none' },
   { key: 'why', label: 'Why', text: reasons },
 ];
+
+/** A long note must not push the other cells out of sight. */
+function shortened(value: string): string {
+  return value.length > LONGEST_CELL ? `${value.slice(0, LONGEST_CELL - 1)}…` : value;
+}
 
 /** Every reason of a row: `Completed on: is not a day; Make: must not be empty`. */
 export function reasons(row: PreviewRow): string {

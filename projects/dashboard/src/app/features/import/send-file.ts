@@ -22,6 +22,7 @@ import {
 } from '#shared/contracts/imports';
 import { EMPTY_AND_ABSENT } from '#shared/domain/import-field';
 import { Api } from '../../core/api/api';
+import { fieldMessage } from '../../core/api/problem';
 import { sending } from '../../core/api/sending';
 import { Catalogue } from '../../core/catalogue/catalogue';
 import { formatCount } from '../../ui/format';
@@ -71,6 +72,11 @@ export class SendFile {
     if (!gone?.of) return 'Being sent';
     if (gone.bytes >= gone.of) return 'Sent; being looked at';
     return `${sizeWords(gone.bytes)} of ${sizeWords(gone.of)} sent`;
+  });
+  /** What the server says of the file itself. */
+  protected readonly refused = computed(() => {
+    const message = fieldMessage(this.upload.problem(), '/file');
+    return message && `${message.charAt(0).toUpperCase()}${message.slice(1)}.`;
   });
   protected readonly sizeWords = sizeWords;
 
