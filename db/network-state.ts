@@ -1,6 +1,6 @@
-import { CostBook, type CostChange } from '#shared/domain/cost-book';
-import type { BodyType, ConsumableKind } from '#shared/domain/vocabulary';
+import { CostBook } from '#shared/domain/cost-book';
 import { sql, type Connection } from './database';
+import { listCostEntries } from './queries/cost-entries';
 import type { ScopedBranch } from './scope';
 
 export interface PackageEntry {
@@ -50,7 +50,7 @@ export class NetworkState {
         )
         .map((row) => [row.code, row]),
     );
-    this.costs = CostBook.of(this.costEntries());
+    this.costs = CostBook.of(listCostEntries(this.connection, sql('branch_rates')));
   }
 
   productId(code: string): number | undefined {
@@ -61,76 +61,7 @@ export class NetworkState {
     return this.packages.get(code);
   }
 
-  private costEntries(): CostChange[] {
-    const rates = this.connection.all<{ code: string; from_date: string; value: number }>(
-      sql('branch_rates')
-        .join('branches', 'branches.id', 'branch_rates.branch_id')
-        .select('branches.code', 'from_date', { value: 'hourly_cost_cents' }),
-    );
-    const products = this.connection.all<{ code: string; from_date: string; value: number }>(
-      sql('product_costs')
-        .join('products', 'products.id', 'product_costs.product_id')
-        .select('products.code', 'from_date', { value: 'cost_per_litre_cents' }),
-    );
-    const consumables = this.connection.all<{
-      code: ConsumableKind;
-      from_date: string;
-      value: number;
-    }>(sql('consumable_costs').select({ code: 'kind' }, 'from_date', { value: 'unit_cost_cents' }));
-    const fees = this.connection.all<{ from_date: string; value: number }>(
-      sql('network_fees').select('from_date', { value: 'fee_micros' }),
-    );
-    return [
-      ...rates.map((row) => ({ kind: 'hourlyCost' as const, ...dated(row) })),
-      ...products.map((row) => ({ kind: 'product' as const, ...dated(row) })),
-      ...consumables.map((row) => ({
-        kind: 'consumable' as const,
-        code: row.code,
-        from: row.from_date,
-        value: row.value,
-      })),
-      ...fees.map((row) => ({ kind: 'fee' as const, from: row.from_date, value: row.value })),
-      ...this.normEntries(),
-    ];
-  }
-
-  private normEntries(): CostChange[] {
-    const lines = this.connection.all<{
-      package: string;
-      body_type: BodyType;
-      product: string;
-      ml: number;
-    }>(
-      sql('norms')
-        .join('packages', 'packages.id', 'norms.package_id')
-        .join('products', 'products.id', 'norms.product_id')
-        .orderBy(['packages.code', 'body_type', 'products.code'])
-        .select({ package: 'packages.code' }, 'body_type', { product: 'products.code' }, 'ml'),
-    );
-    const norms = new Map<string, Extract<CostChange, { kind: 'norm' }>>();
-    for (const line of lines) {
-      const key = `${line.package} ${line.body_type}`;
-      const norm = norms.get(key) ?? {
-        kind: 'norm',
-        package: line.package,
-        bodyType: line.body_type,
-        lines: [],
-      };
-      norm.lines.push({ product: line.product, ml: line.ml });
-      norms.set(key, norm);
-    }
-    return [...norms.values()];
-  }
-
   private one<Row>(text: string): Row {
     return this.connection.prepare(text).get() as Row;
   }
-}
-
-function dated(row: { code: string; from_date: string; value: number }): {
-  code: string;
-  from: string;
-  value: number;
-} {
-  return { code: row.code, from: row.from_date, value: row.value };
 }
