@@ -1,7 +1,13 @@
 import type { Knex } from 'knex';
 import { sql, type Connection, type Query } from './database';
 import { whereJobs, type JobFilters } from './queries/job-filters';
-import type { QuotedCar, QuoteFigures, QuoteRung } from './queries/quote';
+import {
+  readQuoteFigures,
+  type QuotedCar,
+  type QuoteFigures,
+  type QuoteRung,
+} from './queries/quote';
+import { readUsualFigures, type UsualFigures } from './queries/usual';
 import { nearestNetworkSet } from './quote-reference';
 import type { Scope } from './scope';
 import { VISIBLE } from './visible-rows';
@@ -69,7 +75,31 @@ export class NetworkReference {
   ): { rung: QuoteRung; figures: QuoteFigures } | undefined {
     const [branch] = this.scope.branches;
     const need = { cars: fewestCars, others: FEWEST_OTHERS };
-    return branch && nearestNetworkSet(this.connection, branch.id, car, rungs, need);
+    return (
+      branch && nearestNetworkSet(this.connection, branch.id, car, rungs, need, readQuoteFigures)
+    );
+  }
+
+  /** The same set with what its cars usually take; a figure of it is told only with as many cars and five other branches behind it alone. */
+  nearestUsualSet(
+    car: QuotedCar,
+    rungs: readonly QuoteRung[],
+    fewestCars: number,
+    fewestBehind: number,
+  ): { rung: QuoteRung; figures: UsualFigures } | undefined {
+    const [branch] = this.scope.branches;
+    const need = { cars: fewestCars, others: FEWEST_OTHERS };
+    return (
+      branch &&
+      nearestNetworkSet(this.connection, branch.id, car, rungs, need, (source, ...set) =>
+        readUsualFigures(
+          source,
+          branch.id,
+          ...set,
+          ({ cars, others }) => cars >= fewestBehind && others >= FEWEST_OTHERS,
+        ),
+      )
+    );
   }
 
   /** Whether rows of at least five branches outside the caller's reach are among some; always for head office. */

@@ -1,12 +1,5 @@
 import { sql, type Connection } from './database';
-import {
-  countRungs,
-  readQuoteFigures,
-  type QuotedCar,
-  type QuoteFigures,
-  type QuoteRung,
-  type QuoteSource,
-} from './queries/quote';
+import { countRungs, type QuotedCar, type QuoteRung, type QuoteSource } from './queries/quote';
 import { VISIBLE } from './visible-rows';
 
 /** Branch by branch, so that the days asked for are found within each. */
@@ -20,17 +13,25 @@ export interface QuoteNeed {
   others: number;
 }
 
+/** Reads the figures of a set: sums and quantiles, never rows. */
+export type ReadFigures<Figures> = (
+  source: QuoteSource,
+  car: QuotedCar,
+  rung: QuoteRung,
+) => Figures | undefined;
+
 /**
  * The figures of the nearest set of the network's cars with enough cars and other branches behind it (rule 48). Sums and
  * quantiles only; they depend on the branch quoted for and on nobody who asks.
  */
-export function nearestNetworkSet(
+export function nearestNetworkSet<Figures>(
   connection: Connection,
   branchId: number,
   car: QuotedCar,
   rungs: readonly QuoteRung[],
   need: QuoteNeed,
-): { rung: QuoteRung; figures: QuoteFigures } | undefined {
+  read: ReadFigures<Figures>,
+): { rung: QuoteRung; figures: Figures } | undefined {
   const source = everySource(connection);
   const counts = countRungs(source, car);
   for (const rung of rungs) {
@@ -38,7 +39,7 @@ export function nearestNetworkSet(
     const cars = behind.reduce((all, row) => all + row[rung], 0);
     const others = behind.filter((row) => row.branchId !== branchId).length;
     if (cars >= need.cars && others >= need.others) {
-      const figures = readQuoteFigures(source, car, rung);
+      const figures = read(source, car, rung);
       return figures && { rung, figures };
     }
   }

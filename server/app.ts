@@ -30,7 +30,7 @@ import { mountSetUp } from './features/set-up/set-up.endpoints';
 import { mountSignIn } from './features/sign-in/sign-in.endpoints';
 import { mountSystem } from './features/system/system.endpoints';
 import { mountUnderWay } from './features/under-way/under-way.endpoints';
-import { mountUsual } from './features/usual/usual.endpoints';
+import { mountUsual } from './features/quote/usual.endpoints';
 import { mountWeeks } from './features/weeks/weeks.endpoints';
 import { mountDashboard } from './http/dashboard';
 import { mountDocs } from './http/docs';

@@ -79,7 +79,7 @@ export function readQuoteFigures(
   car: QuotedCar,
   rung: QuoteRung,
 ): QuoteFigures | undefined {
-  const cars = (): Knex.QueryBuilder => onRung(alike(source.facts(), car), car, rung);
+  const cars = (): Knex.QueryBuilder => carsOnRung(source, car, rung);
   const columns = ['act_minutes', ...STAGES.map((stage) => `act_${stage}`)];
   const lists = columns.map((column, at) => `json_group_array(${column}) as list${at}`);
   const [row] = source.all<Record<`list${number}`, string> & Record<FactSum, number>>(
@@ -107,6 +107,15 @@ export function readQuoteFigures(
     ownCents: row.boughtIn + consumables.reduce((all, { ownCents }) => all + ownCents, 0),
     unpriced: consumables.filter(({ quantity }) => quantity > 0),
   };
+}
+
+/** The cars of a rung. */
+export function carsOnRung(
+  source: QuoteSource,
+  car: QuotedCar,
+  rung: QuoteRung,
+): Knex.QueryBuilder {
+  return onRung(alike(source.facts(), car), car, rung);
 }
 
 type FactSum = 'cars' | 'withRot' | 'bubblesWorked' | 'bubblesHoled' | 'boughtIn';

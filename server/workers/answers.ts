@@ -10,6 +10,9 @@ import { answerProducts } from '../features/products/answer-products';
 import { answerQuote } from '../features/quote/answer-quote';
 import { answerUsual } from '../features/quote/answer-usual';
 import { answerRot } from '../features/rot/answer-rot';
+import { effectOfChange } from '../features/set-up-help/effect-of-change';
+import { normMedians } from '../features/set-up-help/norm-medians';
+import { countReferrers } from '#db/queries/referrers';
 import type { ReadName, ReadTasks } from './read-tasks';
 
 /** Every answer a worker knows, by name; only those with a network figure take the reference. */
@@ -32,6 +35,9 @@ const ANSWERS: {
   audit: readAuditPage,
   auditNames: readAuditNames,
   auditCheck: checkAuditChain,
+  effect: effectOfChange,
+  normMedians,
+  referrers: countReferrers,
 };
 
 /** Answers a question from one reader's rows. */

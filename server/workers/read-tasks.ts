@@ -6,6 +6,11 @@ import type { ProductNeedAnswer, ProductsAnswer } from '#shared/contracts/produc
 import type { QuoteAnswer } from '#shared/contracts/quote';
 import type { RotAnswer } from '#shared/contracts/rot';
 import type { UsualCar } from '#shared/contracts/usual';
+import type { CatalogueRow, Referrers } from '#db/queries/referrers';
+import type { OutOf } from '#shared/contracts/endpoint';
+import type { Effect, getNormMedians } from '#shared/contracts/set-up-help';
+import type { EffectQuestion } from '../features/set-up-help/effect-of-change';
+import type { MediansQuestion } from '../features/set-up-help/norm-medians';
 import type { AuditFilters } from '#db/queries/audit-list';
 import type { AuditChain, AuditPage, AuditQuestion } from '../features/audit/read-audit';
 import type { JobListQuestion, JobPage, JobsAsked } from '../features/job-list/list-jobs';
@@ -35,6 +40,9 @@ export interface ReadTasks {
   usual: { input: AskedCar; output: UsualCar };
   audit: { input: AuditQuestion; output: AuditPage };
   auditNames: { input: null; output: { actors: string[]; actions: string[] } };
+  effect: { input: EffectQuestion; output: Effect };
+  normMedians: { input: MediansQuestion; output: OutOf<typeof getNormMedians> };
+  referrers: { input: CatalogueRow; output: Referrers };
   auditCheck: { input: null; output: AuditChain };
 }
 

@@ -193,30 +193,27 @@ describe('A job under way and money (rule 24)', () => {
 });
 
 describe('A job under way that is sent', () => {
-  it.each([
+  it.each<[way: string, call: (ref: string) => [method: string, path: string, body: unknown]]>([
     ['by PUT', (ref: string) => ['put', job(ref), validJob()]],
     [
       'in a batch',
       (ref: string) => ['post', job('batch'), { jobs: [{ jobRef: ref, ...validJob() }] }],
     ],
-  ] as const)(
-    'given it comes %s, is under way no more and keeps its photos',
-    async (_way, call) => {
-      const ref = fresh();
-      await keep(ref, BEGUN);
-      const token = network.recorder;
-      await sendPhoto(app, `${job(ref)}/photos/one`, await jpegOf(), { token });
-      expect((await read(ref)).body.photos).toBe(1);
-      const [method, path, body] = call(ref);
-      expect((await app.call(method, path, { token: network.manager, body })).status).toBeLessThan(
-        202,
-      );
-      expect((await read(ref)).status).toBe(404);
-      expect((await listed()).map(({ jobRef }) => jobRef)).not.toContain(ref);
-      const photos = await app.call('get', `${job(ref)}/photos`, { token });
-      expect(photos.body.items).toHaveLength(1);
-    },
-  );
+  ])('given it comes %s, is under way no more and keeps its photos', async (_way, call) => {
+    const ref = fresh();
+    await keep(ref, BEGUN);
+    const token = network.recorder;
+    await sendPhoto(app, `${job(ref)}/photos/one`, await jpegOf(), { token });
+    expect((await read(ref)).body.photos).toBe(1);
+    const [method, path, body] = call(ref);
+    expect((await app.call(method, path, { token: network.manager, body })).status).toBeLessThan(
+      202,
+    );
+    expect((await read(ref)).status).toBe(404);
+    expect((await listed()).map(({ jobRef }) => jobRef)).not.toContain(ref);
+    const photos = await app.call('get', `${job(ref)}/photos`, { token });
+    expect(photos.body.items).toHaveLength(1);
+  });
 
   it('given it is refused, stays under way', async () => {
     const ref = fresh();

@@ -1,5 +1,7 @@
 import type { Connection } from '#db/database';
 import { NetworkReference } from '#db/network-reference';
+import { readQuoteFigures } from '#db/queries/quote';
+import { readUsualFigures } from '#db/queries/usual';
 import { nearestNetworkSet } from '#db/quote-reference';
 import { Scope } from '#db/scope';
 import type { Role } from '#shared/domain/vocabulary';
@@ -71,12 +73,21 @@ const QUOTES = [
   'firstRegistered=2009-05&branch=ZZZ',
 ].map((asked) => `make=Velder&model=Tessock&bodyType=hatchback&package=full&${asked}`);
 
+/** The same cars asked for at the branch that the path names. */
+const USUALS = QUOTES.map((asked) => {
+  const query = new URLSearchParams(asked);
+  const branch = query.get('branch') ?? '';
+  query.delete('branch');
+  return `/api/branches/${branch}/usual?${query.toString()}`;
+});
+
 /** Every address that a role may read, with its filters; named things also of branches out of scope. */
 function addressesFor(role: Role): string[] {
   return contracts.flatMap(([, endpoint]) => {
     const { access, method, path } = endpoint;
     if (method !== 'get' || access === 'public' || !access.roles.includes(role)) return [];
     if (/quote/.test(path)) return QUOTES.map((asked) => `${path}?${asked}`);
+    if (path.endsWith('/usual')) return USUALS;
     if (!FILTERED.test(path)) {
       const branches = path.includes(':branch') ? ['AAA', 'CCC', 'NEW2', 'ZZZ'] : ['AAA'];
       return branches.map((branch) => askedOf(endpoint, { branch }));
@@ -93,7 +104,12 @@ const READERS = {
 type Reader = keyof typeof READERS;
 
 /** The calls that refer to the network. */
-const REFERRING = ['/api/analytics/rot', '/api/quote', '/api/exports/quote.csv'];
+const REFERRING = [
+  '/api/analytics/rot',
+  '/api/quote',
+  '/api/exports/quote.csv',
+  '/api/branches/AAA/usual',
+];
 
 /** As many branches with cars as may stand outside before a figure of the network is told. */
 const FOUR: readonly string[] = ['CCC', 'DDD', 'EEE', 'FFF'];
@@ -168,6 +184,7 @@ interface Guarded {
   scope: Scope;
   enoughBehind(): boolean;
   nearestQuoteSet: NetworkReference['nearestQuoteSet'];
+  nearestUsualSet: NetworkReference['nearestUsualSet'];
 }
 
 /** The nearest set of the network's cars whoever stands behind it. */
@@ -176,7 +193,25 @@ function unguardedQuoteSet(
   ...[car, rungs, cars]: Parameters<Guarded['nearestQuoteSet']>
 ): ReturnType<Guarded['nearestQuoteSet']> {
   const [branch] = this.scope.branches;
-  return branch && nearestNetworkSet(this.connection, branch.id, car, rungs, { cars, others: 0 });
+  const need = { cars, others: 0 };
+  return (
+    branch && nearestNetworkSet(this.connection, branch.id, car, rungs, need, readQuoteFigures)
+  );
+}
+
+/** The same with what its cars usually take, whoever stands behind any figure. */
+function unguardedUsualSet(
+  this: Guarded,
+  ...[car, rungs, cars]: Parameters<Guarded['nearestUsualSet']>
+): ReturnType<Guarded['nearestUsualSet']> {
+  const [branch] = this.scope.branches;
+  const need = { cars, others: 0 };
+  return (
+    branch &&
+    nearestNetworkSet(this.connection, branch.id, car, rungs, need, (source, ...set) =>
+      readUsualFigures(source, branch.id, ...set, () => true),
+    )
+  );
 }
 
 const EVERY_READER = Object.keys(READERS) as Reader[];
@@ -203,6 +238,7 @@ describe('Everything a site manager may read, with the guard of network figures 
       const guards = [
         jest.spyOn(guarded, 'enoughBehind').mockReturnValue(true),
         jest.spyOn(guarded, 'nearestQuoteSet').mockImplementation(unguardedQuoteSet),
+        jest.spyOn(guarded, 'nearestUsualSet').mockImplementation(unguardedUsualSet),
       ];
       try {
         return await changedAnswers('site_manager', FOUR);

@@ -18,9 +18,22 @@ const WHOLE_ANSWERS: Readonly<Record<string, (answer: unknown) => boolean>> = {
     (answer as { basis?: { source: string | null } }).basis?.source === 'network',
 };
 
+/** What a car usually takes is a figure of the network once the answer says so; what was used last time is the branch's own. */
+const USUAL_AT = /^\/api\/branches\/[^/]+\/usual$/;
+
+function withoutUsual(answer: unknown): unknown {
+  const { basis, lastTime } = answer as { basis?: { source: string | null }; lastTime?: unknown };
+  return basis?.source === 'network' ? { lastTime } : answer;
+}
+
 /** Whether any answer at a path may hold figures of the network. */
 export function mayRefer(path: string): boolean {
-  return path in REFERENCE_FIELDS || path in WHOLE_ANSWERS || path === '/api/exports/quote.csv';
+  return (
+    path in REFERENCE_FIELDS ||
+    path in WHOLE_ANSWERS ||
+    path === '/api/exports/quote.csv' ||
+    USUAL_AT.test(path)
+  );
 }
 
 /** The text of an answer without its figures of the network: what must not follow rows outside by a single byte. */
@@ -32,6 +45,7 @@ export function withoutReference(path: string, text: string): string {
   // Nothing is lost between a text and what it says, so that equal sayings are equal bytes.
   if (JSON.stringify(answer) !== text) throw new Error(`${path} is not written as JSON writes it`);
   if (WHOLE_ANSWERS[path]?.(answer)) return 'of the network';
+  if (USUAL_AT.test(path)) return JSON.stringify(withoutUsual(answer));
   for (const field of REFERENCE_FIELDS[path] ?? []) takeOut(answer, field);
   return JSON.stringify(answer);
 }

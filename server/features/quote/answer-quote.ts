@@ -1,33 +1,23 @@
 import type { NetworkReference } from '#db/network-reference';
 import { readCostsOfDay } from '#db/queries/costs-of-day';
-import type { QuotedCar } from '#db/queries/quote';
 import { readQuoteTargets } from '#db/queries/quote-targets';
 import type { ScopedDb } from '#db/scoped-db';
 import type { QuoteAnswer } from '#shared/contracts/quote';
-import { addMonths, ageBand, ageInYears } from '#shared/domain/calendar';
+import { ageBand, ageInYears } from '#shared/domain/calendar';
 import { roundHalfUp } from '#shared/domain/money';
 import type { QuoteMinutes } from '#shared/domain/quote-minutes';
-import { modelKey } from '#shared/domain/recorded-job';
 import { shareOf } from '#shared/domain/small-samples';
-import { AGE_BANDS, STAGES, type BodyType } from '#shared/domain/vocabulary';
+import { AGE_BANDS, STAGES } from '#shared/domain/vocabulary';
 import { nearestSet, type NearestSet } from './nearest-set';
 import { quoteCosts } from './quote-costs';
 import { quotePriceOf, type WantedMargin } from './quote-price-of';
+import { quotedCar, type AskedCar } from './quoted-car';
 
 /** What a quote is asked for; the branch is the reader's only one. */
-export interface QuoteQuestion {
-  make: string;
-  model: string;
-  firstRegistered: string;
-  bodyType: BodyType;
-  packageId: number;
-  today: string;
+export interface QuoteQuestion extends AskedCar {
   marginShare: number | undefined;
   money: 'seen' | 'unseen';
 }
-
-/** How far back the cars of a set go, in months (rule 48). */
-const MONTHS = 36;
 
 /** A quote from the nearest set of cars; without a branch in scope it is made from none. One snapshot of the database. */
 export function answerQuote(
@@ -39,7 +29,7 @@ export function answerQuote(
     const { today, money } = question;
     const [branch] = db.scope.branches;
     const age = ageBand(ageInYears(question.firstRegistered, today));
-    const set = branch && nearestSet(db, reference, carOf(question, AGE_BANDS.indexOf(age)));
+    const set = branch && nearestSet(db, reference, quotedCar(question, AGE_BANDS.indexOf(age)));
     const costs = branch && readCostsOfDay(db, today);
     const { cost, ...price } = quotePriceOf(
       set && costs && quoteCosts(set.figures, branch.code, costs),
@@ -57,17 +47,6 @@ export function answerQuote(
       ...(money === 'seen' && { cost }),
     };
   });
-}
-
-function carOf(question: QuoteQuestion, ageBandIndex: number): QuotedCar {
-  return {
-    packageId: question.packageId,
-    modelKey: modelKey(question.make, question.model),
-    bodyType: question.bodyType,
-    ageBandIndex,
-    after: addMonths(question.today, -MONTHS),
-    upTo: question.today,
-  };
 }
 
 /** The margin asked for, or the branch's target, or the network's (rules 24 and 80). */
