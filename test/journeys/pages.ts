@@ -1,5 +1,6 @@
 import type { Page } from 'playwright-core';
 import type { Role } from '#shared/domain/vocabulary';
+import { officeFile, officeRow, sendFile } from './import-file';
 
 /** A page of the product as someone comes to it. */
 export interface Stop {
@@ -49,6 +50,8 @@ export function everyPage({ rotten, unbilled }: KnownJobs): Stop[] {
     { name: 'quote', path: `/quote?${QUOTED}`, as: 'site_manager' },
     { name: 'quote-recorder', path: `/quote?${QUOTED}`, as: 'recorder' },
     { name: 'quote-empty', path: '/quote', as: 'site_manager' },
+    { name: 'import', path: '/import', as: 'site_manager' },
+    { name: 'import-network', path: '/import', as: 'head_office' },
     { name: 'how-it-is-counted', path: '/how-it-is-counted', as: 'site_manager' },
     { name: 'account', path: '/account', as: 'site_manager' },
     { name: 'mailbox', path: '/mailbox', as: 'head_office' },
@@ -214,6 +217,36 @@ export function everyState({ rotten, corrected }: KnownJobs): Stop[] {
       path: `/jobs/HAV/${corrected}?changes=1-2`,
       as: 'site_manager',
       prepare: (page) => page.getByRole('table', { name: /^What changed from/ }).waitFor(),
+    },
+    {
+      name: 'import-refused',
+      path: '/import',
+      as: 'head_office',
+      prepare: press('See what it would change'),
+    },
+    {
+      name: 'import-preview',
+      path: '/import',
+      as: 'site_manager',
+      prepare: (page) =>
+        sendFile(page, officeFile([officeRow('look-1'), officeRow('look-2', { 1: '', 6: '' })])),
+    },
+    {
+      name: 'import-columns',
+      path: '/import',
+      as: 'site_manager',
+      prepare: (page) =>
+        sendFile(page, officeFile(['look-3;Orsa;Brinkeby'], 'Job no;Builder;Model')),
+    },
+    {
+      name: 'import-done',
+      path: '/import',
+      as: 'site_manager',
+      prepare: async (page) => {
+        await sendFile(page, officeFile([officeRow(`look-${Date.now()}`)]));
+        await press(/^Write 1 car/)(page);
+        await page.getByRole('heading', { level: 1, name: /1 car written/ }).waitFor();
+      },
     },
     {
       name: 'account-refused',
