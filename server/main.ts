@@ -7,7 +7,7 @@ import { Store } from '#db/store';
 import { createApp } from './app';
 import { fixedClock, realClock } from './clock';
 import { ConfigRefused, readConfig } from './config';
-import { ImportDesk } from './features/imports/import-desk';
+import { importDeskOf } from './import-desk-of';
 import type { Kit } from './kit';
 import { Outbox } from './mail/outbox';
 import { photoStoreOf } from './storage/photo-store';
@@ -42,11 +42,12 @@ async function main(): Promise<void> {
     passwords: new PasswordThread(),
     outbox: new Outbox(store, config, log),
     photos: photoStoreOf(config),
-    imports: new ImportDesk(),
+    imports: importDeskOf(store, config, clock),
     version,
   };
   const seeded = await offerDemo(kit);
   const app = createApp(kit, log, join(ROOT, 'dist', 'dashboard'));
+  await kit.imports.start();
   server.on('request', app.express);
   kit.outbox.start();
   const address = server.address();

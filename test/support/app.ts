@@ -12,7 +12,7 @@ import { createApp } from '#server/app';
 import { fixedClock } from '#server/clock';
 import { readConfig } from '#server/config';
 import type { Kit } from '#server/kit';
-import { ImportDesk } from '#server/features/imports/import-desk';
+import { importDeskOf } from '#server/import-desk-of';
 import { Outbox } from '#server/mail/outbox';
 import { photoStoreOf } from '#server/storage/photo-store';
 import { PasswordThread } from '#server/workers/password-thread';
@@ -53,17 +53,19 @@ export class TestApp {
     });
     const log = pino({ level: process.env['TEST_LOG'] ?? 'silent' });
     const store = await Store.open(folder);
+    const clock = fixedClock(new Date(options.now ?? '2026-02-02T06:30:00Z'));
     const kit: Kit = {
       store,
-      clock: fixedClock(new Date(options.now ?? '2026-02-02T06:30:00Z')),
+      clock,
       config,
       reads: new ReadPool(store.file),
       passwords: new PasswordThread(CHEAP),
       outbox: new Outbox(store, config, log),
       photos: photoStoreOf(config),
-      imports: new ImportDesk(),
+      imports: importDeskOf(store, config, clock),
       version: '0.0.0-test',
     };
+    await kit.imports.start();
     const app = createApp(kit, log, join(folder, 'no-dashboard'));
     const server = createServer(app.express);
     await new Promise<void>((resolve) => server.listen(0, '127.0.0.1', resolve));
