@@ -109,6 +109,6 @@ describe('the keyboard', () => {
     await own.keyboard.press('Tab');
     await own.keyboard.type(personOf('recorder').password);
     await own.keyboard.press('Enter');
-    await own.waitForURL('**/jobs');
+    await own.waitForURL('**/send');
   });
 });

@@ -1,5 +1,6 @@
 import type { Page } from 'playwright-core';
 import type { Role } from '#shared/domain/vocabulary';
+import { sendStates } from './send-states';
 import { officeFile, officeRow, sendFile } from './import-file';
 
 /** A page of the product as someone comes to it. */
@@ -69,6 +70,8 @@ export function everyPage({ rotten, unbilled }: KnownJobs): Stop[] {
     { name: 'set-up-person', path: '/set-up/people/1', as: 'head_office' },
     { name: 'first-run', path: '/first-run', as: 'head_office' },
     { name: 'audit', path: '/audit', as: 'head_office' },
+    { name: 'send', path: '/send', as: 'recorder' },
+    { name: 'send-network', path: '/send?branch=HAV', as: 'head_office' },
     { name: 'voided', path: '/voided', as: 'site_manager' },
     { name: 'voided-network', path: '/voided', as: 'head_office' },
     { name: 'no-page', path: '/no-such-page', as: 'site_manager' },
@@ -248,6 +251,7 @@ export function everyState({ rotten, corrected }: KnownJobs): Stop[] {
         await page.getByRole('heading', { level: 1, name: /1 car written/ }).waitFor();
       },
     },
+    ...sendStates(rotten),
     {
       name: 'account-refused',
       path: '/account',

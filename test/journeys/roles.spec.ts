@@ -8,6 +8,10 @@ import { personOf, signIn, typeSignIn, untilReady } from './sign-in';
 const READERS_PAGES = [
   ...['This week', 'Overruns', 'Rot', 'Product', 'Jobs', 'Come-backs', 'Quote'],
 ];
+/** Those of them who send jobs have the form beside the list. */
+const SENDERS_PAGES = READERS_PAGES.flatMap((page) =>
+  page === 'Jobs' ? [page, 'Send a job'] : [page],
+);
 
 /** Who signs in, where that leads, what they are offered and what they never see. */
 describe('the four roles', () => {
@@ -20,10 +24,15 @@ describe('the four roles', () => {
   }
 
   test.each([
-    ['recorder', '/jobs', ['Jobs', 'Quote'], ['Account', 'How it is counted']],
-    ['site_manager', '/this-week', READERS_PAGES, ['Account', 'How it is counted']],
+    ['recorder', '/send', ['Send a job', 'Jobs', 'Quote'], ['Account', 'How it is counted']],
+    ['site_manager', '/this-week', SENDERS_PAGES, ['Account', 'How it is counted', 'Import']],
     ['regional_lead', '/this-week', READERS_PAGES, ['Account', 'How it is counted']],
-    ['head_office', '/this-week', READERS_PAGES, ['Account', 'How it is counted', 'Mailbox']],
+    [
+      'head_office',
+      '/this-week',
+      SENDERS_PAGES,
+      ['Account', 'How it is counted', 'Import', 'Set-up', 'Audit trail', 'Mailbox'],
+    ],
   ] as [Role, string, string[], string[]][])(
     'a %s, signed in by typing, stands on %s and is offered their pages',
     async (role, home, pages, menu) => {
@@ -43,6 +52,8 @@ describe('the four roles', () => {
 
   test('a recorder, on Jobs and a Job sheet, sees no money but the quoted price', async () => {
     const page = await enter('recorder');
+    await page.goto('/jobs');
+    await untilReady(page);
     expect(await page.locator('body').innerText()).not.toMatch(/€|margin|kept|revenue/i);
     const { jobs } = readRawRecord(servedDemo().data);
     const { jobRef } = jobs.findLast(
@@ -61,7 +72,7 @@ describe('the four roles', () => {
     const page = await enter('recorder');
     for (const path of ['/this-week', '/overruns', '/rot', '/product', '/come-backs', '/mailbox']) {
       await page.goto(path);
-      await page.waitForURL('**/jobs');
+      await page.waitForURL('**/send');
     }
   });
 

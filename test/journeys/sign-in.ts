@@ -23,7 +23,7 @@ export async function typeSignIn(
 export async function signIn(page: Page, role: Role): Promise<void> {
   await page.goto('/sign-in');
   await typeSignIn(page, personOf(role));
-  await page.waitForURL(role === 'recorder' ? '**/jobs' : '**/this-week');
+  await page.waitForURL(role === 'recorder' ? '**/send' : '**/this-week');
   await untilReady(page);
 }
 

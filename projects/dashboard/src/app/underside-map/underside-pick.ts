@@ -34,6 +34,8 @@ export class UndersidePick {
   readonly view = model<'picture' | 'list'>('picture');
   /** Findings set before, numbered on the map in the order given. */
   readonly findings = input<readonly UndersideFinding[]>([]);
+  /** `elsewhere`: whoever uses it has the switch between picture and list in its own head. */
+  readonly switching = input<'here' | 'elsewhere'>('here');
   /** What is being placed: "Third finding". */
   readonly heading = input('Finding');
 

@@ -16,6 +16,7 @@ import { getJob } from '#shared/contracts/jobs';
 import { BridgeChart } from '../../charts/bridge/bridge-chart';
 import { Api } from '../../core/api/api';
 import { Catalogue } from '../../core/catalogue/catalogue';
+import { StoredPhotos } from '../../core/photos/stored-photos';
 import { Session } from '../../core/session/session';
 import { Answer } from '../../ui/answer/answer';
 import { Caution } from '../../ui/caution/caution';
@@ -30,6 +31,7 @@ import {
 } from '../../ui/format';
 import { LoadState } from '../../ui/load-state/load-state';
 import { narrowWindow } from '../../ui/narrow';
+import { JobPhotos } from '../../ui/photos/job-photos';
 import { TableTwin } from '../../ui/table-twin/table-twin';
 import { CONSUMABLE_NAMES } from '../../ui/words';
 import { UndersideMarks } from '../../underside-map/underside-marks';
@@ -60,6 +62,7 @@ import { VoidDialog, type VoidDialogData } from './void-dialog';
     DataTable,
     FactList,
     FindingsList,
+    JobPhotos,
     LoadState,
     MatButton,
     NgTemplateOutlet,
@@ -91,6 +94,17 @@ export class JobSheetPage {
     params: { branch: this.branch(), jobRef: this.jobRef() },
   }));
 
+  protected readonly photographed = computed(() => ({
+    branch: this.branch(),
+    jobRef: this.jobRef(),
+  }));
+  private readonly stored = inject(StoredPhotos).list(this.photographed);
+  protected readonly photos = computed(() => this.stored.value()?.items ?? []);
+  /** Those that no finding on the sheet shows. */
+  protected readonly carPhotos = computed(() => {
+    const found = new Set((this.job.value()?.findings ?? []).map(({ ref }) => ref));
+    return this.photos().filter(({ finding }) => finding === null || !found.has(finding));
+  });
   protected readonly mayVoid = computed(
     () => this.role() === 'site_manager' || this.role() === 'head_office',
   );

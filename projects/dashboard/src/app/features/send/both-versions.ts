@@ -30,6 +30,8 @@ export function differences(
 function fieldsOf({ timers: _running, ...document }: DraftDocument): ReadonlyMap<string, string> {
   const fields = new Map<string, string>();
   const walk = (value: unknown, path: string): void => {
+    // An item is named by its key; the key says nothing more.
+    if (/\/(product|kind|ref)$/.test(path)) return;
     if (typeof value === 'object' && value !== null) {
       for (const [key, each] of Object.entries(value)) walk(each, path + pathPart(key));
     } else if (value !== undefined && value !== null && value !== '') {

@@ -78,7 +78,7 @@ export class DraftPage {
   private readonly catalogue = inject(Catalogue);
   private readonly dialog = inject(MatDialog);
   private readonly host = inject<ElementRef<HTMLElement>>(ElementRef).nativeElement;
-  private readonly findings = viewChild(FindingsStep);
+  protected readonly findings = viewChild(FindingsStep);
 
   protected readonly filled = FILLED_STEPS;
   protected readonly isWide = windowIs('(min-width: 1000px)');
@@ -97,7 +97,7 @@ export class DraftPage {
   });
   protected readonly backWords = computed(() => {
     const back = this.back();
-    return back ? `Back: ${NEXT_WORDS[back]}` : 'All jobs';
+    return back ? NEXT_WORDS[back] : '';
   });
   protected readonly branchName = computed(() => this.catalogue.branchName(this.open.branch()));
   protected readonly isLocked = computed(() =>

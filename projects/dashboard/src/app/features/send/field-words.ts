@@ -88,7 +88,7 @@ export function problemSentence(
 /** A rule's message in the form's own words. */
 export function messageWords(message: string): string {
   const said = IN_MESSAGES.reduce((text, [name, words]) => text.replace(name, words), message);
-  return said === 'is required' ? 'is still missing' : said;
+  return said.startsWith('is required') ? 'is still missing' : said;
 }
 
 /** A finding by its number on the map and its place: "Finding 2, sill, inner, left". */

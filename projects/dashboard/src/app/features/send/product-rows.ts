@@ -8,7 +8,7 @@ export interface ProductRow {
   readonly path: string;
   /** "norm 4.2 L, last time 4.0 L". */
   readonly note: string;
-  /** What to offer at one press while nothing is written: the last time's, else the norm. */
+  /** What was used last time, at one press while nothing is written. Never the norm: an amount nobody measured says nothing. */
   readonly offer: { readonly ml: number; readonly words: string } | undefined;
   /** Millilitres a press of minus or plus. */
   readonly by: number;
@@ -30,7 +30,6 @@ export function productRows(
     const norm = norms.find((one) => one.product === product)?.ml;
     const before = last.find((one) => one.product === product)?.ml;
     const now = written.find((one) => one.product === product)?.ml;
-    const offered = before ?? norm;
     return {
       product,
       path: `/products/${product}/ml`,
@@ -41,14 +40,10 @@ export function productRows(
         .filter(Boolean)
         .join(', '),
       offer:
-        now === undefined && offered !== undefined
-          ? { ml: offered, words: offerWords(offered, before !== undefined) }
+        now === undefined && before !== undefined
+          ? { ml: before, words: `${formatVolume(before)}, as last time` }
           : undefined,
       by: (norm ?? before ?? now ?? 0) >= LARGE ? 500 : 100,
     };
   });
-}
-
-function offerWords(ml: number, isLastTime: boolean): string {
-  return `${formatVolume(ml)}, as ${isLastTime ? 'last time' : 'the norm'}`;
 }

@@ -31,7 +31,7 @@ export const NEXT_WORDS: Readonly<Record<SendStep, string>> = {
   findings: 'findings',
   product: 'product',
   invoice: 'bill',
-  review: 'look it over',
+  review: 'review',
 };
 
 /** The step of a name from the address, else the one of a number kept with the draft, else the first. */

@@ -54,7 +54,7 @@ export class FindingsStep {
   private readonly catalogue = inject(Catalogue);
   /** The finding being written; none while the next one has no place yet. */
   readonly ref = signal<string | undefined>(undefined);
-  protected readonly view = signal<'picture' | 'list'>('picture');
+  readonly view = signal<'picture' | 'list'>('picture');
 
   protected readonly conditions: readonly Choice[] = CONDITIONS.map((value) => ({
     value,
@@ -75,8 +75,11 @@ export class FindingsStep {
     this.findings().find((one) => one.ref === this.ref()),
   );
   protected readonly heading = computed(() => headingOf(this.draft.document(), this.ref()));
-  /** The others, numbered on the map; the one being written is filled in. */
-  protected readonly marks = computed(() => onMap(this.findings()));
+  /** Those set before, numbered on the map; the newest is filled in while it is written, without its number over it. */
+  protected readonly marks = computed(() => {
+    const newest = this.findings().at(-1)?.ref;
+    return onMap(this.findings().filter(({ ref }) => ref !== newest || ref !== this.ref()));
+  });
   protected readonly place = computed((): UndersidePlace | null => {
     const { zone, side } = this.finding() ?? {};
     return zone && side ? { zone, side } : null;
@@ -109,6 +112,11 @@ export class FindingsStep {
     const set = setFinding(this.draft.document(), place);
     this.draft.rewrite(() => set.document);
     this.ref.set(set.ref);
+  }
+
+  /** Turns from the picture to the list and back; the two are one control. */
+  turn(): void {
+    this.view.set(this.view() === 'picture' ? 'list' : 'picture');
   }
 
   /** Begins the next one. */

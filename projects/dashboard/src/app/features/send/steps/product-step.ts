@@ -38,9 +38,6 @@ export class ProductStep {
     this.rows().flatMap(({ product, offer }) => (offer ? [{ product, ml: offer.ml }] : [])),
   );
   protected readonly isBlank = computed(() => this.draft.document().products === undefined);
-  protected readonly hasLast = computed(
-    () => (this.draft.usual()?.lastTime?.products.length ?? 0) > 0,
-  );
   protected readonly others = computed(() => {
     const shown = new Set(this.rows().map(({ product }) => product));
     return (this.catalogue.value()?.products ?? []).filter(({ code }) => !shown.has(code));
