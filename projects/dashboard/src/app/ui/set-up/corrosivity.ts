@@ -16,7 +16,10 @@ import type { Climate } from './region-changes';
           <p class="us-quiet">{{ said.caveat }}</p>
         }
       } @else {
-        <p>Shown as soon as all four means are there.</p>
+        <p>
+          How corrosive the air is stands here as soon as all four means are typed. A region works
+          without them.
+        </p>
       }
     </div>
     <p class="us-quiet">
