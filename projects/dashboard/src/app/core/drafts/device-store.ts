@@ -88,11 +88,7 @@ export class DeviceStore {
   }
 
   private database(): Promise<IDBPDatabase<Schema> | undefined> {
-    this.opened ??= openDB<Schema>('underseam', 1, {
-      upgrade: (db) => STORES.forEach((store) => db.createObjectStore(store)),
-      // A newer version of the product, open in another window, must not wait for this one.
-      blocking: (_current, _blocked, event) => (event.target as IDBDatabase).close(),
-    }).catch(() => {
+    this.opened ??= open().catch(() => {
       this.said.set(REFUSED);
       return undefined;
     });
@@ -102,4 +98,13 @@ export class DeviceStore {
 
 function placeOf(store: Store, key: string): string {
   return `${store} ${key}`;
+}
+
+/** Async, so that a browser that throws at the mere asking is refused like one that answers no. */
+async function open(): Promise<IDBPDatabase<Schema>> {
+  return openDB<Schema>('underseam', 1, {
+    upgrade: (db) => STORES.forEach((store) => db.createObjectStore(store)),
+    // A newer version of the product, open in another window, must not wait for this one.
+    blocking: (_current, _blocked, event) => (event.target as IDBDatabase).close(),
+  });
 }
