@@ -27,7 +27,7 @@ import { Trouble } from '../../ui/trouble/trouble';
 import { FilePreview } from './file-preview';
 import { FileProgress } from './file-progress';
 import { answerImport } from './import-answer';
-import { countOf, isUnderWay, sizeWords, toWrite, writtenOf } from './import-words';
+import { countOf, hasBegun, isUnderWay, sizeWords, toWrite, writtenOf } from './import-words';
 import { draftOf, isChanged, type ReadingDraft } from './reading-draft';
 import { ReadingForm } from './reading-form';
 
@@ -123,6 +123,7 @@ export class FileStanding {
     if (!file) return '';
     return `“${file.fileName}”, ${sizeWords(file.bytes)}, sent by ${file.by} on ${formatInstant(file.receivedAt)}`;
   });
+  protected readonly hasBegun = hasBegun;
   protected readonly toWrite = toWrite;
   protected readonly writtenOf = writtenOf;
 

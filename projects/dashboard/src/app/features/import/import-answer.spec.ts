@@ -64,9 +64,10 @@ describe('answerImport', () => {
   });
 
   it('stopped before the first, says that nothing was written', () => {
-    expect(told({ state: 'stopped', written: NOTHING }).first).toBe(
-      'The server went down in between; nothing was written.',
-    );
+    const progress = { done: 0, of: null };
+    const { first, second } = told({ state: 'stopped', written: NOTHING, progress });
+    expect(first).toBe('The server went down in between; nothing was written.');
+    expect(second).toContain('Check it again');
   });
 
   it('unreadable, says why and how to save it', () => {

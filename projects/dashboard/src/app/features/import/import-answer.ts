@@ -1,7 +1,7 @@
 import type { ImportedFile } from '#shared/contracts/imports';
 import type { AnswerPart } from '../../ui/answer/answer';
 import { formatCount, formatCounted, formatList } from '../../ui/format';
-import { countOf, toWrite, writtenOf } from './import-words';
+import { countOf, hasBegun, toWrite, writtenOf } from './import-words';
 
 /** What a file would change or has changed, and what to do next. */
 export interface ImportSentences {
@@ -11,7 +11,7 @@ export interface ImportSentences {
 
 type Told = Pick<
   ImportedFile,
-  'kind' | 'fileName' | 'state' | 'counts' | 'written' | 'missingFields' | 'problem'
+  'kind' | 'fileName' | 'state' | 'counts' | 'progress' | 'written' | 'missingFields' | 'problem'
 >;
 
 /** Says where a file stands; `labelOf` names a field. */
@@ -111,7 +111,11 @@ function halfway(file: Told, why: string): ImportSentences {
   if (written === 0) {
     return {
       sentence: [`${why}; nothing was written.`],
-      second: ['Check it again to see what it would change, or send another file.'],
+      second: [
+        hasBegun(file)
+          ? 'Write the rest, or leave it: nothing is written twice.'
+          : 'Check it again to see what it would change, or send another file.',
+      ],
     };
   }
   const left = Math.max(0, toWrite(file) - written);

@@ -150,7 +150,11 @@ describe('ImportPage', () => {
 
   it('stopped halfway, says what stays and offers the rest', async () => {
     const written = { created: 1000, replaced: 0, unchanged: 0, refused: 0 };
-    const { host, button } = await openFile({ state: 'cancelled', written });
+    const { host, button } = await openFile({
+      state: 'cancelled',
+      written,
+      progress: { done: 1016, of: 1204 },
+    });
     expect(host.querySelector('h1')?.textContent).toContain('1,000 cars are written and stay');
     expect(button(/Write the rest/)).toBeDefined();
   });

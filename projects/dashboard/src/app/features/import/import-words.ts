@@ -43,6 +43,11 @@ export function toWrite({ counts }: Pick<ImportedFile, 'counts'>): number {
   return counts.new + counts.changed;
 }
 
+/** Whether the writing of an ended file had begun: then it goes on from there, and is not read another way. */
+export function hasBegun({ progress }: Pick<ImportedFile, 'progress'>): boolean {
+  return progress.done > 0;
+}
+
 /** Rows that were written so far. */
 export function writtenOf({ written }: Pick<ImportedFile, 'written'>): number {
   return written.created + written.replaced;
