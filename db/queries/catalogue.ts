@@ -46,6 +46,11 @@ export function listRegions(db: UnscopedDb, codes: readonly string[]): RegionRow
     .map(regionOf);
 }
 
+/** Every region there is, those without a branch too; for who sees the whole network. */
+export function listAllRegions(db: UnscopedDb): RegionRow[] {
+  return db.all<FlatRegion>(sql('regions').orderBy('code')).map(regionOf);
+}
+
 export function findRegion(db: UnscopedDb, code: string): RegionRow | undefined {
   return listRegions(db, [code])[0];
 }

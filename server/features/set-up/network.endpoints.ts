@@ -49,7 +49,10 @@ export function mountNetwork(mounting: Mounting, kit: Kit): void {
     return {
       body: {
         network: { name, currency },
-        regions: catalogue.listRegions(store.unscoped, regions),
+        // A region is set up before its first branch, and must be there to be chosen for it.
+        regions: call.scope.ofNetwork
+          ? catalogue.listAllRegions(store.unscoped)
+          : catalogue.listRegions(store.unscoped, regions),
         branches: catalogue.listBranches(store.unscoped, branches),
         packages: catalogue.listPackages(store.unscoped),
         products: catalogue.listProducts(store.unscoped),

@@ -26,9 +26,9 @@ export function networkChange(api: Api, network: Network): ChangeOf<Network> {
       },
       {
         key: 'feeRate',
-        label: 'Network fee from the start, % of the bill',
+        label: 'Network fee, % of the bill',
         kind: 'percent',
-        hint: 'Of every bill before tax; 0 where there is none.',
+        hint: 'Of every bill before tax, from the start; 0 where there is none.',
       },
       {
         key: 'targetMarginShare',

@@ -12,15 +12,34 @@ export type Climate = NonNullable<Region['climate']>;
 
 /** The four means, in the order in which they are asked for, and where each may lie. */
 const MEANS = [
-  { key: 'temperatureC', label: 'Temperature, mean of the year, °C', from: -60, to: 60 },
-  { key: 'humidityPct', label: 'Relative humidity, mean of the year, %', from: 0, to: 100 },
+  {
+    key: 'temperatureC',
+    label: 'Temperature, °C',
+    hint: 'Mean of the year.',
+    from: -60,
+    to: 60,
+  },
+  {
+    key: 'humidityPct',
+    label: 'Relative humidity, %',
+    hint: 'Mean of the year.',
+    from: 0,
+    to: 100,
+  },
   {
     key: 'so2Deposition',
-    label: 'Sulphur dioxide settling, mg per m² and day',
+    label: 'Sulphur dioxide, mg per m² a day',
+    hint: 'What settles, mean of the year.',
     from: 0,
     to: 10_000,
   },
-  { key: 'chlorideDeposition', label: 'Chloride settling, mg per m² and day', from: 0, to: 10_000 },
+  {
+    key: 'chlorideDeposition',
+    label: 'Chloride, mg per m² a day',
+    hint: 'What settles, mean of the year.',
+    from: 0,
+    to: 10_000,
+  },
 ] as const;
 
 /** Name and climate of a region; without one, a new region. */
@@ -46,7 +65,13 @@ export function regionChange(
             } as const,
           ]),
       name,
-      ...MEANS.map(({ key, label }): Field => ({ key, label, kind: 'decimal', need: 'optional' })),
+      ...MEANS.map(({ key, label, hint }): Field => ({
+        key,
+        label,
+        hint,
+        kind: 'decimal',
+        need: 'optional',
+      })),
     ],
     check: wrongInClimate,
     start: {
