@@ -1,3 +1,4 @@
+import type { PreviewRow } from '#shared/contracts/imports';
 import { TestApp, type Answer } from '../support/app';
 import { confirmFile, sendFile, type SentFile } from '../support/send-file';
 import { makeSmallNetwork, validJob, type SmallNetwork } from '../support/small-network';
@@ -7,13 +8,13 @@ let network: SmallNetwork;
 beforeAll(async () => {
   app = await TestApp.start();
   network = await makeSmallNetwork(app);
-}, 30_000);
+}, 120_000);
 afterAll(() => app.stop());
 
 const send = (content: SentFile['content'], more: Partial<SentFile> = {}): Promise<Answer> =>
   sendFile(app, network.manager, { content, ...more });
 const confirm = (sent: Answer): Promise<Answer> => confirmFile(app, network.manager, sent.body.id);
-const job = async (ref: string): Promise<Record<string, any>> =>
+const job = async (ref: string): Promise<Answer['body']> =>
   (await app.call('get', `/api/branches/AAA/jobs/${ref}`, { token: network.manager })).body;
 const counts = (sent: Answer): unknown => sent.body?.counts;
 const HEADINGS =
@@ -91,7 +92,7 @@ describe('A file of jobs', () => {
     ];
     const sent = await send(`\uFEFF${text.join('\n')}`);
     expect(sent.body.options).toMatchObject({ delimiter: '\t', encoding: 'utf-8' });
-    expect(sent.body.preview.map((row: any) => [row.line, row.status])).toEqual([
+    expect((sent.body.preview as PreviewRow[]).map(({ line, status }) => [line, status])).toEqual([
       [2, 'new'],
       [4, 'new'],
       [5, 'refused'],

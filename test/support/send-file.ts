@@ -8,8 +8,17 @@ export interface SentFile {
   content: string | Uint8Array;
 }
 
+/** Sends a file as a form with its one part, `file`, and waits for its check however busy the machine is. */
+export async function sendFile(app: TestApp, token: string, file: SentFile): Promise<Answer> {
+  const sent = await postFile(app, token, file);
+  const { id, state } = (sent.body ?? {}) as { id?: string; state?: string };
+  if (state !== 'checking' || id === undefined) return sent;
+  const checked = await endOf(app, token, id, file.branch);
+  return { ...checked, status: sent.status };
+}
+
 /** Sends a file as a form with its one part, `file`. */
-export async function sendFile(
+export async function postFile(
   app: TestApp,
   token: string,
   { branch = 'AAA', kind = 'jobs', name = 'file.csv', content }: SentFile,

@@ -79,22 +79,18 @@ function guessDecimal(values: readonly string[], delimiter: string): '.' | ',' {
 
 const PARTS = /^(\d{1,4})[-/.]\s?(\d{1,2})[-/.]\s?(\d{1,4})\b/;
 
-/** Year first where years stand first; day first unless a value rules it out. */
+/** Day first unless a value rules it out; year first where no year stands last, because those are read so in any order. */
 function guessDateOrder(values: readonly string[]): ReadingOptions['dateOrder'] {
-  let yearFirst = 0;
   let yearLast = 0;
   let impossibleDayFirst = 0;
   let impossibleMonthFirst = 0;
   for (const value of values) {
     const [, a = '', b = ''] = PARTS.exec(value.trim()) ?? [];
-    if (a === '') continue;
-    if (a.length === 4) yearFirst += 1;
-    else {
-      yearLast += 1;
-      if (Number(b) > 12) impossibleDayFirst += 1;
-      if (Number(a) > 12) impossibleMonthFirst += 1;
-    }
+    if (a === '' || a.length === 4) continue;
+    yearLast += 1;
+    if (Number(b) > 12) impossibleDayFirst += 1;
+    if (Number(a) > 12) impossibleMonthFirst += 1;
   }
-  if (yearLast === 0 || yearFirst > yearLast) return 'ymd';
+  if (yearLast === 0) return 'ymd';
   return impossibleDayFirst > impossibleMonthFirst ? 'mdy' : 'dmy';
 }
