@@ -71,7 +71,7 @@ describe('The chain of the trail', () => {
         const given = { email: 'office@network.example', password: PASSWORD };
         const signedIn = await other.call('post', '/api/auth/sign-in', { body: given });
         const { accessToken: token } = signedIn.body as { accessToken: string };
-        const { body } = await other.get('/api/audit/check', { token });
+        const { body } = await other.call('get', '/api/audit/check', { token });
         expect([body.events, body.brokenAt]).toEqual([8, 9]);
       } finally {
         await other.stop('keep');

@@ -168,6 +168,7 @@ export const guarded = [
 /** Features about the whole network, whose use cases may take `store.unscoped` out of the store they were handed. */
 export const networkFeatures = [
   'set-up',
+  'set-up-help',
   'people',
   'push-keys',
   'sign-in',
