@@ -24,6 +24,7 @@ export function draftWords(draft: DeviceDraft): DraftWords {
 
 function stateWords(draft: DeviceDraft): Omit<DraftWords, 'title'> {
   const photos = draft.photos.filter(({ state }) => state === 'here').length;
+  const why = draft.photos.find(({ problem }) => problem !== undefined)?.problem;
   const refused = draft.photos.filter(({ state }) => state === 'refused').length;
   switch (draft.state) {
     case 'waiting':
@@ -38,7 +39,11 @@ function stateWords(draft: DeviceDraft): Omit<DraftWords, 'title'> {
       };
     case 'sent':
       return {
-        state: ['sent', photoWords(photos, 'still to go'), photoWords(refused, 'refused')]
+        state: [
+          'sent',
+          photoWords(photos, 'still to go'),
+          photoWords(refused, `refused: ${why ?? 'it cannot be read'}`),
+        ]
           .filter(Boolean)
           .join(', '),
         tone: refused > 0 ? 'trouble' : 'tide',
@@ -50,6 +55,11 @@ function stateWords(draft: DeviceDraft): Omit<DraftWords, 'title'> {
       return { state: `${correction}being written: ${step}`, tone: 'quiet', act: 'Go on' };
     }
   }
+}
+
+/** Whether photos of it were refused for good. */
+export function hasRefusedPhotos({ photos }: DeviceDraft): boolean {
+  return photos.some(({ state }) => state === 'refused');
 }
 
 function photoWords(count: number, words: string): string {

@@ -12,7 +12,7 @@ import { getUsual } from '#shared/contracts/usual';
 import { isMonth } from '#shared/domain/calendar';
 import { Api } from '../../core/api/api';
 import { Catalogue } from '../../core/catalogue/catalogue';
-import type { DraftChange } from '../../core/drafts/device-draft';
+import type { DeviceDraft, DraftChange } from '../../core/drafts/device-draft';
 import { Drafts } from '../../core/drafts/drafts';
 import { Session } from '../../core/session/session';
 import { type DraftDocument, valueAt, withValue } from './draft-document';
@@ -37,6 +37,8 @@ export class OpenDraft {
   private readonly unread = signal<ReadonlyMap<string, { text: string; kind: TypedKind }>>(
     new Map(),
   );
+  /** The draft as last read from the device or written there: what another window changes since then stays. */
+  private taken: DeviceDraft | undefined;
   private waiting: { timer: ReturnType<typeof setTimeout>; change: DraftChange } | undefined;
 
   readonly id = signal<string | undefined>(undefined);
@@ -99,6 +101,7 @@ export class OpenDraft {
     effect(() => {
       const kept = this.kept();
       if (!kept || untracked(this.written)) return;
+      this.taken = kept;
       this.written.set({ ...kept.content, jobRef: kept.jobRef });
       if (kept.problem) this.looked.set(true);
     });
@@ -173,7 +176,9 @@ export class OpenDraft {
     clearTimeout(waiting.timer);
     this.waiting = undefined;
     // Why it could not be kept stands in the draft's state line.
-    await this.drafts.change(id, waiting.change).catch(() => undefined);
+    const from = this.taken;
+    this.taken = from && { ...from, ...waiting.change };
+    await this.drafts.change(id, waiting.change, from).catch(() => undefined);
   }
 
   private keep(change: DraftChange): void {

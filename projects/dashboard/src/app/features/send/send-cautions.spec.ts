@@ -36,15 +36,16 @@ describe('cautions of the form', () => {
 
   it('beside the stages, given a rotten jacking point, forbid to lift there', () => {
     const point = finding({ zone: 'jacking_point', seenAs: 'holed' });
-    expect(stageCautions({ findings: [point] })[0]?.words).toContain('Never support the car on it');
-    expect(stageCautions({})[0]?.words).toContain('rated, sound points');
+    const { strip } = stageCautions({ findings: [point] });
+    expect(strip?.words).toContain('Never support the car on it');
+    expect(stageCautions({}).strip?.words).toContain('rated, sound points');
   });
 
   it('beside the stages, given repair, warn of fire from the first minute', () => {
-    expect(dangers(stageCautions({}))).not.toContain('Fire');
-    expect(dangers(stageCautions({ actual: { stages: { repair: 5 } } }))).toContain('Fire');
+    expect(stageCautions({}).repair).toBeUndefined();
+    expect(stageCautions({ actual: { stages: { repair: 5 } } }).repair?.danger).toBe('Fire');
     const startedAt = '2026-02-02T10:00:00.000Z';
-    expect(dangers(stageCautions({ timers: { repair: { startedAt } } }))).toContain('Fire');
+    expect(stageCautions({ timers: { repair: { startedAt } } }).repair?.danger).toBe('Fire');
   });
 
   it('beside product, given any car, speak of mist and brakes', () => {

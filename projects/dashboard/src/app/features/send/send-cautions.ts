@@ -1,5 +1,5 @@
 import { isDangerous, isLeftDangerous } from '#shared/domain/danger';
-import type { Condition, Zone } from '#shared/domain/vocabulary';
+import type { Condition, Stage, Zone } from '#shared/domain/vocabulary';
 import type { DraftDocument } from './draft-document';
 
 /** A danger to people, shown where the work that brings it is written down. */
@@ -49,25 +49,30 @@ const LEFT: SendCaution = {
 const MIST: SendCaution = {
   danger: 'Solvent mist',
   words:
-    'Ventilate, wear a respirator fit for it, no flame, spark or heater near. Warm wax needs less pressure: warm product, car and workshop, never with an open flame.',
+    'Ventilate, wear a respirator fit for it, no flame, spark or heater near. Cold wax reaches less far: warm product, car and workshop, never with an open flame.',
+};
+const COVER: SendCaution = {
+  danger: 'Brakes',
+  words: 'Cover discs and pads before spraying: wax on them is a braking fault.',
 };
 const BRAKES: SendCaution = {
   danger: 'Brakes',
-  words:
-    'Cover discs and pads before spraying. Wax on them is a braking fault: test before hand-over.',
+  words: 'Uncover, look for wax on discs and pads, and test them before hand-over.',
 };
 
-/** Beside the stages: what stripping, repair, spraying and hand-over bring. */
-export function stageCautions(document: DraftDocument): readonly SendCaution[] {
+/** Beside each stage: what stripping, repair, masking, spraying and hand-over bring. */
+export function stageCautions(document: DraftDocument): Partial<Record<Stage, SendCaution>> {
   const repairs =
     (document.actual?.stages.repair ?? 0) > 0 ||
     document.timers?.repair !== undefined ||
     (document.findings ?? []).some(({ action }) => action === 'patched');
-  return [
-    (document.findings ?? []).some(isRottenPoint) ? ROTTEN_POINT : LIFTING,
-    ...(repairs ? [FIRE] : []),
-    BRAKES,
-  ];
+  return {
+    strip: (document.findings ?? []).some(isRottenPoint) ? ROTTEN_POINT : LIFTING,
+    ...(repairs ? { repair: FIRE } : {}),
+    mask: COVER,
+    apply: MIST,
+    refit: BRAKES,
+  };
 }
 
 /** Beside one finding: what its repair, or leaving it, brings. */
@@ -85,7 +90,7 @@ export function findingCautions(finding: DraftFinding): readonly SendCaution[] {
 
 /** Beside product and checks. */
 export function productCautions(): readonly SendCaution[] {
-  return [MIST, BRAKES];
+  return [MIST, COVER];
 }
 
 /** At the end: what goes with the car. */

@@ -8,7 +8,7 @@ import type { DeviceDraft } from '../../../core/drafts/device-draft';
 import { Drafts } from '../../../core/drafts/drafts';
 import { formatInstant } from '../../../ui/format';
 import { Trouble } from '../../../ui/trouble/trouble';
-import { draftWords } from '../draft-words';
+import { draftWords, hasRefusedPhotos } from '../draft-words';
 import { carWords } from '../review-words';
 import { ThrowAwayDialog, type ThrownAway } from './throw-away-dialog';
 
@@ -28,6 +28,8 @@ export class DraftRows {
     this.drafts.list().map((draft) => ({
       draft,
       ...draftWords(draft),
+      // Of one that is sent only photos that were refused are left here.
+      removable: draft.state === 'editing' || draft.state === 'refused' || hasRefusedPhotos(draft),
       when: formatInstant(draft.changedAt),
       branch:
         this.catalogue.branches().length > 1 ? this.catalogue.branchName(draft.branch) : undefined,

@@ -47,13 +47,14 @@ export class KeptLine {
   private readonly outbox = inject(JobOutbox).state;
   private readonly isPhone = windowIs('(pointer: coarse)');
   protected readonly words = computed(() => {
-    const { waiting, refused, photosWaiting, line } = this.outbox();
+    const { waiting, refused, photosWaiting, line, signedOut } = this.outbox();
     return [
       `Kept on this ${this.isPhone() ? 'phone' : 'device'}`,
       ...(waiting > 0 ? [`${formatCount(waiting)} waiting to be sent`] : []),
       ...(photosWaiting > 0 ? [`${formatCounted(photosWaiting, 'photo', 'photos')} to go`] : []),
       ...(refused > 0 ? [`${formatCount(refused)} refused`] : []),
       ...(line === 'down' ? ['no line just now'] : []),
+      ...(signedOut && waiting + photosWaiting > 0 ? ['sign in to send'] : []),
     ].join(', ');
   });
 }

@@ -27,16 +27,17 @@ export class StagesStep {
   protected readonly draft = inject(OpenDraft);
   private readonly clock = inject(SendClock);
   protected readonly presses = PRESSES;
-  protected readonly cautions = computed(() => stageCautions(this.draft.document()));
   protected readonly rows = computed(() => {
     const document = this.draft.document();
     const now = this.draft.now();
+    const cautions = stageCautions(document);
     return STAGES.map((stage) => {
       const ran = minutesRun(document, stage, now);
       const estimate = document.estimate?.stages?.[stage];
       return {
         stage,
         name: STAGE_NAMES[stage],
+        caution: cautions[stage],
         path: `/actual/stages/${stage}`,
         runs: document.timers?.[stage] !== undefined,
         ran: formatMinutes(ran),
