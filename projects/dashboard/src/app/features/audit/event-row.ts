@@ -38,9 +38,7 @@ export class EventRow {
   protected readonly open = signal(false);
   protected readonly when = computed(() => formatExactInstant(this.event().at));
   protected readonly what = computed(() => actionWords(this.event().action));
-  protected readonly from = computed(() =>
-    this.event().address === 'local' ? 'on the server itself' : `from ${this.event().address}`,
-  );
+  protected readonly from = computed(() => fromWords(this.event().address));
   protected readonly rows = computed(() =>
     changeRows(this.event().changes, namesKnown(this.catalogue)),
   );
@@ -50,4 +48,11 @@ export class EventRow {
       text: valueWords(`/${name}`, held, namesKnown(this.catalogue)),
     })),
   );
+}
+
+/** Where something was done from; an IPv4 address that came wrapped in IPv6 is said as it is known. */
+function fromWords(address: string): string {
+  return address === 'local'
+    ? 'on the server itself'
+    : `from ${address.replace(/^::ffff:(?=\d+\.)/, '')}`;
 }

@@ -16,7 +16,7 @@ describe('subjectOf', () => {
     ['/branches/HAV/jobs/0417/photos/x', 'a photo of job 0417, Havnsund', ['/jobs', 'HAV', '0417']],
     [
       '/branches/HAV/come-back/0417/floor/left/1',
-      'what was left on job 0417, Havnsund',
+      'floor, left, on job 0417, Havnsund',
       ['/jobs', 'HAV', '0417'],
     ],
     ['/branches/HAV/claims/C-1', 'claim C-1, Havnsund', undefined],

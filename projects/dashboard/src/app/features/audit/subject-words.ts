@@ -1,6 +1,7 @@
 import type { Params } from '@angular/router';
 import { isDate, isWeek } from '#shared/domain/calendar';
 import { BODY_TYPES, CONSUMABLE_KINDS } from '#shared/domain/vocabulary';
+import { placeWords } from '../../ui/changes/field-words';
 import { formatShortDate, formatWeek } from '../../ui/format';
 import { BODY_TYPE_NAMES, CONSUMABLE_NAMES } from '../../ui/words';
 
@@ -86,7 +87,7 @@ function branchPart(
       };
     }
     case 'come-back':
-      return { words: `what was left on job ${first}, ${at}`, link: ['/jobs', code, first] };
+      return { words: leftOn(rest, at), link: ['/jobs', code, first] };
     case 'claims':
       return { words: `claim ${rest.join('/')}, ${at}` };
     case 'keys':
@@ -113,6 +114,12 @@ function branchPart(
     default:
       return { words: `${[part.replaceAll('-', ' '), ...rest].join(' ')}, ${at}` };
   }
+}
+
+/** A finding that was left on a car, with its place where its reference tells it. */
+function leftOn([job = '', zone, side]: readonly string[], at: string): string {
+  const place = placeWords(zone, side);
+  return `${place ? `${place}, on ` : ''}job ${job}, ${at}`;
 }
 
 function feeWords(from = ''): string {
