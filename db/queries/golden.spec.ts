@@ -9,6 +9,7 @@ import type { JobFilters } from './job-filters';
 import { iterateLeft, listLeft } from './come-back';
 import { listLeftOfJob, listMarks } from './come-back-of-job';
 import { readCostsOfDay } from './costs-of-day';
+import { findImport, listImports, readImportCatalogue, rememberedColumns } from './imports';
 import { countJobs, iterateJobRows, listJobRows, type ListFilters } from './job-list';
 import { listBilledWeeks, listMissingCosts, sumSpans } from './margin';
 import { readMarginTarget } from './margin-target';
@@ -27,6 +28,10 @@ import {
   readProductLines,
   sumUncosted,
 } from './products';
+import { findLastTime } from './last-time';
+import { listUnderWay } from './under-way';
+import { listPhotos } from './photos';
+import { readUsualFigures } from './usual';
 import { countRungs, readQuoteFigures, scopedSource, type QuotedCar } from './quote';
 import { readClimates, readRotCars, readSpellings } from './rot';
 import { listWeekNotes } from './week-notes';
@@ -78,10 +83,13 @@ const READS: Record<
   'count-jobs-by-use': (db) => countJobs(db, { productId: 1, productUse: 'under' }),
   'count-rungs': (db) => countRungs(scopedSource(db), CAR),
   'count-jobs': (db) => countJobs(db, LISTED),
+  'find-import': (db) => findImport(db, 'AAA', 'x'),
+  'find-last-time': (db) => findLastTime(db, { packageId: 1, bodyType: 'van', upTo: '2026-01-05' }),
   'iterate-job-rows': (db) => [...iterateJobRows(db, {}, 'completed')],
   'iterate-left': (db, filters) => [...iterateLeft(db, filters, statusesOf(filters))],
   'list-billed-weeks': (db, filters) => listBilledWeeks(db, filters, 26),
   'list-branch-lives': listBranchLives,
+  'list-imports': (db) => listImports(db, 'AAA', 100),
   'list-job-rows-by-completion': (db, filters) =>
     listJobRows(db, filters, 'completed', undefined, 51),
   'list-job-rows-by-difference': (db, filters) =>
@@ -95,7 +103,9 @@ const READS: Record<
   'list-left-of-job': (db) => listLeftOfJob(db, 1),
   'list-marks': (db) => listMarks(db, 1, 'x'),
   'list-missing-costs': listMissingCosts,
+  'list-photos': (db) => listPhotos(db, 1, 'x'),
   'list-uncosted-products': listUncostedProducts,
+  'list-under-way': (db) => listUnderWay(db, 1),
   'list-week-notes': (db) => listWeekNotes(db, '2026-W01', '2026-W05'),
   'network-rot-bands': (_db, filters, network) => network.rotBands(filters).bands,
   'network-quote-counts': (_db, _filters, network) => network.nearestQuoteSet(CAR, ['age'], 30),
@@ -105,12 +115,15 @@ const READS: Record<
   'read-by-stage': readByStage,
   'read-climates': (db) => readClimates(db, db.scope.echo().regions),
   'read-costs-of-day': (db) => readCostsOfDay(db, '2026-01-05'),
+  'read-import-catalogue': readImportCatalogue,
   'read-margin-target': readMarginTarget,
   'read-normed-cars': readNormedCars,
   'read-product-lines': readProductLines,
   'read-quote-figures': (db) => readQuoteFigures(scopedSource(db), CAR, 'model_age'),
   'read-rot-cars': readRotCars,
   'read-spellings': (db) => readSpellings(db, [1]),
+  'read-usual-figures': (db) => readUsualFigures(scopedSource(db), 1, CAR, 'model_age', () => true),
+  'remembered-columns': (db) => rememberedColumns(db, 'AAA', 'jobs'),
   'sum-branch-cells': sumBranchCells,
   'sum-uncosted': sumUncosted,
   'sum-spans': (db, { packageIds, bodyTypes }) =>
