@@ -11,6 +11,8 @@ export interface DatabaseContents {
   bytes: number;
   jobs: number;
   auditEvents: number;
+  /** Under which keys the photos' bytes lie, wherever they are kept. */
+  photoKeys: string[];
 }
 
 /** Every page in one step: a copy in small steps starts again whenever another connection writes, and may never end. */
@@ -52,7 +54,8 @@ export function inspectDatabase(file: string): DatabaseContents {
     const trail = verifyAudit(new UnscopedDb(new Connection(driver)));
     if (trail.brokenAt !== null) throw brokenTrail(file, trail.brokenAt);
     const jobs = Number(driver.prepare('select count(*) from jobs').pluck().get());
-    return { bytes: statSync(file).size, jobs, auditEvents: trail.events };
+    const photoKeys = photoKeysIn(driver);
+    return { bytes: statSync(file).size, jobs, auditEvents: trail.events, photoKeys };
   } catch (error) {
     throw error instanceof DatabaseRefused ? error : damaged(file);
   } finally {
@@ -77,6 +80,13 @@ export function inspectAudit(file: string): AuditCheck & { since: string | null 
   } finally {
     driver.close();
   }
+}
+
+/** A database of before there were photos has none. */
+function photoKeysIn(driver: BetterSqlite3.Database): string[] {
+  const table = driver.prepare("select 1 from sqlite_schema where name = 'photos'").get();
+  if (table === undefined) return [];
+  return driver.prepare('select storage_key from photos').pluck().all() as string[];
 }
 
 /**

@@ -1,10 +1,8 @@
 import type { Knex } from 'knex';
-import type { ConsumableKind, Stage } from '#shared/domain/vocabulary';
-import { STAGES } from '#shared/domain/vocabulary';
+import { STAGES, type ConsumableKind, type Stage } from '#shared/domain/vocabulary';
 import { ascending, quantile } from '#shared/stats/quantile';
 import { sql } from '../database';
-import type { QuotedCar, QuoteRung, QuoteSource } from './quote';
-import { carsOnRung } from './quote';
+import { carsOnRung, type QuotedCar, type QuoteRung, type QuoteSource } from './quote';
 
 /** Where the middle of some cars lies and where nearly all of them do: quantiles at 2.5, 50 and 97.5 %. */
 export interface UsualRange {
@@ -52,22 +50,22 @@ export function readUsualFigures(
     const at = (p: number): number => quantile(values, p) ?? 0;
     return { low: at(0.025), usual: at(0.5), high: at(0.975) };
   };
-  const minutes = readMinutes(source, branchId, carsOnRung(source, car, rung));
+  const cars = (): Knex.QueryBuilder => carsOnRung(source, car, rung);
+  const minutes = readMinutes(source, branchId, cars());
+  const products = readListed(source, branchId, productsOf(source, cars()));
+  const consumables = readListed(source, branchId, consumablesOf(source, cars()));
+  const count = (JSON.parse(minutes[0]?.list ?? '[]') as number[]).length;
+  if (count === 0) return undefined;
   const [total, ...stages] = minutes.map(rangeOf);
-  const cars = (JSON.parse(minutes[0]?.list ?? '[]') as number[]).length;
-  if (cars === 0) return undefined;
   return {
-    cars,
+    cars: count,
     total,
     stages: STAGES.map((stage, at) => ({ stage, range: stages[at] })),
-    products: readListed(source, branchId, productsOf(source, carsOnRung(source, car, rung))).map(
-      ({ key, ...listed }) => ({ product: key, range: rangeOf(listed) }),
-    ),
-    consumables: readListed(
-      source,
-      branchId,
-      consumablesOf(source, carsOnRung(source, car, rung)),
-    ).map(({ key, ...listed }) => ({ kind: key as ConsumableKind, range: rangeOf(listed) })),
+    products: products.map(({ key, ...listed }) => ({ product: key, range: rangeOf(listed) })),
+    consumables: consumables.map(({ key, ...listed }) => ({
+      kind: key as ConsumableKind,
+      range: rangeOf(listed),
+    })),
   };
 }
 

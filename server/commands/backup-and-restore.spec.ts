@@ -1,6 +1,7 @@
 import { spawn, type ChildProcess } from 'node:child_process';
 import {
   existsSync,
+  mkdirSync,
   mkdtempSync,
   readdirSync,
   readFileSync,
@@ -205,4 +206,83 @@ describe('restoreBackup', () => {
       expect(readdirSync(folder).filter((name) => name.includes('restore'))).toEqual([]);
     },
   );
+});
+
+describe('Photos', () => {
+  const bytesAt = (place: string): string => readFileSync(path.join(place, 'AAA/one.jpg'), 'utf8');
+  const keep = (place: string, name: string, bytes: string): void => {
+    mkdirSync(path.join(place, 'AAA'), { recursive: true });
+    writeFileSync(path.join(place, 'AAA', name), bytes);
+  };
+  /** A row for each, as if a job of theirs were there. */
+  const record = (...keys: string[]): void =>
+    on(database, (driver) => {
+      driver.exec(`insert into regions (id, code, name) values (1, 'R', 'R')`);
+      driver.exec(
+        `insert into branches (id, code, name, region_id, time_zone, opened_on)
+          values (1, 'AAA', 'A', 1, 'Europe/Berlin', '2020-01-01')`,
+      );
+      for (const key of keys) {
+        driver
+          .prepare(
+            `insert into photos (branch_id, job_ref, photo_ref, storage_key, sent_hash, width, height,
+              bytes, received_at) values (1, 'j', ?, ?, '', 1, 1, 3, '')`,
+          )
+          .run(key, key);
+      }
+    });
+  let photos = '';
+  beforeEach(() => (photos = path.join(folder, 'photos')));
+
+  it('given some in the data folder, are copied beside the backup and back, and none that is there is touched', async () => {
+    record('AAA/one');
+    keep(photos, 'one.jpg', 'one');
+    keep(photos, 'one-small.jpg', 'small');
+    keep(photos, 'half.jpg.unfinished', 'ha');
+    const taken = await takeBackup(database, copy);
+    expect(taken).toMatchObject({ photoKeys: ['AAA/one'], photosIn: `${copy}.photos`, missing: 0 });
+    expect(readdirSync(path.dirname(copy)).sort()).toEqual([
+      'monday.sqlite',
+      'monday.sqlite.photos',
+    ]);
+    expect(readdirSync(path.join(`${copy}.photos`, 'AAA')).sort()).toEqual([
+      'one-small.jpg',
+      'one.jpg',
+    ]);
+    rmSync(photos, { recursive: true });
+    keep(photos, 'later.jpg', 'later');
+    const restored = await restoreBackup(copy, database, 'move-aside', NOW);
+    expect(restored.missing).toBe(0);
+    expect(bytesAt(photos)).toBe('one');
+    expect(readdirSync(path.join(photos, 'AAA')).sort()).toEqual([
+      'later.jpg',
+      'one-small.jpg',
+      'one.jpg',
+    ]);
+  });
+
+  it('given one that is nowhere, are told short of it', async () => {
+    record('AAA/one', 'AAA/lost');
+    keep(photos, 'one.jpg', 'one');
+    expect((await takeBackup(database, copy)).missing).toBe(1);
+    rmSync(`${copy}.photos`, { recursive: true });
+    rmSync(photos, { recursive: true });
+    expect((await restoreBackup(copy, database, 'move-aside', NOW)).missing).toBe(2);
+  });
+
+  it('given a folder of that name already, leave it alone', async () => {
+    mkdirSync(`${copy}.photos`, { recursive: true });
+    await expect(takeBackup(database, copy)).rejects.toThrow(/already a folder/);
+    expect(existsSync(copy)).toBe(false);
+  });
+
+  it('given a copy that does not hold, leave nothing behind', async () => {
+    keep(photos, 'one.jpg', 'one');
+    on(database, (driver) => {
+      driver.exec('drop trigger audit_events_no_update');
+      driver.exec(`update audit_events set actor = 'nobody' where id = 2`);
+    });
+    await expect(takeBackup(database, copy)).rejects.toThrow(/event 2/);
+    expect(readdirSync(path.dirname(copy))).toEqual([]);
+  });
 });

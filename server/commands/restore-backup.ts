@@ -8,8 +8,11 @@ import {
   type DatabaseContents,
 } from '#db/copy-database';
 import { recordAudit } from '#db/queries/audit';
+import { photoFolderOf } from '../storage/folder-photo-store';
 import { CommandRefused } from './command';
+import { copyPhotos, missingPhotos } from './copy-photos';
 import { putInPlace } from './put-in-place';
+import { photosBeside } from './take-backup';
 
 /** What is done about a database that the data folder holds already. */
 export type OldDatabase = 'refuse' | 'move-aside';
@@ -17,11 +20,14 @@ export type OldDatabase = 'refuse' | 'move-aside';
 export interface Restored extends DatabaseContents {
   /** The folder in which the former database is kept, if there was one. */
   keptIn: string | undefined;
+  /** Photos of the restored database whose bytes are neither beside the backup nor in the data folder. */
+  missing: number;
 }
 
 /**
  * Puts a checked backup where a data folder's database is. The former database is kept in a folder beside it; up to the last
- * step the folder holds it as it was. The restoring is written into the restored audit trail.
+ * step the folder holds it as it was. Photos are added to those that are there and none is taken away, so that the former
+ * database finds its own too. The restoring is written into the restored audit trail.
  */
 export async function restoreBackup(
   backup: string,
@@ -57,11 +63,14 @@ export async function restoreBackup(
       }),
     );
     const contents = inspectDatabase(unfinished);
+    const photos = photoFolderOf(path.dirname(database));
+    copyPhotos(photosBeside(backup), photos);
+    const missing = missingPhotos(contents.photoKeys, photos);
     // Once more: a server may have been started meanwhile.
     if (stands) closeDatabaseFile(database);
     const keptIn = stands ? keep(database, now) : undefined;
     putInPlace(unfinished, database);
-    return { ...contents, keptIn };
+    return { ...contents, keptIn, missing };
   } finally {
     for (const companion of ['', '-wal', '-shm', '-journal']) {
       rmSync(unfinished + companion, { force: true });

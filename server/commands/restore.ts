@@ -18,8 +18,9 @@ async function restore(): Promise<void> {
   if (file === undefined || more.length > 0) {
     throw new CommandRefused('Name the one backup to restore: npm run restore -- FILE.');
   }
-  const folder = values.data ?? readConfig(process.env).data;
-  const { bytes, jobs, auditEvents, keptIn } = await restoreBackup(
+  const { data, bucket } = readConfig(process.env);
+  const folder = values.data ?? data;
+  const { bytes, jobs, auditEvents, photoKeys, missing, keptIn } = await restoreBackup(
     file,
     path.join(folder, 'underseam.sqlite'),
     values['move-aside'] ? 'move-aside' : 'refuse',
@@ -28,6 +29,9 @@ async function restore(): Promise<void> {
   console.log(
     `Restored ${file} into ${folder}: ${readableSize(bytes)}, ${jobs} jobs, ${auditEvents} audit events; checked whole.`,
   );
+  if (missing > 0 && !bucket) {
+    console.log(`Of ${photoKeys.length} photos, ${missing} were not beside the backup.`);
+  }
   if (keptIn) console.log(`The former database is kept in ${keptIn}.`);
 }
 
