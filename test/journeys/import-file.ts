@@ -7,8 +7,9 @@ export interface FileToSend {
   buffer: Buffer;
 }
 
-const HEADINGS =
-  'Job no;Make;Model;Body type;Registered;Package;Completed on;strip;apply;CW1 ml;Amount asked;Invoice number;Invoice date;Note';
+/** The headings of the office's spreadsheet. */
+export const HEADINGS =
+  'Job no;Make;Model;Body type;Registered;Package;Completed on;strip;apply;CW1 ml;Invoice total;Invoice number;Invoice date;Note';
 
 /** What the office of a branch saves from its spreadsheet: semicolons, decimal commas, Windows-1252, days first. */
 export function officeFile(rows: readonly string[], headings = HEADINGS): FileToSend {

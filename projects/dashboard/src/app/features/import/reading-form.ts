@@ -31,7 +31,7 @@ export class ReadingForm {
       return {
         index: column.index,
         heading: column.heading || `Column ${column.index + 1}, without a heading`,
-        examples: column.examples.join(' · '),
+        examples: [...new Set(column.examples)].join(' · '),
         field,
         hint: this.fields().find((one) => one.field === field)?.hint,
         match: matchWords(column, field),
