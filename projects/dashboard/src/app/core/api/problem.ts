@@ -11,9 +11,27 @@ export interface Problem {
   readonly fields: readonly FieldProblem[];
 }
 
+/** A problem that is thrown, for a caller that catches it instead of reading it from a signal. */
+export class ProblemError extends Error implements Problem {
+  readonly status: number;
+  readonly sentence: string;
+  readonly fields: readonly FieldProblem[];
+
+  constructor({ status, sentence, fields }: Problem) {
+    super(sentence);
+    this.status = status;
+    this.sentence = sentence;
+    this.fields = fields;
+  }
+}
+
 /** Turns whatever a call threw (usually an RFC 9457 document) into sentences. */
 export function describeProblem(error: unknown): Problem {
   const cause = error instanceof Error && error.cause !== undefined ? error.cause : error;
+  if (cause instanceof ProblemError) {
+    const { status, sentence, fields } = cause;
+    return { status, sentence, fields };
+  }
   if (!(cause instanceof HttpErrorResponse)) {
     return { status: 0, sentence: 'Something went wrong on this page. Try again.', fields: [] };
   }

@@ -95,19 +95,23 @@ export class Drafts {
     return this.kept().find((draft) => draft.id === id);
   }
 
-  /** Changes a draft; visible in `list` at once, durable when settled. Changing a waiting or refused one makes it `editing` again. */
-  async change(id: string, change: DraftChange): Promise<void> {
-    const seen = this.find(id);
-    if (!seen) return;
+  /**
+   * Changes a draft; visible in `list` at once, durable when settled. Changing a waiting or refused one makes it `editing`
+   * again. `from` is the draft as the form last took it over or wrote it: what another window changed since then stays.
+   */
+  async change(id: string, change: DraftChange, from?: DeviceDraft): Promise<void> {
+    const shown = this.find(id);
+    if (!shown) return;
+    const seen = from ?? shown;
     const changed = (onto: DeviceDraft): { draft: DeviceDraft; clash: boolean } => {
       const { draft, clash } = mergeChange(onto, seen, change);
       const reopened = touchesContent(change) ? reopenedFrom(onto) : {};
       return { draft: { ...draft, ...reopened, changedAt: new Date().toISOString() }, clash };
     };
-    this.show(changed(seen).draft);
+    this.show(changed(shown).draft);
     let other: DeviceDraft | undefined;
     await this.write(id, (kept) => {
-      const { draft, clash } = changed(kept ?? seen);
+      const { draft, clash } = changed(kept ?? shown);
       other = clash ? kept : undefined;
       return draft;
     });

@@ -1,8 +1,7 @@
 import { firstValueFrom, timeout } from 'rxjs';
 import { getUnderWay, keepUnderWay, type JobUnderWay } from '#shared/contracts/under-way';
 import type { Answer, Api } from '../api/api';
-import { describeProblem } from '../api/problem';
-import { ProblemError } from '../api/problem-error';
+import { describeProblem, ProblemError } from '../api/problem';
 import type { DeviceDraft } from './device-draft';
 
 /** A person waits for this one, so it is not given long, ms. */

@@ -11,7 +11,7 @@ import {
 import { firstValueFrom } from 'rxjs';
 import { getHealth } from '#shared/contracts/system';
 import { Api } from '../api/api';
-import { ProblemError } from '../api/problem-error';
+import { ProblemError } from '../api/problem';
 import { Line } from '../offline/line';
 import { Session } from '../session/session';
 import type { DeviceDraft } from './device-draft';

@@ -50,9 +50,12 @@ export class Header {
   protected readonly dangerous = inject(DangerousCount).dangerous;
   protected readonly formatCount = formatCount;
   protected readonly openName = this.open.name;
-  /** Something of this person's waits on the device, or what they wrote could not go out: only then what sends is loaded. */
+  /** Something of this person's waits on the device, or there is no line: only then what sends is loaded. *Send a job* says it itself. */
   protected readonly outbox = computed(
-    () => maySend(this.session.role()) && (this.unsent.mine().waiting > 0 || this.line.down()),
+    () =>
+      maySend(this.session.role()) &&
+      this.openName() !== 'Send a job' &&
+      (this.unsent.mine().waiting > 0 || this.line.down()),
   );
 }
 
