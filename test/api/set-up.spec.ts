@@ -208,6 +208,16 @@ describe('GET of the catalogue and of costs (rule 79)', () => {
     expect(await seen(network.lead)).toEqual([['COAST'], ['AAA', 'BBB'], packages]);
   });
 
+  it('given a region without a branch, shows it to head office, who may put the first there, and to nobody else', async () => {
+    await put('/api/regions/EMPTY', { name: 'Empty' });
+    const seen = async (token: string): Promise<string[]> => {
+      const { regions } = await get('/api/catalogue', token);
+      return (regions as { code: string }[]).map(({ code }) => code);
+    };
+    expect(await seen(network.office)).toContain('EMPTY');
+    expect(await seen(network.lead)).toEqual(['COAST']);
+  });
+
   it('given a recorder, shows no costs; given a manager, only the hourly cost of the own branch', async () => {
     expect((await app.call('get', '/api/costs', { token: network.recorder })).status).toBe(403);
     const { rates } = await get('/api/costs', network.manager);

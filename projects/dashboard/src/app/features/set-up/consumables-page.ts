@@ -29,9 +29,19 @@ export class ConsumablesPage {
   protected readonly costs = this.api.read(getCosts, () => ({}));
   private readonly today = computed(() => this.catalogue.today() ?? '');
   protected readonly form = computed(() => consumableCostChange(this.api, this.today()));
-  protected readonly rows = computed(() => this.costs.value()?.consumables ?? []);
+  /** By kind, the newest first. */
+  protected readonly rows = computed(() =>
+    [...(this.costs.value()?.consumables ?? [])].sort(
+      (a, b) => a.kind.localeCompare(b.kind) || b.from.localeCompare(a.from),
+    ),
+  );
   protected readonly columns = computed((): Column<Row>[] => [
-    { key: 'kind', label: 'Consumable', text: ({ kind }) => CONSUMABLE_NAMES[kind] },
+    {
+      key: 'kind',
+      label: 'Consumable',
+      text: ({ kind }) => CONSUMABLE_NAMES[kind],
+      strong: (row) => this.standing(row) === 'now',
+    },
     {
       key: 'from',
       label: 'From',

@@ -89,9 +89,10 @@ export class ChangeForm<Out> {
         ? 'Saving. Figures switch all at once when they are computed.'
         : 'Saving.';
     }
-    if (this.hurried() && !this.effectTold()?.said()) return 'Counting what it moves first.';
-    if (this.hurried()) return 'See what it moves, then press once more.';
-    return this.done() ?? '';
+    if (!this.hurried()) return this.done() ?? '';
+    return this.planned() && this.effectTold()?.said()
+      ? 'See what it moves, then press once more.'
+      : 'Counting what it moves first.';
   });
 
   constructor() {
