@@ -1,8 +1,4 @@
-import type { Connection } from '#db/database';
 import { NetworkReference } from '#db/network-reference';
-import { readQuoteFigures } from '#db/queries/quote';
-import { readUsualFigures } from '#db/queries/usual';
-import { nearestNetworkSet } from '#db/quote-reference';
 import { Scope } from '#db/scope';
 import type { Role } from '#shared/domain/vocabulary';
 import { TestApp, type Answer } from '../support/app';
@@ -11,6 +7,7 @@ import { readOnThisThread } from '../support/read-on-this-thread';
 import { BRANCHES, makeSmallNetwork, validJob, type SmallNetwork } from '../support/small-network';
 import { askedOf, contracts, findingsWithOneLeft, placeSamples } from '../support/walk-contracts';
 import { mayRefer, withoutReference } from './reference-fields';
+import { unguardedQuoteSet, unguardedUsualSet, type Guarded } from './unguarded-sets';
 
 let app: TestApp;
 let network: SmallNetwork;
@@ -107,8 +104,8 @@ type Reader = keyof typeof READERS;
 const REFERRING = [
   '/api/analytics/rot',
   '/api/quote',
-  '/api/exports/quote.csv',
   '/api/branches/AAA/usual',
+  '/api/exports/quote.csv',
 ];
 
 /** As many branches with cars as may stand outside before a figure of the network is told. */
@@ -176,42 +173,6 @@ async function withReadsHere<T>(read: () => Promise<T>): Promise<T> {
   } finally {
     app.kit.reads = reads;
   }
-}
-
-/** What keeps figures of the network from those who stand against too few others. */
-interface Guarded {
-  connection: Connection;
-  scope: Scope;
-  enoughBehind(): boolean;
-  nearestQuoteSet: NetworkReference['nearestQuoteSet'];
-  nearestUsualSet: NetworkReference['nearestUsualSet'];
-}
-
-/** The nearest set of the network's cars whoever stands behind it. */
-function unguardedQuoteSet(
-  this: Guarded,
-  ...[car, rungs, cars]: Parameters<Guarded['nearestQuoteSet']>
-): ReturnType<Guarded['nearestQuoteSet']> {
-  const [branch] = this.scope.branches;
-  const need = { cars, others: 0 };
-  return (
-    branch && nearestNetworkSet(this.connection, branch.id, car, rungs, need, readQuoteFigures)
-  );
-}
-
-/** The same with what its cars usually take, whoever stands behind any figure. */
-function unguardedUsualSet(
-  this: Guarded,
-  ...[car, rungs, cars]: Parameters<Guarded['nearestUsualSet']>
-): ReturnType<Guarded['nearestUsualSet']> {
-  const [branch] = this.scope.branches;
-  const need = { cars, others: 0 };
-  return (
-    branch &&
-    nearestNetworkSet(this.connection, branch.id, car, rungs, need, (source, ...set) =>
-      readUsualFigures(source, branch.id, ...set, () => true),
-    )
-  );
 }
 
 const EVERY_READER = Object.keys(READERS) as Reader[];
@@ -293,7 +254,12 @@ describe('Everything a site manager may read', () => {
     );
     expect(narrowed.length).toBeGreaterThan(12);
     expect(pathsOf(leaking).sort()).toEqual(
-      ['/api/costs', '/api/quote', ...narrowed.map(([, { path }]) => path)].sort(),
+      [
+        '/api/branches/AAA/usual',
+        '/api/costs',
+        '/api/quote',
+        ...narrowed.map(([, { path }]) => path),
+      ].sort(),
     );
   }, 120_000);
 });

@@ -1,6 +1,8 @@
 import type { TestApp } from './app';
+import { sendFile } from './send-file';
 import { validJob, type SmallNetwork } from './small-network';
-import { findingsWithOneLeft } from './walk-contracts';
+import { jpegOf, sendPhoto } from './send-photo';
+import { findingsWithOneLeft, GOING } from './walk-contracts';
 
 /** What is to be changed, and how. */
 export interface Disturbance {
@@ -16,8 +18,8 @@ export interface Disturbance {
 
 /**
  * Changes everything that lies outside some branches, each time in another way: jobs sent, corrected and voided, claims,
- * findings left and what is marked on them, rates, notes, bookings, the names of branches and of regions, a branch and a
- * region more.
+ * findings left and what is marked on them, photos, jobs under way, rates, notes, bookings, the names of branches and of
+ * regions, a branch and a region more.
  */
 export async function disturbOutside(
   app: TestApp,
@@ -57,7 +59,14 @@ export async function disturbOutside(
       });
     }
     await send('put', `${at}/weeks/2026-W05/note`, { text: `round ${round}` });
-    if (busy === 'all' || busy.includes(branch)) await disturbCars(send, at, round);
+    const file = await sendFile(app, token, { branch, content: `job,odd ${round}\nj,1\n` });
+    if (file.status >= 300) throw new Error(`file at ${branch}: ${file.text}`);
+    await send('put', `${at}/under-way/${GOING}`, { notes: `round ${round}` });
+    if (busy !== 'all' && !busy.includes(branch)) continue;
+    await disturbCars(send, at, round);
+    const photo = await jpegOf(10 + round, 10);
+    const sent = await sendPhoto(app, `${at}/jobs/walked/photos/walked`, photo, { token });
+    if (sent.status >= 300) throw new Error(`photo at ${branch}: ${sent.text}`);
   }
 }
 

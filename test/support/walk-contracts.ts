@@ -1,6 +1,8 @@
 import { endpoints } from '#shared/contracts/index';
 import type { Endpoint } from '#shared/contracts/endpoint';
 import type { TestApp } from './app';
+import { jpegOf, sendPhoto } from './send-photo';
+import { placeFile } from './place-file';
 import { validJob, type SmallNetwork } from './small-network';
 
 /** A call as tests name it. */
@@ -21,14 +23,28 @@ const SAMPLES: Record<string, string> = {
   kind: 'other',
   bodyType: 'suv',
   week: '2026-W05',
+  photo: 'walked',
 };
+
+/** The job under way that the walks ask for. */
+export const GOING = 'going';
+
+/** The id that a file of the walks is given: it has none before it is sent. */
+const PLACED_FILE = 'walked';
 
 /** The address of a call with its names filled in; other values than the sample's may be given. */
 export function addressOf({ path }: Endpoint, values: Record<string, string> = {}): string {
   return path.replace(/:(\w+)/g, (_, name: string) => {
-    const value = values[name] ?? SAMPLES[name] ?? sampleCode(path, name);
+    const value = values[name] ?? sampleOf(path, name);
     return encodeURIComponent(value);
   });
+}
+
+function sampleOf(path: string, name: string): string {
+  // A job that has been sent is not under way.
+  if (name === 'jobRef' && path.includes('/under-way/')) return GOING;
+  if (name === 'id' && path.includes('/imports/')) return PLACED_FILE;
+  return SAMPLES[name] ?? sampleCode(path, name);
 }
 
 function sampleCode(path: string, name: string): string {
@@ -41,12 +57,13 @@ function sampleCode(path: string, name: string): string {
 }
 
 /** What a call cannot be asked without. */
-const QUOTED =
-  'make=Velder&model=Tessock&firstRegistered=2009-05&bodyType=hatchback&package=full&branch=AAA';
+const CAR = 'make=Velder&model=Tessock&firstRegistered=2009-05&bodyType=hatchback&package=full';
+const QUOTED = `${CAR}&branch=AAA`;
 const NEEDED: Record<string, string> = {
   '/api/week-notes': 'from=2025-12-01&to=2026-02-02',
   '/api/quote': QUOTED,
   '/api/exports/quote.csv': QUOTED,
+  '/api/branches/:branch/usual': CAR,
 };
 
 /** The address of a call with what it cannot be asked without, and with whatever else is asked. */
@@ -74,7 +91,7 @@ export function findingsWithOneLeft(): object[] {
   return [...(validJob()['findings'] as object[]), LEFT_FINDING];
 }
 
-/** Puts there what the samples name: a job with a claim and a finding left on the car, and a booking. */
+/** Puts there what the samples name: a job with a claim, a photo and a finding left on the car, one under way, and a booking. */
 export async function placeSamples(app: TestApp, { manager }: SmallNetwork): Promise<void> {
   const claim = {
     jobRef: 'walked',
@@ -88,8 +105,13 @@ export async function placeSamples(app: TestApp, { manager }: SmallNetwork): Pro
     ['jobs/walked', validJob({ findings: findingsWithOneLeft() })],
     ['claims/walked', claim],
     ['bookings/walked', booking],
+    [`under-way/${GOING}`, {}],
   ] as const) {
     const answer = await app.call('put', `/api/branches/AAA/${path}`, { token: manager, body });
     if (answer.status !== 201) throw new Error(`${path}: ${answer.text}`);
   }
+  const photo = '/api/branches/AAA/jobs/walked/photos/walked';
+  const sent = await sendPhoto(app, photo, await jpegOf(), { token: manager });
+  if (sent.status !== 201) throw new Error(`${photo}: ${sent.text}`);
+  await placeFile(app, manager, PLACED_FILE);
 }
