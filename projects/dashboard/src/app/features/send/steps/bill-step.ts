@@ -1,4 +1,11 @@
-import { ChangeDetectionStrategy, Component, computed, inject, linkedSignal } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  inject,
+  linkedSignal,
+  untracked,
+} from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { Catalogue } from '../../../core/catalogue/catalogue';
 import { currencySign, formatExactMoney } from '../../../ui/format';
@@ -16,19 +23,28 @@ import { SendField } from '../pieces/send-field';
   template: `
     @if (draft.money() === 'shown') {
       <h2>Bill</h2>
-      <div class="two choice" role="group" aria-label="The bill">
-        <button type="button" [class.taken]="now()" [attr.aria-pressed]="now()" (click)="billNow()">
-          Bill it now
-        </button>
-        <button
-          type="button"
-          [class.taken]="!now()"
-          [attr.aria-pressed]="!now()"
-          (click)="billLater()"
-        >
-          Bill it later
-        </button>
-      </div>
+      @if (stays()) {
+        <p class="quiet">The bill on record stays unless it is changed here.</p>
+      } @else {
+        <div class="two choice" role="group" aria-label="The bill">
+          <button
+            type="button"
+            [class.taken]="now()"
+            [attr.aria-pressed]="now()"
+            (click)="billNow()"
+          >
+            Bill it now
+          </button>
+          <button
+            type="button"
+            [class.taken]="!now()"
+            [attr.aria-pressed]="!now()"
+            (click)="billLater()"
+          >
+            Bill it later
+          </button>
+        </div>
+      }
       @if (now()) {
         <us-send-field
           path="/invoice/totalCents"
@@ -69,7 +85,16 @@ export class BillStep {
   /** Whether the bill is written here; taken back when its last field is emptied and the page is left. */
   protected readonly now = linkedSignal<string | undefined, boolean>({
     source: () => this.draft.id(),
-    computation: () => this.draft.document().invoice !== undefined,
+    computation: () => untracked(() => this.draft.document().invoice !== undefined),
+  });
+  /** A bill on record is corrected here, not taken back: without one sent, the stored one stays (rule 73). */
+  protected readonly stays = linkedSignal<string | undefined, boolean>({
+    source: () => this.draft.id(),
+    computation: () =>
+      untracked(
+        () =>
+          this.draft.kept()?.corrects !== undefined && this.draft.document().invoice !== undefined,
+      ),
   });
   protected readonly agreed = computed(() => {
     const { invoice } = this.draft.document();
