@@ -98,6 +98,7 @@ describe('a file imported', () => {
     const rows = await readTable(page.getByRole('table', { name: 'Jobs', exact: true }));
     expect(rows.map((row) => row['Job']).sort()).toEqual(GOOD);
     await page.getByRole('link', { name: 'office-1' }).click();
+    await page.waitForURL('**/jobs/HAV/office-1');
     await untilReady(page);
     const sheet = await page.getByRole('main').innerText();
     expect(sheet).toContain('412.50');
