@@ -34,15 +34,16 @@ async function main(): Promise<void> {
   await listenOn(server, config.port);
   const store = await Store.open(config.data);
   readSecret(config);
+  const outbox = new Outbox(store, config, log);
   const kit: Kit = {
     store,
     clock,
     config,
     reads: new ReadPool(store.file),
     passwords: new PasswordThread(),
-    outbox: new Outbox(store, config, log),
+    outbox,
     photos: photoStoreOf(config),
-    imports: importDeskOf(store, config, clock),
+    imports: importDeskOf(store, config, clock, outbox),
     version,
   };
   const seeded = await offerDemo(kit);

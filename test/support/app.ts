@@ -54,15 +54,16 @@ export class TestApp {
     const log = pino({ level: process.env['TEST_LOG'] ?? 'silent' });
     const store = await Store.open(folder);
     const clock = fixedClock(new Date(options.now ?? '2026-02-02T06:30:00Z'));
+    const outbox = new Outbox(store, config, log);
     const kit: Kit = {
       store,
       clock,
       config,
       reads: new ReadPool(store.file),
       passwords: new PasswordThread(CHEAP),
-      outbox: new Outbox(store, config, log),
+      outbox,
       photos: photoStoreOf(config),
-      imports: importDeskOf(store, config, clock),
+      imports: importDeskOf(store, config, clock, outbox),
       version: '0.0.0-test',
     };
     await kit.imports.start();

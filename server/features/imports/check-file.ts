@@ -27,7 +27,7 @@ type Status = PreviewRow['status'];
 /** Rows shown at the beginning, and refused ones wherever they stand. */
 const PREVIEWED = 20;
 const REFUSED_PREVIEWED = 50;
-const LONGEST_CELL = 200;
+const LONGEST_CELL = 100;
 const STEP = 500;
 
 /** Nobody has seen the stored job when a file is sent. */

@@ -35,4 +35,15 @@ export interface ImportTools {
   now: () => Date;
   /** The time by which business dates are judged. */
   today: (timeZone: string) => string;
+  /** Tells whoever had a file written that its writing has ended; inside a write. */
+  tellEnded: (personId: number, ended: EndedWriting) => void;
+}
+
+/** How the writing of a file has ended, in words. */
+export interface EndedWriting {
+  branch: string;
+  fileName: string;
+  outcome: string;
+  counts: readonly string[];
+  path: string;
 }

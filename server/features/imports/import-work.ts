@@ -7,6 +7,8 @@ export interface ImportWork {
   stop: 'cancel' | 'close' | undefined;
   /** Lets go of what it reads from, so that it ends soon. */
   release: () => void;
+  /** Begins it unless it has begun; settles when it has ended. */
+  run: () => Promise<void>;
   ended: Promise<void>;
 }
 
@@ -26,17 +28,19 @@ export class ImportWorks {
     live: LiveProgress,
     run: (work: ImportWork) => Promise<void>,
   ): void {
+    let running: Promise<void> | undefined;
     const work: ImportWork = {
       live,
       stop: undefined,
       release: () => undefined,
+      run: () =>
+        (running ??= run(work).then(() => {
+          if (this.works.get(id) === work) this.works.delete(id);
+        })),
       ended: Promise.resolve(),
     };
     this.works.set(id, work);
-    work.ended = this.lanes[lane].then(async () => {
-      await run(work);
-      if (this.works.get(id) === work) this.works.delete(id);
-    });
+    work.ended = this.lanes[lane].then(() => work.run());
     this.lanes[lane] = work.ended;
   }
 
@@ -46,7 +50,8 @@ export class ImportWorks {
     if (!work) return;
     work.stop ??= why;
     work.release();
-    await work.ended;
+    // One that still waits for its turn ends at once.
+    await work.run();
   }
 
   async stopAll(): Promise<void> {

@@ -5,7 +5,7 @@ import { FileProblem } from './file-problem';
 import type { FilledColumn } from './read-row';
 
 /** More columns than a file of jobs could fill several times over. */
-const MOST_COLUMNS = 1000;
+const MOST_COLUMNS = 500;
 const EXAMPLES = 3;
 const LONGEST_EXAMPLE = 80;
 

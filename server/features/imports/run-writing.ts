@@ -2,7 +2,7 @@ import { ImportWriter } from '#db/import-writer';
 import type { SentImport } from '#db/queries/imports';
 import { worldOf, type ImportBench } from './import-bench';
 import type { ImportSender } from './import-sender';
-import type { FileTask } from './import-tools';
+import type { EndedWriting, FileTask } from './import-tools';
 import type { ImportWork } from './import-work';
 import { keepRefused } from './refused-rows';
 import type { RowsToWrite } from './rows-to-write';
@@ -26,19 +26,37 @@ export async function runWriting(
     .write(() => {
       const writer = new ImportWriter(store, branch);
       writer.change(record.id, { ...end, endedAt: at });
-      const found = writer.find(record.id);
-      const { kind, fileName } = record;
-      writer.tell(
-        'import.end',
-        record.id,
-        { ...sender, at },
-        {
-          ...{ kind, fileName, state: end.state },
-          ...{ written: found?.written, rowsDone: found?.rowsDone, rowsOf: found?.rowsOf },
-        },
-      );
+      const ended = { ...record, ...writer.find(record.id) };
+      const { kind, fileName, state, written: counts, rowsDone, rowsOf } = ended;
+      const deed = { ...sender, at };
+      const detail = { kind, fileName, state, written: counts, rowsDone, rowsOf };
+      writer.tell('import.end', record.id, deed, detail);
+      tools.tellEnded(sender.actor.personId, inWords(ended));
     })
     .catch(() => undefined);
+}
+
+const OUTCOMES: Partial<Record<SentImport['state'], string>> = {
+  done: 'written',
+  cancelled: 'cancelled; what was written stays',
+  stopped: 'stopped; what was written stays, and it can be gone on with',
+};
+
+/** How the writing of a file has ended, for a mail. */
+function inWords({ id, branch, fileName, state, written: counts }: SentImport): EndedWriting {
+  const told = [
+    [counts.created, 'new'],
+    [counts.replaced, 'changed'],
+    [counts.unchanged, 'unchanged'],
+    [counts.refused, 'refused'],
+  ] as const;
+  return {
+    branch,
+    fileName,
+    outcome: OUTCOMES[state] ?? state,
+    counts: told.flatMap(([count, word]) => (count > 0 ? [`${count} ${word}`] : [])),
+    path: `/import?branch=${branch}&file=${id}`,
+  };
 }
 
 type End = Pick<SentImport, 'state' | 'problem'>;

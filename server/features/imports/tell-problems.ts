@@ -89,15 +89,15 @@ function inFileWords(message: string, fills: string | undefined, world: RowWorld
   return named.replace(/\d{3,}$/, (cents) => `${cents.slice(0, -2)}.${cents.slice(-2)}`);
 }
 
-/** The same sentence is told once, at a column where it has one. */
+/** The same sentence is told once of a column, and not again of the row as a whole. */
 function withoutRepeats(told: readonly ToldProblem[]): ToldProblem[] {
-  const kept = new Map<string, ToldProblem>();
+  const kept: ToldProblem[] = [];
   for (const problem of told) {
-    const key =
-      problem.heading === null ? problem.message : `${problem.heading}\n${problem.message}`;
-    const said = [...kept.values()].some(({ message }) => message === problem.message);
-    if (problem.heading === null && said) continue;
-    kept.set(key, problem);
+    const said = kept.some(
+      ({ heading, message }) =>
+        message === problem.message && (heading === problem.heading || problem.heading === null),
+    );
+    if (!said) kept.push(problem);
   }
-  return [...kept.values()];
+  return kept;
 }
