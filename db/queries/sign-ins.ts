@@ -130,3 +130,17 @@ export function openSignInsOf(db: UnscopedDb, personId: number, now: string): Op
       .select('id', 'device', { startedAt: 'started_at', lastUsedAt: 'last_used_at' }),
   );
 }
+
+/** Every device that a person has signed in from, as far as it is remembered. */
+export function devicesOf(db: UnscopedDb, personId: number): string[] {
+  return db
+    .all<{ device: string }>(sql('sign_ins').where({ person_id: personId }).distinct('device'))
+    .map(({ device }) => device);
+}
+
+/** Lets go of sign-ins that ended or expired before an instant. */
+export function forgetSignIns(db: UnscopedDb, before: string): void {
+  db.run(
+    sql('sign_ins').where('ended_at', '<', before).orWhere('expires_at', '<', before).delete(),
+  );
+}

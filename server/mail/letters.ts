@@ -30,6 +30,69 @@ export function resetLetter(to: Addressee, link: string): Mail {
   });
 }
 
+/** Where and when something was done with an account. */
+export interface Occasion {
+  /** ISO instant. */
+  at: string;
+  address: string;
+  device: string;
+}
+
+/** The letter that tells of a sign-in from a device that was not seen before. */
+export function newSignInLetter(
+  to: Addressee,
+  { at, address, device }: Occasion,
+  link: string,
+): Mail {
+  const from = device === '' ? 'a device that does not say what it is' : oneLine(device);
+  return letter(to, 'A new sign-in to Underseam', link, {
+    opening: `Somebody, probably you, signed in to your Underseam account on ${told(at)} from a device that was not seen before: ${from}, network address ${oneLine(address)}.`,
+    asking: 'If it was not you, sign out everywhere and choose another password here:',
+    closing:
+      'If it was you, you need do nothing. Which mails you receive is said on the same page.',
+  });
+}
+
+/** The letter that tells that the password was changed. */
+export function passwordChangedLetter(
+  to: Addressee,
+  { at, address }: Omit<Occasion, 'device'>,
+  link: string,
+): Mail {
+  return letter(to, 'Your password for Underseam was changed', link, {
+    opening: `The password of your Underseam account was changed on ${told(at)} from the network address ${oneLine(address)}.`,
+    asking: 'If it was not you, ask for a new password here at once and tell head office:',
+    closing: 'If it was you, you need do nothing.',
+  });
+}
+
+/** How the writing of a file ended. */
+export interface EndedImport {
+  branch: string;
+  fileName: string;
+  /** In words: `written`, `stopped by Ansa Moor`, `failed: the disk is full`. */
+  outcome: string;
+  /** In words: `12 new`, `3 refused`. */
+  counts: readonly string[];
+  /** Path of the page that shows it. */
+  path: string;
+}
+
+/** The letter that tells that a file was written, or that its writing ended otherwise. */
+export function importEndedLetter(to: Addressee, ended: EndedImport, link: string): Mail {
+  const counts = ended.counts.length > 0 ? ` ${ended.counts.join(', ')}.` : '';
+  return letter(to, 'A file was worked through in Underseam', link, {
+    opening: oneLine(`The file ${ended.fileName} of ${ended.branch}: ${ended.outcome}.${counts}`),
+    asking: 'What was written and what was refused stands here:',
+    closing: 'Which mails you receive is said on your own page.',
+  });
+}
+
+/** An instant as a letter says it: to the minute, and of which clock. */
+function told(at: string): string {
+  return `${at.slice(0, 10)} at ${at.slice(11, 16)} UTC`;
+}
+
 interface Sentences {
   opening: string;
   asking: string;

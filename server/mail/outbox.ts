@@ -9,10 +9,22 @@ import {
   putOffMail,
   type WaitingMail,
 } from '#db/queries/mails';
+import { wantsMail } from '#db/queries/mail-choices';
+import { findPerson } from '#db/queries/people';
 import type { Store } from '#db/store';
 import { realClock, type Clock } from '../clock';
 import type { Config } from '../config';
-import { invitationLetter, resetLetter, type Addressee, type Mail } from './letters';
+import {
+  importEndedLetter,
+  invitationLetter,
+  newSignInLetter,
+  passwordChangedLetter,
+  resetLetter,
+  type Addressee,
+  type EndedImport,
+  type Mail,
+  type Occasion,
+} from './letters';
 import { failureOf, makeTransport, messageOf } from './smtp';
 
 /** How a mail is tried again, in milliseconds: the wait doubles from the first to the longest until the mail is too old. */
@@ -63,6 +75,26 @@ export class Outbox {
   /** Queues the mail that lets a person set a new password; inside a write. */
   queueReset(to: Addressee, token: string): void {
     this.queue(resetLetter(to, this.welcomeLink(token, 'reset')));
+  }
+
+  /** Tells a person of a sign-in from a device not seen before, unless they do without; inside a write. */
+  queueNewSignIn(personId: number, occasion: Occasion): void {
+    const person = findPerson(this.store.unscoped, personId);
+    if (!person?.active || !wantsMail(this.store.unscoped, person, 'new_sign_in')) return;
+    this.queue(newSignInLetter(person, occasion, this.link('/account')));
+  }
+
+  /** Tells a person that their password was changed; inside a write. */
+  queuePasswordChanged(personId: number, occasion: Omit<Occasion, 'device'>): void {
+    const person = findPerson(this.store.unscoped, personId);
+    if (person) this.queue(passwordChangedLetter(person, occasion, this.link('/sign-in')));
+  }
+
+  /** Tells a person that a file they sent was worked through, unless they do without; inside a write. */
+  queueImportEnded(personId: number, ended: EndedImport): void {
+    const person = findPerson(this.store.unscoped, personId);
+    if (!person?.active || !wantsMail(this.store.unscoped, person, 'import_ended')) return;
+    this.queue(importEndedLetter(person, ended, this.link(ended.path)));
   }
 
   /** Queues a mail; inside a write, so that it is kept if and only if the rest of the write is. */
@@ -157,7 +189,10 @@ export class Outbox {
   }
 
   private welcomeLink(token: string, purpose: 'invitation' | 'reset'): string {
-    const base = this.config.publicUrl.replace(/\/+$/, '');
-    return `${base}/welcome?token=${encodeURIComponent(token)}&purpose=${purpose}`;
+    return this.link(`/welcome?token=${encodeURIComponent(token)}&purpose=${purpose}`);
+  }
+
+  private link(path: string): string {
+    return this.config.publicUrl.replace(/\/+$/, '') + path;
   }
 }

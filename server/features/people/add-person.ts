@@ -6,7 +6,8 @@ import type { Role } from '#shared/domain/vocabulary';
 import { Refusal, refuseInput } from '#shared/domain/refusal';
 import { checkPlacing } from './check-placing';
 
-const INVITATION_LIVES_MS = 7 * 24 * 3600_000;
+/** How long the link of an invitation works. */
+export const INVITATION_LIVES_MS = 7 * 24 * 3600_000;
 
 /** What adding a person is given; `outbox` and `newToken` are used only when there is no password. */
 export interface PeopleTools {

@@ -7,6 +7,7 @@ import { findPerson, knownPlaces, listPeople } from '#db/queries/people';
 import * as contracts from '#shared/contracts/people';
 import { addPerson, type PeopleTools } from './add-person';
 import { changePerson } from './change-person';
+import { inviteAgain } from './invite-again';
 import { checkPlacing } from './check-placing';
 
 /** Mounts what head office does with people. */
@@ -37,5 +38,14 @@ export function mountPeople(mounting: Mounting, kit: Kit, clock: Clock = realClo
       exists: ({ params }) => findPerson(store.unscoped, params.id) !== undefined,
       rules: placing,
     },
+  );
+  mount(
+    mounting,
+    contracts.inviteAgain,
+    async ({ params, caller, address }) => {
+      await inviteAgain(tools, params.id, { actor: actorOf(caller, address), now: clock.now() });
+      return {};
+    },
+    { exists: ({ params }) => findPerson(store.unscoped, params.id) !== undefined },
   );
 }

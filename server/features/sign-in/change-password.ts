@@ -33,6 +33,7 @@ export async function changePassword(
     forgiveAttempts(tools, person.email);
     setPasswordHash(db, person.id, hash);
     useUpTokensOf(db, person.id, at);
+    tools.outbox.queuePasswordChanged(person.id, { at, address: from.address });
     const ended = endSignInsOf(db, person.id, at, person.signInId);
     recordAudit(db, {
       at,

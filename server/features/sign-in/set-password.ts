@@ -31,6 +31,10 @@ export async function setPassword(
     setPasswordHash(db, personId, hash);
     useUpTokensOf(db, personId, at);
     forgiveAttempts(tools, email);
+    // Whoever is invited has just been mailed, and has no earlier password.
+    if (purpose === 'reset') {
+      tools.outbox.queuePasswordChanged(personId, { at, address: from.address });
+    }
     const ended = endSignInsOf(db, personId, at);
     recordAudit(db, {
       at,

@@ -9,7 +9,11 @@ export interface SignInTools {
     hash(password: string): Promise<string>;
     matches(password: string, hash: string | null): Promise<boolean>;
   };
-  outbox: { queueReset(to: { email: string; name: string }, token: string): void };
+  outbox: {
+    queueReset(to: { email: string; name: string }, token: string): void;
+    queueNewSignIn(personId: number, occasion: Origin & { at: string }): void;
+    queuePasswordChanged(personId: number, occasion: { at: string; address: string }): void;
+  };
   cookies: {
     read(header: string | undefined): ShownCookie | undefined;
     verifies(shown: ShownCookie, signIn: { id: number; startedAt: string }): boolean;

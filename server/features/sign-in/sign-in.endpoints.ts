@@ -11,8 +11,10 @@ import { openSignInsOf } from '#db/queries/sign-ins';
 import * as contracts from '#shared/contracts/auth';
 import type { OutOf } from '#shared/contracts/endpoint';
 import { notFound, Refusal } from '#shared/domain/refusal';
+import { listMailChoices } from '#db/queries/mail-choices';
 import { changeName } from './change-name';
 import { changePassword } from './change-password';
+import { chooseMails } from './choose-mails';
 import { endEverySignIn, signOut } from './end-sign-ins';
 import { refreshSignIn } from './refresh-sign-in';
 import { requestReset } from './request-reset';
@@ -74,6 +76,12 @@ export function mountSignIn(mounting: Mounting, kit: Kit, clock: Clock = realClo
     const open = openSignInsOf(store.unscoped, id, clock.now().toISOString());
     return { body: { items: open.map((item) => ({ ...item, current: item.id === signInId })) } };
   });
+  mount(mounting, contracts.listMailChoices, ({ caller }) => ({
+    body: { items: listMailChoices(store.unscoped, personOf(caller)) },
+  }));
+  mount(mounting, contracts.chooseMails, async (call) => ({
+    body: { items: await chooseMails(tools, personOf(call.caller), call.body.items, call) },
+  }));
   mount(mounting, contracts.endSignIns, async (call) => {
     await endEverySignIn(tools, personOf(call.caller), call);
     return signedOut;

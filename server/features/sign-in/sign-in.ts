@@ -1,6 +1,6 @@
 import { recordAudit } from '#db/queries/audit';
 import { findLogin, findPerson, setLastSignIn } from '#db/queries/people';
-import { insertSignIn } from '#db/queries/sign-ins';
+import { devicesOf, forgetSignIns, insertSignIn } from '#db/queries/sign-ins';
 import { Refusal } from '#shared/domain/refusal';
 import { countAttempt, forgiveAttempts, noteLockOut } from './count-attempt';
 import {
@@ -39,7 +39,13 @@ export async function signIn(
     const now = clock.now();
     const at = now.toISOString();
     const expiresAt = after(now, SIGN_IN_LIVES_MS);
+    const isNew = isNewDevice(from.device, devicesOf(db, person.id));
+    if (person.lastSignInAt !== null && isNew) {
+      tools.outbox.queueNewSignIn(person.id, { ...from, at });
+    }
     const id = insertSignIn(db, { personId: person.id, device: from.device, at, expiresAt });
+    // After the new one, whose number is then the highest: no number is given out twice.
+    forgetSignIns(db, after(now, -FORGOTTEN_AFTER_MS));
     setLastSignIn(db, person.id, at);
     recordAudit(db, {
       at,
@@ -51,6 +57,15 @@ export async function signIn(
     });
     return { person, signIn: { id, startedAt: at, step: 1 } };
   });
+}
+
+/** Sign-ins that ended or expired so long ago are of no use to anybody; the trail keeps that there were any. */
+const FORGOTTEN_AFTER_MS = 90 * 24 * 3600_000;
+
+/** Whether a device was not seen before. Versions do not count: a browser that has been updated is the same one. */
+function isNewDevice(device: string, seen: readonly string[]): boolean {
+  const withoutVersions = (text: string): string => text.replace(/[\d._]+/g, '');
+  return !seen.some((known) => withoutVersions(known) === withoutVersions(device));
 }
 
 function wrongPair(): Refusal {
