@@ -10,13 +10,20 @@ import { UnsentHere } from './unsent-here';
   selector: 'us-outbox-state',
   imports: [RouterLink],
   template: `
-    <a [routerLink]="signIn() ? '/sign-in' : '/send'" [queryParams]="query()" [class]="told().tone">
-      <svg viewBox="0 0 12 16" aria-hidden="true">
-        <rect x="1" y="1" width="10" height="14" rx="2" />
-        <path d="M5 12.5h2" />
-      </svg>
-      <span role="status">{{ sentence() }}</span>
-    </a>
+    <!-- Around the link, whose name a live region inside it would take away. -->
+    <div role="status">
+      <a
+        [routerLink]="signIn() ? '/sign-in' : '/send'"
+        [queryParams]="query()"
+        [class]="told().tone"
+      >
+        <svg viewBox="0 0 12 16" aria-hidden="true">
+          <rect x="1" y="1" width="10" height="14" rx="2" />
+          <path d="M5 12.5h2" />
+        </svg>
+        {{ sentence() }}
+      </a>
+    </div>
     @for (said of troubles(); track said) {
       <p role="alert">{{ said }}</p>
     }

@@ -3,15 +3,20 @@ import { TestBed } from '@angular/core/testing';
 import { provideRouter, Router } from '@angular/router';
 import type { Role } from '#shared/domain/vocabulary';
 import { DangerousCount } from '../come-back/dangerous-count';
+import { UnsentHere } from '../drafts/unsent-here';
 import { Session } from '../session/session';
 import { Header } from './header';
 
-async function shownTo(role: Role, url = '/jobs', dangerous?: number) {
+async function shownTo(role: Role, url = '/jobs', dangerous?: number, unsent = 0) {
   const person = { id: 1, email: 'a@b.test', name: 'Ilse Torven', role, regions: [], branches: [] };
   TestBed.configureTestingModule({
     providers: [
       provideRouter([{ path: '**', children: [] }]),
       { provide: Session, useValue: { person: signal(person), role: signal(role) } },
+      {
+        provide: UnsentHere,
+        useValue: { mine: signal({ editing: 1, waiting: unsent }), count: () => undefined },
+      },
       { provide: DangerousCount, useValue: { dangerous: signal(dangerous) } },
     ],
   });
@@ -70,5 +75,17 @@ describe('Header', () => {
     expect(element.querySelector('.wide a')?.getAttribute('href')).toBe(
       '/this-week?branch=HAV&package=full&last=13',
     );
+  });
+
+  it('given jobs that wait to be sent, keeps a line for them, but not on the page that says it itself', async () => {
+    expect((await shownTo('recorder', '/jobs', 0, 2)).querySelector('.outbox')).not.toBeNull();
+    TestBed.resetTestingModule();
+    expect((await shownTo('recorder', '/send', 0, 2)).querySelector('.outbox')).toBeNull();
+  });
+
+  it('given only jobs being written, or a role that sends none, keeps no line', async () => {
+    expect((await shownTo('recorder', '/jobs', 0, 0)).querySelector('.outbox')).toBeNull();
+    TestBed.resetTestingModule();
+    expect((await shownTo('regional_lead', '/jobs', 0, 2)).querySelector('.outbox')).toBeNull();
   });
 });
