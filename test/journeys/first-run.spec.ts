@@ -50,7 +50,7 @@ describe('first steps', () => {
   test('the network, named with its currency and fee, is done', async () => {
     await fill('The network', {
       'Name of the network': 'Sound and River',
-      'Network fee, %': '8',
+      'Network fee': '8',
     });
     await choose('The network', { Currency: 'SEK' });
     await told();
