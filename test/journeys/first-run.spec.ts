@@ -86,6 +86,7 @@ describe('first steps', () => {
   test('a reload, shows what is done as done', async () => {
     await page.reload();
     await done('3 of 7 done');
+    await next('Products');
     await page.getByRole('heading', { name: 'Products' }).waitFor();
   });
 
