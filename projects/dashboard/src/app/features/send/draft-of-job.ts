@@ -1,4 +1,5 @@
 import type { JobSheet } from '#shared/contracts/jobs';
+import { STAGES } from '#shared/domain/vocabulary';
 import type { JobDraft } from '#shared/contracts/under-way';
 
 /** What a job as recorded is as a draft, to be corrected: what was sent of it, without what was worked out since. */
@@ -11,6 +12,18 @@ export function draftOfJob(job: JobSheet): JobDraft {
     ...{ actual, products, consumables, boughtInCents, findings, checks, workshop },
     ...{ invoice: invoice ?? undefined, notes },
   };
-  // What is absent in the answer stays absent in the draft.
-  return JSON.parse(JSON.stringify(draft)) as JobDraft;
+  // What is absent in the answer stays absent in the draft, and what only stands for nothing is absent too (rule 25).
+  return JSON.parse(JSON.stringify(draft, withoutDefaults)) as JobDraft;
+}
+
+const NOTHING_AT_ZERO = new Set<string>([
+  ...STAGES,
+  'repairMinutes',
+  'chargedCents',
+  'boughtInCents',
+]);
+
+function withoutDefaults(key: string, value: unknown): unknown {
+  if (value === '' || (value === 0 && NOTHING_AT_ZERO.has(key))) return undefined;
+  return Array.isArray(value) && value.length === 0 ? undefined : value;
 }

@@ -1,5 +1,6 @@
 import type { DeviceDraft } from '../../core/drafts/device-draft';
 import { formatCounted } from '../../ui/format';
+import { refusalSentence } from './refusal-sentence';
 import { carWords } from './review-words';
 import { SEND_STEPS, STEP_NAMES } from './send-steps';
 
@@ -33,7 +34,7 @@ function stateWords(draft: DeviceDraft): Omit<DraftWords, 'title'> {
       return { state: 'being sent', tone: 'tide', act: 'Look at it' };
     case 'refused':
       return {
-        state: `refused: ${draft.problem?.sentence ?? 'the server did not take it.'}`,
+        state: `refused: ${refusalSentence(draft.problem?.sentence ?? 'the server did not take it.')}`,
         tone: 'trouble',
         act: 'Mend it',
       };

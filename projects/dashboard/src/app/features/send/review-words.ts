@@ -96,7 +96,7 @@ function packageLines(document: DraftDocument, names: ReviewNames): readonly str
 
 function stageLines(document: DraftDocument, names: ReviewNames): readonly string[] {
   const worked = STAGES.filter(
-    (stage) => minutesWritten(document, stage) !== undefined || document.timers?.[stage],
+    (stage) => (minutesWritten(document, stage) ?? 0) > 0 || document.timers?.[stage],
   ).map((stage) => ({
     stage,
     minutes: (minutesWritten(document, stage) ?? 0) + minutesRun(document, stage, names.now),

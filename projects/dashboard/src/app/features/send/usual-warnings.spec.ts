@@ -36,8 +36,8 @@ describe('usualWarnings', () => {
     );
   });
 
-  it('of minutes, given the ends of the range or a stage without one, says nothing', () => {
-    for (const strip of [60, 180]) {
+  it('of minutes, given the ends of the range, no work at all, or a stage without a range, says nothing', () => {
+    for (const strip of [0, 60, 180]) {
       expect(usualWarnings({ actual: { stages: { strip, clean: 2000 } } }, usual())).toEqual([]);
     }
   });

@@ -46,7 +46,8 @@ function stageWarnings(document: DraftDocument, { car, now }: Usual): readonly S
     const written = minutesWritten(document, stage);
     if (written === undefined || !range) return [];
     const minutes = written + minutesRun(document, stage, now);
-    if (!isOutside(minutes, range)) return [];
+    // The range is of cars that had work in the stage; one without any is not unusual by it.
+    if (minutes === 0 || !isOutside(minutes, range)) return [];
     const words = `${capital(STAGE_NAMES[stage])} ${formatMinutes(minutes)}; 95 of 100 such cars took ${between(range, formatMinutes)} ${behind(car)}.`;
     return [{ path: `/actual/stages/${stage}`, words }];
   });

@@ -6,7 +6,7 @@ import { OpenDraft } from '../open-draft';
   selector: 'us-warning-lines',
   template: `
     <div aria-live="polite">
-      @for (words of draft.warningsAt(path()); track words) {
+      @for (words of draft.warningsAt(path()); track $index) {
         <p>
           <svg viewBox="0 0 14 14" aria-hidden="true"><path d="M7 1 13 7 7 13 1 7Z" /></svg>
           <span><span class="us-unseen">Unusual: </span>{{ words }}</span>

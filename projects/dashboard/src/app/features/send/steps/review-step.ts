@@ -5,6 +5,7 @@ import { Trouble } from '../../../ui/trouble/trouble';
 import { problemSentence } from '../field-words';
 import { OpenDraft } from '../open-draft';
 import { BothVersions } from '../pieces/both-versions';
+import { refusalSentence } from '../refusal-sentence';
 import { reviewWords } from '../review-words';
 import { handOverCautions } from '../send-cautions';
 import { STEP_NAMES } from '../send-steps';
@@ -21,6 +22,7 @@ import { StepWay } from '../step-way';
 export class ReviewStep {
   protected readonly draft = inject(OpenDraft);
   protected readonly way = inject(StepWay);
+  protected readonly sentence = refusalSentence;
   private readonly catalogue = inject(Catalogue);
   private readonly product = (code: string): string => this.catalogue.productName(code);
 
