@@ -23,26 +23,17 @@ export function mountCorrections(mounting: Mounting, kit: Kit): void {
     return { body: tellChanges(store.scoped(call.scope), asked, moneyFor(call.caller)) };
   });
 
-  mount(
-    mounting,
-    contract,
-    async (call) => {
-      const writer = new BranchWriter(store, namedBranch(call));
-      const restored = await store.queue.write(() =>
-        restoreJob(writer, call.params.jobRef, call.ifMatch, {
-          actor: actorOf(call.caller, call.address),
-          source: 'person',
-          receivedAt: realClock.now().toISOString(),
-        }),
-      );
-      return { body: restored, headers: { ETag: tagOf(restored.revision) } };
-    },
-    {
-      exists: ({ branch, params }) =>
-        branch !== undefined &&
-        new BranchWriter(store, branch).findJob(params.jobRef)?.voided === true,
-    },
-  );
+  mount(mounting, contract, async (call) => {
+    const writer = new BranchWriter(store, namedBranch(call));
+    const restored = await store.queue.write(() =>
+      restoreJob(writer, call.params.jobRef, call.ifMatch, {
+        actor: actorOf(call.caller, call.address),
+        source: 'person',
+        receivedAt: realClock.now().toISOString(),
+      }),
+    );
+    return { body: restored, headers: { ETag: tagOf(restored.revision) } };
+  });
 
   mount(mounting, listVoidedJobs, (call) => ({
     body: listVoided(store.scoped(call.scope), namedBranch(call).code, call.query),
