@@ -94,7 +94,12 @@ describe('GET …/usual', () => {
   });
 
   it('given the same car, answers whoever may ask alike, and from the set a quote is made from', async () => {
-    for (const asked of [{}, { model: 'Brink', firstRegistered: '2019-03' }, { model: 'x' }]) {
+    const questions: Record<string, string>[] = [
+      {},
+      { model: 'Brink', firstRegistered: '2019-03' },
+      { model: 'x' },
+    ];
+    for (const asked of questions) {
       const answers = [network.recorder, network.manager, network.office].map(async (token) =>
         JSON.stringify((await usual(asked, token)).body),
       );
