@@ -2,9 +2,10 @@ import { checkAudit, listAudit, listAuditNames } from '#shared/contracts/audit';
 import { breaksOfPeriod } from '#shared/domain/period';
 import { refuseInput } from '#shared/domain/refusal';
 import { realClock } from '../../clock';
+import { cursorOf, placeOf } from '../../http/list-cursor';
 import { mount, type Mounting } from '../../http/mount';
 import type { Kit } from '../../kit';
-import { cursorOf, eventOf } from './audit-cursor';
+import { eventPlace } from './event-place';
 
 /** The trail of what people did, read off the request thread: it may be long. */
 export function mountAudit(mounting: Mounting, kit: Kit): void {
@@ -13,9 +14,9 @@ export function mountAudit(mounting: Mounting, kit: Kit): void {
     const { from, to } = filters;
     const problems = from !== undefined && to !== undefined ? breaksOfPeriod({ from, to }) : [];
     if (problems.length > 0) throw refuseInput(problems);
-    const asked = { filters, limit, below: eventOf(cursor) };
-    const { items, next } = await kit.reads.answer('audit', call.scope, asked);
-    return { body: { items, nextCursor: next === null ? null : cursorOf(next) } };
+    const below = placeOf(cursor, eventPlace)?.event ?? null;
+    const { items, next } = await kit.reads.answer('audit', call.scope, { filters, limit, below });
+    return { body: { items, nextCursor: next === null ? null : cursorOf({ event: next }) } };
   });
 
   mount(mounting, listAuditNames, async (call) => ({

@@ -8,9 +8,10 @@ import { notFound } from '#shared/domain/refusal';
 import { actorOf } from '../../auth/caller';
 import { realClock } from '../../clock';
 import { comeBackQuestion } from '../../http/come-back-question';
+import { cursorOf, placeOf } from '../../http/list-cursor';
 import { mount, namedBranch, type Call, type Mounting } from '../../http/mount';
 import type { Kit } from '../../kit';
-import { cursorOf, placeOf } from './left-cursor';
+import { leftPlace } from './left-place';
 import { markComeBack } from './mark-come-back';
 
 /** Rot left on cars and the marks people set on it. */
@@ -22,7 +23,7 @@ export function mountComeBack(mounting: Mounting, kit: Kit): void {
   mount(mounting, listComeBack, async (call) => {
     const { limit, cursor, ...query } = call.query;
     const { scope, ...asked } = comeBackQuestion(kit, call.scope, query);
-    const after = placeOf(cursor);
+    const after = placeOf(cursor, leftPlace);
     const { next, ...page } = await kit.reads.answer('comeBack', scope, { ...asked, limit, after });
     return { body: { ...page, nextCursor: next && cursorOf(next) } };
   });

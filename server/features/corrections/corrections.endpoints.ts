@@ -7,11 +7,13 @@ import {
 import { tagOf } from '#shared/domain/preconditions';
 import { actorOf, moneyFor } from '../../auth/caller';
 import { realClock } from '../../clock';
+import { cursorOf, placeOf } from '../../http/list-cursor';
 import { mount, namedBranch, type Mounting } from '../../http/mount';
 import type { Kit } from '../../kit';
 import { listVoided } from './list-voided';
 import { restoreJob } from './restore-job';
 import { tellChanges } from './tell-changes';
+import { voidedPlace } from './voided-place';
 
 /** What changed in a job, what was voided, and its way back. */
 export function mountCorrections(mounting: Mounting, kit: Kit): void {
@@ -35,7 +37,10 @@ export function mountCorrections(mounting: Mounting, kit: Kit): void {
     return { body: restored, headers: { ETag: tagOf(restored.revision) } };
   });
 
-  mount(mounting, listVoidedJobs, (call) => ({
-    body: listVoided(store.scoped(call.scope), namedBranch(call).code, call.query),
-  }));
+  mount(mounting, listVoidedJobs, (call) => {
+    const { limit, cursor } = call.query;
+    const asked = { after: placeOf(cursor, voidedPlace), limit };
+    const { items, next } = listVoided(store.scoped(call.scope), namedBranch(call).code, asked);
+    return { body: { items, nextCursor: next && cursorOf(next) } };
+  });
 }

@@ -1,27 +1,31 @@
-import { listVoidedRows, type VoidedRow } from '#db/queries/corrections';
+import { listVoidedRows, type VoidedPlace, type VoidedRow } from '#db/queries/corrections';
 import type { ScopedDb } from '#db/scoped-db';
 import type { listVoidedJobs } from '#shared/contracts/corrections';
 import type { OutOf } from '#shared/contracts/endpoint';
-import { cursorOf, placeOf } from './voided-cursor';
 
-type VoidedPage = OutOf<typeof listVoidedJobs>;
+type VoidedJob = OutOf<typeof listVoidedJobs>['items'][number];
+
+/** A page of the list of voided jobs. */
+export interface VoidedPage {
+  items: VoidedJob[];
+  /** Where it ended, when there are more. */
+  next: VoidedPlace | null;
+}
 
 /** A page of a branch's voided jobs, the last voided first. */
 export function listVoided(
   db: ScopedDb,
   branch: string,
-  { limit, cursor }: { limit: number; cursor?: string | undefined },
+  { after, limit }: { after: VoidedPlace | null; limit: number },
 ): VoidedPage {
-  const rows = listVoidedRows(db, branch, placeOf(cursor), limit + 1);
+  const rows = listVoidedRows(db, branch, after, limit + 1);
   const page = rows.slice(0, limit);
   const last = page.at(-1);
-  return {
-    items: page.map(told),
-    nextCursor: rows.length > limit && last ? cursorOf(last) : null,
-  };
+  const next = rows.length > limit && last ? { voidedAt: last.voidedAt, id: last.id } : null;
+  return { items: page.map(told), next };
 }
 
-function told({ id: _id, content, ...row }: VoidedRow): VoidedPage['items'][number] {
+function told({ id: _id, content, ...row }: VoidedRow): VoidedJob {
   const { make, model, firstRegistered } = content.vehicle;
   const { package: packageCode, completedOn } = content;
   return { ...row, make, model, firstRegistered, package: packageCode, completedOn };

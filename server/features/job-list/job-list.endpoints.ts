@@ -2,9 +2,10 @@ import { listJobs } from '#shared/contracts/job-list';
 import { Refusal } from '#shared/domain/refusal';
 import { moneyFor } from '../../auth/caller';
 import { jobListQuestion } from '../../http/job-list-question';
+import { cursorOf, placeOf } from '../../http/list-cursor';
 import { mount, type Mounting } from '../../http/mount';
 import type { Kit } from '../../kit';
-import { cursorOf, placeOf } from './place-cursor';
+import { jobPlace } from './job-place';
 
 /** The list of jobs: filtered, sorted, by page. */
 export function mountJobList(mounting: Mounting, kit: Kit): void {
@@ -16,12 +17,12 @@ export function mountJobList(mounting: Mounting, kit: Kit): void {
       throw new Refusal('forbidden', 'Sorting by money is not for recorders.');
     }
     const { scope, ...asked } = jobListQuestion(kit, call.scope, query);
-    const after = placeOf(cursor, sort);
+    const after = placeOf(cursor, jobPlace(sort));
     const page = await kit.reads.answer('jobs', scope, { ...asked, sort, after, limit, money });
     return {
       body: {
         items: page.items,
-        nextCursor: page.next && cursorOf(page.next, sort),
+        nextCursor: page.next && cursorOf({ sort, ...page.next }),
         jobs: page.jobs,
       },
     };

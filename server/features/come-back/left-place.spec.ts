@@ -1,6 +1,7 @@
 import type { ComeBackPlace } from '#db/queries/come-back';
 import { Refusal } from '#shared/domain/refusal';
-import { cursorOf, placeOf } from './left-cursor';
+import { cursorOf, placeOf } from '../../http/list-cursor';
+import { leftPlace } from './left-place';
 
 const PLACE: ComeBackPlace = {
   danger: 0,
@@ -13,14 +14,14 @@ const PLACE: ComeBackPlace = {
 const packed = (over: object): string =>
   Buffer.from(JSON.stringify({ ...PLACE, ...over })).toString('base64url');
 
-describe('placeOf', () => {
+describe('leftPlace', () => {
   it('given a cursor of the list, finds its place again', () => {
-    expect(placeOf(cursorOf(PLACE))).toEqual(PLACE);
+    expect(placeOf(cursorOf(PLACE), leftPlace)).toEqual(PLACE);
     expect(cursorOf(PLACE)).toMatch(/^[\w-]+$/);
   });
 
   it('given none, begins at the start', () => {
-    expect(placeOf(undefined)).toBeNull();
+    expect(placeOf(undefined, leftPlace)).toBeNull();
   });
 
   it.each([
@@ -33,6 +34,6 @@ describe('placeOf', () => {
     ['with a day that is none', packed({ completedOn: '2026-02-30' })],
     ['of the list of jobs', Buffer.from('{"sort":"margin","key":7}').toString('base64url')],
   ])('given a cursor %s, refuses it (rule 67)', (_case, cursor) => {
-    expect(() => placeOf(cursor)).toThrow(Refusal);
+    expect(() => placeOf(cursor, leftPlace)).toThrow(Refusal);
   });
 });

@@ -1,6 +1,7 @@
 import type { ListPlace } from '#db/queries/job-list';
 import { Refusal } from '#shared/domain/refusal';
-import { cursorOf, placeOf } from './place-cursor';
+import { cursorOf, placeOf } from '../../http/list-cursor';
+import { jobPlace } from './job-place';
 
 const PLACE: ListPlace = {
   key: -4200,
@@ -9,18 +10,20 @@ const PLACE: ListPlace = {
   jobRef: 'Ref/ü "7"',
 };
 
-describe('placeOf', () => {
+const MARGIN = { sort: 'margin', ...PLACE };
+
+describe('jobPlace', () => {
   it('given a cursor of the same sort, finds its place again', () => {
-    expect(placeOf(cursorOf(PLACE, 'margin'), 'margin')).toEqual(PLACE);
-    expect(cursorOf(PLACE, 'margin')).toMatch(/^[\w-]+$/);
+    expect(placeOf(cursorOf(MARGIN), jobPlace('margin'))).toEqual(MARGIN);
+    expect(cursorOf(MARGIN)).toMatch(/^[\w-]+$/);
   });
 
   it('given none, begins at the start', () => {
-    expect(placeOf(undefined, 'margin')).toBeNull();
+    expect(placeOf(undefined, jobPlace('margin'))).toBeNull();
   });
 
   it.each([
-    ['of another sort', cursorOf(PLACE, 'overrun')],
+    ['of another sort', cursorOf({ ...PLACE, sort: 'overrun' })],
     ['that is empty', ''],
     ['that is no JSON', 'AAAA'],
     ['of another list', Buffer.from('{"sort":"margin","id":7}').toString('base64url')],
@@ -29,9 +32,9 @@ describe('placeOf', () => {
     ['with a day that is none', Buffer.from(json({ completedOn: '9' })).toString('base64url')],
     ['with null', Buffer.from('null').toString('base64url')],
   ])('given a cursor %s, refuses it (rule 67)', (_case, cursor) => {
-    expect(() => placeOf(cursor, 'margin')).toThrow(Refusal);
+    expect(() => placeOf(cursor, jobPlace('margin'))).toThrow(Refusal);
     try {
-      placeOf(cursor, 'margin');
+      placeOf(cursor, jobPlace('margin'));
     } catch (error) {
       expect((error as Refusal).problems.map(({ path }) => path)).toEqual(['/query/cursor']);
     }
