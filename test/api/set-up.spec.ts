@@ -59,7 +59,7 @@ describe('Set-up calls (rule 66)', () => {
     expect([answer.status, answer.body]).toEqual([200, { ...body, claimLimitCents: null }]);
   });
 
-  it.each(['/api/regions/COAST', '/api/branches/AAA', '/api/products/CW1', '/api/packages/full'])(
+  it.each(['/api/regions/COAST', '/api/branches/AAA'])(
     'given DELETE %s, there is no such call',
     async (path) => {
       expect((await app.call('delete', path, { token: network.office })).status).toBe(404);
