@@ -1,3 +1,4 @@
+import { senderOf } from '#shared/domain/preconditions';
 import type { RecordedJob } from '#shared/domain/recorded-job';
 import type { Source } from '#shared/domain/vocabulary';
 import type { ScopedDb } from '../scoped-db';
@@ -21,6 +22,14 @@ export interface RevisionRow {
   source: Source;
   personName: string | null;
   keyLabel: string | null;
+}
+
+/** A revision as every answer tells it: its sender by name. */
+export type ToldRevision = Omit<RevisionRow, 'personName' | 'keyLabel'> & { by: string };
+
+/** Tells a revision; nothing of it is money, so it is the same for every role. */
+export function toldRevision({ personName, keyLabel, ...row }: RevisionRow): ToldRevision {
+  return { ...row, by: senderOf({ personName, keyLabel }) };
 }
 
 /** The newest revision of a job that is not voided, or `undefined`. */

@@ -1,10 +1,9 @@
 import { findRevision } from '#db/queries/corrections';
-import { findSheet, listRevisions, type RevisionRow } from '#db/queries/job-sheet';
+import { findSheet, listRevisions, toldRevision, type RevisionRow } from '#db/queries/job-sheet';
 import type { ScopedDb } from '#db/scoped-db';
 import type { getJobChanges } from '#shared/contracts/corrections';
 import type { OutOf } from '#shared/contracts/endpoint';
 import { jobChanges } from '#shared/domain/job-changes';
-import { senderOf } from '#shared/domain/preconditions';
 import { notFound } from '#shared/domain/refusal';
 
 type JobChanges = OutOf<typeof getJobChanges>;
@@ -39,14 +38,9 @@ export function tellChanges(
     const after = contentOf(later);
     if (!after) throw notFound();
     return {
-      from: before ? told(before) : null,
-      to: told(later),
+      from: before ? toldRevision(before) : null,
+      to: toldRevision(later),
       changes: jobChanges(before && contentOf(before), after, money),
     };
   });
-}
-
-function told(row: RevisionRow): JobChanges['to'] {
-  const { revision, receivedAt, source, change } = row;
-  return { revision, receivedAt, source, by: senderOf(row), change };
 }

@@ -1,14 +1,14 @@
 import type { ScopedDb } from '#db/scoped-db';
 import { listLeftOfJob } from '#db/queries/come-back-of-job';
 import { tellComeBack } from '#db/queries/come-back-row';
-import { findSheet, listRevisions, type RevisionRow, type SheetRow } from '#db/queries/job-sheet';
+import { findSheet, listRevisions, toldRevision, type SheetRow } from '#db/queries/job-sheet';
 import type { JobSheet } from '#shared/contracts/jobs';
 import { bridgeOf } from '#shared/domain/bridge';
 import type { CostBook } from '#shared/domain/cost-book';
 import { costCents, deriveFigures, marginCents } from '#shared/domain/job-figures';
-import { writtenOut, type WrittenOutJob } from '#shared/domain/normalise-job';
-import { senderOf } from '#shared/domain/preconditions';
+import { writtenOut } from '#shared/domain/normalise-job';
 import { notFound } from '#shared/domain/refusal';
+import { withoutMoney } from '#shared/domain/without-money';
 
 /** Reads one job with its revisions and, for whoever may see money, its margin and bridge. */
 export function readJobSheet(
@@ -29,17 +29,12 @@ export function readJobSheet(
     receivedAt: row.receivedAt,
     source: row.source,
     warrantyMonths: row.warrantyMonths,
-    revisions: revisions.map(told),
+    revisions: revisions.map(toldRevision),
     comeBacks: listLeftOfJob(db, row.jobId).map(tellComeBack),
   };
   return money === 'seen'
     ? { ...sheet, ...job, ...moneyOf(row, costs) }
     : { ...sheet, ...withoutMoney(job) };
-}
-
-function told(row: RevisionRow): JobSheet['revisions'][number] {
-  const { revision, receivedAt, source, change } = row;
-  return { revision, receivedAt, source, change, by: senderOf(row) };
 }
 
 function moneyOf(row: SheetRow, costs: CostBook): Pick<JobSheet, 'money' | 'missingCosts'> {
@@ -60,19 +55,5 @@ function moneyOf(row: SheetRow, costs: CostBook): Pick<JobSheet, 'money' | 'miss
       bridge: billed && expected ? bridgeOf(money, expected) : null,
     },
     missingCosts: missing,
-  };
-}
-
-/** The job as a recorder sees it: no amount but the price quoted (rule 24). */
-function withoutMoney(job: WrittenOutJob): Omit<WrittenOutJob, 'boughtInCents' | 'invoice'> & {
-  invoice?: JobSheet['invoice'];
-} {
-  const { boughtInCents: _bought, invoice, findings, consumables, agreedExtras, ...rest } = job;
-  return {
-    ...rest,
-    findings: findings?.map(({ chargedCents: _charged, ...finding }) => finding),
-    consumables: consumables?.map(({ unitCostCents: _unit, ...line }) => line),
-    agreedExtras: agreedExtras.map(({ priceCents: _price, ...extra }) => extra),
-    ...(invoice && { invoice: { number: invoice.number, issuedOn: invoice.issuedOn } }),
   };
 }

@@ -1,5 +1,6 @@
 import type { UnderWayRow } from '#db/queries/under-way';
 import type { JobDraft, JobUnderWay } from '#shared/contracts/under-way';
+import { withoutMoney } from '#shared/domain/without-money';
 
 /** A job under way as answered; to a recorder without any amount but the price quoted (rule 24). */
 export function tellUnderWay(
@@ -8,23 +9,11 @@ export function tellUnderWay(
   money: 'seen' | 'unseen',
 ): JobUnderWay {
   const content = JSON.parse(text) as JobDraft;
-  return { branch, ...row, content: money === 'seen' ? content : withoutMoney(content) };
+  return { branch, ...row, content: money === 'seen' ? content : seenByRecorder(content) };
 }
 
-function withoutMoney(content: JobDraft): JobDraft {
-  const { boughtInCents: _bought, invoice, findings, consumables, agreedExtras, ...rest } = content;
-  const { totalCents: _total, ...bill } = invoice ?? {};
-  return {
-    ...rest,
-    ...(findings && {
-      findings: findings.map(({ chargedCents: _charged, ...finding }) => finding),
-    }),
-    ...(consumables && {
-      consumables: consumables.map(({ unitCostCents: _unit, ...line }) => line),
-    }),
-    ...(agreedExtras && {
-      agreedExtras: agreedExtras.map(({ priceCents: _price, ...extra }) => extra),
-    }),
-    ...(Object.keys(bill).length > 0 && { invoice: bill }),
-  };
+/** A bill of which only the total is written down is not begun for one who does not see the total. */
+function seenByRecorder(content: JobDraft): JobDraft {
+  const { invoice, ...rest } = withoutMoney(content);
+  return Object.keys(invoice ?? {}).length > 0 ? { ...rest, invoice } : rest;
 }
