@@ -82,7 +82,11 @@ describe('verifyAudit', () => {
   it('given a trail as it was written, holds to its last event', async () => {
     for (let n = 0; n < 1200; n += 1) void audit({ n });
     await audit({ last: true });
-    expect(verify()).toEqual({ events: 1203, brokenAt: null });
+    const last = small.store.writing.driver
+      .prepare('select hash from audit_events order by id desc limit 1')
+      .pluck()
+      .get();
+    expect(verify()).toMatchObject({ events: 1203, brokenAt: null, lastHash: last });
   });
 
   it.each([
@@ -113,6 +117,6 @@ describe('verifyAudit', () => {
       `insert into audit_events (at, actor, address, action, subject, detail, previous_hash, hash)
         values ('2026-01-01', 'x', 'x', 'x', 'x', '{}', 'made up', 'made up')`,
     );
-    expect(verify()).toEqual({ events: 2, brokenAt: 3 });
+    expect(verify()).toMatchObject({ events: 2, brokenAt: 3 });
   });
 });
