@@ -128,7 +128,11 @@ const asking = contracts.filter(
     method === 'get' && access !== 'public' && Object.keys(query.shape).length > 0,
 );
 
-describe.each(asking)('%s', (_, { path, query }) => {
+describe.each(asking)('%s', (_, endpoint) => {
+  const { path, query } = endpoint;
+  // What a query names within what a path names may not be there.
+  const judged = path.includes(':') ? [200, 404, 422] : [200, 422];
+
   it('given any values of its own parameters, judges them and never fails', async () => {
     const value = fc.oneof(
       fc.string({ unit: 'binary' }),
@@ -151,10 +155,10 @@ describe.each(asking)('%s', (_, { path, query }) => {
     await fc.assert(
       fc.asyncProperty(asked, async (pairs) => {
         const text = pairs.map(([key, one]) => `${key}=${encodeURIComponent(wellFormed(one))}`);
-        const answer = await app.call('get', `${path}?${text.join('&')}`, {
+        const answer = await app.call('get', `${addressOf(endpoint)}?${text.join('&')}`, {
           token: network.office,
         });
-        expect([200, 422]).toContain(answer.status);
+        expect(judged).toContain(answer.status);
         if (answer.status === 422) {
           for (const one of answer.body.problems) expect(one.path).toMatch(/^\/query\//);
         }
