@@ -3,10 +3,11 @@ import type { Connection } from './database';
 import { recordAudit, type Actor } from './queries/audit';
 import { findLeft } from './queries/come-back-of-job';
 import type { ComeBackRow } from './queries/come-back-row';
-import { Scope, type ScopedBranch } from './scope';
-import { ScopedDb } from './scoped-db';
+import type { ScopedBranch } from './scope';
+import type { ScopedDb } from './scoped-db';
 import type { Store } from './store';
 import { UnscopedDb } from './unscoped-db';
+import { writingReader } from './writing-reader';
 
 /** What a person says of a finding left on a car. */
 export interface Mark {
@@ -31,7 +32,6 @@ export interface Marking {
  */
 export class ComeBackWriter {
   private readonly connection: Connection;
-  /** On the writing connection: what was left or marked may be of the commit that is under way. */
   private readonly reader: ScopedDb;
 
   constructor(
@@ -39,7 +39,7 @@ export class ComeBackWriter {
     readonly branch: ScopedBranch,
   ) {
     this.connection = store.writing;
-    this.reader = new ScopedDb(store.writing, Scope.ofPushKey([branch], branch.id));
+    this.reader = writingReader(store, branch);
   }
 
   /** A finding left on a car as it stands at this moment. */

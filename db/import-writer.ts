@@ -3,10 +3,11 @@ import { sql } from './database';
 import { recordAudit, type Actor } from './queries/audit';
 import { findImport, type SentImport } from './queries/imports';
 import { rowOfImport, type ImportChange, type ImportRecord } from './queries/import-row';
-import { Scope, type ScopedBranch } from './scope';
-import { ScopedDb } from './scoped-db';
+import type { ScopedBranch } from './scope';
+import type { ScopedDb } from './scoped-db';
 import type { Store } from './store';
 import { UnscopedDb } from './unscoped-db';
+import { writingReader } from './writing-reader';
 
 /** Who does something to a file, and when. */
 export interface ImportDeed {
@@ -20,7 +21,6 @@ export interface ImportDeed {
  */
 export class ImportWriter {
   private readonly db: UnscopedDb;
-  /** On the writing connection: what is asked for may be of the commit that is under way. */
   private readonly reader: ScopedDb;
 
   constructor(
@@ -28,7 +28,7 @@ export class ImportWriter {
     readonly branch: ScopedBranch,
   ) {
     this.db = new UnscopedDb(store.writing);
-    this.reader = new ScopedDb(store.writing, Scope.ofPushKey([branch], branch.id));
+    this.reader = writingReader(store, branch);
   }
 
   find(id: string): SentImport | undefined {

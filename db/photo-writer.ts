@@ -2,10 +2,11 @@ import type { Knex } from 'knex';
 import { sql, type Connection } from './database';
 import { recordAudit, type Deed } from './queries/audit';
 import { findPhoto, listPhotos, standsJob, type PhotoRow } from './queries/photos';
-import { Scope, type ScopedBranch } from './scope';
-import { ScopedDb } from './scoped-db';
+import type { ScopedBranch } from './scope';
+import type { ScopedDb } from './scoped-db';
 import type { Store } from './store';
 import { UnscopedDb } from './unscoped-db';
+import { writingReader } from './writing-reader';
 
 /** What is kept of a photo beside its bytes. */
 export type KeptPhoto = Pick<
@@ -20,7 +21,6 @@ export type KeptPhoto = Pick<
  */
 export class PhotoWriter {
   private readonly connection: Connection;
-  /** On the writing connection: a job or a photo may be of the commit that is under way. */
   private readonly reader: ScopedDb;
 
   constructor(
@@ -28,7 +28,7 @@ export class PhotoWriter {
     readonly branch: ScopedBranch,
   ) {
     this.connection = store.writing;
-    this.reader = new ScopedDb(store.writing, Scope.ofPushKey([branch], branch.id));
+    this.reader = writingReader(store, branch);
   }
 
   /** Whether there is a job that photos can belong to at this moment. */

@@ -43,6 +43,11 @@ export class Scope {
     return new Scope(branches, reachOf(branches, false));
   }
 
+  /** One branch, as its writers and the work on its files see it. */
+  static ofBranch(branch: ScopedBranch): Scope {
+    return Scope.ofPushKey([branch], branch.id);
+  }
+
   /** Allowed ∩ requested: repeats of one filter are OR, branch and region filters intersect (rule 22). */
   narrow(asked: { region?: readonly string[]; branch?: readonly string[] }): Scope {
     return new Scope(

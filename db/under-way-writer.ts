@@ -4,10 +4,11 @@ import { sql, type Connection } from './database';
 import { findLastEvent, recordAudit, type Deed } from './queries/audit';
 import { listPhotos } from './queries/photos';
 import { findUnderWay, listUnderWay, type UnderWayRow } from './queries/under-way';
-import { Scope, type ScopedBranch } from './scope';
-import { ScopedDb } from './scoped-db';
+import type { ScopedBranch } from './scope';
+import type { ScopedDb } from './scoped-db';
 import type { Store } from './store';
 import { UnscopedDb } from './unscoped-db';
+import { writingReader } from './writing-reader';
 
 /** Who keeps or drops a job under way: a person, for a push key sends finished ones only. */
 export type UnderWayDeed = Deed & { actor: { personId: number } };
@@ -16,7 +17,6 @@ export type UnderWayDeed = Deed & { actor: { personId: number } };
 export class UnderWayWriter {
   private readonly connection: Connection;
   private readonly jobs: BranchWriter;
-  /** On the writing connection: what is asked for may be of the commit that is under way. */
   private readonly reader: ScopedDb;
 
   constructor(
@@ -25,7 +25,7 @@ export class UnderWayWriter {
   ) {
     this.connection = store.writing;
     this.jobs = new BranchWriter(store, branch);
-    this.reader = new ScopedDb(store.writing, Scope.ofPushKey([branch], branch.id));
+    this.reader = writingReader(store, branch);
   }
 
   /** A job under way as it stands at this moment. */

@@ -18,7 +18,7 @@ export interface ImportBench {
 
 /** A reader of the one branch's rows and of the catalogue. */
 export function readerOf({ store, branch }: Pick<ImportBench, 'store' | 'branch'>): ScopedDb {
-  return store.scoped(Scope.ofPushKey([branch], branch.id));
+  return store.scoped(Scope.ofBranch(branch));
 }
 
 /** A file as a question to the thread that reads files. */
@@ -28,7 +28,7 @@ export function taskOf(
   { claims }: ImportSender,
 ): FileTask {
   return {
-    scope: Scope.ofPushKey([branch], branch.id).pack(),
+    scope: Scope.ofBranch(branch).pack(),
     branch: branch.code,
     path: folder.fileOf(id),
     refusedPath: folder.refusedOf(id),
