@@ -136,15 +136,20 @@ function onRung(query: Knex.QueryBuilder, car: QuotedCar, rung: QuoteRung): Knex
   return query;
 }
 
+/** Each product line of each of the cars. */
+export function withProductLines(source: QuoteSource, cars: Knex.QueryBuilder): Knex.QueryBuilder {
+  return cars
+    .joinRaw(
+      `cross join ? on job_products.branch_id = job_facts.branch_id and job_products.job_id = job_facts.job_id
+        and job_products.completed_on = job_facts.completed_on`,
+      [source.products()],
+    )
+    .join('products', 'products.id', 'job_products.product_id');
+}
+
 function readProducts(source: QuoteSource, cars: Knex.QueryBuilder): QuoteFigures['products'] {
   return source.all(
-    cars
-      .joinRaw(
-        `cross join ? on job_products.branch_id = job_facts.branch_id and job_products.job_id = job_facts.job_id
-          and job_products.completed_on = job_facts.completed_on`,
-        [source.products()],
-      )
-      .join('products', 'products.id', 'job_products.product_id')
+    withProductLines(source, cars)
       .groupBy('products.code')
       .havingRaw('sum(job_products.ml) > 0')
       .orderBy('products.code')

@@ -2,7 +2,13 @@ import type { Knex } from 'knex';
 import { STAGES, type ConsumableKind, type Stage } from '#shared/domain/vocabulary';
 import { ascending, quantile } from '#shared/stats/quantile';
 import { sql } from '../database';
-import { carsOnRung, type QuotedCar, type QuoteRung, type QuoteSource } from './quote';
+import {
+  carsOnRung,
+  withProductLines,
+  type QuotedCar,
+  type QuoteRung,
+  type QuoteSource,
+} from './quote';
 
 /** Where the middle of some cars lies and where nearly all of them do: quantiles at 2.5, 50 and 97.5 %. */
 export interface UsualRange {
@@ -108,18 +114,11 @@ function readListed(
 }
 
 function productsOf(source: QuoteSource, cars: Knex.QueryBuilder): Knex.QueryBuilder {
-  return cars
-    .joinRaw(
-      `cross join ? on job_products.branch_id = job_facts.branch_id and job_products.job_id = job_facts.job_id
-        and job_products.completed_on = job_facts.completed_on`,
-      [source.products()],
-    )
-    .join('products', 'products.id', 'job_products.product_id')
-    .select({
-      key: 'products.code',
-      branch_id: 'job_facts.branch_id',
-      amount: 'job_products.ml',
-    });
+  return withProductLines(source, cars).select({
+    key: 'products.code',
+    branch_id: 'job_facts.branch_id',
+    amount: 'job_products.ml',
+  });
 }
 
 function consumablesOf(source: QuoteSource, cars: Knex.QueryBuilder): Knex.QueryBuilder {
