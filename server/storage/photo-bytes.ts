@@ -1,7 +1,7 @@
 import type { PhotoStore } from './photo-store';
 
 /** The sizes in which a photo is kept. */
-export const PHOTO_SIZES = ['whole', 'small'] as const;
+const PHOTO_SIZES = ['whole', 'small'] as const;
 export type PhotoSize = (typeof PHOTO_SIZES)[number];
 
 /** Under which key the bytes of a photo lie in one of its sizes. */

@@ -10,30 +10,20 @@ import {
   pageQuery,
   reference,
 } from './fields';
-import { jobParams, putJobAnswer } from './jobs';
-import { SOURCES } from '#shared/domain/vocabulary';
+import { jobParams, putJobAnswer, toldRevision } from './jobs';
 
 const topic = 'Corrections';
 
 /** What stood in a field before or after; null: nothing. */
 const value = z.union([z.string(), z.number(), z.boolean()]).nullable();
 
-const revisionMark = z.strictObject({
-  revision: z.int(),
-  receivedAt: z.string(),
-  source: z.enum(SOURCES),
-  by: z.string(),
-  change: z.enum(['created', 'replaced', 'restored']),
-});
-
 /** Findings are matched by their reference, products and consumables by product and kind (the second of one is `CW1:2`), the rest by place. */
-export const fieldChange = z.strictObject({
+const fieldChange = z.strictObject({
   /** JSON pointer into the job; a list's item by its key: `/findings/sill_inner~1left~11/workedAs`. */
   path: z.string(),
   before: value,
   after: value,
 });
-export type FieldChange = z.output<typeof fieldChange>;
 
 export const getJobChanges = defineEndpoint({
   method: 'get',
@@ -51,8 +41,8 @@ export const getJobChanges = defineEndpoint({
   body: null,
   out: z.strictObject({
     /** Null where there is no earlier revision: everything was new. */
-    from: revisionMark.nullable(),
-    to: revisionMark,
+    from: toldRevision.nullable(),
+    to: toldRevision,
     changes: z.array(fieldChange),
   }),
   statuses: [200],

@@ -203,7 +203,8 @@ const jobMoney = z.strictObject({
     .nullable(),
 });
 
-const revision = z.strictObject({
+/** One revision of a job: when, how and from whom it came, and what it did. */
+export const toldRevision = z.strictObject({
   revision: z.int(),
   receivedAt: z.string(),
   source: z.enum(SOURCES),
@@ -230,7 +231,7 @@ export const jobSheet = jobContent.extend({
   missingCosts: z
     .array(z.strictObject({ kind: z.string(), code: z.string(), on: date }))
     .optional(),
-  revisions: z.array(revision),
+  revisions: z.array(toldRevision),
 });
 export type JobSheet = z.output<typeof jobSheet>;
 

@@ -19,7 +19,7 @@ export function keepRefused(path: string, rows: readonly RefusedRow[]): void {
 }
 
 /** The refused rows in the order in which they were kept. */
-export async function* keptRefused(path: string): AsyncGenerator<RefusedRow> {
+async function* keptRefused(path: string): AsyncGenerator<RefusedRow> {
   if (!existsSync(path)) return;
   const lines = createInterface({ input: createReadStream(path), crlfDelay: Infinity });
   for await (const line of lines) yield JSON.parse(line) as RefusedRow;
@@ -58,7 +58,7 @@ export async function* refusedCsv(
 }
 
 /** One problem as a sentence with the heading it is about. */
-export function tellProblem({ heading, message }: ToldProblem): string {
+function tellProblem({ heading, message }: ToldProblem): string {
   return heading === null ? message : `${heading}: ${message}`;
 }
 

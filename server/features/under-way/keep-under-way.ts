@@ -7,7 +7,7 @@ import { Refusal } from '#shared/domain/refusal';
 import { draftText } from './draft-text';
 
 /** Jobs that may be under way at one branch: far more than stand in any workshop, and still a list that is read in one go. */
-export const MOST_UNDER_WAY = 200;
+const MOST_UNDER_WAY = 200;
 
 /** How a job under way is kept: whether money left out stays, and what the sender has seen of it. */
 export interface Keeping {
