@@ -4,6 +4,7 @@ import { Store } from '#db/store';
 import { PASSWORD, TestApp, type Answer } from '../support/app';
 import { jobRows } from '../support/job-rows';
 import { endOf, sendFile } from '../support/send-file';
+import { readAnswer } from '../support/read-answer';
 import { makeSmallNetwork } from '../support/small-network';
 import { SpawnedServer } from '../support/spawned-server';
 
@@ -38,13 +39,7 @@ async function asking(url: string): Promise<(method: string, tail?: string) => P
       },
       ...(body !== undefined && { body: JSON.stringify(body) }),
     });
-    const text = await response.text();
-    return {
-      status: response.status,
-      headers: response.headers,
-      text,
-      body: JSON.parse(text) as unknown,
-    };
+    return readAnswer(response);
   };
   const signedIn = await call('POST', '/api/auth/sign-in', undefined, {
     email: 'manager@network.example',

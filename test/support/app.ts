@@ -17,6 +17,7 @@ import { Outbox } from '#server/mail/outbox';
 import { photoStoreOf } from '#server/storage/photo-store';
 import { PasswordThread } from '#server/workers/password-thread';
 import { ReadPool } from '#server/workers/read-pool';
+import { readAnswer } from './read-answer';
 
 export const PASSWORD = 'long enough to be safe';
 /** Hashing cost of the tests: the real one takes a quarter of a second each. */
@@ -90,14 +91,7 @@ export class TestApp {
       },
       ...(body !== undefined && { body: typeof body === 'string' ? body : JSON.stringify(body) }),
     });
-    const text = await response.text();
-    const json = response.headers.get('content-type')?.includes('json') === true;
-    return {
-      status: response.status,
-      headers: response.headers,
-      text,
-      body: json && text !== '' ? (JSON.parse(text) as unknown) : undefined,
-    };
+    return readAnswer(response);
   }
 
   /** Puts a person into the database and signs them in through the API. */

@@ -1,4 +1,5 @@
 import type { Answer, TestApp } from './app';
+import { readAnswer } from './read-answer';
 
 /** A file of a branch as a form sends it. */
 export interface SentFile {
@@ -18,7 +19,7 @@ export async function sendFile(app: TestApp, token: string, file: SentFile): Pro
 }
 
 /** Sends a file as a form with its one part, `file`. */
-export async function postFile(
+async function postFile(
   app: TestApp,
   token: string,
   { branch = 'AAA', kind = 'jobs', name = 'file.csv', content }: SentFile,
@@ -30,13 +31,7 @@ export async function postFile(
     headers: { authorization: `Bearer ${token}` },
     body: form,
   });
-  const text = await response.text();
-  return {
-    status: response.status,
-    headers: response.headers,
-    text,
-    body: text === '' ? undefined : (JSON.parse(text) as unknown),
-  };
+  return readAnswer(response);
 }
 
 /** Confirms a file and waits until it has ended; what it has become. */

@@ -1,5 +1,6 @@
 import sharp, { type Sharp } from 'sharp';
 import type { Answer, TestApp } from './app';
+import { readAnswer } from './read-answer';
 
 /** A picture of one colour; a white square in its upper left corner shows which way is up. */
 export function picture(width = 64, height = 48, colour = '#205080'): Sharp {
@@ -29,13 +30,7 @@ export async function sendPhoto(
     },
     body: new Uint8Array(bytes),
   });
-  const text = await response.text();
-  return {
-    status: response.status,
-    headers: response.headers,
-    text,
-    body: text === '' ? undefined : (JSON.parse(text) as unknown),
-  };
+  return readAnswer(response);
 }
 
 /** The bytes that a call answers. */

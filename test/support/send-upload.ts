@@ -1,5 +1,6 @@
 import type { Upload } from '#shared/contracts/endpoint';
 import type { Answer, TestApp } from './app';
+import { readAnswer } from './read-answer';
 import { jpegOf } from './send-photo';
 
 /** Sends an upload as a call wants it: a photo, or a form with a file. */
@@ -20,11 +21,5 @@ export async function sendUpload(
     },
     body: kind === 'image' ? new Uint8Array(await jpegOf()) : form,
   });
-  const text = await response.text();
-  return {
-    status: response.status,
-    headers: response.headers,
-    text,
-    body: text === '' ? undefined : (JSON.parse(text) as unknown),
-  };
+  return readAnswer(response);
 }
