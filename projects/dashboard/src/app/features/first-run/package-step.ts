@@ -6,7 +6,7 @@ import { Api } from '../../core/api/api';
 import { Catalogue } from '../../core/catalogue/catalogue';
 import { formatList } from '../../ui/format';
 import { ChangeForm } from '../../ui/set-up/change-form';
-import { NormForm } from '../../ui/set-up/norm-form';
+import { NormForms } from '../../ui/set-up/norm-forms';
 import { packageChange } from '../../ui/set-up/package-changes';
 import { BODY_TYPE_NAMES } from '../../ui/words';
 import { KnownNetwork } from './known-network';
@@ -14,10 +14,10 @@ import { KnownNetwork } from './known-network';
 /** A package; and, as soon as one is there, its norms for who has them at hand. */
 @Component({
   selector: 'us-package-step',
-  imports: [ChangeForm, MatFormFieldModule, MatInput, NormForm],
+  imports: [ChangeForm, MatFormFieldModule, MatInput, NormForms],
   template: `
     @if (there(); as names) {
-      <p class="there">There already: {{ names }}.</p>
+      <p class="there">There already: {{ names }}. Another one:</p>
     }
     <us-change-form [of]="form()" (saved)="known.reload()" />
     @if (catalogue.packages()[0]; as sold) {
@@ -33,9 +33,7 @@ import { KnownNetwork } from './known-network';
             }
           </select>
         </mat-form-field>
-        @for (type of [bodyType()]; track type) {
-          <us-norm-form [sold]="sold" [bodyType]="type" (saved)="known.reload()" />
-        }
+        <us-norm-forms [sold]="sold" [bodyType]="bodyType()" (saved)="known.reload()" />
       </details>
     }
   `,

@@ -5,7 +5,7 @@ import { Api } from '../../core/api/api';
 import { Catalogue } from '../../core/catalogue/catalogue';
 import { LoadState } from '../../ui/load-state/load-state';
 import { ChangeForm } from '../../ui/set-up/change-form';
-import { NormForm } from '../../ui/set-up/norm-form';
+import { NormForms } from '../../ui/set-up/norm-forms';
 import { packageChange } from '../../ui/set-up/package-changes';
 import { BODY_TYPE_NAMES } from '../../ui/words';
 import { Removal } from './removal';
@@ -14,7 +14,7 @@ import { WhoChanged } from './who-changed';
 /** One package: name, warranty, and the product expected on each body type. */
 @Component({
   selector: 'us-package-page',
-  imports: [ChangeForm, LoadState, NormForm, Removal, RouterLink, WhoChanged],
+  imports: [ChangeForm, LoadState, NormForms, Removal, RouterLink, WhoChanged],
   templateUrl: './package-page.html',
   styleUrl: './part.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,

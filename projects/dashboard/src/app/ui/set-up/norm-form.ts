@@ -1,4 +1,12 @@
-import { ChangeDetectionStrategy, Component, computed, inject, input, output } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  inject,
+  input,
+  output,
+  viewChild,
+} from '@angular/core';
 import { getNormMedians } from '#shared/contracts/set-up-help';
 import type { BodyType } from '#shared/domain/vocabulary';
 import { Api } from '../../core/api/api';
@@ -36,6 +44,9 @@ export class NormForm {
   readonly bodyType = input.required<BodyType>();
   readonly saved = output();
 
+  private readonly changeForm = viewChild(ChangeForm);
+  /** Something is typed that is not saved. */
+  readonly unsaved = computed(() => this.changeForm()?.unsaved() ?? false);
   private readonly api = inject(Api);
   private readonly catalogue = inject(Catalogue);
   private readonly medians = this.api.read(getNormMedians, () => ({
