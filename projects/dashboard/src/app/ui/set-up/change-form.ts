@@ -83,6 +83,12 @@ export class ChangeForm<Out> {
       return undefined;
     return this.of().change?.(typed);
   });
+  /** Something is typed that is not saved. */
+  readonly unsaved = computed(() => {
+    this.typed();
+    this.taken();
+    return this.form.dirty;
+  });
   protected readonly standing = computed(() => {
     if (this.saving.busy()) {
       return this.of().change
@@ -117,6 +123,7 @@ export class ChangeForm<Out> {
   }
 
   protected async submit(): Promise<void> {
+    this.writeCodes();
     const typed = this.form.getRawValue();
     this.form.markAllAsTouched();
     const wrong = this.wrongIn(typed);
@@ -153,15 +160,14 @@ export class ChangeForm<Out> {
   protected tick(key: string, value: string): void {
     const codes = codesOf(this.form.getRawValue(), key);
     const next = codes.includes(value) ? codes.filter((code) => code !== value) : [...codes, value];
-    const control = this.form.controls[key];
-    control?.setValue(next.join(' '));
-    control?.markAsDirty();
+    this.take(key, next.join(' '));
   }
 
   protected take(key: string, value: string): void {
     const control = this.form.controls[key];
-    control?.setValue(value);
+    // As a key does: whoever hears of the value finds it changed already.
     control?.markAsDirty();
+    control?.setValue(value);
   }
 
   protected typeOf({ kind }: Field): string {
@@ -172,6 +178,17 @@ export class ChangeForm<Out> {
   protected modeOf({ kind }: Field): string | null {
     if (kind === 'whole') return 'numeric';
     return kind === 'money' || kind === 'percent' ? 'decimal' : null;
+  }
+
+  /** Codes have one case: nobody is refused for the other one. */
+  private writeCodes(): void {
+    for (const { key, kind } of this.of().fields) {
+      if (kind !== 'code' && kind !== 'packageCode') continue;
+      const control = this.form.controls[key];
+      const text = control?.value ?? '';
+      const written = kind === 'code' ? text.toUpperCase() : text.toLowerCase();
+      if (written !== text) control?.setValue(written);
+    }
   }
 
   private wrongIn(typed: Typed): Readonly<Record<string, string>> {
