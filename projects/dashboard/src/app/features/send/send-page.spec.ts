@@ -3,6 +3,7 @@ import { HttpTestingController, provideHttpClientTesting } from '@angular/common
 import { signal } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { provideRouter, Router } from '@angular/router';
+import type { Role } from '#shared/domain/vocabulary';
 import { Catalogue } from '../../core/catalogue/catalogue';
 import { Drafts } from '../../core/drafts/drafts';
 import { Session } from '../../core/session/session';
@@ -24,7 +25,7 @@ const UNDER_WAY = {
 };
 const wait = (ms: number): Promise<void> => new Promise((done) => setTimeout(done, ms));
 
-async function open(branches = [HAV], branch?: string) {
+async function open(branches = [HAV], branch?: string, role: Role = 'recorder') {
   TestBed.configureTestingModule({
     providers: [
       provideHttpClient(),
@@ -34,7 +35,7 @@ async function open(branches = [HAV], branch?: string) {
         provide: Session,
         useValue: {
           person: signal({ id: 7 }),
-          role: signal('recorder'),
+          role: signal(role),
           usableToken: () => Promise.resolve('one'),
         },
       },
@@ -42,6 +43,7 @@ async function open(branches = [HAV], branch?: string) {
         provide: Catalogue,
         useValue: {
           branches: signal(branches),
+          value: signal({ branches, packages: [{ code: 'full' }] }),
           branchName: (code: string) => branches.find((one) => one.code === code)?.name ?? code,
           state: { problem: signal(undefined) },
         },
@@ -86,6 +88,13 @@ describe('SendPage', () => {
     const [draft] = drafts.list();
     expect(draft).toMatchObject({ branch: 'HAV', state: 'editing', step: 0 });
     expect(await ledTo()).toBe(`/send/${draft!.id}`);
+  });
+
+  it('in a network without a branch, says so in place of the beginning, and leads head office to the first steps', async () => {
+    const { host } = await open([], 'HAV', 'head_office');
+    expect(host.textContent).toContain('This network has no branch yet');
+    expect(host.querySelector('.begin')).toBeNull();
+    expect(host.querySelector('a[href="/first-run"]')).not.toBeNull();
   });
 
   it('with several branches, given none chosen, asks for it first', async () => {

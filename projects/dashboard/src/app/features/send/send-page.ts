@@ -2,10 +2,12 @@ import { ChangeDetectionStrategy, Component, computed, inject, input } from '@an
 import { MatButton } from '@angular/material/button';
 import { MatFormFieldModule } from '@angular/material/form-field';
 import { MatInput } from '@angular/material/input';
-import { Router } from '@angular/router';
+import { Router, RouterLink } from '@angular/router';
 import { Catalogue } from '../../core/catalogue/catalogue';
 import { Drafts } from '../../core/drafts/drafts';
 import { JobOutbox } from '../../core/drafts/outbox';
+import { Session } from '../../core/session/session';
+import { lackOf, nextSteps } from '../../ui/empty-next/next-steps';
 import { LoadState } from '../../ui/load-state/load-state';
 import { Trouble } from '../../ui/trouble/trouble';
 import { DraftRows } from './pieces/draft-rows';
@@ -22,6 +24,7 @@ import { UnderWayRows } from './pieces/under-way-rows';
     MatButton,
     MatFormFieldModule,
     MatInput,
+    RouterLink,
     Trouble,
     UnderWayRows,
   ],
@@ -34,6 +37,7 @@ export class SendPage {
   readonly branch = input<string>();
 
   private readonly router = inject(Router);
+  private readonly role = inject(Session).role;
   protected readonly catalogue = inject(Catalogue);
   protected readonly drafts = inject(Drafts);
   protected readonly outbox = inject(JobOutbox);
@@ -43,6 +47,15 @@ export class SendPage {
     const branches = this.branches();
     const asked = branches.find(({ code }) => code === this.branch())?.code;
     return asked ?? (branches.length === 1 ? branches[0]?.code : undefined);
+  });
+  /** What stands in the way of any job at all, and what this person can do about it. */
+  protected readonly missing = computed(() => {
+    const known = this.catalogue.value();
+    const role = this.role();
+    if (!known || !role) return undefined;
+    const { branches, packages } = known;
+    const lack = lackOf({ branches: branches.length, packages: packages.length, jobs: 1 });
+    return lack && nextSteps(lack, role);
   });
   protected readonly isStuck = computed(() => {
     const { waiting, photosWaiting, sending } = this.outbox.state();

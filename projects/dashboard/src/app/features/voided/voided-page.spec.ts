@@ -22,12 +22,13 @@ const JOB: VoidedJob = {
   voidedBy: 'manager@underseam.example',
 };
 
-async function open(url: string) {
+async function open(url: string, branches = BRANCHES) {
   const page = await openPage(VoidedPage, {
     url,
     role: 'head_office',
     catalogue: {
-      branches: signal(BRANCHES),
+      branches: signal(branches),
+      value: signal({ branches }),
       branchName: (code: string) => BRANCHES.find((one) => one.code === code)?.name ?? code,
       packageName: () => 'Full protection',
     },
@@ -53,6 +54,12 @@ describe('VoidedPage', () => {
     expect(host.textContent).toContain('Velder Tessock 2012, Full protection, finished');
     expect(host.textContent).toContain('by manager@underseam.example');
     expect(host.textContent).toContain('None at Tangmoor.');
+  });
+
+  it('a network without a branch yet, says that nothing stands void and asks for nothing', async () => {
+    const { host, settle } = await open('/voided', []);
+    await settle();
+    expect(host.querySelector('h1')?.textContent).toContain('No job stands void here.');
   });
 
   it('one brought back, says so and asks anew', async () => {

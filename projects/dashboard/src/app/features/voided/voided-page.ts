@@ -1,6 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input, signal } from '@angular/core';
 import { RouterLink } from '@angular/router';
-import { forkJoin, map } from 'rxjs';
+import { forkJoin, map, of } from 'rxjs';
 import { listVoidedJobs } from '#shared/contracts/corrections';
 import { Api } from '../../core/api/api';
 import { readingOf } from '../../core/api/reading';
@@ -48,7 +48,8 @@ export class VoidedPage {
   private readonly question = computed(() => {
     const codes = this.codes();
     const alone = codes.length === 1;
-    return codes.length === 0
+    // No branch yet is an answer too, as soon as it is known.
+    return codes.length === 0 && this.catalogue.value() === undefined
       ? undefined
       : { codes, limit: alone ? ALONE : TOGETHER, cursor: alone ? this.cursor() : undefined };
   });
@@ -56,15 +57,18 @@ export class VoidedPage {
   protected readonly lists = readingOf(
     () => this.question(),
     ({ codes, limit, cursor }) =>
-      forkJoin(
-        codes.map((branch) =>
-          this.api
-            .call(listVoidedJobs, {
-              params: { branch },
-              query: { limit, cursor: cursor || undefined },
-            })
-            .pipe(map(({ body }) => ({ branch, ...body }))),
-        ),
+      (codes.length === 0
+        ? of([])
+        : forkJoin(
+            codes.map((branch) =>
+              this.api
+                .call(listVoidedJobs, {
+                  params: { branch },
+                  query: { limit, cursor: cursor || undefined },
+                })
+                .pipe(map(({ body }) => ({ branch, ...body }))),
+            ),
+          )
       ).pipe(map((body) => ({ body, etag: undefined, status: 200 }))),
   );
 
