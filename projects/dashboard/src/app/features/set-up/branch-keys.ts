@@ -49,6 +49,8 @@ export class BranchKeys {
   protected readonly day = formatInstantDay;
   protected readonly keys = this.api.read(listKeys, () => ({ params: { branch: this.branch() } }));
   protected readonly made = signal<OutOf<typeof addKey> | undefined>(undefined);
+  /** The key whose revoking was asked for once: it cannot be undone, so it takes a second press. */
+  protected readonly asked = signal<string | undefined>(undefined);
   protected readonly form = computed(() => keyChange(this.api, this.branch()));
   protected readonly revoking = deed((id: string) =>
     this.api.call(revokeKey, { params: { branch: this.branch(), id } }),
@@ -60,6 +62,11 @@ export class BranchKeys {
   }
 
   protected async revoke({ id }: PushKey): Promise<void> {
+    if (this.asked() !== id) {
+      this.asked.set(id);
+      return;
+    }
+    this.asked.set(undefined);
     if (!(await this.revoking.run(id))) return;
     if (this.made()?.id === id) this.made.set(undefined);
     this.keys.reload();

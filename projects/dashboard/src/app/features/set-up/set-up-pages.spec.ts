@@ -75,6 +75,33 @@ describe('BranchPage', () => {
   });
 });
 
+describe('BranchKeys', () => {
+  const KEY = { id: 'k1', label: 'the till', createdAt: '2026-01-02T08:00:00Z', lastUsedAt: null };
+
+  it('revoke, pressed once, asks again; pressed again, revokes', async () => {
+    const { http, host, settle } = await openPage(BranchPage, {
+      url: '/set-up/branches/HAV',
+      catalogue: CATALOGUE,
+      inputs: { code: 'HAV' },
+    });
+    http.expectOne('/api/costs').flush({ ...COSTS, rates: [] });
+    http.expectOne('/api/branches/HAV/keys').flush({ items: [{ ...KEY, revokedAt: null }] });
+    await settle();
+    await settle();
+    const press = async (name: string): Promise<void> => {
+      host
+        .querySelector<HTMLButtonElement>(`button[aria-label="${name} the key for the till"]`)!
+        .click();
+      await settle();
+    };
+    await press('Revoke:');
+    expect(host.textContent).toContain('can send no more');
+    http.expectNone({ method: 'DELETE' });
+    await press('Revoke for good:');
+    http.expectOne({ method: 'DELETE', url: '/api/branches/HAV/keys/k1' });
+  });
+});
+
 describe('ProductSetUpPage', () => {
   it('taken out while something refers to it, says what does and stays', async () => {
     const { http, host, settle } = await openPage(ProductSetUpPage, {
