@@ -1,5 +1,6 @@
-import { ChangeDetectionStrategy, Component, computed, DOCUMENT, inject } from '@angular/core';
+import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
 import { RouterLink } from '@angular/router';
+import { deviceWord } from '../../ui/device-word';
 import { Drafts } from './drafts';
 import { JobOutbox } from './outbox';
 import { outboxWords } from './outbox-words';
@@ -64,14 +65,10 @@ export class OutboxStateLine {
   private readonly drafts = inject(Drafts);
   private readonly outbox = inject(JobOutbox);
   private readonly unsent = inject(UnsentHere);
-  /** A finger points at a phone; with a mouse it is some other device. */
-  private readonly device =
-    inject(DOCUMENT).defaultView?.matchMedia('(pointer: coarse)').matches === true
-      ? 'phone'
-      : 'device';
+  private readonly device = deviceWord();
 
   protected readonly told = computed(() =>
-    outboxWords(this.outbox.state(), this.unsent.mine().editing, this.device),
+    outboxWords(this.outbox.state(), this.unsent.mine().editing, this.device()),
   );
   protected readonly sentence = computed(() => {
     const sentence = this.told().words.join(', ');

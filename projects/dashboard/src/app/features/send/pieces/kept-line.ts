@@ -1,8 +1,8 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
 import { Drafts } from '../../../core/drafts/drafts';
 import { JobOutbox } from '../../../core/drafts/outbox';
+import { deviceWord } from '../../../ui/device-word';
 import { formatCount, formatCounted } from '../../../ui/format';
-import { windowIs } from '../../../ui/narrow';
 import { Trouble } from '../../../ui/trouble/trouble';
 
 /** Where what is written stands, always in sight: kept on this phone, and how much waits to be sent. */
@@ -45,11 +45,11 @@ import { Trouble } from '../../../ui/trouble/trouble';
 export class KeptLine {
   protected readonly drafts = inject(Drafts);
   private readonly outbox = inject(JobOutbox).state;
-  private readonly isPhone = windowIs('(pointer: coarse)');
+  private readonly device = deviceWord();
   protected readonly words = computed(() => {
     const { waiting, refused, photosWaiting, line, signedOut } = this.outbox();
     return [
-      `Kept on this ${this.isPhone() ? 'phone' : 'device'}`,
+      `Kept on this ${this.device()}`,
       ...(waiting > 0 ? [`${formatCount(waiting)} waiting to be sent`] : []),
       ...(photosWaiting > 0 ? [`${formatCounted(photosWaiting, 'photo', 'photos')} to go`] : []),
       ...(refused > 0 ? [`${formatCount(refused)} refused`] : []),
