@@ -13,6 +13,7 @@ import { inviteAgain, listPeople } from '#shared/contracts/people';
 import { Api } from '../../core/api/api';
 import { Catalogue } from '../../core/catalogue/catalogue';
 import { deed } from '../../core/api/deed';
+import type { Problem } from '../../core/api/problem';
 import { formatInstant } from '../../ui/format';
 import { LoadState } from '../../ui/load-state/load-state';
 import { ChangeForm } from '../../ui/set-up/change-form';
@@ -53,6 +54,12 @@ export class PersonPage {
   protected readonly inviting = deed((id: number) =>
     this.api.call(inviteAgain, { params: { id } }),
   );
+
+  /** What stands against it in a sentence of its own: there is no field here to say it at. */
+  protected refusal({ fields, sentence }: Problem): string {
+    const message = fields[0]?.message;
+    return message ? `${message.charAt(0).toUpperCase()}${message.slice(1)}.` : sentence;
+  }
 
   protected async turn(person: Person, active: boolean): Promise<void> {
     this.said.set('');

@@ -87,7 +87,7 @@ function branchFields(
       key: 'timeZone',
       label: 'Time zone',
       kind: 'choice',
-      choices: timeZoneChoices(branch?.timeZone),
+      choices: timeZoneChoices(branch?.timeZone ?? ownTimeZone()),
       hint: 'Tells which day it is there, so that no car is finished tomorrow.',
     },
     { key: 'openedOn', label: 'Opened on', kind: 'date' },
@@ -96,14 +96,14 @@ function branchFields(
       label: 'Closed on',
       kind: 'date',
       need: 'optional',
-      hint: 'Its cars stay in every figure.',
+      hint: 'Empty while it is open. Its cars stay in every figure.',
     },
     {
       key: 'targetMarginShare',
       label: 'Target margin of its own, %',
       kind: 'percent',
       need: 'optional',
-      hint: 'Empty: the network’s.',
+      hint: 'Empty: the target of the network.',
     },
   ];
 }

@@ -26,23 +26,23 @@ export function networkChange(api: Api, network: Network): ChangeOf<Network> {
       },
       {
         key: 'feeRate',
-        label: 'Network fee, % of the bill',
+        label: 'Network fee from the start, % of the bill',
         kind: 'percent',
-        hint: 'Of every bill before tax, from the start; 0 where there is none.',
+        hint: 'Before tax; 0 where there is none. A later fee has a day of its own.',
       },
       {
         key: 'targetMarginShare',
         label: 'Target margin, %',
         kind: 'percent',
         need: 'optional',
-        hint: 'Quote asks for it unless a branch has its own. No kept figure moves.',
+        hint: 'What Quote aims at, unless a branch has its own. Can wait; no finished car moves.',
       },
       {
         key: 'claimLimitCents',
         label: 'A branch decides claims up to',
         kind: 'money',
         need: 'optional',
-        hint: 'Above it head office decides. Empty: a branch decides all of its own.',
+        hint: 'Above it head office decides. Empty: a branch decides all its claims.',
       },
     ],
     start: {
