@@ -13,7 +13,7 @@ import { KnownNetwork } from './known-network';
   imports: [ChangeForm, Corrosivity],
   template: `
     @if (there(); as names) {
-      <p class="there">There already: {{ names }}.</p>
+      <p class="there">There already: {{ names }}. Another one:</p>
     }
     <div class="sides">
       <us-change-form [of]="form()" (typing)="climate.set(read($event))" (saved)="known.reload()" />
