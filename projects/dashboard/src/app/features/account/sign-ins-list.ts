@@ -5,6 +5,7 @@ import type { OutOf } from '#shared/contracts/endpoint';
 import { Api } from '../../core/api/api';
 import { deed } from '../../core/api/deed';
 import { Session } from '../../core/session/session';
+import { CellTemplate } from '../../ui/data-table/cell-template';
 import type { Column } from '../../ui/data-table/column';
 import { DataTable } from '../../ui/data-table/data-table';
 import { formatInstant } from '../../ui/format';
@@ -33,14 +34,18 @@ const COLUMNS: readonly Column<OpenSignIn>[] = [
 /** The own open sign-ins, and the way out of all of them. */
 @Component({
   selector: 'us-sign-ins-list',
-  imports: [DataTable, LoadState, MatButton, Trouble],
+  imports: [CellTemplate, DataTable, LoadState, MatButton, Trouble],
   template: `
     <us-load-state [of]="signIns" shape="rows">
       <us-data-table
         label="Where you are signed in"
         [columns]="columns"
         [rows]="signIns.value()?.items ?? []"
-      />
+      >
+        <ng-template usCell="named" let-row>
+          <span class="named">{{ row.device }}</span>
+        </ng-template>
+      </us-data-table>
     </us-load-state>
     @if (leaving.problem(); as problem) {
       <us-trouble role="alert">{{ problem.sentence }}</us-trouble>
@@ -56,6 +61,12 @@ const COLUMNS: readonly Column<OpenSignIn>[] = [
     </button>
   `,
   styles: `
+    // Browsers name themselves at length: on lines of its own, so that the table need not scroll for it.
+    .named {
+      display: block;
+      min-width: 260px;
+      white-space: normal;
+    }
     .out {
       margin-top: 16px;
     }

@@ -14,7 +14,7 @@ export function auditAnswer(check: AuditCheck | undefined): {
     return {
       sentence: ['Who did what, when, and from where.'],
       second: [
-        'Each event carries the hash of the one before it: whether all still fit is not checked yet.',
+        'Each event is sealed to the one before it, so that a change or a gap shows. Not checked yet.',
       ],
     };
   }
