@@ -43,7 +43,7 @@ export function tellReferrers(referrers: Referrers): string | undefined {
     [referrers.costs, 'dated cost', 'dated costs'],
   ] as const;
   const named = counts.flatMap(([n, one, many]) =>
-    n === 0 ? [] : [`${n} ${n === 1 ? one : many}`],
+    n === 0 ? [] : [`${n.toLocaleString('en')} ${n === 1 ? one : many}`],
   );
   if (named.length === 0) return undefined;
   const last = named.pop() ?? '';
