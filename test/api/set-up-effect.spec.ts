@@ -1,7 +1,7 @@
 import type { Effect, PlannedChange } from '#shared/contracts/set-up-help';
 import { TestApp, type Answer } from '../support/app';
-import { carsOf } from '../support/costed-cars';
-import { makeSmallNetwork, type SmallNetwork } from '../support/small-network';
+import { makeCostedNetwork } from '../support/costed-cars';
+import type { SmallNetwork } from '../support/small-network';
 
 jest.setTimeout(60_000);
 
@@ -9,12 +9,7 @@ let app: TestApp;
 let network: SmallNetwork;
 beforeAll(async () => {
   app = await TestApp.start();
-  network = await makeSmallNetwork(app);
-  await put('/api/products/UW1', { name: 'Underbody wax', kind: 'underbody_wax' });
-  for (const [n, branch] of (['AAA', 'BBB', 'CCC'] as const).entries()) {
-    const sent = await call('post', `/api/branches/${branch}/jobs/batch`, { jobs: carsOf(n) });
-    expect(sent.body.counts).toMatchObject({ rejected: 0 });
-  }
+  network = await makeCostedNetwork(app);
 });
 afterAll(() => app.stop());
 
@@ -253,6 +248,22 @@ describe('The effect told of a change', () => {
       events,
     );
     expect((await get('/api/network')).feeRate).toBe(0.061);
+  });
+
+  it('given a kind of change that there is not, or none, names the kinds there are', async () => {
+    for (const change of [{ kind: 'nope' }, {}]) {
+      const answer = await call('post', '/api/set-up/effect', { change });
+      expect([answer.status, answer.body.problems]).toEqual([
+        422,
+        [
+          {
+            path: '/change/kind',
+            message:
+              'must be one of rate, productCost, consumableCost, fee, norm, warranty, branchRegion, climate',
+          },
+        ],
+      ]);
+    }
   });
 
   async function pagesOf(branch: string): Promise<unknown> {

@@ -1,6 +1,6 @@
 import { TestApp, type Answer } from '../support/app';
-import { carsOf } from '../support/costed-cars';
-import { makeSmallNetwork, validJob, type SmallNetwork } from '../support/small-network';
+import { makeCostedNetwork } from '../support/costed-cars';
+import { validJob, type SmallNetwork } from '../support/small-network';
 
 jest.setTimeout(60_000);
 
@@ -8,12 +8,7 @@ let app: TestApp;
 let network: SmallNetwork;
 beforeAll(async () => {
   app = await TestApp.start();
-  network = await makeSmallNetwork(app);
-  await put('/api/products/UW1', { name: 'Underbody wax', kind: 'underbody_wax' });
-  for (const [n, branch] of (['AAA', 'BBB', 'CCC'] as const).entries()) {
-    const sent = await call('post', `/api/branches/${branch}/jobs/batch`, { jobs: carsOf(n) });
-    expect(sent.body.counts).toMatchObject({ rejected: 0 });
-  }
+  network = await makeCostedNetwork(app);
 });
 afterAll(() => app.stop());
 

@@ -1,7 +1,22 @@
-import { validJob } from './small-network';
+import type { TestApp } from './app';
+import { makeSmallNetwork, validJob, type SmallNetwork } from './small-network';
+
+/** A small network with a further product, of unknown cost, and such cars in three of its branches. */
+export async function makeCostedNetwork(app: TestApp): Promise<SmallNetwork> {
+  const network = await makeSmallNetwork(app);
+  const token = network.office;
+  const product = { name: 'Underbody wax', kind: 'underbody_wax' };
+  expect((await app.call('put', '/api/products/UW1', { token, body: product })).status).toBe(201);
+  for (const [n, branch] of ['AAA', 'BBB', 'CCC'].entries()) {
+    const path = `/api/branches/${branch}/jobs/batch`;
+    const sent = await app.call('post', path, { token, body: { jobs: carsOf(n) } });
+    expect(sent.body.counts).toMatchObject({ rejected: 0 });
+  }
+  return network;
+}
 
 /** Cars of every kind that costs meet: unbilled, with no estimate, of no norm, with a product of unknown cost, with a piece priced by the network. */
-export function carsOf(seed: number): object[] {
+function carsOf(seed: number): object[] {
   return Array.from({ length: 12 }, (_, n) => ({
     jobRef: `car-${n}`,
     ...validJob({
