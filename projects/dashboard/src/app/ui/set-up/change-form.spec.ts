@@ -7,6 +7,7 @@ import { Catalogue } from '../../core/catalogue/catalogue';
 import { rateChange } from './branch-changes';
 import { ChangeForm } from './change-form';
 import { addPersonChange } from './person-changes';
+import { productChange } from './product-changes';
 import type { ChangeOf } from './change-of';
 
 const EFFECT = '/api/set-up/effect';
@@ -130,6 +131,17 @@ describe('ChangeForm', () => {
     expect(input('Cost of an hour').value).toBe('52');
     expect(host.querySelector('mat-error')?.textContent).toContain('is more than anybody pays');
     expect(host.textContent).toContain('What is typed here is kept.');
+  });
+
+  it('a code typed in small letters, is sent in capitals', async () => {
+    const { http, input, type, send, settle } = await open((api) => productChange(api, []));
+    type('Code', ' cw1');
+    type('Name of the product', 'Cavity wax');
+    type('Kind', 'cavity_wax');
+    await send();
+    http.expectOne({ method: 'PUT', url: '/api/products/CW1' }).flush({});
+    await settle();
+    expect(input('Code').value).not.toContain('cw1');
   });
 
   it('an amount that reads two ways, asks for nothing and says how to write it', async () => {
