@@ -1,7 +1,7 @@
-import { extname, join } from 'node:path';
-import { Piscina } from 'piscina';
+import type { Piscina } from 'piscina';
 import { Refusal } from '#shared/domain/refusal';
 import type { PasswordWork } from './password-work';
+import { startThreads } from './start-threads';
 
 /** 2¹² rounds: about a quarter of a second for a check, in 2026, on the machines this was measured on. */
 const COST = 12;
@@ -45,7 +45,7 @@ export class PasswordThread {
   }
 
   private async run(task: PasswordWork): Promise<string | boolean> {
-    this.pool ??= startThread();
+    this.pool ??= startThreads({ program: 'password-work', atMost: 1, queue: LONGEST_QUEUE });
     if (this.pool.queueSize >= LONGEST_QUEUE) {
       throw new Refusal('too-many', 'Too many people sign in at this moment. Try again.', [], 10);
     }
@@ -56,18 +56,6 @@ export class PasswordThread {
   private nobodysHash(): string {
     return `$2b$${String(this.cost).padStart(2, '0')}$${'.'.repeat(53)}`;
   }
-}
-
-function startThread(): Piscina<PasswordWork, string | boolean> {
-  // From source (tests, development) the thread reads TypeScript itself.
-  const fromSource = __filename.endsWith('.ts');
-  return new Piscina({
-    filename: join(__dirname, `password-work${extname(__filename)}`),
-    minThreads: 1,
-    maxThreads: 1,
-    maxQueue: LONGEST_QUEUE,
-    execArgv: fromSource ? ['--import', 'tsx', '--conditions=underseam-source'] : [],
-  });
 }
 
 /** Keyboards compose letters differently; the same password is the same text in NFC. */

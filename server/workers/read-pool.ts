@@ -1,6 +1,5 @@
-import { extname, join } from 'node:path';
 import { MessageChannel } from 'node:worker_threads';
-import { Piscina } from 'piscina';
+import type { Piscina } from 'piscina';
 import type { Scope } from '#db/scope';
 import { ExportStream } from './export-stream';
 import type {
@@ -11,6 +10,7 @@ import type {
   ReadName,
   ReadTasks,
 } from './read-tasks';
+import { startThreads } from './start-threads';
 
 /** Threads for answers, and others for exports, so that a slow download never holds up a page. */
 const ANSWER_THREADS = 2;
@@ -29,7 +29,7 @@ export class ReadPool {
     scope: Scope,
     input: ReadTasks[Name]['input'],
   ): Promise<ReadTasks[Name]['output']> {
-    this.answers ??= startThreads(this.file, ANSWER_THREADS);
+    this.answers ??= this.threads(ANSWER_THREADS);
     const task: PackedRead = { kind: 'answer', name, scope: scope.pack(), input };
     return (await this.answers.run(task)) as ReadTasks[Name]['output'];
   }
@@ -40,10 +40,14 @@ export class ReadPool {
     scope: Scope,
     input: ExportTasks[Name],
   ): ExportStream {
-    this.exports ??= startThreads(this.file, EXPORT_THREADS);
+    this.exports ??= this.threads(EXPORT_THREADS);
     const { port1, port2 } = new MessageChannel();
     const task: PackedExport = { kind: 'export', name, scope: scope.pack(), input, port: port2 };
     return new ExportStream(port1, this.exports.run(task, { transferList: [port2] }));
+  }
+
+  private threads(atMost: number): Piscina {
+    return startThreads({ program: 'read-worker', atMost, data: { file: this.file } });
   }
 
   /** Ends the threads; what they still work on fails. */
@@ -52,19 +56,4 @@ export class ReadPool {
     this.answers = undefined;
     this.exports = undefined;
   }
-}
-
-function startThreads(file: string, threads: number): Piscina {
-  const fromSource = __filename.endsWith('.ts');
-  const pool = new Piscina({
-    filename: join(__dirname, `read-worker${extname(__filename)}`),
-    workerData: { file },
-    minThreads: 1,
-    maxThreads: threads,
-    idleTimeout: 60_000,
-    // From source (tests, development) the thread reads TypeScript itself.
-    execArgv: fromSource ? ['--import', 'tsx', '--conditions=underseam-source'] : [],
-  });
-  // A thread that dies at work fails its task, and the next task gets a new one; one that dies idle fails nobody.
-  return pool.on('error', () => undefined);
 }
