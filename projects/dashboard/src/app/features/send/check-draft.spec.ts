@@ -25,6 +25,14 @@ describe('checkDraft', () => {
     expect(checkDraft(whole(), WORLD, NOW)).toEqual([]);
   });
 
+  it('of a field left empty, given its own choices or length, says that it is missing', () => {
+    const said = (path: string, draft: DraftDocument) =>
+      checkDraft(draft, WORLD, NOW).find((one) => one.path === path)?.message;
+    expect(said('/jobRef', { jobRef: ' ' })).toBe('is required');
+    expect(said('/vehicle/bodyType', { vehicle: {} })).toBe('is required');
+    expect(said('/jobRef', { jobRef: 'a/b' })).not.toBe('is required');
+  });
+
   it('of an empty draft, given nothing, names every field that is missing by its path', () => {
     const paths = checkDraft({}, WORLD, NOW).map(({ path }) => path);
     expect(paths).toEqual(

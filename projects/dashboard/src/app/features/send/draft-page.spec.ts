@@ -170,12 +170,12 @@ describe('DraftPage', () => {
   it('looked over, given what is missing, names each, leads to its field, and sends nothing', async () => {
     const { host, press, server, drafts, id } = await open('review', { jobRef: 'A-17' });
     await wait(100);
-    expect(host.textContent).toContain('The make: is still missing.');
+    expect(host.textContent).toContain('The make is still missing.');
     await press('Send job');
     expect(host.querySelector('.foot [role=alert]')?.textContent).toContain('Not sent yet');
     expect(server.heard).toEqual([]);
     expect(drafts.find(id)?.state).toBe('editing');
-    await press('The make: is still missing.');
+    await press('The make is still missing.');
     expect(TestBed.inject(Router).url).toBe(`/send/${id}?step=car`);
   });
 

@@ -31,7 +31,10 @@ describe('problemSentence', () => {
       'is after the day finished (2026-02-01)',
     );
     expect(problemSentence(document, { path: '/package', message: 'is required' }, NAME)).toBe(
-      'The package: is still missing.',
+      'The package is still missing.',
+    );
+    expect(problemSentence(document, { path: '/package', message: 'not one of ours' }, NAME)).toBe(
+      'The package: not one of ours.',
     );
   });
 });

@@ -82,7 +82,13 @@ export function problemSentence(
   { path, message }: { readonly path: string; readonly message: string },
   product: ProductName,
 ): string {
-  return `${fieldName(document, path, product)}: ${messageWords(message)}.`;
+  return aboutField(fieldName(document, path, product), message);
+}
+
+/** A rule's message after the name it speaks of: as one sentence where it goes on from it, else set off from it. */
+export function aboutField(name: string, message: string): string {
+  const said = messageWords(message);
+  return `${name}${/^(is|are|has|have|must|cannot)\b/.test(said) ? '' : ':'} ${said}.`;
 }
 
 /** A rule's message in the form's own words. */

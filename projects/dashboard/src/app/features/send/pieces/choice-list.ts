@@ -3,7 +3,7 @@ import { FormControl, ReactiveFormsModule } from '@angular/forms';
 import { MatFormFieldModule } from '@angular/material/form-field';
 import { MatInput } from '@angular/material/input';
 import { Trouble } from '../../../ui/trouble/trouble';
-import { messageWords } from '../field-words';
+import { aboutField } from '../field-words';
 import { OpenDraft } from '../open-draft';
 
 /** A field of the draft that is one of several words, picked from the device's own list. */
@@ -51,7 +51,7 @@ export class ChoiceList {
   protected readonly control = new FormControl('', { nonNullable: true });
   protected readonly problem = computed(() => {
     const message = this.draft.problemAt(this.path());
-    return message === undefined ? undefined : `${this.label()} ${messageWords(message)}.`;
+    return message === undefined ? undefined : aboutField(this.label(), message);
   });
 
   constructor() {

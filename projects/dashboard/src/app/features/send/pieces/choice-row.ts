@@ -2,7 +2,7 @@ import { ChangeDetectionStrategy, Component, inject, input } from '@angular/core
 import type { Condition } from '#shared/domain/vocabulary';
 import { ConditionSign } from '../../../ui/condition-sign/condition-sign';
 import { Trouble } from '../../../ui/trouble/trouble';
-import { messageWords } from '../field-words';
+import { aboutField } from '../field-words';
 import { OpenDraft } from '../open-draft';
 
 /** One of the buttons of a row. */
@@ -36,7 +36,7 @@ export class ChoiceRow {
 
   protected problem(): string | undefined {
     const message = this.draft.problemAt(this.path());
-    return message === undefined ? undefined : `${this.label()}: ${messageWords(message)}.`;
+    return message === undefined ? undefined : aboutField(this.label(), message);
   }
 
   protected pick(value: string | boolean): void {
