@@ -17,10 +17,9 @@ describe('productRows', () => {
   it('of a car, given what was used last time, offers that first; the norm is only told', () => {
     const rows = productRows({}, norms, lastTime);
     expect(rows.map(({ product }) => product)).toEqual(['CW1', 'UW1']);
-    expect(rows.map(({ note }) => plain(note))).toEqual([
-      'norm 3.8 L, last time 3.9 L',
-      'norm 4.2 L',
-    ]);
+    expect(rows.map(({ note }) => plain(note))).toEqual(['norm 3.8 L', 'norm 4.2 L']);
+    const written = productRows({ products: [{ product: 'CW1', ml: 4000 }] }, norms, lastTime);
+    expect(plain(written[0]?.note)).toBe('norm 3.8 L, last time 3.9 L');
     expect(rows.map(({ offer }) => plain(offer?.words))).toEqual([
       '3.9 L, as last time',
       undefined,

@@ -6,7 +6,7 @@ import type { DraftDocument } from './draft-document';
 export interface ProductRow {
   readonly product: string;
   readonly path: string;
-  /** "norm 4.2 L, last time 4.0 L". */
+  /** "norm 4.2 L, last time 4.0 L"; the latter once it is no longer offered. */
   readonly note: string;
   /** What was used last time, at one press while nothing is written. Never the norm: an amount nobody measured says nothing. */
   readonly offer: { readonly ml: number; readonly words: string } | undefined;
@@ -33,9 +33,10 @@ export function productRows(
     return {
       product,
       path: `/products/${product}/ml`,
+      // What is offered on a button is not said a second time above it.
       note: [
         norm === undefined ? '' : `norm ${formatVolume(norm)}`,
-        before === undefined ? '' : `last time ${formatVolume(before)}`,
+        now === undefined || before === undefined ? '' : `last time ${formatVolume(before)}`,
       ]
         .filter(Boolean)
         .join(', '),
