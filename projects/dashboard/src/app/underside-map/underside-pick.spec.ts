@@ -70,6 +70,17 @@ describe('UndersidePick', () => {
     expect(labelled(host, 'sill, inner, left').getAttribute('aria-checked')).toBe('true');
   });
 
+  it('told of another finding, given a touch before, rings and asks nothing until it is touched again', async () => {
+    const fixture = await draw();
+    await touch(fixture, 500, 36);
+    expect(fixture.componentInstance.asks()).toBe(true);
+    fixture.componentInstance.forgetTouch();
+    await fixture.whenStable();
+    expect(fixture.componentInstance.asks()).toBe(false);
+    expect(hostOf(fixture).querySelector('circle.ring')).toBeNull();
+    expect(offered(hostOf(fixture))).toEqual([]);
+  });
+
   it('clicked, given a mouse that points at one zone, takes it and still offers its neighbours', async () => {
     const fixture = await draw();
     await touch(fixture, 500, 36, 'mouse');

@@ -90,6 +90,14 @@ export class UndersidePick {
     return asksForSide(place) ? place : undefined;
   });
 
+  /** Whether a touch has asked which zone is meant and no answer is given yet. */
+  readonly asks = computed(() => this.touch() !== null && this.place() === null);
+
+  /** Another finding is looked at: where the car was touched for the one before says nothing of it. */
+  forgetTouch(): void {
+    this.touch.set(null);
+  }
+
   /** A touch asks which of the zones in reach is meant, unless there is only one, or a mouse has pointed at one. */
   protected land({ point, key, pointer }: Touch): void {
     this.touch.set(point);

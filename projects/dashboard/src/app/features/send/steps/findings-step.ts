@@ -1,4 +1,11 @@
-import { ChangeDetectionStrategy, Component, computed, inject, signal } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  inject,
+  signal,
+  viewChild,
+} from '@angular/core';
 import { ACTIONS, CONDITIONS } from '#shared/domain/vocabulary';
 import { Catalogue } from '../../../core/catalogue/catalogue';
 import { Caution } from '../../../ui/caution/caution';
@@ -52,6 +59,7 @@ const DONE_WORDS: Readonly<Record<(typeof ACTIONS)[number], string>> = {
 export class FindingsStep {
   protected readonly draft = inject(OpenDraft);
   private readonly catalogue = inject(Catalogue);
+  private readonly pick = viewChild.required(UndersidePick);
   /** The finding being written; none while the next one has no place yet. */
   readonly ref = signal<string | undefined>(undefined);
   readonly view = signal<'picture' | 'list'>('picture');
@@ -121,6 +129,12 @@ export class FindingsStep {
 
   /** Begins the next one. */
   addAnother(): void {
-    this.ref.set(undefined);
+    this.turnTo(undefined);
+  }
+
+  /** Turns to a finding, or to the next one while it has no place yet. */
+  protected turnTo(ref: string | undefined): void {
+    this.pick().forgetTouch();
+    this.ref.set(ref);
   }
 }
