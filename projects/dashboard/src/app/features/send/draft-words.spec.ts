@@ -28,6 +28,9 @@ describe('draftWords', () => {
     expect(draftWords(draft({ corrects: '"r2"' })).state).toBe(
       'a correction, being written: findings',
     );
+    expect(draftWords(draft({ keptAs: '"u1"' })).state).toBe(
+      'being written: findings; colleagues see what was last kept',
+    );
     expect(draftWords(draft({ content: {}, jobRef: '' })).title).toBe('A car not named yet');
   });
 
@@ -50,5 +53,6 @@ describe('draftWords', () => {
       'sent, 1 photo still to go, 1 photo refused: It is no photo.',
     );
     expect(draftWords(draft({ state: 'sent' }))).toMatchObject({ state: 'sent', tone: 'tide' });
+    expect(draftWords(draft({ state: 'sent', corrects: '"r2"' })).state).toBe('a correction, sent');
   });
 });

@@ -27,11 +27,13 @@ function stateWords(draft: DeviceDraft): Omit<DraftWords, 'title'> {
   const photos = draft.photos.filter(({ state }) => state === 'here').length;
   const why = draft.photos.find(({ problem }) => problem !== undefined)?.problem;
   const refused = draft.photos.filter(({ state }) => state === 'refused').length;
+  // A job sent and then corrected here stands in the list twice.
+  const correction = draft.corrects === undefined ? '' : 'a correction, ';
   switch (draft.state) {
     case 'waiting':
-      return { state: 'waiting to be sent', tone: 'tide', act: 'Change it' };
+      return { state: `${correction}waiting to be sent`, tone: 'tide', act: 'Change it' };
     case 'sending':
-      return { state: 'being sent', tone: 'tide', act: 'Look at it' };
+      return { state: `${correction}being sent`, tone: 'tide', act: 'Look at it' };
     case 'refused':
       return {
         state: `refused: ${refusalSentence(draft.problem?.sentence ?? 'the server did not take it.')}`,
@@ -41,7 +43,7 @@ function stateWords(draft: DeviceDraft): Omit<DraftWords, 'title'> {
     case 'sent':
       return {
         state: [
-          'sent',
+          `${correction}sent`,
           photoWords(photos, 'still to go'),
           photoWords(refused, `refused: ${why ?? 'it cannot be read'}`),
         ]
@@ -51,9 +53,10 @@ function stateWords(draft: DeviceDraft): Omit<DraftWords, 'title'> {
         act: 'Look at it',
       };
     default: {
-      const correction = draft.corrects === undefined ? '' : 'a correction, ';
       const step = STEP_NAMES[SEND_STEPS[draft.step] ?? 'car'];
-      return { state: `${correction}being written: ${step}`, tone: 'quiet', act: 'Go on' };
+      // What is written after it was kept stays here until it is kept again.
+      const kept = draft.keptAs === undefined ? '' : '; colleagues see what was last kept';
+      return { state: `${correction}being written: ${step}${kept}`, tone: 'quiet', act: 'Go on' };
     }
   }
 }

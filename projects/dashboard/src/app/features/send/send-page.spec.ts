@@ -6,6 +6,7 @@ import { provideRouter, Router } from '@angular/router';
 import type { Role } from '#shared/domain/vocabulary';
 import { Catalogue } from '../../core/catalogue/catalogue';
 import { Drafts } from '../../core/drafts/drafts';
+import { Line } from '../../core/offline/line';
 import { Session } from '../../core/session/session';
 import { newDevice } from '../../testing/device';
 import { SendPage } from './send-page';
@@ -121,6 +122,22 @@ describe('SendPage', () => {
     expect(drafts.list()[0]).toMatchObject({ jobRef: '0417', keptAs: '"r2"', branch: 'HAV' });
     // It stands among the jobs of this device now, and there only.
     expect(host.textContent.match(/job 0417/g)).toHaveLength(1);
+    expect(host.textContent).toContain('No others than those on this device.');
+  });
+
+  it('without a line, given that it comes back, reads what colleagues have under way again', async () => {
+    const { host, http, settle } = await open();
+    const line = TestBed.inject(Line);
+    line.silent();
+    http.expectOne('/api/branches/HAV/under-way').error(new ProgressEvent('error'));
+    await settle();
+    expect(host.textContent).toContain('No answer from the server');
+    line.heard();
+    await settle();
+    http.expectOne('/api/branches/HAV/under-way').flush({ items: [UNDER_WAY] });
+    await settle();
+    expect(host.textContent).toContain('Velder Tessock, job 0417');
+    expect(host.textContent).not.toContain('No answer from the server');
   });
 
   it('given a colleague’s job, drops it only when asked twice', async () => {

@@ -1,4 +1,13 @@
-import { ChangeDetectionStrategy, Component, computed, inject, input, signal } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  effect,
+  inject,
+  input,
+  signal,
+  untracked,
+} from '@angular/core';
 import { MatButton } from '@angular/material/button';
 import { Router } from '@angular/router';
 import {
@@ -10,6 +19,7 @@ import {
 import { Api } from '../../../core/api/api';
 import { deed } from '../../../core/api/deed';
 import { Drafts } from '../../../core/drafts/drafts';
+import { Line } from '../../../core/offline/line';
 import { formatCounted, formatInstant } from '../../../ui/format';
 import { LoadState } from '../../../ui/load-state/load-state';
 import { Trouble } from '../../../ui/trouble/trouble';
@@ -45,6 +55,8 @@ export class UnderWayRows {
         ].join(', '),
       })),
   );
+  /** Whether those kept are all being gone on with here. */
+  protected readonly onlyHere = computed(() => (this.jobs.value()?.items ?? []).length > 0);
   protected readonly goingOn = deed((job: JobUnderWay) =>
     this.api.call(getUnderWay, { params: { branch: this.branch(), jobRef: job.jobRef } }),
   );
@@ -53,6 +65,14 @@ export class UnderWayRows {
   protected readonly dropping = deed((job: JobUnderWay) =>
     this.api.call(dropUnderWay, { params: { branch: this.branch(), jobRef: job.jobRef } }),
   );
+
+  constructor() {
+    const line = inject(Line);
+    // What could not be read without a line is read when it is back, not only when somebody asks.
+    effect(() => {
+      if (!line.down() && untracked(() => this.jobs.problem()) !== undefined) this.jobs.reload();
+    });
+  }
 
   protected async goOn(job: JobUnderWay): Promise<void> {
     const answer = await this.goingOn.run(job);
