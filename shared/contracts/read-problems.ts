@@ -58,9 +58,17 @@ function sentenceOf(issue: z.core.$ZodIssue): string {
       return issue.message.startsWith('Too big')
         ? `must be at most ${issue.maximum}${unitOf(issue.origin)}`
         : issue.message;
+    case 'invalid_union':
+      return kindAsked(issue) ?? issue.message;
     default:
       return issue.message;
   }
+}
+
+/** Of a body that is one of several kinds, told apart by a word in it: which words there are. */
+function kindAsked(issue: z.core.$ZodIssueInvalidUnion): string | undefined {
+  if (!('options' in issue) || !Array.isArray(issue.options)) return undefined;
+  return `must be one of ${issue.options.map(String).join(', ')}`;
 }
 
 function unitOf(origin: string): string {
