@@ -14,7 +14,7 @@ export function auditAnswer(check: AuditCheck | undefined): {
     return {
       sentence: ['Who did what, when, and from where.'],
       second: [
-        'Each event is sealed to the one before it, so that a change or a gap shows. Not checked yet.',
+        'Each event is sealed to the one before it, so that a change or a gap shows; not checked yet.',
       ],
     };
   }
