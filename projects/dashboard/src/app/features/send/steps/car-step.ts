@@ -39,9 +39,9 @@ const LOOKED_THROUGH = 200;
     <us-send-field path="/vehicle/odometerKm" label="Odometer, km" kind="whole" />
     <us-send-field
       path="/vehicle/key"
-      label="Key of the car"
+      label="Branch's key of the car"
       [most]="64"
-      note="What you know the car by, so that its next visit finds this one. Not the number plate."
+      note="Your own code for it, so that its next visit finds this one. Not the number plate."
     />
   `,
   styleUrl: './step.scss',
