@@ -1,5 +1,5 @@
 import type { BranchWriter, Receipt, StoredJob } from './branch-writer';
-import { INVOICE_TOTAL_MISSING } from '#shared/domain/job-rules';
+import { breaksOfReferences, INVOICE_TOTAL_MISSING } from '#shared/domain/job-rules';
 import { normaliseJob, referenced, type SentJob } from '#shared/domain/normalise-job';
 import type { RecordedJob } from '#shared/domain/recorded-job';
 import { refuseInput } from '#shared/domain/refusal';
@@ -41,6 +41,7 @@ export function acceptJob(
   const whole = withMoneyUnderWay(writer, jobRef, sent, sending.money);
   const { status, stored, job, text } = judgeJob(writer, jobRef, whole, sending);
   if (status === 'created') {
+    refuseGone(writer, job);
     writer.createJob(jobRef, job, text, sending);
     return { jobRef, revision: 1, status };
   }
@@ -48,8 +49,18 @@ export function acceptJob(
     // A nightly re-push must not revive what was voided (rule 25).
     return { jobRef, revision: stored.revision, status, ...(stored.voided && { voided: true }) };
   }
+  refuseGone(writer, job);
   const revision = writer.replaceJob(jobRef, stored, job, text, sending);
   return { jobRef, revision, status };
+}
+
+/** A product or package may have been taken out of the catalogue since the job was judged. */
+function refuseGone({ state }: BranchWriter, job: RecordedJob): void {
+  const gone = breaksOfReferences(job, {
+    isProduct: (code) => state.productId(code) !== undefined,
+    isPackage: (code) => state.package(code) !== undefined,
+  });
+  if (gone.length > 0) throw refuseInput(gone);
 }
 
 /** With what a colleague who sees money wrote down while the job was under way: it ends with this, and a recorder cannot send it. */

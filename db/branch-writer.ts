@@ -50,7 +50,7 @@ const FIND = `select jobs.id, jobs.revision, warranty_months, voided_at, content
  */
 export class BranchWriter {
   private readonly connection: Connection;
-  private readonly state: NetworkState;
+  readonly state: NetworkState;
 
   constructor(
     store: Pick<Store, 'writing' | 'state'>,

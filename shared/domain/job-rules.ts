@@ -93,13 +93,17 @@ function breaksOfOrder(job: Loose): RuleBreak[] {
   });
 }
 
-function breaksOfReferences(job: Loose, world: JobWorld): RuleBreak[] {
+/** What a job names that the catalogue does not have. */
+export function breaksOfReferences(
+  job: object,
+  world: Pick<JobWorld, 'isProduct' | 'isPackage'>,
+): RuleBreak[] {
+  const { package: code, products }: Loose = { ...job };
   const breaks: RuleBreak[] = [];
-  const code = job['package'];
   if (typeof code === 'string' && !world.isPackage(code)) {
     breaks.push({ path: '/package', message: `no package has the code ${quoted(code)}` });
   }
-  arrayOf(job['products']).forEach((line, index) => {
+  arrayOf(products).forEach((line, index) => {
     const product = isObject(line) ? line['product'] : undefined;
     if (typeof product === 'string' && !world.isProduct(product)) {
       breaks.push({
