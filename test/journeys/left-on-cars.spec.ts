@@ -140,7 +140,7 @@ describe('rot left on a car', () => {
     await untilReady(page);
     await page.getByRole('button', { name: 'Void this job' }).click();
     await page.getByRole('dialog').getByRole('button', { name: /Void/ }).click();
-    await page.waitForURL((url) => !url.pathname.endsWith('left-2'));
+    await page.getByRole('button', { name: 'Bring it back' }).waitFor();
     await page.goto('/come-backs');
     await untilReady(page);
     await rowsOf(page, 'job left-1').filter({ hasText: 'sill, inner' }).waitFor();
