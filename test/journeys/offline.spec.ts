@@ -38,6 +38,10 @@ describe('sending a job on a bad line', () => {
     await page.getByRole('link', { name: /1 waiting to be sent, no line/ }).waitFor();
 
     await context.setOffline(false);
+    // It goes out from whichever page is open; leaving that one meanwhile would cut it off and send it anew.
+    await page
+      .getByRole('link', { name: /1 waiting to be sent|sending/ })
+      .waitFor({ state: 'hidden' });
     await page.goto('/send');
     await page.getByText('sent', { exact: true }).waitFor();
     const { body } = await jobOf('off-1');

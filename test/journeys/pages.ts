@@ -194,7 +194,12 @@ export function everyState({ rotten, corrected }: KnownJobs): Stop[] {
         await page.locator('us-removal us-trouble').waitFor();
       },
     },
-    { name: 'set-up-none', path: '/set-up/branches/NOWHERE', as: 'head_office' },
+    {
+      name: 'set-up-none',
+      path: '/set-up/branches/NOWHERE',
+      as: 'head_office',
+      refused: / 404 /,
+    },
     ...['network', 'region', 'branch', 'products', 'package', 'people', 'job'].map(
       (step): Stop => ({
         name: `first-run-${step}`,
