@@ -100,8 +100,8 @@ describe('a job pushed as the README shows', () => {
     const revisions = await readTable(manager.getByRole('table', { name: 'Revisions' }));
     expect(revisions.map(({ Revision, What, From }) => [Revision, What, From])).toEqual(
       expect.arrayContaining([
-        ['1', 'sent', 'a push key'],
-        ['2', 'corrected', 'a push key'],
+        ['1', 'sent', "the branch's system, by push key"],
+        ['2', 'corrected', "the branch's system, by push key"],
       ]),
     );
     expect(revisions).toHaveLength(2);
