@@ -34,7 +34,7 @@ import { SendField } from './send-field';
         <button
           type="button"
           class="us-action"
-          [attr.aria-label]="'Take off what was agreed, ' + ($index + 1)"
+          [attr.aria-label]="'Take it off: what was agreed, ' + ($index + 1)"
           (click)="remove($index)"
         >
           Take it off

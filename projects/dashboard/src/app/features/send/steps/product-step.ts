@@ -54,7 +54,11 @@ export class ProductStep {
   protected readonly answers: readonly Choice[] = CHECK_ANSWERS.map((value) => ({
     value,
     words: SHORT_ANSWERS[value],
-    name: CHECK_ANSWER_NAMES[value],
+    // What is seen comes first, for those who say it to a machine.
+    name:
+      SHORT_ANSWERS[value] === CHECK_ANSWER_NAMES[value]
+        ? SHORT_ANSWERS[value]
+        : `${SHORT_ANSWERS[value]}, ${CHECK_ANSWER_NAMES[value]}`,
   }));
 
   protected take({ path, offer }: ProductRow): void {
