@@ -31,7 +31,10 @@ export async function auditPage(page: Page, part: AuditPart = 'whole'): Promise<
  */
 export async function untilStill(page: Page): Promise<void> {
   await page.evaluate(async () => {
-    for (let still = 0; still < 3; still = document.getAnimations().length === 0 ? still + 1 : 0) {
+    // One that has ended is still listed while it holds its last state, as in a part that is folded away.
+    const moves = (): boolean =>
+      document.getAnimations().some(({ playState }) => playState === 'running');
+    for (let still = 0; still < 3; still = moves() ? 0 : still + 1) {
       await new Promise((drawn) => requestAnimationFrame(drawn));
     }
   });
