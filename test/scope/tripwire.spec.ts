@@ -113,7 +113,8 @@ const NAMED_BARE: Record<string, string> = {
   'restatement.ts': 'the whole network, before the switch',
   'under-way-writer.ts': 'one branch for life',
   'queries/bookings.ts': 'writes of one branch',
-  'queries/referrers.ts': 'how much of the network refers to a row of the catalogue, for head office',
+  'queries/referrers.ts':
+    'how much of the network refers to a row of the catalogue, for head office',
   'queries/set-up.ts': 'dated hourly costs, by head office',
   'queries/week-notes.ts': 'writes of one branch',
 };
