@@ -2,6 +2,7 @@
 export const SCOPED_TABLES = [
   'branch_rates',
   'bookings',
+  'claim_photos',
   'claims',
   'come_back_marks',
   'import_columns',

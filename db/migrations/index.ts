@@ -3,6 +3,7 @@ import * as network from './0001-network';
 import * as jobs from './0002-jobs';
 import * as underneath from './0003-underneath';
 import * as jobsByHand from './0004-jobs-by-hand';
+import * as warranty from './0005-warranty';
 
 interface Migration {
   name: string;
@@ -16,6 +17,7 @@ export const migrations: readonly Migration[] = [
   { name: '0002-jobs', ...jobs },
   { name: '0003-underneath', ...underneath },
   { name: '0004-jobs-by-hand', ...jobsByHand },
+  { name: '0005-warranty', ...warranty },
 ];
 
 /** Hands the list to knex without reading a folder, so that it is the same from source, tests and the built server. */

@@ -46,7 +46,7 @@ type Answer<O extends Output> = O extends z.ZodType
   ? z.input<O>
   : O extends 'nothing'
     ? undefined
-    : O extends 'image'
+    : O extends 'image' | 'pdf'
       ? Buffer
       : string;
 
@@ -244,6 +244,7 @@ async function send(
   if (typeof out === 'object') sendJson(response, out.parse(reply.body));
   else if (out === 'nothing') response.end();
   else if (out === 'image') response.type('image/jpeg').end(reply.body);
+  else if (out === 'pdf') response.type('application/pdf').end(reply.body);
   else response.type(out).send(reply.body);
 }
 

@@ -108,7 +108,9 @@ function successes(endpoint: Endpoint): Json {
         ? { 'text/csv': { schema: { type: 'string' } } }
         : endpoint.out === 'image'
           ? { 'image/jpeg': {} }
-          : undefined;
+          : endpoint.out === 'pdf'
+            ? { 'application/pdf': {} }
+            : undefined;
   return Object.fromEntries(
     endpoint.statuses.map((status) => [
       String(status),

@@ -13,13 +13,14 @@ import {
   reference,
   SENDERS,
 } from './fields';
-import { CLAIM_CAUSES, CLAIM_DECISIONS, ZONES } from '#shared/domain/vocabulary';
+import { CLAIM_CAUSES, CLAIM_DECISIONS, SIDES, ZONES } from '#shared/domain/vocabulary';
 
 /** A claim under warranty on an earlier job of the branch. */
 export const claimContent = z.strictObject({
   jobRef: reference,
   madeOn: date,
   zone: z.enum(ZONES),
+  side: z.enum(SIDES).optional(),
   cause: z.enum(CLAIM_CAUSES),
   decision: z.enum(CLAIM_DECISIONS),
   decidedOn: date.optional(),

@@ -18,7 +18,7 @@ const topic = 'Corrections';
 const value = z.union([z.string(), z.number(), z.boolean()]).nullable();
 
 /** Findings are matched by their reference, products and consumables by product and kind (the second of one is `CW1:2`), the rest by place. */
-const fieldChange = z.strictObject({
+export const fieldChange = z.strictObject({
   /** JSON pointer into the job; a list's item by its key: `/findings/sill_inner~1left~11/workedAs`. */
   path: z.string(),
   before: value,

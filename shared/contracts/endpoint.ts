@@ -12,8 +12,8 @@ export type Access = 'public' | { readonly roles: readonly Role[]; readonly push
  */
 export type EndpointScope = 'branches' | 'network-reference' | 'none';
 
-/** What leaves: a JSON schema, a streamed CSV, a page of HTML, an image, or nothing (204). */
-export type Output = z.ZodType | 'csv' | 'html' | 'image' | 'nothing';
+/** What leaves: a JSON schema, a streamed CSV, a page of HTML, an image, a PDF, or nothing (204). */
+export type Output = z.ZodType | 'csv' | 'html' | 'image' | 'pdf' | 'nothing';
 
 /** A body that is no JSON: the bytes of a JPEG or PNG, or a form with one file in its part `file`. */
 export type Upload = 'image' | 'file';
@@ -59,7 +59,7 @@ export type OutOf<E extends Endpoint> = E['out'] extends z.ZodType
   ? z.output<E['out']>
   : E['out'] extends 'nothing'
     ? undefined
-    : E['out'] extends 'image'
+    : E['out'] extends 'image' | 'pdf'
       ? Blob
       : string;
 

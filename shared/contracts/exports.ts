@@ -1,9 +1,11 @@
 import { comeBackQuery } from './come-back';
 import { defineEndpoint } from './endpoint';
-import { noParams, READERS, scopeQuery } from './fields';
+import { HEAD_OFFICE, noParams, READERS, scopeQuery } from './fields';
+import { claimsQuery } from './claim-list';
 import { jobsQuery } from './job-list';
 import { overrunQuery } from './overrun';
 import { quoteQuery } from './quote';
+import { warrantyQuery } from './warranty';
 
 const csv = {
   method: 'get',
@@ -99,4 +101,58 @@ export const exportComeBack = defineEndpoint({
   path: '/api/exports/come-back.csv',
   summary: 'The come-back list, one row a finding.',
   query: comeBackQuery.omit({ limit: true, cursor: true }),
+});
+
+/** Every claim of the jobs chosen, counted or not; from/to choose jobs by completion, as the warranty answer does (rule 62). */
+export const exportClaims = defineEndpoint({
+  ...csv,
+  path: '/api/exports/claims.csv',
+  summary: 'Claims as listed, one row a claim; from/to default to the first job … asOf.',
+  query: claimsQuery.omit({ limit: true, cursor: true }),
+});
+
+export const exportWarrantyRisk = defineEndpoint({
+  ...csv,
+  path: '/api/exports/warranty-risk.csv',
+  summary: 'The warranty-risk rows, one a branch and completion half-year (rule 51).',
+  access: HEAD_OFFICE,
+  scope: 'network-reference',
+  query: warrantyQuery.omit({ groupBy: true, group: true }),
+});
+
+export const exportWarrantyClaimFree = defineEndpoint({
+  ...csv,
+  path: '/api/exports/warranty-claim-free.csv',
+  summary: 'Claim-free shares by group and month, `group` empty for all cars together.',
+  query: warrantyQuery,
+});
+
+export const exportWarrantyCohorts = defineEndpoint({
+  ...csv,
+  path: '/api/exports/warranty-cohorts.csv',
+  summary: 'Paid and still to come, one row a completion half-year.',
+  scope: 'network-reference',
+  query: warrantyQuery,
+});
+
+export const exportWarrantyTriangle = defineEndpoint({
+  ...csv,
+  path: '/api/exports/warranty-triangle.csv',
+  summary: 'Paid up to each development half-year, one row a cohort and development half-year.',
+  query: warrantyQuery,
+});
+
+export const exportWarrantyBranches = defineEndpoint({
+  ...csv,
+  path: '/api/exports/warranty-branches.csv',
+  summary: 'Claims observed against expected, one row a branch.',
+  scope: 'network-reference',
+  query: warrantyQuery,
+});
+
+export const exportWarrantyProcess = defineEndpoint({
+  ...csv,
+  path: '/api/exports/warranty-process.csv',
+  summary: 'Risk of a claim with a process check missed against done, one row a check.',
+  query: warrantyQuery,
 });

@@ -2,6 +2,7 @@ import type { Endpoint } from './endpoint';
 import * as audit from './audit';
 import * as auth from './auth';
 import * as bookings from './bookings';
+import * as claimList from './claim-list';
 import * as claims from './claims';
 import * as comeBack from './come-back';
 import * as corrections from './corrections';
@@ -21,6 +22,8 @@ import * as setUpHelp from './set-up-help';
 import * as system from './system';
 import * as underWay from './under-way';
 import * as usual from './usual';
+import * as warranty from './warranty';
+import * as warrantyReports from './warranty-reports';
 import * as weeks from './weeks';
 
 /** Every call of the API: what is mounted, documented and walked by the tests. */
@@ -36,11 +39,14 @@ export const endpoints: readonly Endpoint[] = [
   imports,
   jobList,
   claims,
+  claimList,
   bookings,
   margin,
   overrun,
   rot,
   products,
+  warranty,
+  warrantyReports,
   comeBack,
   quote,
   usual,

@@ -1,5 +1,6 @@
 import * as z from 'zod';
 import { defineEndpoint } from './endpoint';
+import { claimParams } from './claims';
 import { EVERYONE, noQuery, reference, SENDERS } from './fields';
 
 /** Largest photo taken, in bytes. */
@@ -74,6 +75,68 @@ export const removePhoto = defineEndpoint({
   access: { ...SENDERS, pushKey: false },
   scope: 'branches',
   params,
+  query: noQuery,
+  body: null,
+  out: 'nothing',
+  statuses: [204],
+});
+
+/** A photo of a claim. */
+export const claimPhoto = photo.omit({ finding: true });
+export type ClaimPhoto = z.output<typeof claimPhoto>;
+
+const claimPhotoParams = claimParams.extend({ photo: reference });
+
+export const putClaimPhoto = defineEndpoint({
+  method: 'put',
+  path: '/api/branches/:branch/claims/:claimRef/photos/:photo',
+  topic: 'Photos',
+  summary: 'Send a photo (JPEG or PNG, at most 10 MB) of a claim. Kept without metadata.',
+  access: SENDERS,
+  scope: 'branches',
+  params: claimPhotoParams,
+  query: noQuery,
+  body: 'image',
+  out: claimPhoto,
+  statuses: [201, 200],
+});
+
+export const listClaimPhotos = defineEndpoint({
+  method: 'get',
+  path: '/api/branches/:branch/claims/:claimRef/photos',
+  topic: 'Photos',
+  summary: 'The photos of a claim.',
+  access: EVERYONE,
+  scope: 'branches',
+  params: claimParams,
+  query: noQuery,
+  body: null,
+  out: z.strictObject({ items: z.array(claimPhoto) }),
+  statuses: [200],
+});
+
+export const getClaimPhoto = defineEndpoint({
+  method: 'get',
+  path: '/api/branches/:branch/claims/:claimRef/photos/:photo',
+  topic: 'Photos',
+  summary: 'A photo of a claim as JPEG, whole or small.',
+  access: EVERYONE,
+  scope: 'branches',
+  params: claimPhotoParams,
+  query: z.strictObject({ size: z.enum(['small', 'whole']).default('whole') }),
+  body: null,
+  out: 'image',
+  statuses: [200],
+});
+
+export const removeClaimPhoto = defineEndpoint({
+  method: 'delete',
+  path: '/api/branches/:branch/claims/:claimRef/photos/:photo',
+  topic: 'Photos',
+  summary: 'Take a photo off a claim.',
+  access: { ...SENDERS, pushKey: false },
+  scope: 'branches',
+  params: claimPhotoParams,
   query: noQuery,
   body: null,
   out: 'nothing',

@@ -2,6 +2,7 @@ import { mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { askModule } from '../support/ask-module';
+import { benchImports } from './imports';
 import { benchIngest } from './ingest';
 import { benchPage } from './page';
 import { benchReads } from './reads';
@@ -10,7 +11,7 @@ import { benchUnderneath } from './underneath';
 
 const FIND_CHROMIUM = join(__dirname, '..', 'support', 'find-chromium.mjs');
 
-/** `npm run bench [ingest] [reads] [underneath] [page]`: compares ours with a yardstick in one run; without names, everything. */
+/** `npm run bench [ingest] [imports] [reads] [underneath] [page]`: compares ours with a yardstick in one run; without names, everything. */
 async function main(): Promise<void> {
   const asked = process.argv.slice(2);
   const jobs = Number(process.env['BENCH_JOBS'] ?? 100_000);
@@ -19,6 +20,7 @@ async function main(): Promise<void> {
   const folder = mkdtempSync(join(tmpdir(), 'underseam-bench-'));
   const benches: Record<string, () => Promise<Line[]>> = {
     ingest: () => benchIngest(folder, 5_000, today),
+    imports: () => benchImports(folder, Number(process.env['BENCH_ROWS'] ?? 200_000), today),
     reads: () => benchReads(folder, jobs, today),
     underneath: () => benchUnderneath(folder, sizes, today),
     page: async () => {

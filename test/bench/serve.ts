@@ -5,6 +5,7 @@ import { join } from 'node:path';
 /** The built server as a process of its own on a data folder. */
 export interface Served {
   url: string;
+  pid?: number | undefined;
   stop: () => Promise<void>;
 }
 
@@ -42,6 +43,7 @@ export async function serve(
   process.once('exit', end);
   return {
     url,
+    pid: child.pid,
     stop: async () => {
       process.off('exit', end);
       if (child.exitCode !== null) return;

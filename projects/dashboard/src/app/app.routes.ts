@@ -68,6 +68,36 @@ export const routes: Routes = [
         loadChildren: () => import('./features/product/product.routes'),
       },
       {
+        path: 'warranty',
+        pathMatch: 'full',
+        title: 'Warranty',
+        canActivate: [readers],
+        loadChildren: () => import('./features/warranty/warranty.routes'),
+      },
+      {
+        path: 'warranty/reports',
+        title: 'Warranty-risk report',
+        canActivate: [headOffice],
+        loadChildren: () => import('./features/warranty-report/warranty-report.routes'),
+      },
+      {
+        path: 'claims',
+        pathMatch: 'full',
+        title: 'Claims',
+        loadChildren: () => import('./features/claims/claims.routes'),
+      },
+      {
+        path: 'claims/:branch/:claimRef',
+        title: 'Claim',
+        loadChildren: () => import('./features/claim/claim.routes'),
+      },
+      {
+        path: 'jobs/:branch/:jobRef/claim',
+        title: 'Record a claim',
+        canActivate: [senders],
+        loadChildren: () => import('./features/claim/new-claim.routes'),
+      },
+      {
         path: 'jobs',
         title: 'Jobs',
         loadChildren: () => import('./features/jobs/jobs.routes'),

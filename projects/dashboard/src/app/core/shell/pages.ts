@@ -15,10 +15,12 @@ const SENDERS: readonly Role[] = ['recorder', 'site_manager', 'head_office'];
 /** The pages there are, in the order in which they are read. */
 export const PAGES: readonly Page[] = [
   { path: '/send', name: 'Send a job', roles: ['recorder'] },
+  { path: '/warranty', name: 'Warranty', roles: ['head_office'] },
   { path: '/this-week', name: 'This week', roles: READERS },
   { path: '/overruns', name: 'Overruns', roles: READERS },
   { path: '/rot', name: 'Rot', roles: READERS },
   { path: '/product', name: 'Product', roles: READERS },
+  { path: '/warranty', name: 'Warranty', roles: ['site_manager', 'regional_lead'] },
   { path: '/jobs', name: 'Jobs', roles: [...READERS, 'recorder'] },
   { path: '/send', name: 'Send a job', roles: SENDERS.filter((role) => role !== 'recorder') },
   { path: '/come-backs', name: 'Come-backs', roles: READERS },

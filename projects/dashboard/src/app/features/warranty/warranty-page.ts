@@ -1,0 +1,8 @@
+import { ChangeDetectionStrategy, Component } from '@angular/core';
+
+@Component({
+  selector: 'us-warranty-page',
+  template: '',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
+export class WarrantyPage {}
