@@ -11,7 +11,7 @@ const TABLES = [
   'job_consumables',
   'job_extras',
 ];
-const NETWORK = ['regions', 'branches', 'products', 'packages', 'push_keys'];
+const NETWORK = ['regions', 'branches', 'products', 'packages', 'people', 'push_keys'];
 
 type Row = (string | number | null)[];
 
