@@ -1,17 +1,12 @@
 import type { JobSheet } from '#shared/contracts/jobs';
 import { isLeftDangerous } from '#shared/domain/danger';
+import type { Danger } from '../../ui/caution/dangers';
 import { SIDE_NAMES } from '../../ui/words';
-
-/** A caution that the owner takes home. */
-export interface HandedCaution {
-  readonly danger: string;
-  readonly words: string;
-}
 
 type Finding = NonNullable<JobSheet['findings']>[number];
 
 /** What the owner has to know before driving off, the gravest first. Common practice, no source. */
-export function handedCautions(findings: readonly Finding[]): readonly HandedCaution[] {
+export function handedCautions(findings: readonly Finding[]): readonly Danger[] {
   const rottenPoints = findings.filter(
     (one) => one.zone === 'jacking_point' && one.action !== 'patched' && isLeftDangerous(one),
   );
@@ -24,28 +19,28 @@ export function handedCautions(findings: readonly Finding[]): readonly HandedCau
   ];
 }
 
-const LEFT: HandedCaution = {
+const LEFT: Danger = {
   danger: 'Not repaired, load-bearing',
   words:
     'The places marked with a triangle carry load and are rusted. The car may not be fit for the road: have them inspected and repaired by a competent and, where required, licensed person before it is relied on. The local inspection rules decide.',
 };
-const REPAIRED: HandedCaution = {
+const REPAIRED: Danger = {
   danger: 'Load-bearing repair',
   words:
     'Whether the repair of a load-bearing place is enough is decided by the local inspection rules; have it inspected where they ask for it.',
 };
-const FRESH_WAX: HandedCaution = {
+const FRESH_WAX: Danger = {
   danger: 'Fresh wax burns',
   words:
     'It smells and may drip for some days: air the car, and keep flames, sparks, welding and great heat away until it is dry. Tell any workshop that is to weld on this car.',
 };
-const BRAKES: HandedCaution = {
+const BRAKES: Danger = {
   danger: 'Brakes',
   words:
     'Work was done around them. Try them before driving off and gently on the first metres. If something seems off, stop, do not drive on, and call the workshop.',
 };
 
-function lifting(points: readonly Finding[]): HandedCaution {
+function lifting(points: readonly Finding[]): Danger {
   const sides = [...new Set(points.map(({ side }) => SIDE_NAMES[side]))].join(' and ');
   return {
     danger: 'Lifting',

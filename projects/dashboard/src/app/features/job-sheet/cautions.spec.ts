@@ -27,7 +27,7 @@ describe('cautionsOf', () => {
   it('of a structural patch asks for a competent person', () => {
     expect(dangers(job([finding({ action: 'patched', workedAs: 'holed' })]))).toEqual([
       'Fire',
-      'Structural repair',
+      'Load-bearing repair',
     ]);
   });
 
