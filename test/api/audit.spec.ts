@@ -1,5 +1,6 @@
 import { parse } from 'csv-parse/sync';
 import { TestApp, type Answer } from '../support/app';
+import { callAs } from '../support/call-as';
 import { makeSmallNetwork, validJob, type SmallNetwork } from '../support/small-network';
 
 jest.setTimeout(60_000);
@@ -24,12 +25,10 @@ beforeAll(async () => {
 });
 afterAll(() => app.stop());
 
-const call = (
-  method: string,
-  path: string,
-  body?: unknown,
-  token = network.office,
-): Promise<Answer> => app.call(method, path, { token, ...(body !== undefined && { body }) });
+const { call } = callAs(
+  () => app,
+  () => network.office,
+);
 const list = async (query = ''): Promise<Event[]> => {
   const answer = await call('get', `/api/audit${query}`);
   expect([query, answer.status]).toEqual([query, 200]);

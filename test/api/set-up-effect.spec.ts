@@ -1,5 +1,6 @@
 import type { Effect, PlannedChange } from '#shared/contracts/set-up-help';
-import { TestApp, type Answer } from '../support/app';
+import { TestApp } from '../support/app';
+import { callAs } from '../support/call-as';
 import { makeCostedNetwork } from '../support/costed-cars';
 import type { SmallNetwork } from '../support/small-network';
 
@@ -13,18 +14,10 @@ beforeAll(async () => {
 });
 afterAll(() => app.stop());
 
-const call = (
-  method: string,
-  path: string,
-  body?: unknown,
-  token = network.office,
-): Promise<Answer> => app.call(method, path, { token, ...(body !== undefined && { body }) });
-async function put(path: string, body: unknown): Promise<Answer> {
-  const answer = await call('put', path, body);
-  if (answer.status >= 300) throw new Error(`${path}: ${answer.text}`);
-  return answer;
-}
-const get = async (path: string): Promise<Answer['body']> => (await call('get', path)).body;
+const { call, put, get } = callAs(
+  () => app,
+  () => network.office,
+);
 const effectOf = async (change: PlannedChange): Promise<Effect> => {
   const answer = await call('post', '/api/set-up/effect', { change });
   expect(answer.status).toBe(200);

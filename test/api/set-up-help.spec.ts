@@ -1,4 +1,5 @@
-import { TestApp, type Answer } from '../support/app';
+import { TestApp } from '../support/app';
+import { callAs } from '../support/call-as';
 import { makeCostedNetwork } from '../support/costed-cars';
 import { validJob, type SmallNetwork } from '../support/small-network';
 
@@ -12,18 +13,10 @@ beforeAll(async () => {
 });
 afterAll(() => app.stop());
 
-const call = (
-  method: string,
-  path: string,
-  body?: unknown,
-  token = network.office,
-): Promise<Answer> => app.call(method, path, { token, ...(body !== undefined && { body }) });
-async function put(path: string, body: unknown): Promise<Answer> {
-  const answer = await call('put', path, body);
-  if (answer.status >= 300) throw new Error(`${path}: ${answer.text}`);
-  return answer;
-}
-const get = async (path: string): Promise<Answer['body']> => (await call('get', path)).body;
+const { call, put, get } = callAs(
+  () => app,
+  () => network.office,
+);
 describe('The medians to take a norm from', () => {
   it('given five cars and more, tells median, P10 and P90 of what the cars list', async () => {
     const { body } = await call('get', '/api/packages/cavity/norms/hatchback/medians');
