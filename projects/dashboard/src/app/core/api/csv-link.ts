@@ -1,50 +1,28 @@
-import {
-  ChangeDetectionStrategy,
-  Component,
-  DestroyRef,
-  DOCUMENT,
-  inject,
-  input,
-  signal,
-} from '@angular/core';
-import type { Subscription } from 'rxjs';
+import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import type { Endpoint } from '#shared/contracts/endpoint';
-import { formatNumber } from '../../ui/format';
-import { saveFile } from '../../ui/save-file';
-import { Trouble } from '../../ui/trouble/trouble';
-import { Api, type RequestOf } from './api';
-import { describeProblem } from './problem';
+import { FileLink } from './file-link';
 
 /** Words that fetch the rows of a table as a CSV file: "CSV of these 11 rows". Says how far it is and can be cancelled. */
 @Component({
   selector: 'us-csv-link',
-  imports: [Trouble],
+  imports: [FileLink],
   template: `
-    @if (bytes() === undefined) {
-      <button type="button" class="us-action us-unprinted" (click)="fetch()">{{ words() }}</button>
-    } @else {
-      <span class="us-small" role="status">{{ comingWords() }}</span>
-      <button type="button" class="us-action" (click)="cancel()">Cancel</button>
-    }
-    @if (sentence(); as said) {
-      <us-trouble role="alert">{{ said }}</us-trouble>
-    }
+    <us-file-link
+      [endpoint]="endpoint()"
+      [query]="query()"
+      [params]="params()"
+      [words]="words()"
+      [name]="name()"
+    />
   `,
   styles: `
     :host {
       display: inline-flex;
-      flex-wrap: wrap;
-      align-items: baseline;
-      gap: 4px 12px;
     }
   `,
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class CsvLink {
-  private readonly api = inject(Api);
-  private readonly document = inject(DOCUMENT);
-  private running: Subscription | undefined;
-
   readonly endpoint = input.required<Endpoint>();
   /** The filters of the screen, so that the file holds exactly its rows. */
   readonly query = input<Readonly<Record<string, unknown>>>({});
@@ -52,44 +30,7 @@ export class CsvLink {
   readonly params = input<Readonly<Record<string, unknown>>>();
   readonly words = input.required<string>();
 
-  protected readonly bytes = signal<number | undefined>(undefined);
-  protected readonly sentence = signal<string | undefined>(undefined);
-
-  constructor() {
-    inject(DestroyRef).onDestroy(() => this.running?.unsubscribe());
-  }
-
-  protected comingWords(): string {
-    const bytes = this.bytes() ?? 0;
-    return bytes === 0 ? 'Being written' : `${formatNumber(bytes / 1e6, 1)} MB so far`;
-  }
-
-  protected fetch(): void {
-    this.bytes.set(0);
-    this.sentence.set(undefined);
-    const request = { params: this.params(), query: this.query() } as RequestOf<Endpoint>;
-    this.running = this.api.download(this.endpoint(), request).subscribe({
-      next: (step) => (step.kind === 'coming' ? this.bytes.set(step.bytes) : this.save(step.file)),
-      error: (error: unknown) => {
-        this.bytes.set(undefined);
-        const problem = describeProblem(error);
-        this.sentence.set(
-          problem.status === 0 || problem.status === 200
-            ? 'The file broke off on the way, so nothing was saved. Try again.'
-            : problem.sentence,
-        );
-      },
-      complete: () => this.bytes.set(undefined),
-    });
-  }
-
-  protected cancel(): void {
-    this.running?.unsubscribe();
-    this.bytes.set(undefined);
-  }
-
-  private save(file: Blob): void {
-    const name = this.endpoint().path.split('/').at(-1) ?? 'rows.csv';
-    saveFile(this.document, `underseam-${name}`, file);
-  }
+  protected readonly name = computed(
+    () => `underseam-${this.endpoint().path.split('/').at(-1) ?? 'rows.csv'}`,
+  );
 }
