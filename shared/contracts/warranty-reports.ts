@@ -30,8 +30,10 @@ export const warrantyRiskRow = z.strictObject({
   upper: share,
   expected: z.number(),
   ratio: share,
-  outstandingCents: centsSum,
+  /** Null for a half-year that was not over on the evaluation day: nothing of it has been paid by then (rule 18). */
+  outstandingCents: centsSum.nullable(),
   standardErrorCents: centsSum.nullable(),
+  /** Counted claims that were not decided on the report's day. */
   claimsOpen: z.int(),
 });
 export type WarrantyRiskRow = z.output<typeof warrantyRiskRow>;

@@ -39,6 +39,7 @@ export const claimRate = z.strictObject({
 export const claimFreeMonth = z.strictObject({
   month: z.int(),
   atRisk: z.int(),
+  /** Cars whose first claim fell in the month. */
   claims: z.int(),
   /** Share of cars still without a claim at the end of the month; null while fewer than 5 were at risk. */
   share,
@@ -49,6 +50,7 @@ export type ClaimFreeMonth = z.output<typeof claimFreeMonth>;
 export const claimFreeGroup = z.strictObject({
   key: z.string(),
   cars: z.int(),
+  /** Cars with a claim: what the months' claims add up to. */
   claims: z.int(),
   months: z.array(claimFreeMonth),
 });
