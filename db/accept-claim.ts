@@ -74,18 +74,21 @@ function normaliseClaim(
   stored: RecordedClaim | undefined,
   role: Role,
 ): RecordedClaim {
-  const cost = sent.costCents ?? (role === 'recorder' ? stored?.costCents : undefined);
+  const keeps = role === 'recorder' ? stored : undefined;
+  const cost = sent.costCents ?? keeps?.costCents;
+  const { decidedOn = keeps?.decidedOn, paidOn = keeps?.paidOn } = sent;
   return {
     jobRef: sent.jobRef,
     madeOn: sent.madeOn,
     zone: sent.zone,
+    ...(sent.side !== undefined && { side: sent.side }),
     cause: sent.cause,
     decision: sent.decision,
-    ...(sent.decidedOn !== undefined && { decidedOn: sent.decidedOn }),
+    ...(decidedOn !== undefined && { decidedOn }),
     ...(sent.labourMinutes > 0 && { labourMinutes: sent.labourMinutes }),
     ...(sent.productMl > 0 && { productMl: sent.productMl }),
     ...(cost !== undefined && cost > 0 && { costCents: cost }),
-    ...(sent.paidOn !== undefined && { paidOn: sent.paidOn }),
+    ...(paidOn !== undefined && { paidOn }),
     ...(sent.note && { note: sent.note.normalize('NFC') }),
   };
 }
@@ -111,6 +114,9 @@ function decided(
         'A recorder leaves a claim open or as it was decided; the site manager decides it.',
       );
     }
+    if (redated(sent, stored?.content)) {
+      throw new Refusal('forbidden', 'When a claim was decided and paid is not for recorders.');
+    }
     const content = { ...sent, decision: stored?.content.decision ?? 'open' };
     const waiting = stored?.proposed ?? (raised && before !== 'open' ? before : null);
     return kept(content, standing, waiting);
@@ -118,6 +124,12 @@ function decided(
   if (!above) return kept(sent, sent.decision, null);
   const asks = sent.decision !== 'open' && sent.decision !== standing;
   return kept(sent, standing, asks ? sent.decision : null);
+}
+
+/** Whether a claim that was decided, or proposed to be, has other days of it. */
+function redated(sent: RecordedClaim, stored: RecordedClaim | undefined): boolean {
+  if (!stored || stored.decision === 'open') return false;
+  return sent.decidedOn !== stored.decidedOn || sent.paidOn !== stored.paidOn;
 }
 
 function kept(

@@ -1,5 +1,6 @@
 import { tellRevision, type SentRevision } from '#shared/domain/preconditions';
-import type { ClaimCause, ClaimDecision, Zone } from '#shared/domain/vocabulary';
+import { folded } from '#shared/domain/recorded-job';
+import type { ClaimCause, ClaimDecision, Side, Zone } from '#shared/domain/vocabulary';
 import type { Receipt } from './branch-writer';
 import type { Connection } from './database';
 import { recordAudit } from './queries/audit';
@@ -12,6 +13,7 @@ export interface RecordedClaim {
   jobRef: string;
   madeOn: string;
   zone: Zone;
+  side?: Side;
   cause: ClaimCause;
   /** As sent; what counts is `StoredClaim.decision`. */
   decision: ClaimDecision;
@@ -30,6 +32,9 @@ export interface StoredClaim {
   decision: ClaimDecision;
   /** One above the claim limit that waits for head office (rule 77). */
   proposed: ClaimDecision | null;
+  /** When the decision that counts was taken and paid; those of a proposal wait with it. */
+  decidedOn: string | null;
+  paidOn: string | null;
   content: RecordedClaim;
   text: string;
 }
@@ -46,6 +51,8 @@ interface ClaimRow {
   revision: number;
   decision: ClaimDecision;
   proposed_decision: ClaimDecision | null;
+  decided_on: string | null;
+  paid_on: string | null;
   content: string;
 }
 
@@ -63,7 +70,8 @@ export class ClaimWriter {
   findClaim(claimRef: string): StoredClaim | undefined {
     const row = this.connection
       .prepare(
-        `select claims.id, claims.revision, decision, proposed_decision, content from claims
+        `select claims.id, claims.revision, claims.decision, claims.proposed_decision, decided_on,
+          paid_on, content from claims
           join claim_revisions on claim_id = claims.id and claim_revisions.revision = claims.revision
           where branch_id = ? and claim_ref = ?`,
       )
@@ -74,6 +82,8 @@ export class ClaimWriter {
         revision: row.revision,
         decision: row.decision,
         proposed: row.proposed_decision,
+        decidedOn: row.decided_on,
+        paidOn: row.paid_on,
         content: JSON.parse(row.content) as RecordedClaim,
         text: row.content,
       }
@@ -120,27 +130,29 @@ export class ClaimWriter {
       revision,
       content.madeOn,
       content.zone,
+      content.side ?? null,
       content.cause,
       claim.decision,
       claim.proposed,
-      content.decidedOn ?? null,
+      ...datesThatCount(stored, claim),
       content.labourMinutes ?? 0,
       content.productMl ?? 0,
       content.costCents ?? 0,
-      // What waits for head office is not paid yet, whatever the branch's books say.
-      claim.decision === 'open' ? null : (content.paidOn ?? null),
     ];
     const id = stored ? this.update(stored.id, values) : this.insert(claimRef, values);
     this.connection
       .prepare(
         `insert into claim_revisions
-          (claim_id, revision, content, received_at, source, person_id, push_key_id)
-          values (?, ?, ?, ?, ?, ?, ?)`,
+          (claim_id, revision, content, decision, proposed_decision, received_at, source, person_id,
+            push_key_id)
+          values (?, ?, ?, ?, ?, ?, ?, ?, ?)`,
       )
       .run(
         id,
         revision,
         claim.text,
+        claim.decision,
+        claim.proposed,
         receipt.receivedAt,
         receipt.source,
         receipt.actor.personId,
@@ -166,22 +178,33 @@ export class ClaimWriter {
   private insert(claimRef: string, values: unknown[]): number {
     const { lastInsertRowid } = this.connection
       .prepare(
-        `insert into claims (branch_id, claim_ref, job_id, revision, made_on, zone, cause, decision,
-          proposed_decision, decided_on, labour_minutes, product_ml, cost_cents, paid_on)
-          values (?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?)`,
+        `insert into claims (branch_id, claim_ref, search_text, job_id, revision, made_on, zone, side,
+          cause, decision, proposed_decision, decided_on, paid_on, labour_minutes, product_ml, cost_cents)
+          values (?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?, ?)`,
       )
-      .run(this.branch.id, claimRef, ...values);
+      .run(this.branch.id, claimRef, folded(claimRef), ...values);
     return Number(lastInsertRowid);
   }
 
   private update(id: number, values: unknown[]): number {
     this.connection
       .prepare(
-        `update claims set job_id = ?, revision = ?, made_on = ?, zone = ?, cause = ?, decision = ?,
-          proposed_decision = ?, decided_on = ?, labour_minutes = ?, product_ml = ?, cost_cents = ?,
-          paid_on = ? where id = ?`,
+        `update claims set job_id = ?, revision = ?, made_on = ?, zone = ?, side = ?, cause = ?,
+          decision = ?, proposed_decision = ?, decided_on = ?, paid_on = ?, labour_minutes = ?,
+          product_ml = ?, cost_cents = ? where id = ?`,
       )
       .run(...values, id);
     return id;
   }
+}
+
+/** Day of decision and of payment, in the order of the columns: what waits for head office is neither, whatever the branch's books say. */
+function datesThatCount(
+  stored: StoredClaim | undefined,
+  { content, decision }: DecidedClaim,
+): [decidedOn: string | null, paidOn: string | null] {
+  if (decision === 'open') return [null, null];
+  // The branch says otherwise: the decision that stands keeps its days.
+  if (decision !== content.decision) return [stored?.decidedOn ?? null, stored?.paidOn ?? null];
+  return [content.decidedOn ?? null, content.paidOn ?? null];
 }

@@ -1,7 +1,17 @@
 import type { Knex } from 'knex';
 import { appendOnly, neverReplaced } from './append-only';
 
-/** Photos of claims, issued warranty reports, and the schedule that issues them. */
+/** A text of the trail about the claim of a revision of `claim_revisions`, one that names that revision. */
+const TOLD_OF_REVISION = `from audit_events e
+  join claims c on c.id = claim_revisions.claim_id
+  join branches b on b.id = c.branch_id
+  where e.subject = '/branches/' || b.code || '/claims/' || c.claim_ref collate nocase
+    and e.subject = '/branches/' || b.code || '/claims/' || c.claim_ref
+    and e.action in ('claim.make', 'claim.correct')
+    and json_extract(e.detail, '$.revision') = claim_revisions.revision
+  order by e.id desc limit 1`;
+
+/** Photos of claims, what each revision of a claim decided, issued warranty reports, and the schedule that issues them. */
 export async function up(knex: Knex): Promise<void> {
   await run(
     knex,
@@ -51,9 +61,41 @@ export async function up(knex: Knex): Promise<void> {
       report_id integer not null references warranty_reports (id)
     ) strict, without rowid`,
     `alter table mails add column report_run text references warranty_runs (month)`,
+    `alter table claims add column side text`,
+    // Of the reference: what a search looks into, without regard to case.
+    `alter table claims add column search_text text not null default ''`,
+    // What counted from a revision on: what it says itself may have been a proposal only (rule 77).
+    `alter table claim_revisions add column decision text not null default 'open'`,
+    `alter table claim_revisions add column proposed_decision text`,
+    'drop trigger claim_revisions_no_update',
+    `update claim_revisions set
+      decision = coalesce((select json_extract(e.detail, '$.decision') ${TOLD_OF_REVISION}),
+        json_extract(content, '$.decision')),
+      proposed_decision = (select json_extract(e.detail, '$.proposed') ${TOLD_OF_REVISION})`,
+    appendOnly('claim_revisions', 'update'),
+    // A decision that waits has no day yet.
+    `update claims set decided_on = null where decision = 'open'`,
     `create index claims_by_branch_day on claims (branch_id, made_on)`,
     `create index claim_revisions_received on claim_revisions (received_at)`,
   );
+  await fillSearchTexts(knex);
+}
+
+async function fillSearchTexts(knex: Knex): Promise<void> {
+  const claims: { id: number; claim_ref: string }[] = await knex('claims').select(
+    'id',
+    'claim_ref',
+  );
+  for (const { id, claim_ref } of claims) {
+    await knex('claims')
+      .where({ id })
+      .update({ search_text: folded(claim_ref) });
+  }
+}
+
+/** As the record folds a text with this migration. */
+function folded(text: string): string {
+  return text.normalize('NFC').trim().replace(/\s+/gu, ' ').toLowerCase();
 }
 
 /** Migrations only go forward. */

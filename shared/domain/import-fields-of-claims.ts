@@ -1,5 +1,5 @@
 import { importField, type ImportField } from './import-field';
-import { CLAIM_CAUSES, CLAIM_DECISIONS, ZONES } from './vocabulary';
+import { CLAIM_CAUSES, CLAIM_DECISIONS, SIDES, ZONES } from './vocabulary';
 
 /** What a column of a file of claims may fill. */
 export const CLAIM_FIELDS: readonly ImportField[] = [
@@ -31,6 +31,13 @@ export const CLAIM_FIELDS: readonly ImportField[] = [
     required: true,
     choices: ZONES,
     names: ['place'],
+  }),
+  importField({
+    field: 'side',
+    label: 'Side',
+    kind: 'choice',
+    choices: SIDES,
+    names: ['left or right'],
   }),
   importField({
     field: 'cause',

@@ -9,6 +9,7 @@ export function bodyOfClaim(row: ReadRow, stored: RecordedClaim | undefined): Ro
     'jobRef',
     'madeOn',
     'zone',
+    'side',
     'cause',
     'decision',
     'decidedOn',
