@@ -198,7 +198,12 @@ export const getCatalogue = defineEndpoint({
   query: noQuery,
   body: null,
   out: z.strictObject({
-    network: z.strictObject({ name: z.string(), currency }),
+    network: z.strictObject({
+      name: z.string(),
+      currency,
+      /** Above it head office decides a claim (rule 77), null: no limit. Absent for recorders. */
+      claimLimitCents: cents.nullable().optional(),
+    }),
     regions: z.array(region),
     branches: z.array(branch),
     packages: z.array(packageRow),

@@ -208,6 +208,13 @@ describe('GET of the catalogue and of costs (rule 79)', () => {
     expect(await seen(network.lead)).toEqual([['COAST'], ['AAA', 'BBB'], packages]);
   });
 
+  it('given a recorder, leaves out the limit above which head office decides a claim; others read it', async () => {
+    const read = async (token: string): Promise<object> =>
+      ((await get('/api/catalogue', token)) as { network: object }).network;
+    expect(await read(network.recorder)).not.toHaveProperty('claimLimitCents');
+    expect(await read(network.manager)).toHaveProperty('claimLimitCents');
+  });
+
   it('given a region without a branch, shows it to head office, who may put the first there, and to nobody else', async () => {
     await put('/api/regions/EMPTY', { name: 'Empty' });
     const seen = async (token: string): Promise<string[]> => {

@@ -6,6 +6,7 @@ import * as contract from '#shared/contracts/set-up';
 import { FROM_THE_START } from '#shared/domain/cost-book';
 import { feeRateMicros } from '#shared/domain/money';
 import type { BodyType } from '#shared/domain/vocabulary';
+import { moneyFor } from '../../auth/caller';
 import { todayIn } from '../../clock';
 import { mount, type Mounting } from '../../http/mount';
 import type { Kit } from '../../kit';
@@ -45,10 +46,11 @@ export function mountNetwork(mounting: Mounting, kit: Kit): void {
 
   mount(mounting, contract.getCatalogue, (call) => {
     const { regions, branches } = call.scope.echo();
-    const { name, currency } = readNetwork(store.unscoped);
+    const { name, currency, claimLimitCents } = readNetwork(store.unscoped);
+    const limit = moneyFor(call.caller) === 'seen' ? { claimLimitCents } : {};
     return {
       body: {
-        network: { name, currency },
+        network: { name, currency, ...limit },
         // A region is set up before its first branch, and must be there to be chosen for it.
         regions: call.scope.ofNetwork
           ? catalogue.listAllRegions(store.unscoped)
