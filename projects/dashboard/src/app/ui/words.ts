@@ -3,6 +3,8 @@ import type {
   BodyType,
   Check,
   CheckAnswer,
+  ClaimCause,
+  ClaimDecision,
   ComeBackStatus,
   Condition,
   ConsumableKind,
@@ -76,6 +78,21 @@ export const COME_BACK_STATUS_NAMES: Readonly<Record<ComeBackStatus, string>> = 
   booked: 'booked in',
   done: 'done',
   gone: 'car is gone',
+};
+
+export const CLAIM_CAUSE_NAMES: Readonly<Record<ClaimCause, string>> = {
+  missed_area: 'missed area',
+  thin_coverage: 'too thin a coat',
+  damage: 'damaged since',
+  drain_blocked: 'drain hole blocked',
+  not_covered: 'not covered',
+};
+
+export const CLAIM_DECISION_NAMES: Readonly<Record<ClaimDecision, string>> = {
+  open: 'open',
+  accepted: 'accepted',
+  goodwill: 'goodwill',
+  refused: 'refused',
 };
 
 export const BODY_TYPE_NAMES: Readonly<Record<BodyType, string>> = {

@@ -2,6 +2,8 @@ import {
   ACTION_NAMES,
   BODY_TYPE_NAMES,
   CHECK_ANSWER_NAMES,
+  CLAIM_CAUSE_NAMES,
+  CLAIM_DECISION_NAMES,
   COME_BACK_STATUS_NAMES,
   CONDITION_NAMES,
   CONSUMABLE_NAMES,
@@ -24,6 +26,9 @@ const BY_NAME: Readonly<Record<string, Readonly<Record<string, string>>>> = {
   role: ROLE_NAMES,
   status: COME_BACK_STATUS_NAMES,
   source: SOURCE_NAMES,
+  cause: CLAIM_CAUSE_NAMES,
+  decision: CLAIM_DECISION_NAMES,
+  proposedDecision: CLAIM_DECISION_NAMES,
 };
 
 /** The word for a code by the field it stands in, or `undefined` where the field holds no code. */
@@ -44,9 +49,6 @@ export function enumWords(
     case 'region':
     case 'regions':
       return known.regionName(value);
-    case 'cause':
-    case 'decision':
-      return value.replaceAll('_', ' ');
   }
   return names[0] === 'checks' ? own(CHECK_ANSWER_NAMES, value) : own(BY_NAME[name], value);
 }

@@ -35,6 +35,7 @@ const FIELD_NAMES: Readonly<Record<string, string>> = {
   ownerToldOn: 'owner told',
   dueOn: 'due',
   decidedOn: 'decided',
+  proposedDecision: 'proposed to head office',
   madeOn: 'made',
   paidOn: 'paid',
   costCents: 'cost',
