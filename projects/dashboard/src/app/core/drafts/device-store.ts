@@ -1,5 +1,6 @@
 import { Injectable, signal } from '@angular/core';
 import { type DBSchema, type IDBPDatabase, openDB } from 'idb';
+import type { ClaimDraft } from './claim-draft';
 import type { DeviceDraft } from './device-draft';
 import type { QueuedJob } from './queued-job';
 
@@ -13,15 +14,17 @@ interface Kept {
   drafts: DeviceDraft;
   photos: KeptPhoto;
   queue: QueuedJob;
+  claims: ClaimDraft;
 }
 type Store = keyof Kept;
 interface Schema extends DBSchema {
   drafts: { key: string; value: DeviceDraft };
   photos: { key: string; value: KeptPhoto };
   queue: { key: string; value: QueuedJob };
+  claims: { key: string; value: ClaimDraft };
 }
 
-const STORES = ['drafts', 'photos', 'queue'] as const;
+const STORES = ['drafts', 'photos', 'queue', 'claims'] as const;
 const REFUSED =
   'This browser keeps nothing on this device for Underseam. What you write stays only while this page is open: send it before closing it.';
 const FULL =
@@ -102,8 +105,11 @@ function placeOf(store: Store, key: string): string {
 
 /** Async, so that a browser that throws at the mere asking is refused like one that answers no. */
 async function open(): Promise<IDBPDatabase<Schema>> {
-  return openDB<Schema>('underseam', 1, {
-    upgrade: (db) => STORES.forEach((store) => db.createObjectStore(store)),
+  return openDB<Schema>('underseam', 2, {
+    upgrade: (db) =>
+      STORES.filter((store) => !db.objectStoreNames.contains(store)).forEach((store) =>
+        db.createObjectStore(store),
+      ),
     // A newer version of the product, open in another window, must not wait for this one.
     blocking: (_current, _blocked, event) => (event.target as IDBDatabase).close(),
   });

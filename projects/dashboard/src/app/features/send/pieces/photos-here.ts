@@ -6,6 +6,7 @@ import { SIDE_NAMES, ZONE_NAMES } from '../../../ui/words';
 import { JobPhotos } from '../../../ui/photos/job-photos';
 import { Photos } from '../../../ui/photos/photos';
 import type { ShownPhoto } from '../../../ui/photos/shown-photo';
+import { TakePhotos } from '../../../ui/photos/take-photos';
 import { Trouble } from '../../../ui/trouble/trouble';
 import { OpenDraft } from '../open-draft';
 
@@ -14,7 +15,7 @@ const STATES = { here: 'kept here', sent: 'sent', refused: 'refused' } as const;
 /** Photos of a finding: taken or chosen here, and those that the server has of it already. */
 @Component({
   selector: 'us-photos-here',
-  imports: [JobPhotos, Photos, Trouble],
+  imports: [JobPhotos, Photos, TakePhotos, Trouble],
   templateUrl: './photos-here.html',
   styleUrl: './photos-here.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -60,11 +61,8 @@ export class PhotosHere {
     this.all.reload();
   }
 
-  protected async add(box: HTMLInputElement): Promise<void> {
-    const files = [...(box.files ?? [])];
+  protected async add(files: readonly File[]): Promise<void> {
     const id = this.draft.id();
-    // The same photo may be chosen again after it was removed.
-    box.value = '';
     this.refused.set(undefined);
     if (id === undefined) return;
     try {
