@@ -27,7 +27,8 @@ export class PeriodPanel {
   /** The dates of the chosen period, to begin from. */
   readonly from = input<string>();
   readonly to = input<string>();
-  readonly allowAll = input(false);
+  /** Words for all of them, where a page offers that: "All dates". */
+  readonly all = input<string>();
   readonly show = output<Period | undefined>();
 
   protected readonly presets = WEEKS.map((weeks) => {

@@ -10,26 +10,38 @@ import {
   signal,
 } from '@angular/core';
 import { BODY_TYPES, type BodyType } from '#shared/domain/vocabulary';
-import { formatWeek } from '../../ui/format';
+import { formatDate, formatWeek } from '../../ui/format';
 import { BODY_TYPE_NAMES, BODY_TYPE_PLURALS } from '../../ui/words';
 import { Catalogue } from '../catalogue/catalogue';
 import { Session } from '../session/session';
+import { AsOfPanel } from './as-of-panel';
 import { KindsPanel } from './kinds-panel';
 import { PeriodPanel } from './period-panel';
 import { PlacesPanel } from './places-panel';
 import { ScopePart } from './scope-part';
 import { ScopeState } from './scope-state';
 import type { ScopeChoice } from './scope-url';
-import { kindsWords, periodWords, placesWords } from './scope-words';
+import { completedWords, kindsWords, periodWords, placesWords } from './scope-words';
 import { WeekPanel } from './week-panel';
 
-/** How a page takes its time: weeks or dates with a default, one week, or any dates with "all" as the default. */
-export type ScopePeriod = 'weeks' | 'week' | 'any';
+/**
+ * How a page takes its time: weeks or dates with a default, one week, any dates with "all" as the default, or any dates of completion
+ * as of a day.
+ */
+export type ScopePeriod = 'weeks' | 'week' | 'any' | 'completed';
 
-/** The line of words above a page that says what it is about, each part a control. Its state is the URL. */
+const ALL_DATES: Readonly<Partial<Record<ScopePeriod, string>>> = {
+  any: 'All dates',
+  completed: 'All cars',
+};
+
+/**
+ * The line of words above a page that says what it is about, each part a control. Its state is the URL. What a page puts between
+ * its tags stands with the actions.
+ */
 @Component({
   selector: 'us-scope-line',
-  imports: [KindsPanel, PeriodPanel, PlacesPanel, ScopePart, WeekPanel],
+  imports: [AsOfPanel, KindsPanel, PeriodPanel, PlacesPanel, ScopePart, WeekPanel],
   templateUrl: './scope-line.html',
   styleUrl: './scope-line.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -45,6 +57,8 @@ export class ScopeLine {
   readonly period = input<ScopePeriod>('weeks');
   /** `branches`: whose jobs alone, where dates and kinds mean nothing. */
   readonly parts = input<'all' | 'branches'>('all');
+  /** The first day there is a car of, where the page knows it. */
+  readonly since = input<string>();
 
   protected readonly regions = computed(() => {
     const branches = this.catalogue.branches();
@@ -90,7 +104,14 @@ export class ScopeLine {
   );
   protected readonly periodWords = computed(() => {
     const chosen = this.scope.choice().period;
+    if (this.period() === 'completed') return completedWords(chosen, this.since());
     return this.period() === 'any' && !chosen ? 'all dates' : periodWords(this.scope.period());
+  });
+  /** Words for all dates, where the page offers them. */
+  protected readonly allDates = computed(() => ALL_DATES[this.period()]);
+  protected readonly asOfWords = computed(() => {
+    const day = this.scope.choice().asOf ?? this.catalogue.today();
+    return day ? `as of ${formatDate(day)}` : 'as of today';
   });
   protected readonly weekWords = computed(() => {
     const week = this.scope.week();

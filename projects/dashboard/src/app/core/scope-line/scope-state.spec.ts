@@ -52,6 +52,26 @@ describe('ScopeState', () => {
     });
   });
 
+  it('of a page of all cars, asks for dates only where the URL says some, and for the day as of which', async () => {
+    const { router, scope } = set(undefined);
+    expect(scope.completedQuery()).toEqual({});
+    await router.navigateByUrl(
+      '/warranty?branch=HAV&asOf=2025-12-31&from=2024-01-01&to=2024-06-30',
+    );
+    expect(scope.completedQuery()).toEqual({
+      branch: ['HAV'],
+      from: '2024-01-01',
+      to: '2024-06-30',
+      asOf: '2025-12-31',
+    });
+  });
+
+  it('of a page of all cars with weeks chosen, waits for today', async () => {
+    const { router, scope } = set(undefined);
+    await router.navigateByUrl('/warranty?last=13');
+    expect(scope.completedQuery()).toBeUndefined();
+  });
+
   it('changed writes the URL, keeps what else stands in it, and drops the page of a list', async () => {
     const { router, scope } = set('2026-02-04');
     await router.navigateByUrl('/jobs?q=velder&cursor=abc&region=NO');

@@ -59,6 +59,16 @@ export class ScopeState {
     return dates && { ...this.filters(), ...dates };
   });
 
+  /**
+   * The scope of pages that speak of all cars unless dates of completion are chosen, with the day as of which they do; `undefined`
+   * while chosen weeks wait for today.
+   */
+  readonly completedQuery = computed<(ScopeQuery & { readonly asOf?: string }) | undefined>(() => {
+    const { period, asOf } = this.choice();
+    const dates = period ? this.dates() : {};
+    return dates && { ...this.filters(), ...dates, asOf };
+  });
+
   private readonly dates = computed(() => datesOf(this.period(), this.catalogue.today()));
 
   /** Changes parts of the scope: a new entry in the browser's history, so that one can go back. */

@@ -8,6 +8,7 @@ describe('scopeFromUrl', () => {
       packages: [],
       bodyTypes: [],
       week: undefined,
+      asOf: undefined,
       period: undefined,
     });
   });
@@ -23,12 +24,14 @@ describe('scopeFromUrl', () => {
     const scope = scopeFromUrl({
       bodyType: ['van', 'boat'],
       week: '2026-W60',
+      asOf: '2026-06-31',
       from: '2026-02-30',
       to: '2026-03-01',
       last: '0',
     });
     expect(scope.bodyTypes).toEqual(['van']);
     expect(scope.week).toBeUndefined();
+    expect(scope.asOf).toBeUndefined();
     expect(scope.period).toBeUndefined();
   });
 
@@ -60,9 +63,12 @@ describe('scopeToUrl', () => {
   });
 
   it('of an emptied part takes it out of the URL', () => {
-    expect(scopeToUrl({ packages: [], week: undefined, period: undefined })).toEqual({
+    expect(
+      scopeToUrl({ packages: [], week: undefined, asOf: undefined, period: undefined }),
+    ).toEqual({
       package: null,
       week: null,
+      asOf: null,
       last: null,
       from: null,
       to: null,
@@ -84,6 +90,7 @@ describe('scopeToUrl', () => {
       package: ['full'],
       bodyType: ['van', 'classic'],
       week: '2026-W05',
+      asOf: '2025-12-31',
       from: '2026-01-01',
       to: '2026-02-01',
     });

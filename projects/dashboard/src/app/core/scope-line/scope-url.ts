@@ -13,6 +13,8 @@ export interface ScopeChoice {
   readonly packages: readonly string[];
   readonly bodyTypes: readonly BodyType[];
   readonly week: string | undefined;
+  /** The day as of which warranty is told; today when absent. */
+  readonly asOf: string | undefined;
   readonly period: Period | undefined;
 }
 
@@ -29,6 +31,7 @@ export function scopeFromUrl(query: UrlQuery): ScopeChoice {
     packages: many(query['package']),
     bodyTypes: many(query['bodyType']).filter(isBodyType),
     week: many(query['week']).find(isWeek),
+    asOf: many(query['asOf']).find(isDate),
     period: periodFromUrl(query),
   };
 }
@@ -41,6 +44,7 @@ export function scopeToUrl(change: Partial<ScopeChoice>): Record<string, string 
   if (change.packages) query['package'] = orNull(change.packages);
   if (change.bodyTypes) query['bodyType'] = orNull(change.bodyTypes);
   if ('week' in change) query['week'] = change.week ?? null;
+  if ('asOf' in change) query['asOf'] = change.asOf ?? null;
   if ('period' in change) {
     const period = change.period;
     query['last'] = period?.kind === 'last' ? String(period.weeks) : null;

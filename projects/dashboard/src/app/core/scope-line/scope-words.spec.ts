@@ -1,4 +1,4 @@
-import { kindsWords, periodWords, placesWords } from './scope-words';
+import { completedWords, kindsWords, periodWords, placesWords } from './scope-words';
 
 const OWN = { regions: ['Outer Coast'], branches: ['Havnsund', 'Tangvarp'] };
 
@@ -23,6 +23,19 @@ describe('kindsWords', () => {
   it('with none chosen says all of them', () => {
     expect(kindsWords([], 'packages')).toBe('all packages');
     expect(kindsWords(['full'], 'packages')).toBe('full');
+  });
+});
+
+describe('completedWords', () => {
+  it('of all cars says since when there are any, once that is known', () => {
+    expect(completedWords(undefined, undefined)).toBe('all cars finished');
+    expect(completedWords(undefined, '2022-07-04')).toBe('cars finished since July 2022');
+  });
+
+  it('of chosen weeks says them', () => {
+    expect(completedWords({ kind: 'last', weeks: 13 }, '2022-07-04')).toBe(
+      'cars finished in the last 13 weeks',
+    );
   });
 });
 

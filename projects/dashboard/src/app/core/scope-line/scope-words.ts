@@ -1,6 +1,6 @@
 import { mondayOfWeek, addDays } from '#shared/domain/calendar';
 import type { Role } from '#shared/domain/vocabulary';
-import { formatDate, formatDateRange, formatList } from '../../ui/format';
+import { formatDate, formatDateRange, formatList, formatMonth } from '../../ui/format';
 import type { Period } from './scope-url';
 
 /** Names listed in full; more are counted. */
@@ -34,6 +34,16 @@ export function periodWords(period: Period): string {
   return period.from === period.to
     ? formatDate(period.from)
     : formatDateRange(period.from, period.to);
+}
+
+/** Which cars by the day they were finished: "cars finished since July 2022" where none is chosen, from the first there is. */
+export function completedWords(period: Period | undefined, first: string | undefined): string {
+  if (!period) {
+    return first ? `cars finished since ${formatMonth(first.slice(0, 7))}` : 'all cars finished';
+  }
+  return period.kind === 'last'
+    ? `cars finished ${period.weeks === 1 ? 'this week' : `in the last ${period.weeks} weeks`}`
+    : `cars finished ${periodWords(period)}`;
 }
 
 /** First and last day of a week, for the list of weeks: "26 Jan – 1 Feb 2026". */
