@@ -1,0 +1,160 @@
+import type { Knex } from 'knex';
+import type { ClaimCause, ClaimDecision, Zone } from '#shared/domain/vocabulary';
+import { CHECKS, type CheckAnswer } from '#shared/domain/vocabulary';
+import { sql, type Connection } from '../database';
+import type { ScopedDb } from '../scoped-db';
+import { whereJobs, type JobFilters } from './job-filters';
+
+/** What cover is counted by, one place a car in every list. */
+export interface CoverLists {
+  branchIds: number[];
+  packageIds: number[];
+  /** Places in `AGE_BANDS`. */
+  bands: number[];
+  completedOn: string[];
+  warrantyMonths: number[];
+}
+
+/** The cars of a question, one place a car in every list. */
+export interface WarrantyCars extends CoverLists {
+  jobIds: number[];
+  /** How each was worked, as `practiceOf` reads it. */
+  practices: number[];
+}
+
+/** How a car was worked: its checks in their order, and whether it got much less product than its norm. */
+export interface Practice {
+  checks: (CheckAnswer | undefined)[];
+  /** Undefined without a norm. */
+  thin: boolean | undefined;
+}
+
+/** A claim as it stands. */
+export interface ClaimRow {
+  jobId: number;
+  madeOn: string;
+  decision: ClaimDecision;
+  decidedOn: string | null;
+  waiting: 0 | 1;
+  zone: Zone;
+  cause: ClaimCause;
+  costCents: number;
+  paidOn: string | null;
+}
+
+/** What decides whether a claim of the network counts, with what its car is counted by. */
+export interface CoveredClaim {
+  branchId: number;
+  packageId: number;
+  band: number;
+  completedOn: string;
+  warrantyMonths: number;
+  madeOn: string;
+  decision: ClaimDecision;
+  decidedOn: string | null;
+}
+
+const COVER = {
+  branchIds: 'branch_id',
+  packageIds: 'package_id',
+  bands: 'age_band',
+  completedOn: 'completed_on',
+  warrantyMonths: 'warranty_months',
+} as const;
+
+/** Answers to a check, none, yes, no and not applicable, as figures of a number with base 4. */
+const ANSWERS: readonly (CheckAnswer | undefined)[] = [undefined, 'yes', 'no', 'na'];
+const ENOUGH: readonly (boolean | undefined)[] = [undefined, false, true];
+
+/** One number a car instead of seven lists: thin first, then the checks, the last of them lowest. */
+const PRACTICE = CHECKS.map(checkColumn).reduce(
+  (before, column) =>
+    `4 * (${before}) + case ${column} when 'yes' then 1 when 'no' then 2 when 'na' then 3 else 0 end`,
+  // Whole numbers on both sides: 0.7 of a norm is not always a number that can be written exactly.
+  'case when norm_ml = 0 then 0 when 10 * normed_ml < 7 * norm_ml then 2 else 1 end',
+);
+
+/** Reads every car once: figures are told by so many things that each would sort them all again. */
+export function readWarrantyCars(db: ScopedDb, filters: JobFilters): WarrantyCars {
+  const columns = { ...COVER, jobIds: 'job_id', practices: PRACTICE };
+  const row = db.first<Record<keyof typeof columns, string>>(
+    whereJobs(db.table('job_facts'), filters).select(listsOf(columns)),
+  );
+  return parsed<WarrantyCars>(row, columns);
+}
+
+/** How a car was worked, out of its number. */
+export function practiceOf(number: number): Practice {
+  const checks = CHECKS.map((_, place) => {
+    const figure = Math.floor(number / 4 ** (CHECKS.length - 1 - place)) % 4;
+    return ANSWERS[figure];
+  });
+  return { checks, thin: ENOUGH[Math.floor(number / 4 ** CHECKS.length)] };
+}
+
+/** Every claim in scope made by a day, void jobs' and other jobs' too: whoever has read the cars knows which are asked for. */
+export function readClaims(db: ScopedDb, asOf: string): ClaimRow[] {
+  return db.all<ClaimRow>(
+    db
+      .table('claims')
+      .where('made_on', '<=', asOf)
+      .orderBy('claims.id')
+      .select({
+        jobId: 'job_id',
+        madeOn: 'made_on',
+        decision: 'decision',
+        decidedOn: 'decided_on',
+        waiting: sql.raw('proposed_decision is not null'),
+        zone: 'zone',
+        cause: 'cause',
+        costCents: 'cost_cents',
+        paidOn: 'paid_on',
+      }),
+  );
+}
+
+/** What cover is counted by, of whichever facts a reader beyond scope asks for. */
+export function readCoverLists(connection: Connection, facts: Knex.QueryBuilder): CoverLists {
+  const row = connection.first<Record<keyof typeof COVER, string>>(facts.select(listsOf(COVER)));
+  return parsed<CoverLists>(row, COVER);
+}
+
+/** The claims made by a day on whichever facts a reader beyond scope asks for. */
+export function readCoveredClaims(
+  connection: Connection,
+  facts: Knex.QueryBuilder,
+  asOf: string,
+): CoveredClaim[] {
+  return connection.all<CoveredClaim>(
+    facts
+      .join('claims', 'claims.job_id', 'job_facts.job_id')
+      .where('claims.made_on', '<=', asOf)
+      .select({
+        branchId: 'job_facts.branch_id',
+        packageId: 'job_facts.package_id',
+        band: 'job_facts.age_band',
+        completedOn: 'job_facts.completed_on',
+        warrantyMonths: 'job_facts.warranty_months',
+        madeOn: 'claims.made_on',
+        decision: 'claims.decision',
+        decidedOn: 'claims.decided_on',
+      }),
+  );
+}
+
+function checkColumn(check: string): string {
+  return `check_${check.replace(/[A-Z]/g, (letter) => `_${letter.toLowerCase()}`)}`;
+}
+
+function listsOf(columns: Readonly<Record<string, string>>): Knex.Raw {
+  const lists = Object.entries(columns).map(
+    ([name, column]) => `json_group_array(${column}) as ${name}`,
+  );
+  return sql.raw(lists.join(', '));
+}
+
+function parsed<Lists>(row: Record<string, string> | undefined, columns: object): Lists {
+  return Object.fromEntries(
+    Object.keys(columns).map((name) => [name, JSON.parse(row?.[name] ?? '[]') as unknown]),
+  ) as Lists;
+}
