@@ -55,8 +55,8 @@ export class ScopeLine {
   private readonly window = inject(DOCUMENT).defaultView;
 
   readonly period = input<ScopePeriod>('weeks');
-  /** `branches`: whose jobs alone, where dates and kinds mean nothing. */
-  readonly parts = input<'all' | 'branches'>('all');
+  /** `branches`: whose jobs alone, where dates and kinds mean nothing; `network`: all of it, as of a day. */
+  readonly parts = input<'all' | 'branches' | 'network'>('all');
   /** The first day there is a car of, where the page knows it. */
   readonly since = input<string>();
 
