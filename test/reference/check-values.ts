@@ -4,8 +4,8 @@ import { join } from 'node:path';
 /** How near a figure must come; meeting one of them is enough. `sd_relative` and the like hold for that figure alone. */
 export type Tolerance = Record<string, number>;
 
-/** A value, or a list of values, that a case expects. */
-export type Figure = number | string | readonly number[] | readonly string[];
+/** A value, or a list of values, that a case expects; null where one of a list is not defined. */
+export type Figure = number | string | readonly (number | null)[] | readonly string[];
 
 /** One case of a method, as `check-values.json` keeps it. */
 export interface CheckCase<Input> {
@@ -14,7 +14,7 @@ export interface CheckCase<Input> {
   input: Input;
   expected: Record<string, Figure>;
   tolerance: Tolerance;
-  published?: Record<string, number | string>;
+  published?: Record<string, Figure>;
 }
 
 type Methods = Record<string, { cases: CheckCase<unknown>[] }>;

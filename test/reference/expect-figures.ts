@@ -9,13 +9,15 @@ export function expectFigures(
   computed: Record<string, Figure | undefined>,
 ): void {
   for (const [name, expected] of Object.entries(check.expected)) {
-    expectNear(name, computed[name], expected, toleranceOf(name, check.tolerance));
+    const reach = toleranceOf(name, check.tolerance);
+    expectNear(name, computed[name], expected, () => reach);
   }
   for (const [name, published] of Object.entries(check.published ?? {})) {
-    const half = typeof published === 'number' ? halfLastDigit(published) : 0;
-    expectNear(`published ${name}`, computed[name], published, { absolute: half });
+    expectNear(`published ${name}`, computed[name], published, lastDigit);
   }
 }
+
+type Value = number | string | null;
 
 interface Reach {
   absolute?: number | undefined;
@@ -24,23 +26,21 @@ interface Reach {
 
 function expectNear(
   name: string,
-  actual: Figure | undefined,
-  expected: Figure,
-  reach: Reach,
+  actual: Figure | null | undefined,
+  expected: Figure | null,
+  reachOf: (expected: Value) => Reach,
 ): void {
-  if (typeof expected === 'string' || typeof expected === 'number') {
-    expect({ name, actual: isNear(actual, expected, reach) ? expected : actual }).toEqual({
-      name,
-      actual: expected,
-    });
+  if (expected === null || typeof expected === 'string' || typeof expected === 'number') {
+    const near = isNear(actual, expected, reachOf(expected));
+    expect({ name, actual: near ? expected : actual }).toEqual({ name, actual: expected });
     return;
   }
-  const list = Array.isArray(actual) ? (actual as (number | string)[]) : [];
+  const list = Array.isArray(actual) ? (actual as Value[]) : [];
   expect({ name, length: list.length }).toEqual({ name, length: expected.length });
-  expected.forEach((value, index) => expectNear(`${name}[${index}]`, list[index], value, reach));
+  expected.forEach((value, index) => expectNear(`${name}[${index}]`, list[index], value, reachOf));
 }
 
-function isNear(actual: Figure | undefined, expected: number | string, reach: Reach): boolean {
+function isNear(actual: Figure | null | undefined, expected: Value, reach: Reach): boolean {
   if (typeof actual !== 'number' || typeof expected !== 'number') return actual === expected;
   const distance = Math.abs(actual - expected);
   return (
@@ -56,7 +56,8 @@ function toleranceOf(name: string, tolerance: Tolerance): Reach {
 }
 
 /** Half a unit of the last printed digit, and a breath for the double's own rounding. */
-function halfLastDigit(published: number): number {
+function lastDigit(published: Value): Reach {
+  if (typeof published !== 'number') return {};
   const decimals = String(published).split('.')[1]?.length ?? 0;
-  return 0.5 * 10 ** -decimals * (1 + 1e-9);
+  return { absolute: 0.5 * 10 ** -decimals * (1 + 1e-9) };
 }

@@ -9,17 +9,4 @@ describe('gammaQuantile', () => {
       expectFigures(check, { x: gammaQuantile(check.input.p, check.input.shape) });
     },
   );
-
-  it.each(checkCases<{ count: number; exposure: number; level: number }>('poisson_exact'))(
-    'given the exact limits of a count in %s, agrees',
-    (_title, check) => {
-      const { count, exposure, level } = check.input;
-      const tail = (1 - level) / 2;
-      expectFigures(check, {
-        rate: count / exposure,
-        lower: count === 0 ? 0 : gammaQuantile(tail, count) / exposure,
-        upper: gammaQuantile(1 - tail, count + 1) / exposure,
-      });
-    },
-  );
 });
