@@ -42,9 +42,10 @@ export class JobServer {
     request: HttpRequest<unknown>,
     [branch, what, jobRef, photos, photo]: readonly string[],
   ): Observable<HttpEvent<unknown>> {
-    const key = `${branch}/${jobRef}`;
+    const key = what === 'claims' ? `claim ${branch}/${jobRef}` : `${branch}/${jobRef}`;
     const held = this.jobs.get(key);
-    if (what !== 'jobs') return of(new HttpResponse({ status: 200, body: { status: 'ok' } }));
+    if (what !== 'jobs' && what !== 'claims')
+      return of(new HttpResponse({ status: 200, body: { status: 'ok' } }));
     if (photos !== undefined && photo !== undefined) {
       if (!held) return refusal(404);
       this.photos.set(photo, request.body);
@@ -56,7 +57,8 @@ export class JobServer {
     if (!seen) return refusal(412, { detail: 'There already is one: revision 1 by Ilse Torven.' });
     const next = { revision: (held?.revision ?? 0) + 1, body: request.body };
     this.jobs.set(key, next);
-    return of(response(next, held ? 200 : 201, { jobRef, revision: next.revision }));
+    const told = what === 'claims' ? { claimRef: jobRef } : { jobRef };
+    return of(response(next, held ? 200 : 201, { ...told, revision: next.revision }));
   }
 }
 
