@@ -1,4 +1,5 @@
 import type { Knex } from 'knex';
+import type { CoverCell } from '#shared/domain/cover-cells';
 import { sql, type Connection, type Query } from './database';
 import { whereJobs, type JobFilters } from './queries/job-filters';
 import {
@@ -11,6 +12,7 @@ import { readUsualFigures, type UsualFigures } from './queries/usual';
 import { nearestNetworkSet } from './quote-reference';
 import type { Scope } from './scope';
 import { VISIBLE } from './visible-rows';
+import { branchCells } from './warranty-reference';
 
 /** Branches besides the caller's own that must stand behind a network figure before the caller may see it (rule 21). */
 export const FEWEST_OTHERS = 5;
@@ -25,6 +27,12 @@ export interface ReferenceBand {
   cars: number;
   withRot: number;
   /** Whether its share may be shown: of the network only with enough other branches that have cars in this band. */
+  enoughBehind: boolean;
+}
+
+/** Cover and counted claims of a package, age band and year in service over the network, summed. */
+export interface ReferenceCell extends CoverCell {
+  /** Whether its sums may be shown: of the network only with enough other branches that have cover in this cell. */
   enoughBehind: boolean;
 }
 
@@ -63,6 +71,33 @@ export class NetworkReference {
         cars: total(own.map((cell) => cell.cars)),
         withRot: total(own.map((cell) => cell.withRot)),
         enoughBehind: !ofNetwork || this.enoughBehind(own),
+      })),
+    };
+  }
+
+  /**
+   * Cover and counted claims as of a day by package, age band and year in service over the network (rule 20); where too few
+   * others have cars with a warranty, over the branches that the caller may see. Branch and region filters narrow neither.
+   */
+  warrantyCells(
+    filters: JobFilters,
+    asOf: string,
+  ): { kind: 'network' | 'scope'; cells: ReferenceCell[] } {
+    const cells = branchCells(this.connection, () => whereJobs(everyJob(), filters), asOf);
+    const ofNetwork = this.enoughBehind(cells);
+    const byCell = new Map<string, typeof cells>();
+    for (const cell of cells) {
+      if (!ofNetwork && this.scope.isOutside(cell.branchId)) continue;
+      const key = `${cell.packageId}/${cell.band}/${cell.year}`;
+      byCell.set(key, [...(byCell.get(key) ?? []), cell]);
+    }
+    return {
+      kind: ofNetwork ? 'network' : 'scope',
+      cells: [...byCell.values()].map((own) => ({
+        ...placeOf(own[0] as CoverCell),
+        days: total(own.map((cell) => cell.days)),
+        claims: total(own.map((cell) => cell.claims)),
+        enoughBehind: !ofNetwork || this.enoughBehind(own.filter((cell) => cell.days > 0)),
       })),
     };
   }
@@ -118,6 +153,11 @@ export class NetworkReference {
 
 function everyJob(): Knex.QueryBuilder {
   return sql.from(sql.raw(EVERY_FACT));
+}
+
+/** Which cell it is, without whose. */
+function placeOf({ packageId, band, year }: CoverCell): Omit<CoverCell, 'days' | 'claims'> {
+  return { packageId, band, year };
 }
 
 function total(values: readonly number[]): number {
