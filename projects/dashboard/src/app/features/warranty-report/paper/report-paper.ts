@@ -1,0 +1,56 @@
+import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
+import type { IssuedReport, WarrantyReport } from '#shared/contracts/warranty-reports';
+import { WARRANTY_METHODS } from '#shared/domain/warranty-methods';
+import { currencySign, formatDate } from '../../../ui/format';
+import { Mark } from '../../../ui/mark/mark';
+import { branchesSentence, plainWords, rateSentence, reportSentence } from '../report-answer';
+import { branchRows } from './branch-rows';
+import { claimFreeRows } from './claim-free-rows';
+import { cohortRows } from './cohort-rows';
+import { leftOut } from './left-out';
+import { logRankWords } from './log-rank-words';
+import { PaperTable } from './paper-table';
+import { processRows, stratumRows } from './process-rows';
+import { riskRows } from './risk-rows';
+import { standingWords } from './standing-words';
+import { factorRows, triangleRows } from './triangle-rows';
+
+/** The warranty-risk report as it is read and printed: a draft of today, or one that was issued. Everything on it is of the report. */
+@Component({
+  selector: 'us-report-paper',
+  imports: [Mark, PaperTable],
+  templateUrl: './report-paper.html',
+  styleUrl: './report-paper.scss',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
+export class ReportPaper {
+  readonly report = input.required<WarrantyReport>();
+  /** Left out: a draft. */
+  readonly issued = input<IssuedReport>();
+
+  protected readonly methods = WARRANTY_METHODS;
+  protected readonly paper = computed(() => {
+    const report = this.report();
+    const { answer } = report;
+    return {
+      network: report.network,
+      asOf: formatDate(report.asOf),
+      evaluatedOn: formatDate(answer.evaluatedOn),
+      standing: standingWords(this.issued()),
+      sign: currencySign(report.currency),
+      answer: plainWords(reportSentence(report)),
+      branchWords: branchesSentence(report),
+      rate: rateSentence(report),
+      claimFree: claimFreeRows(answer),
+      logRank: logRankWords(answer),
+      cohorts: cohortRows(answer),
+      branches: branchRows(report),
+      triangle: triangleRows(answer),
+      factors: factorRows(answer),
+      process: processRows(answer),
+      strata: stratumRows(answer),
+      risk: riskRows(report),
+      left: leftOut(report),
+    };
+  });
+}
