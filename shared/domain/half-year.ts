@@ -5,6 +5,11 @@ export function halfYearOf(date: string): string {
   return `${date.slice(0, 4)}-H${Number(date.slice(5, 7)) <= 6 ? 1 : 2}`;
 }
 
+/** The half-year so many later; earlier when negative. */
+export function halfYearLater(halfYear: string, steps: number): string {
+  return textOf(numberOf(halfYear) + steps);
+}
+
 /** How many half-years lie between two: 0 for the same, 1 for the next. */
 export function halfYearsBetween(from: string, to: string): number {
   return numberOf(to) - numberOf(from);
