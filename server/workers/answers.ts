@@ -2,6 +2,7 @@ import type { NetworkReference } from '#db/network-reference';
 import type { ScopedDb } from '#db/scoped-db';
 import { checkAuditChain, readAuditNames, readAuditPage } from '../features/audit/read-audit';
 import { listComeBacks } from '../features/come-back/list-come-backs';
+import { listClaims } from '../features/claims/list-claims';
 import { listJobs } from '../features/job-list/list-jobs';
 import { answerMargin } from '../features/margin/answer-margin';
 import { answerOverrun } from '../features/overrun/answer-overrun';
@@ -26,6 +27,7 @@ const ANSWERS: {
   margin: answerMargin,
   overrun: answerOverrun,
   jobs: listJobs,
+  claims: listClaims,
   rot: answerRot,
   products: answerProducts,
   productNeed: answerProductNeed,

@@ -2,9 +2,11 @@ import type { NetworkReference } from '#db/network-reference';
 import type { ScopedDb } from '#db/scoped-db';
 import type { AuditFilters } from '#db/queries/audit-list';
 import { everyEvent } from '../features/audit/read-audit';
+import { everyClaim, type ClaimsAsked } from '../features/claims/list-claims';
 import { everyComeBack, type ComeBacksAsked } from '../features/come-back/list-come-backs';
 import {
   AUDIT_COLUMNS,
+  CLAIM_COLUMNS,
   COME_BACK_COLUMNS,
   JOB_COLUMNS,
   MARGIN_COLUMNS,
@@ -51,6 +53,11 @@ export function* csvChunks(
     case 'jobs': {
       yield csvHeader(JOB_COLUMNS);
       for (const page of everyJob(db, input as JobsAsked)) yield csvRows(JOB_COLUMNS, page);
+      return;
+    }
+    case 'claims': {
+      yield csvHeader(CLAIM_COLUMNS);
+      for (const page of everyClaim(db, input as ClaimsAsked)) yield csvRows(CLAIM_COLUMNS, page);
       return;
     }
     case 'rot': {

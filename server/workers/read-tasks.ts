@@ -13,6 +13,7 @@ import type { EffectQuestion } from '../features/set-up-help/effect-of-change';
 import type { MediansQuestion } from '../features/set-up-help/norm-medians';
 import type { AuditFilters } from '#db/queries/audit-list';
 import type { AuditChain, AuditPage, AuditQuestion } from '../features/audit/read-audit';
+import type { ClaimListQuestion, ClaimPage, ClaimsAsked } from '../features/claims/list-claims';
 import type { JobListQuestion, JobPage, JobsAsked } from '../features/job-list/list-jobs';
 import type { MarginQuestion } from '../features/margin/answer-margin';
 import type { OverrunQuestion } from '../features/overrun/answer-overrun';
@@ -32,6 +33,7 @@ export interface ReadTasks {
   margin: { input: MarginQuestion; output: MarginAnswer };
   overrun: { input: OverrunQuestion; output: OverrunAnswer };
   jobs: { input: JobListQuestion; output: JobPage };
+  claims: { input: ClaimListQuestion; output: ClaimPage };
   rot: { input: RotQuestion; output: RotAnswer };
   products: { input: ProductsQuestion; output: ProductsAnswer };
   productNeed: { input: NeedQuestion; output: ProductNeedAnswer };
@@ -51,6 +53,7 @@ export interface ExportTasks {
   margin: MarginQuestion;
   overrun: OverrunQuestion;
   jobs: JobsAsked;
+  claims: ClaimsAsked;
   rot: RotQuestion;
   'rot-models': RotQuestion;
   'rot-zones': RotQuestion;

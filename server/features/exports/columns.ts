@@ -20,6 +20,13 @@ export const JOB_COLUMNS = [
   ...['largestStep.cents'],
 ];
 
+export const CLAIM_COLUMNS = [
+  ...['branch', 'claimRef', 'revision', 'jobRef', 'vehicle.make', 'vehicle.model'],
+  ...['vehicle.bodyType', 'vehicle.firstRegistered', 'package', 'completedOn', 'madeOn', 'month'],
+  ...['inWarranty', 'counted', 'zone', 'side', 'cause', 'decision', 'proposedDecision'],
+  ...['decidedOn', 'paidOn', 'labourMinutes', 'productMl', 'costCents'],
+];
+
 export const ROT_COLUMNS = ['ageBand', 'region', 'cars', 'withRot', 'share', 'lower', 'upper'];
 
 export const ROT_MODEL_COLUMNS = [

@@ -2,6 +2,7 @@ import { recordAudit } from '#db/queries/audit';
 import type { Scope } from '#db/scope';
 import { exportAudit } from '#shared/contracts/audit';
 import {
+  exportClaims,
   exportComeBack,
   exportJobs,
   exportMargin,
@@ -19,6 +20,7 @@ import { breaksOfPeriod } from '#shared/domain/period';
 import { refuseInput } from '#shared/domain/refusal';
 import { actorOf } from '../../auth/caller';
 import { realClock } from '../../clock';
+import { claimListQuestion } from '../../http/claim-list-question';
 import { comeBackQuestion } from '../../http/come-back-question';
 import { streamCsv, type CsvChunks } from '../../http/csv-stream';
 import { jobListQuestion } from '../../http/job-list-question';
@@ -34,6 +36,16 @@ export function mountExports(mounting: Mounting, kit: Kit): void {
     const { scope, ...asked } = jobListQuestion(kit, call.scope, query);
     return exported(kit, call, 'jobs', scope, () =>
       kit.reads.stream('jobs', scope, { ...asked, sort, money: 'seen' }),
+    );
+  });
+
+  mount(mounting, exportClaims, (call) => {
+    const { sort, ...query } = call.query;
+    const { scope, asOf, filters } = claimListQuestion(kit, call.scope, query);
+    // Of the jobs that the warranty answer is about: completed by its day (rules 15 and 62).
+    const asked = { filters: { ...filters, to: filters.to ?? asOf }, asOf, sort };
+    return exported(kit, call, 'claims', scope, () =>
+      kit.reads.stream('claims', scope, { ...asked, money: 'seen' }),
     );
   });
 
