@@ -18,6 +18,7 @@ export default {
   testEnvironmentOptions: { customExportConditions: ['underseam-source', 'node', 'node-addons'] },
   testMatch: ['**/*.spec.ts'],
   testTimeout: 120_000,
+  testSequencer: path.join(import.meta.dirname, 'longest-first.mjs'),
   maxWorkers: 2,
   transform: {
     '^.+\\.ts$': ['@swc/jest', { jsc: { target: 'es2022', parser: { syntax: 'typescript' } } }],

@@ -1,8 +1,17 @@
 import { accessSync, constants, existsSync, readFileSync, statSync } from 'node:fs';
 import path from 'node:path';
 
-const NAMES = ['chromium', 'chromium-browser', 'google-chrome', 'google-chrome-stable', 'chrome'];
+/** The one without a window of its own goes before others: it is what the journeys need, and no more. */
+const NAMES = [
+  'chromium-headless-shell',
+  'chromium',
+  'chromium-browser',
+  'google-chrome',
+  'google-chrome-stable',
+  'chrome',
+];
 const PLACES = [
+  '/usr/lib/chromium/chromium-headless-shell',
   '/usr/lib/chromium/chromium',
   '/snap/bin/chromium',
   '/Applications/Chromium.app/Contents/MacOS/Chromium',

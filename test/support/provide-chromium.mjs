@@ -15,11 +15,15 @@ export async function provideChromium() {
     );
     return undefined;
   }
-  console.log('No browser is here; installing Debian’s chromium.');
+  console.log('No browser is here; installing Debian’s chromium-headless-shell.');
   const quiet = { DEBIAN_FRONTEND: 'noninteractive' };
   await runHere('apt-get', ['update', '-qq'], quiet);
-  await runHere('apt-get', ['install', '-qq', '-y', '--no-install-recommends', 'chromium'], quiet);
+  await runHere(
+    'apt-get',
+    ['install', '-qq', '-y', '--no-install-recommends', 'chromium-headless-shell'],
+    quiet,
+  );
   const installed = findChromium();
-  if (!installed) console.error('apt-get could not install chromium; its messages say why.');
+  if (!installed) console.error('apt-get could not install a browser; its messages say why.');
   return installed;
 }
