@@ -1,4 +1,5 @@
 import { addMonths, ageInYears, dateOfDay, dayNumber } from '#shared/domain/calendar';
+import { halfYearOf } from '#shared/domain/half-year';
 import type { ClaimCause, ClaimDecision, Zone } from '#shared/domain/vocabulary';
 import type { JobContent } from '#shared/contracts/jobs';
 import type { BranchNature } from './branches';
@@ -6,7 +7,7 @@ import { PACKAGES } from './catalogue';
 import { levelOn } from './dated-costs';
 import { newestContent, type DemoClaim, type DemoJob, type PackageCode } from './demo-network';
 import { evening } from './job-arrival';
-import { badCohortOn, cohortOf, PLANTED_FACTS } from './planted-facts';
+import { badCohortOn, PLANTED_FACTS } from './planted-facts';
 import { between, chance, pickWeighted, wholeBetween, type Random } from './random-draws';
 import { workingDayAfter } from './working-calendar';
 
@@ -57,7 +58,7 @@ function claimChance(branch: BranchNature, job: JobContent, badCohort: string): 
   p *= 0.7 + 0.035 * Math.min(years, 20);
   if (branch.region === facts.saltRegion.region) p *= 1.15;
   if (branch.quirk?.kind === 'under-applies') p *= facts.underApplyingBranch.claimsTimes;
-  if (cohortOf(job.completedOn) === badCohort) p *= facts.badCohort.claimsTimes;
+  if (halfYearOf(job.completedOn) === badCohort) p *= facts.badCohort.claimsTimes;
   if (job.checks?.bothDirections === 'no') p *= facts.checkSkippingBranch.claimsTimes;
   if (job.checks?.driedOut === 'no') p *= 1.7;
   if (job.checks?.drainsClear === 'no') p *= 1.6;

@@ -1,4 +1,4 @@
-import { addMonths, dayNumber, isoWeek } from '#shared/domain/calendar';
+import { addMonths, isoWeek } from '#shared/domain/calendar';
 import { deriveFigures, marginCents, type JobFigures } from '#shared/domain/job-figures';
 import { normaliseJob } from '#shared/domain/normalise-job';
 import { AGE_BANDS, type Stage } from '#shared/domain/vocabulary';
@@ -8,7 +8,7 @@ import { normOf, PACKAGES } from './catalogue';
 import { costBookOf } from './demo-costs';
 import { newestContent, type DemoClaim, type PackageCode } from './demo-network';
 import { DEMO_SEED, generateNetwork } from './generate-network';
-import { cohortOf, PLANTED_FACTS } from './planted-facts';
+import { PLANTED_FACTS } from './planted-facts';
 
 /** A car of the demo with what follows from its job: for recounting the planted facts without a database. */
 export interface Car {
@@ -137,40 +137,9 @@ export function adjustedRot(cars: Car[], region: string): number {
   }, 0);
 }
 
-function carYears(car: Car, today: string): number {
-  const until = car.warrantyEnd < today ? car.warrantyEnd : today;
-  return (dayNumber(until) - dayNumber(car.content.completedOn)) / 365.25;
-}
-
-/** Counted claims a year of cover run. */
-export function claimsPerCarYear(cars: Car[], today: string): number {
-  const years = cars.reduce((all, car) => all + carYears(car, today), 0);
-  return cars.reduce((all, car) => all + car.claims.length, 0) / years;
-}
-
 /** Counted claims a car. */
 export function claimsPerCar(cars: Car[]): number {
   return cars.reduce((all, car) => all + car.claims.length, 0) / cars.length;
-}
-
-/** What the network's claims a car by package, age band and cohort would give for the branch's own cars. */
-export function expectedClaims(cars: Car[], branch: string): number {
-  const groups = new Map<string, Car[]>();
-  const key = (car: Car) =>
-    `${car.content.package} ${car.figures.ageBand} ${cohortOf(car.content.completedOn)}`;
-  for (const car of cars) {
-    const group = groups.get(key(car));
-    if (group) group.push(car);
-    else groups.set(key(car), [car]);
-  }
-  const rates = new Map([...groups].map(([name, group]) => [name, claimsPerCar(group)]));
-  return carsOf(cars, branch).reduce((all, car) => all + rates.get(key(car))!, 0);
-}
-
-/** Counted claims against what the network would lead one to expect. */
-export function observedOverExpected(cars: Car[], branch: string): number {
-  const observed = carsOf(cars, branch).reduce((all, car) => all + car.claims.length, 0);
-  return observed / expectedClaims(cars, branch);
 }
 
 /** Slope of the least-squares line, x centred first. */

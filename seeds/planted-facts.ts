@@ -1,3 +1,4 @@
+import { halfYearLater, halfYearOf } from '#shared/domain/half-year';
 import type { Check, Stage, Zone } from '#shared/domain/vocabulary';
 
 /**
@@ -46,6 +47,7 @@ export const PLANTED_FACTS = {
     halfYearsBack: 5,
     claimsTimes: 2.4,
     claimsPerCarAboveNeighboursTimes: 1.4,
+    observedOverExpectedAbove: 1.4,
   },
   /** No claim at all, the best rate of the network, and too few cars for it to mean anything. */
   goodSmallBranch: {
@@ -81,18 +83,5 @@ export const PLANTED_FACTS = {
 
 /** The calendar half-year (`2024-H1`) whose cars come back more often, seen from a day. */
 export function badCohortOn(today: string): string {
-  const index =
-    Number(today.slice(0, 4)) * 2 +
-    (Number(today.slice(5, 7)) > 6 ? 1 : 0) -
-    PLANTED_FACTS.badCohort.halfYearsBack;
-  return halfYearOf(index);
-}
-
-/** The calendar half-year of a date, as `2024-H1`. */
-export function cohortOf(date: string): string {
-  return halfYearOf(Number(date.slice(0, 4)) * 2 + (Number(date.slice(5, 7)) > 6 ? 1 : 0));
-}
-
-function halfYearOf(index: number): string {
-  return `${Math.floor(index / 2)}-H${(index % 2) + 1}`;
+  return halfYearLater(halfYearOf(today), -PLANTED_FACTS.badCohort.halfYearsBack);
 }
