@@ -13,6 +13,7 @@ import { answerUsual } from '../features/quote/answer-usual';
 import { answerRot } from '../features/rot/answer-rot';
 import { effectOfChange } from '../features/set-up-help/effect-of-change';
 import { normMedians } from '../features/set-up-help/norm-medians';
+import { answerWarranty } from '../features/warranty/answer-warranty';
 import { countReferrers } from '#db/queries/referrers';
 import type { ReadName, ReadTasks } from './read-tasks';
 
@@ -34,6 +35,7 @@ const ANSWERS: {
   comeBack: listComeBacks,
   quote: answerQuote,
   usual: answerUsual,
+  warranty: answerWarranty,
   audit: readAuditPage,
   auditNames: readAuditNames,
   auditCheck: checkAuditChain,

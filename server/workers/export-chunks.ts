@@ -19,6 +19,12 @@ import {
   ROT_COLUMNS,
   ROT_MODEL_COLUMNS,
   ROT_ZONE_COLUMNS,
+  WARRANTY_BRANCH_COLUMNS,
+  WARRANTY_CLAIM_FREE_COLUMNS,
+  WARRANTY_COHORT_COLUMNS,
+  WARRANTY_PROCESS_COLUMNS,
+  WARRANTY_RISK_COLUMNS,
+  WARRANTY_TRIANGLE_COLUMNS,
 } from '../features/exports/columns';
 import { csvHeader, csvRows } from '../features/exports/csv-text';
 import { everyJob, type JobsAsked } from '../features/job-list/list-jobs';
@@ -29,7 +35,11 @@ import { answerProducts, type ProductsQuestion } from '../features/products/answ
 import { answerQuote, type QuoteQuestion } from '../features/quote/answer-quote';
 import { quoteRows } from '../features/quote/quote-rows';
 import { answerRot, type RotQuestion } from '../features/rot/answer-rot';
+import { answerWarranty } from '../features/warranty/answer-warranty';
+import { warrantyRiskRows } from '../features/warranty/risk-rows';
+import type { RiskQuestion, WarrantyQuestion } from '../features/warranty/warranty-question';
 import type { RotZone } from '#shared/contracts/rot';
+import type { WarrantyAnswer } from '#shared/contracts/warranty';
 import type { ExportName } from './read-tasks';
 
 /** The text of an export in pieces: the header first, then rows as the same code that answers the screen gives them. */
@@ -103,6 +113,36 @@ export function* csvChunks(
       yield csvHeader(PRODUCT_NEED_COLUMNS) + csvRows(PRODUCT_NEED_COLUMNS, needs);
       return;
     }
+    case 'warranty-risk': {
+      const rows = warrantyRiskRows(db, input as RiskQuestion, reference);
+      yield csvHeader(WARRANTY_RISK_COLUMNS) + csvRows(WARRANTY_RISK_COLUMNS, rows);
+      return;
+    }
+    case 'warranty-claim-free': {
+      const rows = byCurve(answerWarranty(db, input as WarrantyQuestion, reference));
+      yield csvHeader(WARRANTY_CLAIM_FREE_COLUMNS) + csvRows(WARRANTY_CLAIM_FREE_COLUMNS, rows);
+      return;
+    }
+    case 'warranty-cohorts': {
+      const { cohorts } = answerWarranty(db, input as WarrantyQuestion, reference);
+      yield csvHeader(WARRANTY_COHORT_COLUMNS) + csvRows(WARRANTY_COHORT_COLUMNS, cohorts);
+      return;
+    }
+    case 'warranty-triangle': {
+      const rows = byDevelopment(answerWarranty(db, input as WarrantyQuestion, reference));
+      yield csvHeader(WARRANTY_TRIANGLE_COLUMNS) + csvRows(WARRANTY_TRIANGLE_COLUMNS, rows);
+      return;
+    }
+    case 'warranty-branches': {
+      const { branches } = answerWarranty(db, input as WarrantyQuestion, reference);
+      yield csvHeader(WARRANTY_BRANCH_COLUMNS) + csvRows(WARRANTY_BRANCH_COLUMNS, branches);
+      return;
+    }
+    case 'warranty-process': {
+      const { process } = answerWarranty(db, input as WarrantyQuestion, reference);
+      yield csvHeader(WARRANTY_PROCESS_COLUMNS) + csvRows(WARRANTY_PROCESS_COLUMNS, process);
+      return;
+    }
     case 'come-back': {
       yield csvHeader(COME_BACK_COLUMNS);
       for (const page of everyComeBack(db, input as ComeBacksAsked)) {
@@ -123,4 +163,18 @@ function bySide(zones: readonly RotZone[]): object[] {
     { ...zone, side: null },
     ...sides.map((side) => ({ ...zone, ...side })),
   ]);
+}
+
+/** A row a month of all cars (`group` empty) and of each group shown. */
+function byCurve({ claimFree, groups }: WarrantyAnswer): object[] {
+  return [{ key: null, months: claimFree }, ...groups].flatMap(({ key, months }) =>
+    months.map((month) => ({ group: key, ...month })),
+  );
+}
+
+/** A row a cohort and development half-year. */
+function byDevelopment({ triangle }: WarrantyAnswer): object[] {
+  return triangle.rows.flatMap(({ cohort, cumulativeCents }) =>
+    cumulativeCents.map((cents, development) => ({ cohort, development, cumulativeCents: cents })),
+  );
 }

@@ -6,6 +6,7 @@ import type { ProductNeedAnswer, ProductsAnswer } from '#shared/contracts/produc
 import type { QuoteAnswer } from '#shared/contracts/quote';
 import type { RotAnswer } from '#shared/contracts/rot';
 import type { UsualCar } from '#shared/contracts/usual';
+import type { WarrantyAnswer } from '#shared/contracts/warranty';
 import type { CatalogueRow, Referrers } from '#db/queries/referrers';
 import type { OutOf } from '#shared/contracts/endpoint';
 import type { Effect, getNormMedians } from '#shared/contracts/set-up-help';
@@ -27,6 +28,7 @@ import type { ProductsQuestion } from '../features/products/answer-products';
 import type { QuoteQuestion } from '../features/quote/answer-quote';
 import type { AskedCar } from '../features/quote/quoted-car';
 import type { RotQuestion } from '../features/rot/answer-rot';
+import type { RiskQuestion, WarrantyQuestion } from '../features/warranty/warranty-question';
 
 /** What a worker can be asked, and what it answers. The scope goes along packed; everything else is plain data. */
 export interface ReadTasks {
@@ -40,6 +42,7 @@ export interface ReadTasks {
   comeBack: { input: ComeBackQuestion; output: ComeBackPage };
   quote: { input: QuoteQuestion; output: QuoteAnswer };
   usual: { input: AskedCar; output: UsualCar };
+  warranty: { input: WarrantyQuestion; output: WarrantyAnswer };
   audit: { input: AuditQuestion; output: AuditPage };
   auditNames: { input: null; output: { actors: string[]; actions: string[] } };
   effect: { input: EffectQuestion; output: Effect };
@@ -63,6 +66,12 @@ export interface ExportTasks {
   'product-need': NeedQuestion;
   quote: QuoteQuestion;
   'come-back': ComeBacksAsked;
+  'warranty-risk': RiskQuestion;
+  'warranty-claim-free': WarrantyQuestion;
+  'warranty-cohorts': WarrantyQuestion;
+  'warranty-triangle': WarrantyQuestion;
+  'warranty-branches': WarrantyQuestion;
+  'warranty-process': WarrantyQuestion;
   audit: AuditFilters;
 }
 

@@ -67,6 +67,30 @@ export const COME_BACK_COLUMNS = [
   ...['changedBy', 'changedAt', 'closedByJobRef'],
 ];
 
+/** As rule 51 fixes them; the interval is that of the rate. */
+export const WARRANTY_RISK_COLUMNS = [
+  ...['branch', 'cohort', 'carsCovered', 'carYearsRun', 'carYearsLeft', 'claims', 'paidCents'],
+  ...['per1000', 'lower', 'upper', 'expected', 'ratio', 'outstandingCents'],
+  ...['standardErrorCents', 'claimsOpen'],
+];
+
+export const WARRANTY_CLAIM_FREE_COLUMNS = [
+  ...['group', 'month', 'atRisk', 'claims', 'share', 'lower', 'upper'],
+];
+
+export const WARRANTY_COHORT_COLUMNS = [
+  ...['cohort', 'cars', 'latestCents', 'ultimateCents', 'outstandingCents'],
+  ...['standardErrorCents', 'claims', 'expected', 'ratio', 'lower', 'upper'],
+];
+
+export const WARRANTY_TRIANGLE_COLUMNS = ['cohort', 'development', 'cumulativeCents'];
+
+export const WARRANTY_BRANCH_COLUMNS = [
+  ...['branch', 'cars', 'carYears', 'claims', 'expected', 'ratio', 'lower', 'upper'],
+];
+
+export const WARRANTY_PROCESS_COLUMNS = ['check', 'riskRatio', 'lower', 'upper', 'strata'];
+
 /** The detail is JSON in its cell. */
 export const AUDIT_COLUMNS = [
   ...['id', 'at', 'actor', 'address', 'action', 'subject', 'branch', 'detail', 'hash'],

@@ -15,7 +15,14 @@ import {
   exportRot,
   exportRotModels,
   exportRotZones,
+  exportWarrantyBranches,
+  exportWarrantyClaimFree,
+  exportWarrantyCohorts,
+  exportWarrantyProcess,
+  exportWarrantyRisk,
+  exportWarrantyTriangle,
 } from '#shared/contracts/exports';
+import { MOST_CURVES } from '#shared/contracts/warranty';
 import { breaksOfPeriod } from '#shared/domain/period';
 import { refuseInput } from '#shared/domain/refusal';
 import { actorOf } from '../../auth/caller';
@@ -27,6 +34,7 @@ import { jobListQuestion } from '../../http/job-list-question';
 import { mount, type Call, type Mounting, type Reply } from '../../http/mount';
 import { quoteQuestion } from '../../http/quote-question';
 import { scopeQuestion } from '../../http/scope-question';
+import { breaksOfGroups, coverQuestion } from '../../http/warranty-question';
 import type { Kit } from '../../kit';
 
 /** Everything that leaves as a file; each export is in the audit trail before its first byte. */
@@ -83,6 +91,34 @@ export function mountExports(mounting: Mounting, kit: Kit): void {
       return exported(kit, call, name, scope, () => kit.reads.stream(name, scope, question));
     });
   }
+
+  for (const [contract, name] of [
+    [exportWarrantyClaimFree, 'warranty-claim-free'],
+    [exportWarrantyCohorts, 'warranty-cohorts'],
+    [exportWarrantyTriangle, 'warranty-triangle'],
+    [exportWarrantyBranches, 'warranty-branches'],
+    [exportWarrantyProcess, 'warranty-process'],
+  ] as const) {
+    mount(mounting, contract, (call) => {
+      const { groupBy, group: groups, ...query } = call.query;
+      const problems = breaksOfGroups(groups, MOST_CURVES);
+      const { scope, ...asked } = coverQuestion(kit, call.scope, query, problems);
+      return exported(kit, call, name, scope, () =>
+        kit.reads.stream(name, scope, { ...asked, groupBy, groups }),
+      );
+    });
+  }
+
+  mount(mounting, exportWarrantyRisk, (call) => {
+    // Region and branch choose rows; what they are a part of is the network's (rule 51).
+    const { region: _region, branch: _branch, ...query } = call.query;
+    const { scope, ...asked } = coverQuestion(kit, call.scope, query);
+    const chosen = scope.narrow(call.query);
+    const branches = chosen.branches.map(({ code }) => code);
+    return exported(kit, call, 'warranty-risk', chosen, () =>
+      kit.reads.stream('warranty-risk', scope, { ...asked, branches }),
+    );
+  });
 
   mount(mounting, exportAudit, (call) => {
     const { from, to } = call.query;
