@@ -50,6 +50,8 @@ describe('definitions', () => {
     ...['bridge', 'weekly-chart', 'signals', 'trend', 'unbilled', 'beyond-charged', 'overrun'],
     ...['overrun-interval', 'quantiles', 'allowance', 'age-band', 'rot', 'without-cost'],
     ...['product-use', 'under-and-over', 'ratio-to-norm', 'product-temperature', 'coming-need'],
+    ...['claims-counted', 'claim-rate', 'claim-free', 'log-rank', 'still-to-come'],
+    ...['against-expected', 'process-risk', 'thin-product', 'warranty-report', 'warranty-left-out'],
     ...['small-samples', 'weeks', 'rounding', 'scope'],
   ])('a figure shown so far, %s: it is defined', (id) => {
     expect(ids).toContain(id);

@@ -6,6 +6,7 @@ import { productDefinitions } from './product-definitions';
 import { quoteDefinitions } from './quote-definitions';
 import { readingDefinitions } from './reading-definitions';
 import { rotDefinitions } from './rot-definitions';
+import { warrantyDefinitions } from './warranty-definitions';
 import { weeklyDefinitions } from './weekly-definitions';
 
 /** Every figure shown so far, in the order in which the page tells them. A new figure adds its definition to one of these groups. */
@@ -15,6 +16,7 @@ export const DEFINITION_GROUPS: readonly DefinitionGroup[] = [
   { id: 'labour', title: 'Labour overrun', definitions: labourDefinitions },
   { id: 'rot-found', title: 'Rot', definitions: rotDefinitions },
   { id: 'product', title: 'Product', definitions: productDefinitions },
+  { id: 'warranty', title: 'Warranty', definitions: warrantyDefinitions },
   { id: 'come-backs', title: 'Left on cars', definitions: comeBackDefinitions },
   { id: 'quotes', title: 'The next car', definitions: quoteDefinitions },
   { id: 'reading', title: 'What counts, and how it is shown', definitions: readingDefinitions },
