@@ -27,6 +27,8 @@ export interface DotIntervalInput {
   readonly summary: string;
   readonly rows: readonly IntervalRow[];
   readonly scale: 'linear' | 'log';
+  /** `ledger`: every dot filled and a hairline under every row, for groups of one rank. */
+  readonly look?: 'plain' | 'ledger';
   readonly reference: number;
   /** Offered marks; those inside the axis are drawn, the reference always. */
   readonly marks: readonly AxisMark[];

@@ -77,6 +77,14 @@ describe('layOutDotInterval', () => {
     expect(picture.rows[0]!.y).toBe(picture.rows[0]!.wordY);
   });
 
+  it('a ledger: a hairline between every two rows, none otherwise', () => {
+    const { rules, rows } = layOutDotInterval({ ...input, look: 'ledger' }, 600);
+    expect(rules).toHaveLength(2);
+    expect(rules[0]).toBeGreaterThan(rows[0]!.y);
+    expect(rules[0]).toBeLessThan(rows[1]!.y);
+    expect(layOutDotInterval(input, 600).rules).toEqual([]);
+  });
+
   it('no groups: an empty picture', () => {
     expect(layOutDotInterval({ ...input, rows: [] }, 600).rows).toEqual([]);
   });

@@ -19,6 +19,9 @@ export interface PlacedInterval extends RowPlace {
 
 /** Everything the chart draws, in px of the picture. */
 export interface DotIntervalLayout extends RowFrame {
+  readonly look: 'plain' | 'ledger';
+  /** Heights of the hairlines between rows. */
+  readonly rules: readonly number[];
   readonly rows: readonly PlacedInterval[];
 }
 
@@ -37,8 +40,13 @@ export function layOutDotInterval(input: DotIntervalInput, width: number): DotIn
     },
     width,
   );
+  const look = input.look ?? 'plain';
+  const pitch = (frame.bottom - frame.head) / Math.max(1, rows.length);
   return {
     ...frame,
+    look,
+    rules:
+      look === 'plain' ? [] : rows.slice(1).map((_row, index) => frame.head + (index + 1) * pitch),
     rows: places.map((place, index) => placeRow(rows[index]!, axis, place)),
   };
 }
