@@ -1,0 +1,86 @@
+import { warrantyBranch, warrantyReport } from '../../testing/warranty-report-answers';
+import { branchesSentence, plainWords, rateSentence, reportSentence } from './report-answer';
+import { formatDate } from '../../ui/format';
+
+const DAY = formatDate('2026-02-01');
+const EVALUATED = formatDate('2025-12-31');
+
+const above = (branch: string) => warrantyBranch({ branch, lower: 1.1, upper: 2, ratio: 1.5 });
+
+describe('reportSentence', () => {
+  it('an estimate with its error, says the day, the figure no finer than its interval, and the cars', () => {
+    expect(plainWords(reportSentence(warrantyReport()))).toBe(
+      `As of ${DAY}, the warranties sold will still cost about €5,000, give or take €1,400 (2,300 cars).`,
+    );
+  });
+
+  it('without an error, gives the figure and says that its certainty is not known', () => {
+    const total = {
+      latestCents: 100,
+      ultimateCents: 500,
+      outstandingCents: 400,
+      standardErrorCents: null,
+    };
+    expect(plainWords(reportSentence(warrantyReport({}, { total })))).toContain(
+      'about €4, how sure is not known (2,300 cars).',
+    );
+  });
+
+  it('nothing paid yet, says why there is no figure', () => {
+    const total = {
+      latestCents: 0,
+      ultimateCents: 0,
+      outstandingCents: 0,
+      standardErrorCents: null,
+    };
+    expect(plainWords(reportSentence(warrantyReport({}, { total })))).toContain(
+      `no claim was paid by ${EVALUATED}`,
+    );
+  });
+
+  it('no car under warranty, says only that', () => {
+    expect(plainWords(reportSentence(warrantyReport({}, { covered: 0 })))).toBe(
+      `No car had been finished with a warranty by ${DAY}.`,
+    );
+  });
+});
+
+describe('branchesSentence', () => {
+  it('one branch outside, names it with its claims and counts the others', () => {
+    expect(branchesSentence(warrantyReport())).toBe(
+      'Tangmoor has 66 claims where 40 were expected; the other 2 branches are as expected.',
+    );
+  });
+
+  it('many outside, counts them by side', () => {
+    const branches = ['A', 'B', 'C', 'D', 'E'].map((code) => above(code));
+    const low = warrantyBranch({ branch: 'F', lower: 0.2, upper: 0.6 });
+    expect(branchesSentence(warrantyReport({}, { branches: [...branches, low] }))).toBe(
+      '5 branches stand above expectation and 1 below.',
+    );
+  });
+
+  it('none outside, says that all are as expected', () => {
+    expect(branchesSentence(warrantyReport({}, { branches: [warrantyBranch()] }))).toBe(
+      'The one branch is as expected.',
+    );
+  });
+
+  it('nothing was expected anywhere, says nothing', () => {
+    const branches = [warrantyBranch({ ratio: null, lower: null, upper: null })];
+    expect(branchesSentence(warrantyReport({}, { branches }))).toBe('');
+  });
+});
+
+describe('rateSentence', () => {
+  it('with cover, gives the rate with its interval and what was paid', () => {
+    expect(rateSentence(warrantyReport())).toBe(
+      `118 claims in 6,800 car-years of cover: 17.4 per 1,000 (95 % interval 14.4–20.8). €14,001 was paid by ${EVALUATED}.`,
+    );
+  });
+
+  it('without cover, gives no rate', () => {
+    const rate = { claims: 0, carYears: 0, per1000: null, lower: null, upper: null };
+    expect(rateSentence(warrantyReport({}, { rate }))).toBe(`€14,001 was paid by ${EVALUATED}.`);
+  });
+});
