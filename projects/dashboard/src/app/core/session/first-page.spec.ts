@@ -17,12 +17,12 @@ describe('firstPage', () => {
   it.each([
     [{ branches: [], packages: [{}] }, '/first-run'],
     [{ branches: [{}], packages: [] }, '/first-run'],
-    [{ branches: [{}], packages: [{}] }, '/this-week'],
+    [{ branches: [{}], packages: [{}] }, '/warranty'],
   ])('head office, with a catalogue of %j, is led to %s', async (catalogue, page) => {
     expect(await ledTo(catalogue)).toBe(page);
   });
 
   it('head office, where the catalogue does not answer, is led to where the page itself says so', async () => {
-    expect(await ledTo(undefined)).toBe('/this-week');
+    expect(await ledTo(undefined)).toBe('/warranty');
   });
 });

@@ -39,11 +39,18 @@ describe('Header', () => {
       'Overruns',
       'Rot',
       'Product',
+      'Warranty',
       'Jobs',
       'Send a job',
       'Come-backs',
       'Quote',
     ]);
+  });
+
+  it('to head office names Warranty first', async () => {
+    const shown = names(await shownTo('head_office'));
+    expect(shown[0]).toBe('Warranty');
+    expect(shown.filter((name) => name === 'Warranty')).toHaveLength(1);
   });
 
   it('on a job sheet marks Jobs as open, with the bead under it', async () => {
