@@ -1,6 +1,7 @@
 import type { JobSheet } from '#shared/contracts/jobs';
 import { addMonths, ageInYears } from '#shared/domain/calendar';
 import { CHECKS } from '#shared/domain/vocabulary';
+import type { Fact } from '../../ui/fact-list/fact-list';
 import {
   formatCount,
   formatCounted,
@@ -11,14 +12,6 @@ import {
   formatShare,
 } from '../../ui/format';
 import { BODY_TYPE_NAMES, CHECK_ANSWER_NAMES, CHECK_NAMES } from '../../ui/words';
-
-/** A thing recorded and what it says. */
-export interface Fact {
-  readonly name: string;
-  readonly text: string;
-  /** Something that asks for a second look; said in words too. */
-  readonly marked?: boolean;
-}
 
 /** The car as the branch described it. */
 export function carFacts(job: JobSheet): readonly Fact[] {

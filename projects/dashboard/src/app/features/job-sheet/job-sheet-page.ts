@@ -22,6 +22,7 @@ import { Answer } from '../../ui/answer/answer';
 import { Caution } from '../../ui/caution/caution';
 import { CellTemplate } from '../../ui/data-table/cell-template';
 import { DataTable } from '../../ui/data-table/data-table';
+import { type Fact, FactList } from '../../ui/fact-list/fact-list';
 import {
   currencySign,
   formatCount,
@@ -37,8 +38,7 @@ import { CONSUMABLE_NAMES } from '../../ui/words';
 import { UndersideMarks } from '../../underside-map/underside-marks';
 import { BRIDGE_COLUMNS, bridgeSeries } from './bridge-series';
 import { cautionsOf } from './cautions';
-import { FactList } from './fact-list';
-import { billFacts, carFacts, checkFacts, dateFacts, type Fact, workshopFacts } from './facts';
+import { billFacts, carFacts, checkFacts, dateFacts, workshopFacts } from './facts';
 import { FindingsList } from './findings-list';
 import { missingCostWords } from './missing-cost-words';
 import { moneyLines } from './money-lines';

@@ -1,5 +1,12 @@
 import { ChangeDetectionStrategy, Component, input } from '@angular/core';
-import type { Fact } from './facts';
+
+/** A thing recorded and what it says. */
+export interface Fact {
+  readonly name: string;
+  readonly text: string;
+  /** Something that asks for a second look; said in words too. */
+  readonly marked?: boolean;
+}
 
 /** Facts as pairs of a quiet name and what is recorded. */
 @Component({
