@@ -3,7 +3,7 @@ import { claimStanding } from '#shared/domain/claim-standing';
 import { CoverCells, type CoverCell } from '#shared/domain/cover-cells';
 import { CoverBook, monthInService, yearInService } from '#shared/domain/warranty-cover';
 import type { Connection } from './database';
-import { readCoveredClaims, readCoverLists } from './queries/warranty';
+import { readCoveredClaims, readCoverByBranch } from './queries/warranty';
 
 /** A cell of one branch. */
 export interface BranchCell extends CoverCell {
@@ -23,12 +23,14 @@ export function branchCells(
     if (!cells) branches.set(branchId, (cells = new CoverCells()));
     return cells;
   };
-  const cars = readCoverLists(connection, facts());
-  for (let car = 0; car < cars.branchIds.length; car += 1) {
-    const cover = book.coverOf(cars.completedOn[car] as string, cars.warrantyMonths[car] as number);
-    if (!cover) continue;
-    const cells = cellsOf(cars.branchIds[car] as number);
-    cells.addCar(cars.packageIds[car] as number, cars.bands[car] as number, cover);
+  for (const cars of readCoverByBranch(connection, facts())) {
+    for (let car = 0; car < cars.completedOn.length; car += 1) {
+      const months = cars.warrantyMonths[car] as number;
+      const cover = book.coverOf(cars.completedOn[car] as string, months);
+      if (!cover) continue;
+      const cells = cellsOf(cars.branchId);
+      cells.addCar(cars.packageIds[car] as number, cars.bands[car] as number, cover);
+    }
   }
   for (const claim of readCoveredClaims(connection, facts(), asOf)) {
     const { branchId, packageId, band, completedOn, warrantyMonths, madeOn } = claim;

@@ -5,9 +5,8 @@ import { sql, type Connection } from '../database';
 import type { ScopedDb } from '../scoped-db';
 import { whereJobs, type JobFilters } from './job-filters';
 
-/** What cover is counted by, one place a car in every list. */
+/** What cover is counted by, one place a car in every list, day by day. */
 export interface CoverLists {
-  branchIds: number[];
   packageIds: number[];
   /** Places in `AGE_BANDS`. */
   bands: number[];
@@ -17,6 +16,7 @@ export interface CoverLists {
 
 /** The cars of a question, one place a car in every list. */
 export interface WarrantyCars extends CoverLists {
+  branchIds: number[];
   jobIds: number[];
   /** How each was worked, as `practiceOf` reads it. */
   practices: number[];
@@ -54,12 +54,13 @@ export interface CoveredClaim {
   decidedOn: string | null;
 }
 
+/** More than there are age bands, and more than any warranty has months. */
+const [BANDS, MONTHS] = [8, 1024];
+
+/** One number a car instead of three lists, which would take twice as long. */
 const COVER = {
-  branchIds: 'branch_id',
-  packageIds: 'package_id',
-  bands: 'age_band',
   completedOn: 'completed_on',
-  warrantyMonths: 'warranty_months',
+  sold: `(package_id * ${BANDS} + age_band) * ${MONTHS} + warranty_months`,
 } as const;
 
 /** Answers to a check, none, yes, no and not applicable, as figures of a number with base 4. */
@@ -76,11 +77,16 @@ const PRACTICE = CHECKS.map(checkColumn).reduce(
 
 /** Reads every car once: figures are told by so many things that each would sort them all again. */
 export function readWarrantyCars(db: ScopedDb, filters: JobFilters): WarrantyCars {
-  const columns = { ...COVER, jobIds: 'job_id', practices: PRACTICE };
+  const columns = { ...COVER, branchIds: 'branch_id', jobIds: 'job_id', practices: PRACTICE };
   const row = db.first<Record<keyof typeof columns, string>>(
     whereJobs(db.table('job_facts'), filters).select(listsOf(columns)),
   );
-  return parsed<WarrantyCars>(row, columns);
+  return {
+    ...coverLists(row),
+    branchIds: listOf(row?.branchIds),
+    jobIds: listOf(row?.jobIds),
+    practices: listOf(row?.practices),
+  };
 }
 
 /** How a car was worked, out of its number. */
@@ -113,10 +119,16 @@ export function readClaims(db: ScopedDb, asOf: string): ClaimRow[] {
   );
 }
 
-/** What cover is counted by, of whichever facts a reader beyond scope asks for. */
-export function readCoverLists(connection: Connection, facts: Knex.QueryBuilder): CoverLists {
-  const row = connection.first<Record<keyof typeof COVER, string>>(facts.select(listsOf(COVER)));
-  return parsed<CoverLists>(row, COVER);
+/** What cover is counted by, branch by branch, of whichever facts a reader beyond scope asks for. */
+export function readCoverByBranch(
+  connection: Connection,
+  facts: Knex.QueryBuilder,
+): (CoverLists & { branchId: number })[] {
+  return connection
+    .all<Record<keyof typeof COVER, string> & { branchId: number }>(
+      facts.groupBy('branch_id').select({ branchId: 'branch_id' }, listsOf(COVER)),
+    )
+    .map(({ branchId, ...lists }) => ({ branchId, ...coverLists(lists) }));
 }
 
 /** The claims made by a day on whichever facts a reader beyond scope asks for. */
@@ -153,8 +165,16 @@ function listsOf(columns: Readonly<Record<string, string>>): Knex.Raw {
   return sql.raw(lists.join(', '));
 }
 
-function parsed<Lists>(row: Record<string, string> | undefined, columns: object): Lists {
-  return Object.fromEntries(
-    Object.keys(columns).map((name) => [name, JSON.parse(row?.[name] ?? '[]') as unknown]),
-  ) as Lists;
+function coverLists(row: Record<keyof typeof COVER, string> | undefined): CoverLists {
+  const sold = listOf<number>(row?.sold);
+  return {
+    completedOn: listOf(row?.completedOn),
+    packageIds: sold.map((one) => Math.floor(one / MONTHS / BANDS)),
+    bands: sold.map((one) => Math.floor(one / MONTHS) % BANDS),
+    warrantyMonths: sold.map((one) => one % MONTHS),
+  };
+}
+
+function listOf<Value>(list: string | undefined): Value[] {
+  return JSON.parse(list ?? '[]') as Value[];
 }

@@ -10,42 +10,48 @@ export interface CoverCell {
   claims: number;
 }
 
-/** More years in service than any warranty has. */
-const YEARS = 64;
+/** More than there are age bands. */
 const BANDS = 8;
 
 /** Adds up cars and their claims cell by cell. A car on its first day is in its first year's cell, with no day run. */
 export class CoverCells {
-  private readonly cells = new Map<number, CoverCell>();
+  /** The years of each package and age band, the first year first. */
+  private readonly kinds = new Map<number, CoverCell[]>();
 
   addCar(packageId: number, band: number, { daysByYear }: Pick<Cover, 'daysByYear'>): void {
-    for (let year = 1; year <= daysByYear.length; year += 1) {
-      this.cell(packageId, band, year).days += daysByYear[year - 1] as number;
+    const years = this.yearsOf(packageId, band, daysByYear.length);
+    for (let year = 0; year < daysByYear.length; year += 1) {
+      (years[year] as CoverCell).days += daysByYear[year] as number;
     }
   }
 
   addClaim(packageId: number, band: number, year: number): void {
-    this.cell(packageId, band, year).claims += 1;
+    (this.yearsOf(packageId, band, year)[year - 1] as CoverCell).claims += 1;
   }
 
   /** Takes over what others have added up. */
   addAll(others: CoverCells): void {
-    for (const { packageId, band, year, days, claims } of others.cells.values()) {
-      const cell = this.cell(packageId, band, year);
+    for (const { packageId, band, year, days, claims } of others.list()) {
+      const cell = this.yearsOf(packageId, band, year)[year - 1] as CoverCell;
       cell.days += days;
       cell.claims += claims;
     }
   }
 
-  /** Every cell with a car, always in the same order. */
+  /** Every cell that a car has come to, always in the same order. */
   list(): CoverCell[] {
-    return [...this.cells].sort(([one], [other]) => one - other).map(([, cell]) => ({ ...cell }));
+    return [...this.kinds]
+      .sort(([one], [other]) => one - other)
+      .flatMap(([, years]) => years.map((cell) => ({ ...cell })));
   }
 
-  private cell(packageId: number, band: number, year: number): CoverCell {
-    const key = (packageId * BANDS + band) * YEARS + year;
-    let cell = this.cells.get(key);
-    if (!cell) this.cells.set(key, (cell = { packageId, band, year, days: 0, claims: 0 }));
-    return cell;
+  private yearsOf(packageId: number, band: number, most: number): CoverCell[] {
+    const key = packageId * BANDS + band;
+    let years = this.kinds.get(key);
+    if (!years) this.kinds.set(key, (years = []));
+    while (years.length < most) {
+      years.push({ packageId, band, year: years.length + 1, days: 0, claims: 0 });
+    }
+    return years;
   }
 }

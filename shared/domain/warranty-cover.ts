@@ -57,20 +57,33 @@ export function coverOf(
   return { end, daysRun: over - begun, daysLeft: last - over, daysByYear, lastMonth };
 }
 
+interface CoversOfDay {
+  completedOn: string;
+  covers: Map<number, Cover | undefined>;
+}
+
 /** The covers of many cars on one day: those completed on the same day with the same warranty share one. */
 export class CoverBook {
-  private readonly known = new Map<string, Map<number, Cover | undefined>>();
+  private readonly known = new Map<string, CoversOfDay>();
+  /** Cars come day by day: the day of the one before is most often that of the next. */
+  private day: CoversOfDay = { completedOn: '', covers: new Map() };
 
   constructor(private readonly asOf: string) {}
 
   coverOf(completedOn: string, warrantyMonths: number): Cover | undefined {
-    let ofDay = this.known.get(completedOn);
-    if (!ofDay) this.known.set(completedOn, (ofDay = new Map<number, Cover | undefined>()));
-    let cover = ofDay.get(warrantyMonths);
+    if (this.day.completedOn !== completedOn) this.day = this.dayOf(completedOn);
+    const { covers } = this.day;
+    let cover = covers.get(warrantyMonths);
     if (!cover) {
       cover = coverOf(completedOn, warrantyMonths, this.asOf);
-      ofDay.set(warrantyMonths, cover);
+      covers.set(warrantyMonths, cover);
     }
     return cover;
+  }
+
+  private dayOf(completedOn: string): CoversOfDay {
+    let day = this.known.get(completedOn);
+    if (!day) this.known.set(completedOn, (day = { completedOn, covers: new Map() }));
+    return day;
   }
 }

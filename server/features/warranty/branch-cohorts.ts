@@ -22,12 +22,15 @@ export interface BranchCohort {
 export function branchCohorts(asked: CarsAsked): BranchCohort[] {
   const { cars, covers, cohorts, claims, asOf } = asked;
   const groups = new Map<string, BranchCohort>();
+  let before = emptyGroup(0, '');
   const groupOf = (car: number): BranchCohort => {
     const [branchId, cohort] = [cars.branchIds[car] as number, cohorts[car] as string];
+    // Cars come branch by branch and day by day: most often it is the group of the one before.
+    if (before.branchId === branchId && before.cohort === cohort) return before;
     const key = `${branchId}/${cohort}`;
     let group = groups.get(key);
     if (!group) groups.set(key, (group = emptyGroup(branchId, cohort)));
-    return group;
+    return (before = group);
   };
   covers.forEach((cover, car) => {
     const group = groupOf(car);

@@ -51,11 +51,20 @@ export function readCarsAsked(
   return {
     asOf,
     cars,
-    cohorts: cars.completedOn.map(halfYearOf),
+    cohorts: halfYearsOf(cars.completedOn),
     covers,
     claims,
     firstClaims: firstMonths(claims),
   };
+}
+
+/** Cars come day by day, so each half-year's text is made once for many of them. */
+function halfYearsOf(days: readonly string[]): string[] {
+  let [day, halfYear] = ['', ''];
+  return days.map((on) => {
+    if (on !== day) [day, halfYear] = [on, halfYearOf(on)];
+    return halfYear;
+  });
 }
 
 /** Claims with the place of their car; those on other cars, or on void jobs, are not asked for. */
