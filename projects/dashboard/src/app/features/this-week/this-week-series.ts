@@ -15,7 +15,8 @@ const CARS_AT_FIRST = 25;
 export interface ThisWeekView {
   readonly standing: Standing;
   readonly answer: WeekAnswer;
-  readonly chart: WeekChart;
+  /** Null where no week of it has a car. */
+  readonly chart: WeekChart | null;
   /** Absent where no billed car has an estimate and a norm. */
   readonly bridge: WeekBridge | null;
   readonly cars: {
@@ -38,7 +39,9 @@ export function thisWeekView(answers: WeekAnswers, words: WeekWords): ThisWeekVi
   return {
     standing,
     answer: answerWeek(answers, standing, words),
-    chart: weekChart(answers.chart, standing.week),
+    chart: answers.chart.weeks.some(({ jobs }) => jobs > 0)
+      ? weekChart(answers.chart, standing.week)
+      : null,
     bridge: bridge.cars > 0 ? weekBridge(bridge, standing.cars, words.currency) : null,
     cars: {
       heading: 'The cars that made the week, worst first',

@@ -133,6 +133,14 @@ describe('answerWeek', () => {
     expect(second).toContain('Choose another week');
   });
 
+  it('no cars, nor in any week before: does not send anybody there', () => {
+    const { second } = say({
+      week: { jobs: 0, revenueCents: 0, marginCents: 0, marginShare: null },
+      before: { jobs: 0 },
+    });
+    expect(second).toBe('Nor in the weeks before it, in what is chosen in the line above.');
+  });
+
   it('a week ahead: it is still to come', () => {
     const week = { jobs: 0, revenueCents: 0, marginCents: 0, marginShare: null, whole: false };
     expect(say({ week, today: '2026-01-20' }).first).toBe('Week 5, 2026 is still to come.');

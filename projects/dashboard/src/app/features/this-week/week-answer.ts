@@ -108,7 +108,9 @@ function whyParts(answers: WeekAnswers, standing: Standing, words: WeekWords): s
     case 'to_come':
       return ['Choose an earlier week in the line above.'];
     case 'no_cars':
-      return ['Choose another week, or more branches, packages or body types, in the line above.'];
+      return answers.chart.weeks.some(({ jobs }) => jobs > 0)
+        ? ['Choose another week, or more branches, packages or body types, in the line above.']
+        : ['Nor in the weeks before it, in what is chosen in the line above.'];
     case 'unbilled_only':
       return ['Bill them below, and the week has its margin.'];
     case 'uncosted':
