@@ -136,7 +136,7 @@ describe('answerWeek', () => {
   it('no cars, nor in any week before: does not send anybody there', () => {
     const { second } = say({
       week: { jobs: 0, revenueCents: 0, marginCents: 0, marginShare: null },
-      before: { jobs: 0 },
+      before: (earlier) => marginWeek(earlier, { jobs: 0 }),
     });
     expect(second).toBe('Nor in the weeks before it, in what is chosen in the line above.');
   });
