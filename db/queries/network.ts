@@ -1,7 +1,12 @@
 import { FROM_THE_START } from '#shared/domain/cost-book';
 import { rateOfMicros } from '#shared/domain/money';
-import { sql } from '../database';
+import { sql, type Query } from '../database';
 import type { UnscopedDb } from '../unscoped-db';
+
+/** Whatever reads the network's own row: it belongs to no branch. */
+interface NetworkRowReader {
+  first<Row>(query: Query): Row | undefined;
+}
 
 export interface NetworkRow {
   name: string;
@@ -12,7 +17,7 @@ export interface NetworkRow {
 }
 
 /** The network's own settings; `feeRate` is the one valid from the start. */
-export function readNetwork(db: UnscopedDb): NetworkRow {
+export function readNetwork(db: NetworkRowReader): NetworkRow {
   const row = db.first<Omit<NetworkRow, 'feeRate'> & { feeMicros: number | null }>(
     sql('network')
       .leftJoin('network_fees', (join) =>

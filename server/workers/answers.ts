@@ -14,8 +14,10 @@ import { answerRot } from '../features/rot/answer-rot';
 import { effectOfChange } from '../features/set-up-help/effect-of-change';
 import { normMedians } from '../features/set-up-help/norm-medians';
 import { answerWarranty } from '../features/warranty/answer-warranty';
+import { laterArrivals } from '#db/queries/later-arrivals';
 import { countReferrers } from '#db/queries/referrers';
 import type { ReadName, ReadTasks } from './read-tasks';
+import { warrantyReport, warrantyReportParts, warrantyReportPdf } from './warranty-report';
 
 /** Every answer a worker knows, by name; only those with a network figure take the reference. */
 const ANSWERS: {
@@ -36,6 +38,10 @@ const ANSWERS: {
   quote: answerQuote,
   usual: answerUsual,
   warranty: answerWarranty,
+  warrantyReport,
+  warrantyReportPdf,
+  warrantyReportParts,
+  laterArrivals: (db, { limit, ...question }) => laterArrivals(db, question, limit),
   audit: readAuditPage,
   auditNames: readAuditNames,
   auditCheck: checkAuditChain,

@@ -175,4 +175,5 @@ export const networkFeatures = [
   'network',
   'mailbox',
   'audit',
+  'warranty-reports',
 ];

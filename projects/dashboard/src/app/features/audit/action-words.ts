@@ -52,6 +52,9 @@ export const ACTION_WORDS: Readonly<Record<string, string>> = {
   'export.overrun': 'fetched a file of overruns',
   'export.rot': 'fetched a file of rot',
   'export.audit': 'fetched a file of the audit trail',
+  'export.warranty-report': 'fetched a warranty report as a file',
+  'warranty-report.issue': 'issued a warranty report',
+  'warranty-schedule.set': 'set when the warranty report is issued and mailed',
   'database.restore': 'put a backup in place',
   'demo.make': 'made the demo network',
 };
