@@ -4,6 +4,7 @@ import { APPLICATION_ID, Connection, DatabaseRefused } from './database';
 import { migrations } from './migrations';
 import { verifyAudit, type AuditCheck } from './queries/audit';
 import { firstEventAt } from './queries/audit-list';
+import { PHOTO_TABLES } from './queries/photos';
 import { UnscopedDb } from './unscoped-db';
 
 /** What a checked database file holds. */
@@ -82,11 +83,13 @@ export function inspectAudit(file: string): AuditCheck & { since: string | null 
   }
 }
 
-/** A database of before there were photos has none. */
+/** Of jobs and of claims; a database of before there were photos of either has none. */
 function photoKeysIn(driver: BetterSqlite3.Database): string[] {
-  const table = driver.prepare("select 1 from sqlite_schema where name = 'photos'").get();
-  if (table === undefined) return [];
-  return driver.prepare('select storage_key from photos').pluck().all() as string[];
+  const known = driver.prepare('select 1 from sqlite_schema where name = ?');
+  return Object.values(PHOTO_TABLES).flatMap(({ table }) => {
+    if (known.get(table) === undefined) return [];
+    return driver.prepare(`select storage_key from ${table}`).pluck().all() as string[];
+  });
 }
 
 /**

@@ -1,7 +1,14 @@
 import type { Knex } from 'knex';
 import { sql, type Connection } from './database';
 import { recordAudit, type Deed } from './queries/audit';
-import { findPhoto, listPhotos, standsJob, type PhotoRow } from './queries/photos';
+import {
+  findPhoto,
+  listPhotos,
+  PHOTO_TABLES,
+  standsPlace,
+  type PhotoPlace,
+  type PhotoRow,
+} from './queries/photos';
 import type { ScopedBranch } from './scope';
 import type { ScopedDb } from './scoped-db';
 import type { Store } from './store';
@@ -15,7 +22,7 @@ export type KeptPhoto = Pick<
 >;
 
 /**
- * Writes what the record has of one branch's photos. Bound to its branch for life; every method runs inside
+ * Writes what the record has of one branch's photos, of jobs and of claims. Bound to its branch for life; every method runs inside
  * `WriteQueue.write`. Photos received are not copied into the trail, their rows say who and when; a photo that is replaced or
  * removed leaves no row, so the trail tells of it.
  */
@@ -31,63 +38,71 @@ export class PhotoWriter {
     this.reader = writingReader(store, branch);
   }
 
-  /** Whether there is a job that photos can belong to at this moment. */
-  standsJob(jobRef: string): boolean {
-    return standsJob(this.reader, this.branch.id, jobRef);
+  /** Whether there is a job or claim that photos can belong to at this moment. */
+  stands(place: PhotoPlace): boolean {
+    return standsPlace(this.reader, this.branch.id, place);
   }
 
-  /** How many photos a job has. */
-  count(jobRef: string): number {
-    return listPhotos(this.reader, this.branch.id, jobRef).length;
+  /** How many photos a place has. */
+  count(place: PhotoPlace): number {
+    return listPhotos(this.reader, this.branch.id, place).length;
   }
 
   /** A photo as it stands at this moment. */
-  find(jobRef: string, photo: string): PhotoRow | undefined {
-    return findPhoto(this.reader, this.branch.id, jobRef, photo);
+  find(place: PhotoPlace, photo: string): PhotoRow | undefined {
+    return findPhoto(this.reader, this.branch.id, place, photo);
   }
 
   /** Adds a photo that was not there. */
-  add(jobRef: string, photo: string, kept: KeptPhoto, { actor, at }: Deed): void {
+  add(place: PhotoPlace, photo: string, kept: KeptPhoto, { actor, at }: Deed): void {
     const sender = { received_at: at, person_id: actor.personId, push_key_id: actor.pushKeyId };
-    const key = { branch_id: this.branch.id, job_ref: jobRef, photo_ref: photo };
-    this.connection.run(sql('photos').insert({ ...key, ...columnsOf(kept), ...sender }));
+    const row = { ...this.keyOf(place, photo), ...columnsOf(place, kept), ...sender };
+    this.connection.run(sql(PHOTO_TABLES[place.of].table).insert(row));
   }
 
   /** Puts another photo, or another finding, in the place of one; who sent it last is its sender. */
-  replace(jobRef: string, former: PhotoRow, kept: KeptPhoto, deed: Deed): void {
+  replace(place: PhotoPlace, former: PhotoRow, kept: KeptPhoto, deed: Deed): void {
     const { actor, at } = deed;
     const sender = { received_at: at, person_id: actor.personId, push_key_id: actor.pushKeyId };
-    const row = this.row(jobRef, former.photo);
-    this.connection.run(row.update({ ...columnsOf(kept), ...sender }));
-    this.tell('photo.replace', former, deed);
+    const row = this.row(place, former.photo);
+    this.connection.run(row.update({ ...columnsOf(place, kept), ...sender }));
+    this.tell('photo.replace', place, former, deed);
   }
 
   /** Takes a photo out of the record. */
-  remove(jobRef: string, former: PhotoRow, deed: Deed): void {
-    this.connection.run(this.row(jobRef, former.photo).delete());
-    this.tell('photo.remove', former, deed);
+  remove(place: PhotoPlace, former: PhotoRow, deed: Deed): void {
+    this.connection.run(this.row(place, former.photo).delete());
+    this.tell('photo.remove', place, former, deed);
   }
 
-  private row(jobRef: string, photo: string): Knex.QueryBuilder {
-    return sql('photos').where({ branch_id: this.branch.id, job_ref: jobRef, photo_ref: photo });
+  private row(place: PhotoPlace, photo: string): Knex.QueryBuilder {
+    return sql(PHOTO_TABLES[place.of].table).where(this.keyOf(place, photo));
   }
 
-  private tell(action: string, former: PhotoRow, { actor, at, subject }: Deed): void {
-    const { finding, sentHash, receivedAt } = former;
+  private keyOf({ of, ref }: PhotoPlace, photo: string): Record<string, unknown> {
+    return { branch_id: this.branch.id, [PHOTO_TABLES[of].ref]: ref, photo_ref: photo };
+  }
+
+  private tell(
+    action: string,
+    { of }: PhotoPlace,
+    { finding, sentHash, receivedAt }: PhotoRow,
+    { actor, at, subject }: Deed,
+  ): void {
     recordAudit(new UnscopedDb(this.connection), {
       at,
       actor,
       action,
       subject,
       branchId: this.branch.id,
-      detail: { before: { finding, sentHash, receivedAt } },
+      detail: { before: { ...(of === 'job' && { finding }), sentHash, receivedAt } },
     });
   }
 }
 
-function columnsOf(kept: KeptPhoto): Record<string, unknown> {
+function columnsOf({ of }: PhotoPlace, kept: KeptPhoto): Record<string, unknown> {
   return {
-    finding_ref: kept.finding,
+    ...(of === 'job' && { finding_ref: kept.finding }),
     storage_key: kept.storageKey,
     sent_hash: kept.sentHash,
     width: kept.width,

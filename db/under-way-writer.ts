@@ -79,7 +79,8 @@ export class UnderWayWriter {
    */
   drop(jobRef: string, former: UnderWayRow, { actor, at, subject }: UnderWayDeed): string[] {
     const key = { branch_id: this.branch.id, job_ref: jobRef };
-    const photos = this.jobs.findJob(jobRef) ? [] : listPhotos(this.reader, this.branch.id, jobRef);
+    const place = { of: 'job', ref: jobRef } as const;
+    const photos = this.jobs.findJob(jobRef) ? [] : listPhotos(this.reader, this.branch.id, place);
     if (photos.length > 0) this.connection.run(sql('photos').where(key).delete());
     this.connection.run(sql('jobs_under_way').where(key).delete());
     recordAudit(new UnscopedDb(this.connection), {

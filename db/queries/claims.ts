@@ -78,8 +78,14 @@ export function listClaimRevisions(
 }
 
 /** Whether there is a claim of a branch whose job is not voided. */
-export function standsClaim(db: ScopedDb, branch: string, claimRef: string): boolean {
-  return db.first(standingClaim(db, branch, claimRef).select('claims.id')) !== undefined;
+export function standsClaim(db: ScopedDb, branchId: number, claimRef: string): boolean {
+  const claim = db
+    .table('claims')
+    .join(db.derived('jobs'), 'jobs.id', 'claims.job_id')
+    .where({ 'claims.branch_id': branchId, claim_ref: claimRef })
+    .whereNull('jobs.voided_at')
+    .select('claims.id');
+  return db.first(claim) !== undefined;
 }
 
 /** While its job is voided a claim is absent (rule 59). */

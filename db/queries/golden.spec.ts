@@ -6,6 +6,8 @@ import { Connection } from '../database';
 import { NetworkReference } from '../network-reference';
 import { ScopedDb } from '../scoped-db';
 import type { JobFilters } from './job-filters';
+import { iterateClaimRows, listClaimRows, sumClaims, type ClaimFilters } from './claim-list';
+import { listClaimRevisions } from './claims';
 import { iterateLeft, listLeft } from './come-back';
 import { listLeftOfJob, listMarks } from './come-back-of-job';
 import { readCostsOfDay } from './costs-of-day';
@@ -57,6 +59,11 @@ const LISTED: ListFilters = {
   productId: 1,
   text: 'x',
 };
+const CLAIMED: ClaimFilters = {
+  ...FEW,
+  ...{ counted: true, waiting: false, decision: 'open', cause: 'damage', zone: 'floor' },
+  ...{ ageBandIndex: 1, cohort: PERIOD, jobRef: '1', text: 'x' },
+};
 const LEFT_AT = {
   danger: 1,
   completedOn: '2026-01-05',
@@ -89,6 +96,17 @@ const READS: Record<
   'iterate-left': (db, filters) => [...iterateLeft(db, filters, statusesOf(filters))],
   'list-billed-weeks': (db, filters) => listBilledWeeks(db, filters, 26),
   'list-branch-lives': listBranchLives,
+  'iterate-claim-rows': (db, filters) => [...iterateClaimRows(db, filters, '2026-01-05', 'made')],
+  'list-claim-photos': (db) => listPhotos(db, 1, { of: 'claim', ref: 'x' }),
+  'list-claim-revisions': (db) => listClaimRevisions(db, 'AAA', 'x'),
+  'list-claim-rows-by-completion': (db, filters) =>
+    listClaimRows(db, filters, '2026-01-05', 'completed', undefined, 51),
+  'list-claim-rows-by-cost': (db, filters) =>
+    listClaimRows(db, filters, '2026-01-05', 'cost', undefined, 51),
+  'list-claim-rows-by-day': (db, filters) =>
+    listClaimRows(db, filters, '2026-01-05', 'made', undefined, 51),
+  'list-claim-rows-after-a-place': (db) =>
+    listClaimRows(db, CLAIMED, '2026-01-05', 'made', { ...PLACE, claimRef: '1' }, 51),
   'list-imports': (db) => listImports(db, 'AAA', 100),
   'list-job-rows-by-completion': (db, filters) =>
     listJobRows(db, filters, 'completed', undefined, 51),
@@ -103,7 +121,7 @@ const READS: Record<
   'list-left-of-job': (db) => listLeftOfJob(db, 1),
   'list-marks': (db) => listMarks(db, 1, 'x'),
   'list-missing-costs': listMissingCosts,
-  'list-photos': (db) => listPhotos(db, 1, 'x'),
+  'list-photos': (db) => listPhotos(db, 1, { of: 'job', ref: 'x' }),
   'list-uncosted-products': listUncostedProducts,
   'list-under-way': (db) => listUnderWay(db, 1),
   'list-week-notes': (db) => listWeekNotes(db, '2026-W01', '2026-W05'),
@@ -124,6 +142,7 @@ const READS: Record<
   'read-spellings': (db) => readSpellings(db, [1]),
   'read-usual-figures': (db) => readUsualFigures(scopedSource(db), 1, CAR, 'model_age', () => true),
   'remembered-columns': (db) => rememberedColumns(db, 'AAA', 'jobs'),
+  'sum-claims': (db) => sumClaims(db, CLAIMED, '2026-01-05'),
   'sum-branch-cells': sumBranchCells,
   'sum-uncosted': sumUncosted,
   'sum-spans': (db, { packageIds, bodyTypes }) =>

@@ -231,6 +231,16 @@ describe('Photos', () => {
           .run(key, key);
       }
     });
+  /** The same, as if it were of a claim. */
+  const recordOfClaim = (key: string): void =>
+    on(database, (driver) => {
+      driver
+        .prepare(
+          `insert into claim_photos (branch_id, claim_ref, photo_ref, storage_key, sent_hash, width,
+            height, bytes, received_at) values (1, 'c', ?, ?, '', 1, 1, 3, '')`,
+        )
+        .run(key, key);
+    });
   let photos = '';
   beforeEach(() => (photos = path.join(folder, 'photos')));
 
@@ -264,10 +274,11 @@ describe('Photos', () => {
   it('given one that is nowhere, are told short of it', async () => {
     record('AAA/one', 'AAA/lost');
     keep(photos, 'one.jpg', 'one');
-    expect((await takeBackup(database, copy)).missing).toBe(1);
+    recordOfClaim('AAA/claimed');
+    expect((await takeBackup(database, copy)).missing).toBe(2);
     rmSync(`${copy}.photos`, { recursive: true });
     rmSync(photos, { recursive: true });
-    expect((await restoreBackup(copy, database, 'move-aside', NOW)).missing).toBe(2);
+    expect((await restoreBackup(copy, database, 'move-aside', NOW)).missing).toBe(3);
   });
 
   it('given a folder of that name already, leave it alone', async () => {

@@ -22,3 +22,14 @@ export async function keepPhotoBytes(
 export async function dropPhotoBytes(photos: PhotoStore, storageKey: string): Promise<void> {
   await Promise.allSettled(PHOTO_SIZES.map((size) => photos.remove(photoKey(storageKey, size))));
 }
+
+/** Keeping, reading and letting go of the bytes of photos in one store. */
+export function photoBytesOf(photos: PhotoStore) {
+  return {
+    keep: (storageKey: string, made: Readonly<Record<PhotoSize, Buffer>>): Promise<void> =>
+      keepPhotoBytes(photos, storageKey, made),
+    read: (storageKey: string, size: PhotoSize): Promise<Buffer | undefined> =>
+      photos.get(photoKey(storageKey, size)),
+    drop: (storageKey: string): Promise<void> => dropPhotoBytes(photos, storageKey),
+  };
+}

@@ -9,7 +9,12 @@ beforeEach(async () => {
 });
 afterEach(() => small.close());
 
-const SENT = { jobRef: 'j', photo: 'p', finding: null, bytes: Buffer.from('sent') };
+const SENT = {
+  place: { of: 'job', ref: 'j' } as const,
+  photo: 'p',
+  finding: null,
+  bytes: Buffer.from('sent'),
+};
 const DEED = { actor: RECEIPT.actor, at: RECEIPT.receivedAt, subject: '/photos/p' };
 
 /** A bench whose bytes lie in a set of keys, and which may be stopped at a step. */

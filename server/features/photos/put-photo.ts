@@ -1,15 +1,16 @@
 import { createHash } from 'node:crypto';
 import type { PhotoWriter } from '#db/photo-writer';
 import type { Deed } from '#db/queries/audit';
-import type { PhotoRow } from '#db/queries/photos';
+import type { PhotoPlace, PhotoRow } from '#db/queries/photos';
 import { MOST_PHOTOS } from '#shared/contracts/photos';
 import { notFound, refuseInput } from '#shared/domain/refusal';
 import type { RemadePhoto } from './remake-photo';
 
 /** A photo as it comes. */
 export interface SentPhoto {
-  jobRef: string;
+  place: PhotoPlace;
   photo: string;
+  /** Of a job's photo: the finding it shows. */
   finding: string | null;
   bytes: Buffer;
 }
@@ -47,13 +48,13 @@ export async function putPhoto(
     await bench.keepBytes(storageKey, remade);
     const { formerKey, ...put } = await bench.write(() => {
       const { writer } = bench;
-      // Once more: the job may have gone, and the same photo may have come, while this one was made.
+      // Once more: the place may have gone, and the same photo may have come, while this one was made.
       const meanwhile = settleKnown(writer, sent, sentHash, deed);
       if (meanwhile) return { ...meanwhile, formerKey: storageKey };
-      const former = writer.find(sent.jobRef, sent.photo);
-      if (former) writer.replace(sent.jobRef, former, kept, deed);
-      else writer.add(sent.jobRef, sent.photo, kept, deed);
-      const row = writer.find(sent.jobRef, sent.photo) as PhotoRow;
+      const former = writer.find(sent.place, sent.photo);
+      if (former) writer.replace(sent.place, former, kept, deed);
+      else writer.add(sent.place, sent.photo, kept, deed);
+      const row = writer.find(sent.place, sent.photo) as PhotoRow;
       const status = former ? ('replaced' as const) : ('created' as const);
       return { status, row, formerKey: former?.storageKey };
     });
@@ -65,21 +66,21 @@ export async function putPhoto(
   }
 }
 
-/** What can be said without the picture: that there is no job, that there is no room, or that it is there already. Runs inside a write. */
+/** What can be said without the picture: that there is nothing it could belong to, that there is no room, or that it is there already. Runs inside a write. */
 function settleKnown(
   writer: PhotoWriter,
-  { jobRef, photo, finding }: SentPhoto,
+  { place, photo, finding }: SentPhoto,
   sentHash: string,
   deed: Deed,
 ): { status: 'replaced' | 'unchanged'; row: PhotoRow } | undefined {
-  if (!writer.standsJob(jobRef)) throw notFound();
-  const former = writer.find(jobRef, photo);
-  if (!former && writer.count(jobRef) >= MOST_PHOTOS) {
-    const message = `the job has ${MOST_PHOTOS} photos, the most there can be; take one off first`;
+  if (!writer.stands(place)) throw notFound();
+  const former = writer.find(place, photo);
+  if (!former && writer.count(place) >= MOST_PHOTOS) {
+    const message = `the ${place.of} has ${MOST_PHOTOS} photos, the most there can be; take one off first`;
     throw refuseInput([{ path: '', message }]);
   }
   if (former?.sentHash !== sentHash) return undefined;
   if (former.finding === finding) return { status: 'unchanged', row: former };
-  writer.replace(jobRef, former, { ...former, finding }, deed);
-  return { status: 'replaced', row: writer.find(jobRef, photo) as PhotoRow };
+  writer.replace(place, former, { ...former, finding }, deed);
+  return { status: 'replaced', row: writer.find(place, photo) as PhotoRow };
 }
