@@ -72,6 +72,13 @@ describe('logRank', () => {
     );
   });
 
+  it('given one car alone at risk in the end, leaves nothing to chance there', () => {
+    const first = { atRisk: 10, events: 4 };
+    const found = logRank([[first, { atRisk: 1, events: 1 }], [{ atRisk: 20, events: 2 }]]);
+    expect(found?.chiSquare).toBe(logRank([[first], [{ atRisk: 20, events: 2 }]])?.chiSquare);
+    expect(found?.groups[0]).toEqual({ observed: 5, expected: 3 });
+  });
+
   it('given more events than were at risk, throws', () => {
     expect(() => logRank([[{ atRisk: 1, events: 2 }], [{ atRisk: 4, events: 1 }]])).toThrow(
       RangeError,

@@ -24,13 +24,23 @@ describe('pooledRiskRatio', () => {
     expect(pooledRiskRatio([stratum(0, 0, 4, 90)])).toBeUndefined();
   });
 
-  it('given everyone a case, is exactly 1', () => {
-    expect(pooledRiskRatio([stratum(7, 7, 11, 11)])).toEqual({ riskRatio: 1, lower: 1, upper: 1 });
+  it('given everyone a case, is exactly 1, never not a number', () => {
+    const sizes = fc.integer({ min: 1, max: 5_000_000 });
+    fc.assert(
+      fc.property(sizes, sizes, (exposed, unexposed) => {
+        const found = pooledRiskRatio([stratum(exposed, exposed, unexposed, unexposed)]);
+        expect(found?.riskRatio).toBe(1);
+        expect(found?.lower).toBeCloseTo(1, 6);
+        expect(found?.upper).toBeCloseTo(1, 6);
+      }),
+    );
   });
 
   it('given a stratum with one group empty beside others, is not changed by it', () => {
     const full = [stratum(5, 60, 7, 300), stratum(9, 40, 12, 200)];
-    expect(pooledRiskRatio([...full, stratum(3, 8, 0, 0)])).toEqual(pooledRiskRatio(full));
+    expect(pooledRiskRatio([...full, stratum(3, 8, 0, 0), stratum(0, 0, 0, 0)])).toEqual(
+      pooledRiskRatio(full),
+    );
   });
 
   it('given any strata, encloses its ratio and turns over with the groups', () => {

@@ -42,7 +42,7 @@ export function pooledRiskRatio(strata: readonly RiskStratum[]): PooledRiskRatio
   }
   if (exposed === 0 || unexposed === 0) return undefined;
   const riskRatio = exposed / unexposed;
-  // 0 where everyone is a case: rounding must not make it negative.
+  // 0 where everyone is a case: with millions of them rounding would make it negative.
   const reach = Z * Math.sqrt(Math.max(0, spread) / (exposed * unexposed));
   return {
     riskRatio,

@@ -28,6 +28,16 @@ describe('quadraticForm', () => {
 
   it('given a matrix without an inverse, is undefined', () => {
     expect(quadraticForm([[0]], [1])).toBeUndefined();
+    // Rounding leaves 1e-17 of the second diagonal entry here.
+    expect(
+      quadraticForm(
+        [
+          [0.1, 0.1],
+          [0.1, 0.10000000000000002],
+        ],
+        [1, 1],
+      ),
+    ).toBeUndefined();
     expect(
       quadraticForm(
         [
