@@ -57,7 +57,12 @@ function narrowed(counts: ClaimCounts) {
 
 function waitWords(waiting: number): AnswerPart[] {
   if (waiting === 0) return [];
-  return ['; ', { text: waitingOf(waiting), link: '/claims', query: { waiting: 'true' } }];
+  const theirs: Exclude<AnswerPart, string> = {
+    text: waitingOf(waiting),
+    link: '/claims',
+    query: { waiting: 'true' },
+  };
+  return ['; ', theirs];
 }
 
 function waitingOf(waiting: number): string {

@@ -40,6 +40,7 @@ import { BRIDGE_COLUMNS, bridgeSeries } from './bridge-series';
 import { cautionsOf } from './cautions';
 import { billFacts, carFacts, checkFacts, dateFacts, workshopFacts } from './facts';
 import { FindingsList } from './findings-list';
+import { JobClaims } from './job-claims';
 import { missingCostWords } from './missing-cost-words';
 import { moneyLines } from './money-lines';
 import { productColumns, productRows } from './product-rows';
@@ -62,6 +63,7 @@ import { VoidDialog, type VoidDialogData } from './void-dialog';
     DataTable,
     FactList,
     FindingsList,
+    JobClaims,
     JobPhotos,
     LoadState,
     MatButton,
