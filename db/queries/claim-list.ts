@@ -75,12 +75,12 @@ const SORT_KEYS: Record<ClaimSort, string> = {
 };
 
 /**
- * Whether a claim counts at a day, bound twice (rules 14 and 16): made by that day and by the end of the warranty, whose day is
- * the month's last where the month is too short, and not refused by that day. That its job counts goes without saying: only
- * jobs that do have a flat row.
+ * Whether a claim counts at a day, bound twice: what `claimStanding` says, for a filter (rules 14 and 16). Made by that day and by
+ * the end of a warranty, whose day is the month's last where the month is too short, and not refused by that day. That its job
+ * counts goes without saying: only jobs that do have a flat row.
  */
-export const COUNTED = `(made_on <= ?
-  and made_on <= date(job_facts.completed_on, '+' || job_facts.warranty_months || ' months', 'floor')
+const COUNTED = `(made_on <= ?
+  and job_facts.warranty_months > 0 and made_on <= date(job_facts.completed_on, '+' || job_facts.warranty_months || ' months', 'floor')
   and (decision <> 'refused' or coalesce(decided_on > ?, false)))`;
 
 const OF_CLAIM = [

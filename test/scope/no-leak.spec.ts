@@ -49,6 +49,7 @@ const QUERIES: Record<string, string[]> = {
   '/api/analytics/overrun': ['by=branch', 'by=region', 'by=rotFound', 'by=month', 'by=ageBand'],
   '/api/exports/overrun.csv': ['by=branch', 'by=region'],
   '/api/analytics/rot': ['package=full', 'from=2026-01-26', 'package=cavity', 'bodyType=suv'],
+  '/api/claims': ['counted=true', 'sort=completed&limit=1', 'q=walked', 'asOf=2026-01-30'],
   '/api/come-back': ['limit=1', 'status=contacted'],
 };
 const FILTERS = [
@@ -60,7 +61,7 @@ const FILTERS = [
   'region=COAST',
   'branch=ZZZ',
 ];
-const FILTERED = /^\/api\/(jobs|analytics|come-back|exports|week-notes)/;
+const FILTERED = /^\/api\/(jobs|claims|analytics|come-back|exports|week-notes)/;
 /** Cars that a quote may be asked for: many at the own branch, few there, none there; and a branch out of scope. */
 const QUOTES = [
   'firstRegistered=2009-05&branch=AAA',

@@ -65,8 +65,10 @@ export async function disturbOutside(
     if (busy !== 'all' && !busy.includes(branch)) continue;
     await disturbCars(send, at, round);
     const photo = await jpegOf(10 + round, 10);
-    const sent = await sendPhoto(app, `${at}/jobs/walked/photos/walked`, photo, { token });
-    if (sent.status >= 300) throw new Error(`photo at ${branch}: ${sent.text}`);
+    for (const shown of ['jobs', 'claims']) {
+      const sent = await sendPhoto(app, `${at}/${shown}/walked/photos/walked`, photo, { token });
+      if (sent.status >= 300) throw new Error(`photo at ${branch}: ${sent.text}`);
+    }
   }
 }
 

@@ -91,7 +91,7 @@ export function findingsWithOneLeft(): object[] {
   return [...(validJob()['findings'] as object[]), LEFT_FINDING];
 }
 
-/** Puts there what the samples name: a job with a claim, a photo and a finding left on the car, one under way, and a booking. */
+/** Puts there what the samples name: a job with a claim, a photo of either and a finding left on the car, one under way, and a booking. */
 export async function placeSamples(app: TestApp, { manager }: SmallNetwork): Promise<void> {
   const claim = {
     jobRef: 'walked',
@@ -110,8 +110,10 @@ export async function placeSamples(app: TestApp, { manager }: SmallNetwork): Pro
     const answer = await app.call('put', `/api/branches/AAA/${path}`, { token: manager, body });
     if (answer.status !== 201) throw new Error(`${path}: ${answer.text}`);
   }
-  const photo = '/api/branches/AAA/jobs/walked/photos/walked';
-  const sent = await sendPhoto(app, photo, await jpegOf(), { token: manager });
-  if (sent.status !== 201) throw new Error(`${photo}: ${sent.text}`);
+  for (const shown of ['jobs', 'claims']) {
+    const photo = `/api/branches/AAA/${shown}/walked/photos/walked`;
+    const sent = await sendPhoto(app, photo, await jpegOf(), { token: manager });
+    if (sent.status !== 201) throw new Error(`${photo}: ${sent.text}`);
+  }
   await placeFile(app, manager, PLACED_FILE);
 }
