@@ -7,7 +7,7 @@ import { formatDate, formatInstantDay } from '../../ui/format';
 describe('issuedSentence', () => {
   it('of a report, names it as issued and says what it said', () => {
     expect(plainWords(issuedSentence(issuedReport(), 'EUR'))).toBe(
-      `Report 3 as issued on ${formatInstantDay('2026-02-02T06:30:00Z')}: as of ${formatDate('2026-02-01')}, the warranties sold will still cost about €5,000, give or take €1,400 (2,300 cars).`,
+      `Report 3 as issued on ${formatInstantDay('2026-02-02T06:30:00Z')}: warranties sold by ${formatDate('2026-02-01')} will still cost about €5,000, give or take 1,400 (2,300 cars).`,
     );
   });
 });

@@ -1,7 +1,8 @@
 import type { IssuedReport } from '#shared/contracts/warranty-reports';
-import { aboutAmount } from '../../ui/about-amount';
+import { type RoundedAmount, roundedAmount } from '#shared/domain/give-or-take';
 import type { AnswerPart } from '../../ui/answer/answer';
 import {
+  formatAmount,
   formatCars,
   formatCounted,
   formatDate,
@@ -14,22 +15,19 @@ export function issuerWords(by: string): string {
   return by === 'schedule' ? 'the schedule' : by;
 }
 
-/** The figure of an issued report with its give or take: `€77,000, give or take €14,000`. */
+/** The figure of an issued report with its give or take: `€77,000, give or take 14,000`. */
 export function figureOf(issued: IssuedReport, currency: string): string {
-  const about = aboutAmount(issued.outstandingCents, issued.standardErrorCents);
-  const figure = formatMoney(about.cents, currency);
-  return about.reachCents === null
-    ? figure
-    : `${figure}, give or take ${formatMoney(about.reachCents, currency)}`;
+  const { cents, giveOrTakeCents } = rounded(issued);
+  return `${formatMoney(cents, currency)}${giveOrTakeClause(giveOrTakeCents)}`;
 }
 
 /** What an issued report is and says, in words that hold before an auditor. */
 export function issuedSentence(issued: IssuedReport, currency: string): readonly AnswerPart[] {
-  const about = aboutAmount(issued.outstandingCents, issued.standardErrorCents);
+  const { cents, giveOrTakeCents } = rounded(issued);
   return [
-    `Report ${issued.id} as issued on ${formatInstantDay(issued.issuedAt)}: as of ${formatDate(issued.asOf)}, the warranties sold will still cost about `,
-    { figure: formatMoney(about.cents, currency) },
-    about.reachCents === null ? ' ' : `, give or take ${formatMoney(about.reachCents, currency)} `,
+    `Report ${issued.id} as issued on ${formatInstantDay(issued.issuedAt)}: warranties sold by ${formatDate(issued.asOf)} will still cost about `,
+    { figure: formatMoney(cents, currency) },
+    `${giveOrTakeClause(giveOrTakeCents)} `,
     { quiet: `(${formatCars(issued.covered)})` },
     '.',
   ];
@@ -42,4 +40,12 @@ export function unchangedSentence(laterCount: number): string {
       ? 'Nothing has arrived later for its period.'
       : `${formatCounted(laterCount, 'thing has', 'things have')} arrived later for its period, listed below and not in it.`;
   return `Nothing in it has changed since. ${later}`;
+}
+
+function rounded({ outstandingCents, standardErrorCents }: IssuedReport): RoundedAmount {
+  return roundedAmount(outstandingCents, standardErrorCents);
+}
+
+function giveOrTakeClause(cents: number | null): string {
+  return cents === null ? '' : `, give or take ${formatAmount(cents)}`;
 }

@@ -10,11 +10,11 @@ const above = (branch: string) => warrantyBranch({ branch, lower: 1.1, upper: 2,
 describe('reportSentence', () => {
   it('an estimate with its error, says the day, the figure no finer than its interval, and the cars', () => {
     expect(plainWords(reportSentence(warrantyReport()))).toBe(
-      `As of ${DAY}, the warranties sold will still cost about €5,000, give or take €1,400 (2,300 cars).`,
+      `Warranties sold by ${DAY} will still cost about €5,000, give or take 1,400 (2,300 cars).`,
     );
   });
 
-  it('without an error, gives the figure and says that its certainty is not known', () => {
+  it('without an error, gives the figure and says that its interval cannot be said', () => {
     const total = {
       latestCents: 100,
       ultimateCents: 500,
@@ -22,7 +22,7 @@ describe('reportSentence', () => {
       standardErrorCents: null,
     };
     expect(plainWords(reportSentence(warrantyReport({}, { total })))).toContain(
-      'about €4, how sure is not known (2,300 cars).',
+      'about €4; how sure that is cannot be said yet (2,300 cars).',
     );
   });
 

@@ -1,7 +1,8 @@
 import type { WarrantyReport } from '#shared/contracts/warranty-reports';
-import { aboutAmount } from '../../ui/about-amount';
+import { roundedAmount } from '#shared/domain/give-or-take';
 import type { AnswerPart } from '../../ui/answer/answer';
 import {
+  formatAmount,
   formatCars,
   formatCount,
   formatCounted,
@@ -23,18 +24,21 @@ export function reportSentence(report: WarrantyReport): readonly AnswerPart[] {
   const cars = { quiet: `(${formatCars(covered)})` };
   if (total.latestCents === 0) {
     return [
-      `As of ${day} it cannot be said what the warranties sold will still cost: no claim was paid by ${formatDate(evaluatedOn)} `,
+      `What warranties sold by ${day} will still cost cannot be said: no claim was paid by ${formatDate(evaluatedOn)} `,
       cars,
       '.',
     ];
   }
-  const about = aboutAmount(total.outstandingCents, total.standardErrorCents);
+  const { cents, giveOrTakeCents } = roundedAmount(
+    total.outstandingCents,
+    total.standardErrorCents,
+  );
   return [
-    `As of ${day}, the warranties sold will still cost about `,
-    { figure: formatMoney(about.cents, report.currency) },
-    about.reachCents === null
-      ? ', how sure is not known '
-      : `, give or take ${formatMoney(about.reachCents, report.currency)} `,
+    `Warranties sold by ${day} will still cost about `,
+    { figure: formatMoney(cents, report.currency) },
+    giveOrTakeCents === null
+      ? '; how sure that is cannot be said yet '
+      : `, give or take ${formatAmount(giveOrTakeCents)} `,
     cars,
     '.',
   ];

@@ -1,5 +1,5 @@
 import type { WarrantyReport } from '#shared/contracts/warranty-reports';
-import { giveOrTakeCents } from '../../ui/about-amount';
+import { giveOrTake } from '#shared/domain/give-or-take';
 import { formatAmount, formatNumber } from '../../ui/format';
 
 /** What stands where nothing can be said. */
@@ -38,9 +38,7 @@ export function limitsWords(lower: number | null, upper: number | null, decimals
 
 /** Half of the 95 % interval in whole units of money. */
 export function giveOrTakeWords(standardErrorCents: number | null): string {
-  return standardErrorCents === null
-    ? NO_FIGURE
-    : formatAmount(giveOrTakeCents(standardErrorCents));
+  return standardErrorCents === null ? NO_FIGURE : formatAmount(giveOrTake(standardErrorCents));
 }
 
 /** Where an interval lies against 1. */

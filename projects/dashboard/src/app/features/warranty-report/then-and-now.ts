@@ -1,6 +1,6 @@
 import type { OutOf } from '#shared/contracts/endpoint';
 import type { getIssuedReport } from '#shared/contracts/warranty-reports';
-import { giveOrTakeCents } from '../../ui/about-amount';
+import { giveOrTake } from '#shared/domain/give-or-take';
 import { formatAmount, formatCount, formatSignedAmount } from '../../ui/format';
 import { NO_FIGURE } from './report-words';
 import { number, type PaperRows, words } from './paper/paper-rows';
@@ -24,7 +24,7 @@ export function thenAndNow({ issued, now }: Pick<Told, 'issued' | 'now'>, sign: 
 }
 
 function reach(standardErrorCents: number | null): number | null {
-  return standardErrorCents === null ? null : giveOrTakeCents(standardErrorCents);
+  return standardErrorCents === null ? null : giveOrTake(standardErrorCents);
 }
 
 function counts(then: number, now: number): string[] {

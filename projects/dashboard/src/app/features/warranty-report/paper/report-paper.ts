@@ -1,12 +1,18 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import type { IssuedReport, WarrantyReport } from '#shared/contracts/warranty-reports';
 import { WARRANTY_METHODS } from '#shared/domain/warranty-methods';
+import { ClaimFreeChart } from '../../../charts/claim-free-curves/claim-free-chart';
+import { DotIntervalChart } from '../../../charts/dot-interval/dot-interval-chart';
+import { PaidKey } from '../../../charts/paid-and-to-come/paid-key';
 import { currencySign, formatDate } from '../../../ui/format';
 import { Mark } from '../../../ui/mark/mark';
 import { branchesSentence, plainWords, rateSentence, reportSentence } from '../report-answer';
 import { branchRows } from './branch-rows';
 import { claimFreeRows } from './claim-free-rows';
+import { CohortBars } from './cohort-bars';
 import { cohortRows } from './cohort-rows';
+import { curvesPicture } from './curves-picture';
+import { expectedPicture } from './expected-picture';
 import { leftOut } from './left-out';
 import { logRankWords } from './log-rank-words';
 import { PaperTable } from './paper-table';
@@ -18,7 +24,7 @@ import { factorRows, triangleRows } from './triangle-rows';
 /** The warranty-risk report as it is read and printed: a draft of today, or one that was issued. Everything on it is of the report. */
 @Component({
   selector: 'us-report-paper',
-  imports: [Mark, PaperTable],
+  imports: [ClaimFreeChart, CohortBars, DotIntervalChart, Mark, PaidKey, PaperTable],
   templateUrl: './report-paper.html',
   styleUrl: './report-paper.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -41,6 +47,8 @@ export class ReportPaper {
       answer: plainWords(reportSentence(report)),
       branchWords: branchesSentence(report),
       rate: rateSentence(report),
+      curves: curvesPicture(answer),
+      expected: expectedPicture(report),
       claimFree: claimFreeRows(answer),
       logRank: logRankWords(answer),
       cohorts: cohortRows(answer),

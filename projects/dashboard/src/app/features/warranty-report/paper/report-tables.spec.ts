@@ -113,7 +113,7 @@ describe('processRows', () => {
 
   it('age band by age band, gives what the pooled ratio is made of', () => {
     expect(stratumRows(warrantyAnswer()).rows[0]).toEqual([
-      ...['cavities dry before product', '5-9', '40', '6', '300', '27'],
+      ...['cavities dry before product', '5–9', '40', '6', '300', '27'],
     ]);
   });
 });
