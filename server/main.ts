@@ -10,6 +10,7 @@ import { ConfigRefused, readConfig } from './config';
 import { importDeskOf } from './import-desk-of';
 import type { Kit } from './kit';
 import { Outbox } from './mail/outbox';
+import { ReportSchedule } from './schedule/report-schedule';
 import { photoStoreOf } from './storage/photo-store';
 import { PasswordThread } from './workers/password-thread';
 import { ReadPool } from './workers/read-pool';
@@ -51,6 +52,8 @@ async function main(): Promise<void> {
   await kit.imports.start();
   server.on('request', app.express);
   kit.outbox.start();
+  const schedule = new ReportSchedule(kit, log);
+  schedule.start();
   const address = server.address();
   const port = typeof address === 'object' && address ? address.port : config.port;
   process.stdout.write(`\nUnderseam ${version} serves http://localhost:${port}\n${seeded}\n`);
@@ -58,6 +61,7 @@ async function main(): Promise<void> {
   const stop = (): void => {
     server.close();
     server.closeAllConnections();
+    schedule.close();
     void Promise.all([
       kit.imports.close(),
       kit.reads.close(),

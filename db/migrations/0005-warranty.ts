@@ -61,6 +61,8 @@ export async function up(knex: Knex): Promise<void> {
       report_id integer not null references warranty_reports (id)
     ) strict, without rowid`,
     `alter table mails add column report_run text references warranty_runs (month)`,
+    // Noted before the last byte of a mail leaves: from then on the mail server may have taken it.
+    `alter table mails add column handed_over_at text`,
     `alter table claims add column side text`,
     // Of the reference: what a search looks into, without regard to case.
     `alter table claims add column search_text text not null default ''`,

@@ -32,6 +32,8 @@ export function insertMail(
     html: string;
     createdAt: string;
     sendAt: string | null;
+    /** Month of the run of the warranty report that it belongs to. */
+    reportRun?: string;
   },
 ): void {
   db.run(
@@ -42,6 +44,7 @@ export function insertMail(
       html_body: mail.html,
       created_at: mail.createdAt,
       next_attempt_at: mail.sendAt,
+      report_run: mail.reportRun ?? null,
     }),
   );
 }
@@ -82,6 +85,32 @@ export function nextMailAt(db: UnscopedDb): string | null {
   return row?.at ?? null;
 }
 
+/** Notes that a mail is about to be handed over whole: whatever happens then, the mail server may have it. */
+export function markHandedOver(db: UnscopedDb, id: number, at: string): void {
+  db.run(sql('mails').where({ id }).update({ handed_over_at: at }));
+}
+
+/** Takes mails that an earlier run handed over, and did not live to hear the answer of, as sent. */
+export function settleHandedOver(db: UnscopedDb): void {
+  db.run(
+    sql('mails')
+      .whereNull('sent_at')
+      .whereNotNull('next_attempt_at')
+      .whereNotNull('handed_over_at')
+      .increment('attempts', 1)
+      .update({
+        sent_at: sql.ref('handed_over_at'),
+        next_attempt_at: null,
+        last_error: UNANSWERED,
+        text_body: '',
+        html_body: null,
+      }),
+  );
+}
+
+/** What stands beside a mail that was handed over whole, while the server's answer was lost in a stop. */
+const UNANSWERED = 'ANSWER LOST IN A STOP';
+
 /** Marks a mail as sent and forgets its text: the link in it signs somebody in. */
 export function markMailSent(db: UnscopedDb, id: number, at: string): void {
   db.run(
@@ -99,10 +128,11 @@ export function putOffMail(
   failure: { error: string; nextAttemptAt: string },
 ): void {
   db.run(
-    sql('mails')
-      .where({ id })
-      .increment('attempts', 1)
-      .update({ next_attempt_at: failure.nextAttemptAt, last_error: failure.error }),
+    sql('mails').where({ id }).increment('attempts', 1).update({
+      next_attempt_at: failure.nextAttemptAt,
+      last_error: failure.error,
+      handed_over_at: null,
+    }),
   );
 }
 

@@ -88,6 +88,15 @@ export function importEndedLetter(to: Addressee, ended: EndedImport, link: strin
   });
 }
 
+/** The letter that tells that the report of a month was issued; its figures stay behind the sign-in. */
+export function warrantyReportLetter(to: Addressee, asOf: string, link: string): Mail {
+  return letter(to, 'The warranty report of the month in Underseam', link, {
+    opening: `The warranty-risk report as of ${asOf} was issued and is kept unchanged.`,
+    asking: 'Read it here, signed in:',
+    closing: 'Who is told of it is set by head office; which mails you receive, on your own page.',
+  });
+}
+
 /** An instant as a letter says it: to the minute, and of which clock. */
 function told(at: string): string {
   return `${at.slice(0, 10)} at ${at.slice(11, 16)} UTC`;

@@ -3,10 +3,12 @@ import type { Logger } from 'pino';
 import {
   giveUpMail,
   insertMail,
+  markHandedOver,
   markMailSent,
   nextDueMail,
   nextMailAt,
   putOffMail,
+  settleHandedOver,
   type WaitingMail,
 } from '#db/queries/mails';
 import { wantsMail } from '#db/queries/mail-choices';
@@ -20,6 +22,7 @@ import {
   newSignInLetter,
   passwordChangedLetter,
   resetLetter,
+  warrantyReportLetter,
   type Addressee,
   type EndedImport,
   type Mail,
@@ -44,10 +47,24 @@ const LONGEST_SLEEP_MS = 3600_000;
 /** How long a closing server waits for the mail it is sending. */
 const CLOSING_MS = 3000;
 
+/** What a mail of a run of the warranty report tells of. */
+export interface IssuedInRun {
+  /** `2026-02` */
+  month: string;
+  report: number;
+  asOf: string;
+}
+
 /**
- * Keeps mails with the writes they belong to and sends them afterwards, one at a time, when SMTP_URL is set. A mail is sent at
- * least once: after a crash between sending and noting it, it goes out again under the same Message-ID. Without SMTP_URL mails
+ * Keeps mails with the writes they belong to and sends them afterwards, one at a time, when SMTP_URL is set; without it they
  * stay in the local mailbox.
+ *
+ * A mail is sent once, whenever this process ends. SMTP has no way to ask whether a mail was taken (RFC 1047), so the moment
+ * from which it may have been is noted on disk just before the line that ends the mail leaves: a start that finds no such note
+ * sends the mail, for no server can have taken it; one that finds it takes the mail as sent and says that the answer was lost.
+ * Between note and last bytes lies only handing them to the operating system, which delivers them even if the process is killed.
+ * While the process lives it does hear the answer: a refusal, or a connection lost before one, means another try under the
+ * same Message-ID (RFC 5321, 4.5.4.1).
  */
 export class Outbox {
   private readonly transport: Transporter | undefined;
@@ -55,6 +72,8 @@ export class Outbox {
   private timer: NodeJS.Timeout | undefined;
   /** Sent, but a failing database has not noted it: not to be sent again. */
   private readonly unnoted = new Set<number>();
+  /** Whether what an earlier run handed over has been settled. */
+  private settled = false;
   private state: 'new' | 'started' | 'closed' = 'new';
 
   constructor(
@@ -97,13 +116,22 @@ export class Outbox {
     this.queue(importEndedLetter(person, ended, this.link(ended.path)));
   }
 
+  /** Tells somebody of head office that the report of a month was issued, unless they do without; inside a write. */
+  queueWarrantyReport(personId: number, { month, report, asOf }: IssuedInRun): void {
+    const person = findPerson(this.store.unscoped, personId);
+    if (!person?.active || !wantsMail(this.store.unscoped, person, 'warranty_report')) return;
+    const link = this.link(`/warranty/reports/${report}`);
+    this.queue(warrantyReportLetter(person, asOf, link), month);
+  }
+
   /** Queues a mail; inside a write, so that it is kept if and only if the rest of the write is. */
-  queue(mail: Mail): void {
+  queue(mail: Mail, reportRun?: string): void {
     const now = this.clock.now().toISOString();
     insertMail(this.store.unscoped, {
       ...mail,
       createdAt: now,
       sendAt: this.transport ? now : null,
+      ...(reportRun !== undefined && { reportRun }),
     });
     // Fires in a later turn, when the commit is done.
     this.wakeIn(0);
@@ -147,6 +175,9 @@ export class Outbox {
 
   /** Sends all that is due, and tells in how many milliseconds the next mail is. */
   private async sendDue(): Promise<number> {
+    // Before anything is sent: only an earlier run can have left a mail handed over.
+    if (!this.settled) await this.store.queue.write(() => settleHandedOver(this.store.unscoped));
+    this.settled = true;
     while (this.state === 'started') {
       const mail = nextDueMail(this.store.unscoped, this.clock.now().toISOString());
       if (!mail) break;
@@ -161,7 +192,7 @@ export class Outbox {
     const db = this.store.unscoped;
     let failure: ReturnType<typeof failureOf> | undefined;
     try {
-      if (!this.unnoted.has(mail.id)) await this.transport?.sendMail(messageOf(mail, this.config));
+      if (!this.unnoted.has(mail.id)) await this.transport?.sendMail(this.messageOf(mail));
       this.unnoted.add(mail.id);
     } catch (error) {
       failure = failureOf(error);
@@ -176,6 +207,14 @@ export class Outbox {
     if (failure) {
       this.log.warn({ mail: mail.id, failure: failure.code }, 'a mail could not be sent');
     }
+  }
+
+  private messageOf(mail: WaitingMail): ReturnType<typeof messageOf> {
+    return messageOf(mail, this.config, () =>
+      this.store.queue.write(() =>
+        markHandedOver(this.store.unscoped, mail.id, this.clock.now().toISOString()),
+      ),
+    );
   }
 
   private next(mail: WaitingMail, now: Date): string {

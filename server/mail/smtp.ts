@@ -1,4 +1,5 @@
 import { createTransport, type SendMailOptions, type Transporter } from 'nodemailer';
+import { holdBackEnd, type HeldMail } from './hold-back-end';
 import type { WaitingMail } from '#db/queries/mails';
 import type { Config } from '../config';
 
@@ -10,7 +11,7 @@ export interface SendingFailure {
 
 /** A connection to the server of SMTP_URL. A mail may name no file or address to fetch from. */
 export function makeTransport(smtpUrl: string): Transporter {
-  return createTransport({
+  const transport = createTransport({
     url: smtpUrl,
     connectionTimeout: 10_000,
     greetingTimeout: 10_000,
@@ -18,13 +19,17 @@ export function makeTransport(smtpUrl: string): Transporter {
     disableFileAccess: true,
     disableUrlAccess: true,
   });
+  transport.use('stream', holdBackEnd);
+  return transport;
 }
 
 /** A mail as nodemailer takes it; the Message-ID stays the same however often it is tried. */
 export function messageOf(
   mail: WaitingMail,
   config: Pick<Config, 'smtpUrl' | 'publicUrl'>,
-): SendMailOptions {
+  beforeEnd: () => Promise<void>,
+): SendMailOptions & HeldMail {
+  const cancelling = new AbortController();
   const host = new URL(config.publicUrl).hostname;
   return {
     from: { name: 'Underseam', address: senderOf(config.smtpUrl, host) },
@@ -35,6 +40,9 @@ export function messageOf(
     messageId: `<${mail.id}.${Date.parse(mail.createdAt)}@${host}>`,
     date: new Date(mail.createdAt),
     headers: { 'Auto-Submitted': 'auto-generated' },
+    beforeEnd,
+    cancelling,
+    signal: cancelling.signal,
   };
 }
 

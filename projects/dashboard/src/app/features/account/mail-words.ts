@@ -12,4 +12,8 @@ export const MAIL_WORDS: Readonly<
     name: 'A file of yours has been imported',
     why: 'How many rows were written and how many were refused, when you did not wait for the end.',
   },
+  warranty_report: {
+    name: 'The warranty report of the month has been issued',
+    why: 'A link to it, for those whom head office has chosen to be told.',
+  },
 };
