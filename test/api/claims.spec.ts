@@ -72,6 +72,19 @@ describe('PUT of a claim', () => {
     expect((await put(ref, written)).body.status).toBe('unchanged');
   });
 
+  it('given a side, any that a finding may name, keeps and gives it; given another word, names it', async () => {
+    const ref = fresh();
+    for (const side of ['left', 'centre']) {
+      expect((await put(ref, { ...CLAIM, side })).status).toBeLessThan(300);
+      expect((await get(ref)).body.side).toBe(side);
+    }
+    expect((await put(ref, { ...CLAIM, side: 'centre' })).body.status).toBe('unchanged');
+    await put(ref, CLAIM);
+    expect('side' in (await get(ref)).body).toBe(false);
+    const wrong = await put(ref, { ...CLAIM, side: 'top' });
+    expect([wrong.status, paths(wrong.body.problems)]).toEqual([422, ['/side']]);
+  });
+
   it('given twelve equal ones at once, makes one', async () => {
     const ref = fresh();
     const answers = await Promise.all(Array.from({ length: 12 }, () => put(ref, CLAIM)));

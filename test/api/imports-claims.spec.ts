@@ -54,9 +54,11 @@ describe('A file of claims', () => {
       paidOn: '2026-01-30',
     });
     expect((await send(content, network.manager)).body.counts).toMatchObject({ unchanged: 1 });
-    const few = await send('claim;note\nC-1;better\n', network.manager);
+    const few = await send('claim;note;side\nC-1;better;Left\n', network.manager);
     await confirmFile(app, network.manager, few.body.id);
-    expect(await claim('C-1')).toMatchObject({ note: 'better', costCents: 12_050, revision: 2 });
+    expect(await claim('C-1')).toMatchObject({
+      ...{ note: 'better', side: 'left', costCents: 12_050, revision: 2 },
+    });
   });
 
   it('given a decision above the limit, keeps a manager’s as a proposal and takes that of head office (rule 77)', async () => {

@@ -1,11 +1,14 @@
 import knexFactory from 'knex';
 import { rmSync } from 'node:fs';
 import { join } from 'node:path';
+import { acceptClaim } from '#db/accept-claim';
+import { ClaimWriter } from '#db/claim-writer';
 import { openDatabase, type Connection } from '#db/database';
 import { migrations } from '#db/migrations/index';
+import { claimContent } from '#shared/contracts/claims';
 import type { RecordedFinding } from '#shared/domain/recorded-job';
 import { SIDES, ZONES } from '#shared/domain/vocabulary';
-import { SmallStore } from '../support/small-store';
+import { RECEIPT, SmallStore } from '../support/small-store';
 
 /** Schema before what lies underneath was kept in rows. */
 const OLDER = 2;
@@ -63,6 +66,17 @@ async function writeOlder(file: string, from: Connection): Promise<void> {
   await knex.destroy();
 }
 
+/** What the migrations make of claims beside what the older schema knew. */
+const claimsOf = (connection: Connection): unknown[] => [
+  rowsOf(connection, 'claims'),
+  rowsOf(connection, 'claim_revisions'),
+];
+
+const CLAIM = claimContent.parse({
+  ...{ jobRef: 'plain', madeOn: '2026-01-30', zone: 'floor', cause: 'damage' },
+  ...{ decision: 'accepted', decidedOn: '2026-01-31', costCents: 500 },
+});
+
 const FINDINGS: RecordedFinding[] = ZONES.flatMap((zone, index) =>
   SIDES.map((side, turn): RecordedFinding => {
     const seenAs = (['surface', 'bubbling', 'holed'] as const)[(index + turn) % 3]!;
@@ -119,6 +133,38 @@ describe('A data folder of the older schema', () => {
         expect([table, rowsOf(opened, table)]).toEqual([table, rowsOf(small.store.writing, table)]);
       }
       expect(opened.driver.pragma('foreign_key_check')).toEqual([]);
+    } finally {
+      opened.close();
+      rmSync(file, { force: true });
+    }
+  });
+
+  it('given claims proposed and decided, opens with what counted from each revision on', async () => {
+    await small.putJob('AAA', 'plain');
+    const writer = new ClaimWriter(small.store, small.branch('AAA'));
+    const sending = { ...RECEIPT, limitCents: 100 };
+    await small.store.queue.write(() => {
+      for (const role of ['site_manager', 'head_office', 'recorder'] as const) {
+        const labourMinutes = role === 'recorder' ? 5 : 0;
+        acceptClaim(writer, 'Ä 1', { ...CLAIM, labourMinutes }, { ...sending, role });
+      }
+      acceptClaim(writer, 'waits', CLAIM, { ...sending, role: 'site_manager' });
+    });
+    const file = join(small.folder, 'older.sqlite');
+    await writeOlder(file, small.store.writing);
+    const opened = await openDatabase(file);
+    try {
+      expect(claimsOf(opened)).toEqual(claimsOf(small.store.writing));
+      const counted = 'select decision, proposed_decision from claim_revisions order by id';
+      expect(opened.driver.prepare(counted).raw().all()).toEqual([
+        ['open', 'accepted'],
+        ['accepted', null],
+        ['accepted', null],
+        ['open', 'accepted'],
+      ]);
+      expect(() => opened.driver.exec(`update claim_revisions set content = ''`)).toThrow(
+        /append-only/,
+      );
     } finally {
       opened.close();
       rmSync(file, { force: true });
