@@ -28,6 +28,7 @@ describe('an empty network', () => {
     ['/jobs', '0 cars finished', 'Go through the first steps'],
     ['/rot', 'No car was finished in this time.', 'Go through the first steps'],
     ['/product', 'No car was finished in this time.', 'Go through the first steps'],
+    ['/warranty', 'No car was finished in this time.', 'Go through the first steps'],
     ['/come-backs', 'No finding is left on a car here.', 'Go through the first steps'],
     ['/quote', 'Which car comes next?', 'Go through the first steps'],
     ['/import', 'Import', 'Go through the first steps'],

@@ -47,9 +47,7 @@ describe('invitation and forgotten password', () => {
     await typeSignIn(own, { ...INVITED, password: 'first-seam-then-bead' });
     await own.waitForURL('**/this-week');
     await untilReady(own);
-    expect(await own.locator('us-person-menu').innerText()).toContain(
-      'Sunna Draskveil, site manager',
-    );
+    await own.getByRole('button', { name: /^Sunna Draskveil\s*, site manager$/ }).waitFor();
 
     troubles.expect(/ 422 /);
     await own.goto(link);

@@ -26,6 +26,9 @@ export interface KnownJobs {
 const QUOTED =
   'make=Velder&model=Tessock&firstRegistered=2012-05&bodyType=hatchback&package=full&branch=HAV';
 
+/** A claim that the demo branch has on record. */
+const CLAIM = 'HAV/W-0040';
+
 /** Every page there is. */
 export function everyPage({ rotten, unbilled }: KnownJobs): Stop[] {
   return [
@@ -40,8 +43,19 @@ export function everyPage({ rotten, unbilled }: KnownJobs): Stop[] {
     { name: 'rot-network', path: '/rot?age=10-14', as: 'head_office' },
     { name: 'product', path: '/product', as: 'site_manager' },
     { name: 'product-network', path: '/product?product=SC1', as: 'head_office' },
+    { name: 'warranty', path: '/warranty', as: 'site_manager' },
+    { name: 'warranty-lead', path: '/warranty', as: 'regional_lead' },
+    { name: 'warranty-network', path: '/warranty', as: 'head_office' },
     { name: 'jobs', path: '/jobs', as: 'site_manager' },
     { name: 'jobs-recorder', path: '/jobs', as: 'recorder' },
+    { name: 'claims', path: '/claims', as: 'site_manager' },
+    { name: 'claims-recorder', path: '/claims', as: 'recorder' },
+    { name: 'claims-network', path: '/claims?decision=open', as: 'head_office' },
+    { name: 'claims-lead', path: '/claims?counted=false&sort=cost', as: 'regional_lead' },
+    { name: 'claim', path: `/claims/${CLAIM}`, as: 'site_manager' },
+    { name: 'claim-recorder', path: `/claims/${CLAIM}`, as: 'recorder' },
+    { name: 'claim-new', path: `/jobs/HAV/${rotten}/claim`, as: 'site_manager' },
+    { name: 'claim-new-recorder', path: `/jobs/HAV/${rotten}/claim`, as: 'recorder' },
     { name: 'job-sheet', path: `/jobs/HAV/${rotten}`, as: 'site_manager' },
     { name: 'job-sheet-unbilled', path: `/jobs/HAV/${unbilled}`, as: 'site_manager' },
     { name: 'hand-back', path: `/jobs/HAV/${rotten}/hand-back`, as: 'recorder' },
@@ -118,8 +132,56 @@ export function everyState({ rotten, corrected }: KnownJobs): Stop[] {
     { name: 'product-tables', path: '/product', as: 'head_office', prepare: showTables },
     { name: 'product-no-norm', path: '/product?product=RC1', as: 'site_manager' },
     { name: 'product-none', path: '/product?from=2015-01-01&to=2015-02-01', as: 'site_manager' },
+    { name: 'warranty-tables', path: '/warranty', as: 'head_office', prepare: showTables },
+    {
+      name: 'warranty-sums',
+      path: '/warranty?groupBy=ageBand',
+      as: 'head_office',
+      prepare: async (page) => {
+        const buttons = page.getByRole('button', { name: /^How this came about/ });
+        await buttons.last().waitFor();
+        for (const button of await buttons.all()) await button.click();
+      },
+    },
+    {
+      name: 'warranty-cohorts',
+      path: '/warranty?groupBy=cohort&asOf=2024-12-31',
+      as: 'site_manager',
+      prepare: press(/^Curves shown/),
+    },
+    {
+      name: 'warranty-none',
+      path: '/warranty?from=2015-01-01&to=2015-02-01',
+      as: 'head_office',
+    },
+    { name: 'scope-as-of', path: '/warranty', as: 'head_office', prepare: press(/^As of/) },
     { name: 'jobs-none', path: '/jobs?q=nothing-like-it', as: 'site_manager' },
     { name: 'jobs-orders', path: '/jobs', as: 'site_manager', prepare: press('newest first') },
+    { name: 'claims-none', path: '/claims?q=nothing-like-it', as: 'site_manager' },
+    { name: 'claims-causes', path: '/claims', as: 'site_manager', prepare: press(/^Cause/) },
+    {
+      name: 'claim-refused',
+      path: `/jobs/HAV/${rotten}/claim`,
+      as: 'recorder',
+      prepare: press('Record the claim'),
+    },
+    {
+      name: 'claim-correcting',
+      path: `/claims/${CLAIM}`,
+      as: 'site_manager',
+      prepare: async (page) => {
+        await press('Correct this claim')(page);
+        await page.getByLabel('Cost before tax').fill('1,120');
+        await press(/^Save/)(page);
+        await page.getByText('Write the amount as 120 or 120.50.').waitFor();
+      },
+    },
+    {
+      name: 'claim-gone',
+      path: '/claims/HAV/no-such-claim',
+      as: 'site_manager',
+      refused: / 404 /,
+    },
     {
       name: 'come-backs-marking',
       path: '/come-backs',

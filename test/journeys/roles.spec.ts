@@ -6,12 +6,15 @@ import { servedDemo } from './served-demo';
 import { personOf, signIn, typeSignIn, untilReady } from './sign-in';
 
 const READERS_PAGES = [
-  ...['This week', 'Overruns', 'Rot', 'Product', 'Jobs', 'Come-backs', 'Quote'],
+  ...['This week', 'Overruns', 'Rot', 'Product', 'Warranty', 'Jobs', 'Come-backs', 'Quote'],
 ];
 /** Those of them who send jobs have the form beside the list. */
 const SENDERS_PAGES = READERS_PAGES.flatMap((page) =>
   page === 'Jobs' ? [page, 'Send a job'] : [page],
 );
+
+/** What was sold comes first where it is answered for. */
+const OFFICE_PAGES = ['Warranty', ...SENDERS_PAGES.filter((page) => page !== 'Warranty')];
 
 /** Who signs in, where that leads, what they are offered and what they never see. */
 describe('the four roles', () => {
@@ -29,8 +32,8 @@ describe('the four roles', () => {
     ['regional_lead', '/this-week', READERS_PAGES, ['Account', 'How it is counted']],
     [
       'head_office',
-      '/this-week',
-      SENDERS_PAGES,
+      '/warranty',
+      OFFICE_PAGES,
       ['Account', 'How it is counted', 'Import', 'Set-up', 'Audit trail', 'Mailbox'],
     ],
   ] as [Role, string, string[], string[]][])(
@@ -70,7 +73,9 @@ describe('the four roles', () => {
 
   test('a recorder, at the address of a page with money, is led to their own first page', async () => {
     const page = await enter('recorder');
-    for (const path of ['/this-week', '/overruns', '/rot', '/product', '/come-backs', '/mailbox']) {
+    for (const path of [
+      ...['/this-week', '/overruns', '/rot', '/product', '/warranty', '/come-backs', '/mailbox'],
+    ]) {
       await page.goto(path);
       await page.waitForURL('**/send');
     }

@@ -2,6 +2,13 @@ import type { Page } from 'playwright-core';
 import { DEMO_PEOPLE, type DemoPerson } from '#seeds/demo-people';
 import type { Role } from '#shared/domain/vocabulary';
 
+const FIRST_PAGES: Readonly<Record<Role, string>> = {
+  recorder: '/send',
+  site_manager: '/this-week',
+  regional_lead: '/this-week',
+  head_office: '/warranty',
+};
+
 /** The demo's person of a role. */
 export function personOf(role: Role): DemoPerson {
   const person = DEMO_PEOPLE.find((one) => one.role === role);
@@ -23,7 +30,7 @@ export async function typeSignIn(
 export async function signIn(page: Page, role: Role): Promise<void> {
   await page.goto('/sign-in');
   await typeSignIn(page, personOf(role));
-  await page.waitForURL(role === 'recorder' ? '**/send' : '**/this-week');
+  await page.waitForURL(`**${FIRST_PAGES[role]}`);
   await untilReady(page);
 }
 

@@ -4,6 +4,7 @@ import { valueAxis, type ValueAxis } from './value-axis';
 const HEAD = 30;
 const ROW = 34;
 const STACKED_ROW = 52;
+const LINE = 20;
 const LEAST_PLOT = 130;
 const GAP = 16;
 
@@ -17,6 +18,10 @@ export interface RowFrameInput {
   readonly scale: Parameters<typeof valueAxis>[0];
   readonly reference: number;
   readonly marks: Parameters<typeof valueAxis>[3];
+  /** How far a log axis goes to either side of the reference, in times of it. */
+  readonly reach?: number;
+  /** `below`: where a row's words leave no room beside them, its cars stand on a line of their own. */
+  readonly counts?: 'beside' | 'below';
 }
 
 /** The parts that pictures of groups share, in px of the picture. */
@@ -40,13 +45,15 @@ export interface RowFrame {
 export interface RowPlace {
   /** Middle of the line of words. */
   readonly wordY: number;
+  /** Middle of the line on which its cars stand, the words' own unless they take up all of it. */
+  readonly countY: number;
   /** Middle of what is drawn. */
   readonly y: number;
 }
 
 /**
  * Lays out rows of name, cars, plot and value over one axis. Where that leaves the plot less than 130 px, each plot moves
- * under its words. Pure.
+ * under its words; where even those do not fit on one line, the cars may move under the name. Pure.
  */
 export function layOutRowFrame(
   input: RowFrameInput,
@@ -70,19 +77,23 @@ export function layOutRowFrame(
     left,
     right,
     width,
+    input.reach,
   );
-  const pitch = stacked ? STACKED_ROW : ROW;
+  const apart = input.counts === 'below' && labels + counts + readouts + 2 * GAP > width;
+  const more = apart ? LINE : 0;
+  const pitch = stacked ? STACKED_ROW + more : ROW;
   const bottom = HEAD + rows.length * pitch;
   const places = rows.map((_row, index) => {
     const top = HEAD + index * pitch;
-    return { wordY: top + (stacked ? 14 : ROW / 2), y: top + (stacked ? 36 : ROW / 2) };
+    const wordY = top + (stacked ? 14 : ROW / 2);
+    return { wordY, countY: wordY + more, y: top + (stacked ? 36 + more : ROW / 2) };
   });
   const frame = {
     width,
     height: bottom + 4,
     left,
     right,
-    countX: stacked ? labels + GAP + counts : left - GAP,
+    countX: stacked ? (apart ? counts : labels + GAP + counts) : left - GAP,
     stacked,
     head: HEAD,
     bottom,

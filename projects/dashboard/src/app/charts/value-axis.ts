@@ -24,14 +24,14 @@ export interface PlacedMark {
   readonly value: number;
 }
 
-/** The most a log axis spans to either side of the reference: a far group may not flatten the rest. */
+/** The most a log axis spans to either side of the reference unless told: a far group may not flatten the rest. */
 const LOG_REACH = 3;
 const PAD = 0.06;
 const BETWEEN_WORDS = 12;
 
 /**
  * Builds the axis of a group chart over `values`, the reference always on it. A log axis takes positive values and reaches at most
- * three times the reference either way; what lies further is drawn at its end. Words that would touch are left out, the reference's
+ * `reach` times the reference either way; what lies further is drawn at its end. Words that would touch are left out, the reference's
  * never. Words stay within `width`, the picture’s.
  */
 export function valueAxis(
@@ -42,13 +42,14 @@ export function valueAxis(
   left: number,
   right: number,
   width: number = right,
+  reach: number = LOG_REACH,
 ): ValueAxis {
   const usable = scale === 'log' ? values.filter((value) => value > 0) : values;
   let low = Math.min(reference, ...usable);
   let high = Math.max(reference, ...usable);
   if (scale === 'log') {
-    low = Math.max(low, reference / LOG_REACH) / 1.06;
-    high = Math.min(high, reference * LOG_REACH) * 1.06;
+    low = Math.max(low, reference / reach) / 1.06;
+    high = Math.min(high, reference * reach) * 1.06;
   } else {
     const pad = (high - low || 1) * PAD;
     low -= pad;

@@ -30,6 +30,8 @@ export interface DotIntervalInput {
   /** `ledger`: every dot filled and a hairline under every row, for groups of one rank. */
   readonly look?: 'plain' | 'ledger';
   readonly reference: number;
+  /** How far a log axis goes to either side of the reference at most, in times of it; three unless told. */
+  readonly reach?: number;
   /** Offered marks; those inside the axis are drawn, the reference always. */
   readonly marks: readonly AxisMark[];
 }

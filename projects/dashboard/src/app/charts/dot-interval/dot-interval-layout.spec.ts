@@ -71,6 +71,19 @@ describe('layOutDotInterval', () => {
     expect(picture.right - picture.left).toBeGreaterThan(260);
   });
 
+  it('a phone and long words: the cars stand on a line of their own, between words and plot', () => {
+    const rows = [row('product under 70 % of the norm', 1.4, { count: '1,191 of 26,432' })];
+    const [placed] = layOutDotInterval({ ...input, rows }, 280).rows;
+    expect(placed!.countY).toBeGreaterThan(placed!.wordY);
+    expect(placed!.y).toBeGreaterThan(placed!.countY + 10);
+  });
+
+  it('an axis told to reach further: what else would lie beyond it does not', () => {
+    const rows = [row('voids', 4, { lower: 3.5, upper: 4.5 })];
+    expect(layOutDotInterval({ ...input, rows }, 600).rows[0]!.beyond).toBe('right');
+    expect(layOutDotInterval({ ...input, rows, reach: 5 }, 600).rows[0]!.beyond).toBeNull();
+  });
+
   it('wide: words and plot on one line', () => {
     const picture = layOutDotInterval(input, 600);
     expect(picture.stacked).toBe(false);

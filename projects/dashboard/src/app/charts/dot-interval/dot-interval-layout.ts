@@ -33,6 +33,7 @@ export function layOutDotInterval(input: DotIntervalInput, width: number): DotIn
   const { frame, axis, places } = layOutRowFrame(
     {
       ...input,
+      counts: 'below',
       readouts: rows.map(readout),
       values: rows
         .flatMap(({ value, lower, upper }) => [value, lower, upper])

@@ -20,6 +20,9 @@ export const EXPECTED_MARKS = [
   { value: 2, text: 'twice' },
 ];
 
+/** A branch of few cars has an interval that would flatten all others. */
+const REACH = 2.4;
+
 /** Each branch against what its own cars lead one to expect, by name. */
 export interface BranchRows {
   readonly chart: DotIntervalInput;
@@ -39,17 +42,26 @@ export function branchRows(
   const rows = [...answer.branches].sort((a, b) => name(a).localeCompare(name(b), 'en'));
   return {
     rows,
-    note: `Claims / expected for its packages, ages and years of cover${whoseWords(answer)}; dot and 95 % interval. Shape and word where the interval misses 1.`,
+    note: `Claims / expected for its packages, ages and years of cover${whoseWords(answer)}; dot and 95 % interval. Shape and word where the interval misses 1${chanceWords(rows.length)}.`,
     columns: columnsOf(name, links),
     chart: {
       summary: `Claims against expected: ${rows.map((row) => said(row, name(row))).join('; ')}.`,
       rows: rows.map((row) => intervalRow(row, name(row))),
       scale: 'log',
       reference: 1,
+      reach: REACH,
       marks: EXPECTED_MARKS,
       look: 'ledger',
     },
   };
+}
+
+/** Of many branches some miss by chance alone: one in twenty. */
+function chanceWords(branches: number): string {
+  const chance = Math.round(branches / 20);
+  return branches < 10 || chance === 0
+    ? ''
+    : `; by chance alone about ${formatCount(chance)} of ${formatCount(branches)} would`;
 }
 
 /** Whose rates the expectation is made of; of a network they are told without names. */

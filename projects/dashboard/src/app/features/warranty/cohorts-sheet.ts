@@ -12,7 +12,6 @@ import type { CohortTable } from './cohort-rows';
 import { HowItCame } from './how-it-came';
 import { triangleTable } from './triangle-rows';
 import type { WarrantyLinks } from './warranty-links';
-import { ratioText } from './warranty-words';
 
 /** Paid and still to come by the half-year in which cars were finished, and the triangle that it is worked out from. */
 @Component({
@@ -40,7 +39,6 @@ export class CohortsSheet {
 
   protected readonly triangle = computed(() => triangleTable(this.answer()));
   protected readonly exports = { cohorts: exportWarrantyCohorts, triangle: exportWarrantyTriangle };
-  protected readonly ratioText = ratioText;
 
   protected claimsOf(cohort: string) {
     return this.links().claims({ cohort }).query;

@@ -37,14 +37,16 @@ const MARKS = [
   { value: 0.5, text: 'half' },
   { value: 1, text: 'as likely' },
   { value: 2, text: 'twice' },
-  { value: 3, text: 'three times' },
+  { value: 4, text: 'four times' },
 ];
+/** Room for what clearly matters; a check missed on few cars is cut. */
+const REACH = 5;
 
 /** Turns the checks, and product that went on thin, into one picture. Pure. */
 export function processRows(answer: WarrantyAnswer): ProcessRows {
   const rows = [
     ...answer.process.map((risk) => rowOf(risk.check, MISSED_WORDS[risk.check], risk)),
-    rowOf('thin_product', 'product under 70 % of the norm', answer.thinProduct),
+    rowOf('thin_product', 'under 70 % of the norm', answer.thinProduct),
   ];
   return {
     rows,
@@ -54,6 +56,7 @@ export function processRows(answer: WarrantyAnswer): ProcessRows {
       rows: rows.map(intervalRow),
       scale: 'log',
       reference: 1,
+      reach: REACH,
       marks: MARKS,
       look: 'ledger',
     },

@@ -52,7 +52,7 @@ describe('answerWarranty', () => {
     expect(link).toEqual({
       text: '66 claims',
       link: '/claims',
-      query: { asOf: '2026-02-01', counted: 'true', branch: 'TAN' },
+      query: { asOf: '2026-02-01', counted: 'true', branch: 'TAN', region: undefined },
     });
   });
 
@@ -61,6 +61,29 @@ describe('answerWarranty', () => {
     const branches = ['HAV', 'TAN', 'ULV'].map((code) => warrantyBranch(code, out));
     expect(say(warrantyAnswer({ branches })).second).toBe(
       'Havnsund has 30 claims where 10 were expected, Tangvarp 30 where 10 were and Ulvmark 30 where 10 were; none is as expected.',
+    );
+  });
+
+  it('many outside: those above at length, those below in brief', () => {
+    const above = { claims: 30, expected: 10, ratio: 3, lower: 2, upper: 4.3 };
+    const below = { claims: 3, expected: 10, ratio: 0.3, lower: 0.1, upper: 0.9 };
+    const branches = [
+      warrantyBranch('HAV', below),
+      warrantyBranch('KOR'),
+      warrantyBranch('TAN', above),
+      warrantyBranch('TOR', below),
+      warrantyBranch('ULV', below),
+    ];
+    expect(say(warrantyAnswer({ branches })).second).toBe(
+      'Tangvarp has 30 claims where 10 were expected; Havnsund (3 of 10), TOR (3 of 10) and Ulvmark (3 of 10) have fewer than expected; the other branch is as expected.',
+    );
+  });
+
+  it('an interval wider than the sum: says for which cars it cannot be told yet', () => {
+    const answer = warrantyAnswer();
+    const total = { ...answer.total, standardErrorCents: 4_000_000 };
+    expect(say({ ...answer, total }).second).toMatch(
+      /^It can hardly be told yet, most of all for cars finished in 2025 H2: .* only €1,000 is paid\. Tangvarp/,
     );
   });
 

@@ -1,12 +1,20 @@
 import type { WarrantyAnswer, WarrantyBranch } from '#shared/contracts/warranty';
 import type { AnswerPart } from '../../ui/answer/answer';
 import type { CellLink } from '../../ui/data-table/column';
-import { formatCars, formatCount, formatCounted, formatDate, formatNumber } from '../../ui/format';
+import {
+  formatCars,
+  formatCount,
+  formatCounted,
+  formatDate,
+  formatMoney,
+  formatNumber,
+} from '../../ui/format';
 import { roundedMoney } from './rounded-money';
 import type { WarrantyLinks } from './warranty-links';
 import {
   expectedText,
   giveOrTake,
+  halfYearWords,
   ratioRange,
   standOf,
   standsAlone,
@@ -22,6 +30,8 @@ export interface WarrantySentences {
 /** Half-years from which a first sum can be said, and from which how far it may be off (rule 19). */
 const LEAST_COHORTS = 2;
 const COHORTS_FOR_INTERVAL = 4;
+/** So many branches outside are told of at length; of more only those above. */
+const MOST_AT_LENGTH = 3;
 
 /** Says what the warranties already sold will cost; where that cannot be said, why, and what to do. */
 export function answerWarranty(
@@ -75,7 +85,7 @@ export function answerWarranty(
       { quiet: `(${formatCars(covered)})` },
       '.',
     ],
-    second: [...(range === null ? [noRangeWords(answer), ' '] : []), ...branches],
+    second: [...certaintyWords(answer, words), ...branches],
   };
 }
 
@@ -97,10 +107,24 @@ function notYetWords({ cohorts, evaluatedOn, total }: WarrantyAnswer): string {
     : '';
 }
 
-function noRangeWords({ cohorts }: WarrantyAnswer): string {
-  return cohorts.length < COHORTS_FOR_INTERVAL
-    ? `How far that may be off cannot be said yet: it needs cars of four half-years, and there are ${formatCount(cohorts.length)}.`
-    : 'How far that may be off cannot be said: too little was paid in some of the half-years.';
+/** Why no interval can be said, or which half-year makes it as wide as it is; nothing where it is narrower than the sum. */
+function certaintyWords(answer: WarrantyAnswer, words: WarrantyWords): string[] {
+  const { cohorts, total } = answer;
+  const off = giveOrTake(total.standardErrorCents);
+  if (off === null) {
+    return [
+      cohorts.length < COHORTS_FOR_INTERVAL
+        ? `How far that may be off cannot be said yet: it needs cars of four half-years, and there are ${formatCount(cohorts.length)}. `
+        : 'How far that may be off cannot be said: too little was paid in some of the half-years. ',
+    ];
+  }
+  const widest = [...cohorts].sort(
+    (a, b) => (b.standardErrorCents ?? 0) - (a.standardErrorCents ?? 0),
+  )[0];
+  if (!widest || off <= total.outstandingCents) return [];
+  return [
+    `It can hardly be told yet, most of all for cars finished in ${halfYearWords(widest.cohort)}: of what they will cost only ${formatMoney(widest.latestCents, words.currency)} is paid. `,
+  ];
 }
 
 /** Who stands above or below, by name; the others are counted. */
@@ -122,36 +146,70 @@ function branchWords(
   if (outside.length === 0) {
     return [`All ${formatCount(told.length)} branches have about as many claims as expected.`];
   }
-  const others = told.length - outside.length;
+  return [...outsideParts(outside, words, links), othersWords(told.length - outside.length)];
+}
+
+/** Who stands outside, by name: a few all alike, of many only those above at length. */
+function outsideParts(
+  outside: readonly WarrantyBranch[],
+  words: WarrantyWords,
+  links: WarrantyLinks,
+): AnswerPart[] {
+  if (outside.length <= MOST_AT_LENGTH) return atLength(outside, words, links);
+  const above = outside.filter((branch) => standOf(branch) === 'above');
+  const below = outside.filter((branch) => standOf(branch) === 'below');
+  const long = atLength(above, words, links);
   return [
-    ...outside.flatMap((branch, index) =>
-      outsideWords(branch, index, outside.length, words, links),
-    ),
-    others > 0 ? `; ${othersWords(others)} as expected.` : '; none is as expected.',
+    ...long,
+    ...(long.length > 0 && below.length > 0 ? ['; '] : []),
+    ...inBrief(below, words, links),
   ];
 }
 
 function othersWords(others: number): string {
-  return others === 1 ? 'the other branch is' : `the other ${formatCount(others)} branches are`;
+  if (others === 0) return '; none is as expected.';
+  return others === 1
+    ? '; the other branch is as expected.'
+    : `; the other ${formatCount(others)} branches are as expected.`;
 }
 
-/** "Tangvarp has 66 claims where 40 were expected", and after the first "Ulvmark 21 where 34 were". */
-function outsideWords(
-  { branch, claims, expected }: WarrantyBranch,
-  index: number,
-  count: number,
+/** "Tangvarp has 66 claims where 40 were expected, Ulvmark 21 where 34 were". */
+function atLength(
+  branches: readonly WarrantyBranch[],
   words: WarrantyWords,
   links: WarrantyLinks,
 ): AnswerPart[] {
-  const name = words.branchName(branch);
-  const before = index === 0 ? '' : index === count - 1 && count > 2 ? ' and ' : ', ';
-  const figure = index === 0 ? formatCounted(claims, 'claim', 'claims') : formatCount(claims);
-  const said = index === 0 ? ' were expected' : ' were';
+  return branches.flatMap(({ branch, claims, expected }, index) => {
+    const first = index === 0;
+    const figure = first ? formatCounted(claims, 'claim', 'claims') : formatCount(claims);
+    return [
+      `${between(index, branches.length)}${words.branchName(branch)}${first ? ' has' : ''} `,
+      linked(figure, links.claims({ branch, region: undefined })),
+      ` where ${expectedText(expected)} were${first ? ' expected' : ''}`,
+    ];
+  });
+}
+
+/** "Granholt (27 of 42) and Ulvmark (36 of 51) have fewer". */
+function inBrief(
+  branches: readonly WarrantyBranch[],
+  words: WarrantyWords,
+  links: WarrantyLinks,
+): AnswerPart[] {
+  if (branches.length === 0) return [];
   return [
-    `${before}${name}${index === 0 ? ' has' : ''} `,
-    linked(figure, links.claims({ branch })),
-    ` where ${expectedText(expected)}${said}`,
+    ...branches.flatMap(({ branch, claims, expected }, index) => [
+      `${between(index, branches.length)}${words.branchName(branch)} (`,
+      linked(formatCount(claims), links.claims({ branch, region: undefined })),
+      ` of ${expectedText(expected)})`,
+    ]),
+    branches.length === 1 ? ' has fewer than expected' : ' have fewer than expected',
   ];
+}
+
+function between(index: number, count: number): string {
+  if (index === 0) return '';
+  return index === count - 1 && count > 2 ? ' and ' : ', ';
 }
 
 /** One branch against the rates of all: whose they are is not told. */

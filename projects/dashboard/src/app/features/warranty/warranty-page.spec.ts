@@ -64,7 +64,7 @@ describe('WarrantyPage', () => {
     expect(text(host.querySelector('.second'))).toContain('TAN has 66 claims where 40');
     expect(text(host.querySelector('.curves'))).toContain('136 claims in 8,737 car-years of cover');
     const cohorts = host.querySelector('.cohorts')!;
-    expect(text(cohorts)).toContain('2025 H1 1.8 above');
+    expect(text(cohorts)).toContain('2025 H1 above');
     expect(cohorts.querySelectorAll('us-paid-cell')).toHaveLength(4);
     expect(text(cohorts)).toContain('CSV of these 4 rows');
     expect(text(host.querySelector('.process'))).toContain('The last row is no check');

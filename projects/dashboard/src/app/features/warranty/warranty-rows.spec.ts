@@ -152,7 +152,7 @@ describe('processRows', () => {
   it('checks and thin product: seven rows, each with the cars that missed it, of how many', () => {
     const { chart, rows } = processRows(warrantyAnswer());
     expect(chart.rows).toHaveLength(7);
-    expect(rows.at(-1)!.missed).toBe('product under 70 % of the norm');
+    expect(rows.at(-1)!.missed).toBe('under 70 % of the norm');
     const drains = chart.rows.find(({ key }) => key === 'drainsClear')!;
     expect(drains).toMatchObject({ count: '20 of 420', text: '2.4', word: 'above' });
     expect(chart.summary).toContain('drain holes left closed 2.4 times as likely (1.6–3.5)');
