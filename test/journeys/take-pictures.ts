@@ -24,7 +24,13 @@ const PICTURES = [
   { name: 'overruns', path: '/overruns', as: 'site_manager', size: LAPTOP, colorScheme: 'light' },
   { name: 'rot', path: '/rot?age=15-19', as: 'head_office', size: LAPTOP, colorScheme: 'light' },
   { name: 'product', path: '/product', as: 'site_manager', size: LAPTOP, colorScheme: 'dark' },
-  { name: 'warranty-dark', path: '/warranty', as: 'head_office', size: LAPTOP, colorScheme: 'dark' },
+  {
+    name: 'warranty-dark',
+    path: '/warranty',
+    as: 'head_office',
+    size: LAPTOP,
+    colorScheme: 'dark',
+  },
   {
     name: 'come-backs-phone',
     path: '/come-backs',
