@@ -19,8 +19,6 @@ export function claimRevisionWords({
   source,
 }: Pick<Revision, 'change' | 'by' | 'receivedAt' | 'source'>): string {
   const words = `${CHANGES[change]} by ${by}, ${formatInstant(receivedAt)}`;
-  // That a person sent it is said by their name.
-  return source === 'person' || source === 'form'
-    ? `${words}.`
-    : `${words}; it came from ${SOURCE_NAMES[source]}.`;
+  // A name says that a person sent it, and which key.
+  return source === 'file' ? `${words}; it came from ${SOURCE_NAMES[source]}.` : `${words}.`;
 }

@@ -66,7 +66,7 @@ export function claimBody(
     ...(typed.claimRef.trim() === '' && { claimRef: 'A claim has a reference.' }),
     ...(typed.madeOn === '' && { madeOn: 'A claim is made on a day.' }),
     ...(zone === undefined && { zone: 'Touch the car where it is, or choose from the list.' }),
-    ...(cause === undefined && { cause: 'Choose what came of it; it can be corrected later.' }),
+    ...(cause === undefined && { cause: 'Choose why; it can be corrected later.' }),
     ...(labourMinutes === undefined && { labourMinutes: 'Whole minutes, such as 90.' }),
     ...(productMl === undefined && { productMl: 'Whole millilitres, such as 500.' }),
     ...(role !== 'recorder' &&
