@@ -36,6 +36,7 @@ import { listPhotos } from './photos';
 import { readUsualFigures } from './usual';
 import { countRungs, readQuoteFigures, scopedSource, type QuotedCar } from './quote';
 import { readClimates, readRotCars, readSpellings } from './rot';
+import { readClaims, readWarrantyCars } from './warranty';
 import { listWeekNotes } from './week-notes';
 
 /**
@@ -127,11 +128,13 @@ const READS: Record<
   'list-week-notes': (db) => listWeekNotes(db, '2026-W01', '2026-W05'),
   'network-rot-bands': (_db, filters, network) => network.rotBands(filters).bands,
   'network-quote-counts': (_db, _filters, network) => network.nearestQuoteSet(CAR, ['age'], 30),
+  'network-warranty-cells': (_db, filters, network) => network.warrantyCells(filters, '2026-02-02'),
   'package-codes': packageCodes,
   'read-by-branch': (db, filters) => readByKey(db, filters, 'branch'),
   'read-by-month': (db, filters) => readByKey(db, filters, 'month'),
   'read-by-stage': readByStage,
   'read-climates': (db) => readClimates(db, db.scope.echo().regions),
+  'read-claims': (db) => readClaims(db, '2026-02-02'),
   'read-costs-of-day': (db) => readCostsOfDay(db, '2026-01-05'),
   'read-import-catalogue': readImportCatalogue,
   'read-margin-target': readMarginTarget,
@@ -141,6 +144,7 @@ const READS: Record<
   'read-rot-cars': readRotCars,
   'read-spellings': (db) => readSpellings(db, [1]),
   'read-usual-figures': (db) => readUsualFigures(scopedSource(db), 1, CAR, 'model_age', () => true),
+  'read-warranty-cars': readWarrantyCars,
   'remembered-columns': (db) => rememberedColumns(db, 'AAA', 'jobs'),
   'sum-claims': (db) => sumClaims(db, CLAIMED, '2026-01-05'),
   'sum-branch-cells': sumBranchCells,
