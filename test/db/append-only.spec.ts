@@ -26,30 +26,35 @@ const verify = () => verifyAudit(small.store.unscoped);
 const execute = (text: string) => () => small.store.writing.driver.exec(text);
 
 describe('The append-only tables', () => {
-  it.each(['job_revisions', 'claim_revisions', 'come_back_marks', 'audit_events'])(
-    'given a change or removal in %s, refuse it',
-    async (table) => {
-      if (table === 'claim_revisions') {
-        small.store.writing.driver.exec(
-          `insert into claims (id, branch_id, job_id, claim_ref, revision, made_on, zone, cause, decision,
+  it.each([
+    'job_revisions',
+    'claim_revisions',
+    'come_back_marks',
+    'audit_events',
+    'warranty_reports',
+  ])('given a change or removal in %s, refuse it', async (table) => {
+    if (table === 'claim_revisions') {
+      small.store.writing.driver.exec(
+        `insert into claims (id, branch_id, job_id, claim_ref, revision, made_on, zone, cause, decision,
             labour_minutes, product_ml, cost_cents)
             values (1, 1, 1, 'c', 1, '2026-01-30', 'floor', 'damage', 'open', 0, 0, 0);
            insert into claim_revisions (claim_id, revision, content, received_at, source)
             values (1, 1, '{}', '2026-01-30', 'person')`,
-        );
-      }
-      if (table === 'come_back_marks') small.store.writing.driver.exec(ONE_MARK);
-      const column = COLUMNS[table] ?? 'content';
-      const before = small.store.unscoped.all(sql(table));
-      expect(before.length).toBeGreaterThan(0);
-      expect(execute(`update ${table} set ${column} = '{}'`)).toThrow('append-only');
-      expect(execute(`delete from ${table}`)).toThrow('append-only');
-      expect(small.store.unscoped.all(sql(table))).toEqual(before);
-    },
-  );
+      );
+    }
+    if (table === 'come_back_marks') small.store.writing.driver.exec(ONE_MARK);
+    if (table === 'warranty_reports') small.store.writing.driver.exec(ONE_REPORT);
+    const column = COLUMNS[table] ?? 'content';
+    const before = small.store.unscoped.all(sql(table));
+    expect(before.length).toBeGreaterThan(0);
+    expect(execute(`update ${table} set ${column} = '{}'`)).toThrow('append-only');
+    expect(execute(`delete from ${table}`)).toThrow('append-only');
+    expect(small.store.unscoped.all(sql(table))).toEqual(before);
+  });
 
   it('given a row written over by its key, refuse that too', () => {
     small.store.writing.driver.exec(ONE_MARK);
+    small.store.writing.driver.exec(ONE_REPORT);
     for (const [table, text] of Object.entries(REPLACED)) {
       const before = small.store.unscoped.all(sql(table));
       expect(before.length).toBeGreaterThan(0);
@@ -60,7 +65,15 @@ describe('The append-only tables', () => {
 });
 
 /** The column that a test tries to change, where it is not the content. */
-const COLUMNS: Record<string, string> = { audit_events: 'detail', come_back_marks: 'note' };
+const COLUMNS: Record<string, string> = {
+  audit_events: 'detail',
+  come_back_marks: 'note',
+  warranty_reports: 'pdf',
+};
+
+const ONE_REPORT = `insert into warranty_reports
+    (id, as_of, issued_at, summary, report, csv, csv_sha256, pdf, pdf_sha256)
+    values (1, '2026-01-31', '2026-02-02', '{}', '{}', '', '', x'25', '')`;
 
 const ONE_MARK = `insert into people (id, email, email_key, name, role, created_at)
     values (7, 'a@b.example', 'a@b.example', 'A', 'site_manager', '2026-01-01');
@@ -68,6 +81,9 @@ const ONE_MARK = `insert into people (id, email, email_key, name, role, created_
     values (1, 1, 'floor/left/1', 1, 'contacted', '', 7, '2026-01-30')`;
 
 const REPLACED: Record<string, string> = {
+  warranty_reports: `replace into warranty_reports
+    (id, as_of, issued_at, summary, report, csv, csv_sha256, pdf, pdf_sha256)
+    values (1, '2026-01-30', '2026-02-02', '{}', '{}', '', '', x'26', '')`,
   come_back_marks: `replace into come_back_marks
     (branch_id, job_id, ref, revision, status, note, person_id, changed_at)
     values (1, 1, 'floor/left/1', 1, 'gone', '', 7, '2026-01-31')`,

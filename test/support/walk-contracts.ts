@@ -1,8 +1,10 @@
 import { endpoints } from '#shared/contracts/index';
 import type { Endpoint } from '#shared/contracts/endpoint';
+import { beginReport, keepReport } from '#server/features/warranty-reports/issue-report';
 import type { TestApp } from './app';
 import { jpegOf, sendPhoto } from './send-photo';
 import { placeFile } from './place-file';
+import { sampleReport } from './sample-report';
 import { validJob, type SmallNetwork } from './small-network';
 
 /** A call as tests name it. */
@@ -91,7 +93,7 @@ export function findingsWithOneLeft(): object[] {
   return [...(validJob()['findings'] as object[]), LEFT_FINDING];
 }
 
-/** Puts there what the samples name: a job with a claim, a photo of either and a finding left on the car, one under way, and a booking. */
+/** Puts there what the samples name: a job with a claim, a photo of either and a finding left on the car, one under way, a booking and a report. */
 export async function placeSamples(app: TestApp, { manager }: SmallNetwork): Promise<void> {
   const claim = {
     jobRef: 'walked',
@@ -116,4 +118,13 @@ export async function placeSamples(app: TestApp, { manager }: SmallNetwork): Pro
     if (sent.status !== 201) throw new Error(`${photo}: ${sent.text}`);
   }
   await placeFile(app, manager, PLACED_FILE);
+  await placeReport(app);
+}
+
+/** An issued warranty report, the first: a made-up one, for making one takes a thread. */
+function placeReport({ kit: { store } }: TestApp): Promise<number> {
+  const actor = { label: 'system', personId: null, pushKeyId: null, address: 'local' };
+  const begun = beginReport(store, '2026-02-01T06:30:00.000Z');
+  const made = { report: sampleReport(), csv: 'branch\r\n', pdf: Buffer.from('%PDF-'), begun };
+  return store.queue.write(() => keepReport(store, made, actor));
 }
