@@ -37,6 +37,7 @@ import { readUsualFigures } from './usual';
 import { countRungs, readQuoteFigures, scopedSource, type QuotedCar } from './quote';
 import { readClimates, readRotCars, readSpellings } from './rot';
 import { readClaims, readWarrantyCars } from './warranty';
+import { laterArrivals } from './later-arrivals';
 import { listWeekNotes } from './week-notes';
 
 /**
@@ -95,6 +96,12 @@ const READS: Record<
   'find-last-time': (db) => findLastTime(db, { packageId: 1, bodyType: 'van', upTo: '2026-01-05' }),
   'iterate-job-rows': (db) => [...iterateJobRows(db, {}, 'completed')],
   'iterate-left': (db, filters) => [...iterateLeft(db, filters, statusesOf(filters))],
+  'later-arrivals': (db) =>
+    laterArrivals(
+      db,
+      { asOf: '2026-01-31', received: { jobRevision: 1, claimRevision: 1, event: 1 } },
+      200,
+    ),
   'list-billed-weeks': (db, filters) => listBilledWeeks(db, filters, 26),
   'list-branch-lives': listBranchLives,
   'iterate-claim-rows': (db, filters) => [...iterateClaimRows(db, filters, '2026-01-05', 'made')],

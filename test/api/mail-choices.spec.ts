@@ -86,11 +86,13 @@ describe('The choice of mails', () => {
     expect(body.items).toEqual([
       { kind: 'new_sign_in', wanted: true },
       { kind: 'import_ended', wanted: true },
+      { kind: 'warranty_report', wanted: true },
     ]);
     const chosen = await choose(token, [{ kind: 'import_ended', wanted: false }]);
     expect(chosen.body.items).toEqual([
       { kind: 'new_sign_in', wanted: true },
       { kind: 'import_ended', wanted: false },
+      { kind: 'warranty_report', wanted: true },
     ]);
     const { body: trail } = await app.call('get', '/api/audit?action=person.mails', { token });
     expect(trail.items[0].changes).toEqual([{ path: '/import_ended', before: true, after: false }]);
@@ -105,6 +107,7 @@ describe('The choice of mails', () => {
     const refused = await choose(token, [
       { kind: 'new_sign_in', wanted: false },
       { kind: 'import_ended', wanted: true },
+      { kind: 'warranty_report', wanted: true },
     ]);
     expect([refused.status, refused.body.problems[0].path]).toEqual([422, '/items/1/kind']);
     expect((await app.call('get', '/api/auth/mails', { token })).text).toContain('true');

@@ -68,7 +68,7 @@ describe('The append-only tables', () => {
 const COLUMNS: Record<string, string> = {
   audit_events: 'detail',
   come_back_marks: 'note',
-  warranty_reports: 'pdf',
+  warranty_reports: 'report',
 };
 
 const ONE_REPORT = `insert into warranty_reports

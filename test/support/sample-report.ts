@@ -64,16 +64,16 @@ export function sampleReport({
   });
   const ends = paid.map((row) => {
     const latestCents = row.at(-1) ?? 0;
-    const ultimateCents = factors
-      .slice(row.length - 1)
-      .reduce((cents, { factor }) => cents * factor, latestCents);
+    const ultimateCents = Math.round(
+      factors.slice(row.length - 1).reduce((cents, { factor }) => cents * factor, latestCents),
+    );
     return { latestCents, ultimateCents, outstandingCents: ultimateCents - latestCents };
   });
   const cohortRows = halves.map((cohort, index) => ({
     cohort,
     cars: 2_710 + 130 * index,
     ...ends[index]!,
-    standardErrorCents: index === 0 ? 0 : ends[index]!.outstandingCents * 0.17,
+    standardErrorCents: index === 0 ? 0 : Math.round(ends[index]!.outstandingCents * 0.17),
     claims: 40,
     expected: 41.2,
     ratio: 0.97,
@@ -132,7 +132,7 @@ export function sampleReport({
         latestCents: sum('latestCents'),
         ultimateCents: sum('ultimateCents'),
         outstandingCents: sum('outstandingCents'),
-        standardErrorCents: cohorts < 3 ? null : sum('outstandingCents') * 0.0924,
+        standardErrorCents: cohorts < 3 ? null : Math.round(sum('outstandingCents') * 0.0924),
       },
       triangle: {
         rows: halves.map((cohort, index) => ({ cohort, cumulativeCents: paid[index]! })),
@@ -201,8 +201,8 @@ export function sampleReport({
         upper: 41.29,
         expected: 3.217,
         ratio: 0.9325,
-        outstandingCents: 45_678.4,
-        standardErrorCents: index === 0 ? null : 12_345.67,
+        outstandingCents: 45_678,
+        standardErrorCents: index === 0 ? null : 12_346,
         claimsOpen: 1,
       })),
     ),
