@@ -13,6 +13,9 @@ export function findClaim(
       revision: number;
       decision: ClaimDecision;
       proposed: ClaimDecision | null;
+      /** Days of the decision that counts. */
+      decidedOn: string | null;
+      paidOn: string | null;
       content: RecordedClaim;
     }
   | undefined {
@@ -20,6 +23,8 @@ export function findClaim(
     revision: number;
     decision: ClaimDecision;
     proposed: ClaimDecision | null;
+    decidedOn: string | null;
+    paidOn: string | null;
     content: string;
   }>(
     standingClaim(db, branch, claimRef)
@@ -32,6 +37,8 @@ export function findClaim(
         revision: 'claims.revision',
         decision: 'claims.decision',
         proposed: 'claims.proposed_decision',
+        decidedOn: 'claims.decided_on',
+        paidOn: 'claims.paid_on',
         content: 'claim_revisions.content',
       }),
   );

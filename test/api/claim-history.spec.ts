@@ -164,6 +164,8 @@ describe('A claim from made to decided (rule 77)', () => {
     expect(await listed(at)).toMatchObject({
       ...{ decision: 'refused', proposedDecision: null, decidedOn: '2026-01-30' },
     });
+    const { body } = await app.call('get', at, { token: network.manager });
+    expect(body).toMatchObject({ decision: 'refused', decidedOn: '2026-01-30' });
   });
 
   it('given a recorder who corrects a decided claim, keeps its days whether they are sent or not', async () => {

@@ -80,6 +80,11 @@ export function mountClaims(mounting: Mounting, kit: Kit): void {
         labourMinutes: 0,
         productMl: 0,
         ...content,
+        // A branch's system that knows of no decision takes nothing from the one that stands, nor its days.
+        ...(found.proposed === null && {
+          decidedOn: found.decidedOn ?? content.decidedOn,
+          paidOn: found.paidOn ?? content.paidOn,
+        }),
         decision: found.decision,
         ...(found.proposed !== null && { proposedDecision: found.proposed }),
         ...(!unseen && { costCents }),
