@@ -52,11 +52,11 @@ describe('branchesSentence', () => {
     );
   });
 
-  it('many outside, counts them by side', () => {
+  it('many outside, names four of a side and counts the others', () => {
     const branches = ['A', 'B', 'C', 'D', 'E'].map((code) => above(code));
     const low = warrantyBranch({ branch: 'F', lower: 0.2, upper: 0.6 });
     expect(branchesSentence(warrantyReport({}, { branches: [...branches, low] }))).toBe(
-      '5 branches stand above expectation and 1 below.',
+      'A has 31 claims where 36 were expected, B 31 where 36 were, C 31 where 36 were, D 31 where 36 were, F 31 where 36 were, 1 more stands above.',
     );
   });
 

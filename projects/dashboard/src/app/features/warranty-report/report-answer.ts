@@ -7,13 +7,12 @@ import {
   formatCount,
   formatCounted,
   formatDate,
-  formatList,
   formatMoney,
   formatNumber,
 } from '../../ui/format';
 import { branchName, expectedWords, standing } from './report-words';
 
-/** More branches than this outside expectation are counted, not named, in a sentence. */
+/** Branches of a side that are named in a sentence; more are counted. */
 const NAMED = 4;
 
 /** What the report says: what the warranties sold by its day will still cost, give or take, and of how many cars. */
@@ -57,18 +56,14 @@ export function branchesSentence(report: WarrantyReport): string {
       : `All ${expected} branches are as expected.`;
   }
   const rest = expected === 0 ? '' : `; ${others(expected)} as expected`;
-  if (above.length + below.length > NAMED) {
-    const sides = [
-      ...(above.length > 0 ? [`${countBranches(above.length)} above expectation`] : []),
-      ...(below.length > 0 ? [`${formatCount(below.length)} below`] : []),
-    ];
-    return `${formatList(sides)}${rest}.`;
-  }
-  const named = [...above, ...below].map(
-    (branch) =>
-      `${branchName(report, branch.branch)} has ${formatCounted(branch.claims, 'claim', 'claims')} where ${expectedWords(branch.expected)} were expected`,
-  );
-  return `${formatList(named)}${rest}.`;
+  const named = [...above.slice(0, NAMED), ...below.slice(0, NAMED)].map((branch, at) => {
+    const claims =
+      at === 0
+        ? ` has ${formatCounted(branch.claims, 'claim', 'claims')}`
+        : ` ${formatCount(branch.claims)}`;
+    return `${branchName(report, branch.branch)}${claims} where ${expectedWords(branch.expected)} were${at === 0 ? ' expected' : ''}`;
+  });
+  return `${[...named, ...moreWords(above, 'above'), ...moreWords(below, 'below')].join(', ')}${rest}.`;
 }
 
 /** The rate of claims and what was paid, as a sentence of the report. */
@@ -90,8 +85,11 @@ export function plainWords(parts: readonly AnswerPart[]): string {
     .join('');
 }
 
-function countBranches(count: number): string {
-  return count === 1 ? '1 branch stands' : `${formatCount(count)} branches stand`;
+/** Those of a side that are not named. */
+function moreWords(side: readonly unknown[], word: 'above' | 'below'): string[] {
+  const more = side.length - NAMED;
+  if (more <= 0) return [];
+  return [more === 1 ? `1 more stands ${word}` : `${formatCount(more)} more stand ${word}`];
 }
 
 function others(count: number): string {

@@ -8,7 +8,7 @@ export function branchRows(report: WarrantyReport): PaperRows {
   return {
     columns: [
       words('Branch'),
-      words('Region'),
+      words('Code'),
       number('Cars'),
       number('Car-years run'),
       number('Claims'),
@@ -19,7 +19,7 @@ export function branchRows(report: WarrantyReport): PaperRows {
     ],
     rows: report.answer.branches.map((row) => [
       branchName(report, row.branch),
-      report.branches.find(({ code }) => code === row.branch)?.region ?? '',
+      row.branch,
       formatCount(row.cars),
       formatCount(row.carYears),
       formatCount(row.claims),

@@ -4,35 +4,38 @@ import { giveOrTake } from '#shared/domain/give-or-take';
 import { PaidCell } from '../../../charts/paid-and-to-come/paid-cell';
 import { paidReach } from '../../../charts/paid-and-to-come/paid-cell-layout';
 import { formatAmount } from '../../../ui/format';
+import { ScrollRegion } from '../../../ui/scroll-region/scroll-region';
 import { giveOrTakeWords, halfYearWords } from '../report-words';
 
 /** What was paid and is still to come, a bar a half-year with its numbers beside it. */
 @Component({
   selector: 'us-cohort-bars',
-  imports: [PaidCell],
+  imports: [PaidCell, ScrollRegion],
   template: `
-    <table aria-label="Paid, and still to come, drawn">
-      <thead>
-        <tr>
-          <th scope="col">Finished in</th>
-          <th scope="col" class="number">Paid</th>
-          <td></td>
-          <th scope="col" class="number">Still to come</th>
-          <th scope="col" class="number">Give or take</th>
-        </tr>
-      </thead>
-      <tbody>
-        @for (row of bars().rows; track row.name) {
+    <us-scroll-region label="Paid, and still to come, drawn">
+      <table aria-label="Paid, and still to come, drawn">
+        <thead>
           <tr>
-            <th scope="row">{{ row.name }}</th>
-            <td class="number">{{ row.paid }}</td>
-            <td class="bar"><us-paid-cell [data]="row.bar" [reach]="bars().reach" /></td>
-            <td class="number strong">{{ row.toCome }}</td>
-            <td class="number us-quiet">{{ row.giveOrTake }}</td>
+            <th scope="col">Finished in</th>
+            <th scope="col" class="number">Paid</th>
+            <td></td>
+            <th scope="col" class="number">Still to come</th>
+            <th scope="col" class="number">Give or take</th>
           </tr>
-        }
-      </tbody>
-    </table>
+        </thead>
+        <tbody>
+          @for (row of bars().rows; track row.name) {
+            <tr>
+              <th scope="row">{{ row.name }}</th>
+              <td class="number">{{ row.paid }}</td>
+              <td class="bar"><us-paid-cell [data]="row.bar" [reach]="bars().reach" /></td>
+              <td class="number strong">{{ row.toCome }}</td>
+              <td class="number us-quiet">{{ row.giveOrTake }}</td>
+            </tr>
+          }
+        </tbody>
+      </table>
+    </us-scroll-region>
   `,
   styles: `
     :host {
