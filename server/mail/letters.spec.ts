@@ -1,4 +1,4 @@
-import { invitationLetter, resetLetter } from './letters';
+import { invitationLetter, resetLetter, warrantyReportLetter } from './letters';
 
 const LINK = 'https://desk.example/welcome?token=1&purpose=reset';
 
@@ -23,5 +23,17 @@ describe.each([invitationLetter, resetLetter])('a letter', (write) => {
   it('given a name whose letters join (zero-width joiner), leaves it whole', () => {
     const name = 'می‌خواهم 👩‍🔧';
     expect(write({ email: 'a@network.example', name }, LINK).text).toContain(`Hello ${name},`);
+  });
+});
+
+describe('warrantyReportLetter', () => {
+  it('given a report, says of which day it is and where to read it, and no figure of it', () => {
+    const link = 'https://desk.example/warranty/reports/7';
+    const to = { email: 'a@network.example', name: 'Ansa' };
+    const letter = warrantyReportLetter(to, '2026-01-31', link);
+    expect(letter.text).toContain('as of 2026-01-31 was issued');
+    expect(letter.text).toContain(`\n${link}\n`);
+    expect(letter.html).toContain(`href="${link}"`);
+    expect(letter.text.replaceAll('2026-01-31', '').replace(link, '')).not.toMatch(/\d/);
   });
 });

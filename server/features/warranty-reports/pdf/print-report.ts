@@ -36,7 +36,8 @@ export function printReport(report: WarrantyReport): Buffer {
     drawable ? signedMoney(cents, currency) : `${currency} ${whole(cents / 100)}`;
   const voice: Voice = { branch: names.branch, money };
   const words = { branch: names.branch, sign };
-  const plain = (key: string): string => (paper.fonts.canDraw(key) ? key : '(not named)');
+  const plain = (key: string): string =>
+    paper.fonts.canDraw(key) ? key.replaceAll('_', ' ') : '(not named)';
 
   head(paper, report, names.network, voice);
   curvesPicture(paper, answer, answer.groupBy === 'branch' ? names.branch : plain);

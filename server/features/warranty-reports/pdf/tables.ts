@@ -30,6 +30,7 @@ export function cohortTable(
     paper,
     `Half-years of completion, ${sign}`,
     'Give or take is half of the 95 % interval. Claims against expected say whether cars of a half-year are unlike others.',
+    Math.min(cohorts.length + 2, 40) * 12.5,
   );
   type Line = Partial<WarrantyCohort> & WarrantyAnswer['total'] & { name: string };
   const lines: Line[] = [
@@ -147,7 +148,7 @@ export function processTable(paper: Paper, { process, thinProduct }: WarrantyAns
   );
   const pooled = [
     ...process.map((risk) => ({ ...risk, name: CHECK_WORDS[risk.check] })),
-    { ...thinProduct, name: 'product at 70 % of its norm or more' },
+    { ...thinProduct, name: 'product 70 % of its norm or more' },
   ].map((risk) => ({
     ...risk,
     exposedCars: sumOf(risk.tables, (stratum) => stratum.exposedCars),
