@@ -1,5 +1,6 @@
 import type { Page } from 'playwright-core';
 import type { Role } from '#shared/domain/vocabulary';
+import { REPORT_STATES } from './report-states';
 import { sendStates } from './send-states';
 import { officeFile, officeRow, sendFile } from './import-file';
 
@@ -46,6 +47,8 @@ export function everyPage({ rotten, unbilled }: KnownJobs): Stop[] {
     { name: 'warranty', path: '/warranty', as: 'site_manager' },
     { name: 'warranty-lead', path: '/warranty', as: 'regional_lead' },
     { name: 'warranty-network', path: '/warranty', as: 'head_office' },
+    { name: 'warranty-reports', path: '/warranty/reports', as: 'head_office' },
+    { name: 'warranty-schedule', path: '/warranty/reports/schedule', as: 'head_office' },
     { name: 'jobs', path: '/jobs', as: 'site_manager' },
     { name: 'jobs-recorder', path: '/jobs', as: 'recorder' },
     { name: 'claims', path: '/claims', as: 'site_manager' },
@@ -155,6 +158,7 @@ export function everyState({ rotten, corrected }: KnownJobs): Stop[] {
       as: 'head_office',
     },
     { name: 'scope-as-of', path: '/warranty', as: 'head_office', prepare: press(/^As of/) },
+    ...REPORT_STATES,
     { name: 'jobs-none', path: '/jobs?q=nothing-like-it', as: 'site_manager' },
     { name: 'jobs-orders', path: '/jobs', as: 'site_manager', prepare: press('newest first') },
     { name: 'claims-none', path: '/claims?q=nothing-like-it', as: 'site_manager' },
