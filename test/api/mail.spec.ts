@@ -210,7 +210,7 @@ describe('Outbox', () => {
   it('when a mail has become too old, gives up', async () => {
     const port = await post.open();
     post.refuseWith = 451;
-    make(port, { ...QUICK, giveUpAfterMs: 150 }).start();
+    make(port, { ...QUICK, giveUpAfterMs: 600 }).start();
     await queue();
     await until(() => rows(store)[0]?.next_attempt_at === null, 'it is given up');
     expect(rows(store)[0]!.attempts).toBeGreaterThan(1);
