@@ -40,7 +40,7 @@ describe('the warranty-risk report', () => {
     return { hash: createHash('sha256').update(readFileSync(file)).digest('hex'), path: file };
   };
 
-  test('as of a past day is read first, and issued when asked twice', async () => {
+  test('as of a past day is read first, and issued once that is confirmed', async () => {
     await open(office, '/warranty/reports?asOf=2026-01-31');
     await office.getByRole('button', { name: 'Issue this report' }).click();
     const dialog = office.getByRole('dialog');
@@ -99,7 +99,7 @@ describe('the warranty-risk report', () => {
       rmSync(folder, { recursive: true, force: true });
     });
 
-    test('on a day that no month has, is told at the field and keeps what was typed', async () => {
+    test('on a day that not every month has, is told at the field and keeps what was typed', async () => {
       await open(office, '/warranty/reports/schedule');
       await office.getByLabel('Day of the month').fill('31');
       await office.getByRole('button', { name: 'Save the schedule' }).click();
