@@ -17,8 +17,10 @@ describe('roundedAmount', () => {
     expect(roundedAmount(123_456, 0)).toEqual({ cents: 123_500, giveOrTakeCents: 0 });
   });
 
-  it('given no error, says whole money alone', () => {
-    expect(roundedAmount(123_449, null)).toEqual({ cents: 123_400, giveOrTakeCents: null });
+  it('given no error, says two digits alone, of small sums whole money', () => {
+    expect(roundedAmount(7_656_140, null)).toEqual({ cents: 7_700_000, giveOrTakeCents: null });
+    expect(roundedAmount(412, null)).toEqual({ cents: 400, giveOrTakeCents: null });
+    expect(roundedAmount(0, null)).toEqual({ cents: 0, giveOrTakeCents: null });
   });
 });
 

@@ -16,16 +16,21 @@ export function giveOrTake(standardErrorCents: number): number {
 
 /**
  * An estimate as a sentence says it: give or take to two digits, the amount to the same place, neither finer than whole
- * money. Without an error, or with none to speak of, the amount to whole money.
+ * money. Without an error the amount to two digits of its own: nothing supports more.
  */
 export function roundedAmount(cents: number, standardErrorCents: number | null): RoundedAmount {
   if (standardErrorCents === null) {
-    return { cents: roundTo(cents, WHOLE_MONEY), giveOrTakeCents: null };
+    return { cents: roundTo(cents, twoDigits(cents)), giveOrTakeCents: null };
   }
   const half = giveOrTake(standardErrorCents);
-  const digits = Math.floor(Math.log10(Math.max(half, 1)));
-  const step = Math.max(10 ** (digits - 1), WHOLE_MONEY);
+  const step = twoDigits(half);
   return { cents: roundTo(cents, step), giveOrTakeCents: roundTo(half, step) };
+}
+
+/** The place, in cents, to which an amount has two digits; whole money at least. */
+function twoDigits(amount: number): number {
+  const digits = Math.floor(Math.log10(Math.max(Math.abs(amount), 1)));
+  return Math.max(10 ** (digits - 1), WHOLE_MONEY);
 }
 
 function roundTo(value: number, step: number): number {

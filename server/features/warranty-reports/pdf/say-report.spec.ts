@@ -31,7 +31,7 @@ describe('sayAnswer', () => {
   it('given no error, says that too few half-years stand behind it', () => {
     const without = { ...total, standardErrorCents: null };
     expect(said(sayAnswer({ ...answer, covered: 1, total: without }, voice))).toBe(
-      'Warranties already sold will still cost about €76,561; too few half-years stand behind it to say give or take (1 car).',
+      'Warranties already sold will still cost about €77,000; too few half-years stand behind it to say give or take (1 car).',
     );
   });
 

@@ -1,7 +1,9 @@
 import type { WarrantyAnswer, WarrantyBranch } from '#shared/contracts/warranty';
+import { roundedAmount } from '#shared/domain/give-or-take';
 import type { AnswerPart } from '../../ui/answer/answer';
 import type { CellLink } from '../../ui/data-table/column';
 import {
+  formatAmount,
   formatCars,
   formatCount,
   formatCounted,
@@ -9,7 +11,6 @@ import {
   formatMoney,
   formatNumber,
 } from '../../ui/format';
-import { roundedMoney } from './rounded-money';
 import type { WarrantyLinks } from './warranty-links';
 import {
   expectedText,
@@ -71,16 +72,15 @@ export function answerWarranty(
       second: [notYetWords(answer), ' ', ...branches],
     };
   }
-  const { sum, giveOrTake: range } = roundedMoney(
+  const { cents, giveOrTakeCents } = roundedAmount(
     total.outstandingCents,
-    giveOrTake(total.standardErrorCents),
-    words.currency,
+    total.standardErrorCents,
   );
   return {
     sentence: [
       'Warranties already sold will still cost about ',
-      { figure: sum },
-      ...(range === null ? [] : [`, give or take ${range}`]),
+      { figure: formatMoney(cents, words.currency) },
+      ...(giveOrTakeCents === null ? [] : [`, give or take ${formatAmount(giveOrTakeCents)}`]),
       ' ',
       { quiet: `(${formatCars(covered)})` },
       '.',

@@ -1,4 +1,5 @@
 import type { CurveGroup, WarrantyAnswer, WarrantyBranch } from '#shared/contracts/warranty';
+import { giveOrTake as halfInterval } from '#shared/domain/give-or-take';
 import { formatCount, formatNumber, formatShare } from '../../ui/format';
 
 /** What the page needs to turn codes and cents into words. */
@@ -10,12 +11,9 @@ export interface WarrantyWords {
   readonly packageWord: (code: string) => string;
 }
 
-/** Half of a 95 % interval of a normal estimate, in standard errors. */
-const Z95 = 1.959964;
-
-/** Half of the 95 % interval of a sum, in minor units: what "give or take" says. */
+/** Half of the 95 % interval of a sum, in minor units: what "give or take" says; null where it is not known. */
 export function giveOrTake(standardErrorCents: number | null): number | null {
-  return standardErrorCents === null ? null : Z95 * standardErrorCents;
+  return standardErrorCents === null ? null : halfInterval(standardErrorCents);
 }
 
 /** A half-year as it stands in rows: `2024-H1` → "2024 H1". */
