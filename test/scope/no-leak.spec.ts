@@ -2,7 +2,7 @@ import { NetworkReference } from '#db/network-reference';
 import { Scope } from '#db/scope';
 import type { Role } from '#shared/domain/vocabulary';
 import { TestApp, type Answer } from '../support/app';
-import { disturbOutside } from '../support/disturb-outside';
+import { disturbOutside, oldCarsOf, oldClaim } from '../support/disturb-outside';
 import { readOnThisThread } from '../support/read-on-this-thread';
 import { BRANCHES, makeSmallNetwork, validJob, type SmallNetwork } from '../support/small-network';
 import { askedOf, contracts, findingsWithOneLeft, placeSamples } from '../support/walk-contracts';
@@ -19,9 +19,14 @@ beforeAll(async () => {
   await placeSamples(app, network);
   const sent = await app.call('post', '/api/branches/AAA/jobs/batch', {
     token: network.manager,
-    body: { jobs: ownCars() },
+    body: { jobs: [...ownCars(), ...oldCarsOf(0)] },
   });
   expect(sent.status).toBe(200);
+  const claim = await app.call('put', '/api/branches/AAA/claims/old', {
+    token: network.office,
+    body: oldClaim('old-0-1', 500),
+  });
+  expect(claim.status).toBe(201);
   const note = { text: 'of the own branch' };
   await app.call('put', '/api/branches/AAA/weeks/2026-W05/note', {
     token: network.manager,
@@ -51,6 +56,10 @@ const QUERIES: Record<string, string[]> = {
   '/api/analytics/rot': ['package=full', 'from=2026-01-26', 'package=cavity', 'bodyType=suv'],
   '/api/claims': ['counted=true', 'sort=completed&limit=1', 'q=walked', 'asOf=2026-01-30'],
   '/api/come-back': ['limit=1', 'status=contacted'],
+  '/api/analytics/warranty': [
+    ...['asOf=2025-12-31', 'groupBy=branch', 'groupBy=region', 'groupBy=cohort&to=2024-01-01'],
+    'groupBy=branch&group=AAA&group=CCC',
+  ],
 };
 const FILTERS = [
   '',
@@ -104,9 +113,12 @@ type Reader = keyof typeof READERS;
 /** The calls that refer to the network. */
 const REFERRING = [
   '/api/analytics/rot',
+  '/api/analytics/warranty',
   '/api/quote',
   '/api/branches/AAA/usual',
   '/api/exports/quote.csv',
+  '/api/exports/warranty-branches.csv',
+  '/api/exports/warranty-cohorts.csv',
 ];
 
 /** As many branches with cars as may stand outside before a figure of the network is told. */
@@ -244,7 +256,10 @@ describe('Everything a site manager may read', () => {
       }
     });
     // Rows that name regions or branches of the scope: cars of branches beyond it belong to none of them.
-    const lockedTwice = ['/api/exports/rot.csv', '/api/exports/product-branches.csv'];
+    const lockedTwice = [
+      ...['/api/exports/rot.csv', '/api/exports/product-branches.csv'],
+      '/api/exports/warranty-branches.csv',
+    ];
     const narrowed = contracts.filter(
       ([name, { access, path }]) =>
         name.startsWith('GET') &&

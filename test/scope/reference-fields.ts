@@ -10,6 +10,19 @@ const REFERENCE_FIELDS: Readonly<Record<string, readonly Path[]>> = {
     ['regions', '*', 'adjustedUpper'],
     ['regions', '*', 'bandsLeftOut'],
   ],
+  '/api/analytics/warranty': [
+    ...['branches', 'cohorts'].flatMap((rows) =>
+      ['expected', 'ratio', 'lower', 'upper'].map((field) => [rows, '*', field]),
+    ),
+    ['expectedRates', '*', 'claims'],
+    ['expectedRates', '*', 'carYears'],
+  ],
+};
+
+/** Files with such figures, and the columns in which those stand. */
+const REFERENCE_COLUMNS: Readonly<Record<string, readonly string[]>> = {
+  '/api/exports/warranty-branches.csv': ['expected', 'ratio', 'lower', 'upper'],
+  '/api/exports/warranty-cohorts.csv': ['expected', 'ratio', 'lower', 'upper'],
 };
 
 /** Answers that are a figure of the network as a whole once they say so, and then may change anywhere. */
@@ -31,6 +44,7 @@ export function mayRefer(path: string): boolean {
   return (
     path in REFERENCE_FIELDS ||
     path in WHOLE_ANSWERS ||
+    path in REFERENCE_COLUMNS ||
     path === '/api/exports/quote.csv' ||
     USUAL_AT.test(path)
   );
@@ -39,6 +53,8 @@ export function mayRefer(path: string): boolean {
 /** The text of an answer without its figures of the network: what must not follow rows outside by a single byte. */
 export function withoutReference(path: string, text: string): string {
   if (!mayRefer(path)) return text;
+  const columns = REFERENCE_COLUMNS[path];
+  if (columns) return withoutColumns(text, columns);
   // A quote as rows says in each where its cars were.
   if (path.endsWith('.csv')) return text.includes(',network,') ? 'of the network' : text;
   const answer: unknown = JSON.parse(text);
@@ -48,6 +64,15 @@ export function withoutReference(path: string, text: string): string {
   if (USUAL_AT.test(path)) return JSON.stringify(withoutUsual(answer));
   for (const field of REFERENCE_FIELDS[path] ?? []) takeOut(answer, field);
   return JSON.stringify(answer);
+}
+
+/** No cell of these files holds a comma. */
+function withoutColumns(text: string, columns: readonly string[]): string {
+  const rows = text.split('\r\n').map((row) => row.split(','));
+  const header = rows[0] ?? [];
+  return rows
+    .map((cells) => cells.filter((_, at) => !columns.includes(header[at] ?? '')).join())
+    .join('\r\n');
 }
 
 function takeOut(value: unknown, [step = '', ...rest]: Path): void {

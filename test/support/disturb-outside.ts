@@ -98,6 +98,29 @@ async function disturbCars(
     decision: 'open',
     costCents: round,
   });
+  await send('post', `${at}/jobs/batch`, { jobs: oldCarsOf(round) });
+  await send('put', `${at}/claims/old-${round}`, oldClaim(`old-${round}-1`, 1000 * round));
+}
+
+/** Cars whose warranty has run out, worked in every way, and too old to be quoted from: each round has others. */
+export function oldCarsOf(round: number): object[] {
+  return [1, 2, 3, 4, 5, 6].map((n) => ({
+    jobRef: `old-${round}-${n}`,
+    ...validJob({
+      ...{ bookedOn: undefined, startedOn: undefined, completedOn: '2022-06-15', invoice: null },
+      vehicle: { ...(validJob()['vehicle'] as object), firstRegistered: '2015-03' },
+      checks: { linersOff: n % 3 === 0 ? 'yes' : 'no', driedOut: n === round % 6 ? 'no' : 'yes' },
+      products: [{ product: 'CW1', ml: n % 2 === round % 2 ? 2000 : 4000 }],
+    }),
+  }));
+}
+
+/** A claim within such a warranty, paid long ago. */
+export function oldClaim(jobRef: string, costCents: number): object {
+  return {
+    ...{ jobRef, madeOn: '2023-02-01', zone: 'floor', cause: 'damage', decision: 'accepted' },
+    ...{ decidedOn: '2023-02-10', paidOn: '2023-02-20', costCents },
+  };
 }
 
 /** Half of the cars of one age, so that a quote finds enough of them, the others of every age: each round has another mix of ages, other rot and other minutes. */
