@@ -142,13 +142,13 @@ const COLUMNS: readonly Column<CurveRow>[] = [
   },
   {
     key: 'atRisk',
-    label: 'At risk in it',
+    label: 'At risk',
     kind: 'number',
     text: ({ atRisk }) => formatCount(atRisk),
   },
   {
     key: 'claims',
-    label: 'First claims since the row before',
+    label: 'First claims',
     kind: 'number',
     text: ({ claims }) => formatCount(claims),
   },

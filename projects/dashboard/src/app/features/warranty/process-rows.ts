@@ -103,6 +103,14 @@ function whyNot({ missedCars, doneCars, missedClaims, doneClaims, strata }: Proc
   return strata > 0 && missedClaims + doneClaims === 0 ? 'no claim yet' : 'too few cars yet';
 }
 
+/** "3.5 above"; the ratio alone where its interval holds 1. */
+function ratioWords(row: ProcessRow): string {
+  const stand = standOf(row);
+  return stand === 'as_expected'
+    ? ratioText(row.riskRatio)
+    : `${ratioText(row.riskRatio)} ${stand}`;
+}
+
 const claimShare = (claims: number, cars: number): string =>
   cars === 0
     ? ''
@@ -125,11 +133,11 @@ const COLUMNS: readonly Column<ProcessRow>[] = [
   },
   {
     key: 'ratio',
-    label: 'Times as likely, ages alike',
+    label: 'Times as likely',
     kind: 'number',
     strong: ({ riskRatio }) => riskRatio !== null,
     muted: ({ riskRatio }) => riskRatio === null,
-    text: (row) => (row.riskRatio === null ? whyNot(row) : ratioText(row.riskRatio)),
+    text: (row) => (row.riskRatio === null ? whyNot(row) : ratioWords(row)),
     sortBy: ({ riskRatio }) => riskRatio,
   },
   {
@@ -137,11 +145,6 @@ const COLUMNS: readonly Column<ProcessRow>[] = [
     label: '95 %',
     kind: 'number',
     text: ({ lower, upper }) => ratioRange(lower, upper),
-  },
-  {
-    key: 'word',
-    label: 'Stands',
-    text: (row) => (standOf(row) === 'as_expected' ? '' : standOf(row)),
   },
 ];
 
