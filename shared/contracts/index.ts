@@ -15,6 +15,7 @@ import * as overrun from './overrun';
 import * as people from './people';
 import * as photos from './photos';
 import * as products from './products';
+import * as pushKeys from './push-keys';
 import * as quote from './quote';
 import * as rot from './rot';
 import * as setUp from './set-up';
@@ -32,6 +33,7 @@ export const endpoints: readonly Endpoint[] = [
   people,
   setUp,
   setUpHelp,
+  pushKeys,
   jobs,
   corrections,
   underWay,

@@ -5,7 +5,7 @@ import { realClock, type Clock } from '#server/clock';
 import { mount, type Mounting } from '#server/http/mount';
 import type { Kit } from '#server/kit';
 import { listPushKeys } from '#db/queries/push-keys';
-import * as contracts from '#shared/contracts/set-up';
+import * as contracts from '#shared/contracts/push-keys';
 import { addKey } from './add-key';
 import { revokeKey } from './revoke-key';
 

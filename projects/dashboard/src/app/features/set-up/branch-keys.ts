@@ -1,6 +1,6 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input, signal } from '@angular/core';
 import type { OutOf } from '#shared/contracts/endpoint';
-import { type addKey, listKeys, revokeKey } from '#shared/contracts/set-up';
+import { type addKey, listKeys, revokeKey } from '#shared/contracts/push-keys';
 import { Api } from '../../core/api/api';
 import { deed } from '../../core/api/deed';
 import { CellTemplate } from '../../ui/data-table/cell-template';

@@ -1,4 +1,5 @@
 import type { OutOf } from '#shared/contracts/endpoint';
+import { addKey } from '#shared/contracts/push-keys';
 import * as contract from '#shared/contracts/set-up';
 import type { Api } from '../../core/api/api';
 import type { ChangeOf } from './change-of';
@@ -148,7 +149,7 @@ export function rateChange(
 }
 
 /** A key with which a branch's own system may send its jobs. */
-export function keyChange(api: Api, branch: string): ChangeOf<OutOf<typeof contract.addKey>> {
+export function keyChange(api: Api, branch: string): ChangeOf<OutOf<typeof addKey>> {
   return {
     label: 'A new push key',
     act: 'Make a key',
@@ -163,6 +164,6 @@ export function keyChange(api: Api, branch: string): ChangeOf<OutOf<typeof contr
     ],
     start: {},
     save: (typed) =>
-      api.call(contract.addKey, { params: { branch }, body: { label: textOf(typed, 'label') } }),
+      api.call(addKey, { params: { branch }, body: { label: textOf(typed, 'label') } }),
   };
 }
