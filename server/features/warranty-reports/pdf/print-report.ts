@@ -1,3 +1,4 @@
+import { hardlyKnownWords } from '#shared/domain/hardly-known';
 import type { WarrantyReport } from '#shared/contracts/warranty-reports';
 import { cohortsPicture } from './cohorts-picture';
 import { COLOURS } from './colours';
@@ -77,6 +78,8 @@ function head(paper: Paper, report: WarrantyReport, network: string, voice: Voic
     1.3,
   );
   paper.y += 2;
+  const hardly = hardlyKnownWords(answer.total, answer.cohorts, voice.money);
+  if (hardly !== undefined) paragraph(paper, [{ text: hardly, size: 11 }]);
   paragraph(paper, [{ text: sayBranches(answer.branches, voice), size: 11 }]);
   const { claims, carYears, per1000, lower, upper } = answer.rate;
   if (per1000 !== null && lower !== null && upper !== null) {

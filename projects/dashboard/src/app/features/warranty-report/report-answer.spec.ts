@@ -1,5 +1,11 @@
 import { warrantyBranch, warrantyReport } from '../../testing/warranty-report-answers';
-import { branchesSentence, plainWords, rateSentence, reportSentence } from './report-answer';
+import {
+  branchesSentence,
+  plainWords,
+  rateSentence,
+  reportSentence,
+  secondSentence,
+} from './report-answer';
 import { formatDate } from '../../ui/format';
 
 const DAY = formatDate('2026-02-01');
@@ -41,6 +47,17 @@ describe('reportSentence', () => {
   it('no car under warranty, says only that', () => {
     expect(plainWords(reportSentence(warrantyReport({}, { covered: 0 })))).toBe(
       `No car had been finished with a warranty by ${DAY}.`,
+    );
+  });
+});
+
+describe('secondSentence', () => {
+  it('an interval wider than its figure, says so before the branches', () => {
+    const report = warrantyReport();
+    expect(secondSentence(report)).toBe(branchesSentence(report));
+    const total = { ...report.answer.total, standardErrorCents: 10_000_000 };
+    expect(secondSentence(warrantyReport({}, { total }))).toMatch(
+      /^It can hardly be told yet, most of all for cars finished in 20\d\d H[12]: .* is paid\. Tangmoor has/,
     );
   });
 });

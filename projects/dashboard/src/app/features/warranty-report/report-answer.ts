@@ -1,5 +1,6 @@
 import type { WarrantyReport } from '#shared/contracts/warranty-reports';
 import { roundedAmount } from '#shared/domain/give-or-take';
+import { hardlyKnownWords } from '#shared/domain/hardly-known';
 import type { AnswerPart } from '../../ui/answer/answer';
 import {
   formatAmount,
@@ -41,6 +42,13 @@ export function reportSentence(report: WarrantyReport): readonly AnswerPart[] {
     cars,
     '.',
   ];
+}
+
+/** How little is known of the figure where that is the case, and which branches have more or fewer claims than expected. */
+export function secondSentence(report: WarrantyReport): string {
+  const { total, cohorts } = report.answer;
+  const hardly = hardlyKnownWords(total, cohorts, (cents) => formatMoney(cents, report.currency));
+  return [hardly, branchesSentence(report)].filter(Boolean).join(' ');
 }
 
 /** Which branches have more or fewer claims than expected. */

@@ -23,7 +23,7 @@ import { LoadState } from '../../ui/load-state/load-state';
 import { IssueDialog } from './issue-dialog';
 import { issuedColumns } from './issued-columns';
 import { ReportPaper } from './paper/report-paper';
-import { branchesSentence, reportSentence } from './report-answer';
+import { reportSentence, secondSentence } from './report-answer';
 import { lastRunSentence, scheduleSentence } from './schedule-words';
 
 /** Issued reports listed at once. */
@@ -70,7 +70,7 @@ export class ReportsPage {
   protected readonly view = computed(() => {
     const report = this.report.value();
     if (!report) return undefined;
-    const second = branchesSentence(report);
+    const second = secondSentence(report);
     return {
       report,
       sentence: reportSentence(report),

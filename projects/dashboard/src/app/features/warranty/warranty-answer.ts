@@ -1,5 +1,6 @@
 import type { WarrantyAnswer, WarrantyBranch } from '#shared/contracts/warranty';
 import { roundedAmount } from '#shared/domain/give-or-take';
+import { hardlyKnownWords } from '#shared/domain/hardly-known';
 import type { AnswerPart } from '../../ui/answer/answer';
 import type { CellLink } from '../../ui/data-table/column';
 import {
@@ -14,8 +15,6 @@ import {
 import type { WarrantyLinks } from './warranty-links';
 import {
   expectedText,
-  giveOrTake,
-  halfYearWords,
   ratioRange,
   standOf,
   standsAlone,
@@ -110,21 +109,15 @@ function notYetWords({ cohorts, evaluatedOn, total }: WarrantyAnswer): string {
 /** Why no interval can be said, or which half-year makes it as wide as it is; nothing where it is narrower than the sum. */
 function certaintyWords(answer: WarrantyAnswer, words: WarrantyWords): string[] {
   const { cohorts, total } = answer;
-  const off = giveOrTake(total.standardErrorCents);
-  if (off === null) {
+  if (total.standardErrorCents === null) {
     return [
       cohorts.length < COHORTS_FOR_INTERVAL
         ? `How far that may be off cannot be said yet: it needs cars of four half-years, and there are ${formatCount(cohorts.length)}. `
         : 'How far that may be off cannot be said: too little was paid in some of the half-years. ',
     ];
   }
-  const widest = [...cohorts].sort(
-    (a, b) => (b.standardErrorCents ?? 0) - (a.standardErrorCents ?? 0),
-  )[0];
-  if (!widest || off <= total.outstandingCents) return [];
-  return [
-    `It can hardly be told yet, most of all for cars finished in ${halfYearWords(widest.cohort)}: of what they will cost only ${formatMoney(widest.latestCents, words.currency)} is paid. `,
-  ];
+  const hardly = hardlyKnownWords(total, cohorts, (cents) => formatMoney(cents, words.currency));
+  return hardly === undefined ? [] : [`${hardly} `];
 }
 
 /** Who stands above or below, by name; the others are counted. */

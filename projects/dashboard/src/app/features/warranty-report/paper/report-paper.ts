@@ -6,7 +6,7 @@ import { DotIntervalChart } from '../../../charts/dot-interval/dot-interval-char
 import { PaidKey } from '../../../charts/paid-and-to-come/paid-key';
 import { currencySign, formatDate } from '../../../ui/format';
 import { Mark } from '../../../ui/mark/mark';
-import { branchesSentence, plainWords, rateSentence, reportSentence } from '../report-answer';
+import { plainWords, rateSentence, reportSentence, secondSentence } from '../report-answer';
 import { branchRows } from './branch-rows';
 import { claimFreeRows } from './claim-free-rows';
 import { CohortBars } from './cohort-bars';
@@ -45,7 +45,7 @@ export class ReportPaper {
       standing: standingWords(this.issued()),
       sign: currencySign(report.currency),
       answer: plainWords(reportSentence(report)),
-      branchWords: branchesSentence(report),
+      branchWords: secondSentence(report),
       rate: rateSentence(report),
       curves: curvesPicture(answer),
       expected: expectedPicture(report),
