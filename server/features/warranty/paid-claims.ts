@@ -12,8 +12,9 @@ export interface PaidTriangle {
 export function paidTriangleOf(asked: CarsAsked, evaluatedOn: string): PaidTriangle {
   const { cohorts, claims } = asked;
   const last = halfYearOf(evaluatedOn);
-  const oldest = cohorts.reduce((first, cohort) => (cohort < first ? cohort : first), last);
-  const every = cohorts.length === 0 ? [] : halfYearsFrom(oldest, last);
+  const [some] = cohorts;
+  const oldest = cohorts.reduce((first, cohort) => (cohort < first ? cohort : first), some ?? '');
+  const every = some === undefined ? [] : halfYearsFrom(oldest, last);
   const paid = new Map(every.map((cohort, row) => [cohort, zeros(every.length - row)]));
   for (const { car, paidOn, costCents } of claims) {
     if (paidOn === null || paidOn > evaluatedOn) continue;
