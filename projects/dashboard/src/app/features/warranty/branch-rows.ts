@@ -8,6 +8,7 @@ import {
   ratioRange,
   ratioText,
   standOf,
+  standingText,
   standsAlone,
   type WarrantyWords,
 } from './warranty-words';
@@ -111,13 +112,6 @@ function columnsOf(
       sortBy: ({ cars }) => cars,
     },
     {
-      key: 'years',
-      label: 'Car-years',
-      kind: 'number',
-      text: ({ carYears }) => formatCount(carYears),
-      sortBy: ({ carYears }) => carYears,
-    },
-    {
       key: 'claims',
       label: 'Claims',
       kind: 'number',
@@ -135,10 +129,10 @@ function columnsOf(
     },
     {
       key: 'ratio',
-      label: 'Claims / expected',
+      label: 'Ratio',
       kind: 'number',
       strong: true,
-      text: ({ ratio }) => (ratio === null ? 'no cover yet' : ratioText(ratio)),
+      text: (row) => (row.ratio === null ? 'no cover yet' : standingText(row.ratio, row)),
       sortBy: ({ ratio }) => ratio,
     },
     {
@@ -148,10 +142,11 @@ function columnsOf(
       text: ({ lower, upper }) => ratioRange(lower, upper),
     },
     {
-      key: 'word',
-      label: 'Stands',
-      text: (row) => (standOf(row) === 'as_expected' ? 'as expected' : standOf(row)),
-      muted: (row) => standOf(row) === 'as_expected',
+      key: 'years',
+      label: 'Car-years',
+      kind: 'number',
+      text: ({ carYears }) => formatCount(carYears),
+      sortBy: ({ carYears }) => carYears,
     },
   ];
 }

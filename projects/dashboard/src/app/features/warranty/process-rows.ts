@@ -3,7 +3,7 @@ import type { Check } from '#shared/domain/vocabulary';
 import type { DotIntervalInput, IntervalRow } from '../../charts/dot-interval/dot-interval-input';
 import type { Column } from '../../ui/data-table/column';
 import { formatCount, formatShare } from '../../ui/format';
-import { ratioRange, ratioText, standOf } from './warranty-words';
+import { ratioRange, ratioText, standingText, standOf } from './warranty-words';
 
 /** A way of working, with what it does to the risk of a claim. */
 export interface ProcessRow extends Omit<ProcessRisk, 'check'> {
@@ -103,14 +103,6 @@ function whyNot({ missedCars, doneCars, missedClaims, doneClaims, strata }: Proc
   return strata > 0 && missedClaims + doneClaims === 0 ? 'no claim yet' : 'too few cars yet';
 }
 
-/** "3.5 above"; the ratio alone where its interval holds 1. */
-function ratioWords(row: ProcessRow): string {
-  const stand = standOf(row);
-  return stand === 'as_expected'
-    ? ratioText(row.riskRatio)
-    : `${ratioText(row.riskRatio)} ${stand}`;
-}
-
 const claimShare = (claims: number, cars: number): string =>
   cars === 0
     ? ''
@@ -137,7 +129,7 @@ const COLUMNS: readonly Column<ProcessRow>[] = [
     kind: 'number',
     strong: ({ riskRatio }) => riskRatio !== null,
     muted: ({ riskRatio }) => riskRatio === null,
-    text: (row) => (row.riskRatio === null ? whyNot(row) : ratioWords(row)),
+    text: (row) => (row.riskRatio === null ? whyNot(row) : standingText(row.riskRatio, row)),
     sortBy: ({ riskRatio }) => riskRatio,
   },
   {

@@ -70,6 +70,15 @@ export function ratioText(ratio: number | null): string {
   return ratio === null ? '' : formatNumber(ratio, 1);
 }
 
+/** A ratio with where it stands: "3.5 above"; alone where its interval holds 1. */
+export function standingText(
+  ratio: number,
+  interval: Pick<WarrantyBranch, 'lower' | 'upper'>,
+): string {
+  const stand = standOf(interval);
+  return stand === 'as_expected' ? ratioText(ratio) : `${ratioText(ratio)} ${stand}`;
+}
+
 /** The interval of a ratio: "1.3–2.1". */
 export function ratioRange(lower: number | null, upper: number | null): string {
   return lower === null || upper === null
