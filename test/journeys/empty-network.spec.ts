@@ -23,7 +23,7 @@ describe('an empty network', () => {
   afterAll(() => served?.stop());
 
   test.each([
-    ['/this-week', 'No car was finished in week 5, 2026.', 'Choose another week'],
+    ['/this-week', 'No car was finished in week 5, 2026.', 'Go through the first steps'],
     ['/overruns', 'No car with an estimate was finished in this time.', 'Choose a longer time'],
     ['/jobs', '0 cars finished', 'Go through the first steps'],
     ['/rot', 'No car was finished in this time.', 'Go through the first steps'],
