@@ -226,7 +226,15 @@ const ASKED = fc.record({
   length: fc.option(fc.integer({ min: 0, max: 900 }), { nil: undefined }),
   asOf: fc.oneof(
     fc.integer({ min: 0, max: 2400 }).map((days) => addDays('2019-06-01', days)),
-    fc.constantFrom('2022-06-29', '2022-06-30', '2022-12-30', '2022-12-31', '2024-02-29'),
+    fc.constantFrom(
+      '2019-06-20',
+      '2019-12-20',
+      '2022-06-29',
+      '2022-06-30',
+      '2022-12-30',
+      '2022-12-31',
+      '2024-02-29',
+    ),
   ),
   groupBy: fc.constantFrom(...CURVE_GROUPS),
   groups: fc.constantFrom<string[] | undefined>(undefined, undefined, ['full', 'AAA', '5-9', 'no']),
