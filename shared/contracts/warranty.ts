@@ -150,8 +150,8 @@ export const warrantyAnswer = z.strictObject({
   jobs: z.int(),
   reference: z.enum(['network', 'scope']),
   asOf: date,
-  /** The last half-year's end up to asOf: up to here payments are counted (rule 18). */
-  evaluatedOn: date,
+  /** The last half-year's end up to asOf: up to here payments are counted (rule 18). Of the first days of year 1000 it is a day that no input may name. */
+  evaluatedOn: z.string(),
   /** Cars sold with a warranty. */
   covered: z.int(),
   rate: claimRate,
