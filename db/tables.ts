@@ -1,6 +1,9 @@
 /** Tables whose rows belong to a branch: readable through `ScopedDb` only. The tests compare this list with the live schema. */
 export const SCOPED_TABLES = [
+  'action_answers',
+  'actions',
   'branch_rates',
+  'branch_targets',
   'bookings',
   'claim_photos',
   'claims',
@@ -15,6 +18,7 @@ export const SCOPED_TABLES = [
   'jobs',
   'jobs_under_way',
   'photos',
+  'signals',
   'week_notes',
 ] as const;
 export type ScopedTable = (typeof SCOPED_TABLES)[number];

@@ -35,6 +35,12 @@ import { mountUnderWay } from './features/under-way/under-way.endpoints';
 import { mountUsual } from './features/quote/usual.endpoints';
 import { mountWarranty } from './features/warranty/warranty.endpoints';
 import { mountWarrantyReports } from './features/warranty-reports/warranty-reports.endpoints';
+import { mountActions } from './features/actions/actions.endpoints';
+import { mountBranches } from './features/branches/branches.endpoints';
+import { mountLive } from './features/live/live.endpoints';
+import { mountSignals } from './features/signals/signals.endpoints';
+import { mountTargets } from './features/targets/targets.endpoints';
+import { mountUnsubscribe } from './features/digests/unsubscribe.endpoints';
 import { mountWeeks } from './features/weeks/weeks.endpoints';
 import { mountDashboard } from './http/dashboard';
 import { mountDocs } from './http/docs';
@@ -110,12 +116,18 @@ export function createApp(kit: Kit, log: Logger, dashboard: string): App {
   mountProducts(mounting, kit);
   mountWarranty(mounting, kit);
   mountWarrantyReports(mounting, kit);
+  mountBranches(mounting, kit);
+  mountSignals(mounting, kit);
+  mountActions(mounting, kit);
+  mountTargets(mounting, kit);
   mountComeBack(mounting, kit);
   mountQuote(mounting, kit);
   mountUsual(mounting, kit);
   mountWeeks(mounting, kit);
   mountExports(mounting, kit);
   mountAudit(mounting, kit);
+  mountLive(mounting, kit);
+  mountUnsubscribe(mounting, kit);
   mountMailbox(mounting, kit);
   mountDocs(router, () => describeApi(mounting.mounted, kit.version));
 
@@ -126,8 +138,8 @@ export function createApp(kit: Kit, log: Logger, dashboard: string): App {
   return { express: app, mounted: mounting.mounted };
 }
 
-/** Exports stream through a worker at their own pace; compressing them would buffer. */
+/** Exports and live changes leave at their own pace; compressing them would buffer. */
 function isText(request: express.Request, response: express.Response): boolean {
-  if (request.path.startsWith('/api/exports/')) return false;
+  if (request.path.startsWith('/api/exports/') || request.path === '/api/live') return false;
   return compression.filter(request, response);
 }

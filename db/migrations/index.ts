@@ -4,6 +4,7 @@ import * as jobs from './0002-jobs';
 import * as underneath from './0003-underneath';
 import * as jobsByHand from './0004-jobs-by-hand';
 import * as warranty from './0005-warranty';
+import * as branches from './0006-branches';
 
 interface Migration {
   name: string;
@@ -18,6 +19,7 @@ export const migrations: readonly Migration[] = [
   { name: '0003-underneath', ...underneath },
   { name: '0004-jobs-by-hand', ...jobsByHand },
   { name: '0005-warranty', ...warranty },
+  { name: '0006-branches', ...branches },
 ];
 
 /** Hands the list to knex without reading a folder, so that it is the same from source, tests and the built server. */

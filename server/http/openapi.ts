@@ -110,7 +110,9 @@ function successes(endpoint: Endpoint): Json {
           ? { 'image/jpeg': {} }
           : endpoint.out === 'pdf'
             ? { 'application/pdf': {} }
-            : undefined;
+            : endpoint.out === 'events'
+              ? { 'text/event-stream': { schema: { type: 'string' } } }
+              : undefined;
   return Object.fromEntries(
     endpoint.statuses.map((status) => [
       String(status),

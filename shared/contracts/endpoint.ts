@@ -12,8 +12,8 @@ export type Access = 'public' | { readonly roles: readonly Role[]; readonly push
  */
 export type EndpointScope = 'branches' | 'network-reference' | 'none';
 
-/** What leaves: a JSON schema, a streamed CSV, a page of HTML, an image, a PDF, or nothing (204). */
-export type Output = z.ZodType | 'csv' | 'html' | 'image' | 'pdf' | 'nothing';
+/** What leaves: a JSON schema, a streamed CSV, a page of HTML, an image, a PDF, server-sent events, or nothing (204). */
+export type Output = z.ZodType | 'csv' | 'html' | 'image' | 'pdf' | 'events' | 'nothing';
 
 /** A body that is no JSON: the bytes of a JPEG or PNG, or a form with one file in its part `file`. */
 export type Upload = 'image' | 'file';

@@ -1,3 +1,4 @@
+import { branchesQuery } from './branches';
 import { comeBackQuery } from './come-back';
 import { defineEndpoint } from './endpoint';
 import { HEAD_OFFICE, noParams, READERS, scopeQuery } from './fields';
@@ -79,6 +80,14 @@ export const exportProductTemperature = defineEndpoint({
   path: '/api/exports/product-temperature.csv',
   summary: 'Product use by workshop temperature, one row a product and class of 5 °C.',
   query: scopeQuery,
+});
+
+export const exportBranches = defineEndpoint({
+  ...csv,
+  path: '/api/exports/branches.csv',
+  summary: 'The branches of the funnel answer, one row a branch.',
+  scope: 'network-reference',
+  query: branchesQuery,
 });
 
 export const exportQuote = defineEndpoint({

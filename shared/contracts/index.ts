@@ -1,7 +1,9 @@
 import type { Endpoint } from './endpoint';
+import * as actions from './actions';
 import * as audit from './audit';
 import * as auth from './auth';
 import * as bookings from './bookings';
+import * as branches from './branches';
 import * as claimList from './claim-list';
 import * as claims from './claims';
 import * as comeBack from './come-back';
@@ -10,6 +12,7 @@ import * as csvExports from './exports';
 import * as imports from './imports';
 import * as jobList from './job-list';
 import * as jobs from './jobs';
+import * as live from './live';
 import * as margin from './margin';
 import * as overrun from './overrun';
 import * as people from './people';
@@ -20,8 +23,11 @@ import * as quote from './quote';
 import * as rot from './rot';
 import * as setUp from './set-up';
 import * as setUpHelp from './set-up-help';
+import * as signals from './signals';
 import * as system from './system';
+import * as targets from './targets';
 import * as underWay from './under-way';
+import * as unsubscribe from './unsubscribe';
 import * as usual from './usual';
 import * as warranty from './warranty';
 import * as warrantyReports from './warranty-reports';
@@ -49,12 +55,18 @@ export const endpoints: readonly Endpoint[] = [
   products,
   warranty,
   warrantyReports,
+  branches,
+  signals,
+  actions,
+  targets,
   comeBack,
   quote,
   usual,
   weeks,
   csvExports,
   audit,
+  live,
+  unsubscribe,
   system,
 ].flatMap((topic) => Object.values(topic).filter(isEndpoint));
 

@@ -106,3 +106,40 @@ export type AgeBand = (typeof AGE_BANDS)[number];
 export const COME_BACK_STATUSES = ['open', 'contacted', 'booked', 'done', 'gone'] as const;
 export type ComeBackStatus = (typeof COME_BACK_STATUSES)[number];
 export const OPEN_COME_BACKS = ['open', 'contacted', 'booked'] as const satisfies ComeBackStatus[];
+
+/** What branches are compared by (rules 42 and 43). */
+export const BRANCH_MEASURES = ['overrun', 'rot', 'claims', 'product', 'margin'] as const;
+export type BranchMeasure = (typeof BRANCH_MEASURES)[number];
+
+/** Where a branch stands in its funnel; outside is strict (rule 44). */
+export const FUNNEL_FLAGS = [
+  'as_expected',
+  'below_95',
+  'above_95',
+  'below_998',
+  'above_998',
+  'too_few',
+] as const;
+export type FunnelFlag = (typeof FUNNEL_FLAGS)[number];
+
+/** What the nightly look finds, in the order in which it is told: what can hurt somebody first. */
+export const SIGNAL_KINDS = [
+  'come_backs_due',
+  'silence',
+  'odd_values',
+  'unbilled',
+  'week_outside',
+  'run_of_eight',
+  'left_funnel',
+  'drift_overrun',
+  'drift_claims',
+] as const;
+export type SignalKind = (typeof SIGNAL_KINDS)[number];
+
+/** A signal is acknowledged by a person with a note; it is over by itself, when what it tells of is. */
+export const SIGNAL_STATES = ['open', 'acknowledged', 'over'] as const;
+export type SignalState = (typeof SIGNAL_STATES)[number];
+
+/** Where an action agreed with a branch stands. */
+export const ACTION_STATES = ['agreed', 'done', 'dropped'] as const;
+export type ActionState = (typeof ACTION_STATES)[number];

@@ -87,12 +87,14 @@ describe('The choice of mails', () => {
       { kind: 'new_sign_in', wanted: true },
       { kind: 'import_ended', wanted: true },
       { kind: 'warranty_report', wanted: true },
+      { kind: 'month_digest', wanted: true },
     ]);
     const chosen = await choose(token, [{ kind: 'import_ended', wanted: false }]);
     expect(chosen.body.items).toEqual([
       { kind: 'new_sign_in', wanted: true },
       { kind: 'import_ended', wanted: false },
       { kind: 'warranty_report', wanted: true },
+      { kind: 'month_digest', wanted: true },
     ]);
     const { body: trail } = await app.call('get', '/api/audit?action=person.mails', { token });
     expect(trail.items[0].changes).toEqual([{ path: '/import_ended', before: true, after: false }]);
@@ -103,11 +105,15 @@ describe('The choice of mails', () => {
     await app.call('put', '/api/regions/COAST', { token: office, body: { name: 'Coast' } });
     const token = await app.signIn(EMAIL, 'regional_lead', { regions: ['COAST'] });
     const { body } = await app.call('get', '/api/auth/mails', { token });
-    expect(body.items).toEqual([{ kind: 'new_sign_in', wanted: true }]);
+    expect(body.items).toEqual([
+      { kind: 'new_sign_in', wanted: true },
+      { kind: 'region_digest', wanted: true },
+    ]);
     const refused = await choose(token, [
       { kind: 'new_sign_in', wanted: false },
       { kind: 'import_ended', wanted: true },
       { kind: 'warranty_report', wanted: true },
+      { kind: 'month_digest', wanted: true },
     ]);
     expect([refused.status, refused.body.problems[0].path]).toEqual([422, '/items/1/kind']);
     expect((await app.call('get', '/api/auth/mails', { token })).text).toContain('true');

@@ -6,12 +6,16 @@ import { servedDemo } from './served-demo';
 import { personOf, signIn, typeSignIn, untilReady } from './sign-in';
 
 const READERS_PAGES = [
-  ...['This week', 'Overruns', 'Rot', 'Product', 'Warranty', 'Jobs', 'Come-backs', 'Quote'],
+  ...['This week', 'Overruns', 'Rot', 'Product', 'Warranty', 'Branches', 'Signals', 'Jobs'],
+  ...['Come-backs', 'Quote'],
 ];
 /** Those of them who send jobs have the form beside the list. */
 const SENDERS_PAGES = READERS_PAGES.flatMap((page) =>
   page === 'Jobs' ? [page, 'Send a job'] : [page],
 );
+
+/** Branches are compared first by those who answer for several. */
+const LEADS_PAGES = ['Branches', ...READERS_PAGES.filter((page) => page !== 'Branches')];
 
 /** What was sold comes first where it is answered for. */
 const OFFICE_PAGES = ['Warranty', ...SENDERS_PAGES.filter((page) => page !== 'Warranty')];
@@ -29,7 +33,7 @@ describe('the four roles', () => {
   test.each([
     ['recorder', '/send', ['Send a job', 'Jobs', 'Quote'], ['Account', 'How it is counted']],
     ['site_manager', '/this-week', SENDERS_PAGES, ['Account', 'How it is counted', 'Import']],
-    ['regional_lead', '/this-week', READERS_PAGES, ['Account', 'How it is counted']],
+    ['regional_lead', '/branches', LEADS_PAGES, ['Account', 'How it is counted']],
     [
       'head_office',
       '/warranty',

@@ -5,7 +5,7 @@ import type { Role } from '#shared/domain/vocabulary';
 const FIRST_PAGES: Readonly<Record<Role, string>> = {
   recorder: '/send',
   site_manager: '/this-week',
-  regional_lead: '/this-week',
+  regional_lead: '/branches',
   head_office: '/warranty',
 };
 

@@ -7,6 +7,7 @@ import { Session } from './core/session/session';
 const senders = forRoles('recorder', 'site_manager', 'head_office');
 const managers = forRoles('site_manager', 'head_office');
 const headOffice = forRoles('head_office');
+const leads = forRoles('regional_lead', 'head_office');
 const readers = forRoles('site_manager', 'regional_lead', 'head_office');
 
 /** The first page of whoever is signed in; whether a network has begun is asked for head office alone. */
@@ -29,6 +30,11 @@ export const routes: Routes = [
     path: 'welcome',
     title: 'Set a password',
     loadChildren: () => import('./features/welcome/welcome.routes'),
+  },
+  {
+    path: 'unsubscribe',
+    title: 'Stop a mail',
+    loadChildren: () => import('./features/unsubscribe/unsubscribe.routes'),
   },
   {
     // A form for a phone in a workshop: without header and footer around it.
@@ -159,6 +165,30 @@ export const routes: Routes = [
         title: 'Come-backs',
         canActivate: [readers],
         loadChildren: () => import('./features/come-backs/come-backs.routes'),
+      },
+      {
+        path: 'branches',
+        title: 'Branches',
+        canActivate: [readers],
+        loadChildren: () => import('./features/branches/branches.routes'),
+      },
+      {
+        path: 'signals',
+        title: 'Signals',
+        canActivate: [readers],
+        loadChildren: () => import('./features/signals/signals.routes'),
+      },
+      {
+        path: 'actions',
+        title: 'Actions',
+        canActivate: [readers],
+        loadChildren: () => import('./features/actions/actions.routes'),
+      },
+      {
+        path: 'targets',
+        title: 'Targets',
+        canActivate: [leads],
+        loadChildren: () => import('./features/targets/targets.routes'),
       },
       {
         path: 'quote',

@@ -40,6 +40,8 @@ describe('Header', () => {
       'Rot',
       'Product',
       'Warranty',
+      'Branches',
+      'Signals',
       'Jobs',
       'Send a job',
       'Come-backs',

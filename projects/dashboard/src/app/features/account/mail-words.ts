@@ -16,4 +16,16 @@ export const MAIL_WORDS: Readonly<
     name: 'The warranty report of the month has been issued',
     why: 'A link to it, for those whom head office has chosen to be told.',
   },
+  monday_digest: {
+    name: 'Monday: your week in three sentences',
+    why: 'What last week kept, what stood out, and what waits for you. Nothing is sent when there is nothing to say.',
+  },
+  region_digest: {
+    name: 'Monday: what changed in your regions',
+    why: 'Signals that are new or over, and branches that send nothing. Nothing is sent when nothing changed.',
+  },
+  month_digest: {
+    name: 'The network in the month that ended',
+    why: 'What changed, branch by branch, on the first of the month.',
+  },
 };

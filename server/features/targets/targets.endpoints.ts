@@ -1,0 +1,5 @@
+import type { Mounting } from '../../http/mount';
+import type { Kit } from '../../kit';
+
+/** Not built yet. */
+export function mountTargets(_mounting: Mounting, _kit: Kit): void {}

@@ -1,0 +1,28 @@
+import * as z from 'zod';
+import { defineEndpoint } from './endpoint';
+import { code, EVERYONE, noParams, noQuery } from './fields';
+
+/** What reaches an open page: that something changed and where, never the figures themselves. */
+export const liveEvent = z.strictObject({
+  /** `jobs`: sent, corrected, voided or restored; `claims`; `signals`: opened, acknowledged or over (not to recorders). */
+  kind: z.enum(['jobs', 'claims', 'signals']),
+  branch: code,
+  /** How many. */
+  count: z.int(),
+});
+export type LiveEvent = z.output<typeof liveEvent>;
+
+/** As server-sent events: `event: change` with a `liveEvent` each, `event: hello` at the start, a comment every 20 s. */
+export const followLive = defineEndpoint({
+  method: 'get',
+  path: '/api/live',
+  topic: 'Live',
+  summary: 'Changes in scope as they happen, as server-sent events.',
+  access: EVERYONE,
+  scope: 'branches',
+  params: noParams,
+  query: noQuery,
+  body: null,
+  out: 'events',
+  statuses: [200],
+});
