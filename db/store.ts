@@ -3,6 +3,7 @@ import { dirname, join, resolve } from 'node:path';
 import { DatabaseRefused, openDatabase, openReader, type Connection } from './database';
 import { NetworkState } from './network-state';
 import { NetworkReference } from './network-reference';
+import { NotedChanges } from './noted-changes';
 import { recoverGenerations, Restatement } from './restatement';
 import type { Scope } from './scope';
 import { ScopedDb } from './scoped-db';
@@ -13,6 +14,8 @@ import { WriteQueue } from './write-queue';
 export class Store {
   readonly queue: WriteQueue;
   readonly state: NetworkState;
+  /** Which branches' jobs and claims each commit changed. */
+  readonly changes: NotedChanges;
   /** For network-wide rows; writes with it only inside `queue.write`. */
   readonly unscoped: UnscopedDb;
   readonly restatement: Restatement;
@@ -24,7 +27,8 @@ export class Store {
     private readonly reading: Connection,
   ) {
     this.state = new NetworkState(writing);
-    this.queue = new WriteQueue(writing, () => this.state.reload());
+    this.changes = new NotedChanges(writing);
+    this.queue = new WriteQueue(writing, () => this.state.reload(), this.changes);
     this.unscoped = new UnscopedDb(writing);
     this.restatement = new Restatement(this);
   }

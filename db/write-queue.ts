@@ -1,4 +1,5 @@
 import type { Connection } from './database';
+import type { NotedChanges } from './noted-changes';
 
 interface Waiting {
   work: () => unknown;
@@ -20,6 +21,8 @@ export class WriteQueue {
     private readonly connection: Connection,
     /** Called when a commit failed, so that what is kept in memory is read again. */
     private readonly onLost: () => void = () => undefined,
+    /** What the work notes as it writes; told once it is durable, taken back where it is not kept. */
+    private readonly changes: Pick<NotedChanges, 'mark' | 'takeBack' | 'tell'> = NOTHING_NOTED,
   ) {}
 
   /** Runs `work` (synchronous, on the writing connection) in the next commit and returns its value once that is durable. */
@@ -46,10 +49,12 @@ export class WriteQueue {
     this.scheduled = false;
     if (batch.length === 0) return;
     const settle: (() => void)[] = [];
+    const before = this.changes.mark();
     try {
       this.connection.prepare('begin immediate').run();
       for (const { work, resolve, reject } of batch) {
         this.connection.prepare('savepoint piece').run();
+        const mark = this.changes.mark();
         try {
           const value = work();
           this.connection.prepare('release piece').run();
@@ -57,6 +62,7 @@ export class WriteQueue {
         } catch (error) {
           this.connection.prepare('rollback to piece').run();
           this.connection.prepare('release piece').run();
+          this.changes.takeBack(mark);
           settle.push(() => reject(error));
         }
       }
@@ -64,10 +70,14 @@ export class WriteQueue {
     } catch (error) {
       // A full disk or a lost file: nothing of the batch is kept, and everybody who waits is told.
       if (this.connection.driver.inTransaction) this.connection.prepare('rollback').run();
+      this.changes.takeBack(before);
       this.onLost();
       for (const { reject } of batch) reject(error);
       return;
     }
     for (const tell of settle) tell();
+    this.changes.tell();
   }
 }
+
+const NOTHING_NOTED = { mark: () => 0, takeBack: () => undefined, tell: () => undefined };

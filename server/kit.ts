@@ -2,6 +2,7 @@ import type { Store } from '#db/store';
 import type { Clock } from './clock';
 import type { Config } from './config';
 import type { ImportDesk } from './features/imports/import-desk';
+import type { LiveFeed } from './live/live-feed';
 import type { Outbox } from './mail/outbox';
 import type { PhotoStore } from './storage/photo-store';
 import type { PasswordThread } from './workers/password-thread';
@@ -21,5 +22,7 @@ export interface Kit {
   photos: PhotoStore;
   /** Files being checked and written. */
   imports: ImportDesk;
+  /** Tells open pages what changed. */
+  live: LiveFeed;
   version: string;
 }

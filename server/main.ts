@@ -9,6 +9,7 @@ import { fixedClock, realClock } from './clock';
 import { ConfigRefused, readConfig } from './config';
 import { importDeskOf } from './import-desk-of';
 import type { Kit } from './kit';
+import { LiveFeed } from './live/live-feed';
 import { Outbox } from './mail/outbox';
 import { ReportSchedule } from './schedule/report-schedule';
 import { photoStoreOf } from './storage/photo-store';
@@ -45,6 +46,7 @@ async function main(): Promise<void> {
     outbox,
     photos: photoStoreOf(config),
     imports: importDeskOf(store, config, clock, outbox),
+    live: new LiveFeed(store),
     version,
   };
   const seeded = await offerDemo(kit);
@@ -60,6 +62,7 @@ async function main(): Promise<void> {
 
   const stop = (): void => {
     server.close();
+    kit.live.close();
     server.closeAllConnections();
     schedule.close();
     void Promise.all([

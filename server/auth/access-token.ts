@@ -31,3 +31,9 @@ export function claimsOf(payload: unknown): TokenClaims | undefined {
   if (!Number.isSafeInteger(personId) || !Number.isSafeInteger(sid)) return undefined;
   return { personId, signInId: sid as number };
 }
+
+/** When a verified payload is over (`exp`, seconds); at once where it does not say. */
+export function endOf(payload: unknown): Date {
+  const exp = (payload as { exp?: unknown } | null)?.exp;
+  return new Date(typeof exp === 'number' ? exp * 1000 : 0);
+}

@@ -12,6 +12,8 @@ export interface PersonCaller {
   branchIds: readonly number[];
   regionCodes: readonly string[];
   signInId: number;
+  /** When the access token is over, for what lasts longer than a request. */
+  tokenEndsAt: Date;
 }
 
 /** A branch's own system with a push key. */

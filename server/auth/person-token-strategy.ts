@@ -2,7 +2,7 @@ import { Strategy } from 'passport-jwt';
 import { findSignedIn } from '#db/queries/sign-ins';
 import type { Store } from '#db/store';
 import type { Clock } from '../clock';
-import { claimsOf, TOKEN_ALGORITHM } from './access-token';
+import { claimsOf, endOf, TOKEN_ALGORITHM } from './access-token';
 import { bearerToken } from './bearer-token';
 import type { PersonCaller } from './caller';
 import type { SigningKeys } from './secret';
@@ -23,7 +23,13 @@ export function makePersonTokenStrategy(store: Store, keys: SigningKeys, clock: 
         done(null, false);
         return;
       }
-      const caller: PersonCaller = { kind: 'person', ...person, signInId: claims.signInId };
+      const { signInId } = claims;
+      const caller: PersonCaller = {
+        kind: 'person',
+        ...person,
+        signInId,
+        tokenEndsAt: endOf(payload),
+      };
       done(null, caller);
     },
   );

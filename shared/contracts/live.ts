@@ -7,12 +7,17 @@ export const liveEvent = z.strictObject({
   /** `jobs`: sent, corrected, voided or restored; `claims`; `signals`: opened, acknowledged or over (not to recorders). */
   kind: z.enum(['jobs', 'claims', 'signals']),
   branch: code,
-  /** How many. */
+  /** How many changes. */
   count: z.int(),
+  /** How many of them are new, not changes of what was there. */
+  added: z.int(),
 });
 export type LiveEvent = z.output<typeof liveEvent>;
 
-/** As server-sent events: `event: change` with a `liveEvent` each, `event: hello` at the start, a comment every 20 s. */
+/**
+ * As server-sent events: `event: hello` at the start, `event: change` with a `liveEvent` each, a comment every 20 s. The stream
+ * ends with its access token and with the sign-in. Nothing is sent again: whoever comes back reads anew what they show.
+ */
 export const followLive = defineEndpoint({
   method: 'get',
   path: '/api/live',

@@ -13,6 +13,7 @@ import { fixedClock } from '#server/clock';
 import { readConfig } from '#server/config';
 import type { Kit } from '#server/kit';
 import { importDeskOf } from '#server/import-desk-of';
+import { LiveFeed, type Paces } from '#server/live/live-feed';
 import { Outbox } from '#server/mail/outbox';
 import { photoStoreOf } from '#server/storage/photo-store';
 import { PasswordThread } from '#server/workers/password-thread';
@@ -44,7 +45,13 @@ export class TestApp {
 
   /** Starts one; `now` fixes the business clock, `environment` adds settings. */
   static async start(
-    options: { now?: string; environment?: NodeJS.ProcessEnv; folder?: string } = {},
+    options: {
+      now?: string;
+      environment?: NodeJS.ProcessEnv;
+      folder?: string;
+      /** How fast live changes leave. */
+      live?: Paces;
+    } = {},
   ): Promise<TestApp> {
     const folder = options.folder ?? mkdtempSync(join(tmpdir(), 'underseam-test-'));
     const config = readConfig({
@@ -65,6 +72,7 @@ export class TestApp {
       outbox,
       photos: photoStoreOf(config),
       imports: importDeskOf(store, config, clock, outbox),
+      live: new LiveFeed(store, options.live),
       version: '0.0.0-test',
     };
     await kit.imports.start();
@@ -140,6 +148,7 @@ export class TestApp {
   /** Stops the server; the data folder goes too unless it is kept. */
   async stop(after: 'remove' | 'keep' = 'remove'): Promise<void> {
     const { kit, server } = this;
+    kit.live.close();
     server.closeAllConnections();
     await new Promise((resolve) => server.close(resolve));
     await kit.imports.close();
