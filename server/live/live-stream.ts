@@ -5,6 +5,8 @@ import type { LiveEvent } from '#shared/contracts/live';
 const RETRY_MS = 5_000;
 /** More than this unread, in bytes, and the reader is let go: it comes back and reads anew. */
 const MOST_UNREAD = 64 * 1024;
+/** After this a reader who has not taken the end of a stream is let go. */
+const PARTING_MS = 2_000;
 
 /**
  * One answer that stays open: `text/event-stream` as the WHATWG's HTML standard has it (server-sent events). Events are
@@ -37,8 +39,8 @@ export class LiveStream {
 
   /** Ends it; one that does not read is cut off, because its end would never arrive. */
   end(): void {
-    if (this.response.writableLength > 0) this.response.destroy();
-    else this.response.end();
+    this.response.end();
+    setTimeout(() => this.response.destroy(), PARTING_MS).unref();
   }
 
   private write(text: string): void {

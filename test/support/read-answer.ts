@@ -17,7 +17,8 @@ export async function readAnswer(response: Response): Promise<Answer> {
 
 /** What a stream that never ends begins with; the connection is let go. */
 async function firstOf(response: Response): Promise<string> {
-  const reader = response.body!.getReader();
+  if (!response.body) return '';
+  const reader = response.body.getReader();
   const { value } = await reader.read();
   await reader.cancel();
   return Buffer.from(value ?? []).toString();
