@@ -12,6 +12,8 @@ export interface IntervalRow {
   readonly value: number | null;
   readonly lower: number | null;
   readonly upper: number | null;
+  /** Where this row's own reference lies, a tick; for rows that do not share one. */
+  readonly tick?: number | null;
   /** The value as it is read ("+23 %"), or the words for why there is none. */
   readonly text: string;
   readonly stand: Stand;
@@ -29,7 +31,8 @@ export interface DotIntervalInput {
   readonly scale: 'linear' | 'log';
   /** `ledger`: every dot filled and a hairline under every row, for groups of one rank. */
   readonly look?: 'plain' | 'ledger';
-  readonly reference: number;
+  /** A line through all rows; null where each has a tick of its own. */
+  readonly reference: number | null;
   /** How far a log axis goes to either side of the reference at most, in times of it; three unless told. */
   readonly reach?: number;
   /** Offered marks; those inside the axis are drawn, the reference always. */

@@ -101,4 +101,16 @@ describe('layOutDotInterval', () => {
   it('no groups: an empty picture', () => {
     expect(layOutDotInterval({ ...input, rows: [] }, 600).rows).toEqual([]);
   });
+
+  it('rows with ticks of their own and no shared reference: a tick each on the axis, no line through all', () => {
+    const rows = [row('before', 1.24, { tick: 1.1 }), row('after', 1.16, { tick: null })];
+    const picture = layOutDotInterval(
+      { ...input, rows, scale: 'linear', reference: null, marks: [] },
+      600,
+    );
+    expect(picture.reference).toBeNull();
+    expect(picture.rows[0]!.tick).toBeGreaterThanOrEqual(picture.left);
+    expect(picture.rows[0]!.tick).toBeLessThan(picture.rows[0]!.dot!.x);
+    expect(picture.rows[1]!.tick).toBeNull();
+  });
 });

@@ -15,10 +15,13 @@ export interface PlacedInterval extends RowPlace {
   readonly dot: { readonly x: number; readonly from: number; readonly to: number } | null;
   /** The end of the axis that the interval runs beyond, marked by an arrow head. */
   readonly beyond: 'left' | 'right' | null;
+  /** Where its own reference lies; null for none. */
+  readonly tick: number | null;
 }
 
 /** Everything the chart draws, in px of the picture. */
-export interface DotIntervalLayout extends RowFrame {
+export interface DotIntervalLayout extends Omit<RowFrame, 'reference'> {
+  readonly reference: number | null;
   readonly look: 'plain' | 'ledger';
   /** Heights of the hairlines between rows. */
   readonly rules: readonly number[];
@@ -33,10 +36,11 @@ export function layOutDotInterval(input: DotIntervalInput, width: number): DotIn
   const { frame, axis, places } = layOutRowFrame(
     {
       ...input,
+      reference: input.reference ?? middleOf(rows),
       counts: 'below',
       readouts: rows.map(readout),
       values: rows
-        .flatMap(({ value, lower, upper }) => [value, lower, upper])
+        .flatMap(({ value, lower, upper, tick }) => [value, lower, upper, tick ?? null])
         .filter((value) => value !== null),
     },
     width,
@@ -45,6 +49,7 @@ export function layOutDotInterval(input: DotIntervalInput, width: number): DotIn
   const pitch = (frame.bottom - frame.head) / Math.max(1, rows.length);
   return {
     ...frame,
+    reference: input.reference === null ? null : frame.reference,
     look,
     rules:
       look === 'plain' ? [] : rows.slice(1).map((_row, index) => frame.head + (index + 1) * pitch),
@@ -61,6 +66,7 @@ function placeRow(row: IntervalRow, axis: ValueAxis, place: RowPlace): PlacedInt
   return {
     ...{ key, label, count, text, word, stand, chosen, beyond },
     ...place,
+    tick: row.tick === undefined || row.tick === null ? null : axis.place(row.tick),
     dot:
       value === null
         ? null
@@ -70,6 +76,11 @@ function placeRow(row: IntervalRow, axis: ValueAxis, place: RowPlace): PlacedInt
             to: axis.place(upper ?? value),
           },
   };
+}
+
+/** A place inside the axis for what needs one where rows share no reference: any value drawn. */
+function middleOf(rows: readonly IntervalRow[]): number {
+  return rows.flatMap(({ value, tick }) => [value, tick ?? null]).find((one) => one !== null) ?? 0;
 }
 
 /** A dot beyond the axis stands inside its end, so that the arrow head beside it is seen. */

@@ -131,4 +131,22 @@ describe('weekChart', () => {
     expect(stands.text(weeks[15]!)).toBe('below limits');
     expect(stands.text(weeks[0]!)).toBe('inside limits');
   });
+
+  it('a target: a line of its own, said in the note, the text alternative and the twin; limits as they were', () => {
+    const view = weekChart(marginAnswer(weeks, { targetMarginShare: 0.4 }), '2026-W05');
+    expect(view.input.target).toBe(0.4);
+    expect(view.input.limits).toEqual(weekChart(chart, '2026-W05').input.limits);
+    expect(view.note).toContain('Dotted: the target, what is wanted; it moves no limit.');
+    expect(plain(view.input.summary)).toContain('Target 40 %.');
+    const against = view.columns.find(({ key }) => key === 'target')!;
+    expect(plain(against.label)).toBe('Against target 40 %');
+    expect(against.text(weeks[15]!)).toMatch(/^\u2212\d+ points$/);
+  });
+
+  it('no target: no line, no column and no word of one', () => {
+    const view = weekChart(chart, '2026-W05');
+    expect(view.input.target).toBeNull();
+    expect(view.columns.some(({ key }) => key === 'target')).toBe(false);
+    expect(view.note).not.toContain('target');
+  });
 });

@@ -13,6 +13,7 @@ import {
   formatNumber,
   formatShare,
   formatShareRange,
+  formatSignedAmount,
   formatWeek,
   formatWeekNumber,
 } from '../../ui/format';
@@ -37,7 +38,7 @@ export function weekChart(chart: MarginAnswer, week: string): WeekChart {
       target: chart.targetMarginShare,
       chosen: week,
     },
-    note: [limitsNote(chart), trendNote(chart)].filter(Boolean).join(' '),
+    note: [limitsNote(chart), targetNote(chart), trendNote(chart)].filter(Boolean).join(' '),
     columns: weekColumns(chart),
     rows: [...chart.weeks].reverse(),
   };
@@ -122,6 +123,11 @@ function limitsNote({ limits }: MarginAnswer): string {
   return `Centre and limits from the ${formatCount(limits.baselineWeeks)} billed weeks before.`;
 }
 
+/** A target is what is wanted, limits are what the work has been: said wherever both are drawn. */
+function targetNote({ targetMarginShare }: MarginAnswer): string {
+  return targetMarginShare === null ? '' : 'Dotted: the target, what is wanted; it moves no limit.';
+}
+
 function trendNote({ trend }: MarginAnswer): string {
   if (!trend) return '';
   if (trend.p >= 0.05) return `No trend (${pValue(trend.p)})`;
@@ -136,6 +142,9 @@ function summarise(chart: MarginAnswer, week: string): string {
   const said = [`Margin of ${formatCount(chart.weeks.length)} weeks up to ${formatWeek(week)}.`];
   if (chosen)
     said.push(`${formatWeekNumber(week)}: ${valueLine(chart, chosen)}, ${carsLine(chosen)}.`);
+  if (chart.targetMarginShare !== null) {
+    said.push(`Target ${formatShare(chart.targetMarginShare)}.`);
+  }
   if (chart.limits) {
     const { lower, centre, upper } = chart.limits;
     said.push(`Limits ${formatShareRange(lower, upper)}, centre ${formatShare(centre)}.`);
@@ -194,6 +203,7 @@ function weekColumns(chart: MarginAnswer): Column<MarginWeek>[] {
       text: ({ marginShare }) => (marginShare === null ? '' : formatShare(marginShare)),
       sortBy: ({ marginShare }) => marginShare,
     },
+    ...(chart.targetMarginShare === null ? [] : [againstTarget(chart.targetMarginShare)]),
     {
       key: 'signal',
       label: 'Stands',
@@ -201,6 +211,17 @@ function weekColumns(chart: MarginAnswer): Column<MarginWeek>[] {
         figures.marginShare === null ? 'nothing billed' : stand(valueLine(chart, figures)),
     },
   ];
+}
+
+function againstTarget(target: number): Column<MarginWeek> {
+  return {
+    key: 'target',
+    label: `Against target ${formatShare(target)}`,
+    kind: 'number',
+    text: ({ marginShare }) =>
+      marginShare === null ? '' : `${formatSignedAmount((marginShare - target) * 10_000)} points`,
+    sortBy: ({ marginShare }) => (marginShare === null ? null : marginShare - target),
+  };
 }
 
 /** The word after the share: "below limits". */
