@@ -5,6 +5,7 @@ import { appendOnly, neverReplaced } from './append-only';
 export async function up(knex: Knex): Promise<void> {
   await run(
     knex,
+    // `behind`: ids of the branches behind the network figure that it compares with; null when it compares with none.
     `create table signals (
       id integer primary key,
       branch_id integer not null references branches (id),
@@ -19,6 +20,7 @@ export async function up(knex: Knex): Promise<void> {
       facts text not null,
       cars integer not null,
       job_refs text not null,
+      behind text,
       acknowledged_by integer references people (id),
       acknowledged_at text,
       note text
