@@ -155,6 +155,11 @@ export function formatInstantDay(instant: string): string {
   return instantDayFormat.format(new Date(instant));
 }
 
+/** The time of an instant in the reader's own time: `08:12`. */
+export function formatTime(instant: Date): string {
+  return timeFormat.format(instant);
+}
+
 /** Words in a list: `a, b and c`. */
 export function formatList(words: readonly string[]): string {
   return listFormat.format(words);
@@ -192,6 +197,7 @@ const exactInstantFormat = new Intl.DateTimeFormat(LOCALE, {
   timeStyle: 'medium',
 });
 const instantDayFormat = new Intl.DateTimeFormat(LOCALE, { dateStyle: 'medium' });
+const timeFormat = new Intl.DateTimeFormat(LOCALE, { timeStyle: 'short' });
 const listFormat = new Intl.ListFormat(LOCALE, { type: 'conjunction' });
 
 const dateFormat = kept(

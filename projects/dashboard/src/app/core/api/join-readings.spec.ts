@@ -1,4 +1,4 @@
-import { signal } from '@angular/core';
+import { signal, type WritableSignal } from '@angular/core';
 import { joinReadings } from './join-readings';
 import type { Problem } from './problem';
 import type { Reading } from './reading';
@@ -8,15 +8,21 @@ function part<T>(first?: T) {
   const busy = signal(first === undefined);
   const problem = signal<Problem | undefined>(undefined);
   const reload = jest.fn();
+  const refresh = jest.fn();
+  const quiet = signal(false);
   const reading: Reading<T> = {
     value,
     etag: signal(undefined),
     loading: () => busy() && value() === undefined,
-    refreshing: () => busy() && value() !== undefined,
+    refreshing: () => busy() && !quiet() && value() !== undefined,
     problem,
     reload,
+    refresh,
+    asking: busy,
+    outdated: signal(false),
   } as unknown as Reading<T>;
-  return { reading, value, busy, problem, reload };
+  const outdated = reading.outdated as WritableSignal<boolean>;
+  return { reading, value, busy, problem, reload, refresh, quiet, outdated };
 }
 
 describe('joinReadings', () => {
@@ -69,5 +75,36 @@ describe('joinReadings', () => {
     joinReadings({ a: a.reading, b: b.reading }).reload();
     expect(a.reload).toHaveBeenCalledTimes(1);
     expect(b.reload).toHaveBeenCalledTimes(1);
+  });
+
+  it('refreshed, of which one part is answered: the former answers stay together, unnoticed', () => {
+    const a = part('week 5');
+    const b = part('11 cars');
+    const joined = joinReadings({ a: a.reading, b: b.reading });
+    joined.value();
+    joined.refresh();
+    expect([a.refresh, b.refresh].map(({ mock }) => mock.calls.length)).toEqual([1, 1]);
+    for (const one of [a, b]) {
+      one.quiet.set(true);
+      one.busy.set(true);
+    }
+    a.value.set('week 5 anew');
+    a.busy.set(false);
+    expect(joined.value()).toEqual({ a: 'week 5', b: '11 cars' });
+    expect([joined.refreshing(), joined.asking()]).toEqual([false, true]);
+    b.value.set('12 cars');
+    b.busy.set(false);
+    expect(joined.value()).toEqual({ a: 'week 5 anew', b: '12 cars' });
+  });
+
+  it('refreshed, and one part in vain: none of the newer answers is shown', () => {
+    const a = part('week 5');
+    const b = part('11 cars');
+    const joined = joinReadings({ a: a.reading, b: b.reading });
+    joined.value();
+    a.value.set('week 5 anew');
+    b.outdated.set(true);
+    expect(joined.value()).toEqual({ a: 'week 5', b: '11 cars' });
+    expect(joined.outdated()).toBe(true);
   });
 });

@@ -1,5 +1,6 @@
 import { ChangeDetectionStrategy, Component } from '@angular/core';
 import { RouterOutlet } from '@angular/router';
+import { LiveLine } from '../live/live-line';
 import { Footer } from './footer';
 import { Header } from './header';
 import { NewerVersionLine } from './newer-version-line';
@@ -8,13 +9,14 @@ import { RouteAnnouncer } from './route-announcer';
 /** The frame of every page of a signed-in person: skip link, header, page, footer. */
 @Component({
   selector: 'us-shell',
-  imports: [Footer, Header, NewerVersionLine, RouteAnnouncer, RouterOutlet],
+  imports: [Footer, Header, LiveLine, NewerVersionLine, RouteAnnouncer, RouterOutlet],
   template: `
     <a class="skip" href="#page" (click)="skip($event, page)">Skip to the page</a>
     <us-header class="us-unprinted" />
     <us-newer-version-line class="us-unprinted" />
     <main #page id="page" tabindex="-1" [usRouteAnnouncer]="page"><router-outlet /></main>
     <us-footer class="us-unprinted" />
+    <us-live-line class="us-unprinted" />
   `,
   styles: `
     :host {

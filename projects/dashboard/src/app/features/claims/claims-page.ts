@@ -9,6 +9,7 @@ import { Api } from '../../core/api/api';
 import { CsvLink } from '../../core/api/csv-link';
 import { joinReadings } from '../../core/api/join-readings';
 import { Catalogue } from '../../core/catalogue/catalogue';
+import { keepLive } from '../../core/live/keep-live';
 import { ScopeLine } from '../../core/scope-line/scope-line';
 import { ScopeState } from '../../core/scope-line/scope-state';
 import { placesWords } from '../../core/scope-line/scope-words';
@@ -151,11 +152,15 @@ export class ClaimsPage {
     const scope = this.asked();
     return scope && { query: { ...scope, waiting: true, limit: 1 } };
   });
-  protected readonly all = joinReadings({
-    claims: this.claims,
-    open: this.open,
-    waiting: this.forOffice,
-  });
+  protected readonly all = keepLive(
+    joinReadings({
+      claims: this.claims,
+      open: this.open,
+      waiting: this.forOffice,
+    }),
+    'claims',
+    'jobs',
+  );
 
   protected readonly rows = computed(() => this.claims.value()?.items ?? []);
   protected readonly columns = computed(() =>

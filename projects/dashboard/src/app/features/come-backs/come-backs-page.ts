@@ -17,6 +17,7 @@ import { Api } from '../../core/api/api';
 import { CsvLink } from '../../core/api/csv-link';
 import { deed } from '../../core/api/deed';
 import { Catalogue } from '../../core/catalogue/catalogue';
+import { keepLive } from '../../core/live/keep-live';
 import { ScopeLine } from '../../core/scope-line/scope-line';
 import { ScopeState } from '../../core/scope-line/scope-state';
 import { Session } from '../../core/session/session';
@@ -80,10 +81,13 @@ export class ComeBacksPage {
     const scope = dated ? this.scope.query() : this.scope.filters();
     return scope && { ...scope, ...(status ? { status: [status] } : {}) };
   });
-  protected readonly list = this.api.read(listComeBack, () => {
-    const query = this.query();
-    return query && { query: { ...query, limit: FETCHED } };
-  });
+  protected readonly list = keepLive(
+    this.api.read(listComeBack, () => {
+      const query = this.query();
+      return query && { query: { ...query, limit: FETCHED } };
+    }),
+    'jobs',
+  );
 
   /** What "Show more" has fetched beyond the first answer; it belongs to one question. */
   private readonly further = linkedSignal<

@@ -7,6 +7,7 @@ import { listJobs } from '#shared/contracts/job-list';
 import { Api } from '../../core/api/api';
 import { CsvLink } from '../../core/api/csv-link';
 import { Catalogue } from '../../core/catalogue/catalogue';
+import { keepLive } from '../../core/live/keep-live';
 import { ScopeLine } from '../../core/scope-line/scope-line';
 import { ScopeState } from '../../core/scope-line/scope-state';
 import { Session } from '../../core/session/session';
@@ -117,10 +118,13 @@ export class JobsPage {
     const scope = dated ? this.scope.query() : this.scope.filters();
     return scope && { ...scope, ...this.filters(), sort: this.order()?.sort ?? 'completed' };
   });
-  protected readonly jobs = inject(Api).read(listJobs, () => {
-    const query = this.query();
-    return query && { query: { ...query, limit: PAGE, cursor: this.cursor() || undefined } };
-  });
+  protected readonly jobs = keepLive(
+    inject(Api).read(listJobs, () => {
+      const query = this.query();
+      return query && { query: { ...query, limit: PAGE, cursor: this.cursor() || undefined } };
+    }),
+    'jobs',
+  );
 
   protected readonly rows = computed(() => this.jobs.value()?.items ?? []);
   protected readonly columns = computed(() =>

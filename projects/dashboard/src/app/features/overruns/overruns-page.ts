@@ -9,6 +9,7 @@ import { QuantileStripChart } from '../../charts/quantile-strip/quantile-strip-c
 import { Api } from '../../core/api/api';
 import { CsvLink } from '../../core/api/csv-link';
 import { Catalogue } from '../../core/catalogue/catalogue';
+import { keepLive } from '../../core/live/keep-live';
 import { ScopeLine } from '../../core/scope-line/scope-line';
 import { ScopeState } from '../../core/scope-line/scope-state';
 import { Answer } from '../../ui/answer/answer';
@@ -51,7 +52,10 @@ export class OverrunsPage {
   private readonly catalogue = inject(Catalogue);
   protected readonly scope = inject(ScopeState);
 
-  protected readonly stages = this.api.read(getOverrun, () => this.asked('stage'));
+  protected readonly stages = keepLive(
+    this.api.read(getOverrun, () => this.asked('stage')),
+    'jobs',
+  );
   private readonly words = computed((): OverrunWords => ({
     branchName: (code) => this.catalogue.branchName(code),
     regionName: (code) => this.catalogue.regionName(code),
@@ -64,8 +68,9 @@ export class OverrunsPage {
   protected readonly grouping = computed(() =>
     groupingFrom(this.by(), this.view()?.groupings ?? []),
   );
-  protected readonly groups = this.api.read(getOverrun, () =>
-    this.view() ? this.asked(this.grouping()) : undefined,
+  protected readonly groups = keepLive(
+    this.api.read(getOverrun, () => (this.view() ? this.asked(this.grouping()) : undefined)),
+    'jobs',
   );
   protected readonly pictures = computed(() => {
     const answer = this.groups.value();

@@ -14,6 +14,7 @@ import { getProductNeed } from '#shared/contracts/products';
 import { Api } from '../../core/api/api';
 import { CsvLink } from '../../core/api/csv-link';
 import { Catalogue } from '../../core/catalogue/catalogue';
+import { keepLive } from '../../core/live/keep-live';
 import { ScopeState } from '../../core/scope-line/scope-state';
 import { DataTable } from '../../ui/data-table/data-table';
 import { DefinitionLink } from '../../ui/definition-link/definition-link';
@@ -44,10 +45,13 @@ export class ComingNeed {
   private readonly window = inject(DOCUMENT).defaultView;
   protected readonly scope = inject(ScopeState);
 
-  protected readonly need = inject(Api).read(getProductNeed, () => {
-    const query = this.scope.query();
-    return query && { query };
-  });
+  protected readonly need = keepLive(
+    inject(Api).read(getProductNeed, () => {
+      const query = this.scope.query();
+      return query && { query };
+    }),
+    'jobs',
+  );
   protected readonly view = computed(() => {
     const answer = this.need.value();
     return answer && needView(answer, this.words());

@@ -14,6 +14,7 @@ import { UseByTemperatureChart } from '../../charts/use-by-temperature/use-by-te
 import { Api } from '../../core/api/api';
 import { CsvLink } from '../../core/api/csv-link';
 import { Catalogue } from '../../core/catalogue/catalogue';
+import { keepLive } from '../../core/live/keep-live';
 import { ScopeLine } from '../../core/scope-line/scope-line';
 import { ScopeState } from '../../core/scope-line/scope-state';
 import { Answer } from '../../ui/answer/answer';
@@ -62,10 +63,13 @@ export class ProductPage {
   private readonly catalogue = inject(Catalogue);
   protected readonly scope = inject(ScopeState);
 
-  protected readonly use = this.api.read(getProducts, () => {
-    const query = this.scope.query();
-    return query && { query };
-  });
+  protected readonly use = keepLive(
+    this.api.read(getProducts, () => {
+      const query = this.scope.query();
+      return query && { query };
+    }),
+    'jobs',
+  );
   protected readonly words = computed((): ProductWords => {
     const kinds = new Map(this.catalogue.value()?.products.map(({ code, kind }) => [code, kind]));
     return {

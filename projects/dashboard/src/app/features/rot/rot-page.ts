@@ -7,6 +7,7 @@ import { AgeRegionChart } from '../../charts/age-region/age-region-chart';
 import { Api } from '../../core/api/api';
 import { CsvLink } from '../../core/api/csv-link';
 import { Catalogue } from '../../core/catalogue/catalogue';
+import { keepLive } from '../../core/live/keep-live';
 import { ScopeLine } from '../../core/scope-line/scope-line';
 import { ScopeState } from '../../core/scope-line/scope-state';
 import { Answer } from '../../ui/answer/answer';
@@ -54,10 +55,13 @@ export class RotPage {
   private readonly catalogue = inject(Catalogue);
   protected readonly scope = inject(ScopeState);
 
-  protected readonly rot = inject(Api).read(getRot, () => {
-    const query = this.scope.query();
-    return query && { query };
-  });
+  protected readonly rot = keepLive(
+    inject(Api).read(getRot, () => {
+      const query = this.scope.query();
+      return query && { query };
+    }),
+    'jobs',
+  );
   private readonly words = computed((): RotWords => ({
     regionName: (code) => this.catalogue.regionName(code),
     bodyTypes: this.scope.bodyType(),

@@ -8,6 +8,7 @@ import { Api } from '../../core/api/api';
 import { CsvLink } from '../../core/api/csv-link';
 import { joinReadings } from '../../core/api/join-readings';
 import { Catalogue } from '../../core/catalogue/catalogue';
+import { keepLive } from '../../core/live/keep-live';
 import { ScopeLine } from '../../core/scope-line/scope-line';
 import { ScopeState } from '../../core/scope-line/scope-state';
 import { Session } from '../../core/session/session';
@@ -59,12 +60,15 @@ export class ThisWeekPage {
   private readonly unbilled = this.api.read(listJobs, () =>
     this.asked((week) => ({ to: datesOfWeek(week).to }), unbilledCars),
   );
-  protected readonly answers = joinReadings({
-    chart: this.chart,
-    week: this.week,
-    billed: this.billed,
-    unbilled: this.unbilled,
-  });
+  protected readonly answers = keepLive(
+    joinReadings({
+      chart: this.chart,
+      week: this.week,
+      billed: this.billed,
+      unbilled: this.unbilled,
+    }),
+    'jobs',
+  );
 
   protected readonly words = computed((): WeekWords => {
     const scope = this.answers.value()?.chart.scope ?? { regions: [], branches: [] };
@@ -89,7 +93,11 @@ export class ThisWeekPage {
   protected readonly mayWrite = computed(
     () => this.session.role() === 'site_manager' || this.session.role() === 'head_office',
   );
-  protected readonly allCars = linkedSignal({ source: this.view, computation: () => false });
+  protected readonly allCars = linkedSignal({
+    // A newer answer to the same question folds nothing up.
+    source: () => JSON.stringify([this.scope.week(), this.scope.filters()]),
+    computation: () => false,
+  });
   protected readonly cars = computed(() => {
     const cars = this.view()?.cars;
     return cars?.rows.slice(0, this.allCars() ? undefined : cars.atFirst) ?? [];

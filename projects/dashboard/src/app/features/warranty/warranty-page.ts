@@ -11,6 +11,7 @@ import { DotIntervalChart } from '../../charts/dot-interval/dot-interval-chart';
 import { Api } from '../../core/api/api';
 import { CsvLink } from '../../core/api/csv-link';
 import { Catalogue } from '../../core/catalogue/catalogue';
+import { keepLive } from '../../core/live/keep-live';
 import { ScopeLine } from '../../core/scope-line/scope-line';
 import { ScopeState } from '../../core/scope-line/scope-state';
 import { Session } from '../../core/session/session';
@@ -68,10 +69,14 @@ export class WarrantyPage {
     const scope = this.scope.completedQuery();
     return scope && { ...scope, groupBy: this.by(), group: many(this.group()) };
   });
-  protected readonly warranty = inject(Api).read(getWarranty, () => {
-    const query = this.query();
-    return query && { query };
-  });
+  protected readonly warranty = keepLive(
+    inject(Api).read(getWarranty, () => {
+      const query = this.query();
+      return query && { query };
+    }),
+    'jobs',
+    'claims',
+  );
   protected readonly words = computed((): WarrantyWords => ({
     currency: this.catalogue.currency(),
     branchName: (code) => this.catalogue.branchName(code),
