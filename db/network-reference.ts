@@ -1,6 +1,13 @@
 import type { Knex } from 'knex';
 import type { CoverCell } from '#shared/domain/cover-cells';
+import type { FunnelCell } from '#shared/domain/funnel';
 import { sql, type Connection, type Query } from './database';
+import {
+  readFunnelCells,
+  readProductParts,
+  type FunnelAsked,
+  type FunnelSource,
+} from './queries/branches';
 import { whereJobs, type JobFilters } from './queries/job-filters';
 import {
   readQuoteFigures,
@@ -9,7 +16,7 @@ import {
   type QuoteRung,
 } from './queries/quote';
 import { readUsualFigures, type UsualFigures } from './queries/usual';
-import { nearestNetworkSet } from './quote-reference';
+import { EVERY_PRODUCT, nearestNetworkSet } from './quote-reference';
 import type { Scope } from './scope';
 import { VISIBLE } from './visible-rows';
 import { branchCells } from './warranty-reference';
@@ -102,6 +109,30 @@ export class NetworkReference {
     };
   }
 
+  /**
+   * Sums of a measure by age band and package over the network; where too few others have cars that it counts, over the branches
+   * that the caller may see (rule 21). Branch and region filters narrow neither.
+   */
+  funnelCells(asked: FunnelAsked): {
+    kind: 'network' | 'scope';
+    cells: FunnelCell[];
+    /** Product by product, where they are asked for apart. */
+    products: { key: number; productId: number; ml: number }[];
+  } {
+    const source = this.everyRow();
+    const all = readFunnelCells(source, asked);
+    const ofNetwork = this.enoughBehind(all);
+    const isCounted = ({ branchId }: { branchId: number }): boolean =>
+      ofNetwork || !this.scope.isOutside(branchId);
+    const products =
+      asked.products === 'apart' ? readProductParts(source, asked.filters).filter(isCounted) : [];
+    return {
+      kind: ofNetwork ? 'network' : 'scope',
+      cells: all.filter(isCounted).map(({ branchId: _, ...cell }) => cell),
+      products: products.map(({ key, productId, ml }) => ({ key, productId, ml })),
+    };
+  }
+
   /** The nearest set of the network's cars to the one quoted for the scope's branch, with five branches besides that one behind it: the same whoever asks (rule 48). */
   nearestQuoteSet(
     car: QuotedCar,
@@ -144,6 +175,15 @@ export class NetworkReference {
       rows.map((row) => row.branchId).filter((id) => this.scope.isOutside(id)),
     );
     return others.size >= FEWEST_OTHERS;
+  }
+
+  private everyRow(): FunnelSource {
+    return {
+      facts: everyJob,
+      products: () => sql.raw(EVERY_PRODUCT),
+      claims: () => sql.raw('claims'),
+      all: (query) => this.all(query),
+    };
   }
 
   private all<Row>(query: Query): Row[] {

@@ -4,7 +4,8 @@ import { VISIBLE } from './visible-rows';
 
 /** Branch by branch, so that the days asked for are found within each. */
 const EVERY_FACT = `(select * from job_facts where branch_id in (select id from branches) and ${VISIBLE}) as job_facts`;
-const EVERY_PRODUCT = `(select * from job_products where ${VISIBLE}) as job_products`;
+/** The visible product lines of every branch. */
+export const EVERY_PRODUCT = `(select * from job_products where ${VISIBLE}) as job_products`;
 
 /** What must stand behind a set of the network's cars. */
 export interface QuoteNeed {

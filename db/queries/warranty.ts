@@ -1,7 +1,7 @@
 import type { Knex } from 'knex';
 import type { ClaimCause, ClaimDecision, Zone } from '#shared/domain/vocabulary';
 import { CHECKS, type CheckAnswer } from '#shared/domain/vocabulary';
-import { sql, type Connection } from '../database';
+import { sql, type Query } from '../database';
 import type { ScopedDb } from '../scoped-db';
 import { whereJobs, type JobFilters } from './job-filters';
 
@@ -52,6 +52,12 @@ export interface CoveredClaim {
   madeOn: string;
   decision: ClaimDecision;
   decidedOn: string | null;
+  cause: ClaimCause;
+}
+
+/** Who runs a query: a reader of a scope, or one beyond every scope. */
+interface Reader {
+  all: <Row>(query: Query) => Row[];
 }
 
 /** More than there are age bands, and more than any warranty has months. */
@@ -121,25 +127,26 @@ export function readClaims(db: ScopedDb, asOf: string): ClaimRow[] {
 
 /** What cover is counted by, branch by branch, of whichever facts a reader beyond scope asks for. */
 export function readCoverByBranch(
-  connection: Connection,
+  reader: Reader,
   facts: Knex.QueryBuilder,
 ): (CoverLists & { branchId: number })[] {
-  return connection
+  return reader
     .all<Record<keyof typeof COVER, string> & { branchId: number }>(
       facts.groupBy('branch_id').select({ branchId: 'branch_id' }, listsOf(COVER)),
     )
     .map(({ branchId, ...lists }) => ({ branchId, ...coverLists(lists) }));
 }
 
-/** The claims made by a day on whichever facts a reader beyond scope asks for. */
+/** The claims made by a day on whichever facts a reader asks for; `claims` are those of the reader. */
 export function readCoveredClaims(
-  connection: Connection,
+  reader: Reader,
   facts: Knex.QueryBuilder,
   asOf: string,
+  claims: Knex.Raw = sql.raw('claims'),
 ): CoveredClaim[] {
-  return connection.all<CoveredClaim>(
+  return reader.all<CoveredClaim>(
     facts
-      .join('claims', 'claims.job_id', 'job_facts.job_id')
+      .join(claims, 'claims.job_id', 'job_facts.job_id')
       .where('claims.made_on', '<=', asOf)
       .select({
         branchId: 'job_facts.branch_id',
@@ -150,6 +157,7 @@ export function readCoveredClaims(
         madeOn: 'claims.made_on',
         decision: 'claims.decision',
         decidedOn: 'claims.decided_on',
+        cause: 'claims.cause',
       }),
   );
 }
