@@ -31,7 +31,7 @@ export class PersonBusy {
   /** Typing, a form with something typed in it or about to be, a dialog, menu or list that is open. */
   now(): boolean {
     if (performance.now() - this.typedAt < TYPING) return true;
-    if (this.document.querySelector('.cdk-overlay-container > *:not(:empty), dialog[open]')) {
+    if (this.document.querySelector('.cdk-overlay-pane:not(:empty), dialog[open]')) {
       return true;
     }
     // A search is not lost by what comes in; everything else that is typed might be.
