@@ -60,7 +60,8 @@ export class LiveFeed {
     await pause(FIRST_WAIT, signal);
     for (let tries = 0; !signal.aborted;) {
       const begun = performance.now();
-      await this.readOnce(signal).catch(() => undefined);
+      // Without a line there is nothing to try: its return is told.
+      if (navigator.onLine) await this.readOnce(signal).catch(() => undefined);
       tries = performance.now() - begun > LIVED ? 0 : tries + 1;
       await pause(tries === 0 ? FIRST_WAIT : this.pace(tries), signal);
     }
