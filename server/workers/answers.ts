@@ -1,6 +1,9 @@
 import type { NetworkReference } from '#db/network-reference';
 import type { ScopedDb } from '#db/scoped-db';
 import { checkAuditChain, readAuditNames, readAuditPage } from '../features/audit/read-audit';
+import { answerBranches } from '../features/branches/answer-branches';
+import { answerBranchWeeks } from '../features/branches/answer-branch-weeks';
+import { answerSideBySide } from '../features/branches/answer-side-by-side';
 import { listComeBacks } from '../features/come-back/list-come-backs';
 import { listClaims } from '../features/claims/list-claims';
 import { listJobs } from '../features/job-list/list-jobs';
@@ -33,6 +36,9 @@ const ANSWERS: {
   claims: listClaims,
   rot: answerRot,
   products: answerProducts,
+  branches: answerBranches,
+  branchWeeks: answerBranchWeeks,
+  sideBySide: answerSideBySide,
   productNeed: answerProductNeed,
   comeBack: listComeBacks,
   quote: answerQuote,

@@ -3,9 +3,12 @@ import type { ScopedDb } from '#db/scoped-db';
 import type { AuditFilters } from '#db/queries/audit-list';
 import { everyEvent } from '../features/audit/read-audit';
 import { everyClaim, type ClaimsAsked } from '../features/claims/list-claims';
+import { answerBranches } from '../features/branches/answer-branches';
+import type { BranchesQuestion } from '../features/branches/place-branches';
 import { everyComeBack, type ComeBacksAsked } from '../features/come-back/list-come-backs';
 import {
   AUDIT_COLUMNS,
+  BRANCH_COLUMNS,
   CLAIM_COLUMNS,
   COME_BACK_COLUMNS,
   JOB_COLUMNS,
@@ -101,6 +104,11 @@ export function* csvChunks(
         classes.map((one) => ({ ...trend, ...one })),
       );
       yield csvHeader(PRODUCT_TEMPERATURE_COLUMNS) + csvRows(PRODUCT_TEMPERATURE_COLUMNS, rows);
+      return;
+    }
+    case 'branches': {
+      const { branches } = answerBranches(db, input as BranchesQuestion, reference);
+      yield csvHeader(BRANCH_COLUMNS) + csvRows(BRANCH_COLUMNS, branches);
       return;
     }
     case 'quote': {

@@ -1,5 +1,10 @@
 import type { MessagePort } from 'node:worker_threads';
 import type { PackedScope } from '#db/scope';
+import type {
+  BranchesAnswer,
+  BranchWeeksAnswer,
+  SideBySideAnswer,
+} from '#shared/contracts/branches';
 import type { MarginAnswer } from '#shared/contracts/margin';
 import type { OverrunAnswer } from '#shared/contracts/overrun';
 import type { ProductNeedAnswer, ProductsAnswer } from '#shared/contracts/products';
@@ -17,6 +22,7 @@ import type { EffectQuestion } from '../features/set-up-help/effect-of-change';
 import type { MediansQuestion } from '../features/set-up-help/norm-medians';
 import type { AuditFilters } from '#db/queries/audit-list';
 import type { AuditChain, AuditPage, AuditQuestion } from '../features/audit/read-audit';
+import type { BranchesQuestion } from '../features/branches/place-branches';
 import type { ClaimListQuestion, ClaimPage, ClaimsAsked } from '../features/claims/list-claims';
 import type { JobListQuestion, JobPage, JobsAsked } from '../features/job-list/list-jobs';
 import type { MarginQuestion } from '../features/margin/answer-margin';
@@ -41,6 +47,9 @@ export interface ReadTasks {
   claims: { input: ClaimListQuestion; output: ClaimPage };
   rot: { input: RotQuestion; output: RotAnswer };
   products: { input: ProductsQuestion; output: ProductsAnswer };
+  branches: { input: BranchesQuestion; output: BranchesAnswer };
+  branchWeeks: { input: BranchesQuestion; output: BranchWeeksAnswer };
+  sideBySide: { input: BranchesQuestion; output: SideBySideAnswer };
   productNeed: { input: NeedQuestion; output: ProductNeedAnswer };
   comeBack: { input: ComeBackQuestion; output: ComeBackPage };
   quote: { input: QuoteQuestion; output: QuoteAnswer };
@@ -71,6 +80,7 @@ export interface ExportTasks {
   'product-branches': ProductsQuestion;
   'product-temperature': ProductsQuestion;
   'product-need': NeedQuestion;
+  branches: BranchesQuestion;
   quote: QuoteQuestion;
   'come-back': ComeBacksAsked;
   'warranty-risk': RiskQuestion;

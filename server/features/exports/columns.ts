@@ -96,3 +96,8 @@ export const AUDIT_COLUMNS = [
   ...['id', 'at', 'actor', 'address', 'action', 'subject', 'branch', 'detail', 'hash'],
   'previousHash',
 ];
+
+export const BRANCH_COLUMNS = [
+  ...['branch', 'region', 'cars', 'value', 'expected', 'lower95', 'upper95', 'lower998'],
+  ...['upper998', 'flag', 'denominator', 'claims', 'expectedClaims', 'target'],
+];

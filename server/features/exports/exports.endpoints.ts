@@ -2,6 +2,7 @@ import { recordAudit } from '#db/queries/audit';
 import type { Scope } from '#db/scope';
 import { exportAudit } from '#shared/contracts/audit';
 import {
+  exportBranches,
   exportClaims,
   exportComeBack,
   exportJobs,
@@ -67,6 +68,14 @@ export function mountExports(mounting: Mounting, kit: Kit): void {
     const { scope, period, filters } = scopeQuestion(kit, call.scope, query);
     return exported(kit, call, 'overrun', scope, () =>
       kit.reads.stream('overrun', scope, { period, filters, by }),
+    );
+  });
+
+  mount(mounting, exportBranches, (call) => {
+    const { measure, ...query } = call.query;
+    const { scope, ...asked } = scopeQuestion(kit, call.scope, query);
+    return exported(kit, call, 'branches', scope, () =>
+      kit.reads.stream('branches', scope, { ...asked, measure }),
     );
   });
 

@@ -6,14 +6,8 @@ import type { MarginAnswer, MarginWeek } from '#shared/contracts/margin';
 import { bridgeOf } from '#shared/domain/bridge';
 import { addDays, mondayOf, mondayOfWeek, weeksTouching } from '#shared/domain/calendar';
 import type { Period } from '#shared/domain/period';
-import {
-  BASELINE_WEEKS,
-  isJudged,
-  limitsOf,
-  markSignals,
-  trendOf,
-  type BilledWeek,
-} from './judge-weeks';
+import { BASELINE_WEEKS, usualRange } from '#shared/domain/usual-range';
+import { isJudged, markSignals, trendOf, type BilledWeek } from './judge-weeks';
 import { addSums, noMoney, tellWeek, type MoneyOfJobs } from './week-figures';
 
 export interface MarginQuestion {
@@ -29,7 +23,7 @@ export function answerMargin(db: ScopedDb, question: MarginQuestion): MarginAnsw
     const { period, filters } = question;
     const { weeks, total } = readWeeks(db, question);
     const judged = weeks.filter(isJudged);
-    const limits = limitsOf(baselineOf(db, judged, question));
+    const limits = usualRange(baselineOf(db, judged, question));
     markSignals(judged, limits);
     return {
       period,

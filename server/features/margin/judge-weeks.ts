@@ -1,14 +1,9 @@
 import type { MarginAnswer, MarginWeek } from '#shared/contracts/margin';
 import { dayNumber, mondayOfWeek } from '#shared/domain/calendar';
+import { FEWEST_WEEKS } from '#shared/domain/usual-range';
 import { chartSignals } from '#shared/stats/chart-signals';
 import { mannKendall } from '#shared/stats/mann-kendall';
 import { theilSenSlope } from '#shared/stats/theil-sen-slope';
-import { xmrLimits } from '#shared/stats/xmr-limits';
-
-/** Weeks that limits are made from, at most (rule 5). */
-export const BASELINE_WEEKS = 26;
-/** Fewer weeks than this make neither limits (rule 5) nor a trend (rule 41). */
-const FEWEST_WEEKS = 8;
 
 /** A week that is over, lies wholly in the period and billed something: only these are judged (rules 4 and 7). */
 export type BilledWeek = MarginWeek & { marginShare: number };
@@ -16,14 +11,6 @@ export type BilledWeek = MarginWeek & { marginShare: number };
 /** Whether a week takes part in limits, signals and trend. */
 export function isJudged(week: MarginWeek): week is BilledWeek {
   return week.whole && week.marginShare !== null;
-}
-
-/** Limits from margin shares in the order of their weeks; null when they are too few. */
-export function limitsOf(shares: readonly number[]): MarginAnswer['limits'] {
-  const limits = shares.length < FEWEST_WEEKS ? undefined : xmrLimits(shares);
-  if (!limits) return null;
-  const { centre, lower, upper, n } = limits;
-  return { centre, lower, upper, baselineWeeks: n };
 }
 
 /** Writes its signal into each week; gaps between billed weeks are skipped (rule 6). */
