@@ -97,4 +97,10 @@ describe('Header', () => {
     TestBed.resetTestingModule();
     expect((await shownTo('regional_lead', '/jobs', 0, 2)).querySelector('.outbox')).toBeNull();
   });
+
+  it('on a page behind the header’s, says its name in the narrow menu, with no bead in the wide line', async () => {
+    const element = await shownTo('regional_lead', '/actions/HAV/3');
+    expect(element.querySelector('button.narrow')?.textContent).toContain('Actions');
+    expect(element.querySelectorAll('.wide us-bead')).toHaveLength(0);
+  });
 });

@@ -2,9 +2,9 @@ import { computed, inject, Injectable } from '@angular/core';
 import { toSignal } from '@angular/core/rxjs-interop';
 import { NavigationEnd, Router } from '@angular/router';
 import { filter, map, startWith } from 'rxjs';
-import { PAGES } from './pages';
+import { PAGES, PAGES_BEHIND } from './pages';
 
-/** Which page of the header is open. */
+/** Which page of the header, or behind one of them, is open. */
 @Injectable({ providedIn: 'root' })
 export class OpenPage {
   private readonly router = inject(Router);
@@ -17,9 +17,11 @@ export class OpenPage {
     { requireSync: true },
   );
 
-  /** Its name, or `undefined` on a page that the header does not name. */
+  /** Its name, or `undefined` on a page that neither names. */
   readonly name = computed(() => {
     const path = this.url().split(/[?#]/, 1)[0] ?? '';
-    return PAGES.find((page) => path === page.path || path.startsWith(`${page.path}/`))?.name;
+    return [...PAGES, ...PAGES_BEHIND].find(
+      (page) => path === page.path || path.startsWith(`${page.path}/`),
+    )?.name;
   });
 }

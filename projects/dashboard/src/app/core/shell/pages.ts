@@ -29,3 +29,9 @@ export const PAGES: readonly Page[] = [
   { path: '/come-backs', name: 'Come-backs', roles: READERS },
   { path: '/quote', name: 'Quote', roles: [...READERS, 'recorder'] },
 ];
+
+/** Pages that stand behind others and have no word in the header; the menu of a narrow window says which of them is open. */
+export const PAGES_BEHIND: readonly Pick<Page, 'path' | 'name'>[] = [
+  { path: '/actions', name: 'Actions' },
+  { path: '/targets', name: 'Targets' },
+];
