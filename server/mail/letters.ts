@@ -1,3 +1,5 @@
+import { escaped, oneLine } from './plain-line';
+
 /** A mail ready to be queued. */
 export interface Mail {
   to: string;
@@ -122,23 +124,4 @@ function letter(to: Addressee, subject: string, link: string, say: Sentences): M
     text: `${paragraphs.join('\n\n')}\n`,
     html: `<!doctype html><html lang="en"><meta charset="utf-8"><title>${escaped(subject)}</title><body>${html.join('')}</body></html>`,
   };
-}
-
-/** A name as part of a line: nothing in it may start a line, or turn around what follows. */
-function oneLine(text: string): string {
-  return text
-    .replace(/[\p{Cc}\p{Cs}\p{Zl}\p{Zp}\u061c\u200e\u200f\u202a-\u202e\u2066-\u2069]+/gu, ' ')
-    .replace(/ {2,}/g, ' ')
-    .trim();
-}
-
-function escaped(text: string): string {
-  const entities: Record<string, string> = {
-    '&': '&amp;',
-    '<': '&lt;',
-    '>': '&gt;',
-    '"': '&quot;',
-    "'": '&#39;',
-  };
-  return text.replace(/[&<>"']/g, (character) => entities[character] ?? character);
 }

@@ -1,5 +1,6 @@
 import type { NetworkReference } from '#db/network-reference';
 import type { ScopedDb } from '#db/scoped-db';
+import { actionEffect } from '../features/actions/action-effect';
 import { checkAuditChain, readAuditNames, readAuditPage } from '../features/audit/read-audit';
 import { answerBranches } from '../features/branches/answer-branches';
 import { answerBranchWeeks } from '../features/branches/answer-branch-weeks';
@@ -20,6 +21,7 @@ import { answerWarranty } from '../features/warranty/answer-warranty';
 import { laterArrivals } from '#db/queries/later-arrivals';
 import { countReferrers } from '#db/queries/referrers';
 import type { ReadName, ReadTasks } from './read-tasks';
+import { monthFigures, weekChanges, weekFigures } from './digest-figures';
 import { warrantyReport, warrantyReportParts, warrantyReportPdf } from './warranty-report';
 
 /** Every answer a worker knows, by name; only those with a network figure take the reference. */
@@ -39,6 +41,7 @@ const ANSWERS: {
   branches: answerBranches,
   branchWeeks: answerBranchWeeks,
   sideBySide: answerSideBySide,
+  actionEffect,
   productNeed: answerProductNeed,
   comeBack: listComeBacks,
   quote: answerQuote,
@@ -48,6 +51,9 @@ const ANSWERS: {
   warrantyReportPdf,
   warrantyReportParts,
   laterArrivals: (db, { limit, ...question }) => laterArrivals(db, question, limit),
+  digestWeek: weekFigures,
+  digestChanges: weekChanges,
+  digestMonth: monthFigures,
   audit: readAuditPage,
   auditNames: readAuditNames,
   auditCheck: checkAuditChain,

@@ -1,5 +1,6 @@
 import type { MessagePort } from 'node:worker_threads';
 import type { PackedScope } from '#db/scope';
+import type { ActionEffect } from '#shared/contracts/actions';
 import type {
   BranchesAnswer,
   BranchWeeksAnswer,
@@ -14,6 +15,10 @@ import type { UsualCar } from '#shared/contracts/usual';
 import type { WarrantyAnswer } from '#shared/contracts/warranty';
 import type { WarrantyReport } from '#shared/contracts/warranty-reports';
 import type { LaterAnswer, LaterQuestion } from '#db/queries/later-arrivals';
+import type { Changes } from '../features/digests/changes';
+import type { MonthFigures } from '../features/digests/month-digest';
+import type { WeekFigures } from '../features/digests/week-digest';
+import type { ChangesAsked, WeekAsked } from './digest-figures';
 import type { ReportParts, ReportQuestion } from './warranty-report';
 import type { CatalogueRow, Referrers } from '#db/queries/referrers';
 import type { OutOf } from '#shared/contracts/endpoint';
@@ -22,6 +27,7 @@ import type { EffectQuestion } from '../features/set-up-help/effect-of-change';
 import type { MediansQuestion } from '../features/set-up-help/norm-medians';
 import type { AuditFilters } from '#db/queries/audit-list';
 import type { AuditChain, AuditPage, AuditQuestion } from '../features/audit/read-audit';
+import type { EffectAsked } from '../features/actions/action-effect';
 import type { BranchesQuestion } from '../features/branches/place-branches';
 import type { ClaimListQuestion, ClaimPage, ClaimsAsked } from '../features/claims/list-claims';
 import type { JobListQuestion, JobPage, JobsAsked } from '../features/job-list/list-jobs';
@@ -50,6 +56,7 @@ export interface ReadTasks {
   branches: { input: BranchesQuestion; output: BranchesAnswer };
   branchWeeks: { input: BranchesQuestion; output: BranchWeeksAnswer };
   sideBySide: { input: BranchesQuestion; output: SideBySideAnswer };
+  actionEffect: { input: EffectAsked; output: ActionEffect };
   productNeed: { input: NeedQuestion; output: ProductNeedAnswer };
   comeBack: { input: ComeBackQuestion; output: ComeBackPage };
   quote: { input: QuoteQuestion; output: QuoteAnswer };
@@ -59,6 +66,9 @@ export interface ReadTasks {
   warrantyReportPdf: { input: ReportQuestion; output: Uint8Array };
   warrantyReportParts: { input: ReportQuestion; output: ReportParts };
   laterArrivals: { input: LaterQuestion & { limit: number }; output: LaterAnswer };
+  digestWeek: { input: WeekAsked; output: WeekFigures };
+  digestChanges: { input: ChangesAsked; output: Changes };
+  digestMonth: { input: ChangesAsked; output: MonthFigures };
   audit: { input: AuditQuestion; output: AuditPage };
   auditNames: { input: null; output: { actors: string[]; actions: string[] } };
   effect: { input: EffectQuestion; output: Effect };
