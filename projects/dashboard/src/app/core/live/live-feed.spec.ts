@@ -154,10 +154,18 @@ describe('LiveFeed', () => {
 
   it('given no answer or a refusing one, tries again at growing waits', async () => {
     const { asked, pass } = set(['no line', 502, 'no line', 'stream']);
-    await pass(1_000);
-    await pass(30_000);
+    await pass(20_000);
     const waits = asked.slice(1).map((at, n) => Math.round(at - asked[n]!));
     expect(waits).toEqual([2_000, 4_000, 6_000]);
+  });
+
+  it('given a server that does not begin to answer, gives up after ten seconds and tries again', async () => {
+    const { pass, streams } = set();
+    await pass(1_000);
+    await pass(10_000);
+    expect(streams[0]!.signal.aborted).toBe(true);
+    await pass(2_000);
+    expect(streams).toHaveLength(2);
   });
 
   it('given silence beyond three breaths, gives the connection up and comes back', async () => {

@@ -12,6 +12,8 @@ type Listener = (note: LiveNote) => void;
 
 /** The stream is opened after what the page itself asks for at first, ms. */
 const FIRST_WAIT = 1_000;
+/** A server that has not begun to answer by then, ms, is still starting or hangs. */
+const PATIENCE = 10_000;
 /** Three breaths of the server without a sign, ms: the connection is dead though nobody said so. */
 const LONGEST_SILENCE = 65_000;
 /** A stream that lived so long, ms, ended as it should, with its token: the next is opened without a growing wait. */
@@ -78,7 +80,7 @@ export class LiveFeed {
     const control = new AbortController();
     const stop = (): void => control.abort();
     signal.addEventListener('abort', stop);
-    let silence = setTimeout(stop, LONGEST_SILENCE);
+    let silence = setTimeout(stop, PATIENCE);
     try {
       const response = await fetch(followLive.path, {
         headers: { Authorization: `Bearer ${token}`, Accept: 'text/event-stream' },
