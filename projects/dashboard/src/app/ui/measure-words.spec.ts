@@ -1,4 +1,10 @@
-import { formatMeasure, formatMeasureChange, measureOfTyped, measureToType } from './measure-words';
+import {
+  formatMeasure,
+  formatMeasureChange,
+  formatTarget,
+  measureOfTyped,
+  measureToType,
+} from './measure-words';
 
 describe('formatMeasure', () => {
   it('each measure, as its unit is read', () => {
@@ -49,5 +55,13 @@ describe('measureOfTyped', () => {
       const value = measure === 'claims' ? 17.5 : measure === 'margin' ? 0.355 : 1.07;
       expect(measureOfTyped(measure, measureToType(measure, value))).toBeCloseTo(value, 9);
     }
+  });
+});
+
+describe('formatTarget', () => {
+  it('a value that was set, keeps the digits it was given', () => {
+    expect(formatTarget('overrun', 1.075)).toBe('+7.5\u202f%');
+    expect(formatTarget('margin', 0.35)).toBe('35\u202f%');
+    expect(formatTarget('claims', 17.5)).toBe('17.5');
   });
 });

@@ -21,14 +21,12 @@ export const MEASURE_UNITS: Readonly<Record<BranchMeasure, string>> = {
 
 /** A value in the unit of its measure: an overrun ratio of 1.2 is `+20 %`, product and shares are per cent, claims a number. */
 export function formatMeasure(measure: BranchMeasure, value: number): string {
-  switch (measure) {
-    case 'overrun':
-      return formatSignedShare(value - 1);
-    case 'claims':
-      return formatNumber(value, value < 10 ? 1 : 0);
-    default:
-      return formatShare(value);
-  }
+  return formatted(measure, value, measure === 'claims' && value < 10 ? 1 : 0);
+}
+
+/** A value that somebody set, with all the digits they gave it: `+7.5 %`. */
+export function formatTarget(measure: BranchMeasure, value: number): string {
+  return formatted(measure, value, measureToType(measure, value).split('.')[1]?.length ?? 0);
 }
 
 /** A value as it is typed, without its unit: an overrun ratio of 1.2 is `20`. */
@@ -63,4 +61,15 @@ export function amountOfChange(measure: BranchMeasure, change: number): string {
   const size = Math.abs(change);
   if (measure === 'claims') return formatNumber(size, size < 10 ? 1 : 0);
   return size * 100 < 0.95 && size > 0 ? formatNumber(size * 100, 1) : formatCount(size * 100);
+}
+
+function formatted(measure: BranchMeasure, value: number, decimals: number): string {
+  switch (measure) {
+    case 'overrun':
+      return formatSignedShare(value - 1, decimals);
+    case 'claims':
+      return formatNumber(value, decimals);
+    default:
+      return formatShare(value, decimals);
+  }
 }

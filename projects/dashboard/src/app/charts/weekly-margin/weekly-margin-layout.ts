@@ -1,6 +1,6 @@
 import { scaleLinear } from 'd3-scale';
 import { line } from 'd3-shape';
-import { formatCount, formatShare, formatWeekNumber } from '../../ui/format';
+import { formatCount, formatNumber, formatShare, formatWeekNumber } from '../../ui/format';
 import { spreadLabels } from '../spread-labels';
 import { textWidth, widestText } from '../text-width';
 import { marginAxis } from './margin-axis';
@@ -149,7 +149,12 @@ function endWords(input: WeeklyMarginInput, narrow: boolean): EndWord[] {
     add(input.limits.centre, 'centre', 'limit');
     add(input.limits.lower, narrow ? 'lower' : 'lower limit', 'limit');
   }
-  if (input.target !== null) add(input.target, 'target', 'target');
+  // A target has the digits that it was given, half a per cent too.
+  if (input.target !== null) {
+    const percent = Number((input.target * 100).toFixed(2));
+    const value = formatNumber(percent, String(percent).split('.')[1]?.length ?? 0);
+    words.push({ share: input.target, value, word: 'target', role: 'target' });
+  }
   const chosen = input.points.find(({ week }) => week === input.chosen);
   if (chosen && chosen.share !== null) {
     add(chosen.share, formatWeekNumber(chosen.week), 'chosen');

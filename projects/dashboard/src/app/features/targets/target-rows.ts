@@ -3,7 +3,7 @@ import type { OutOf } from '#shared/contracts/endpoint';
 import { TARGET_MEASURES, type TargetMeasure } from '#shared/domain/target-measures';
 import type { AnswerPart } from '../../ui/answer/answer';
 import { formatCount } from '../../ui/format';
-import { formatMeasure, MEASURE_NAMES } from '../../ui/measure-words';
+import { formatTarget, MEASURE_NAMES } from '../../ui/measure-words';
 
 type Targets = OutOf<typeof listTargets>;
 
@@ -50,7 +50,7 @@ export function targetRows(targets: Targets, branchName: (code: string) => strin
         measure,
         branch: null,
         own,
-        holds: own === null ? 'none' : formatMeasure(measure, own),
+        holds: own === null ? 'none' : formatTarget(measure, own),
         whose: '',
         name: cellName(measure, 'the network'),
       };
@@ -100,7 +100,7 @@ function branchCell(
     measure,
     branch: code,
     own,
-    holds: holds === null ? 'none' : formatMeasure(measure, holds),
+    holds: holds === null ? 'none' : formatTarget(measure, holds),
     whose: holds === null || own !== null ? '' : 'the network’s',
     name: cellName(measure, name),
   };

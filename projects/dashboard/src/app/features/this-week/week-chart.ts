@@ -17,6 +17,7 @@ import {
   formatWeek,
   formatWeekNumber,
 } from '../../ui/format';
+import { formatTarget } from '../../ui/measure-words';
 import { countRunning } from './week-standing';
 import { ordinal, pValue } from './week-words';
 
@@ -143,7 +144,7 @@ function summarise(chart: MarginAnswer, week: string): string {
   if (chosen)
     said.push(`${formatWeekNumber(week)}: ${valueLine(chart, chosen)}, ${carsLine(chosen)}.`);
   if (chart.targetMarginShare !== null) {
-    said.push(`Target ${formatShare(chart.targetMarginShare)}.`);
+    said.push(`Target ${formatTarget('margin', chart.targetMarginShare)}.`);
   }
   if (chart.limits) {
     const { lower, centre, upper } = chart.limits;
@@ -216,7 +217,7 @@ function weekColumns(chart: MarginAnswer): Column<MarginWeek>[] {
 function againstTarget(target: number): Column<MarginWeek> {
   return {
     key: 'target',
-    label: `Against target ${formatShare(target)}`,
+    label: `Against target ${formatTarget('margin', target)}`,
     kind: 'number',
     text: ({ marginShare }) =>
       marginShare === null ? '' : `${formatSignedAmount((marginShare - target) * 10_000)} points`,
