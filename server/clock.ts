@@ -14,14 +14,19 @@ export function fixedClock(instant: Date): Clock {
   return { now: () => new Date(instant) };
 }
 
+/** The day that every branch of a scope has reached: the earliest local date among them, the UTC date when there is none. */
+export function dayReachedIn(scope: Scope, clock: Clock): string {
+  return datesIn(scope, clock)[0] as string;
+}
+
 /** Today in a scope: the latest local date among its branches, the UTC date when there is none (rule 9). */
 export function todayIn(scope: Scope, clock: Clock): string {
+  return datesIn(scope, clock).at(-1) as string;
+}
+
+/** The local dates of the branches at this moment, sorted. */
+function datesIn(scope: Scope, clock: Clock): string[] {
   const now = clock.now();
   const zones = new Set(scope.branches.map((branch) => branch.timeZone));
-  let latest = '';
-  for (const zone of zones.size > 0 ? zones : ['UTC']) {
-    const date = localDate(now, zone);
-    if (date > latest) latest = date;
-  }
-  return latest;
+  return [...(zones.size > 0 ? zones : ['UTC'])].map((zone) => localDate(now, zone)).sort();
 }

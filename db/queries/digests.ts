@@ -105,7 +105,7 @@ export function readDigestSignals(db: ScopedDb, overSince: string): DigestSignal
         .table('signals')
         .join('branches', 'branches.id', 'signals.branch_id')
         .join('regions', 'regions.id', 'branches.region_id')
-        .where((or) => or.whereNull('over_on').orWhere('over_on', '>=', overSince))
+        .whereRaw('(over_on is null or over_on >= ?)', [overSince])
         .orderBy(['branches.code', 'opened_on', 'signals.id'])
         .select('kind', 'measure', 'since', 'strength', 'facts', 'cars', {
           branch: 'branches.code',

@@ -9,6 +9,8 @@ export interface WaitingMail {
   text: string;
   html: string | null;
   createdAt: string;
+  /** Token of the link that stops mails of its kind; null for mails that always come. */
+  unsubscribe: string | null;
   /** Attempts that failed so far. */
   attempts: number;
 }
@@ -34,6 +36,8 @@ export function insertMail(
     sendAt: string | null;
     /** Month of the run of the warranty report that it belongs to. */
     reportRun?: string;
+    /** Token of the link that stops mails of its kind. */
+    unsubscribe?: string;
   },
 ): void {
   db.run(
@@ -45,6 +49,7 @@ export function insertMail(
       created_at: mail.createdAt,
       next_attempt_at: mail.sendAt,
       report_run: mail.reportRun ?? null,
+      unsubscribe: mail.unsubscribe ?? null,
     }),
   );
 }
@@ -69,7 +74,7 @@ export function nextDueMail(db: UnscopedDb, now: string): WaitingMail | undefine
       .where('next_attempt_at', '<=', now)
       .orderBy(['next_attempt_at', 'id'])
       .limit(1)
-      .select('id', 'recipient', 'subject', 'attempts', {
+      .select('id', 'recipient', 'subject', 'attempts', 'unsubscribe', {
         text: 'text_body',
         html: 'html_body',
         createdAt: 'created_at',
@@ -102,8 +107,7 @@ export function settleHandedOver(db: UnscopedDb): void {
         sent_at: sql.ref('handed_over_at'),
         next_attempt_at: null,
         last_error: UNANSWERED,
-        text_body: '',
-        html_body: null,
+        ...FORGOTTEN,
       }),
   );
 }
@@ -111,13 +115,16 @@ export function settleHandedOver(db: UnscopedDb): void {
 /** What stands beside a mail that was handed over whole, while the server's answer was lost in a stop. */
 const UNANSWERED = 'ANSWER LOST IN A STOP';
 
-/** Marks a mail as sent and forgets its text: the link in it signs somebody in. */
+/** What is forgotten of a mail that is done with: the links in its text sign somebody in or stop their mail. */
+const FORGOTTEN = { text_body: '', html_body: null, unsubscribe: null };
+
+/** Marks a mail as sent and forgets its text. */
 export function markMailSent(db: UnscopedDb, id: number, at: string): void {
   db.run(
     sql('mails')
       .where({ id })
       .increment('attempts', 1)
-      .update({ sent_at: at, next_attempt_at: null, text_body: '', html_body: null }),
+      .update({ sent_at: at, next_attempt_at: null, ...FORGOTTEN }),
   );
 }
 
@@ -142,6 +149,6 @@ export function giveUpMail(db: UnscopedDb, id: number, error: string): void {
     sql('mails')
       .where({ id })
       .increment('attempts', 1)
-      .update({ next_attempt_at: null, last_error: error, text_body: '', html_body: null }),
+      .update({ next_attempt_at: null, last_error: error, ...FORGOTTEN }),
   );
 }

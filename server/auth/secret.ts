@@ -3,11 +3,12 @@ import { chmodSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { ConfigRefused, type Config } from '../config';
 
-/** What signs: one key for access tokens, another for refresh cookies, so that neither can stand for the other. */
+/** What signs: a key each for access tokens, refresh cookies and links in mails, so that none can stand for another. */
 export interface SigningKeys {
   /** A `KeyObject` made once: jsonwebtoken verifies with it about fifty times faster than with a string. */
   tokens: KeyObject;
   cookies: KeyObject;
+  mails: KeyObject;
 }
 
 /** The signing keys of UNDERSEAM_SECRET, or of the secret kept in the data folder, which is made on first use. */
@@ -15,7 +16,11 @@ export function readSecret(config: Pick<Config, 'secret' | 'data'>): SigningKeys
   const secret = config.secret ?? keptSecret(config.data);
   const derived = (purpose: string) =>
     createSecretKey(Buffer.from(hkdfSync('sha256', secret, '', `underseam ${purpose}`, 32)));
-  return { tokens: derived('access tokens'), cookies: derived('refresh cookies') };
+  return {
+    tokens: derived('access tokens'),
+    cookies: derived('refresh cookies'),
+    mails: derived('links in mails'),
+  };
 }
 
 /** Reads the data folder's secret; only the owner may read the file. */

@@ -16,6 +16,7 @@ import { findPerson } from '#db/queries/people';
 import type { Store } from '#db/store';
 import { realClock, type Clock } from '../clock';
 import type { Config } from '../config';
+import type { Digest } from '../features/digests/digest';
 import {
   importEndedLetter,
   invitationLetter,
@@ -28,7 +29,8 @@ import {
   type Mail,
   type Occasion,
 } from './letters';
-import { failureOf, makeTransport, messageOf } from './smtp';
+import { digestLetter } from './digest-letters';
+import { failureOf, makeTransport, messageOf, stopLink } from './smtp';
 
 /** How a mail is tried again, in milliseconds: the wait doubles from the first to the longest until the mail is too old. */
 export interface Pace {
@@ -121,17 +123,24 @@ export class Outbox {
     const person = findPerson(this.store.unscoped, personId);
     if (!person?.active || !wantsMail(this.store.unscoped, person, 'warranty_report')) return;
     const link = this.link(`/warranty/reports/${report}`);
-    this.queue(warrantyReportLetter(person, asOf, link), month);
+    this.queue(warrantyReportLetter(person, asOf, link), { reportRun: month });
+  }
+
+  /** Queues a digest with the link that stops its kind; inside a write, which has found that the person wants it. */
+  queueDigest(to: Addressee, digest: Digest, unsubscribe: string): void {
+    const stop = stopLink(this.config.publicUrl, unsubscribe);
+    const page = (path: string): string => this.link(path);
+    this.queue(digestLetter(to, digest, { page, stop }), { unsubscribe });
   }
 
   /** Queues a mail; inside a write, so that it is kept if and only if the rest of the write is. */
-  queue(mail: Mail, reportRun?: string): void {
+  queue(mail: Mail, kept: { reportRun?: string; unsubscribe?: string } = {}): void {
     const now = this.clock.now().toISOString();
     insertMail(this.store.unscoped, {
       ...mail,
       createdAt: now,
       sendAt: this.transport ? now : null,
-      ...(reportRun !== undefined && { reportRun }),
+      ...kept,
     });
     // Fires in a later turn, when the commit is done.
     this.wakeIn(0);

@@ -7,6 +7,7 @@ const mail = {
   subject: 'A',
   text: 'A',
   html: null,
+  unsubscribe: null,
   createdAt: '2026-02-02T06:30:00.000Z',
   attempts: 0,
 };

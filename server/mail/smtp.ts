@@ -39,11 +39,35 @@ export function messageOf(
     ...(mail.html !== null && { html: mail.html }),
     messageId: `<${mail.id}.${Date.parse(mail.createdAt)}@${host}>`,
     date: new Date(mail.createdAt),
-    headers: { 'Auto-Submitted': 'auto-generated' },
+    headers: { 'Auto-Submitted': 'auto-generated', ...stopHeaders(mail, config.publicUrl) },
     beforeEnd,
     cancelling,
     signal: cancelling.signal,
   };
+}
+
+/**
+ * How a mail program stops mails of this kind: the link of the page (RFC 2369), and that posting to it does so in one click,
+ * which holds for https only (RFC 8058, 3.1). A mail server that signs must sign these two headers as well (RFC 8058, 4).
+ */
+function stopHeaders(
+  { unsubscribe }: WaitingMail,
+  publicUrl: string,
+): Record<string, string | { prepared: true; value: string }> {
+  if (unsubscribe === null) return {};
+  const address = stopLink(publicUrl, unsubscribe);
+  return {
+    // Prepared, because a folded address would be read with a space in it.
+    'List-Unsubscribe': { prepared: true, value: `<${address}>` },
+    ...(address.startsWith('https:') && {
+      'List-Unsubscribe-Post': 'List-Unsubscribe=One-Click',
+    }),
+  };
+}
+
+/** Address of the page that stops a kind of mail; posting to it does so without asking. */
+export function stopLink(publicUrl: string, token: string): string {
+  return `${publicUrl.replace(/\/+$/, '')}/unsubscribe?token=${encodeURIComponent(token)}`;
 }
 
 /** The SMTP user when that is an address, since many servers let a user send only as themselves. */

@@ -21,7 +21,7 @@ import { answerWarranty } from '../features/warranty/answer-warranty';
 import { laterArrivals } from '#db/queries/later-arrivals';
 import { countReferrers } from '#db/queries/referrers';
 import type { ReadName, ReadTasks } from './read-tasks';
-import { monthFigures, weekChanges, weekFigures } from './digest-figures';
+import { changesOf, monthFigures, weekFigures } from './digest-figures';
 import { warrantyReport, warrantyReportParts, warrantyReportPdf } from './warranty-report';
 
 /** Every answer a worker knows, by name; only those with a network figure take the reference. */
@@ -52,7 +52,7 @@ const ANSWERS: {
   warrantyReportParts,
   laterArrivals: (db, { limit, ...question }) => laterArrivals(db, question, limit),
   digestWeek: weekFigures,
-  digestChanges: weekChanges,
+  digestChanges: changesOf,
   digestMonth: monthFigures,
   audit: readAuditPage,
   auditNames: readAuditNames,

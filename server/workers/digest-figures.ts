@@ -8,7 +8,7 @@ import {
   readWaiting,
 } from '#db/queries/digests';
 import type { ScopedDb } from '#db/scoped-db';
-import { addDays, isoWeek, mondayOfWeek } from '#shared/domain/calendar';
+import { addDays, mondayOfWeek } from '#shared/domain/calendar';
 import type { Period } from '#shared/domain/period';
 import type { Stage } from '#shared/domain/vocabulary';
 import type { Changes } from '../features/digests/changes';
@@ -26,8 +26,10 @@ export interface WeekAsked {
   today: string;
 }
 
-/** Days whose changes are asked for, both included, as seen on a day. */
-export interface ChangesAsked extends Period {
+/** Days whose changes are asked for, both included, and those whose cars are counted, as seen on a day. */
+export interface ChangesAsked {
+  days: Period;
+  carsOf: Period;
   today: string;
 }
 
@@ -67,29 +69,24 @@ function labourOf(db: ScopedDb, period: Period): WeekLabour {
   };
 }
 
-/** What changed in the branches of a scope, with the cars of the days' first week. */
-export function weekChanges(db: ScopedDb, asked: ChangesAsked): Changes {
-  const monday = mondayOfWeek(isoWeek(asked.from));
-  return db.snapshot(() => changesOf(db, asked, { from: monday, to: addDays(monday, 6) }));
+/** What changed in the branches of a scope. */
+export function changesOf(db: ScopedDb, { days, carsOf, today }: ChangesAsked): Changes {
+  return db.snapshot(() => ({
+    today,
+    days,
+    carsOf,
+    regions: readRegionNames(db),
+    signals: readDigestSignals(db, days.from),
+    late: readLateActions(db, today),
+    branches: readBranchCars(db, carsOf),
+  }));
 }
 
 /** What changed in a month in the whole network, with its cars and what was issued. */
 export function monthFigures(db: ScopedDb, asked: ChangesAsked): MonthFigures {
   return db.snapshot(() => ({
-    month: asked.from.slice(0, 7),
-    changes: changesOf(db, asked, asked),
-    issued: readIssued(db, asked),
+    month: asked.days.from.slice(0, 7),
+    changes: changesOf(db, asked),
+    issued: readIssued(db, asked.days),
   }));
-}
-
-function changesOf(db: ScopedDb, { from, to, today }: ChangesAsked, cars: Period): Changes {
-  return {
-    today,
-    from,
-    to,
-    regions: readRegionNames(db),
-    signals: readDigestSignals(db, from),
-    late: readLateActions(db, today),
-    branches: readBranchCars(db, { from: cars.from, to: cars.to }),
-  };
 }

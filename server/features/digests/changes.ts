@@ -1,4 +1,5 @@
 import type { BranchCars, DigestSignal, LateAction } from '#db/queries/digests';
+import type { Period } from '#shared/domain/period';
 import { tellSignal } from '#shared/domain/tell-signal';
 import type { DigestList } from './digest';
 import { counted, countedFirst, day, inList, whole } from './in-words';
@@ -7,13 +8,13 @@ import { counted, countedFirst, day, inList, whole } from './in-words';
 export interface Changes {
   today: string;
   /** Days whose changes are told, both included. */
-  from: string;
-  to: string;
+  days: Period;
+  /** Days whose cars are counted, both included. */
+  carsOf: Period;
   /** Names of the regions by code. */
   regions: Readonly<Record<string, string>>;
   signals: readonly DigestSignal[];
   late: readonly LateAction[];
-  /** Cars of the days told. */
   branches: readonly BranchCars[];
 }
 
@@ -21,19 +22,19 @@ export interface Changes {
 const MOST_TOLD = 8;
 
 /** Signals first noticed in the days told; one that ended in them too is told as over. */
-export function newOf({ signals, from, to }: Changes): DigestSignal[] {
+export function newOf({ signals, days: { from, to } }: Changes): DigestSignal[] {
   return signals.filter(
     ({ openedOn, overOn }) => openedOn >= from && openedOn <= to && !isOverBy(overOn, to),
   );
 }
 
 /** Signals that ended in the days told. */
-export function overOf({ signals, from, to }: Changes): DigestSignal[] {
+export function overOf({ signals, days: { from, to } }: Changes): DigestSignal[] {
   return signals.filter(({ overOn }) => overOn !== null && overOn >= from && overOn <= to);
 }
 
 /** Signals that stood at the end of the days told. */
-export function standingOf({ signals, to }: Changes): DigestSignal[] {
+export function standingOf({ signals, days: { to } }: Changes): DigestSignal[] {
   return signals.filter(({ openedOn, overOn }) => openedOn <= to && !isOverBy(overOn, to));
 }
 

@@ -20,8 +20,8 @@ export function regionDigest(changes: Changes): Digest | undefined {
   const fresh = newOf(changes).length;
   const over = overOf(changes).length;
   return {
-    subject: `Your regions since ${day(changes.from)}: ${counted(fresh, 'new signal', 'new signals')}, ${whole(over)} over`,
-    opening: `What changed in your regions from ${day(changes.from)} to ${day(changes.today)}.`,
+    subject: `Your regions since ${day(changes.days.from)}: ${counted(fresh, 'new signal', 'new signals')}, ${whole(over)} over`,
+    opening: `What changed in your regions from ${day(changes.days.from)} to ${day(changes.today)}.`,
     blocks: told.map((region) => blockOf(inRegion(changes, region), region)),
   };
 }
@@ -46,7 +46,7 @@ function pictureOf(changes: Changes): DigestPicture {
   }
   const most = Math.max(1, ...standing.values());
   return {
-    caption: `Signals that stand, and cars finished in ${weekWords(isoWeek(changes.from))}`,
+    caption: `Signals that stand, and cars finished in ${weekWords(isoWeek(changes.carsOf.from))}`,
     columns: ['Branch', 'Signals', 'Cars', 'Newest job'],
     rows: changes.branches.map(({ branch, branchName, cars, newestOn }) => {
       const signals = standing.get(branch) ?? 0;
