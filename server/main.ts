@@ -11,6 +11,7 @@ import { importDeskOf } from './import-desk-of';
 import type { Kit } from './kit';
 import { LiveFeed } from './live/live-feed';
 import { Outbox } from './mail/outbox';
+import { DigestRuns } from './schedule/digest-runs';
 import { ReportSchedule } from './schedule/report-schedule';
 import { photoStoreOf } from './storage/photo-store';
 import { PasswordThread } from './workers/password-thread';
@@ -56,6 +57,8 @@ async function main(): Promise<void> {
   kit.outbox.start();
   const schedule = new ReportSchedule(kit, log);
   schedule.start();
+  const digests = new DigestRuns(kit, log);
+  digests.start();
   const address = server.address();
   const port = typeof address === 'object' && address ? address.port : config.port;
   process.stdout.write(`\nUnderseam ${version} serves http://localhost:${port}\n${seeded}\n`);
@@ -65,6 +68,7 @@ async function main(): Promise<void> {
     kit.live.close();
     server.closeAllConnections();
     schedule.close();
+    digests.close();
     void Promise.all([
       kit.imports.close(),
       kit.reads.close(),

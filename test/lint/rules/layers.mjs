@@ -4,6 +4,7 @@ const HANDED = [
   'db/scope',
   'db/scoped-db',
   'db/accept-claim',
+  'db/action-writer',
   'db/accept-job',
   'db/branch-writer',
   'db/breaks-against-job',
@@ -11,6 +12,7 @@ const HANDED = [
   'db/claim-writer',
   'db/come-back-writer',
   'db/photo-writer',
+  'db/target-writer',
   'db/under-way-writer',
   'db/import-writer',
   'db/network-reference',
@@ -174,6 +176,7 @@ export const networkFeatures = [
   'sign-in',
   'network',
   'mailbox',
+  'digests',
   'audit',
   'warranty-reports',
 ];
