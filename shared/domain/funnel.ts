@@ -65,8 +65,7 @@ export function funnelReference(
     const e = total(own, (cell) => cell.e);
     const rate = sums(own, parts).map((a) => (e > 0 ? a / e : 0));
     rates.set(key, rate);
-    const r = compensatedSum(rate);
-    residuals.push(...own.map(({ aa, ae, ee }) => aa - 2 * r * ae + r * r * ee));
+    residuals.push(squaresAbout(own, compensatedSum(rate)));
   }
   const cars = total(cells, (cell) => cell.cars);
   const e = total(cells, (cell) => cell.e);
@@ -79,6 +78,11 @@ export function funnelReference(
     variance: cars > 1 ? Math.max(0, compensatedSum(residuals)) / (cars - 1) : undefined,
     parts,
   };
+}
+
+/** Σ (a − r·e)² over the cars of some cells. */
+export function squaresAbout(cells: readonly FunnelCell[], r: number): number {
+  return total(cells, ({ aa, ae, ee }) => aa - 2 * r * ae + r * r * ee);
 }
 
 /** Where the cells of one branch put it in the funnel (rules 42 to 44). */
