@@ -1,6 +1,7 @@
 import type { Knex } from 'knex';
 import type { CoverCell } from '#shared/domain/cover-cells';
 import type { FunnelCell } from '#shared/domain/funnel';
+import { compensatedSum } from '#shared/stats/compensated-sum';
 import { sql, type Connection, type Query } from './database';
 import {
   readFunnelCells,
@@ -128,7 +129,7 @@ export class NetworkReference {
       asked.products === 'apart' ? readProductParts(source, asked.filters).filter(isCounted) : [];
     return {
       kind: ofNetwork ? 'network' : 'scope',
-      cells: all.filter(isCounted).map(({ branchId: _, ...cell }) => cell),
+      cells: sumByKey(all.filter(isCounted)),
       products: products.map(({ key, productId, ml }) => ({ key, productId, ml })),
     };
   }
@@ -198,6 +199,24 @@ function everyJob(): Knex.QueryBuilder {
 /** Which cell it is, without whose. */
 function placeOf({ packageId, band, year }: CoverCell): Omit<CoverCell, 'days' | 'claims'> {
   return { packageId, band, year };
+}
+
+/** The cells of many branches as one a key. */
+function sumByKey(cells: readonly FunnelCell[]): FunnelCell[] {
+  const byKey = new Map<number, FunnelCell[]>();
+  for (const cell of cells) byKey.set(cell.key, [...(byKey.get(cell.key) ?? []), cell]);
+  return [...byKey].map(([key, own]) => {
+    const sum = (of: (cell: FunnelCell) => number): number => compensatedSum(own.map(of));
+    return {
+      key,
+      cars: sum(({ cars }) => cars),
+      e: sum(({ e }) => e),
+      parts: (own[0]?.parts ?? []).map((_, part) => sum(({ parts }) => parts[part] ?? 0)),
+      aa: sum(({ aa }) => aa),
+      ae: sum(({ ae }) => ae),
+      ee: sum(({ ee }) => ee),
+    };
+  });
 }
 
 function total(values: readonly number[]): number {

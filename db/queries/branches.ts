@@ -1,6 +1,8 @@
 import type { Knex } from 'knex';
 import { claimStanding } from '#shared/domain/claim-standing';
 import type { FunnelCell } from '#shared/domain/funnel';
+import { dayNumber } from '#shared/domain/calendar';
+import type { Period } from '#shared/domain/period';
 import { CoverBook, DAYS_A_YEAR } from '#shared/domain/warranty-cover';
 import {
   AGE_BANDS,
@@ -29,6 +31,8 @@ export interface FunnelAsked {
   today: string;
   /** Whether the products of the measure `product` are wanted one by one as well. */
   products?: 'apart';
+  /** Cover and claims of these days only, whenever a car was finished; else of all days up to today. */
+  within?: Period;
 }
 
 /** A cell of one branch. */
@@ -167,7 +171,13 @@ function summedCells(
 }
 
 /** Cover run by today in thousands of car-years, and counted claims by cause (rules 14 and 16). */
-function claimCells(source: FunnelSource, { filters, today }: FunnelAsked): BranchFunnelCell[] {
+function claimCells(
+  source: FunnelSource,
+  { filters: asked, today, within }: FunnelAsked,
+): BranchFunnelCell[] {
+  // Where it is tomorrow already, a branch may have finished cars that are under no cover yet.
+  const to = asked.to !== undefined && asked.to < today ? asked.to : today;
+  const filters = { ...asked, to };
   const book = new CoverBook(today);
   const cells = new Map<string, BranchFunnelCell & { days: number; parts: number[] }>();
   const cellOf = (branchId: number, key: number) => {
@@ -183,12 +193,15 @@ function claimCells(source: FunnelSource, { filters, today }: FunnelAsked): Bran
   for (const cars of readCoverByBranch(source, whereJobs(source.facts(), filters))) {
     for (let car = 0; car < cars.completedOn.length; car += 1) {
       const months = cars.warrantyMonths[car] as number;
-      const cover = book.coverOf(cars.completedOn[car] as string, months);
+      const completedOn = cars.completedOn[car] as string;
+      const cover = book.coverOf(completedOn, months);
       if (!cover) continue;
+      const days = within ? daysWithin(completedOn, cover.end, within) : cover.daysRun;
+      if (within && days === 0) continue;
       const key = (cars.packageIds[car] as number) * BANDS + (cars.bands[car] as number);
       const cell = cellOf(cars.branchId, key);
       cell.cars += 1;
-      cell.days += cover.daysRun;
+      cell.days += days;
     }
   }
   const made = readCoveredClaims(
@@ -200,11 +213,19 @@ function claimCells(source: FunnelSource, { filters, today }: FunnelAsked): Bran
   for (const claim of made) {
     const end = book.coverOf(claim.completedOn, claim.warrantyMonths)?.end;
     if (claimStanding(claim, end, today) !== 'counted') continue;
+    if (within && (claim.madeOn < within.from || claim.madeOn > within.to)) continue;
     const { parts } = cellOf(claim.branchId, claim.packageId * BANDS + claim.band);
     const cause = placeOf(claim.cause);
     parts[cause] = (parts[cause] as number) + 1;
   }
   return [...cells.values()].map(({ days, ...cell }) => ({ ...cell, e: days / DAYS }));
+}
+
+/** Days of the cover (completedOn, end] that lie in a stretch. */
+function daysWithin(completedOn: string, end: string, { from, to }: Period): number {
+  const first = completedOn < from ? dayNumber(from) : dayNumber(completedOn) + 1;
+  const last = dayNumber(end < to ? end : to);
+  return Math.max(0, last - first + 1);
 }
 
 function placeOf(cause: ClaimCause): number {

@@ -114,7 +114,7 @@ function claimWeeks(
         weeks: weeks.map(({ week }, place) => ({
           week,
           cars: cars[place] ?? 0,
-          value: claims[place] ?? 0,
+          value: (cars[place] ?? 0) > 0 ? (claims[place] ?? 0) : null,
           signal: null,
         })),
       },

@@ -1,9 +1,8 @@
 import { scopedFunnelSource } from '#db/queries/branches';
-import type { JobFilters } from '#db/queries/job-filters';
 import { readCoverByBranch, readCoveredClaims } from '#db/queries/warranty';
 import type { ScopedDb } from '#db/scoped-db';
 import { claimStanding } from '#shared/domain/claim-standing';
-import { whereJobs } from '#db/queries/job-filters';
+import { whereJobs, type JobFilters } from '#db/queries/job-filters';
 import { warrantyEnd } from '#shared/domain/warranty-cover';
 
 /** A stretch of days, both ends included. */
@@ -12,7 +11,7 @@ interface Days {
   to: string;
 }
 
-/** Counted claims made in each stretch, and cars under warranty on a day of it, whenever they were finished. */
+/** Counted claims made in each stretch, and cars under warranty on a day of it that has come, whenever they were finished. */
 export interface ClaimsOfDays {
   claims: number[];
   cars: number[];
@@ -48,9 +47,14 @@ export function claimsByDays(
       const months = cars.warrantyMonths[car] as number;
       if (months === 0) return;
       const end = endOf(completedOn, months);
-      stretches.forEach(({ from, to }, place) => {
-        if (completedOn <= to && end > from) counts[place] = (counts[place] as number) + 1;
-      });
+      // Stretches follow one another: those under cover are a run of them.
+      const first = stretches.findIndex(({ to }) => completedOn <= to);
+      if (first < 0) return;
+      for (let place = first; place < stretches.length; place += 1) {
+        const { from } = stretches[place] as Days;
+        if (end < from || today < from) break;
+        counts[place] = (counts[place] as number) + 1;
+      }
     });
   }
   const made = readCoveredClaims(

@@ -97,7 +97,7 @@ const PARTS: Readonly<Record<BranchMeasure, readonly string[]>> = {
   margin: MARGIN_PARTS,
 };
 
-/** Cells whose one part is dealt out to the products it is made of; a cell of the reference may stand there once for each branch. */
+/** Cells whose one part is dealt out to the products it is made of. */
 function withProducts(
   cells: readonly FunnelCell[],
   lines: readonly { key: number; productId: number; ml: number }[],
@@ -111,12 +111,7 @@ function withProducts(
     byKey.set(key, parts);
   }
   const none = products.map(() => 0);
-  const first = new Set<number>();
-  return cells.map((cell) => {
-    const parts = first.has(cell.key) ? none : (byKey.get(cell.key) ?? none);
-    first.add(cell.key);
-    return { ...cell, parts };
-  });
+  return cells.map((cell) => ({ ...cell, parts: byKey.get(cell.key) ?? none }));
 }
 
 function codeOf(codes: ReadonlyMap<number, string> | undefined, id: number): string {
