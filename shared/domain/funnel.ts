@@ -98,12 +98,14 @@ export function placeInFunnel(
   const given = cells.map((cell) =>
     (reference.rates.get(cell.key) ?? []).map((rate) => rate * cell.e),
   );
-  const own = told ? sums(cells, parts).map((a) => a / e) : [];
+  const counted = sums(cells, parts);
+  const own = told ? counted.map((a) => a / e) : [];
   const expectedParts =
     e > 0 && enough
       ? own.map((_, part) => compensatedSum(given.map((one) => one[part] ?? 0)) / e)
       : [];
-  const value = told ? compensatedSum(own) : undefined;
+  // Of the sum, not of its parts' quotients: all cars of seven are 1, not a hair less.
+  const value = told ? compensatedSum(counted) / e : undefined;
   const expected = e > 0 && enough ? compensatedSum(expectedParts) : undefined;
   const limits = expected === undefined ? undefined : limitsAbout(expected, { cars, e, reference });
   return {
@@ -178,11 +180,16 @@ function scaled(
 /** Rule 44: outside is strict, and the wider limits are told first. */
 function flagOf(value: number | undefined, limits: FunnelLimits | undefined): FunnelFlag {
   if (value === undefined || !limits) return 'too_few';
-  if (value < limits.lower998) return 'below_998';
-  if (value > limits.upper998) return 'above_998';
-  if (value < limits.lower95) return 'below_95';
-  if (value > limits.upper95) return 'above_95';
+  if (isBelow(value, limits.lower998)) return 'below_998';
+  if (isBelow(limits.upper998, value)) return 'above_998';
+  if (isBelow(value, limits.lower95)) return 'below_95';
+  if (isBelow(limits.upper95, value)) return 'above_95';
   return 'as_expected';
+}
+
+/** Below by more than rounding: where cars differ in nothing, limits and value are the same figure summed in two ways. */
+function isBelow(one: number, other: number): boolean {
+  return other - one > 1e-12 * Math.max(Math.abs(one), Math.abs(other));
 }
 
 function sums(cells: readonly FunnelCell[], parts: number): number[] {
