@@ -106,12 +106,12 @@ export function readDigestSignals(db: ScopedDb, overSince: string): DigestSignal
         .join('branches', 'branches.id', 'signals.branch_id')
         .join('regions', 'regions.id', 'branches.region_id')
         .whereRaw('(over_on is null or over_on >= ?)', [overSince])
-        .orderBy(['branches.code', 'opened_on', 'signals.id'])
+        .orderBy(['branches.code', 'signals.opened_on', 'signals.id'])
         .select('kind', 'measure', 'since', 'strength', 'facts', 'cars', {
           branch: 'branches.code',
           branchName: 'branches.name',
           region: 'regions.code',
-          openedOn: 'opened_on',
+          openedOn: 'signals.opened_on',
           overOn: 'over_on',
         }),
     )

@@ -2,7 +2,7 @@ import type { BranchCars, DigestSignal, LateAction } from '#db/queries/digests';
 import type { Period } from '#shared/domain/period';
 import { tellSignal } from '#shared/domain/tell-signal';
 import type { DigestList } from './digest';
-import { counted, countedFirst, day, inList, whole } from './in-words';
+import { countedFirst, countedThen, day, inList, whole } from './in-words';
 
 /** What stands and what changed in the branches of a scope. */
 export interface Changes {
@@ -64,7 +64,7 @@ export function sayChanges(changes: Changes): string[] {
   const outside = namesOf(standing.filter(({ kind }) => kind === 'left_funnel'));
   const { late } = changes;
   return [
-    `${countedFirst(fresh.length, 'signal is new', 'signals are new')}, ${counted(over.length, 'is', 'are')} over, ${counted(standing.length, 'stands', 'stand')}.`,
+    `${countedFirst(fresh.length, 'signal is new', 'signals are new')}, ${countedThen(over.length, 'is', 'are')} over and ${countedThen(standing.length, 'stands', 'stand')}.`,
     silent.length > 0
       ? `No jobs arrive from ${inList(silent)}.`
       : 'Jobs arrive from every branch as they usually do.',

@@ -25,6 +25,11 @@ export function countedFirst(count: number, one: string, many: string): string {
   return count === 0 ? `No ${one}` : counted(count, one, many);
 }
 
+/** The same further on in a sentence, where nothing is `none`: `none is over`. */
+export function countedThen(count: number, one: string, many: string): string {
+  return count === 0 ? `none ${one}` : counted(count, one, many);
+}
+
 /** A share to whole per cent: `38 %`, with the narrow space of the pages. */
 export function percent(share: number, digits = 0): string {
   return `${figure(share * 100, digits)}${NARROW}%`;
@@ -55,7 +60,12 @@ export function minutes(value: number): string {
 
 /** An ISO week: `Week 5, 2026`. */
 export function weekWords(week: string): string {
-  return `Week ${Number(week.slice(6))}, ${week.slice(0, 4)}`;
+  return `${weekNumber(week)}, ${week.slice(0, 4)}`;
+}
+
+/** An ISO week without its year: `Week 5`. */
+export function weekNumber(week: string): string {
+  return `Week ${Number(week.slice(6))}`;
 }
 
 /** A day: `28 January 2026`. */

@@ -10,7 +10,7 @@ import {
   type Changes,
 } from './changes';
 import type { Digest, DigestBlock, DigestPicture } from './digest';
-import { counted, countedFirst, day, monthWords, percent, whole } from './in-words';
+import { counted, countedFirst, countedThen, day, monthWords, percent, whole } from './in-words';
 
 /** What head office is told of a month. */
 export interface MonthFigures {
@@ -49,7 +49,7 @@ function networkBlock(
     heading: 'The network',
     sentences: [
       sayCars(changes.branches, month),
-      `${countedFirst(fresh ?? 0, 'signal was new', 'signals were new')}, ${counted(over ?? 0, 'was', 'were')} over and ${counted(standing ?? 0, 'stood', 'stood')} at its end.`,
+      `${countedFirst(fresh ?? 0, 'signal was new', 'signals were new')}, ${countedThen(over ?? 0, 'was', 'were')} over and ${countedThen(standing ?? 0, 'stood', 'stood')} at its end.`,
       issued.length === 0
         ? 'No warranty-risk report was issued.'
         : `${countedFirst(issued.length, 'warranty-risk report was', 'warranty-risk reports were')} issued: ${issued.map(({ asOf }) => `as of ${day(asOf)}`).join(', ')}.`,

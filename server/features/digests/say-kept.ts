@@ -1,12 +1,12 @@
 import type { MarginWeek } from '#shared/contracts/margin';
-import { counted, percent, percentRange, weekWords } from './in-words';
+import { counted, percent, percentRange, weekNumber } from './in-words';
 import type { WeekFigures } from './week-digest';
 
 /** What a week kept of what it billed, against its usual range and its target; or why that cannot be said. */
 export function sayKept(figures: WeekFigures): string {
   const { week, weeks, costed } = figures;
   const last = weeks.at(-1);
-  const name = weekWords(week);
+  const name = weekNumber(week);
   if (!last || last.jobs === 0) return `No car was finished in ${lowerFirst(name)}.`;
   if (last.jobs === last.unbilled) {
     return `${name} finished ${counted(last.jobs, 'car', 'cars')} and has billed none of them yet.`;
@@ -28,7 +28,7 @@ function keptOf(
   cars: string,
 ): string {
   const digits = limits ? digitsFor(share, limits) : 0;
-  const kept = `${weekWords(week)} kept ${percent(share, digits)} of what it billed (${cars})`;
+  const kept = `${weekNumber(week)} kept ${percent(share, digits)} of what it billed (${cars})`;
   const target = againstTarget(share, targetMarginShare);
   if (!limits) {
     const unknown = 'what is usual here can be said once 8 earlier weeks are billed';

@@ -69,7 +69,7 @@ function blockOf(figures: WeekFigures): DigestBlock {
 
 function sayWaiting({ unbilled, oldestUnbilledOn, dangerousDue, signals }: Waiting, today: string) {
   const oldest =
-    oldestUnbilledOn === null ? '' : ` (the oldest ${daysApart(oldestUnbilledOn, today)})`;
+    oldestUnbilledOn === null ? '' : ` (the oldest for ${daysApart(oldestUnbilledOn, today)})`;
   const parts = [
     ...(dangerousDue > 0
       ? [counted(dangerousDue, 'dangerous come-back due', 'dangerous come-backs due')]

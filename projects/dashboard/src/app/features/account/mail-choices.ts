@@ -6,7 +6,7 @@ import { Api } from '../../core/api/api';
 import { deed } from '../../core/api/deed';
 import { LoadState } from '../../ui/load-state/load-state';
 import { Trouble } from '../../ui/trouble/trouble';
-import { MAIL_WORDS } from './mail-words';
+import { MAIL_WORDS } from '../../ui/mail-words';
 
 /** Which mails one wants: a tick each, kept as soon as it is set. */
 @Component({
