@@ -23,6 +23,9 @@ const USUAL_DAYS = 28;
   imports: [ActionForm, LoadState],
   templateUrl: './agree-page.html',
   styles: `
+    .us-column {
+      padding-top: 24px;
+    }
     .about {
       max-width: 720px;
       margin-bottom: 16px;

@@ -19,20 +19,14 @@ export interface EffectPicture {
   readonly rows: readonly EffectRow[];
 }
 
-/** Marks offered to the axis, in the unit of the measure. */
-const MARKS: Readonly<Record<BranchMeasure, readonly number[]>> = {
-  overrun: [0.8, 0.9, 1, 1.1, 1.2, 1.3, 1.4, 1.6, 2],
-  rot: [0, 0.1, 0.2, 0.3, 0.4, 0.5, 0.6, 0.8, 1],
-  claims: [0, 5, 10, 20, 30, 40, 60, 80, 120],
-  product: [0.6, 0.7, 0.8, 0.9, 1, 1.1, 1.2, 1.3, 1.5],
-  margin: [0, 0.1, 0.2, 0.3, 0.4, 0.5, 0.6, 0.8],
-};
-
 /** Turns an effect into its picture; nothing to draw where neither side has enough cars. */
 export function effectPicture(effect: ActionEffect): EffectPicture | undefined {
   const { measure, before, after, reference } = effect;
   if (before.value === null && after.value === null) return undefined;
   const unit = MEASURE_UNITS[measure];
+  const drawn = [before, after]
+    .flatMap(({ value, lower, upper, expected }) => [value, lower, upper, expected])
+    .filter((one) => one !== null);
   return {
     heading: `${unit.charAt(0).toUpperCase()}${unit.slice(1)}: before and after`,
     note: `Dot and 95 % interval as counted; tick: what ${reference === 'network' ? 'the network’s' : 'your branches’'} rates by age and package give for those cars.`,
@@ -44,15 +38,10 @@ export function effectPicture(effect: ActionEffect): EffectPicture | undefined {
       ],
       scale: 'linear',
       reference: null,
-      marks: thinned(
-        MARKS[measure],
-        [before, after].flatMap(({ value, lower, upper, expected }) => [
-          value,
-          lower,
-          upper,
-          expected,
-        ]),
-      ).map((value) => ({ value, text: formatMeasure(measure, value) })),
+      marks: marksBetween(measure, drawn).map((value) => ({
+        value,
+        text: formatMeasure(measure, value),
+      })),
     },
     columns: columnsOf(measure),
     rows: [
@@ -62,12 +51,24 @@ export function effectPicture(effect: ActionEffect): EffectPicture | undefined {
   };
 }
 
-/** At most five marks, those that lie where something is drawn. */
-function thinned(marks: readonly number[], drawn: readonly (number | null)[]): readonly number[] {
-  const values = drawn.filter((one) => one !== null);
-  const inside = marks.filter((one) => one >= Math.min(...values) && one <= Math.max(...values));
-  const step = Math.ceil(inside.length / 5);
-  return inside.filter((_one, index) => index % Math.max(1, step) === 0);
+/** Distances between marks: of shares and ratios, and of claims per 1,000 car-years. */
+const SHARE_STEPS = [0.02, 0.05, 0.1, 0.2, 0.5, 1, 2] as const;
+const CLAIM_STEPS = [1, 2, 5, 10, 20, 50, 100, 200] as const;
+const MOST_MARKS = 5;
+
+/** Round marks where something is drawn, at most five. */
+function marksBetween(measure: BranchMeasure, drawn: readonly number[]): number[] {
+  const low = Math.min(...drawn);
+  const high = Math.max(...drawn);
+  for (const step of measure === 'claims' ? CLAIM_STEPS : SHARE_STEPS) {
+    const first = Math.ceil(low / step);
+    const last = Math.floor(high / step);
+    if (last - first < MOST_MARKS) {
+      const count = Math.max(0, last - first + 1);
+      return Array.from({ length: count }, (_, at) => Number(((first + at) * step).toFixed(4)));
+    }
+  }
+  return [];
 }
 
 function intervalRow(
