@@ -73,8 +73,9 @@ export class ModelsTable {
   protected readonly count = formatCount;
   protected readonly sort = signal<TableSort | undefined>(FIRST_SORT);
   /** Another age begins short again. */
-  protected readonly extent = linkedSignal<ModelsView, 'first' | 'all'>({
-    source: this.view,
+  protected readonly extent = linkedSignal<string, 'first' | 'all'>({
+    // By what the table is about: a newer answer to the same question folds nothing up.
+    source: () => this.view().heading,
     computation: () => 'first',
   });
   private readonly sorted = computed(() =>
