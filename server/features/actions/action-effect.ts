@@ -3,21 +3,10 @@ import type { NetworkReference } from '#db/network-reference';
 import type { ScopedDb } from '#db/scoped-db';
 import type { ActionEffect, WatchedSide } from '#shared/contracts/actions';
 import { addDays } from '#shared/domain/calendar';
-import {
-  funnelReference,
-  placeInFunnel,
-  squaresAbout,
-  type FunnelCell,
-  type FunnelPlace,
-  type FunnelReference,
-} from '#shared/domain/funnel';
+import { funnelReference, type FunnelCell } from '#shared/domain/funnel';
 import type { Period } from '#shared/domain/period';
-import { FEWEST_CARS } from '#shared/domain/small-samples';
 import type { BranchMeasure } from '#shared/domain/vocabulary';
-import { differenceInterval, type Estimate } from '#shared/stats/difference-interval';
-import { Z_95 } from '#shared/stats/normal-distribution';
-import { poissonInterval } from '#shared/stats/poisson-interval';
-import { wilsonInterval } from '#shared/stats/wilson-interval';
+import { watchedEffect, type WatchedFigures } from '#shared/domain/watched-effect';
 
 /** Which measure of the scope's branch to watch, and since when. */
 export interface EffectAsked {
@@ -29,117 +18,51 @@ export interface EffectAsked {
 /** What a side lasts, half a year at most. */
 const SIDE_DAYS = 26 * 7;
 
-/** A side of an action with all that its cars are compared by. */
-interface Side {
-  period: Period;
-  cells: readonly FunnelCell[];
-  place: FunnelPlace;
-  reference: FunnelReference;
-}
-
 /**
- * A measure of one branch before and after an action. Both sides are compared with one set of rates, those of the reference over
- * both of them, so that other cars than before are no effect. The interval is of the difference of the two sides' distances from
- * what their cars lead one to expect. One snapshot of the database.
+ * A measure of one branch before and after an action, compared with the rates of the reference over both sides together. One
+ * snapshot of the database.
  */
 export function actionEffect(
   db: ScopedDb,
   { measure, agreedOn, today }: EffectAsked,
   network: NetworkReference,
 ): ActionEffect {
+  const before = { from: addDays(agreedOn, -SIDE_DAYS), to: addDays(agreedOn, -1) };
+  const after = { from: agreedOn, to: least(today, addDays(agreedOn, SIDE_DAYS - 1)) };
+  const both = { from: before.from, to: after.to };
   return db.snapshot(() => {
-    const [before, after] = [
-      { from: addDays(agreedOn, -SIDE_DAYS), to: addDays(agreedOn, -1) },
-      { from: agreedOn, to: least(today, addDays(agreedOn, SIDE_DAYS - 1)) },
-    ];
-    const { kind, cells } = network.funnelCells(
-      askedOf(measure, { from: before.from, to: after.to }, today),
-    );
-    const reference = funnelReference(measure, cells);
-    const sideOf = (period: Period): Side => {
-      const own = readFunnelCells(scopedFunnelSource(db), askedOf(measure, period, today));
-      return { period, cells: own, place: placeInFunnel(own, reference), reference };
-    };
-    const [was, is] = [sideOf(before), sideOf(after)];
-    const [distanceBefore, distanceAfter] = [distanceOf(was), distanceOf(is)];
-    const change =
-      distanceBefore && distanceAfter && differenceInterval(distanceAfter, distanceBefore);
+    const { kind, cells } = network.funnelCells(askedOf(measure, both, today));
+    const own = (period: Period): FunnelCell[] =>
+      readFunnelCells(scopedFunnelSource(db), askedOf(measure, period, today));
+    const effect = watchedEffect(funnelReference(measure, cells), own(before), own(after));
     return {
       measure,
       reference: kind,
-      before: tellSide(was),
-      after: tellSide(is),
-      change: change?.value ?? null,
-      lower: change?.lower ?? null,
-      upper: change?.upper ?? null,
+      before: tellSide(before, effect.before),
+      after: tellSide(after, effect.after),
+      change: effect.change?.value ?? null,
+      lower: effect.change?.lower ?? null,
+      upper: effect.change?.upper ?? null,
     };
   });
 }
 
-/** Cars finished in a period; of claims, cover and claims in it, whenever the car was finished. */
+/** Cars finished in a period; of claims, cover run and claims made in it, whenever the car was finished. */
 function askedOf(measure: BranchMeasure, period: Period, today: string): FunnelAsked {
   return measure === 'claims'
     ? { measure, filters: {}, today, within: period }
     : { measure, filters: period, today };
 }
 
-/** Below five cars neither value nor interval is told, of no measure: a before and after of four cars says nothing (rule 13). */
-function tellSide(side: Side): WatchedSide {
-  const { period, place } = side;
-  const value = place.cars < FEWEST_CARS ? undefined : valueOf(side);
+function tellSide(period: Period, { cars, value, expected }: WatchedFigures): WatchedSide {
   return {
     ...period,
-    cars: place.cars,
+    cars,
     value: value?.value ?? null,
     lower: value?.lower ?? null,
     upper: value?.upper ?? null,
-    expected: place.expected ?? null,
+    expected: expected ?? null,
   };
-}
-
-/** The value of a side with its 95 % interval: Wilson of a share, Garwood of a rate, the ratio estimator's of a ratio (rule 26). */
-function valueOf(side: Side): Estimate | undefined {
-  const { cells, place, reference } = side;
-  const { value, cars, e } = place;
-  if (value === undefined) return undefined;
-  if (reference.measure === 'rot') {
-    const interval = wilsonInterval(Math.round(value * cars), cars);
-    return interval && { value, lower: interval.lower, upper: interval.upper };
-  }
-  if (reference.measure === 'claims') {
-    const { lower, upper } = poissonInterval(Math.round(value * e));
-    return { value, lower: lower / e, upper: upper / e };
-  }
-  return about(value, squaresAbout(cells, value), place);
-}
-
-/** How far a side lies from what its cars lead one to expect. */
-function distanceOf(side: Side): Estimate | undefined {
-  const { cells, place, reference } = side;
-  const { expected, value, cars } = place;
-  const told = valueOf(side);
-  if (cars < FEWEST_CARS || !told || expected === undefined || value === undefined) {
-    return undefined;
-  }
-  const distance = value - expected;
-  if (reference.measure === 'rot' || reference.measure === 'claims') {
-    return { value: distance, lower: told.lower - expected, upper: told.upper - expected };
-  }
-  // What is left of a car's figure when its cell's rate and the branch's own distance are taken off.
-  const squares = cells.map((cell) => {
-    const rate = (reference.rates.get(cell.key) ?? []).reduce((sum, part) => sum + part, 0);
-    return squaresAbout([cell], rate + distance);
-  });
-  return about(
-    distance,
-    squares.reduce((sum, one) => sum + one, 0),
-    place,
-  );
-}
-
-function about(value: number, squares: number, { cars, e }: FunnelPlace): Estimate {
-  const error = Math.sqrt(Math.max(0, squares) / (cars * (cars - 1))) / (e / cars);
-  return { value, lower: value - Z_95 * error, upper: value + Z_95 * error };
 }
 
 function least(one: string, other: string): string {
