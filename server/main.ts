@@ -13,6 +13,7 @@ import { LiveFeed } from './live/live-feed';
 import { Outbox } from './mail/outbox';
 import { DigestRuns } from './schedule/digest-runs';
 import { ReportSchedule } from './schedule/report-schedule';
+import { SignalLooks } from './schedule/signal-looks';
 import { photoStoreOf } from './storage/photo-store';
 import { PasswordThread } from './workers/password-thread';
 import { ReadPool } from './workers/read-pool';
@@ -58,6 +59,8 @@ async function main(): Promise<void> {
   const schedule = new ReportSchedule(kit, log);
   schedule.start();
   const digests = new DigestRuns(kit, log);
+  const looks = new SignalLooks(kit, log, digests);
+  looks.start();
   digests.start();
   const address = server.address();
   const port = typeof address === 'object' && address ? address.port : config.port;
@@ -68,6 +71,7 @@ async function main(): Promise<void> {
     kit.live.close();
     server.closeAllConnections();
     schedule.close();
+    looks.close();
     digests.close();
     void Promise.all([
       kit.imports.close(),

@@ -22,6 +22,7 @@ import { laterArrivals } from '#db/queries/later-arrivals';
 import { countReferrers } from '#db/queries/referrers';
 import type { ReadName, ReadTasks } from './read-tasks';
 import { changesOf, monthFigures, weekFigures } from './digest-figures';
+import { signalLook } from './signal-look';
 import { warrantyReport, warrantyReportParts, warrantyReportPdf } from './warranty-report';
 
 /** Every answer a worker knows, by name; only those with a network figure take the reference. */
@@ -60,6 +61,7 @@ const ANSWERS: {
   effect: effectOfChange,
   normMedians,
   referrers: countReferrers,
+  signalLook,
 };
 
 /** Answers a question from one reader's rows. */

@@ -19,6 +19,8 @@ import type { Changes } from '../features/digests/changes';
 import type { MonthFigures } from '../features/digests/month-digest';
 import type { WeekFigures } from '../features/digests/week-digest';
 import type { ChangesAsked, WeekAsked } from './digest-figures';
+import type { FoundSignal } from '../features/signals/found-signal';
+import type { LookQuestion } from './signal-look';
 import type { ReportParts, ReportQuestion } from './warranty-report';
 import type { CatalogueRow, Referrers } from '#db/queries/referrers';
 import type { OutOf } from '#shared/contracts/endpoint';
@@ -74,6 +76,7 @@ export interface ReadTasks {
   effect: { input: EffectQuestion; output: Effect };
   normMedians: { input: MediansQuestion; output: OutOf<typeof getNormMedians> };
   referrers: { input: CatalogueRow; output: Referrers };
+  signalLook: { input: LookQuestion; output: FoundSignal[] };
   auditCheck: { input: null; output: AuditChain };
 }
 

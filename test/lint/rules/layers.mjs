@@ -12,6 +12,7 @@ const HANDED = [
   'db/claim-writer',
   'db/come-back-writer',
   'db/photo-writer',
+  'db/signal-writer',
   'db/target-writer',
   'db/under-way-writer',
   'db/import-writer',

@@ -22,6 +22,7 @@ export const ACTION_WORDS: Readonly<Record<string, string>> = {
   'claim.make': 'took down a claim',
   'claim.correct': 'corrected a claim',
   'come-back.mark': 'marked what was left on a car',
+  'signal.acknowledge': 'took note of a signal',
   'week.note': 'wrote the note on a week',
   'action.agree': 'agreed an action with a branch',
   'action.change': 'changed an action, ended it or took it up again',
