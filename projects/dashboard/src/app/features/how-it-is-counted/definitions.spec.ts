@@ -47,11 +47,13 @@ describe('definitions', () => {
       'fee',
       'expected-margin',
     ],
-    ...['bridge', 'weekly-chart', 'signals', 'trend', 'unbilled', 'beyond-charged', 'overrun'],
+    ...['bridge', 'weekly-chart', 'marked-weeks', 'trend', 'unbilled', 'beyond-charged', 'overrun'],
     ...['overrun-interval', 'quantiles', 'allowance', 'age-band', 'rot', 'without-cost'],
     ...['product-use', 'under-and-over', 'ratio-to-norm', 'product-temperature', 'coming-need'],
     ...['claims-counted', 'claim-rate', 'claim-free', 'log-rank', 'still-to-come'],
     ...['against-expected', 'process-risk', 'thin-product', 'warranty-report', 'warranty-left-out'],
+    ...['funnel', 'side-by-side', 'branch-weeks', 'received-through', 'targets', 'signals'],
+    ...['false-alarms', 'action-effect'],
     ...['small-samples', 'weeks', 'rounding', 'scope'],
   ])('a figure shown so far, %s: it is defined', (id) => {
     expect(ids).toContain(id);

@@ -1,3 +1,4 @@
+import { branchDefinitions } from './branch-definitions';
 import { comeBackDefinitions } from './come-back-definitions';
 import type { Definition, DefinitionGroup } from './definition';
 import { labourDefinitions } from './labour-definitions';
@@ -6,6 +7,7 @@ import { productDefinitions } from './product-definitions';
 import { quoteDefinitions } from './quote-definitions';
 import { readingDefinitions } from './reading-definitions';
 import { rotDefinitions } from './rot-definitions';
+import { signalDefinitions } from './signal-definitions';
 import { warrantyDefinitions } from './warranty-definitions';
 import { weeklyDefinitions } from './weekly-definitions';
 
@@ -17,6 +19,8 @@ export const DEFINITION_GROUPS: readonly DefinitionGroup[] = [
   { id: 'rot-found', title: 'Rot', definitions: rotDefinitions },
   { id: 'product', title: 'Product', definitions: productDefinitions },
   { id: 'warranty', title: 'Warranty', definitions: warrantyDefinitions },
+  { id: 'branches', title: 'Comparing branches', definitions: branchDefinitions },
+  { id: 'noticing', title: 'Noticing in time', definitions: signalDefinitions },
   { id: 'come-backs', title: 'Left on cars', definitions: comeBackDefinitions },
   { id: 'quotes', title: 'The next car', definitions: quoteDefinitions },
   { id: 'reading', title: 'What counts, and how it is shown', definitions: readingDefinitions },

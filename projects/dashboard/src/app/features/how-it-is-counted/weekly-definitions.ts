@@ -18,7 +18,7 @@ export const weeklyDefinitions: readonly Definition[] = [
       'Individuals and moving-range chart: W. A. Shewhart, Economic Control of Quality of Manufactured Product, 1931; D. J. Wheeler and D. S. Chambers, Understanding Statistical Process Control, 2nd ed. 1992. 1.128 is d₂ for ranges of two, 2/√π (ISO 7870-2:2013). The span of 26 weeks and the least of 8 are this product’s own.',
   },
   {
-    id: 'signals',
+    id: 'marked-weeks',
     title: 'Marked weeks',
     means:
       'A diamond: the week lies beyond a limit, and a reason is worth looking for. A triangle: at least the 8th billed week running on one side of the centre; something has shifted.',
