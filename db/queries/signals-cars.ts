@@ -75,7 +75,7 @@ const MOVES: Record<BranchMeasure, { counted: string; by: string }> = {
   rot: { counted: '1 = 1', by: 'has_rot' },
   claims: {
     counted: 'exists (select 1 from json_each(?) as made where made.value = job_facts.job_id)',
-    by: '0',
+    by: 'completed_on',
   },
   product: { counted: 'norm_ml > 0', by: 'normed_ml - norm_ml' },
   margin: { counted: 'billed = 1 and costed = 1', by: 'margin_cents' },
