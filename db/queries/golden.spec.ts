@@ -1,11 +1,16 @@
 import { mkdirSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
-import { COME_BACK_STATUSES, type ComeBackStatus } from '#shared/domain/vocabulary';
+import {
+  COME_BACK_STATUSES,
+  type BranchMeasure,
+  type ComeBackStatus,
+} from '#shared/domain/vocabulary';
 import { SmallStore } from '../../test/support/small-store';
 import { Connection } from '../database';
 import { NetworkReference } from '../network-reference';
 import { ScopedDb } from '../scoped-db';
 import type { JobFilters } from './job-filters';
+import { countActions, findAction, isSignal, listActionRows } from './actions';
 import { iterateClaimRows, listClaimRows, sumClaims, type ClaimFilters } from './claim-list';
 import { listClaimRevisions } from './claims';
 import { iterateLeft, listLeft } from './come-back';
@@ -31,10 +36,15 @@ import {
   sumUncosted,
 } from './products';
 import { findLastTime } from './last-time';
+import { readTargets } from './targets';
 import { listUnderWay } from './under-way';
 import { listPhotos } from './photos';
 import { readUsualFigures } from './usual';
 import { countRungs, readQuoteFigures, scopedSource, type QuotedCar } from './quote';
+import { readReceivedThrough } from './received-through';
+import { countCosted } from './count-costed';
+import { readBranchWeeks } from './branch-weeks';
+import { readFunnelCells, readProductParts, scopedFunnelSource } from './branches';
 import { readClimates, readRotCars, readSpellings } from './rot';
 import { readClaims, readWarrantyCars } from './warranty';
 import { laterArrivals } from './later-arrivals';
@@ -85,6 +95,7 @@ const READS: Record<
   string,
   (db: ScopedDb, filters: JobFilters, network: NetworkReference) => unknown
 > = {
+  'count-actions': (db) => countActions(db, { states: ['agreed'] }, '2026-01-05'),
   'count-bookings': (db, filters) => countBookings(db, PERIOD, filters),
   'count-branch-cells': countBranchCells,
   'count-branch-weeks': countBranchWeeks,
@@ -92,8 +103,10 @@ const READS: Record<
   'count-jobs-by-use': (db) => countJobs(db, { productId: 1, productUse: 'under' }),
   'count-rungs': (db) => countRungs(scopedSource(db), CAR),
   'count-jobs': (db) => countJobs(db, LISTED),
+  'find-action': (db) => findAction(db, 1),
   'find-import': (db) => findImport(db, 'AAA', 'x'),
   'find-last-time': (db) => findLastTime(db, { packageId: 1, bodyType: 'van', upTo: '2026-01-05' }),
+  'is-signal': (db) => isSignal(db, 1),
   'iterate-job-rows': (db) => [...iterateJobRows(db, {}, 'completed')],
   'iterate-left': (db, filters) => [...iterateLeft(db, filters, statusesOf(filters))],
   'later-arrivals': (db) =>
@@ -102,6 +115,9 @@ const READS: Record<
       { asOf: '2026-01-31', received: { jobRevision: 1, claimRevision: 1, event: 1 } },
       200,
     ),
+  'list-action-rows': (db) => listActionRows(db, { states: ['agreed'] }, null, 51),
+  'list-action-rows-after-a-place': (db) =>
+    listActionRows(db, { states: ['agreed'] }, { ended: 0, key: '2026-01-05', id: 1 }, 51),
   'list-billed-weeks': (db, filters) => listBilledWeeks(db, filters, 26),
   'list-branch-lives': listBranchLives,
   'iterate-claim-rows': (db, filters) => [...iterateClaimRows(db, filters, '2026-01-05', 'made')],
@@ -133,23 +149,37 @@ const READS: Record<
   'list-uncosted-products': listUncostedProducts,
   'list-under-way': (db) => listUnderWay(db, 1),
   'list-week-notes': (db) => listWeekNotes(db, '2026-W01', '2026-W05'),
+  'network-funnel-cells-of-claims': (_db, filters, network) =>
+    network.funnelCells({ measure: 'claims', filters, today: '2026-02-02' }),
+  'network-funnel-cells-of-product': (_db, filters, network) =>
+    network.funnelCells({ measure: 'product', filters, today: '2026-02-02', products: 'apart' }),
   'network-rot-bands': (_db, filters, network) => network.rotBands(filters).bands,
   'network-quote-counts': (_db, _filters, network) => network.nearestQuoteSet(CAR, ['age'], 30),
   'network-warranty-cells': (_db, filters, network) => network.warrantyCells(filters, '2026-02-02'),
   'package-codes': packageCodes,
+  'count-costed': countCosted,
+  'read-branch-weeks': (db, filters) => readBranchWeeks(db, 'margin', filters),
   'read-by-branch': (db, filters) => readByKey(db, filters, 'branch'),
   'read-by-month': (db, filters) => readByKey(db, filters, 'month'),
   'read-by-stage': readByStage,
   'read-climates': (db) => readClimates(db, db.scope.echo().regions),
   'read-claims': (db) => readClaims(db, '2026-02-02'),
   'read-costs-of-day': (db) => readCostsOfDay(db, '2026-01-05'),
+  'read-funnel-cells-of-claims': (db, filters) => readFunnel(db, 'claims', filters),
+  'read-funnel-cells-of-margin': (db, filters) => readFunnel(db, 'margin', filters),
+  'read-funnel-cells-of-overrun': (db, filters) => readFunnel(db, 'overrun', filters),
+  'read-funnel-cells-of-product': (db, filters) => readFunnel(db, 'product', filters),
+  'read-funnel-cells-of-rot': (db, filters) => readFunnel(db, 'rot', filters),
   'read-import-catalogue': readImportCatalogue,
   'read-margin-target': readMarginTarget,
   'read-normed-cars': readNormedCars,
   'read-product-lines': readProductLines,
+  'read-product-parts': (db, filters) => readProductParts(scopedFunnelSource(db), filters),
   'read-quote-figures': (db) => readQuoteFigures(scopedSource(db), CAR, 'model_age'),
+  'read-received-through': readReceivedThrough,
   'read-rot-cars': readRotCars,
   'read-spellings': (db) => readSpellings(db, [1]),
+  'read-targets': readTargets,
   'read-usual-figures': (db) => readUsualFigures(scopedSource(db), 1, CAR, 'model_age', () => true),
   'read-warranty-cars': readWarrantyCars,
   'remembered-columns': (db) => rememberedColumns(db, 'AAA', 'jobs'),
@@ -159,6 +189,10 @@ const READS: Record<
   'sum-spans': (db, { packageIds, bodyTypes }) =>
     sumSpans(db, [PERIOD, PERIOD], { packageIds, bodyTypes }),
 };
+
+function readFunnel(db: ScopedDb, measure: BranchMeasure, filters: JobFilters): unknown {
+  return readFunnelCells(scopedFunnelSource(db), { measure, filters, today: '2026-02-02' });
+}
 
 /** Reads that are about the one branch of a scope, and nothing without it. */
 const OF_ONE_BRANCH = ['network-quote-counts', 'read-margin-target'];

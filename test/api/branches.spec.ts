@@ -157,7 +157,7 @@ describe('GET /api/analytics/branches/side-by-side', () => {
       expect(rows.map(({ branch }) => branch)).toEqual(['AAA', 'BBB']);
       for (const { value, steps } of rows) {
         expect(steps?.[0]?.key).toBe('mix');
-        const end = steps!.reduce((sum, step) => sum + step.value, body.network as number);
+        const end = steps!.reduce<number>((sum, step) => sum + step.value, body.network);
         expect(end).toBeCloseTo(value!, 10);
       }
       const standing = (await branches(`?measure=${measure}`)).body.branches as BranchStanding[];
@@ -204,6 +204,6 @@ describe('GET /api/exports/branches.csv', () => {
 });
 
 /** Products told one by one add up to the same in another order. */
-function near(value: number | null, measure: string): unknown {
-  return value === null || measure !== 'product' ? value : (expect.closeTo(value, 12) as unknown);
+function near(value: number | null, measure: string): number | null {
+  return value === null || measure !== 'product' ? value : (expect.closeTo(value, 12) as number);
 }

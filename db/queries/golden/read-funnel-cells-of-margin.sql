@@ -1,0 +1,4 @@
+select branch_id as "branchId", package_id * 8 + age_band as key, count(*) as cars, sum(revenue_cents) as e, sum(1.0 * margin_cents * margin_cents) as aa, sum(1.0 * margin_cents * revenue_cents) as ae, sum(1.0 * revenue_cents * revenue_cents) as ee, sum(revenue_cents) as part0, sum(-labour_cents) as part1, sum(-repair_labour_cents) as part2, sum(-product_cents) as part3, sum(-(consumables_cents + bought_in_cents)) as part4, sum(-fee_cents) as part5
+from (select * from job_facts where branch_id in (select value from json_each(?)) and gen_from <= (select generation from network) and gen_to > (select generation from network)) as `job_facts`
+where `job_facts`.`completed_on` >= ? and `job_facts`.`completed_on` <= ? and job_facts.package_id in (select value from json_each(?)) and job_facts.body_type in (select value from json_each(?)) and `billed` = ? and `costed` = ?
+group by 1, 2;

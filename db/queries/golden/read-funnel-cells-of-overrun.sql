@@ -1,0 +1,4 @@
+select branch_id as "branchId", package_id * 8 + age_band as key, count(*) as cars, sum(est_minutes) as e, sum(1.0 * act_minutes * act_minutes) as aa, sum(1.0 * act_minutes * est_minutes) as ae, sum(1.0 * est_minutes * est_minutes) as ee, sum(act_strip) as part0, sum(act_clean) as part1, sum(act_dry) as part2, sum(act_repair) as part3, sum(act_mask) as part4, sum(act_apply) as part5, sum(act_refit) as part6
+from (select * from job_facts where branch_id in (select value from json_each(?)) and gen_from <= (select generation from network) and gen_to > (select generation from network)) as `job_facts`
+where `job_facts`.`completed_on` >= ? and `job_facts`.`completed_on` <= ? and job_facts.package_id in (select value from json_each(?)) and job_facts.body_type in (select value from json_each(?)) and `has_estimate` = ?
+group by 1, 2;
