@@ -110,6 +110,40 @@ export function everyState({ rotten, corrected }: KnownJobs): Stop[] {
       path: '/come-backs?from=2015-01-01&to=2015-02-01',
       as: 'site_manager',
     },
+    { name: 'signals-none', path: '/signals?branch=NOWHERE', as: 'site_manager' },
+    {
+      name: 'signals-open',
+      path: '/signals',
+      as: 'regional_lead',
+      prepare: async (page) => {
+        await press(/cars? behind it$/)(page);
+        await press('Note that it was seen')(page);
+        await page.locator('us-acknowledge-form button[type=submit]').click();
+      },
+    },
+    { name: 'actions-none', path: '/actions?state=dropped', as: 'site_manager' },
+    {
+      name: 'action-refused',
+      path: '/actions/new',
+      as: 'head_office',
+      prepare: press('Agree it'),
+    },
+    {
+      name: 'action-gone',
+      path: '/actions/HAV/999999',
+      as: 'site_manager',
+      refused: / 404 /,
+    },
+    {
+      name: 'targets-changing',
+      path: '/targets',
+      as: 'head_office',
+      prepare: async (page) => {
+        await press(/^(Set|Change): Overrun target of the network/)(page);
+        await page.getByRole('textbox').fill('a tenth');
+        await press('Save')(page);
+      },
+    },
     { name: 'quote-tables', path: `/quote?${QUOTED}`, as: 'head_office', prepare: showTables },
     {
       name: 'quote-incomplete',

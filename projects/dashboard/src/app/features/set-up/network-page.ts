@@ -1,4 +1,5 @@
 import { ChangeDetectionStrategy, Component, computed, inject } from '@angular/core';
+import { RouterLink } from '@angular/router';
 import { getCosts } from '#shared/contracts/set-up';
 import { getNetwork } from '#shared/contracts/set-up-help';
 import { Api } from '../../core/api/api';
@@ -14,7 +15,7 @@ import { WhoChanged } from './who-changed';
 /** The network itself: name, currency, target, claim limit, and its fee by date. */
 @Component({
   selector: 'us-network-page',
-  imports: [ChangeForm, DatedCosts, LoadState, WhoChanged],
+  imports: [ChangeForm, DatedCosts, LoadState, RouterLink, WhoChanged],
   templateUrl: './network-page.html',
   styleUrl: './part.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
