@@ -1,0 +1,7 @@
+select `actions`.`id` as `id`, `branches`.`code` as `branch`, `actions`.`branch_id` as `branchId`, `actions`.`what` as `what`, `actions`.`who` as `who`, `actions`.`until_on` as `until`, `actions`.`measure` as `measure`, `actions`.`state` as `state`, `actions`.`agreed_on` as `agreedOn`, `agreeing`.`name` as `agreedBy`, `actions`.`ended_on` as `endedOn`, `actions`.`signal_id` as `signal`, (select json_group_array(json_object('by', answering.name, 'at', answers.at, 'text', answers.text) order by answers.id) from (select * from action_answers where branch_id in (select value from json_each(?))) as `answers` inner join `people` as `answering` on `answering`.`id` = `answers`.`person_id` where answers.action_id = actions.id) as `answers`, (actions.state <> 'agreed') as ended, case when actions.state = 'agreed' then actions.until_on else printf('%08d', 99999999 - cast(replace(actions.ended_on, '-', '') as integer)) end as key
+from (select * from actions where branch_id in (select value from json_each(?))) as `actions`
+inner join `branches` on `branches`.`id` = `actions`.`branch_id`
+inner join `people` as `agreeing` on `agreeing`.`id` = `actions`.`person_id`
+where actions.state in (select value from json_each(?))
+order by (actions.state <> 'agreed'), case when actions.state = 'agreed' then actions.until_on else printf('%08d', 99999999 - cast(replace(actions.ended_on, '-', '') as integer)) end, actions.id
+limit ?;
