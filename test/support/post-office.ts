@@ -8,6 +8,8 @@ export type MailMoment = 'recipient' | 'data' | 'whole' | 'answered';
 export class PostOffice {
   /** Message-IDs in the order they were taken whole. */
   readonly taken: string[] = [];
+  /** The mails taken whole, as they came. */
+  readonly texts: string[] = [];
   /** Called at each moment of each mail; what it returns is waited for. */
   at: (moment: MailMoment) => Promise<void> | void = () => undefined;
   private readonly server: SMTPServer;
@@ -25,6 +27,7 @@ export class PostOffice {
         stream.on('data', (piece: Buffer) => pieces.push(piece));
         stream.on('end', () => {
           const text = Buffer.concat(pieces).toString('utf8');
+          this.texts.push(text);
           this.taken.push(/^Message-ID: (.*)$/im.exec(text)?.[1]?.trim() ?? '');
           void Promise.resolve(this.at('whole')).then(() => {
             done();
