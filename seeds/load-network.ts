@@ -4,6 +4,7 @@ import { worldOf } from '#shared/contracts/check-job';
 import type { DemoNetwork } from './demo-network';
 import { costsKnownFrom } from './dated-costs';
 import { DEMO_SEED, generateNetwork } from './generate-network';
+import { actionEvents } from './load-actions';
 import { loadHistory, type LaterEvent } from './load-history';
 import {
   hashPasswords,
@@ -66,6 +67,7 @@ function load(
     later.push(...loadHistory(loading, history));
     jobs += history.jobs.length;
   }
+  later.push(...actionEvents(store, ids, today));
   later.sort((a, b) => (a.at < b.at ? -1 : a.at > b.at ? 1 : 0));
   for (const { happen } of later) happen();
   return jobs;
