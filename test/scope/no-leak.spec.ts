@@ -47,6 +47,8 @@ function ownCars(): object[] {
   }));
 }
 
+const MEASURES = ['rot', 'claims', 'product', 'margin'].map((measure) => `measure=${measure}`);
+
 /** What is asked beside the plain call: filters in scope, out of it and of nothing; orders and groupings. */
 const QUERIES: Record<string, string[]> = {
   '/api/jobs': ['q=walked', 'sort=overrun', 'sort=waiting&unbilled=true', 'make=velder', 'limit=1'],
@@ -54,7 +56,12 @@ const QUERIES: Record<string, string[]> = {
   '/api/analytics/overrun': ['by=branch', 'by=region', 'by=rotFound', 'by=month', 'by=ageBand'],
   '/api/exports/overrun.csv': ['by=branch', 'by=region'],
   '/api/analytics/rot': ['package=full', 'from=2026-01-26', 'package=cavity', 'bodyType=suv'],
+  '/api/analytics/branches': MEASURES,
+  '/api/analytics/branches/weeks': MEASURES,
+  '/api/analytics/branches/side-by-side': MEASURES,
+  '/api/exports/branches.csv': MEASURES,
   '/api/claims': ['counted=true', 'sort=completed&limit=1', 'q=walked', 'asOf=2026-01-30'],
+  '/api/actions': ['limit=1', 'state=done'],
   '/api/come-back': ['limit=1', 'status=contacted'],
   '/api/analytics/warranty': [
     ...['asOf=2025-12-31', 'groupBy=branch', 'groupBy=region', 'groupBy=cohort&to=2024-01-01'],
@@ -70,7 +77,7 @@ const FILTERS = [
   'region=COAST',
   'branch=ZZZ',
 ];
-const FILTERED = /^\/api\/(jobs|claims|analytics|come-back|exports|week-notes)/;
+const FILTERED = /^\/api\/(jobs|actions|claims|analytics|come-back|exports|week-notes)/;
 /** Cars that a quote may be asked for: many at the own branch, few there, none there; and a branch out of scope. */
 const QUOTES = [
   'firstRegistered=2009-05&branch=AAA',
@@ -116,6 +123,7 @@ const REFERRING = [
   '/api/analytics/warranty',
   '/api/quote',
   '/api/branches/AAA/usual',
+  '/api/branches/AAA/actions/1',
   '/api/exports/quote.csv',
   '/api/exports/warranty-branches.csv',
   '/api/exports/warranty-cohorts.csv',
@@ -258,7 +266,7 @@ describe('Everything a site manager may read', () => {
     // Rows that name regions or branches of the scope: cars of branches beyond it belong to none of them.
     const lockedTwice = [
       ...['/api/exports/rot.csv', '/api/exports/product-branches.csv'],
-      '/api/exports/warranty-branches.csv',
+      ...['/api/exports/warranty-branches.csv', '/api/exports/branches.csv'],
     ];
     const narrowed = contracts.filter(
       ([name, { access, path }]) =>

@@ -1,6 +1,11 @@
 /** Steps to values in an answer; `*` is every item of a list. */
 type Path = readonly string[];
 
+/** What a branch is compared with, and what comes of it. */
+const COMPARED = [
+  ...['expected', 'lower95', 'upper95', 'lower998', 'upper998', 'flag', 'expectedClaims'],
+];
+
 /** Answers that hold figures of the whole network, and the only places in which those stand (rule 81). */
 const REFERENCE_FIELDS: Readonly<Record<string, readonly Path[]>> = {
   '/api/analytics/rot': [
@@ -9,6 +14,15 @@ const REFERENCE_FIELDS: Readonly<Record<string, readonly Path[]>> = {
     ['regions', '*', 'adjustedLower'],
     ['regions', '*', 'adjustedUpper'],
     ['regions', '*', 'bandsLeftOut'],
+  ],
+  '/api/analytics/branches': [
+    ['network'],
+    ['referenceCars'],
+    ...COMPARED.map((field) => ['branches', '*', field]),
+  ],
+  '/api/analytics/branches/side-by-side': [
+    ['network'],
+    ...['expected', 'flag', 'steps'].map((field) => ['branches', '*', field]),
   ],
   '/api/analytics/warranty': [
     ...['branches', 'cohorts'].flatMap((rows) =>
@@ -21,6 +35,7 @@ const REFERENCE_FIELDS: Readonly<Record<string, readonly Path[]>> = {
 
 /** Files with such figures, and the columns in which those stand. */
 const REFERENCE_COLUMNS: Readonly<Record<string, readonly string[]>> = {
+  '/api/exports/branches.csv': COMPARED,
   '/api/exports/warranty-branches.csv': ['expected', 'ratio', 'lower', 'upper'],
   '/api/exports/warranty-cohorts.csv': ['expected', 'ratio', 'lower', 'upper'],
 };
@@ -39,6 +54,13 @@ function withoutUsual(answer: unknown): unknown {
   return basis?.source === 'network' ? { lastTime } : answer;
 }
 
+/** An action's effect is told against the network once it says so; what the branch's own cars did is its own. */
+const ACTION_AT = /^\/api\/branches\/[^/]+\/actions\/[^/]+$/;
+const EFFECT_FIELDS: readonly Path[] = [
+  ...['before', 'after'].map((side) => ['effect', side, 'expected']),
+  ...['change', 'lower', 'upper'].map((field) => ['effect', field]),
+];
+
 /** Whether any answer at a path may hold figures of the network. */
 export function mayRefer(path: string): boolean {
   return (
@@ -46,7 +68,8 @@ export function mayRefer(path: string): boolean {
     path in WHOLE_ANSWERS ||
     path in REFERENCE_COLUMNS ||
     path === '/api/exports/quote.csv' ||
-    USUAL_AT.test(path)
+    USUAL_AT.test(path) ||
+    ACTION_AT.test(path)
   );
 }
 
@@ -62,7 +85,8 @@ export function withoutReference(path: string, text: string): string {
   if (JSON.stringify(answer) !== text) throw new Error(`${path} is not written as JSON writes it`);
   if (WHOLE_ANSWERS[path]?.(answer)) return 'of the network';
   if (USUAL_AT.test(path)) return JSON.stringify(withoutUsual(answer));
-  for (const field of REFERENCE_FIELDS[path] ?? []) takeOut(answer, field);
+  const fields = ACTION_AT.test(path) ? EFFECT_FIELDS : (REFERENCE_FIELDS[path] ?? []);
+  for (const field of fields) takeOut(answer, field);
   return JSON.stringify(answer);
 }
 

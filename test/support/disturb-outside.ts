@@ -2,7 +2,7 @@ import type { TestApp } from './app';
 import { sendFile } from './send-file';
 import { validJob, type SmallNetwork } from './small-network';
 import { jpegOf, sendPhoto } from './send-photo';
-import { findingsWithOneLeft, GOING } from './walk-contracts';
+import { ACTION, findingsWithOneLeft, GOING } from './walk-contracts';
 
 /** What is to be changed, and how. */
 export interface Disturbance {
@@ -18,7 +18,7 @@ export interface Disturbance {
 
 /**
  * Changes everything that lies outside some branches, each time in another way: jobs sent, corrected and voided, claims,
- * findings left and what is marked on them, photos, jobs under way, rates, notes, bookings, the names of branches and of
+ * findings left and what is marked on them, photos, jobs under way, rates, notes, bookings, actions, targets, the names of branches and of
  * regions, a branch and a region more.
  */
 export async function disturbOutside(
@@ -59,6 +59,8 @@ export async function disturbOutside(
       });
     }
     await send('put', `${at}/weeks/2026-W05/note`, { text: `round ${round}` });
+    await send('post', `${at}/actions`, { ...ACTION, what: `round ${round}` });
+    await send('put', `${at}/targets/overrun`, { value: 1 + round / 100 });
     const file = await sendFile(app, token, { branch, content: `job,odd ${round}\nj,1\n` });
     if (file.status >= 300) throw new Error(`file at ${branch}: ${file.text}`);
     await send('put', `${at}/under-way/${GOING}`, { notes: `round ${round}` });

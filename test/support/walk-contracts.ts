@@ -1,6 +1,10 @@
 import { endpoints } from '#shared/contracts/index';
 import type { Endpoint } from '#shared/contracts/endpoint';
+import { LookWriter, type SignalToKeep } from '#db/signal-writer';
 import { beginReport, keepReport } from '#server/features/warranty-reports/issue-report';
+import { sql } from '#db/database';
+import { readSecret } from '#server/auth/secret';
+import { issueUnsubscribeToken } from '#server/auth/unsubscribe-token';
 import type { TestApp } from './app';
 import { jpegOf, sendPhoto } from './send-photo';
 import { placeFile } from './place-file';
@@ -93,8 +97,8 @@ export function findingsWithOneLeft(): object[] {
   return [...(validJob()['findings'] as object[]), LEFT_FINDING];
 }
 
-/** Puts there what the samples name: a job with a claim, a photo of either and a finding left on the car, one under way, a booking and a report. */
-export async function placeSamples(app: TestApp, { manager }: SmallNetwork): Promise<void> {
+/** Puts there what the samples name: a job with a claim, a photo of either and a finding left on the car, one under way, a booking, an action and a report. */
+export async function placeSamples(app: TestApp, { manager, lead }: SmallNetwork): Promise<void> {
   const claim = {
     jobRef: 'walked',
     madeOn: '2026-01-30',
@@ -117,9 +121,47 @@ export async function placeSamples(app: TestApp, { manager }: SmallNetwork): Pro
     const sent = await sendPhoto(app, photo, await jpegOf(), { token: manager });
     if (sent.status !== 201) throw new Error(`${photo}: ${sent.text}`);
   }
+  const agreed = await app.call('post', '/api/branches/AAA/actions', { token: lead, body: ACTION });
+  if (agreed.status !== 201) throw new Error(`action: ${agreed.text}`);
   await placeFile(app, manager, PLACED_FILE);
+  const person = app.kit.store.unscoped.first<{ id: number }>(
+    sql('people').where({ role: 'site_manager' }).select('id'),
+  );
+  // Signed by this server's own secret, so it can only be made here.
+  NEEDED['/api/mail/unsubscribe'] =
+    `token=${issueUnsubscribeToken(readSecret(app.kit.config).mails, { personId: person?.id ?? 0, kind: 'monday_digest' })}`;
   await placeReport(app);
+  await placeSignal(app);
 }
+
+/** A signal of the branch that the samples name, the first: one that stands and compares with nobody. */
+function placeSignal({ kit: { store } }: TestApp): Promise<void> {
+  const branchId = store.state.branches.find(({ code }) => code === 'AAA')?.id ?? 0;
+  const found: SignalToKeep = {
+    branchId,
+    kind: 'unbilled',
+    ...{ key: 'unbilled', measure: null, since: '2026-01-10' },
+    ...{ strength: 1, cars: 1, listed: [{ ref: 'walked', why: 'waits' }], behind: null },
+    facts: {
+      oldestOn: '2026-01-10',
+      oldestDays: 23,
+      costCents: 0,
+      withoutCost: 0,
+      currency: 'EUR',
+    },
+  } as const;
+  const changes = { opened: [found], kept: [], ended: [] };
+  const at = '2026-02-01T01:00:00.000Z';
+  return store.queue.write(() => new LookWriter(store).keep('2026-02-01', at, changes));
+}
+
+/** An action as a lead agrees it. */
+export const ACTION = {
+  what: 'Refit in twos',
+  who: 'All',
+  until: '2026-03-31',
+  measure: 'overrun',
+};
 
 /** An issued warranty report, the first: a made-up one, for making one takes a thread. */
 function placeReport({ kit: { store } }: TestApp): Promise<number> {
