@@ -121,9 +121,12 @@ type Reader = keyof typeof READERS;
 const REFERRING = [
   '/api/analytics/rot',
   '/api/analytics/warranty',
+  '/api/analytics/branches',
+  '/api/analytics/branches/side-by-side',
+  '/api/branches/AAA/actions/1',
   '/api/quote',
   '/api/branches/AAA/usual',
-  '/api/branches/AAA/actions/1',
+  '/api/exports/branches.csv',
   '/api/exports/quote.csv',
   '/api/exports/warranty-branches.csv',
   '/api/exports/warranty-cohorts.csv',
