@@ -44,6 +44,8 @@ export function everyState({ rotten, corrected }: KnownJobs): Stop[] {
     { name: 'product-tables', path: '/product', as: 'head_office', prepare: showTables },
     { name: 'product-no-norm', path: '/product?product=RC1', as: 'site_manager' },
     { name: 'product-none', path: '/product?from=2015-01-01&to=2015-02-01', as: 'site_manager' },
+    { name: 'branches-tables', path: '/branches', as: 'regional_lead', prepare: showTables },
+    { name: 'branches-none', path: '/branches?from=2015-01-01&to=2015-02-01', as: 'regional_lead' },
     { name: 'warranty-tables', path: '/warranty', as: 'head_office', prepare: showTables },
     {
       name: 'warranty-sums',

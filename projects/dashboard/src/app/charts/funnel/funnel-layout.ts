@@ -127,6 +127,7 @@ export function layOutFunnel(input: FunnelInput, width: number): FunnelLayout {
           text: branch.name,
           must: branch.stand !== 'inside',
         })),
+      branches,
       { left, right: right - 4, top: TOP - 8, bottom: bottom - 2 },
     ),
     labels:

@@ -45,8 +45,12 @@ const REACH = 9;
  * Places names so that none lies on another or on a dot, each as near to its own dot as the others allow. Those that must be read come
  * first; of the others those without room are left out.
  */
-export function placeNames(wishes: readonly NameWish[], room: NameRoom): PlacedName[] {
-  const taken: Box[] = wishes.map(({ x, y }) => boxAbout(x, y, DOT, DOT));
+export function placeNames(
+  wishes: readonly NameWish[],
+  dots: readonly { readonly x: number; readonly y: number }[],
+  room: NameRoom,
+): PlacedName[] {
+  const taken: Box[] = dots.map(({ x, y }) => boxAbout(x, y, DOT, DOT));
   const placed: PlacedName[] = [];
   for (const wish of [...wishes].sort((a, b) => Number(b.must) - Number(a.must))) {
     const found = places(wish, room).find(({ box }) => isFree(box, taken, room));

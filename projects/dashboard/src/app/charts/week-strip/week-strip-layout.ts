@@ -1,6 +1,6 @@
 import { scaleLinear } from 'd3-scale';
 import { line } from 'd3-shape';
-import { widestText } from '../text-width';
+import { textWidth, widestText } from '../text-width';
 import type { StripMark, WeekStripInput } from './week-strip-input';
 
 /** Everything a small picture of weeks draws, px. */
@@ -16,7 +16,8 @@ export interface WeekStripLayout {
     readonly centre: number;
     readonly lower: number;
   } | null;
-  readonly target: { readonly y: number; readonly wordY: number } | null;
+  /** Its line; the word stands at its right end. */
+  readonly target: number | null;
   readonly join: string;
   /** Weeks that are marked. */
   readonly marks: readonly { readonly x: number; readonly y: number; readonly mark: StripMark }[];
@@ -33,7 +34,7 @@ export function layOutWeekStrip(input: WeekStripInput, width: number): WeekStrip
   const bottom = TOP + PLOT;
   const y = scaleLinear(input.scale, [bottom, TOP]).clamp(true);
   const left = widestText(input.ticks.map(({ text }) => text)) + 8;
-  const right = Math.max(left + 40, width - 8);
+  const right = Math.max(left + 40, width - (input.target === null ? 8 : textWidth('target') + 7));
   const pitch = (right - left) / Math.max(1, input.weeks.length);
   const weeks = input.weeks.map(({ value, mark }, index) => ({
     x: left + (index + 0.5) * pitch,
@@ -60,9 +61,7 @@ export function layOutWeekStrip(input: WeekStripInput, width: number): WeekStrip
       centre: y(input.usual.centre),
       lower: y(input.usual.lower),
     },
-    // The word stands on the side of its line that has room.
-    target:
-      target === null ? null : { y: target, wordY: target > TOP + 16 ? target - 10 : target + 11 },
+    target,
     join: input.look === 'line' ? (path(weeks) ?? '') : '',
     marks: input.look === 'line' ? known.filter(({ mark }) => mark !== 'plain') : [],
     last: last ? { x: last.x, y: last.y } : null,

@@ -2,7 +2,7 @@ import type { BranchesAnswer, BranchStanding } from '#shared/contracts/branches'
 import { addDays } from '#shared/domain/calendar';
 import type { CellLink, Column } from '../../ui/data-table/column';
 import { formatCount, formatDate, formatShortDate } from '../../ui/format';
-import { formatMeasure, formatTarget, MEASURE_UNITS } from '../../ui/measure-words';
+import { formatMeasure, formatTarget, MEASURE_NAMES } from '../../ui/measure-words';
 import { type BranchWords, FLAG_WORDS, signedChange, valueText } from './branch-words';
 
 /** A branch of the scope as a row, whether it has cars or not. */
@@ -44,10 +44,10 @@ export function receivedText({ receivedThrough, late }: StandingRow): string {
 
 /** The columns of the rows; `linkOf` leads to a branch's own page in the measure. */
 export function standingColumns(
-  { measure }: BranchesAnswer,
+  { measure, branches }: BranchesAnswer,
   linkOf: (branch: string) => CellLink,
 ): readonly Column<StandingRow>[] {
-  const [name = '', unit = ''] = MEASURE_UNITS[measure].split(', ', 2);
+  const name = MEASURE_NAMES[measure];
   const number = (
     key: string,
     label: string,
@@ -94,7 +94,7 @@ export function standingColumns(
     {
       ...number(
         'value',
-        `${name.charAt(0).toUpperCase()}${name.slice(1)}, ${unit}`,
+        `${name.charAt(0).toUpperCase()}${name.slice(1)}`,
         (row) => valueText(measure, row.value),
         (row) => row.value,
       ),
@@ -102,7 +102,7 @@ export function standingColumns(
     },
     number(
       'expected',
-      'Its cars: expected',
+      'Expected',
       (row) => valueText(measure, row.expected),
       (row) => row.expected,
     ),
@@ -136,7 +136,7 @@ export function standingColumns(
       label: 'Stands',
       text: ({ standing }) => (standing ? FLAG_WORDS[standing.flag] : 'no cars in this time'),
     },
-    ...(measure === 'rot'
+    ...(branches.every(({ target }) => target === null)
       ? []
       : [
           number(
