@@ -59,7 +59,6 @@ const QUERIES: Record<string, string[]> = {
   '/api/analytics/branches': MEASURES,
   '/api/analytics/branches/weeks': MEASURES,
   '/api/analytics/branches/side-by-side': MEASURES,
-  '/api/exports/branches.csv': MEASURES,
   '/api/claims': ['counted=true', 'sort=completed&limit=1', 'q=walked', 'asOf=2026-01-30'],
   '/api/actions': ['limit=1', 'state=done'],
   '/api/come-back': ['limit=1', 'status=contacted'],
