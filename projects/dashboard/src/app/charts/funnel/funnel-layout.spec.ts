@@ -104,10 +104,16 @@ describe('layOutFunnel', () => {
   });
 
   it('one branch: stands in the middle of its own limits', () => {
-    const { branches, left, right, labels } = layOutFunnel(input([point('A')]), 700);
+    const { branches, left, right, top, bottom, labels } = layOutFunnel(
+      input([point('A', { apart: -0.02 })]),
+      700,
+    );
     expect(branches[0]!.x).toBeGreaterThan(left + (right - left) / 4);
     expect(branches[0]!.x).toBeLessThan(right - (right - left) / 4);
     expect(labels).toHaveLength(5);
+    // Its limits are drawn whole, whatever side it lies on.
+    expect(branches[0]!.upper998).toBeGreaterThan(top);
+    expect(branches[0]!.lower998).toBeLessThan(bottom);
   });
 
   it('no branch: draws axes and nothing else', () => {

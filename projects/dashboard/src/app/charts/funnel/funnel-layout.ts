@@ -137,19 +137,17 @@ export function layOutFunnel(input: FunnelInput, width: number): FunnelLayout {
   };
 }
 
-/** All dots and zero, and of the limits as much as leaves the dots more than half of the height. */
+/** All dots, and the limits of the middle branch: those of one with very few cars may run out of the picture, being beyond all dots. */
 function reach(points: readonly FunnelPoint[]): [number, number] {
   const apart = points.map((point) => point.apart);
-  const high = Math.max(0, ...apart);
-  const low = Math.min(0, ...apart);
-  const spare = Math.max(high - low, 1e-6) * 0.4;
-  const upper = Math.max(
-    high,
-    Math.min(high + spare, Math.max(0, ...points.map((p) => p.upper998))),
-  );
-  const lower = Math.min(low, Math.max(low - spare, Math.min(0, ...points.map((p) => p.lower998))));
+  const upper = Math.max(0, ...apart, lowerMedian(points.map((point) => point.upper998)));
+  const lower = Math.min(0, ...apart, -lowerMedian(points.map((point) => -point.lower998)));
   const pad = Math.max(upper - lower, 1e-6) * 0.05;
   return [lower - pad, upper + pad];
+}
+
+function lowerMedian(values: readonly number[]): number {
+  return [...values].sort((a, b) => a - b)[Math.floor((values.length - 1) / 2)] ?? 0;
 }
 
 function pathOf(points: readonly (readonly [number, number])[]): string {

@@ -43,6 +43,7 @@ export function funnelPicture(answer: BranchesAnswer, words: BranchWords): Funne
   return {
     summary: `${points.length} branches by their number of cars, each apart from what its own cars lead one to expect on ${MEASURE_ON[measure]}. ${finding}`,
     points,
-    tick: (apart) => signedChange(measure, apart),
+    // A round number of claims needs no decimals.
+    tick: (apart) => signedChange(measure, apart).replace(/\.0$/, ''),
   };
 }

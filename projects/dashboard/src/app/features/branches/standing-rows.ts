@@ -94,7 +94,9 @@ export function standingColumns(
     {
       ...number(
         'value',
-        `${name.charAt(0).toUpperCase()}${name.slice(1)}`,
+        measure === 'claims'
+          ? 'Per 1,000 car-years'
+          : `${name.charAt(0).toUpperCase()}${name.slice(1)}`,
         (row) => valueText(measure, row.value),
         (row) => row.value,
       ),
