@@ -281,6 +281,7 @@ describe('Everything a site manager may read', () => {
     expect(narrowed.length).toBeGreaterThan(12);
     expect(pathsOf(leaking).sort()).toEqual(
       [
+        '/api/branches/AAA/actions/1',
         '/api/branches/AAA/usual',
         '/api/costs',
         '/api/quote',

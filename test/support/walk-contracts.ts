@@ -29,6 +29,7 @@ const SAMPLES: Record<string, string> = {
   kind: 'other',
   bodyType: 'suv',
   week: '2026-W05',
+  measure: 'overrun',
   photo: 'walked',
 };
 
