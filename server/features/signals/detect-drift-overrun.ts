@@ -1,4 +1,4 @@
-import { addDays, daysBetween } from '#shared/domain/calendar';
+import { addDays, dayNumber } from '#shared/domain/calendar';
 import type { FactsByKind } from '#shared/domain/signal-facts';
 import { tabularCusum } from '#shared/stats/cusum';
 import { plainSignal, type FoundSignal } from './found-signal';
@@ -36,7 +36,8 @@ export interface TimedCars {
  */
 export function detectDriftOverrun(cars: TimedCars, monday: string): FoundSignal[] {
   const first = addDays(monday, -7 * (USUAL_WEEKS + JUDGED_WEEKS));
-  const weekOf = cars.completedOn.map((day) => Math.floor(daysBetween(first, day) / 7));
+  const begin = dayNumber(first);
+  const weekOf = cars.completedOn.map((day) => Math.floor((dayNumber(day) - begin) / 7));
   const isUsual = (car: number): boolean => weekOf[car]! >= 0 && weekOf[car]! < USUAL_WEEKS;
   const rates = usualRates(cars, isUsual);
   if (!rates) return [];

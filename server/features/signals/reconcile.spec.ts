@@ -65,9 +65,8 @@ describe('reconcile', () => {
     for (let seed = 1; seed <= 200; seed += 1) {
       const draw = drawsOf(seed);
       let kept: Kept[] = [];
-      let looked: FoundSignal[] = [];
       for (let night = 0; night < 12; night += 1) {
-        looked = Array.from({ length: Math.floor(8 * draw()) }, () =>
+        const looked = Array.from({ length: Math.floor(8 * draw()) }, () =>
           found({
             branchId: 1 + Math.floor(2 * draw()),
             kind: SIGNAL_KINDS[Math.floor(3 * draw())] ?? 'silence',
