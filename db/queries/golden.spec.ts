@@ -48,6 +48,15 @@ import { readFunnelCells, readProductParts, scopedFunnelSource } from './branche
 import { readClimates, readRotCars, readSpellings } from './rot';
 import { readClaims, readWarrantyCars } from './warranty';
 import { laterArrivals } from './later-arrivals';
+import { countSignals, listSignalCars, listSignalRows } from './signals';
+import { listDangersDue, readArrivals } from './signals-arrivals';
+import {
+  listBilledCars,
+  listCheckedCars,
+  listMovingCars,
+  listUnbilledBefore,
+  readTimedCars,
+} from './signals-cars';
 import { listWeekNotes } from './week-notes';
 
 /**
@@ -148,6 +157,24 @@ const READS: Record<
   'list-photos': (db) => listPhotos(db, 1, { of: 'job', ref: 'x' }),
   'list-uncosted-products': listUncostedProducts,
   'list-under-way': (db) => listUnderWay(db, 1),
+  'list-billed-cars': (db) => listBilledCars(db, 1, PERIOD, 200),
+  'list-checked-cars': (db) => listCheckedCars(db, PERIOD.from, PERIOD.to),
+  'list-dangers-due': (db) => listDangersDue(db, PERIOD.to),
+  'list-moving-cars': (db) =>
+    listMovingCars(db, 1, 'overrun', { ...PERIOD, side: 'high', claimed: [] }, 200),
+  'list-signal-cars': (db) => listSignalCars(db, 1),
+  'list-signals-after-a-place': (db) =>
+    listSignalRows(
+      db,
+      { reach: db.scope, states: ['open'], kinds: ['silence'] },
+      { kind: 1, branch: 'AAA', id: 1 },
+      50,
+    ),
+  'count-signals': (db) =>
+    countSignals(db, { reach: db.scope, states: ['open'], kinds: undefined }),
+  'list-unbilled-before': (db) => listUnbilledBefore(db, PERIOD.to),
+  'read-arrivals': (db) => readArrivals(db, PERIOD.from),
+  'read-timed-cars': (db) => readTimedCars(db, PERIOD.from, PERIOD.to),
   'list-week-notes': (db) => listWeekNotes(db, '2026-W01', '2026-W05'),
   'network-funnel-cells-of-claims': (_db, filters, network) =>
     network.funnelCells({ measure: 'claims', filters, today: '2026-02-02' }),

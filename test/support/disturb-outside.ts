@@ -1,3 +1,5 @@
+import { LookWriter, type SignalToKeep } from '#db/signal-writer';
+import { addDays } from '#shared/domain/calendar';
 import type { TestApp } from './app';
 import { sendFile } from './send-file';
 import { validJob, type SmallNetwork } from './small-network';
@@ -19,7 +21,7 @@ export interface Disturbance {
 /**
  * Changes everything that lies outside some branches, each time in another way: jobs sent, corrected and voided, claims,
  * findings left and what is marked on them, photos, jobs under way, rates, notes, bookings, actions, targets, the names of branches and of
- * regions, a branch and a region more.
+ * regions, signals, a branch and a region more.
  */
 export async function disturbOutside(
   app: TestApp,
@@ -63,6 +65,7 @@ export async function disturbOutside(
     await send('put', `${at}/targets/overrun`, { value: 1 + round / 100 });
     const file = await sendFile(app, token, { branch, content: `job,odd ${round}\nj,1\n` });
     if (file.status >= 300) throw new Error(`file at ${branch}: ${file.text}`);
+    await placeSignalOutside(app, branch, round);
     await send('put', `${at}/under-way/${GOING}`, { notes: `round ${round}` });
     if (busy !== 'all' && !busy.includes(branch)) continue;
     await disturbCars(send, at, round);
@@ -72,6 +75,19 @@ export async function disturbOutside(
       if (sent.status >= 300) throw new Error(`photo at ${branch}: ${sent.text}`);
     }
   }
+}
+
+/** One signal more of that branch, found by a look before the one of the walks: of the newest look everybody is told the day. */
+function placeSignalOutside(app: TestApp, code: string, round: number): Promise<void> {
+  const { store } = app.kit;
+  const branchId = store.state.branches.find((branch) => branch.code === code)?.id ?? 0;
+  const found: SignalToKeep = {
+    ...{ branchId, measure: null, since: '2026-01-10', cars: round, behind: null },
+    ...{ kind: 'silence', key: `round ${round}`, strength: round, facts: {}, listed: [] },
+  };
+  const day = addDays('1990-01-01', 1000 * branchId + round);
+  const changes = { opened: [found], kept: [], ended: [] };
+  return store.queue.write(() => new LookWriter(store).keep(day, `${day}T01:00:00.000Z`, changes));
 }
 
 const CLIMATE = { temperatureC: 9, humidityPct: 78, so2Deposition: 4, chlorideDeposition: 30 };

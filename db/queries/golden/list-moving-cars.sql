@@ -1,0 +1,5 @@
+select `job_ref` as `ref`
+from (select * from job_facts where branch_id in (select value from json_each(?)) and gen_from <= (select generation from network) and gen_to > (select generation from network)) as `job_facts`
+where `branch_id` = ? and `completed_on` between ? and ? and has_estimate = 1
+order by act_minutes - est_minutes desc, completed_on desc, job_id
+limit ?;
