@@ -1,14 +1,12 @@
 import { mkdirSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
-import {
-  COME_BACK_STATUSES,
-  type BranchMeasure,
-  type ComeBackStatus,
-} from '#shared/domain/vocabulary';
+import { COME_BACK_STATUSES, type ComeBackStatus } from '#shared/domain/vocabulary';
+import { BRANCH_READS } from '../../test/support/golden-branches';
 import { SmallStore } from '../../test/support/small-store';
 import { Connection } from '../database';
 import { NetworkReference } from '../network-reference';
 import { ScopedDb } from '../scoped-db';
+import { SIGNAL_READS } from './golden-signals';
 import type { JobFilters } from './job-filters';
 import { countActions, findAction, isSignal, listActionRows } from './actions';
 import { iterateClaimRows, listClaimRows, sumClaims, type ClaimFilters } from './claim-list';
@@ -41,22 +39,9 @@ import { listUnderWay } from './under-way';
 import { listPhotos } from './photos';
 import { readUsualFigures } from './usual';
 import { countRungs, readQuoteFigures, scopedSource, type QuotedCar } from './quote';
-import { readReceivedThrough } from './received-through';
-import { countCosted } from './count-costed';
-import { readBranchWeeks } from './branch-weeks';
-import { readFunnelCells, readProductParts, scopedFunnelSource } from './branches';
 import { readClimates, readRotCars, readSpellings } from './rot';
 import { readClaims, readWarrantyCars } from './warranty';
 import { laterArrivals } from './later-arrivals';
-import { countSignals, listSignalCars, listSignalRows } from './signals';
-import { listDangersDue, readArrivals } from './signals-arrivals';
-import {
-  listBilledCars,
-  listCheckedCars,
-  listMovingCars,
-  listUnbilledBefore,
-  readTimedCars,
-} from './signals-cars';
 import { listWeekNotes } from './week-notes';
 
 /**
@@ -105,6 +90,7 @@ const READS: Record<
   (db: ScopedDb, filters: JobFilters, network: NetworkReference) => unknown
 > = {
   'count-actions': (db) => countActions(db, { states: ['agreed'] }, '2026-01-05'),
+  ...BRANCH_READS,
   'count-bookings': (db, filters) => countBookings(db, PERIOD, filters),
   'count-branch-cells': countBranchCells,
   'count-branch-weeks': countBranchWeeks,
@@ -157,53 +143,23 @@ const READS: Record<
   'list-photos': (db) => listPhotos(db, 1, { of: 'job', ref: 'x' }),
   'list-uncosted-products': listUncostedProducts,
   'list-under-way': (db) => listUnderWay(db, 1),
-  'list-billed-cars': (db) => listBilledCars(db, 1, PERIOD, 200),
-  'list-checked-cars': (db) => listCheckedCars(db, PERIOD.from, PERIOD.to),
-  'list-dangers-due': (db) => listDangersDue(db, PERIOD.to),
-  'list-moving-cars': (db) =>
-    listMovingCars(db, 1, 'overrun', { ...PERIOD, side: 'high', claimed: [] }, 200),
-  'list-signal-cars': (db) => listSignalCars(db, 1),
-  'list-signals-after-a-place': (db) =>
-    listSignalRows(
-      db,
-      { reach: db.scope, states: ['open'], kinds: ['silence'] },
-      { kind: 1, branch: 'AAA', id: 1 },
-      50,
-    ),
-  'count-signals': (db) =>
-    countSignals(db, { reach: db.scope, states: ['open'], kinds: undefined }),
-  'list-unbilled-before': (db) => listUnbilledBefore(db, PERIOD.to),
-  'read-arrivals': (db) => readArrivals(db, PERIOD.from),
-  'read-timed-cars': (db) => readTimedCars(db, PERIOD.from, PERIOD.to),
+  ...SIGNAL_READS,
   'list-week-notes': (db) => listWeekNotes(db, '2026-W01', '2026-W05'),
-  'network-funnel-cells-of-claims': (_db, filters, network) =>
-    network.funnelCells({ measure: 'claims', filters, today: '2026-02-02' }),
-  'network-funnel-cells-of-product': (_db, filters, network) =>
-    network.funnelCells({ measure: 'product', filters, today: '2026-02-02', products: 'apart' }),
   'network-rot-bands': (_db, filters, network) => network.rotBands(filters).bands,
   'network-quote-counts': (_db, _filters, network) => network.nearestQuoteSet(CAR, ['age'], 30),
   'network-warranty-cells': (_db, filters, network) => network.warrantyCells(filters, '2026-02-02'),
   'package-codes': packageCodes,
-  'count-costed': countCosted,
-  'read-branch-weeks': (db, filters) => readBranchWeeks(db, 'margin', filters),
   'read-by-branch': (db, filters) => readByKey(db, filters, 'branch'),
   'read-by-month': (db, filters) => readByKey(db, filters, 'month'),
   'read-by-stage': readByStage,
   'read-climates': (db) => readClimates(db, db.scope.echo().regions),
   'read-claims': (db) => readClaims(db, '2026-02-02'),
   'read-costs-of-day': (db) => readCostsOfDay(db, '2026-01-05'),
-  'read-funnel-cells-of-claims': (db, filters) => readFunnel(db, 'claims', filters),
-  'read-funnel-cells-of-margin': (db, filters) => readFunnel(db, 'margin', filters),
-  'read-funnel-cells-of-overrun': (db, filters) => readFunnel(db, 'overrun', filters),
-  'read-funnel-cells-of-product': (db, filters) => readFunnel(db, 'product', filters),
-  'read-funnel-cells-of-rot': (db, filters) => readFunnel(db, 'rot', filters),
   'read-import-catalogue': readImportCatalogue,
   'read-margin-target': readMarginTarget,
   'read-normed-cars': readNormedCars,
   'read-product-lines': readProductLines,
-  'read-product-parts': (db, filters) => readProductParts(scopedFunnelSource(db), filters),
   'read-quote-figures': (db) => readQuoteFigures(scopedSource(db), CAR, 'model_age'),
-  'read-received-through': readReceivedThrough,
   'read-rot-cars': readRotCars,
   'read-spellings': (db) => readSpellings(db, [1]),
   'read-targets': readTargets,
@@ -216,10 +172,6 @@ const READS: Record<
   'sum-spans': (db, { packageIds, bodyTypes }) =>
     sumSpans(db, [PERIOD, PERIOD], { packageIds, bodyTypes }),
 };
-
-function readFunnel(db: ScopedDb, measure: BranchMeasure, filters: JobFilters): unknown {
-  return readFunnelCells(scopedFunnelSource(db), { measure, filters, today: '2026-02-02' });
-}
 
 /** Reads that are about the one branch of a scope, and nothing without it. */
 const OF_ONE_BRANCH = ['network-quote-counts', 'read-margin-target'];
