@@ -103,7 +103,7 @@ function tellUnbilled(
     title: 'Cars wait for their bill',
     sentence:
       `${branch} has ${count(cars, 'finished car')} without a bill after more than two weeks, the oldest since ` +
-      `${longDate(oldestOn)} (${oldestDays} days). They have cost ${money(costCents, currency)} so far${apart}.`,
+      `${longDate(oldestOn)} (${oldestDays} days). ${cars === 1 ? 'It has' : 'They have'} cost ${money(costCents, currency)} so far${apart}.`,
   };
 }
 
@@ -182,8 +182,9 @@ function figureOf(measure: BranchMeasure, value: number): string {
   return measure === 'claims' ? `${value.toFixed(1)} per 1,000 car-years` : percent(value);
 }
 
+/** One decimal, because limits of a whole percent would often read as the figure itself; none where it is 0. */
 function percent(share: number): string {
-  return `${(100 * share).toFixed(1)} %`;
+  return `${(100 * share).toFixed(1).replace(/\.0$/, '')}\u2009%`;
 }
 
 function count(number: number, thing: string): string {

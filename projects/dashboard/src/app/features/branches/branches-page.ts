@@ -57,7 +57,7 @@ export class BranchesPage {
   /** What branches are compared by, from the URL. */
   readonly measure = input<string>();
   /** The branches laid side by side, from the URL: `HAV,SKU`. */
-  readonly with = input<string>();
+  readonly with = input<string | readonly string[]>();
 
   private readonly api = inject(Api);
   private readonly router = inject(Router);

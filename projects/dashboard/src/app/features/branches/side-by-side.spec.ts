@@ -47,6 +47,7 @@ describe('chosenBeside', () => {
   it('codes of the URL: those that are there, four at most; one that is alone by itself', () => {
     expect(chosenBeside('SKU,HAV,NO', ['HAV', 'SKU', 'TEG'])).toEqual(['HAV', 'SKU']);
     expect(chosenBeside('A,B,C,D,E', ['A', 'B', 'C', 'D', 'E'])).toEqual(['A', 'B', 'C', 'D']);
+    expect(chosenBeside(['HAV', 'SKU'], ['HAV', 'SKU', 'TEG'])).toEqual(['HAV', 'SKU']);
     expect(chosenBeside(undefined, ['HAV'])).toEqual(['HAV']);
     expect(chosenBeside(undefined, ['HAV', 'SKU'])).toEqual([]);
   });

@@ -25,9 +25,12 @@ export interface SideBySide {
 export const MOST_BESIDE = 4;
 
 /** The branches that the URL lays side by side, as far as they are there; one that is alone stands by itself. */
-export function chosenBeside(asked: string | undefined, there: readonly string[]): string[] {
+export function chosenBeside(
+  asked: string | readonly string[] | undefined,
+  there: readonly string[],
+): string[] {
   if (there.length === 1) return [...there];
-  const codes = (asked ?? '').split(',');
+  const codes = [asked ?? []].flat().flatMap((one) => one.split(','));
   return there.filter((code) => codes.includes(code)).slice(0, MOST_BESIDE);
 }
 
