@@ -190,7 +190,7 @@ describe('GET /api/exports/branches.csv', () => {
   it.each(BRANCH_MEASURES)('given %s, has the rows of the answer', async (measure) => {
     const { status, text } = await get(`/api/exports/branches.csv?measure=${measure}`);
     expect(status).toBe(200);
-    const rows = parse(text, { columns: true }) as Record<string, string>[];
+    const rows = parse<Record<string, string>>(text, { columns: true });
     const told = (await branches(`?measure=${measure}`)).body.branches as BranchStanding[];
     expect(rows).toEqual(
       told.map((row) =>

@@ -41,6 +41,14 @@ export function claimsByDays(
     if (end === undefined) ends.set(name, (end = warrantyEnd(completedOn, months)));
     return end;
   };
+  const firsts = new Map<string, number>();
+  const firstOf = (completedOn: string): number => {
+    let first = firsts.get(completedOn);
+    if (first === undefined) {
+      firsts.set(completedOn, (first = stretches.findIndex(({ to }) => completedOn <= to)));
+    }
+    return first;
+  };
   for (const cars of readCoverByBranch(source, whereJobs(source.facts(), filters))) {
     const { cars: counts } = ofBranch(cars.branchId);
     cars.completedOn.forEach((completedOn, car) => {
@@ -48,7 +56,7 @@ export function claimsByDays(
       if (months === 0) return;
       const end = endOf(completedOn, months);
       // Stretches follow one another: those under cover are a run of them.
-      const first = stretches.findIndex(({ to }) => completedOn <= to);
+      const first = firstOf(completedOn);
       if (first < 0) return;
       for (let place = first; place < stretches.length; place += 1) {
         const { from } = stretches[place] as Days;

@@ -10,6 +10,7 @@ import {
   ROT_BRANCHES,
   ROT_PLACES,
   type RotBranch,
+  type SentFinding,
 } from '../../../test/support/rot-store';
 import type { SmallStore } from '../../../test/support/small-store';
 import { makeWarrantyStore, openClaim, writeClaim } from '../../../test/support/warranty-store';
@@ -142,7 +143,12 @@ const CARS = fc.array(
     ]),
     boughtInCents: fc.nat(9_999),
     invoice: fc.option(fc.record({ totalCents: fc.nat(150_000) }), { nil: undefined }),
-    findings: fc.constantFrom([], [], [found('floor')], [found('floor', { seenAs: 'surface' })]),
+    findings: fc.constantFrom<SentFinding[]>(
+      [],
+      [],
+      [found('floor')],
+      [found('floor', { seenAs: 'surface' })],
+    ),
     claims: fc.array(
       fc.record({
         days: fc.constantFrom(0, 1, 100, 365, 731, 1095, 1096, 1097),
