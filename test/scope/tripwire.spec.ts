@@ -98,6 +98,7 @@ const derived = ScopedDb.prototype.derived;
 
 /** Where branches' tables are named outside a scope, and why: writes bound to one branch, and what runs before anybody reads. */
 const NAMED_BARE: Record<string, string> = {
+  'action-writer.ts': 'one branch for life',
   'branch-writer.ts': 'one branch for life',
   'claim-writer.ts': 'one branch for life',
   'come-back-writer.ts': 'one branch for life',
@@ -111,6 +112,8 @@ const NAMED_BARE: Record<string, string> = {
   'quote-reference.ts': 'sums of the network, with five others behind them',
   'recompute.ts': 'the whole network, for tests',
   'restatement.ts': 'the whole network, before the switch',
+  'signal-writer.ts': 'the nightly look at the whole network, and marks of one branch',
+  'target-writer.ts': 'one branch for life, or the network’s own',
   'under-way-writer.ts': 'one branch for life',
   'queries/bookings.ts': 'writes of one branch',
   'queries/referrers.ts':
