@@ -61,6 +61,7 @@ const QUERIES: Record<string, string[]> = {
   '/api/analytics/branches/side-by-side': MEASURES,
   '/api/claims': ['counted=true', 'sort=completed&limit=1', 'q=walked', 'asOf=2026-01-30'],
   '/api/actions': ['limit=1', 'state=done'],
+  '/api/signals': ['limit=1', 'state=over&state=open', 'kind=silence'],
   '/api/come-back': ['limit=1', 'status=contacted'],
   '/api/analytics/warranty': [
     ...['asOf=2025-12-31', 'groupBy=branch', 'groupBy=region', 'groupBy=cohort&to=2024-01-01'],

@@ -85,7 +85,7 @@ function placeSignalOutside(app: TestApp, code: string, round: number): Promise<
     ...{ branchId, measure: null, since: '2026-01-10', cars: round, behind: null },
     ...{ kind: 'silence', key: `round ${round}`, strength: round, facts: {}, listed: [] },
   };
-  const day = addDays('1990-01-01', 1000 * branchId + round);
+  const day = addDays('1990-01-01', 100 * branchId + round);
   const changes = { opened: [found], kept: [], ended: [] };
   return store.queue.write(() => new LookWriter(store).keep(day, `${day}T01:00:00.000Z`, changes));
 }
