@@ -77,7 +77,7 @@ const FILTERS = [
   'region=COAST',
   'branch=ZZZ',
 ];
-const FILTERED = /^\/api\/(jobs|actions|claims|analytics|come-back|exports|week-notes)/;
+const FILTERED = /^\/api\/(jobs|actions|claims|analytics|come-back|exports|week-notes|signals)/;
 /** Cars that a quote may be asked for: many at the own branch, few there, none there; and a branch out of scope. */
 const QUOTES = [
   'firstRegistered=2009-05&branch=AAA',
