@@ -88,6 +88,11 @@ export class Scope {
     return !this.reach.branchIds.includes(branchId);
   }
 
+  /** Ids of everything that the caller may see, whatever was asked for, as the one value bound into a statement. */
+  get reachJson(): string {
+    return JSON.stringify(this.reach.branchIds);
+  }
+
   /** A plain value that crosses into a worker. */
   pack(): PackedScope {
     return {

@@ -1,6 +1,7 @@
 import type { ActionState, BranchMeasure } from '#shared/domain/vocabulary';
 import { sql } from '../database';
 import type { ScopedDb } from '../scoped-db';
+import { visibleSignals } from './signals';
 
 /** An action as it stands, with what the branch has answered. */
 export interface ActionRow {
@@ -89,7 +90,7 @@ export function countActions(
 
 /** Whether a signal is of the scope. */
 export function isSignal(db: ScopedDb, id: number): boolean {
-  return db.first(db.table('signals').where({ id }).select('id')) !== undefined;
+  return db.first(visibleSignals(db).where('s.id', id).select('s.id')) !== undefined;
 }
 
 function told(db: ScopedDb) {

@@ -3,6 +3,7 @@ import type { Period } from '#shared/domain/period';
 import { OPEN_COME_BACKS, type BranchMeasure, type SignalKind } from '#shared/domain/vocabulary';
 import { sql } from '../database';
 import type { ScopedDb } from '../scoped-db';
+import { visibleSignals } from './signals';
 import { leftFindings } from './come-back-parts';
 
 /** What waits to be dealt with in a scope. */
@@ -75,7 +76,7 @@ export function readWaiting(db: ScopedDb, today: string): Waiting {
       .count({ n: '*' }),
   );
   const signals = db.first<{ n: number }>(
-    db.table('signals').whereNull('over_on').whereNull('acknowledged_at').count({ n: '*' }),
+    visibleSignals(db).whereNull('over_on').whereNull('acknowledged_at').count({ n: '*' }),
   );
   return {
     unbilled: unbilled?.cars ?? 0,
@@ -101,17 +102,16 @@ export function countBehindMargin(db: ScopedDb, { from, to }: Period): number {
 export function readDigestSignals(db: ScopedDb, overSince: string): DigestSignal[] {
   return db
     .all<Omit<DigestSignal, 'facts'> & { facts: string }>(
-      db
-        .table('signals')
-        .join('branches', 'branches.id', 'signals.branch_id')
+      visibleSignals(db)
+        .join('branches', 'branches.id', 's.branch_id')
         .join('regions', 'regions.id', 'branches.region_id')
         .whereRaw('(over_on is null or over_on >= ?)', [overSince])
-        .orderBy(['branches.code', 'signals.opened_on', 'signals.id'])
+        .orderBy(['branches.code', 's.opened_on', 's.id'])
         .select('kind', 'measure', 'since', 'strength', 'facts', 'cars', {
           branch: 'branches.code',
           branchName: 'branches.name',
           region: 'regions.code',
-          openedOn: 'signals.opened_on',
+          openedOn: 's.opened_on',
           overOn: 'over_on',
         }),
     )

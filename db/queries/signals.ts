@@ -122,18 +122,20 @@ export function lastLookedOn(db: Pick<ScopedDb, 'first'>): string | null {
 }
 
 /**
- * Signals in scope of the kinds asked for. One that compares with the network is there only for whoever may see a network
- * figure made of the branches behind it (rules 21 and 81).
+ * The signals in scope, as `s`. One that compares with the network is there only for whoever may see a network figure made of
+ * the branches behind it (rules 21 and 81), judged by all that they may see.
  */
-function matching(db: ScopedDb, { reach, kinds }: SignalFilters): Knex.QueryBuilder {
-  const query = db
-    .table('signals', 's')
-    .join('branches', 'branches.id', 's.branch_id')
-    .whereRaw(
-      `(? = 1 or s.behind is null or (select count(*) from json_each(s.behind) as other
+export function visibleSignals(db: ScopedDb, reach: Scope = db.scope): Knex.QueryBuilder {
+  return db.table('signals', 's').whereRaw(
+    `(? = 1 or s.behind is null or (select count(*) from json_each(s.behind) as other
         where other.value not in (select value from json_each(?))) >= ?)`,
-      [reach.ofNetwork ? 1 : 0, reach.idsJson, FEWEST_OTHERS],
-    );
+    [reach.ofNetwork ? 1 : 0, reach.reachJson, FEWEST_OTHERS],
+  );
+}
+
+/** Visible signals of the kinds asked for. */
+function matching(db: ScopedDb, { reach, kinds }: SignalFilters): Knex.QueryBuilder {
+  const query = visibleSignals(db, reach).join('branches', 'branches.id', 's.branch_id');
   if (kinds) {
     query.whereRaw('s.kind in (select value from json_each(?))', [JSON.stringify(kinds)]);
   }
