@@ -50,7 +50,9 @@ describe('NotedChanges', () => {
       small.store.writing.driver.pragma('defer_foreign_keys = ON');
       small.store.writing.driver.exec('delete from branches');
     });
-    await expect(failing).rejects.toThrow();
+    await expect(failing).rejects.toMatchObject({
+      code: expect.stringMatching(/^SQLITE_CONSTRAINT/),
+    });
     expect(small.count('jobs')).toBe(0);
     await small.putJob('BBB', '2');
     expect(told).toEqual([[jobs('BBB', 1, 1)]]);
