@@ -38,7 +38,12 @@ describe('weekPictures', () => {
     );
     expect(pictures[0]).toMatchObject({
       last: '2 claims',
-      chart: { look: 'bars', target: null, scale: [0, 2] },
+      chart: {
+        look: 'bars',
+        target: null,
+        scale: [0, 2],
+        summary: 'HAV: 2 claims in 2 weeks, at most 2 in one',
+      },
     });
   });
 });

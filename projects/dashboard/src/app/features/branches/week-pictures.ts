@@ -41,7 +41,7 @@ export function weekPictures(answer: BranchWeeksAnswer, words: BranchWords): Wee
         of,
         chart: {
           summary: [
-            `${name}: ${last}`,
+            `${name}: ${last}${measure === 'claims' ? spreadWords(of) : ''}`,
             usualWords(measure, of),
             signalWords(of),
             targetWords(measure, of),
@@ -117,6 +117,12 @@ function findingOf(measure: BranchMeasure, pictures: readonly WeekPicture[]): st
   return `${formatCounted(marked.length, 'branch', 'branches')} of ${formatCount(pictures.length)} had weeks outside their own usual range or in a run: ${marked
     .map(({ name, of }) => `${name} ${signalWords(of)}`)
     .join('; ')}.`;
+}
+
+/** How claims lie over the weeks. */
+function spreadWords({ weeks }: BranchWeeks): string {
+  const most = Math.max(0, ...weeks.map(({ value }) => value ?? 0));
+  return ` in ${formatCounted(weeks.length, 'week', 'weeks')}, at most ${formatCount(most)} in one`;
 }
 
 function lastWords(measure: BranchMeasure, of: BranchWeeks): string {
