@@ -13,10 +13,13 @@ export function mailPieces(text: string, origin: string): readonly MailPiece[] {
     .map((piece) => ({ text: piece, path: pathWithin(piece, origin) }));
 }
 
+/** Pages that are opened from a mail, with what its link carries. */
+const MAILED: readonly string[] = ['/welcome', '/unsubscribe'];
+
 function pathWithin(piece: string, origin: string): string | undefined {
   if (!/^https?:\/\//.test(piece) || !URL.canParse(piece)) return undefined;
   const address = new URL(piece);
-  // The mail names the address the service knows itself by; on the page of a mailed link only the path matters.
-  const ours = address.origin === origin || address.pathname === '/welcome';
+  // The mail names the address the service knows itself by; on the pages of mailed links only the path matters.
+  const ours = address.origin === origin || MAILED.includes(address.pathname);
   return ours ? address.pathname + address.search : undefined;
 }
