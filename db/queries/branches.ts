@@ -65,7 +65,7 @@ const MARGIN_COLUMNS = [
 ];
 
 /** How a measure is summed over the facts: which cars, what divides, and the parts of what is divided. */
-const SUMMED: Record<
+export const SUMMED: Record<
   Exclude<BranchMeasure, 'claims'>,
   { counted: Readonly<Record<string, number>>; e: string; a: string; parts: readonly string[] }
 > = {
@@ -135,12 +135,21 @@ export function readProductParts(
   );
 }
 
+/** Narrows a query over the facts to the cars that a measure counts. */
+export function whereCounted(
+  query: Knex.QueryBuilder,
+  measure: Exclude<BranchMeasure, 'claims'>,
+): Knex.QueryBuilder {
+  query.where(SUMMED[measure].counted);
+  return measure === 'product' ? query.where('norm_ml', '>', 0) : query;
+}
+
 function summedCells(
   source: FunnelSource,
   measure: Exclude<BranchMeasure, 'claims'>,
   filters: JobFilters,
 ): BranchFunnelCell[] {
-  const { counted, e, a, parts } = SUMMED[measure];
+  const { e, a, parts } = SUMMED[measure];
   // Squares of cents would overrun whole numbers of 64 bits, so they are added up as fractions.
   const sums = [
     'branch_id as "branchId"',
@@ -152,8 +161,7 @@ function summedCells(
     `sum(1.0 * ${e} * ${e}) as ee`,
     ...parts.map((part, place) => `sum(${part}) as part${place}`),
   ];
-  const query = whereJobs(source.facts(), filters).where(counted);
-  if (measure === 'product') query.where('norm_ml', '>', 0);
+  const query = whereCounted(whereJobs(source.facts(), filters), measure);
   return source
     .all<Omit<BranchFunnelCell, 'parts'> & Record<`part${number}`, number>>(
       query.groupByRaw('1, 2').select(sql.raw(sums.join(', '))),

@@ -3,11 +3,9 @@ import type { Signal, SignalCar } from '#shared/contracts/signals';
 import type { SignalFacts } from '#shared/domain/signal-facts';
 import { SIGNAL_KINDS, type SignalKind, type SignalState } from '#shared/domain/vocabulary';
 import { sql } from '../database';
+import { FEWEST_OTHERS } from '../network-reference';
 import type { Scope } from '../scope';
 import type { ScopedDb } from '../scoped-db';
-
-/** Branches besides a caller's own behind a network figure that the caller may see (rule 21). */
-const FEWEST_OTHERS = 5;
 
 /** Where a page of signals ended. */
 export interface SignalPlace {

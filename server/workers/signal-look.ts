@@ -152,6 +152,7 @@ function weeks({ db, dateOf }: Look): FoundSignal[] {
 function funnels({ db, reference, today }: Look): FoundSignal[] {
   const period = defaultPeriod(today);
   return BRANCH_MEASURES.flatMap((measure) => {
+    const claimed = measure === 'claims' ? readClaims(db, today).map(({ jobId }) => jobId) : [];
     const answer = answerBranches(db, { measure, period, filters: {}, today }, reference);
     const idOf = (code: string): number => db.scope.branch(code)?.id ?? 0;
     const behind = answer.branches.filter(({ cars }) => cars > 0).map(({ branch }) => idOf(branch));
@@ -160,7 +161,6 @@ function funnels({ db, reference, today }: Look): FoundSignal[] {
       const found = detectLeftFunnel({ ...place, branchId, measure, ...period }, behind, today);
       return found.map((signal) => {
         const { side } = signal.facts as unknown as FactsByKind['left_funnel'];
-        const claimed = measure === 'claims' ? readClaims(db, today).map(({ jobId }) => jobId) : [];
         const asked = { ...period, side, claimed };
         const refs = listMovingCars(db, branchId, measure, asked, MOST_LISTED);
         return { ...signal, listed: refs.map((ref) => ({ ref, why: '' })) };
