@@ -1,5 +1,9 @@
 import { type HttpTestingController } from '@angular/common/http/testing';
 import { signal } from '@angular/core';
+import { TestBed } from '@angular/core/testing';
+import type { listSignals } from '#shared/contracts/signals';
+import type { OutOf } from '#shared/contracts/endpoint';
+import type { Role } from '#shared/domain/vocabulary';
 import {
   jobRow,
   jobsAnswer,
@@ -9,9 +13,10 @@ import {
   weeksFromTo,
 } from '../../testing/week-answers';
 import { openPage } from '../../testing/open-page';
+import { dangerSignal, signalList, signalOf } from '../../testing/signal-answers';
 import { ThisWeekPage } from './this-week-page';
 
-async function open(role: 'site_manager' | 'regional_lead', url = '/this-week?branch=HAV') {
+async function open(role: Role, url = '/this-week?branch=HAV') {
   return openPage(ThisWeekPage, {
     url,
     role,
@@ -32,7 +37,10 @@ function asked(http: HttpTestingController): { path: string; query: Record<strin
     .map((url) => ({ path: url.pathname, query: Object.fromEntries(url.searchParams) }));
 }
 
-async function answerAll(page: Awaited<ReturnType<typeof open>>): Promise<void> {
+async function answerAll(
+  page: Awaited<ReturnType<typeof open>>,
+  signals: OutOf<typeof listSignals> = signalList([]),
+): Promise<void> {
   for (const call of page.http.match(() => true)) {
     const url = new URL(call.request.urlWithParams, 'http://app');
     const month = url.searchParams.get('from') === '2025-07-28';
@@ -43,7 +51,7 @@ async function answerAll(page: Awaited<ReturnType<typeof open>>): Promise<void> 
     } else if (url.pathname === '/api/jobs') {
       const unbilled = url.searchParams.get('unbilled') === 'true';
       call.flush(jobsAnswer(unbilled ? [unbilledRow('0398', 19)] : [jobRow('0417')]));
-    } else call.flush({ items: [] });
+    } else call.flush(url.pathname === '/api/signals' ? signals : { items: [] });
   }
   await page.settle();
 }
@@ -100,6 +108,53 @@ describe('ThisWeekPage', () => {
     expect(page.host.querySelector('us-unbilled-cars')?.textContent).toContain('0398');
     expect(page.host.textContent).not.toContain('Bill it');
     expect(page.host.textContent).not.toContain('Leave a note');
+  });
+
+  it('with open signals in scope: a line below the answer says them and leads to the branch’s', async () => {
+    const page = await open('site_manager');
+    const [question] = asked(page.http).filter(({ path }) => path === '/api/signals');
+    expect(question?.query).toEqual({ branch: 'HAV', state: 'open', limit: '200' });
+    TestBed.resetTestingModule();
+    const again = await open('site_manager', '/this-week');
+    await answerAll(again, signalList([dangerSignal(1), signalOf(2)]));
+    await answerAll(again);
+    const line = again.host.querySelector('us-answer + .signals');
+    expect(line?.textContent?.trim().replace(/\s+/g, ' ')).toBe(
+      '2 open signals: dangerous rot left on cars is past its day and cars wait for their bill.',
+    );
+    expect(line?.querySelector('a')?.getAttribute('href')).toBe('/signals?branch=HAV&state=open');
+  });
+
+  it('with no open signal, or none that could be read: no line, and the page as ever', async () => {
+    for (const trouble of [false, true]) {
+      const page = await open('regional_lead');
+      if (trouble) {
+        page.http
+          .expectOne(({ url }) => url === '/api/signals' || url.startsWith('/api/signals?'))
+          .flush(null, { status: 500, statusText: 'Failed' });
+      }
+      await answerAll(page);
+      await answerAll(page);
+      expect(page.host.querySelector('h1')?.textContent).toContain('Week 5 kept');
+      expect(page.host.querySelector('.signals')).toBeNull();
+      TestBed.resetTestingModule();
+    }
+  });
+
+  it('with signals that do not come: the answer does not wait for them', async () => {
+    const page = await open('head_office');
+    const held = page.http.expectOne(({ url }) => url.startsWith('/api/signals'));
+    await answerAll(page);
+    await answerAll(page);
+    expect(page.host.querySelector('h1')?.textContent).toContain('Week 5 kept');
+    held.flush(signalList([signalOf(2)]));
+    await page.settle();
+    expect(page.host.querySelector('.signals')?.textContent).toContain('1 open signal');
+  });
+
+  it('a recorder: is not asked signals for', async () => {
+    const { http } = await open('recorder');
+    expect(asked(http).map(({ path }) => path)).not.toContain('/api/signals');
   });
 
   it('a call fails: says so and offers to try again', async () => {

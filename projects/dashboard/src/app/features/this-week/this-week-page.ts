@@ -1,7 +1,9 @@
 import { ChangeDetectionStrategy, Component, computed, inject, linkedSignal } from '@angular/core';
+import { RouterLink } from '@angular/router';
 import { exportJobs } from '#shared/contracts/exports';
 import { listJobs } from '#shared/contracts/job-list';
 import { getMargin } from '#shared/contracts/margin';
+import { listSignals } from '#shared/contracts/signals';
 import { BridgeChart } from '../../charts/bridge/bridge-chart';
 import { WeeklyMarginChart } from '../../charts/weekly-margin/weekly-margin-chart';
 import { Api } from '../../core/api/api';
@@ -18,6 +20,7 @@ import { EmptyNext } from '../../ui/empty-next/empty-next';
 import { LoadState } from '../../ui/load-state/load-state';
 import { narrowWindow } from '../../ui/narrow';
 import { TableTwin } from '../../ui/table-twin/table-twin';
+import { openSignals } from './open-signals';
 import { thisWeekView } from './this-week-series';
 import { UnbilledCars } from './unbilled-cars';
 import { tellingFirst } from './week-cars';
@@ -38,6 +41,7 @@ const LIMIT = 200;
     DataTable,
     EmptyNext,
     LoadState,
+    RouterLink,
     ScopeLine,
     TableTwin,
     UnbilledCars,
@@ -69,6 +73,16 @@ export class ThisWeekPage {
     }),
     'jobs',
   );
+  /** Beside the answers, not among them: neither its wait nor its trouble is the page's. */
+  private readonly openOnes = keepLive(
+    this.api.read(listSignals, () => {
+      const { region, branch } = this.scope.filters();
+      const role = this.session.role();
+      if (role === undefined || role === 'recorder') return undefined;
+      return { query: { region, branch, state: ['open' as const], limit: LIMIT } };
+    }),
+    'signals',
+  );
 
   protected readonly words = computed((): WeekWords => {
     const scope = this.answers.value()?.chart.scope ?? { regions: [], branches: [] };
@@ -88,6 +102,13 @@ export class ThisWeekPage {
   protected readonly view = computed(() => {
     const answers = this.answers.value();
     return answers && thisWeekView(answers, this.words());
+  });
+  protected readonly signals = computed(() => {
+    const list = this.openOnes.value();
+    const codes = this.answers.value()?.chart.scope.branches;
+    if (!list || !codes) return undefined;
+    const { region, branch } = this.scope.filters();
+    return openSignals(list, { region, branch, codes, branchName: this.words().branchName });
   });
   /** Managers and head office bill cars and write notes. */
   protected readonly mayWrite = computed(
