@@ -1,10 +1,11 @@
 import { signal } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { openDB } from 'idb';
-import { newDevice, photoFile, refusingDevice } from '../../testing/device';
+import { letGo, newDevice, notedAhead, photoFile, refusingDevice } from '../../testing/device';
 import { Session } from '../session/session';
 import type { TypedClaim } from './claim-draft';
 import { ClaimDrafts } from './claim-drafts';
+import { DeviceStore } from './device-store';
 import { PhotoRefused } from './photo-check';
 
 const JOB = { branch: 'HAV', jobRef: '0417' };
@@ -43,6 +44,27 @@ describe('ClaimDrafts', () => {
     expect(kept?.typed).toEqual(TYPED);
     expect(kept?.photos).toEqual([{ id: expect.any(String) as string, state: 'here' }]);
     expect((await later.photo(JOB, kept!.photos[0]!.id))?.type).toBe('image/png');
+  });
+
+  it('given a page gone before what was typed was kept, has it after a start anew', async () => {
+    const drafts = opened();
+    await drafts.change(JOB, { typed: TYPED });
+    letGo(TestBed.inject(DeviceStore));
+    void drafts.change(JOB, { typed: { ...TYPED, note: 'wax never reached the far end' } });
+    const later = opened();
+    expect((await later.find({ ...JOB, jobRef: '0418' }))?.typed).toBeUndefined();
+    expect((await later.find(JOB))?.typed.note).toBe('wax never reached the far end');
+    expect((await opened().find(JOB))?.typed.note).toBe('wax never reached the far end');
+    expect(notedAhead()).toEqual([]);
+  });
+
+  it('given a claim taken off the device, leaves no note of it', async () => {
+    const drafts = opened();
+    void drafts.change(JOB, { typed: TYPED });
+    expect(notedAhead()).toHaveLength(1);
+    await drafts.forget(JOB);
+    expect(notedAhead()).toEqual([]);
+    expect(await opened().find(JOB)).toBeUndefined();
   });
 
   it('given another person on the device, shows them nothing of it', async () => {

@@ -5,6 +5,7 @@ import type { ClaimDevicePhoto, ClaimDraft, ClaimDraftChange, TypedClaim } from 
 import { DeviceStore } from './device-store';
 import { newId } from './new-id';
 import { readPhoto } from './photo-check';
+import { type AheadPlace, WrittenAhead } from './written-ahead';
 
 /** The job on which a claim is written. */
 export interface ClaimedJob {
@@ -17,6 +18,7 @@ export interface ClaimedJob {
 export class ClaimDrafts {
   private readonly session = inject(Session);
   private readonly store = inject(DeviceStore);
+  private readonly ahead = inject(WrittenAhead);
   /** Writes follow one another in the order in which they were asked for. */
   private writing: Promise<unknown> = Promise.resolve();
 
@@ -26,16 +28,23 @@ export class ClaimDrafts {
   /** The claim being written on a job, or undefined. */
   async find(job: ClaimedJob): Promise<ClaimDraft | undefined> {
     await this.writing;
+    await this.takeUp(job);
     const key = this.keyOf(job);
     return key === undefined ? undefined : this.store.get('claims', key);
   }
 
-  /** Changes what is kept, or begins it with `typed`; gives the draft as kept then. */
+  /**
+   * Changes what is kept, or begins it with `typed`; gives the draft as kept then. A page that goes before it is kept leaves a
+   * note of what was typed.
+   */
   change(job: ClaimedJob, change: ClaimDraftChange): Promise<ClaimDraft | undefined> {
-    return this.write(job, (kept) => {
+    const written = this.write(job, (kept) => {
       const begun = kept ?? (change.typed && this.begun(job, change.typed));
       return begun && { ...begun, ...change, changedAt: new Date().toISOString() };
     });
+    const place = this.noteOf(job);
+    if (place && change.typed) void this.ahead.note(place, change.typed, later, written);
+    return written;
   }
 
   /** Adds a photo taken or chosen. Throws a `PhotoRefused` with a sentence when it is no JPEG or PNG or too large. */
@@ -84,9 +93,29 @@ export class ClaimDrafts {
   async forget(job: ClaimedJob): Promise<void> {
     const photos = (await this.find(job))?.photos ?? [];
     await this.write(job, () => undefined);
+    const place = this.noteOf(job);
+    if (place) this.ahead.forget(place);
     for (const { id } of photos) {
       await this.store.update('photos', this.placeOf(job, id), () => undefined);
     }
+  }
+
+  /** Writes what a window gone had typed and did not see kept. */
+  private async takeUp(job: ClaimedJob): Promise<void> {
+    const place = this.noteOf(job);
+    if (!place) return;
+    const notes = this.ahead.left<TypedClaim>('claim', place.personId);
+    for (const { change: typed, drop } of notes.filter(({ id }) => id === place.id)) {
+      await this.change(job, { typed });
+      drop();
+    }
+  }
+
+  private noteOf({ branch, jobRef }: ClaimedJob): AheadPlace | undefined {
+    const personId = this.session.person()?.id;
+    return personId === undefined
+      ? undefined
+      : { kind: 'claim', personId, id: `${branch} ${jobRef}` };
   }
 
   private begun({ branch, jobRef }: ClaimedJob, typed: TypedClaim): ClaimDraft | undefined {
@@ -116,4 +145,9 @@ export class ClaimDrafts {
   private placeOf(job: ClaimedJob, photo: string): string {
     return `${this.keyOf(job) ?? 'nobody'} ${photo}`;
   }
+}
+
+/** What a form holds is noted whole: the later one says it all. */
+function later(_earlier: TypedClaim, typed: TypedClaim): TypedClaim {
+  return typed;
 }

@@ -1,22 +1,25 @@
 import { createEnvironmentInjector, EnvironmentInjector, signal } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { BroadcastChannel } from 'node:worker_threads';
-import { newDevice, photoFile, refusingDevice } from '../../testing/device';
+import { letGo, newDevice, notedAhead, photoFile, refusingDevice } from '../../testing/device';
 import { Session } from '../session/session';
 import { DeviceStore } from './device-store';
 import { Drafts } from './drafts';
 import { PhotoRefused } from './photo-check';
 import { UnsentHere } from './unsent-here';
+import { WrittenAhead } from './written-ahead';
 
 const person = signal<{ id: number } | undefined>({ id: 7 });
 
 /** A window of the product on the device; two of them share what is kept and nothing else. */
 const opened: EnvironmentInjector[] = [];
+const stores = new WeakMap<Drafts, DeviceStore>();
 async function openWindow(): Promise<Drafts> {
   const parent = TestBed.inject(EnvironmentInjector);
-  const own = createEnvironmentInjector([DeviceStore, Drafts, UnsentHere], parent);
+  const own = createEnvironmentInjector([DeviceStore, Drafts, UnsentHere, WrittenAhead], parent);
   opened.push(own);
   const drafts = own.get(Drafts);
+  stores.set(drafts, own.get(DeviceStore));
   await drafts.whenRead();
   return drafts;
 }
@@ -78,6 +81,81 @@ describe('Drafts', () => {
     person.set(undefined);
     await drafts.change(id, { jobRef: '0417' });
     expect(drafts.find(id)?.jobRef).toBe('0417');
+  });
+
+  it('given a page gone before changes were written, has them when opened anew', async () => {
+    const first = await openWindow();
+    const { id } = await first.begin('HAV', { content: { notes: 'seat out' } });
+    letGo(stores.get(first)!);
+    void first.change(id, { jobRef: '0417', content: { notes: 'seat out', package: 'full' } });
+    void first.change(id, { content: { package: 'full' }, step: 2 });
+    const again = await openWindow();
+    const whole = { jobRef: '0417', content: { package: 'full' }, step: 2 };
+    expect(again.find(id)).toMatchObject(whole);
+    expect(again.find(id)?.content).toEqual(whole.content);
+    expect((await openWindow()).find(id)).toMatchObject(whole);
+    expect(notedAhead()).toEqual([]);
+  });
+
+  it('given a page gone before a change was written, and another line written since, has both', async () => {
+    const first = await openWindow();
+    const { id } = await first.begin('HAV', { content: { notes: 'seat out' } });
+    const other = await openWindow();
+    letGo(stores.get(first)!);
+    void first.change(id, { content: { notes: 'seat out', package: 'full' } });
+    await other.change(id, { content: { notes: 'seat out, carpet wet' } });
+    const again = await openWindow();
+    expect(again.find(id)?.content).toEqual({ notes: 'seat out, carpet wet', package: 'full' });
+    expect(again.list()).toHaveLength(1);
+  });
+
+  it('given a page gone before a change was written, and the job removed since, has no such job', async () => {
+    const first = await openWindow();
+    const { id } = await first.begin('HAV');
+    const other = await openWindow();
+    letGo(stores.get(first)!);
+    void first.change(id, { jobRef: '0417' });
+    await other.remove(id);
+    expect((await openWindow()).list()).toEqual([]);
+    expect(notedAhead()).toEqual([]);
+  });
+
+  it('given a page gone before a change was written, shows another person nothing of it', async () => {
+    const first = await openWindow();
+    const { id } = await first.begin('HAV');
+    letGo(stores.get(first)!);
+    void first.change(id, { jobRef: '0417' });
+    person.set({ id: 8 });
+    expect((await openWindow()).list()).toEqual([]);
+    person.set({ id: 7 });
+    expect((await openWindow()).find(id)?.jobRef).toBe('0417');
+  });
+
+  it('given a job sent since as it was noted, does not open it again', async () => {
+    const first = await openWindow();
+    const { id } = await first.begin('HAV');
+    const other = await openWindow();
+    letGo(stores.get(first)!);
+    void first.change(id, { jobRef: '0417' });
+    await other.change(id, { jobRef: '0417' });
+    await other.mark(id, () => ({
+      state: 'sent',
+      sentAs: '"r1"',
+      sentAt: new Date().toISOString(),
+    }));
+    expect((await openWindow()).find(id)).toMatchObject({ state: 'sent', jobRef: '0417' });
+  });
+
+  it('leaves no note of what is written', async () => {
+    const drafts = await openWindow();
+    const { id } = await drafts.begin('HAV');
+    const written = Promise.all([
+      drafts.change(id, { jobRef: '0417' }),
+      drafts.change(id, { step: 2 }),
+    ]);
+    expect(notedAhead()).toHaveLength(1);
+    await written;
+    await until(() => notedAhead().length === 0);
   });
 
   it('given two windows, shows in one what was written in the other', async () => {

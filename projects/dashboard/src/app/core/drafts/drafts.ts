@@ -17,6 +17,7 @@ import { readPhoto } from './photo-check';
 import { UnsentHere } from './unsent-here';
 import { isOver, unsentIn } from './unsent-in';
 import { otherWindows } from './windows';
+import { type AheadPlace, WrittenAhead } from './written-ahead';
 
 const TWO_WINDOWS =
   'This job was changed in two windows at once. Both versions are kept, each as a job of its own: remove the one that is not right.';
@@ -27,6 +28,7 @@ export class Drafts {
   private readonly session = inject(Session);
   private readonly store = inject(DeviceStore);
   private readonly unsent = inject(UnsentHere);
+  private readonly ahead = inject(WrittenAhead);
   private readonly windows = otherWindows(() => void this.read());
   /** Whoever signed in last: a sign-in that ends by itself must not take away what is being written. */
   private readonly owner = linkedSignal<number | undefined, number | undefined>({
@@ -96,8 +98,8 @@ export class Drafts {
   }
 
   /**
-   * Changes a draft; visible in `list` at once, durable when settled. Changing a waiting or refused one makes it `editing`
-   * again. `from` is the draft as the form last took it over or wrote it: what another window changed since then stays.
+   * Changes a draft; visible in `list` at once, durable when settled; a page that goes before that leaves a note of it. Changing
+   * a waiting or refused one makes it `editing` again. `from` is the draft as the form last took it over or wrote it: what another window changed since then stays.
    */
   async change(id: string, change: DraftChange, from?: DeviceDraft): Promise<void> {
     const shown = this.find(id);
@@ -110,11 +112,13 @@ export class Drafts {
     };
     this.show(changed(shown).draft);
     let other: DeviceDraft | undefined;
-    await this.write(id, (kept) => {
+    const written = this.write(id, (kept) => {
       const { draft, clash } = changed(kept ?? shown);
       other = clash ? kept : undefined;
       return draft;
     });
+    void this.ahead.note(placeOf(shown), { from: seen, change }, joined, written);
+    await written;
     if (other) await this.keepApart(other);
   }
 
@@ -128,7 +132,9 @@ export class Drafts {
   /** Removes a draft and its photos from the device. */
   async remove(id: string): Promise<void> {
     const photos = this.find(id)?.photos ?? [];
+    const personId = this.owner();
     this.set(this.kept().filter((draft) => draft.id !== id));
+    if (personId !== undefined) this.ahead.forget({ kind: 'job', personId, id });
     await Promise.all([
       this.write(id, () => undefined),
       this.store.update('queue', id, () => undefined),
@@ -141,14 +147,14 @@ export class Drafts {
     const read = await readPhoto(file);
     const photo: DevicePhoto = { id: newId(), finding, state: 'here' };
     // First the bytes: a photo named in a draft must be there.
-    await this.store.update('photos', placeOf(id, photo.id), () => read);
+    await this.store.update('photos', bytesOf(id, photo.id), () => read);
     await this.mark(id, (draft) => ({ photos: [...draft.photos, photo] }));
     return photo.id;
   }
 
   /** The photo's bytes, to show it; not of one that was sent with its job. */
   async photo(id: string, photo: string): Promise<Blob | undefined> {
-    const kept = await this.store.get('photos', placeOf(id, photo));
+    const kept = await this.store.get('photos', bytesOf(id, photo));
     return kept && new Blob([kept.bytes], { type: kept.type });
   }
 
@@ -164,7 +170,7 @@ export class Drafts {
 
   /** Frees the room of a photo that the server has. */
   async dropBytes(id: string, photo: string): Promise<void> {
-    await this.store.update('photos', placeOf(id, photo), () => undefined);
+    await this.store.update('photos', bytesOf(id, photo), () => undefined);
   }
 
   /** Reads the device again, as it is once everything asked for before has been written. */
@@ -181,8 +187,22 @@ export class Drafts {
     const own = found.filter(({ personId }) => personId === owner);
     const over = own.filter((draft) => isOver(draft, new Date()));
     this.set(own.filter((draft) => !over.includes(draft)));
+    const first = this.readFor() !== owner;
     this.readFor.set(owner);
+    if (first && owner !== undefined) await this.takeUp(owner);
     for (const draft of over) await this.remove(draft.id);
+  }
+
+  /** Changes what a window gone was about to change. Shown before anything else has a turn: forms open with it. */
+  private async takeUp(owner: number): Promise<void> {
+    const notes = this.ahead.left<NotedChange>('job', owner);
+    const changes = notes.map(({ id, change: { change, from } }) => {
+      const shown = this.find(id);
+      const isThere = !shown || saysTheSame(mergeChange(shown, from, change).draft, shown);
+      return isThere ? undefined : this.change(id, change, from);
+    });
+    await Promise.all(changes);
+    for (const note of notes) note.drop();
   }
 
   private async write(
@@ -222,6 +242,25 @@ export class Drafts {
   }
 }
 
+/** A change noted before it is written, and the draft it was made to. */
+interface NotedChange {
+  readonly from: DeviceDraft;
+  readonly change: DraftChange;
+}
+
+/** Changes of one draft one after the other, as one. */
+function joined(earlier: NotedChange, later: NotedChange): NotedChange {
+  return { from: earlier.from, change: { ...earlier.change, ...later.change } };
+}
+
+function placeOf({ personId, id }: DeviceDraft): AheadPlace {
+  return { kind: 'job', personId, id };
+}
+
+function saysTheSame(one: DeviceDraft, other: DeviceDraft): boolean {
+  return JSON.stringify(one) === JSON.stringify(other);
+}
+
 /** A job changed after it was handed over is written again; one that the server has becomes a correction of it. */
 function reopenedFrom(draft: DeviceDraft): Partial<DeviceDraft> {
   if (draft.state === 'editing') return {};
@@ -229,6 +268,6 @@ function reopenedFrom(draft: DeviceDraft): Partial<DeviceDraft> {
   return { state: 'editing', problem: undefined, ...(sent && { corrects: draft.sentAs }) };
 }
 
-function placeOf(id: string, photo: string): string {
+function bytesOf(id: string, photo: string): string {
   return `${id} ${photo}`;
 }

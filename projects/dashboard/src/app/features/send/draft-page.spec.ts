@@ -13,7 +13,7 @@ import { Catalogue } from '../../core/catalogue/catalogue';
 import { Drafts } from '../../core/drafts/drafts';
 import { RETRY_PACE } from '../../core/drafts/retry-pace';
 import { Session } from '../../core/session/session';
-import { newDevice } from '../../testing/device';
+import { newDevice, notedAhead } from '../../testing/device';
 import { JobServer } from '../../testing/job-server';
 import { DraftPage } from './draft-page';
 import type { DraftDocument } from './draft-document';
@@ -123,6 +123,26 @@ describe('DraftPage', () => {
     fixture.destroy();
     await wait(50);
     expect(drafts.find(id)?.content.vehicle?.model).toBe('Tessock');
+  });
+
+  it('typed into without a pause, keeps what was typed meanwhile', async () => {
+    const { drafts, id, type } = await open('car');
+    const text = 'Tessock with the long bed';
+    for (let length = 1; length <= text.length; length += 1) {
+      await type('/vehicle/model', text.slice(0, length));
+    }
+    const kept = drafts.find(id)?.content.vehicle?.model ?? '';
+    expect(kept.length).toBeGreaterThan(text.length / 4);
+  });
+
+  it('put away by the browser, given something just typed, has left a note of it in that very turn', async () => {
+    const { type } = await open('car');
+    await type('/vehicle/model', 'Tessock');
+    expect(notedAhead()).toEqual([]);
+    window.dispatchEvent(new Event('pagehide'));
+    expect(notedAhead().map((place) => localStorage.getItem(place))).toEqual([
+      expect.stringContaining('Tessock'),
+    ]);
   });
 
   it('typed into, given what cannot be read, keeps the text in sight, says how to write it, and keeps no half of it', async () => {

@@ -182,8 +182,8 @@ export class OpenDraft {
   }
 
   private keep(change: DraftChange): void {
-    if (this.waiting) clearTimeout(this.waiting.timer);
-    const timer = setTimeout(() => void this.flush(), KEPT_WITHIN);
+    // Not begun anew at each change: somebody who writes without a pause would have nothing kept.
+    const timer = this.waiting?.timer ?? setTimeout(() => void this.flush(), KEPT_WITHIN);
     this.waiting = { timer, change: { ...this.waiting?.change, ...change } };
   }
 }
