@@ -196,10 +196,10 @@ export class Drafts {
   /** Changes what a window gone was about to change. Shown before anything else has a turn: forms open with it. */
   private async takeUp(owner: number): Promise<void> {
     const notes = this.ahead.left<NotedChange>('job', owner);
-    const changes = notes.map(({ id, change: { change, from } }) => {
+    const changes = notes.flatMap(({ id, change: { change, from } }) => {
       const shown = this.find(id);
       const isThere = !shown || saysTheSame(mergeChange(shown, from, change).draft, shown);
-      return isThere ? undefined : this.change(id, change, from);
+      return isThere ? [] : [this.change(id, change, from)];
     });
     await Promise.all(changes);
     for (const note of notes) note.drop();
