@@ -31,6 +31,15 @@ describe('NotedChanges', () => {
     expect(told).toEqual([[jobs('AAA', 3, 3), jobs('BBB', 1, 1)]]);
   });
 
+  it('given pieces of several people in one commit, tells each one’s apart', async () => {
+    const put = (ref: string, by?: number | null) =>
+      small.store.queue.write(() => small.write('AAA', ref, {}), by);
+    await Promise.all([put('1', 7), put('2', 8), put('3', 7), put('4'), put('5', null)]);
+    expect(told).toEqual([
+      [{ ...jobs('AAA', 2, 2), by: 7 }, { ...jobs('AAA', 1, 1), by: 8 }, jobs('AAA', 2, 2)],
+    ]);
+  });
+
   it('given a piece that is rolled back beside one that is kept, tells only of the kept one', async () => {
     const settled = await Promise.allSettled([
       small.store.queue.write(() => {

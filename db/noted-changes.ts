@@ -8,6 +8,8 @@ export interface BranchChange {
   readonly count: number;
   /** How many of those were not there before. */
   readonly added: number;
+  /** The person who did it; absent: a branch's own system, or the product itself. */
+  readonly by?: number;
 }
 
 type Listener = (changes: readonly BranchChange[]) => void;
@@ -28,6 +30,7 @@ const WATCHED = [
  */
 export class NotedChanges {
   private noted: BranchChange[] = [];
+  private by: number | undefined;
   private readonly listeners: Listener[] = [];
 
   constructor(connection: Connection) {
@@ -37,6 +40,7 @@ export class NotedChanges {
         branchId: Number(branchId),
         count: 1,
         added: Number(added),
+        by: this.by,
       });
       return null;
     });
@@ -55,8 +59,9 @@ export class NotedChanges {
     this.listeners.push(listener);
   }
 
-  /** Where the notes stand, to take back what comes after. */
-  mark(): number {
+  /** Where the notes stand, to take back what comes after; that is `by`'s doing. */
+  mark(by?: number): number {
+    this.by = by;
     return this.noted.length;
   }
 
@@ -65,7 +70,7 @@ export class NotedChanges {
     this.noted.length = mark;
   }
 
-  /** Tells what was noted, one change a kind and branch: it is committed. */
+  /** Tells what was noted, one change a kind, branch and person: it is committed. */
   tell(): void {
     const changes = joined(this.noted);
     this.noted = [];
@@ -77,7 +82,7 @@ export class NotedChanges {
 function joined(noted: readonly BranchChange[]): BranchChange[] {
   const changes = new Map<string, BranchChange>();
   for (const change of noted) {
-    const key = `${change.kind} ${change.branchId}`;
+    const key = `${change.kind} ${change.branchId} ${change.by}`;
     const before = changes.get(key) ?? { ...change, count: 0, added: 0 };
     changes.set(key, {
       ...before,

@@ -3,6 +3,7 @@ import type { NotedChanges } from './noted-changes';
 
 interface Waiting {
   work: () => unknown;
+  by: number | undefined;
   resolve: (value: unknown) => void;
   reject: (error: unknown) => void;
 }
@@ -25,11 +26,15 @@ export class WriteQueue {
     private readonly changes: Pick<NotedChanges, 'mark' | 'takeBack' | 'tell'> = NOTHING_NOTED,
   ) {}
 
-  /** Runs `work` (synchronous, on the writing connection) in the next commit and returns its value once that is durable. */
-  write<T>(work: () => T): Promise<T> {
+  /**
+   * Runs `work` (synchronous, on the writing connection) in the next commit and returns its value once that is durable. `by` is
+   * the person who does it, so that they are not told of it as news.
+   */
+  write<T>(work: () => T, by?: number | null): Promise<T> {
     if (this.closed) return Promise.reject(new Error('the database is closing'));
     return new Promise<T>((resolve, reject) => {
-      this.waiting.push({ work, resolve: resolve as (value: unknown) => void, reject });
+      const told = resolve as (value: unknown) => void;
+      this.waiting.push({ work, by: by ?? undefined, resolve: told, reject });
       if (this.scheduled) return;
       this.scheduled = true;
       // One more turn, so that requests whose bodies arrive meanwhile share this commit: it costs far more than the wait.
@@ -52,9 +57,9 @@ export class WriteQueue {
     const before = this.changes.mark();
     try {
       this.connection.prepare('begin immediate').run();
-      for (const { work, resolve, reject } of batch) {
+      for (const { work, by, resolve, reject } of batch) {
         this.connection.prepare('savepoint piece').run();
-        const mark = this.changes.mark();
+        const mark = this.changes.mark(by);
         try {
           const value = work();
           this.connection.prepare('release piece').run();

@@ -37,6 +37,11 @@ export function actorOf(caller: Caller | undefined, address: string): Actor {
     : { label: `key ${caller.id}`, personId: null, pushKeyId: caller.id, address };
 }
 
+/** The person who calls, by number, for what is told to others but not to them. */
+export function personIdOf(caller: Caller | undefined): number | undefined {
+  return caller?.kind === 'person' ? caller.id : undefined;
+}
+
 /** A recorder sees no money (rule 24); a push key sends all of it. */
 export function moneyFor(caller: Caller | undefined): 'seen' | 'unseen' {
   return caller?.kind === 'person' && caller.role === 'recorder' ? 'unseen' : 'seen';

@@ -14,6 +14,8 @@ export interface LiveChange {
   count: number;
   /** How many of them are new; none when left out. */
   added?: number;
+  /** The person who did it, when one did. */
+  by?: number;
 }
 
 /** How fast the feed goes, ms. */
@@ -28,6 +30,14 @@ const PACES: Paces = { join: 250, breath: 20_000 };
 /** Streams that one person may hold, over all windows and devices; the oldest makes room. */
 const MOST_STREAMS = 8;
 
+/** What changed at a branch within one wait: who did how much of it. */
+interface Joined {
+  readonly kind: LiveEvent['kind'];
+  readonly branchId: number;
+  readonly byPerson: Map<number | undefined, Amount>;
+}
+type Amount = Pick<LiveEvent, 'count' | 'added'>;
+
 interface Follower {
   caller: PersonCaller;
   stream: LiveStream;
@@ -39,7 +49,7 @@ interface Follower {
  */
 export class LiveFeed {
   private readonly followers = new Set<Follower>();
-  private readonly pending = new Map<string, Required<LiveChange>>();
+  private readonly pending = new Map<string, Joined>();
   private joining: NodeJS.Timeout | undefined;
   private breathing: NodeJS.Timeout | undefined;
   private closed = false;
@@ -52,17 +62,13 @@ export class LiveFeed {
   }
 
   /** Says that something has changed; call it after the commit. Followers hear of it within a quarter of a second. */
-  tell({ kind, branchId, count, added = 0 }: LiveChange): void {
+  tell({ kind, branchId, count, added = 0, by }: LiveChange): void {
     // Who opens a page later reads it anew.
     if (this.followers.size === 0) return;
     const key = `${kind} ${branchId}`;
-    const before = this.pending.get(key) ?? { count: 0, added: 0 };
-    this.pending.set(key, {
-      kind,
-      branchId,
-      count: before.count + count,
-      added: before.added + added,
-    });
+    const joined = this.pending.get(key) ?? { kind, branchId, byPerson: new Map() };
+    joined.byPerson.set(by, sum([joined.byPerson.get(by), { count, added }]));
+    this.pending.set(key, joined);
     this.joining ??= setTimeout(() => this.passOn(), this.paces.join);
     this.joining.unref();
   }
@@ -92,10 +98,14 @@ export class LiveFeed {
       const person = this.personNow(follower);
       if (!person) continue;
       const scope = Scope.ofGrant(this.store.state.branches, person);
-      for (const { kind, branchId, count, added } of changes) {
+      for (const { kind, branchId, byPerson } of changes) {
         if (kind === 'signals' && person.role === 'recorder') continue;
-        const branch = scope.branches.find(({ id }) => id === branchId);
-        if (branch) follower.stream.send({ kind, branch: branch.code, count, added });
+        const branch = scope.branches.find(({ id }) => id === branchId)?.code;
+        if (branch === undefined) continue;
+        const { theirs, others } = parted(byPerson, follower.caller.id);
+        // Nobody is told whose the others' are, only that these are their own.
+        if (others.count > 0) follower.stream.send({ kind, branch, ...others });
+        if (theirs.count > 0) follower.stream.send({ kind, branch, ...theirs, own: true });
       }
     }
   }
@@ -133,4 +143,19 @@ export class LiveFeed {
     clearInterval(this.breathing);
     this.breathing = undefined;
   }
+}
+
+function parted(byPerson: Joined['byPerson'], person: number): { theirs: Amount; others: Amount } {
+  const rest = [...byPerson].filter(([by]) => by !== person);
+  return { theirs: sum([byPerson.get(person)]), others: sum(rest.map(([, amount]) => amount)) };
+}
+
+function sum(amounts: readonly (Amount | undefined)[]): Amount {
+  return amounts.reduce<Amount>(
+    (all, amount) => ({
+      count: all.count + (amount?.count ?? 0),
+      added: all.added + (amount?.added ?? 0),
+    }),
+    { count: 0, added: 0 },
+  );
 }

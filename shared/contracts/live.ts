@@ -11,6 +11,8 @@ export const liveEvent = z.strictObject({
   count: z.int(),
   /** How many of them are new, not changes of what was there. */
   added: z.int(),
+  /** There when the person who hears it did it, here or on another device: it changes the page and is no news. */
+  own: z.literal(true).optional(),
 });
 export type LiveEvent = z.output<typeof liveEvent>;
 

@@ -68,7 +68,7 @@ describe('GET /api/live', () => {
     expect(await following.until(1)).toEqual([{ kind: 'jobs', branch: 'AAA', count: 1, added: 1 }]);
     await app.call('put', path, { token, body: validJob({ notes: 'other' }) });
     await following.until(2);
-    await app.call('delete', path, { token: network.manager });
+    await app.call('delete', path, { token: network.office });
     expect((await following.until(3)).slice(1)).toEqual([
       { kind: 'jobs', branch: 'AAA', count: 1, added: 0 },
       { kind: 'jobs', branch: 'AAA', count: 1, added: 0 },
@@ -104,7 +104,7 @@ describe('GET /api/live', () => {
       ...validJob(n === 7 ? { package: 'none' } : {}),
     }));
     await app.call('post', '/api/branches/AAA/jobs/batch', {
-      token: network.manager,
+      token: network.office,
       body: { jobs },
     });
     const changes = await following.until(1);

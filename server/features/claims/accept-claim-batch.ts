@@ -25,7 +25,7 @@ export async function acceptClaimBatch(
   const results = await store.queue.write(() => {
     const writer = new ClaimWriter(store, branch);
     return read.map((item) => acceptItem(writer, item, sending));
-  });
+  }, sending.actor.personId);
   const counts = { created: 0, replaced: 0, unchanged: 0, rejected: 0 };
   for (const result of results) counts[result.status] += 1;
   return { counts, results };

@@ -6,7 +6,7 @@ import { getClaim, putClaim, putClaimBatch } from '#shared/contracts/claims';
 import { localDate } from '#shared/domain/calendar';
 import { breaksOfClaim } from '#shared/domain/claim-rules';
 import { notFound } from '#shared/domain/refusal';
-import { actorOf } from '../../auth/caller';
+import { actorOf, personIdOf } from '../../auth/caller';
 import { realClock } from '../../clock';
 import { mount, namedBranch, type Call, type Mounting } from '../../http/mount';
 import { checkPreconditions, tagOf } from '#shared/domain/preconditions';
@@ -25,19 +25,21 @@ export function mountClaims(mounting: Mounting, kit: Kit): void {
     putClaim,
     async (call) => {
       const writer = new ClaimWriter(store, namedBranch(call));
-      const accepted = await store.queue.write(() =>
-        acceptClaim(writer, call.params.claimRef, call.body, {
-          ...sendingOf(kit, call),
-          precondition: (stored: StoredClaim | undefined) =>
-            checkPreconditions(
-              {
-                ifMatch: call.ifMatch,
-                ifNoneMatch: call.ifNoneMatch,
-                lastChange: () => stored && writer.lastChange(stored.id),
-              },
-              stored && { revision: stored.revision, voided: false },
-            ),
-        }),
+      const accepted = await store.queue.write(
+        () =>
+          acceptClaim(writer, call.params.claimRef, call.body, {
+            ...sendingOf(kit, call),
+            precondition: (stored: StoredClaim | undefined) =>
+              checkPreconditions(
+                {
+                  ifMatch: call.ifMatch,
+                  ifNoneMatch: call.ifNoneMatch,
+                  lastChange: () => stored && writer.lastChange(stored.id),
+                },
+                stored && { revision: stored.revision, voided: false },
+              ),
+          }),
+        personIdOf(call.caller),
       );
       return {
         status: accepted.status === 'created' ? 201 : 200,

@@ -5,7 +5,7 @@ import {
   restoreJob as contract,
 } from '#shared/contracts/corrections';
 import { tagOf } from '#shared/domain/preconditions';
-import { actorOf, moneyFor } from '../../auth/caller';
+import { actorOf, moneyFor, personIdOf } from '../../auth/caller';
 import { realClock } from '../../clock';
 import { cursorOf, placeOf } from '../../http/list-cursor';
 import { mount, namedBranch, type Mounting } from '../../http/mount';
@@ -27,12 +27,14 @@ export function mountCorrections(mounting: Mounting, kit: Kit): void {
 
   mount(mounting, contract, async (call) => {
     const writer = new BranchWriter(store, namedBranch(call));
-    const restored = await store.queue.write(() =>
-      restoreJob(writer, call.params.jobRef, call.ifMatch, {
-        actor: actorOf(call.caller, call.address),
-        source: 'person',
-        receivedAt: realClock.now().toISOString(),
-      }),
+    const restored = await store.queue.write(
+      () =>
+        restoreJob(writer, call.params.jobRef, call.ifMatch, {
+          actor: actorOf(call.caller, call.address),
+          source: 'person',
+          receivedAt: realClock.now().toISOString(),
+        }),
+      personIdOf(call.caller),
     );
     return { body: restored, headers: { ETag: tagOf(restored.revision) } };
   });

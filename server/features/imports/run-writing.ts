@@ -77,13 +77,15 @@ async function written(
     for await (const text of pieces) {
       const piece = JSON.parse(text) as RowsToWrite & { problem?: string };
       if (piece.problem !== undefined) return { state: 'stopped', problem: piece.problem };
-      sum = await writePiece(bench, record, piece, sum, () =>
-        writeRows(bench.store, bench.branch, piece.rows, world, {
-          actor: sender.actor,
-          source: 'file',
-          receivedAt: bench.tools.now().toISOString(),
-        }),
-      );
+      sum = await writePiece(bench, record, piece, sum, {
+        by: sender.actor.personId,
+        write: () =>
+          writeRows(bench.store, bench.branch, piece.rows, world, {
+            actor: sender.actor,
+            source: 'file',
+            receivedAt: bench.tools.now().toISOString(),
+          }),
+      });
       work.live = { done: piece.done, of: record.rowsOf };
       if (isStopped(work)) return endOf(work);
     }
@@ -101,7 +103,7 @@ async function writePiece(
   { id }: SentImport,
   piece: RowsToWrite,
   before: Written,
-  write: () => ReturnType<typeof writeRows>,
+  { by, write }: { by: number; write: () => ReturnType<typeof writeRows> },
 ): Promise<Written> {
   const done = await store.queue.write(() => {
     const { written, refused } = write();
@@ -113,7 +115,7 @@ async function writePiece(
     };
     new ImportWriter(store, branch).change(id, { rowsDone: piece.done, written: sum });
     return { sum, refused };
-  });
+  }, by);
   keepRefused(folder.refusedOf(id), done.refused);
   return done.sum;
 }

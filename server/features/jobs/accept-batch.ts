@@ -33,7 +33,7 @@ export async function acceptBatch(
     const slice = await store.queue.write(() => {
       const writer = new BranchWriter(store, branch);
       return read.map((item) => acceptItem(writer, item, sending));
-    });
+    }, sending.actor.personId);
     results.push(...slice);
   }
   const counts = { created: 0, replaced: 0, unchanged: 0, rejected: 0 };

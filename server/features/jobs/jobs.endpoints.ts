@@ -4,7 +4,7 @@ import { billJob, getJob, putJob, putJobBatch, voidJob } from '#shared/contracts
 import { localDate } from '#shared/domain/calendar';
 import { breaksOfJob, type JobWorld } from '#shared/domain/job-rules';
 import { notFound } from '#shared/domain/refusal';
-import { actorOf, moneyFor, type Caller } from '../../auth/caller';
+import { actorOf, moneyFor, type Caller, personIdOf } from '../../auth/caller';
 import { realClock } from '../../clock';
 import { mount, namedBranch, type Call, type Mounting } from '../../http/mount';
 import type { Kit } from '../../kit';
@@ -27,11 +27,13 @@ export function mountJobs(mounting: Mounting, kit: Kit): void {
     putJob,
     async (call) => {
       const branch = namedBranch(call);
-      const accepted = await store.queue.write(() =>
-        acceptJob(new BranchWriter(store, branch), call.params.jobRef, call.body, {
-          ...sendingOf(kit, call, call.params.jobRef),
-          source: sourceOf(call),
-        }),
+      const accepted = await store.queue.write(
+        () =>
+          acceptJob(new BranchWriter(store, branch), call.params.jobRef, call.body, {
+            ...sendingOf(kit, call, call.params.jobRef),
+            source: sourceOf(call),
+          }),
+        personIdOf(call.caller),
       );
       return {
         status: accepted.status === 'created' ? 201 : 200,
@@ -79,7 +81,7 @@ export function mountJobs(mounting: Mounting, kit: Kit): void {
       const sending = sendingOf(kit, call, call.params.jobRef);
       checkPreconditions(sending.preconditions, stored);
       writer.voidJob(call.params.jobRef, stored, sending);
-    });
+    }, personIdOf(call.caller));
     return {};
   });
 
@@ -88,13 +90,15 @@ export function mountJobs(mounting: Mounting, kit: Kit): void {
     billJob,
     async (call) => {
       const branch = namedBranch(call);
-      const accepted = await store.queue.write(() =>
-        writeBill(
-          new BranchWriter(store, branch),
-          call.params.jobRef,
-          call.body,
-          sendingOf(kit, call, call.params.jobRef),
-        ),
+      const accepted = await store.queue.write(
+        () =>
+          writeBill(
+            new BranchWriter(store, branch),
+            call.params.jobRef,
+            call.body,
+            sendingOf(kit, call, call.params.jobRef),
+          ),
+        personIdOf(call.caller),
       );
       return { body: accepted, headers: { ETag: tagOf(accepted.revision) } };
     },

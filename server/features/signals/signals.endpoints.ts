@@ -65,7 +65,7 @@ export function mountSignals(mounting: Mounting, kit: Kit): void {
       const signal = await store.queue.write(() =>
         acknowledge(writer, params.id, body.note, acknowledging),
       );
-      kit.live.tell({ kind: 'signals', branchId: writer.branch.id, count: 1 });
+      kit.live.tell({ kind: 'signals', branchId: writer.branch.id, count: 1, by: caller.id });
       return { body: signal };
     },
     { exists: (named) => found(named) !== undefined },

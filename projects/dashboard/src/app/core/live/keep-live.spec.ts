@@ -80,6 +80,13 @@ describe('keepLive', () => {
     expect(said).toEqual([[first, second]]);
   });
 
+  it('given the person’s own change, asks as for any other', () => {
+    const { hear, pass, refreshed } = set();
+    hear({ ...jobs('HAV'), own: true });
+    pass(700);
+    expect(refreshed()).toBe(1);
+  });
+
   it('given further changes, asks at most once in ten seconds', () => {
     const { answer, hear, pass, refreshed } = set();
     hear(jobs('HAV'));

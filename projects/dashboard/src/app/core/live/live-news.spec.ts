@@ -63,6 +63,17 @@ describe('LiveNews', () => {
     expect(announced.map(([sentence]) => sentence.slice(0, 9))).toEqual(['1 new job']);
   });
 
+  it('given what the person did themselves, says nothing of it, and others’ as ever', () => {
+    const { announced, news, shown } = set();
+    news.tell([{ ...jobs(2), own: true }]);
+    jest.advanceTimersByTime(60_000);
+    expect([shown(), announced]).toEqual(['', []]);
+    news.tell([{ ...jobs(2), own: true }, jobs(3)]);
+    jest.advanceTimersByTime(0);
+    expect(shown()).toMatch(/^3 new jobs from Havnsund/);
+    expect(announced).toHaveLength(1);
+  });
+
   it('after it could be read, takes the line away', () => {
     const { news, shown } = set();
     news.tell([jobs(1)]);

@@ -33,9 +33,9 @@ export class LiveNews {
     });
   }
 
-  /** Tells of changes that the page shows by now. */
+  /** Tells of changes that the page shows by now; what the person did themselves was told where they did it. */
   tell(events: readonly LiveEvent[]): void {
-    const fresh = events.filter((event) => !this.known.has(event));
+    const fresh = events.filter((event) => event.own !== true && !this.known.has(event));
     if (fresh.length === 0) return;
     for (const event of fresh) this.known.add(event);
     this.waiting.push(...fresh);
