@@ -9,7 +9,16 @@ export interface Windows {
 export function otherWindows(hear: () => void): Windows {
   if (typeof BroadcastChannel === 'undefined') return { tell: () => undefined };
   const channel = new BroadcastChannel('underseam.drafts');
+  let isOpen = true;
   channel.onmessage = () => hear();
-  inject(DestroyRef).onDestroy(() => channel.close());
-  return { tell: () => channel.postMessage('changed') };
+  inject(DestroyRef).onDestroy(() => {
+    isOpen = false;
+    channel.close();
+  });
+  return {
+    // What was being written as the window went is kept all the same: a closed channel must not make that a failure.
+    tell: () => {
+      if (isOpen) channel.postMessage('changed');
+    },
+  };
 }
