@@ -1,5 +1,6 @@
 /** Two projects: everything that runs on Node (server), and the dashboard under jsdom (client). */
 const conditions = ['underseam-source'];
+const testing = '<rootDir>/projects/dashboard/src/app/testing';
 
 export default {
   // Both cores; a worker that has grown is begun anew before it slows down.
@@ -30,7 +31,14 @@ export default {
       preset: 'jest-preset-angular',
       roots: ['<rootDir>/projects/dashboard/src'],
       testEnvironmentOptions: { customExportConditions: [...conditions, 'browser'] },
-      setupFilesAfterEnv: ['<rootDir>/projects/dashboard/src/app/testing/setup.ts'],
+      // Angular is set up by whoever imports it (testing/angular-testing.cjs), not for every file.
+      moduleNameMapper: {
+        '^@angular/core$': `${testing}/angular-core.cjs`,
+        '^@angular/core/testing$': `${testing}/angular-testing.cjs`,
+        '^angular-core-itself$': '<rootDir>/node_modules/@angular/core/fesm2022/core.mjs',
+        '^angular-testing-itself$': '<rootDir>/node_modules/@angular/core/fesm2022/testing.mjs',
+      },
+      setupFilesAfterEnv: [`${testing}/setup.ts`],
       transform: {
         '^.+\\.(ts|mjs|js|html|svg)$': [
           'jest-preset-angular',
