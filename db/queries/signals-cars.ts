@@ -105,17 +105,6 @@ export function listMovingCars(
     .map(({ ref }) => ref);
 }
 
-/** References by job id of some jobs. */
-export function readJobRefs(db: ScopedDb, jobIds: readonly number[]): Map<number, string> {
-  const rows = db.all<{ id: number; ref: string }>(
-    db
-      .table('jobs')
-      .whereRaw('id in (select value from json_each(?))', [JSON.stringify(jobIds)])
-      .select('id', { ref: 'job_ref' }),
-  );
-  return new Map(rows.map(({ id, ref }) => [id, ref]));
-}
-
 /** An unbilled car; `costCents` null where a cost is not known (rule 11). */
 export interface UnbilledRow {
   branchId: number;

@@ -144,22 +144,41 @@ export function readCoveredClaims(
   asOf: string,
   claims: Knex.Raw = sql.raw('claims'),
 ): CoveredClaim[] {
-  return reader.all<CoveredClaim>(
-    facts
-      .join(claims, 'claims.job_id', 'job_facts.job_id')
-      .where('claims.made_on', '<=', asOf)
-      .select({
-        branchId: 'job_facts.branch_id',
-        packageId: 'job_facts.package_id',
-        band: 'job_facts.age_band',
-        completedOn: 'job_facts.completed_on',
-        warrantyMonths: 'job_facts.warranty_months',
-        madeOn: 'claims.made_on',
-        decision: 'claims.decision',
-        decidedOn: 'claims.decided_on',
-        cause: 'claims.cause',
-      }),
+  return reader.all<CoveredClaim>(coveredClaims(facts, asOf, claims));
+}
+
+/** The claims of a scope made by a day on cars asked for, in the order in which they came, each with its car's reference. */
+export function readClaimsOnCars(
+  db: ScopedDb,
+  filters: JobFilters,
+  asOf: string,
+): (CoveredClaim & { ref: string })[] {
+  return db.all(
+    coveredClaims(whereJobs(db.table('job_facts'), filters), asOf, db.derived('claims'))
+      .orderBy('claims.id')
+      .select({ ref: 'job_facts.job_ref' }),
   );
+}
+
+function coveredClaims(
+  facts: Knex.QueryBuilder,
+  asOf: string,
+  claims: Knex.Raw,
+): Knex.QueryBuilder {
+  return facts
+    .join(claims, 'claims.job_id', 'job_facts.job_id')
+    .where('claims.made_on', '<=', asOf)
+    .select({
+      branchId: 'job_facts.branch_id',
+      packageId: 'job_facts.package_id',
+      band: 'job_facts.age_band',
+      completedOn: 'job_facts.completed_on',
+      warrantyMonths: 'job_facts.warranty_months',
+      madeOn: 'claims.made_on',
+      decision: 'claims.decision',
+      decidedOn: 'claims.decided_on',
+      cause: 'claims.cause',
+    });
 }
 
 function checkColumn(check: string): string {

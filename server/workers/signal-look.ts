@@ -1,4 +1,5 @@
 import type { NetworkReference } from '#db/network-reference';
+import { whereJobs } from '#db/queries/job-filters';
 import { readNetwork } from '#db/queries/network';
 import { listDangersDue, readArrivals } from '#db/queries/signals-arrivals';
 import {
@@ -6,10 +7,9 @@ import {
   listCheckedCars,
   listMovingCars,
   listUnbilledBefore,
-  readJobRefs,
   readTimedCars,
 } from '#db/queries/signals-cars';
-import { readClaims, readWarrantyCars } from '#db/queries/warranty';
+import { readClaims, readClaimsOnCars, readCoverByBranch } from '#db/queries/warranty';
 import type { ScopedBranch } from '#db/scope';
 import type { ScopedDb } from '#db/scoped-db';
 import { addDays, localDate, mondayOf, mondayOfWeek } from '#shared/domain/calendar';
@@ -18,7 +18,7 @@ import type { FactsByKind } from '#shared/domain/signal-facts';
 import { BRANCH_MEASURES } from '#shared/domain/vocabulary';
 import { answerBranches } from '../features/branches/answer-branches';
 import { answerMargin } from '../features/margin/answer-margin';
-import { claimsByWeek } from '../features/signals/claims-by-week';
+import { claimWeeks } from '../features/signals/claim-weeks';
 import { detectComeBacksDue } from '../features/signals/detect-come-backs-due';
 import {
   detectDriftClaims,
@@ -178,13 +178,10 @@ function overruns({ db, today }: Look): FoundSignal[] {
 }
 
 function claims({ db, today }: Look): FoundSignal[] {
-  const cars = readWarrantyCars(db, {});
-  const made = readClaims(db, today);
-  const refs = readJobRefs(
-    db,
-    made.map(({ jobId }) => jobId),
-  );
-  const branches = claimsByWeek(cars, made, (jobId) => refs.get(jobId) ?? '', {
+  // Where it is tomorrow already, a branch may have finished cars that are under no cover yet.
+  const filters = { to: today };
+  const cars = readCoverByBranch(db, whereJobs(db.table('job_facts'), filters));
+  const branches = claimWeeks(cars, readClaimsOnCars(db, filters, today), {
     end: mondayOf(today),
     weeks: EARLIER_CLAIM_WEEKS + JUDGED_CLAIM_WEEKS,
     today,

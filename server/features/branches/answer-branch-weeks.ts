@@ -1,15 +1,18 @@
 import { readBranchWeeks, type BranchWeekSums } from '#db/queries/branch-weeks';
 import { countCosted } from '#db/queries/count-costed';
 import { readTargets } from '#db/queries/targets';
+import { readClaimsOnCars, readCoverByBranch } from '#db/queries/warranty';
+import { whereJobs } from '#db/queries/job-filters';
 import type { ScopedDb } from '#db/scoped-db';
 import type { BranchWeeks, BranchWeeksAnswer } from '#shared/contracts/branches';
+import { carsUnderCover, claimsByStretch, countedClaims } from '#shared/domain/claims-by-week';
 import { addDays, mondayOf, mondayOfWeek, weeksTouching } from '#shared/domain/calendar';
 import type { Period } from '#shared/domain/period';
 import { FEWEST_CARS } from '#shared/domain/small-samples';
 import { BASELINE_WEEKS, usualRange } from '#shared/domain/usual-range';
 import type { BranchMeasure } from '#shared/domain/vocabulary';
+import { CoverBook } from '#shared/domain/warranty-cover';
 import { chartSignals } from '#shared/stats/chart-signals';
-import { claimsByDays } from './claims-by-week';
 import type { BranchesQuestion } from './place-branches';
 
 /** A week of the period: its days in it, and whether all of them are and are over (rule 7). */
@@ -102,23 +105,22 @@ function claimWeeks(
   { filters, today }: BranchesQuestion,
   weeks: readonly AskedWeek[],
 ): Map<number, ToldWeeks> {
-  const counted = claimsByDays(db, filters, weeks, today);
-  const shown = [...counted].filter(([, { cars, claims }]) =>
-    [...cars, ...claims].some((count) => count > 0),
-  );
+  const asked = readClaimsOnCars(db, filters, today);
+  const made = claimsByStretch(countedClaims(asked, new CoverBook(today), today), weeks);
+  const sold = readCoverByBranch(db, whereJobs(db.table('job_facts'), filters));
   return new Map(
-    shown.map(([id, { claims, cars }]) => [
-      id,
-      {
-        limits: null,
-        weeks: weeks.map(({ week }, place) => ({
-          week,
-          cars: cars[place] ?? 0,
-          value: (cars[place] ?? 0) > 0 ? (claims[place] ?? 0) : null,
-          signal: null,
-        })),
-      },
-    ]),
+    sold.flatMap(({ branchId, ...lists }): [number, ToldWeeks][] => {
+      const cars = carsUnderCover(lists, weeks, today);
+      const claims = weeks.map((_, place) => made.get(branchId)?.[place]?.length ?? 0);
+      if (![...cars, ...claims].some((count) => count > 0)) return [];
+      const told = weeks.map(({ week }, place) => ({
+        week,
+        cars: cars[place] ?? 0,
+        value: (cars[place] ?? 0) > 0 ? (claims[place] ?? 0) : null,
+        signal: null,
+      }));
+      return [[branchId, { limits: null, weeks: told }]];
+    }),
   );
 }
 
