@@ -1,3 +1,4 @@
+import { widestText } from '../text-width';
 import type { FunnelInput, FunnelPoint } from './funnel-input';
 import { layOutFunnel } from './funnel-layout';
 
@@ -102,6 +103,19 @@ describe('layOutFunnel', () => {
     expect(between).toBeGreaterThan((bottom - top) / 2);
     expect(branches[0]!.upper998).toBe(top);
   });
+
+  it.each([296, 1000])(
+    'thousands of cars, %d px wide: counts stand clear of each other',
+    (width) => {
+      const many = [1400, 1900, 2300, 2600, 3100].map((cars) => point(`B${cars}`, { cars }));
+      const { cars } = layOutFunnel(input(many), width);
+      expect(cars.length).toBeGreaterThan(1);
+      const ends = cars.map(({ x, text }) => ({ x, half: widestText([text]) / 2 }));
+      ends.slice(1).forEach(({ x, half }, before) => {
+        expect(x - half).toBeGreaterThan(ends[before]!.x + ends[before]!.half);
+      });
+    },
+  );
 
   it('one branch: stands in the middle of its own limits', () => {
     const { branches, left, right, top, bottom, labels } = layOutFunnel(

@@ -44,6 +44,8 @@ const LEAST_APART = 2;
 /** Limits run on a little beyond the first and the last branch, px. */
 const BEYOND = 18;
 const BEYOND_ONE = 90;
+/** Between two counts under the picture, px. */
+const BETWEEN_COUNTS = 6;
 
 /** Lays out the funnel for a width in px. Pure: the same input and width give the same picture. */
 export function layOutFunnel(input: FunnelInput, width: number): FunnelLayout {
@@ -109,11 +111,12 @@ export function layOutFunnel(input: FunnelInput, width: number): FunnelLayout {
     bottom,
     zero: y(0),
     ticks,
-    cars: x
-      .ticks(narrow ? 4 : 8)
-      .flatMap((count) =>
-        Number.isInteger(count) ? [{ x: x(count), text: formatCount(count) }] : [],
-      ),
+    cars: readable(
+      x
+        .ticks(narrow ? 4 : 8)
+        .filter((count) => Number.isInteger(count))
+        .map((count) => ({ x: x(count), text: formatCount(count) })),
+    ),
     branches,
     wash: branches.length > 0 ? `${pathOf([...upper95, ...[...lower95].reverse()])}Z` : '',
     limits95: [pathOf(upper95), pathOf(lower95)],
@@ -148,6 +151,17 @@ function reach(points: readonly FunnelPoint[]): [number, number] {
 
 function lowerMedian(values: readonly number[]): number {
   return [...values].sort((a, b) => a - b)[Math.floor((values.length - 1) / 2)] ?? 0;
+}
+
+/** Those of some counts, from the left, that do not run into the one before. */
+function readable<Count extends { x: number; text: string }>(counts: readonly Count[]): Count[] {
+  let end = -Infinity;
+  return counts.filter(({ x, text }) => {
+    const half = widestText([text]) / 2;
+    if (x - half < end + BETWEEN_COUNTS) return false;
+    end = x + half;
+    return true;
+  });
 }
 
 function pathOf(points: readonly (readonly [number, number])[]): string {
