@@ -29,6 +29,10 @@ import {
 const text = (date: Date) => format(date, 'yyyy-MM-dd');
 const day = fc.integer({ min: dayNumber('1000-01-01'), max: dayNumber('9998-12-31') });
 const date = day.map(dateOfDay);
+/** Days that stay within the calendar when 400 are added or taken. */
+const amid = fc
+  .integer({ min: dayNumber('1002-01-01'), max: dayNumber('9996-12-31') })
+  .map(dateOfDay);
 const plausible = fc
   .integer({ min: dayNumber('1950-01-01'), max: dayNumber('2100-12-31') })
   .map(dateOfDay);
@@ -53,8 +57,7 @@ describe('dayNumber and dateOfDay', () => {
 describe('addDays, daysBetween and mondayOf', () => {
   it('given any day, agree with date-fns', () => {
     fc.assert(
-      fc.property(date, fc.integer({ min: -400, max: 400 }), (from, days) => {
-        fc.pre(from > '1002' && from < '9997');
+      fc.property(amid, fc.integer({ min: -400, max: 400 }), (from, days) => {
         const to = addDays(from, days);
         expect(to).toBe(text(addDaysOfLibrary(parseISO(from), days)));
         expect(daysBetween(from, to)).toBe(days);
