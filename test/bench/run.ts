@@ -2,6 +2,7 @@ import { mkdtempSync, rmSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { askModule } from '../support/ask-module';
+import { benchBranches } from './branches';
 import { benchImports } from './imports';
 import { benchIngest } from './ingest';
 import { benchPage } from './page';
@@ -11,7 +12,7 @@ import { benchUnderneath } from './underneath';
 
 const FIND_CHROMIUM = join(__dirname, '..', 'support', 'find-chromium.mjs');
 
-/** `npm run bench [ingest] [imports] [reads] [underneath] [page]`: compares ours with a yardstick in one run; without names, everything. */
+/** `npm run bench [ingest] [imports] [reads] [underneath] [branches] [page]`: compares ours with a yardstick in one run; without names, everything. */
 async function main(): Promise<void> {
   const asked = process.argv.slice(2);
   const jobs = Number(process.env['BENCH_JOBS'] ?? 100_000);
@@ -23,6 +24,7 @@ async function main(): Promise<void> {
     imports: () => benchImports(folder, Number(process.env['BENCH_ROWS'] ?? 200_000), today),
     reads: () => benchReads(folder, jobs, today),
     underneath: () => benchUnderneath(folder, sizes, today),
+    branches: () => benchBranches(folder, sizes, today),
     page: async () => {
       const browser = askModule(FIND_CHROMIUM, 'findChromium', []);
       if (typeof browser !== 'string') throw new Error('the page bench needs Chromium; set CHROME');

@@ -1,98 +1,19 @@
 import { join } from 'node:path';
-import { openReader, type Connection } from '#db/database';
 import { addDays, mondayOf } from '#shared/domain/calendar';
 import { STAGES } from '#shared/domain/vocabulary';
-import { addOffice, get, signInOffice, timed } from './ask';
-import { fill } from './fill';
-import { median, ratioLine, type Line } from './report';
-import { serve } from './serve';
-import { Yardstick } from './yardstick';
-
-const ROUNDS = 9;
-
-/** One answer, what it must at least read, and the same numbers asked of the yardstick. */
-interface Compared {
-  name: string;
-  path: string;
-  floor: readonly string[];
-  yardstick: readonly string[];
-}
+import { compareAnswers, type Compared } from './answers';
+import type { Line } from './report';
 
 /**
- * The answers about what lies underneath, over the default year and all branches and over one branch, through the API; at each
- * size against the bare SQL and the yardstick, and from one size to the next. The yardstick computes every count, sum and
- * quantile of the answer, not its intervals, models' shrinkage or slope.
+ * The answers about what lies underneath, over the default year and all branches and over one branch. The yardstick computes
+ * every count, sum and quantile of the answer, not its intervals, models' shrinkage or slope.
  */
-export async function benchUnderneath(
+export function benchUnderneath(
   folder: string,
   sizes: readonly number[],
   today: string,
 ): Promise<Line[]> {
-  const data = join(folder, 'underneath');
-  const lines: Line[] = [];
-  const before = new Map<string, number>();
-  let already = 0;
-  for (const jobs of sizes) {
-    await fill(data, jobs, today, already);
-    if (already === 0) await addOffice(data);
-    already = jobs;
-    const bare = openReader(join(data, 'underseam.sqlite'));
-    const yardstick = await Yardstick.of(bare);
-    const served = await serve(data, { UNDERSEAM_NOW: `${today}T12:00:00Z` });
-    const token = await signInOffice(served.url);
-    for (const compared of everyAnswer(today)) {
-      const { ours, floor, theirs } = await measure(compared, served.url, token, bare, yardstick);
-      const what = `${compared.name}, ${jobs} jobs, through the API, ms`;
-      lines.push(
-        ratioLine(what, ours, 'the bare SQL over the same rows, ms', floor, 'aim at most 3'),
-        ratioLine(what, ours, 'the columnar engine over the same rows, ms', theirs, 'told, no aim'),
-      );
-      const smaller = before.get(compared.name);
-      if (smaller !== undefined) {
-        lines.push(
-          ratioLine(
-            what,
-            ours,
-            'the same at the size before, ms',
-            smaller,
-            'growth of the jobs is the aim',
-          ),
-        );
-      }
-      before.set(compared.name, ours);
-    }
-    await served.stop();
-    yardstick.close();
-    bare.close();
-  }
-  return lines;
-}
-
-async function measure(
-  { path, floor, yardstick: questions }: Compared,
-  url: string,
-  token: string,
-  bare: Connection,
-  yardstick: Yardstick,
-): Promise<{ ours: number; floor: number; theirs: number }> {
-  const times: { ours: number[]; floor: number[]; theirs: number[] } = {
-    ours: [],
-    floor: [],
-    theirs: [],
-  };
-  // In turn, so that whatever else the machine does falls on all of them; the first round warms up.
-  for (let round = 0; round <= ROUNDS; round += 1) {
-    const ours = await timed(() => get(url + path, token));
-    const least = await timed(() => {
-      for (const text of floor) bare.driver.prepare(text).raw().all();
-    });
-    const theirs = await timed(() => yardstick.ask(...questions));
-    if (round === 0) continue;
-    times.ours.push(ours);
-    times.floor.push(least);
-    times.theirs.push(theirs);
-  }
-  return { ours: median(times.ours), floor: median(times.floor), theirs: median(times.theirs) };
+  return compareAnswers({ data: join(folder, 'underneath'), sizes, today }, everyAnswer(today));
 }
 
 function everyAnswer(today: string): Compared[] {

@@ -8,6 +8,8 @@ const TABLES = {
     branch_id: 'integer',
     completed_on: 'date',
     age_band: 'tinyint',
+    has_estimate: 'tinyint',
+    est_minutes: 'integer',
     model_key: 'varchar',
     body_type: 'varchar',
     package_id: 'integer',
