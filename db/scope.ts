@@ -16,6 +16,9 @@ export interface Grant {
   readonly regionCodes: readonly string[];
 }
 
+/** What head office has: every branch. The work of schedules is done as it. */
+export const HEAD_OFFICE: Grant = { role: 'head_office', branchIds: [], regionCodes: [] };
+
 /**
  * The branches whose rows a caller may see. It can be made from a grant and narrowed by what was asked for, never widened;
  * its constructor is private so that no other code can make one.

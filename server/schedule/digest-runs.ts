@@ -8,7 +8,7 @@ import {
 } from '#db/queries/digest-runs';
 import { wantsMail } from '#db/queries/mail-choices';
 import { listPeople, type Person } from '#db/queries/people';
-import { Scope } from '#db/scope';
+import { HEAD_OFFICE, Scope } from '#db/scope';
 import { issueUnsubscribeToken } from '../auth/unsubscribe-token';
 import { readSecret } from '../auth/secret';
 import { dayReachedIn, realClock, todayIn } from '../clock';
@@ -134,8 +134,6 @@ export class DigestRuns {
     );
   }
 }
-
-const HEAD_OFFICE = { role: 'head_office', branchIds: [], regionCodes: [] } as const;
 
 /** What a person's figures and letter depend on. */
 function placeOf({ email, name, role, regions, branches }: Person): string {

@@ -1,14 +1,13 @@
 import { Cron } from 'croner';
 import type { Logger } from 'pino';
 import { findRun, insertRun, readSchedule } from '#db/queries/warranty-schedule';
-import { Scope } from '#db/scope';
+import { HEAD_OFFICE, Scope } from '#db/scope';
 import { realClock, todayIn } from '../clock';
 import { beginReport, keepReport } from '../features/warranty-reports/issue-report';
 import { monthDue, type DueMonth } from '../features/warranty-reports/month-due';
 import type { Kit } from '../kit';
 
 const EVERY_HOUR = '0 * * * *';
-const HEAD_OFFICE = { role: 'head_office', branchIds: [], regionCodes: [] } as const;
 const SYSTEM = { label: 'system', personId: null, pushKeyId: null, address: 'local' } as const;
 
 type Tools = Pick<Kit, 'store' | 'clock' | 'reads' | 'outbox'>;

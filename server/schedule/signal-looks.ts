@@ -1,14 +1,13 @@
 import { Cron } from 'croner';
 import type { Logger } from 'pino';
 import { LookWriter } from '#db/signal-writer';
-import { Scope } from '#db/scope';
+import { HEAD_OFFICE, Scope } from '#db/scope';
 import { realClock, todayIn } from '../clock';
 import type { FoundSignal } from '../features/signals/found-signal';
 import { reconcile, type Reconciled } from '../features/signals/reconcile';
 import type { Kit } from '../kit';
 
 const EVERY_HOUR = '0 * * * *';
-const HEAD_OFFICE = { role: 'head_office', branchIds: [], regionCodes: [] } as const;
 
 type Tools = Pick<Kit, 'store' | 'clock' | 'reads' | 'live'>;
 

@@ -1,8 +1,8 @@
 import { join } from 'node:path';
 import type { Connection } from '#db/database';
-import { Scope } from '#db/scope';
+import { HEAD_OFFICE, Scope } from '#db/scope';
 import { Store } from '#db/store';
-import { addDays, mondayOf } from '#shared/domain/calendar';
+import { defaultPeriod } from '#shared/domain/period';
 import { STAGES } from '#shared/domain/vocabulary';
 import { ReadPool } from '#server/workers/read-pool';
 import { compareAnswers, type Compared } from './answers';
@@ -27,53 +27,42 @@ export function benchBranches(
 }
 
 function everyAnswer(today: string): Compared[] {
-  const from = addDays(mondayOf(today), -51 * 7);
-  const year = `completed_on between '${from}' and '${today}'`;
-  const path = '/api/analytics/branches';
-  const cells = squaresOf('has_estimate = 1', 'act_minutes', 'est_minutes', year);
-  const normed = squaresOf('norm_ml > 0', 'normed_ml', 'norm_ml', year);
-  const weeks = `select branch_id, ${mondays('completed_on')} as week, count(*), sum(act_minutes),
-    sum(est_minutes) from job_facts where has_estimate = 1 and ${year} group by 1, 2`;
+  const { from, to } = defaultPeriod(today);
+  const year = `completed_on between '${from}' and '${to}'`;
+  const asked = '/api/analytics/branches';
+  const overrun = squaresOf('has_estimate = 1', 'act_minutes', 'est_minutes', year);
+  const three = 'branch=B006&branch=B007&branch=B008';
   return [
-    {
-      name: 'overrun of branches',
-      path: `${path}?measure=overrun`,
-      floor: [cells],
-      yardstick: [cells],
-    },
-    {
-      name: 'product of branches',
-      path: `${path}?measure=product`,
-      floor: [normed],
-      yardstick: [normed],
-    },
+    alike('overrun of branches', `${asked}?measure=overrun`, overrun),
+    alike(
+      'product of branches',
+      `${asked}?measure=product`,
+      squaresOf('norm_ml > 0', 'normed_ml', 'norm_ml', year),
+    ),
     {
       name: 'claims of branches',
-      path: `${path}?measure=claims`,
+      path: `${asked}?measure=claims`,
       floor: [`select branch_id, package_id, age_band, completed_on from job_facts where ${year}`],
+      // 36 months of cover, as the one package of the bench has.
       yardstick: [
         `select branch_id, package_id, age_band, count(*),
           sum(least(date_diff('day', completed_on, date '${today}'), 1096)) from job_facts
           where ${year} group by 1, 2, 3`,
       ],
     },
-    {
-      name: 'weeks of branches',
-      path: `${path}/weeks?measure=overrun`,
-      floor: [weeks.replace(mondays('completed_on'), 'week')],
-      yardstick: [weeks],
-    },
-    {
-      name: 'three branches side by side',
-      path: `${path}/side-by-side?measure=overrun&branch=B006&branch=B007&branch=B008`,
-      floor: [cells],
-      yardstick: [cells],
-    },
+    alike(
+      'weeks of branches',
+      `${asked}/weeks?measure=overrun`,
+      `select branch_id, week, count(*), sum(act_minutes), sum(est_minutes)
+        from job_facts where has_estimate = 1 and ${year} group by 1, 2`,
+    ),
+    alike('three branches side by side', `${asked}/side-by-side?measure=overrun&${three}`, overrun),
   ];
 }
 
-function mondays(day: string): string {
-  return `date_trunc('week', ${day})`;
+/** An answer whose sums both engines are asked for in the same words. */
+function alike(name: string, path: string, question: string): Compared {
+  return { name, path, floor: [question], yardstick: [question] };
 }
 
 /** Sums, squares and stages of a ratio by branch, package and age. */
@@ -93,8 +82,7 @@ async function lookLine(
 ): Promise<Line> {
   const store = await Store.open(data);
   const reads = new ReadPool(store.file);
-  const office = { role: 'head_office', branchIds: [], regionCodes: [] } as const;
-  const scope = Scope.ofGrant(store.state.branches, office);
+  const scope = Scope.ofGrant(store.state.branches, HEAD_OFFICE);
   const question = { today, now: `${today}T12:00:00.000Z` };
   const [ours, floor]: [number[], number[]] = [[], []];
   for (let round = 0; round <= LOOKS; round += 1) {

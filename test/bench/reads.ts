@@ -1,6 +1,6 @@
 import { join } from 'node:path';
 import { openReader, type Connection } from '#db/database';
-import { addDays, mondayOf } from '#shared/domain/calendar';
+import { defaultPeriod } from '#shared/domain/period';
 import { STAGES } from '#shared/domain/vocabulary';
 import { addOffice, get, signInOffice, timed } from './ask';
 import { fill } from './fill';
@@ -16,7 +16,7 @@ export async function benchReads(folder: string, jobs: number, today: string): P
   await addOffice(data);
   const served = await serve(data, { UNDERSEAM_NOW: `${today}T12:00:00Z` });
   const token = await signInOffice(served.url);
-  const from = addDays(mondayOf(today), -51 * 7);
+  const { from } = defaultPeriod(today);
   const bare = openReader(join(data, 'underseam.sqlite'));
   const lines: Line[] = [];
   for (const [name, path, floor] of [

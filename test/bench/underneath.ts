@@ -1,5 +1,6 @@
 import { join } from 'node:path';
-import { addDays, mondayOf } from '#shared/domain/calendar';
+import { addDays } from '#shared/domain/calendar';
+import { defaultPeriod } from '#shared/domain/period';
 import { STAGES } from '#shared/domain/vocabulary';
 import { compareAnswers, type Compared } from './answers';
 import type { Line } from './report';
@@ -17,7 +18,7 @@ export function benchUnderneath(
 }
 
 function everyAnswer(today: string): Compared[] {
-  const from = addDays(mondayOf(today), -51 * 7);
+  const { from } = defaultPeriod(today);
   const year = `completed_on between '${from}' and '${today}'`;
   const branch = `${year} and branch_id = 7`;
   const seven = 'branch=B006';

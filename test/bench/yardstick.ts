@@ -7,6 +7,7 @@ const TABLES = {
     job_id: 'integer',
     branch_id: 'integer',
     completed_on: 'date',
+    week: 'varchar',
     age_band: 'tinyint',
     has_estimate: 'tinyint',
     est_minutes: 'integer',

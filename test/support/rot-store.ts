@@ -1,5 +1,5 @@
 import { putBranchRow, putRegionRow } from '#db/queries/set-up';
-import { Scope } from '#db/scope';
+import { HEAD_OFFICE, Scope } from '#db/scope';
 import type { SentJob } from '#shared/domain/normalise-job';
 import { unbilledJob } from './kept-job';
 import { SmallStore } from './small-store';
@@ -34,8 +34,7 @@ export async function makeRotStore(): Promise<SmallStore> {
 
 /** What head office may see of a store. */
 export function headOfficeOf({ store }: SmallStore): Scope {
-  const grant = { role: 'head_office', branchIds: [], regionCodes: [] } as const;
-  return Scope.ofGrant(store.state.branches, grant);
+  return Scope.ofGrant(store.state.branches, HEAD_OFFICE);
 }
 
 export type SentFinding = NonNullable<SentJob['findings']>[number];
