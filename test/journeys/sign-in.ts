@@ -26,9 +26,9 @@ export async function typeSignIn(
   await page.getByRole('button', { name: 'Sign in' }).click();
 }
 
-/** Signs a role's person in by typing and waits for their first page. */
+/** Opens the product's own address, as people do, signs a role's person in by typing and waits for their first page. */
 export async function signIn(page: Page, role: Role): Promise<void> {
-  await page.goto('/sign-in');
+  await page.goto('/');
   await typeSignIn(page, personOf(role));
   await page.waitForURL(`**${FIRST_PAGES[role]}`);
   await untilReady(page);

@@ -10,10 +10,14 @@ const headOffice = forRoles('head_office');
 const leads = forRoles('regional_lead', 'head_office');
 const readers = forRoles('site_manager', 'regional_lead', 'head_office');
 
-/** The first page of whoever is signed in; whether a network has begun is asked for head office alone. */
+/**
+ * The first page of whoever is signed in; whether a network has begun is asked for head office alone. Nobody has one: which it
+ * is shows once they have signed in.
+ */
 async function home(): Promise<string> {
   const injector = inject(Injector);
   const role = inject(Session).role();
+  if (!role) return '/sign-in';
   if (role !== 'head_office') return homeOf(role);
   const { firstPage } = await import('./core/session/first-page');
   return firstPage(injector);

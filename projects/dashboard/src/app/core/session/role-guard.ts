@@ -7,8 +7,7 @@ import { Session } from './session';
 /** Lets signed-in people through; others sign in first and come back. */
 export const signedIn: CanActivateFn = (_route, state) => {
   if (inject(Session).person()) return true;
-  const queryParams = state.url === '/' ? {} : { next: state.url };
-  return inject(Router).createUrlTree(['/sign-in'], { queryParams });
+  return inject(Router).createUrlTree(['/sign-in'], { queryParams: { next: state.url } });
 };
 
 /** Lets people of some roles through; others are shown their own first page. */
